@@ -9,6 +9,7 @@ export default defineConfig({
     include: ["tests/**/*.test.ts"],
     pool: "threads",
     testTimeout: 20_000,
+    hookTimeout: 60_000,
     server: { deps: { external: [/\/dist\//] } },
   },
 });

@@ -1,0 +1,57 @@
+import type { Value } from "../graph/node.ts";
+import { add, mul, sub, sum } from "../graph/operations.ts";
+import { fail } from "../ground/errors.ts";
+import { compensatedSum } from "../ground/sum.ts";
+import { defineLaw } from "../law/defineLaw.ts";
+import { ALBEDO } from "../law/ports.ts";
+
+/** How far the shares of a complete cover may be from 1. */
+const SHARE_TOLERANCE = 1e-12;
+
+/**
+ * Albedo of a surface of several covers: α = Σ fᵢαᵢ, or Σ fᵢαᵢ + (1 − Σ fᵢ)·bare where `bare` is the albedo of the rest.
+ * With `bare`, fractions may be quantities and their sum must not exceed 1 (checked in each state); without it they are
+ * numbers that sum to 1 within 1e-12. Fractions and albedos between 0 and 1. Errors: as for every law; `shares-not-one`.
+ * Source: reflected light adds by area.
+ */
+export const mixAlbedo = /* @__PURE__ */ defineLaw({
+  name: "mixAlbedo",
+  about: "Albedo of a surface of several covers, by area.",
+  output: ALBEDO,
+  inputs: {
+    covers: {
+      each: {
+        fraction: { symbol: "f", unit: "1", within: [0, 1], about: "share of the surface" },
+        albedo: ALBEDO,
+      },
+    },
+    bare: { ...ALBEDO, symbol: "α_b", about: "albedo of the rest of the surface", optional: true },
+  },
+  demands: {
+    covered: {
+      unit: "1",
+      within: [0, 1 + SHARE_TOLERANCE],
+      about: "sum of the fractions",
+      write: ({ covers }) => sum(...covers.map((c) => c.fraction)),
+    },
+  },
+  source: "reflected light adds by area",
+  write({ covers, bare }) {
+    const covered = sum(...covers.map((c) => c.fraction));
+    const reflected = sum(...covers.map((c) => mul(c.fraction, c.albedo)));
+    if (bare !== undefined) return add(reflected, mul(sub(1, covered), bare));
+    checkShares(covers.map((c) => c.fraction));
+    return reflected;
+  },
+});
+
+function checkShares(fractions: readonly Value[]): void {
+  const path = "mixAlbedo.covers";
+  const shares = fractions.filter((f): f is number => typeof f === "number");
+  if (shares.length < fractions.length) {
+    fail("shares-not-one", { path, value: "quantities", allowed: "1; give the albedo of the rest as bare" });
+  }
+  const total = compensatedSum(shares);
+  if (!(Math.abs(total - 1) <= SHARE_TOLERANCE))
+    fail("shares-not-one", { path, value: total, allowed: "1 within 1e-12" });
+}

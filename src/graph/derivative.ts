@@ -1,0 +1,100 @@
+// Symbolic derivatives: more nodes of the same graph, read like any other.
+import { coneOf } from "./cone.ts";
+import type { Graph, Op } from "./node.ts";
+
+type Rule = (x: DerivativeOf) => number;
+/** What a rule sees of its node: ids, and the derivatives of the arguments (`undefined`: zero). */
+interface DerivativeOf {
+  readonly w: Writer;
+  readonly id: number;
+  readonly args: readonly number[];
+  readonly d: readonly (number | undefined)[];
+}
+
+/**
+ * Node of ∂ node / ∂ `wrt`, with the nodes in `held` taken as constant. It has no twin in numbers, so it simplifies
+ * freely (0·x, 1·x, −−x). At a kink the derivative of min and max is a `pick`; that of a pick is a `jump`.
+ */
+export function derivative(g: Graph, node: number, wrt: number, held: Iterable<number> = []): number {
+  const leaves = new Set(held);
+  leaves.delete(wrt);
+  const w = new Writer(g);
+  const known = new Map<number, number>([[wrt, g.constant(1)]]);
+  for (const id of coneOf(g, [node], [...leaves, wrt])) {
+    if (known.has(id) || leaves.has(id)) continue;
+    const args = g.args[id] as readonly number[];
+    const d = args.map((a) => known.get(a));
+    if (d.some((x) => x !== undefined)) known.set(id, RULES[g.ops[id] as Op]({ w, id, args, d }));
+  }
+  return known.get(node) ?? g.constant(0);
+}
+
+/** Records the arithmetic of derivatives, with the simplifications that only they may use. */
+class Writer {
+  readonly g: Graph;
+  constructor(g: Graph) {
+    this.g = g;
+  }
+  constant = (value: number): number => this.g.constant(value);
+  zeroIfNone = (id: number | undefined): number => id ?? this.constant(0);
+  is = (id: number, value: number): boolean => this.g.ops[id] === "const" && this.g.values[id] === value;
+  mul(a: number, b: number): number {
+    if (this.is(a, 1)) return b;
+    if (this.is(b, 1)) return a;
+    return this.g.node("mul", [Math.min(a, b), Math.max(a, b)]);
+  }
+  add(a: number | undefined, b: number | undefined): number {
+    if (a === undefined || b === undefined) return (a ?? b) as number;
+    return this.g.node("add", [Math.min(a, b), Math.max(a, b)]);
+  }
+  sub(a: number | undefined, b: number | undefined): number {
+    if (b === undefined) return a as number;
+    return a === undefined ? this.neg(b) : this.g.node("sub", [a, b]);
+  }
+  neg(a: number): number {
+    if (this.g.ops[a] === "neg") return (this.g.args[a] as readonly number[])[0] as number;
+    return this.g.ops[a] === "const" ? this.constant(-(this.g.values[a] as number)) : this.g.node("neg", [a]);
+  }
+  /** a·d where d may be zero. */
+  times = (a: number, d: number | undefined): number | undefined =>
+    d === undefined ? undefined : this.mul(a, d);
+}
+
+const first = (x: DerivativeOf): number => x.d[0] as number;
+const arg = (x: DerivativeOf, i: number): number => x.args[i] as number;
+const choose = (op: "pick" | "jump", x: DerivativeOf, a: number, b: number, i: number): number =>
+  x.w.g.node(op, [a, b, x.w.zeroIfNone(x.d[i]), x.w.zeroIfNone(x.d[i + 1])]);
+
+/** One rule for each operation; a missing one does not compile. */
+const RULES: Readonly<Record<Op, Rule>> = {
+  const: () => 0,
+  input: () => 0,
+  mean: first,
+  neg: (x) => x.w.neg(first(x)),
+  add: (x) => x.w.add(x.d[0], x.d[1]),
+  sub: (x) => x.w.sub(x.d[0], x.d[1]),
+  mul(x) {
+    if (arg(x, 0) === arg(x, 1)) return x.w.mul(x.w.mul(x.w.constant(2), arg(x, 0)), first(x));
+    return x.w.add(x.w.times(arg(x, 1), x.d[0]), x.w.times(arg(x, 0), x.d[1]));
+  },
+  // (a/b)′ = (a′ − (a/b)·b′)/b
+  div: (x) => x.w.g.node("div", [x.w.sub(x.d[0], x.w.times(x.id, x.d[1])), arg(x, 1)]),
+  sqrt: (x) => x.w.g.node("div", [first(x), x.w.mul(x.w.constant(2), x.id)]),
+  exp: (x) => x.w.mul(x.id, first(x)),
+  log: (x) => x.w.g.node("div", [first(x), arg(x, 0)]),
+  // 1 − tanh², from the node itself
+  tanh: (x) => x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), first(x)),
+  min: (x) => choose("pick", x, arg(x, 0), arg(x, 1), 0),
+  max: (x) => choose("pick", x, arg(x, 1), arg(x, 0), 0),
+  pick: (x) => choose("jump", x, arg(x, 0), arg(x, 1), 2),
+  jump: (x) => choose("jump", x, arg(x, 0), arg(x, 1), 2),
+  call(x) {
+    const { g } = x.w;
+    const { partial } = g.functions[g.values[x.id] as number] as Graph["functions"][number];
+    let total: number | undefined;
+    x.args.forEach((_, i) => {
+      if (x.d[i] !== undefined) total = x.w.add(total, x.w.mul(g.call(partial(i), x.args), x.d[i] as number));
+    });
+    return total as number;
+  },
+};

@@ -1,0 +1,87 @@
+// The recordable operations: numbers are folded at once, quantities are recorded. Both give the same bits.
+import { dimensionOf } from "../ground/dimension.ts";
+import { exp as expOf } from "../ground/elementary/exp.ts";
+import { log as logOf } from "../ground/elementary/log.ts";
+import { max as maxOf, min as minOf } from "../ground/elementary/minMax.ts";
+import { tanh as tanhOf } from "../ground/elementary/tanh.ts";
+import { fail } from "../ground/errors.ts";
+import { dimensionOfNode } from "./dimensionOfNode.ts";
+import { type Of, type Op, Quantity, type Value } from "./node.ts";
+
+type One = <N extends string = never>(a: Value<N>) => Of<N>;
+type Two = <N extends string = never>(a: Value<N>, b: Value<N>) => Of<N>;
+type Many = <N extends string = never>(...terms: readonly Value<N>[]) => Of<N>;
+
+function record(op: Op, values: readonly unknown[]): Quantity {
+  const graph = (values.find((v) => v instanceof Quantity) as Quantity | undefined)?.graph;
+  if (!graph)
+    return fail("not-a-quantity", {
+      path: op,
+      value: values.find((v) => typeof v !== "number"),
+      allowed: "",
+    });
+  const ids = values.map((v) => graph.lift(v, op));
+  // a + b and b + a are the same bits, so they are one node
+  if ((op === "add" || op === "mul") && (ids[1] as number) < (ids[0] as number)) ids.reverse();
+  return new Quantity(graph, graph.node(op, ids, { dimension: dimensionOfNode(graph, op, ids) }));
+}
+const one = (op: Op, fold: (a: number) => number): One =>
+  ((a: unknown) => (typeof a === "number" ? fold(a) : record(op, [a]))) as unknown as One;
+const two = (op: Op, fold: (a: number, b: number) => number): Two =>
+  ((a: unknown, b: unknown) =>
+    typeof a === "number" && typeof b === "number" ? fold(a, b) : record(op, [a, b])) as unknown as Two;
+
+/** a + b. */
+export const add: Two = /* @__PURE__ */ two("add", (a, b) => a + b);
+/** a − b. */
+export const sub: Two = /* @__PURE__ */ two("sub", (a, b) => a - b);
+/** a · b. */
+export const mul: Two = /* @__PURE__ */ two("mul", (a, b) => a * b);
+/** a / b. */
+export const div: Two = /* @__PURE__ */ two("div", (a, b) => a / b);
+/** The smaller of two; a kink where they cross. */
+export const min: Two = /* @__PURE__ */ two("min", minOf);
+/** The larger of two; a kink where they cross. */
+export const max: Two = /* @__PURE__ */ two("max", maxOf);
+/** −a. */
+export const neg: One = /* @__PURE__ */ one("neg", (a) => -a);
+/** Square root. */
+export const sqrt: One = /* @__PURE__ */ one("sqrt", Math.sqrt);
+/** Natural exponential of a pure number. */
+export const exp: One = /* @__PURE__ */ one("exp", expOf);
+/** Natural logarithm of a pure number. */
+export const log: One = /* @__PURE__ */ one("log", logOf);
+/** Hyperbolic tangent of a pure number. */
+export const tanh: One = /* @__PURE__ */ one("tanh", tanhOf);
+/** a². */
+export const square: One = (a) => mul(a, a);
+/** a⁴ as (a²)²; never a power function, whose bits differ between engines. */
+export const fourth: One = (a) => square(square(a) as typeof a) as never;
+/** Sum from left to right (the order is part of the result's bits). Throws `missing` without terms. */
+export const sum: Many = (...terms) => chain("sum", add, terms) as never;
+/** Product from left to right. Throws `missing` without factors. */
+export const product: Many = (...factors) => chain("product", mul, factors) as never;
+/** a where `share` is 0, b where it is 1, in proportion between: a + (b − a)·share. */
+export const mix = <N extends string = never>(a: Value<N>, b: Value<N>, share: Value<N>): Of<N> =>
+  add(a, mul(sub(b, a), share) as Value<N>) as Of<N>;
+
+function chain(name: string, op: Two, terms: readonly Value[]): Value {
+  if (terms.length === 0)
+    return fail("missing", { path: name, value: "no terms", allowed: "at least one term" });
+  return terms.slice(1).reduce((total, term) => op(total, term), checkedTerm(name, terms[0] as Value));
+}
+function checkedTerm(name: string, term: Value): Value {
+  if (typeof term === "number" || term instanceof Quantity) return term;
+  return fail("not-a-quantity", { path: name, value: term, allowed: "" });
+}
+
+/** States the unit of a value where it cannot be told, as for a number times an empirical factor. Does not convert. */
+export const inUnit = <N extends string = never>(value: Value<N>, unit: string): Of<N> => {
+  const dimension = dimensionOf(unit);
+  if (typeof value === "number") return value as Of<N>;
+  if (!(value instanceof Quantity)) return fail("not-a-quantity", { path: "inUnit", value, allowed: "" });
+  return new Quantity(
+    value.graph,
+    value.graph.mean(value.id, { kind: "unit", name: unit }, dimension),
+  ) as Of<N>;
+};

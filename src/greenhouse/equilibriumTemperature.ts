@@ -1,0 +1,39 @@
+import { add, div, mul, product, sqrt, sub } from "../graph/operations.ts";
+import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
+import { defineLaw } from "../law/defineLaw.ts";
+import { ALBEDO, FLUX } from "../law/ports.ts";
+
+/** Redistribution factor: heat spread over the whole sphere. */
+export const REDISTRIBUTION_GLOBAL = 0.25;
+/** Redistribution factor: heat spread evenly over the day side. */
+export const REDISTRIBUTION_DAYSIDE = 0.5;
+/** Redistribution factor: heat re-radiated where it falls, the day side seen from the star. */
+export const REDISTRIBUTION_INSTANT = 2 / 3;
+/** Redistribution factor: the substellar point without any transport. */
+export const REDISTRIBUTION_SUBSTELLAR = 1;
+
+/**
+ * Equilibrium temperature: εσT⁴ = f·S(1 − A) + F_i, solved for T in K. It is not the surface temperature.
+ * Stellar flux normal to the beam and internal flux (per unit of whole area, not multiplied by f) in W m⁻², Bond albedo
+ * between 0 and 1, emissivity above 0 (1 unless said). The redistribution factor f between 1/4 and 1 must be given: 1/4
+ * whole sphere, 1/2 day side, 2/3 day side without transport seen from the star, 1 substellar point. Errors: as for every law.
+ * Source: Hansen 2008; Cowan & Agol 2011, ApJ 729, 54.
+ */
+export const equilibriumTemperature = /* @__PURE__ */ defineLaw({
+  name: "equilibriumTemperature",
+  about: "Temperature at which a body re-radiates what it absorbs; not the surface temperature.",
+  output: { symbol: "T_eq", unit: "K", about: "equilibrium temperature" },
+  inputs: {
+    flux: FLUX,
+    albedo: { ...ALBEDO, symbol: "A" },
+    redistribution: { symbol: "f", unit: "1", within: [0.25, 1], about: "redistribution factor" },
+    emissivity: { symbol: "ε", unit: "1", within: [1e-9, 1], default: 1, about: "emissivity" },
+    internalFlux: { symbol: "F_i", unit: "W m-2", within: [0, 1e9], default: 0, about: "internal heat" },
+  },
+  source: "Hansen 2008, ApJS 179, 484; Cowan & Agol 2011, ApJ 729, 54",
+  write({ flux, albedo, redistribution, emissivity, internalFlux }) {
+    const heating = add(product(redistribution, flux, sub(1, albedo)), internalFlux);
+    const fourthPower = div(heating, mul(emissivity, STEFAN_BOLTZMANN));
+    return sqrt(sqrt(fourthPower));
+  },
+});

@@ -1,0 +1,30 @@
+import { add, mul, sub } from "../graph/operations.ts";
+import { defineLaw } from "../law/defineLaw.ts";
+import { OUTGOING, TEMPERATURE } from "../law/ports.ts";
+
+/**
+ * Outgoing longwave radiation as a straight line: F = A + B(T − T₀), in W m⁻².
+ * A at the reference temperature in W m⁻², B in W m⁻² K⁻¹, temperatures in K. B already holds water vapour and lapse rate.
+ * Errors: as for every law. Source: Budyko 1969, Tellus 21, 611 (A 202, B 1.45 with T₀ = 0 °C); North et al. 1981
+ * (203.3, 2.09); straight over at least 60 K on Earth: Koll & Cronin 2018.
+ */
+export const linearEmission = /* @__PURE__ */ defineLaw({
+  name: "linearEmission",
+  about: "Outgoing longwave radiation as a straight line in temperature.",
+  output: OUTGOING,
+  inputs: {
+    temperature: TEMPERATURE,
+    intercept: {
+      symbol: "A",
+      unit: "W m-2",
+      within: [-1e6, 1e6],
+      about: "emission at the reference temperature",
+    },
+    slope: { symbol: "B", unit: "W m-2 K-1", within: [0, 1e4], about: "increase with temperature" },
+    reference: { ...TEMPERATURE, symbol: "T_0", about: "reference temperature" },
+  },
+  published: { temperature: [230, 300] },
+  source: "Budyko 1969, Tellus 21, 611; Koll & Cronin 2018, PNAS 115, 10293",
+  write: ({ temperature, intercept, slope, reference }) =>
+    add(intercept, mul(slope, sub(temperature, reference))),
+});

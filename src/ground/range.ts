@@ -1,0 +1,37 @@
+// A closed range of allowed values, and the one check that everything numeric passes.
+import { fail } from "./errors.ts";
+
+/** Lowest and highest allowed value, both included. */
+export type Range = readonly [number, number];
+
+/** "0 and 1": a range as error messages show it. */
+export const showRange = (range: Range): string => `${range[0]} and ${range[1]}`;
+
+/** Returns `value` if it is a finite number in the range; otherwise an error names the field, the range and the unit. */
+export function checkedNumber(value: unknown, path: string, unit: string, within?: Range): number {
+  if (typeof value !== "number" || !Number.isFinite(value)) {
+    fail("not-a-number", { path, value, allowed: within ? `between ${showRange(within)}` : "", unit });
+  }
+  if (within && !(value >= within[0] && value <= within[1])) {
+    fail("out-of-range", { path, value, allowed: showRange(within), unit });
+  }
+  return value;
+}
+
+/** Returns `range` if it is two increasing finite numbers inside `inside`. */
+export function checkedRange(range: unknown, path: string, unit: string, inside?: Range): Range {
+  if (!Array.isArray(range) || range.length !== 2) {
+    fail("unreadable", { path, value: range, allowed: "two numbers [lowest, highest]", unit });
+  }
+  const low = checkedNumber(range[0], `${path}[0]`, unit, inside);
+  const high = checkedNumber(range[1], `${path}[1]`, unit, inside);
+  if (!(low < high)) {
+    fail("out-of-range", {
+      path: `${path}[1]`,
+      value: high,
+      allowed: `${low} (not included) and above`,
+      unit,
+    });
+  }
+  return [low, high];
+}

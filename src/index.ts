@@ -1,0 +1,60 @@
+// The core door: needs no package.
+export { mixAlbedo } from "./albedo/mixAlbedo.ts";
+export { quadraticAlbedo } from "./albedo/quadraticAlbedo.ts";
+export { rampAlbedo } from "./albedo/rampAlbedo.ts";
+export { tanhAlbedo } from "./albedo/tanhAlbedo.ts";
+export type { LawCard, ListPort, Port, Ports } from "./graph/card.ts";
+export type { Of, Quantity, Value } from "./graph/node.ts";
+export {
+  add,
+  div,
+  exp,
+  fourth,
+  inUnit,
+  log,
+  max,
+  min,
+  mix,
+  mul,
+  neg,
+  product,
+  sqrt,
+  square,
+  sub,
+  sum,
+  tanh,
+} from "./graph/operations.ts";
+export { blackbodyFlux } from "./greenhouse/blackbodyFlux.ts";
+export { blackbodyTemperature } from "./greenhouse/blackbodyTemperature.ts";
+export {
+  equilibriumTemperature,
+  REDISTRIBUTION_DAYSIDE,
+  REDISTRIBUTION_GLOBAL,
+  REDISTRIBUTION_INSTANT,
+  REDISTRIBUTION_SUBSTELLAR,
+} from "./greenhouse/equilibriumTemperature.ts";
+export { greyColumnEmission } from "./greenhouse/greyColumnEmission.ts";
+export { greyEmission } from "./greenhouse/greyEmission.ts";
+export { linearEmission } from "./greenhouse/linearEmission.ts";
+export { opaqueLayers } from "./greenhouse/opaqueLayers.ts";
+export * from "./ground/constants.ts";
+export { CONSTANTS, type ConstantRecord } from "./ground/constantsTable.ts";
+export { ERROR_CODES, type ErrorCode, ThermosteadError } from "./ground/errors.ts";
+export type { Range } from "./ground/range.ts";
+export { atmosphereCapacity } from "./heat/atmosphereCapacity.ts";
+export { mixedLayerCapacity } from "./heat/mixedLayerCapacity.ts";
+export { defineLaw } from "./law/defineLaw.ts";
+export { type SampledLawSpec, sampledLaw } from "./law/sampledLaw.ts";
+export { type Slopes, slopesOf } from "./law/slopesOf.ts";
+export type { Body, Law, LawDemand, LawFacts, LawSpec, NumberBody, Wires } from "./law/types.ts";
+export { closeLoop } from "./loop/closeLoop.ts";
+export type { Budget, Couplings, Flow, Givens, Loop, Named, Tools, Variables } from "./loop/types.ts";
+export { orbitMeanFlux } from "./orbit/orbitMeanFlux.ts";
+export { semiMajorAxis } from "./orbit/semiMajorAxis.ts";
+export { temperatureMeanFlux } from "./orbit/temperatureMeanFlux.ts";
+export { absorbedFlux } from "./star/absorbedFlux.ts";
+export { stellarFlux } from "./star/stellarFlux.ts";
+export { stellarLuminosity } from "./star/stellarLuminosity.ts";
+export { type FindStatesOptions, findStates } from "./states/findStates.ts";
+export type { Note, NoteCode } from "./states/note.ts";
+export type { FoundStates, Ledger, State, Undecided } from "./states/state.ts";

@@ -1,0 +1,74 @@
+// A law given as an ordinary function of numbers: it can be read and searched, but not enclosed.
+import type { Ports } from "../graph/card.ts";
+import { type Compute, type Meaning, Quantity } from "../graph/node.ts";
+import { dimensionOf } from "../ground/dimension.ts";
+import type { Range } from "../ground/range.ts";
+import { cardOf, checkedResult } from "./defineLaw.ts";
+import type { Law, LawFacts, NumberBody } from "./types.ts";
+import { wire } from "./wiring.ts";
+
+/** The definition of a sampled law. */
+export interface SampledLawSpec<I extends Ports> extends LawFacts<I> {
+  /** From numbers to a number, the same answer for the same numbers. */
+  readonly compute: (ports: NumberBody<I>) => number;
+}
+
+/** Half the step of a difference quotient relative to its argument: the cube root of 2⁻⁵², where both errors balance. */
+const STEP = 6.055454452393343e-6;
+
+/**
+ * Makes a law from an ordinary function, for tables and codes that recordable operations cannot express. Its slope is a
+ * central difference quotient and is marked so (`card.sampled`), and a loop that uses it is searched by sampling, never
+ * proved. Ports are single values. Throws what every law throws; `not-finite` when `compute` gives no finite number.
+ */
+export function sampledLaw<const I extends Ports>(spec: SampledLawSpec<I>): Law<I> {
+  const card = cardOf(spec, true);
+  const names = Object.keys(spec.inputs);
+  const ranges = names.map((n) => (spec.inputs[n] as { within?: Range }).within);
+  const value = (...inputs: number[]): number => {
+    const ports = Object.fromEntries(names.map((n, i) => [n, inputs[i]]));
+    return checkedResult(spec.name, spec.output.unit, spec.compute(ports as NumberBody<I>));
+  };
+  const compute = differentiable(value, ranges);
+  const apply = (wires: unknown): number | Quantity => {
+    const { flat, graph } = wire(spec.name, spec.inputs, wires);
+    if (!graph) return value(...names.map((n) => flat[n] as number));
+    const ids = names.map((n) => graph.lift(flat[n]));
+    const meaning: Meaning = {
+      kind: "law",
+      card,
+      wires: Object.fromEntries(names.map((n, i) => [n, ids[i] as number])),
+      demands: {},
+    };
+    return new Quantity(graph, graph.mean(graph.call(compute, ids), meaning, dimensionOf(spec.output.unit)));
+  };
+  return Object.assign(apply, { card }) as unknown as Law<I>;
+}
+
+/** A function with difference quotients as partial derivatives; the step stays inside the ranges of the ports. */
+function differentiable(value: Compute["value"], ranges: readonly (Range | undefined)[]): Compute {
+  const partials = new Map<number, Compute>();
+  const partial = (index: number): Compute => {
+    let found = partials.get(index);
+    if (!found) {
+      found = differentiable((...inputs) => differenceQuotient(value, inputs, index, ranges[index]), ranges);
+      partials.set(index, found);
+    }
+    return found;
+  };
+  return { value, partial };
+}
+
+function differenceQuotient(
+  f: Compute["value"],
+  inputs: readonly number[],
+  index: number,
+  range?: Range,
+): number {
+  const x = inputs[index] as number;
+  const h = STEP * Math.max(1, Math.abs(x));
+  const low = Math.max(x - h, range?.[0] ?? x - h);
+  const high = Math.min(x + h, range?.[1] ?? x + h);
+  const at = (v: number) => f(...inputs.map((w, i) => (i === index ? v : w)));
+  return (at(high) - at(low)) / (high - low);
+}

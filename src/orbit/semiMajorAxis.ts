@@ -1,0 +1,26 @@
+import { div, exp, log, product, square } from "../graph/operations.ts";
+import { GRAVITATION } from "../ground/constants.ts";
+import { defineLaw } from "../law/defineLaw.ts";
+
+/** 4π², the nearest double. */
+const FOUR_PI_SQUARED = 39.47841760435743;
+
+/**
+ * Semi-major axis of a light body's orbit from its period: a = (G·M·P²/4π²)^⅓, in m.
+ * Period in s, mass of the star in kg (both above 0); the planet's own mass is neglected. Errors: as for every law.
+ * Source: Kepler's third law; G from CODATA 2018.
+ */
+export const semiMajorAxis = /* @__PURE__ */ defineLaw({
+  name: "semiMajorAxis",
+  about: "Semi-major axis of a light body's orbit from its period.",
+  output: { symbol: "a", unit: "m" },
+  inputs: {
+    period: { symbol: "P", unit: "s", within: [1, 1e13], about: "orbital period" },
+    mass: { symbol: "M", unit: "kg", within: [1e20, 1e35], about: "mass of the star" },
+  },
+  source: "Kepler's third law",
+  write({ period, mass }) {
+    const cube = div(product(GRAVITATION, mass, square(period)), FOUR_PI_SQUARED);
+    return exp(div(log(cube), 3));
+  },
+});

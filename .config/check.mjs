@@ -11,13 +11,21 @@ const folders = ["src", "tests", "bench", "docs", ".config"].filter((folder) => 
 const cache = "node_modules/.cache";
 
 const parts = {
+  build: [node, ".config/setup.mjs"],
   types: [bin("tsc"), "--noEmit", "--incremental", "--tsBuildInfoFile", `${cache}/tsconfig.tsbuildinfo`],
   style: [bin("biome"), "check", "--colors=off", "--error-on-warnings", ...folders],
   package: [bin("publint"), "--strict"],
   resolution: [bin("attw"), "--pack", ".", "--no-definitely-typed", "--no-color", "--no-emoji"],
   api: [node, ".config/docs.mjs", apiReport],
   size: [node, ".config/size.mjs"],
-  architecture: [bin("vitest"), "run", "--config", "tests/vitest.config.ts", "tests/architecture.test.ts"],
+  architecture: [
+    bin("vitest"),
+    "run",
+    "--config",
+    "tests/vitest.config.ts",
+    "--reporter=dot",
+    "tests/architecture.test.ts",
+  ],
   documents: [node, ".config/docs.mjs", ...otherDocuments],
 };
 

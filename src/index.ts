@@ -4,7 +4,6 @@ export { quadraticAlbedo } from "./albedo/quadraticAlbedo.ts";
 export { rampAlbedo } from "./albedo/rampAlbedo.ts";
 export { tanhAlbedo } from "./albedo/tanhAlbedo.ts";
 export type { LawCard, ListPort, Port, Ports } from "./graph/card.ts";
-export type { Of, Quantity, Value } from "./graph/node.ts";
 export {
   add,
   div,
@@ -24,6 +23,7 @@ export {
   sum,
   tanh,
 } from "./graph/operations.ts";
+export type { Of, Quantity, Value } from "./graph/quantity.ts";
 export { blackbodyFlux } from "./greenhouse/blackbodyFlux.ts";
 export { blackbodyTemperature } from "./greenhouse/blackbodyTemperature.ts";
 export {
@@ -48,6 +48,8 @@ export { type SampledLawSpec, sampledLaw } from "./law/sampledLaw.ts";
 export { type Slopes, slopesOf } from "./law/slopesOf.ts";
 export type { Body, Law, LawDemand, LawFacts, LawSpec, NumberBody, Wires } from "./law/types.ts";
 export { closeLoop } from "./loop/closeLoop.ts";
+export { type FormulaOptions, formulaOf, type LoopFormula } from "./loop/formulaOf.ts";
+export { type LawSource, sourcesOf } from "./loop/sourcesOf.ts";
 export type { Budget, Couplings, Flow, Givens, Loop, Named, Tools, Variables } from "./loop/types.ts";
 export { orbitMeanFlux } from "./orbit/orbitMeanFlux.ts";
 export { semiMajorAxis } from "./orbit/semiMajorAxis.ts";

@@ -1,9 +1,9 @@
-import type { Value } from "../graph/node.ts";
 import { add, mul, sub, sum } from "../graph/operations.ts";
+import type { Value } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
 import { compensatedSum } from "../ground/sum.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ALBEDO } from "../law/ports.ts";
+import { albedoPort } from "../law/ports.ts";
 
 /** How far the shares of a complete cover may be from 1. */
 const SHARE_TOLERANCE = 1e-12;
@@ -17,20 +17,26 @@ const SHARE_TOLERANCE = 1e-12;
 export const mixAlbedo = /* @__PURE__ */ defineLaw({
   name: "mixAlbedo",
   about: "Albedo of a surface of several covers, by area.",
-  output: ALBEDO,
+  output: /* @__PURE__ */ albedoPort(),
   inputs: {
     covers: {
       each: {
         fraction: { symbol: "f", unit: "1", within: [0, 1], about: "share of the surface" },
-        albedo: ALBEDO,
+        albedo: /* @__PURE__ */ albedoPort(),
       },
     },
-    bare: { ...ALBEDO, symbol: "α_b", about: "albedo of the rest of the surface", optional: true },
+    bare: {
+      symbol: "α_b",
+      unit: "1",
+      within: [0, 1],
+      about: "albedo of the rest of the surface",
+      optional: true,
+    },
   },
   demands: {
     covered: {
       unit: "1",
-      within: [0, 1 + SHARE_TOLERANCE],
+      within: [0, 1.000000000001],
       about: "sum of the fractions",
       write: ({ covers }) => sum(...covers.map((c) => c.fraction)),
     },

@@ -1,15 +1,16 @@
 // The share of open surface between two temperatures, clamped: what the ramps have in common.
-import type { Quantity, Value } from "../graph/node.ts";
+
 import { div, max, min, sub } from "../graph/operations.ts";
-import { ALBEDO, TEMPERATURE } from "../law/ports.ts";
+import type { Quantity, Value } from "../graph/quantity.ts";
+import { albedoPort, temperaturePort } from "../law/ports.ts";
 
 /** Ports of an albedo that changes between two temperatures. */
 export const RAMP_PORTS = {
-  temperature: TEMPERATURE,
-  cold: { ...ALBEDO, symbol: "α_c", about: "albedo of the frozen planet" },
-  warm: { ...ALBEDO, symbol: "α_w", about: "albedo of the open planet" },
-  frozenBelow: { ...TEMPERATURE, symbol: "T_f", about: "all frozen below" },
-  openAbove: { ...TEMPERATURE, symbol: "T_o", about: "all open above" },
+  temperature: /* @__PURE__ */ temperaturePort(),
+  cold: /* @__PURE__ */ albedoPort("α_c", "albedo of the frozen planet"),
+  warm: /* @__PURE__ */ albedoPort("α_w", "albedo of the open planet"),
+  frozenBelow: /* @__PURE__ */ temperaturePort("T_f", "all frozen below"),
+  openAbove: /* @__PURE__ */ temperaturePort("T_o", "all open above"),
 } as const;
 
 type Between = { readonly frozenBelow: Quantity; readonly openAbove: Quantity };

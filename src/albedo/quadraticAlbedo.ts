@@ -1,6 +1,6 @@
 import { mix, square, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ALBEDO } from "../law/ports.ts";
+import { albedoPort } from "../law/ports.ts";
 import { openShare, RAMP_DEMANDS, RAMP_PORTS } from "./openShare.ts";
 
 /**
@@ -12,7 +12,7 @@ import { openShare, RAMP_DEMANDS, RAMP_PORTS } from "./openShare.ts";
 export const quadraticAlbedo = /* @__PURE__ */ defineLaw({
   name: "quadraticAlbedo",
   about: "Albedo that falls along a parabola between a frozen and an open planet.",
-  output: ALBEDO,
+  output: /* @__PURE__ */ albedoPort(),
   inputs: RAMP_PORTS,
   demands: RAMP_DEMANDS,
   published: { temperature: [200, 340] },

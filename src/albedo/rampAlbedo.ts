@@ -1,6 +1,6 @@
 import { mix } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ALBEDO } from "../law/ports.ts";
+import { albedoPort } from "../law/ports.ts";
 import { openShare, RAMP_DEMANDS, RAMP_PORTS } from "./openShare.ts";
 
 /**
@@ -12,7 +12,7 @@ import { openShare, RAMP_DEMANDS, RAMP_PORTS } from "./openShare.ts";
 export const rampAlbedo = /* @__PURE__ */ defineLaw({
   name: "rampAlbedo",
   about: "Albedo that falls along a straight line between a frozen and an open planet.",
-  output: ALBEDO,
+  output: /* @__PURE__ */ albedoPort(),
   inputs: RAMP_PORTS,
   demands: RAMP_DEMANDS,
   published: { temperature: [200, 340] },

@@ -1,6 +1,6 @@
 import { add, div, mix, sub, tanh } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ALBEDO, TEMPERATURE } from "../law/ports.ts";
+import { albedoPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Albedo that falls smoothly from a frozen to an open surface:
@@ -11,17 +11,17 @@ import { ALBEDO, TEMPERATURE } from "../law/ports.ts";
 export const tanhAlbedo = /* @__PURE__ */ defineLaw({
   name: "tanhAlbedo",
   about: "Albedo that falls smoothly from a frozen to an open surface.",
-  output: ALBEDO,
+  output: /* @__PURE__ */ albedoPort(),
   inputs: {
-    temperature: TEMPERATURE,
-    cold: { ...ALBEDO, symbol: "α_c", about: "albedo of the frozen planet" },
-    warm: { ...ALBEDO, symbol: "α_w", about: "albedo of the open planet" },
-    midpoint: { ...TEMPERATURE, symbol: "T_m", about: "temperature halfway between" },
+    temperature: /* @__PURE__ */ temperaturePort(),
+    cold: /* @__PURE__ */ albedoPort("α_c", "albedo of the frozen planet"),
+    warm: /* @__PURE__ */ albedoPort("α_w", "albedo of the open planet"),
+    midpoint: /* @__PURE__ */ temperaturePort("T_m", "temperature halfway between"),
     width: {
       symbol: "w",
       unit: "K",
       within: [1e-6, 1e5],
-      about: "temperature difference over which it changes",
+      about: "over which it changes",
     },
   },
   published: { temperature: [200, 340] },

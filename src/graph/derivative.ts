@@ -1,6 +1,7 @@
 // Symbolic derivatives: more nodes of the same graph, read like any other.
 import { coneOf } from "./cone.ts";
-import type { Graph, Op } from "./node.ts";
+import type { Graph } from "./node.ts";
+import type { Op } from "./op.ts";
 
 type Rule = (x: DerivativeOf) => number;
 /** What a rule sees of its node: ids, and the derivatives of the arguments (`undefined`: zero). */

@@ -1,93 +1,13 @@
-// The expression graph of a loop: plain arrays of nodes, each stored once, and the handle by which users hold a node.
-import { type Dimension, NO_DIMENSION } from "../ground/dimension.ts";
+// The expression graph of a loop: plain arrays of nodes, each stored once.
+import { type Dimension, dimensionOf, showDimension } from "../ground/dimension.ts";
 import { fail } from "../ground/errors.ts";
 import type { LawCard } from "./card.ts";
-
-/**
- * What a node does. `pick(a, b, x, y)` is x where a < b, else y: the slope at a kink. `jump` is the same for what does not
- * exist at the kink (a curvature). `call` runs an ordinary function. `mean` passes its argument on and carries meaning.
- */
-export type Op =
-  | (
-      | "const"
-      | "input"
-      | "add"
-      | "sub"
-      | "mul"
-      | "div"
-      | "neg"
-      | "sqrt"
-      | "exp"
-      | "log"
-      | "tanh"
-      | "min"
-      | "max"
-    )
-  | ("pick" | "jump" | "call" | "mean");
-
-/** What an identity node says of its value; arithmetic nodes carry nothing and are shared. */
-export type Meaning =
-  | { readonly kind: "variable" | "given" | "coupling" | "flow" | "report" | "unit"; readonly name: string }
-  | {
-      readonly kind: "law";
-      readonly card: LawCard;
-      /** Port (`covers[0].albedo` in lists) → node. */
-      readonly wires: Readonly<Record<string, number>>;
-      /** Conditions that join several ports, checked like ports in every state. */
-      readonly demands: Readonly<Record<string, { readonly node: number; readonly demand: Demand }>>;
-    };
-
-/** The range that a combination of ports must keep. */
-export interface Demand {
-  readonly unit: string;
-  readonly within: readonly [number, number];
-  /** The combination in words, such as `openAbove − frozenBelow`. */
-  readonly about: string;
-}
-
-/** An ordinary function of numbers, with its partial derivatives. */
-export interface Compute {
-  readonly value: (...inputs: number[]) => number;
-  readonly partial: (index: number) => Compute;
-}
-
-/** Dimension of a bare number: it takes the other operand's in a sum and has none in a product. */
-export const BARE = "bare";
-
-declare const names: unique symbol;
-/**
- * What a law returns as soon as one of its inputs is a quantity of a loop: a node of the loop's graph, not yet a number.
- * It has no methods, so that whatever accepts a quantity accepts a number as well. `N` is the set of variables, givens
- * and couplings it depends on, known to the type checker. Using it as a number throws `quantity-as-number`.
- */
-export class Quantity<out N extends string = string> {
-  declare readonly [names]: N;
-  /** @internal */
-  readonly graph: Graph;
-  /** @internal */
-  readonly id: number;
-  /** @internal */
-  constructor(graph: Graph, id: number) {
-    this.graph = graph;
-    this.id = id;
-  }
-  /** @internal */
-  [Symbol.toPrimitive](): never {
-    return fail("quantity-as-number", {
-      path: "quantity",
-      value: this,
-      allowed: "the operations add, sub, mul, div, exp, log, tanh, min, max ...",
-    });
-  }
-}
-
-/** A number or a quantity. */
-export type Value<N extends string = string> = number | Quantity<N>;
-/** A number when no input was a quantity. */
-export type Of<N extends string> = [N] extends [never] ? number : Quantity<N>;
+import { BARE, dimensionOfNode } from "./dimensionOfNode.ts";
+import type { Compute, Meaning, Op } from "./op.ts";
+import { type DemandValue, Quantity, type Recorder, type Wired } from "./quantity.ts";
 
 /** The nodes of one loop. A node's arguments always have smaller ids, so ids are an order of evaluation. */
-export class Graph {
+export class Graph implements Recorder {
   readonly ops: Op[] = [];
   readonly args: (readonly number[])[] = [];
   /** The number of a `const`; the index of its function for a `call`. */
@@ -147,17 +67,68 @@ export class Graph {
   /** The id of a number or of a quantity of this graph. */
   lift(value: unknown, path = "operation"): number {
     if (typeof value === "number") return this.constant(value);
-    if (!(value instanceof Quantity)) return fail("not-a-quantity", { path, value, allowed: "" });
+    if (!(value instanceof Quantity))
+      return fail("not-a-quantity", { path, value, allowed: "a number, or a quantity of this loop" });
     if (value.graph !== this)
       return fail("other-loop", { path, value: "one of another", allowed: "a quantity of this loop" });
     return value.id;
   }
 
   /** A function of numbers as a node. */
-  call(compute: Compute, args: readonly number[], dimension?: Dimension): number {
+  call(compute: Compute, args: readonly number[]): number {
     let index = this.functions.indexOf(compute);
     if (index < 0) index = this.functions.push(compute) - 1;
-    return this.node("call", args, { value: index, dimension });
+    return this.node("call", args, { value: index });
+  }
+
+  record(op: Op, values: readonly unknown[]): Quantity {
+    const ids = values.map((v) => this.lift(v, op));
+    // a + b and b + a are the same bits, so they are one node
+    if ((op === "add" || op === "mul") && (ids[1] as number) < (ids[0] as number)) ids.reverse();
+    return new Quantity(this, this.node(op, ids, { dimension: dimensionOfNode(this, op, ids) }));
+  }
+
+  checkWire(value: Quantity, unit: string, path: string): void {
+    const found = this.dimensions[this.lift(value, path)];
+    if (found !== undefined && found !== BARE && found !== dimensionOf(unit)) {
+      fail("unit-mismatch", { path, value: showDimension(found), allowed: unit });
+    }
+  }
+
+  inBody<T>(run: () => T): T {
+    this.depth++;
+    try {
+      return run();
+    } finally {
+      this.depth--;
+    }
+  }
+
+  lawNode(card: LawCard, wires: Wired, demands: readonly DemandValue[], result: unknown): Quantity {
+    const meaning: Meaning = {
+      kind: "law",
+      card,
+      wires: Object.fromEntries(Object.entries(wires).map(([name, v]) => [name, this.lift(v)])),
+      demands: Object.fromEntries(demands.map(([name, demand, v]) => [name, { node: this.lift(v), demand }])),
+    };
+    return new Quantity(
+      this,
+      this.mean(this.lift(result, card.name), meaning, dimensionOf(card.output.unit)),
+    );
+  }
+
+  callNode(compute: Compute, wires: Wired): Quantity {
+    return new Quantity(
+      this,
+      this.call(
+        compute,
+        Object.values(wires).map((v) => this.lift(v)),
+      ),
+    );
+  }
+
+  unitNode(value: Quantity, unit: string): Quantity {
+    return new Quantity(this, this.mean(value.id, { kind: "unit", name: unit }, dimensionOf(unit)));
   }
 
   #tagOf(meaning: Meaning): string {
@@ -167,6 +138,3 @@ export class Graph {
     return `law ${index} ${Object.entries(meaning.wires).join()}`;
   }
 }
-
-/** True for the dimension of a pure number. */
-export const isPure = (d: Dimension | undefined): boolean => d === NO_DIMENSION || d === BARE;

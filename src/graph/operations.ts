@@ -1,29 +1,26 @@
 // The recordable operations: numbers are folded at once, quantities are recorded. Both give the same bits.
-import { dimensionOf } from "../ground/dimension.ts";
 import { exp as expOf } from "../ground/elementary/exp.ts";
 import { log as logOf } from "../ground/elementary/log.ts";
 import { max as maxOf, min as minOf } from "../ground/elementary/minMax.ts";
 import { tanh as tanhOf } from "../ground/elementary/tanh.ts";
 import { fail } from "../ground/errors.ts";
-import { dimensionOfNode } from "./dimensionOfNode.ts";
-import { type Of, type Op, Quantity, type Value } from "./node.ts";
+import type { Op } from "./op.ts";
+import { type Of, Quantity, type Value } from "./quantity.ts";
+
+const NUMBER_OR_QUANTITY = "a number or a quantity";
 
 type One = <N extends string = never>(a: Value<N>) => Of<N>;
 type Two = <N extends string = never>(a: Value<N>, b: Value<N>) => Of<N>;
 type Many = <N extends string = never>(...terms: readonly Value<N>[]) => Of<N>;
 
 function record(op: Op, values: readonly unknown[]): Quantity {
-  const graph = (values.find((v) => v instanceof Quantity) as Quantity | undefined)?.graph;
-  if (!graph)
-    return fail("not-a-quantity", {
-      path: op,
-      value: values.find((v) => typeof v !== "number"),
-      allowed: "",
-    });
-  const ids = values.map((v) => graph.lift(v, op));
-  // a + b and b + a are the same bits, so they are one node
-  if ((op === "add" || op === "mul") && (ids[1] as number) < (ids[0] as number)) ids.reverse();
-  return new Quantity(graph, graph.node(op, ids, { dimension: dimensionOfNode(graph, op, ids) }));
+  const quantity = values.find((v) => v instanceof Quantity);
+  if (quantity) return quantity.graph.record(op, values);
+  return fail("not-a-quantity", {
+    path: op,
+    value: values.find((v) => typeof v !== "number"),
+    allowed: NUMBER_OR_QUANTITY,
+  });
 }
 const one = (op: Op, fold: (a: number) => number): One =>
   ((a: unknown) => (typeof a === "number" ? fold(a) : record(op, [a]))) as unknown as One;
@@ -72,16 +69,9 @@ function chain(name: string, op: Two, terms: readonly Value[]): Value {
 }
 function checkedTerm(name: string, term: Value): Value {
   if (typeof term === "number" || term instanceof Quantity) return term;
-  return fail("not-a-quantity", { path: name, value: term, allowed: "" });
+  return fail("not-a-quantity", { path: name, value: term, allowed: NUMBER_OR_QUANTITY });
 }
 
 /** States the unit of a value where it cannot be told, as for a number times an empirical factor. Does not convert. */
-export const inUnit = <N extends string = never>(value: Value<N>, unit: string): Of<N> => {
-  const dimension = dimensionOf(unit);
-  if (typeof value === "number") return value as Of<N>;
-  if (!(value instanceof Quantity)) return fail("not-a-quantity", { path: "inUnit", value, allowed: "" });
-  return new Quantity(
-    value.graph,
-    value.graph.mean(value.id, { kind: "unit", name: unit }, dimension),
-  ) as Of<N>;
-};
+export const inUnit = <N extends string = never>(value: Value<N>, unit: string): Of<N> =>
+  (value instanceof Quantity ? value.graph.unitNode(value, unit) : checkedTerm("inUnit", value)) as Of<N>;

@@ -1,5 +1,6 @@
 // Prints a node as a formula on paper: plain text that common expression parsers read, or TeX.
-import type { Graph, Op } from "./node.ts";
+import type { Graph } from "./node.ts";
+import type { Op } from "./op.ts";
 
 /** How a formula is written down. */
 export type Notation = "text" | "tex";
@@ -23,8 +24,8 @@ interface Printed {
 export function printNode(g: Graph, node: number, options: PrintOptions): string {
   const known = new Map<number, Printed>();
   const print = (id: number): Printed => {
-    let p = known.get(id);
-    if (!p) known.set(id, (p = printOne(g, id, options, print)));
+    const p = known.get(id) ?? printOne(g, id, options, print);
+    known.set(id, p);
     return p;
   };
   return print(node).text;

@@ -1,14 +1,14 @@
 import { fourth, mul } from "../graph/operations.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { TEMPERATURE } from "../law/ports.ts";
+import { temperaturePort } from "../law/ports.ts";
 
 /** Flux that a black body emits: F = σT⁴, in W m⁻². Temperature in K. Errors: as for every law. Source: Stefan–Boltzmann law. */
 export const blackbodyFlux = /* @__PURE__ */ defineLaw({
   name: "blackbodyFlux",
   about: "Flux that a black body emits.",
   output: { symbol: "F", unit: "W m-2" },
-  inputs: { temperature: TEMPERATURE },
+  inputs: { temperature: /* @__PURE__ */ temperaturePort() },
   source: "Stefan–Boltzmann law",
   write: ({ temperature }) => mul(STEFAN_BOLTZMANN, fourth(temperature)),
 });

@@ -1,14 +1,14 @@
 import { add, div, mul, product, sqrt, sub } from "../graph/operations.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ALBEDO, FLUX } from "../law/ports.ts";
+import { albedoPort, fluxPort } from "../law/ports.ts";
 
 /** Redistribution factor: heat spread over the whole sphere. */
 export const REDISTRIBUTION_GLOBAL = 0.25;
 /** Redistribution factor: heat spread evenly over the day side. */
 export const REDISTRIBUTION_DAYSIDE = 0.5;
 /** Redistribution factor: heat re-radiated where it falls, the day side seen from the star. */
-export const REDISTRIBUTION_INSTANT = 2 / 3;
+export const REDISTRIBUTION_INSTANT = 0.6666666666666666;
 /** Redistribution factor: the substellar point without any transport. */
 export const REDISTRIBUTION_SUBSTELLAR = 1;
 
@@ -24,8 +24,8 @@ export const equilibriumTemperature = /* @__PURE__ */ defineLaw({
   about: "Temperature at which a body re-radiates what it absorbs; not the surface temperature.",
   output: { symbol: "T_eq", unit: "K", about: "equilibrium temperature" },
   inputs: {
-    flux: FLUX,
-    albedo: { ...ALBEDO, symbol: "A" },
+    flux: /* @__PURE__ */ fluxPort(),
+    albedo: /* @__PURE__ */ albedoPort("A"),
     redistribution: { symbol: "f", unit: "1", within: [0.25, 1], about: "redistribution factor" },
     emissivity: { symbol: "ε", unit: "1", within: [1e-9, 1], default: 1, about: "emissivity" },
     internalFlux: { symbol: "F_i", unit: "W m-2", within: [0, 1e9], default: 0, about: "internal heat" },

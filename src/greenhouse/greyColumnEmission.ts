@@ -1,7 +1,7 @@
 import { add, div, fourth, mul, product } from "../graph/operations.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { OUTGOING, TEMPERATURE } from "../law/ports.ts";
+import { outgoingPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Emission to space of a grey column in radiative equilibrium over a black ground: F = σT⁴/(1 + ½·closure·τ), in W m⁻².
@@ -11,9 +11,9 @@ import { OUTGOING, TEMPERATURE } from "../law/ports.ts";
 export const greyColumnEmission = /* @__PURE__ */ defineLaw({
   name: "greyColumnEmission",
   about: "Emission to space of a grey column in radiative equilibrium over a black ground.",
-  output: OUTGOING,
+  output: /* @__PURE__ */ outgoingPort(),
   inputs: {
-    temperature: { ...TEMPERATURE, about: "temperature of the ground" },
+    temperature: /* @__PURE__ */ temperaturePort("T", "temperature of the ground"),
     opticalDepth: {
       symbol: "τ",
       unit: "1",

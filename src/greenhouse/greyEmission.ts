@@ -1,7 +1,7 @@
 import { fourth, product } from "../graph/operations.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { EMISSIVITY, OUTGOING, TEMPERATURE } from "../law/ports.ts";
+import { outgoingPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Emission of a grey surface: F = εσT⁴, in W m⁻².
@@ -11,8 +11,11 @@ import { EMISSIVITY, OUTGOING, TEMPERATURE } from "../law/ports.ts";
 export const greyEmission = /* @__PURE__ */ defineLaw({
   name: "greyEmission",
   about: "Emission of a grey surface.",
-  output: OUTGOING,
-  inputs: { temperature: TEMPERATURE, emissivity: EMISSIVITY },
+  output: /* @__PURE__ */ outgoingPort(),
+  inputs: {
+    temperature: /* @__PURE__ */ temperaturePort(),
+    emissivity: { symbol: "ε", unit: "1", within: [0, 1], about: "emissivity" },
+  },
   source: "Stefan–Boltzmann law",
   write: ({ temperature, emissivity }) => product(emissivity, STEFAN_BOLTZMANN, fourth(temperature)),
 });

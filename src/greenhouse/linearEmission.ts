@@ -1,6 +1,6 @@
 import { add, mul, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { OUTGOING, TEMPERATURE } from "../law/ports.ts";
+import { outgoingPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Outgoing longwave radiation as a straight line: F = A + B(T − T₀), in W m⁻².
@@ -11,9 +11,9 @@ import { OUTGOING, TEMPERATURE } from "../law/ports.ts";
 export const linearEmission = /* @__PURE__ */ defineLaw({
   name: "linearEmission",
   about: "Outgoing longwave radiation as a straight line in temperature.",
-  output: OUTGOING,
+  output: /* @__PURE__ */ outgoingPort(),
   inputs: {
-    temperature: TEMPERATURE,
+    temperature: /* @__PURE__ */ temperaturePort(),
     intercept: {
       symbol: "A",
       unit: "W m-2",
@@ -21,7 +21,7 @@ export const linearEmission = /* @__PURE__ */ defineLaw({
       about: "emission at the reference temperature",
     },
     slope: { symbol: "B", unit: "W m-2 K-1", within: [0, 1e4], about: "increase with temperature" },
-    reference: { ...TEMPERATURE, symbol: "T_0", about: "reference temperature" },
+    reference: /* @__PURE__ */ temperaturePort("T_0", "reference temperature"),
   },
   published: { temperature: [230, 300] },
   source: "Budyko 1969, Tellus 21, 611; Koll & Cronin 2018, PNAS 115, 10293",

@@ -1,6 +1,6 @@
 import { add, mul, sqrt } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { TEMPERATURE } from "../law/ports.ts";
+import { temperaturePort } from "../law/ports.ts";
 
 /**
  * Surface temperature under layers that are transparent to starlight and opaque to longwave: T_s = (N + 1)^¼·T_e, in K.
@@ -10,13 +10,12 @@ import { TEMPERATURE } from "../law/ports.ts";
 export const opaqueLayers = /* @__PURE__ */ defineLaw({
   name: "opaqueLayers",
   about: "Surface temperature under layers that are transparent to starlight and opaque to longwave.",
-  output: { ...TEMPERATURE, symbol: "T_s", about: "surface temperature" },
+  output: /* @__PURE__ */ temperaturePort("T_s", "surface temperature"),
   inputs: {
-    effectiveTemperature: {
-      ...TEMPERATURE,
-      symbol: "T_e",
-      about: "effective temperature of emission to space",
-    },
+    effectiveTemperature: /* @__PURE__ */ temperaturePort(
+      "T_e",
+      "effective temperature of emission to space",
+    ),
     layers: { symbol: "N", unit: "1", within: [0, 1e4], about: "number of layers" },
   },
   source: "Marshall & Plumb 2008, Atmosphere, Ocean, and Climate Dynamics, §2.3",

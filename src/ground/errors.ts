@@ -1,33 +1,30 @@
-/** The closed list of what can go wrong with a call, with one wording each. */
-const WORDING = {
-  "not-a-number": "must be a finite number",
-  "out-of-range": "must lie between",
-  "not-finite": "gave a value that is not a finite number, but needs",
-  missing: "is required",
-  "unknown-name": "is not a name known here; it must be one of",
-  "repeated-name": "is given twice; each name may stand once among",
-  "reserved-name": "cannot serve as a name; allowed is",
-  "unknown-unit": "has a unit that cannot be read; known are",
-  "unit-mismatch": "must have the unit",
-  "other-loop": "belongs to another loop; allowed is",
-  "not-a-quantity": "must be a number or a quantity of this loop",
-  "quantity-as-number": "is a quantity and not yet a number; use",
-  "shares-not-one": "must sum to",
-  "bad-budget": "is not a budget; needed is",
-  "temperature-unused": "does not depend on its temperature; needed is",
-  "coupling-unused": "is coupled but does not reach the budget; use",
-  "coupling-bypassed": "is also used without its coupling; use",
-  "several-variables": "is not available for a loop with several variables; needed is",
-  contradiction: "contradicts another input; allowed is",
-  unreadable: "cannot be read; needed is",
-  "too-large": "is too large; allowed is",
-} as const;
+/** The closed list of what can go wrong with a call; each code has a section in `docs/errors.md`. */
+export const ERROR_CODES = [
+  "not-a-number",
+  "out-of-range",
+  "not-finite",
+  "missing",
+  "unknown-name",
+  "repeated-name",
+  "reserved-name",
+  "unknown-unit",
+  "unit-mismatch",
+  "other-loop",
+  "not-a-quantity",
+  "quantity-as-number",
+  "shares-not-one",
+  "bad-budget",
+  "temperature-unused",
+  "coupling-unused",
+  "coupling-bypassed",
+  "several-variables",
+  "contradiction",
+  "unreadable",
+  "too-large",
+] as const;
 
-/** Names an error's kind; the list is closed and each code has a section in `docs/errors.md`. */
-export type ErrorCode = keyof typeof WORDING;
-
-/** All error codes, in the order of the documentation. */
-export const ERROR_CODES = /* @__PURE__ */ Object.keys(WORDING) as readonly ErrorCode[];
+/** Names an error's kind. */
+export type ErrorCode = (typeof ERROR_CODES)[number];
 
 /** What an error says besides its code. */
 export interface ErrorDetails {
@@ -41,24 +38,23 @@ export interface ErrorDetails {
   readonly unit?: string | undefined;
 }
 
-/** A wrong call: which field, what it received, what is allowed, in which unit. */
+/**
+ * A wrong call: which field, what it received, what is allowed, in which unit. The wording comes from the code, so that
+ * one kind of error always reads the same: "absorbedFlux.albedo: out of range, received 1.2; allowed: 0 to 1".
+ */
 export class ThermosteadError extends Error implements ErrorDetails {
   override readonly name = "ThermosteadError";
-  readonly code: ErrorCode;
-  readonly path: string;
-  readonly value: unknown;
-  readonly allowed: string;
-  readonly unit: string | undefined;
+  declare readonly code: ErrorCode;
+  declare readonly path: string;
+  declare readonly value: unknown;
+  declare readonly allowed: string;
+  declare readonly unit: string | undefined;
   constructor(code: ErrorCode, { path, value, allowed, unit }: ErrorDetails) {
     const range = unit && unit !== "1" ? `${allowed} ${unit}` : allowed;
     super(
-      `${path}: ${`${WORDING[code]} ${range}`.trimEnd()}, received ${shown(value)} (docs/errors.md#${code})`,
+      `${path}: ${code.replace(/-/g, " ")}, received ${shown(value)}; allowed: ${range} (docs/errors.md#${code})`,
     );
-    this.code = code;
-    this.path = path;
-    this.value = value;
-    this.allowed = allowed;
-    this.unit = unit;
+    Object.assign(this, { code, path, value, allowed, unit });
   }
 }
 
@@ -68,9 +64,8 @@ export function fail(code: ErrorCode, details: ErrorDetails): never {
 }
 
 function shown(value: unknown): string {
-  if (typeof value === "string")
-    return JSON.stringify(value.length > 60 ? `${value.slice(0, 57)}...` : value);
+  if (typeof value === "string") return JSON.stringify(value.slice(0, 60));
   if (Array.isArray(value)) return `a list of ${value.length}`;
-  if (typeof value === "object" && value !== null) return "an object";
-  return typeof value === "function" ? "a function" : Object.is(value, -0) ? "-0" : String(value);
+  if (Object(value) === value) return `a value of type ${typeof value}`;
+  return Object.is(value, -0) ? "-0" : String(value);
 }

@@ -5,26 +5,24 @@ import { fail } from "./errors.ts";
 export function nearestName(name: string, known: readonly string[]): string {
   let best = "";
   let least = Number.POSITIVE_INFINITY;
-  const typed = name.slice(0, 60);
   for (const candidate of known) {
-    const row = Array.from({ length: candidate.length + 1 }, (_, i) => i);
-    for (let i = 1; i <= typed.length; i++) {
-      let diagonal = row[0] as number;
-      row[0] = i;
-      for (let j = 1; j <= candidate.length; j++) {
-        const above = row[j] as number;
-        const change = diagonal + (typed[i - 1] === candidate[j - 1] ? 0 : 1);
-        row[j] = Math.min(above + 1, (row[j - 1] as number) + 1, change);
-        diagonal = above;
-      }
-    }
-    const distance = row[candidate.length] as number;
-    if (distance < least) {
-      least = distance;
-      best = candidate;
-    }
+    const distance = editDistance(name.slice(0, 60), candidate);
+    if (distance < least) [best, least] = [candidate, distance];
   }
   return best;
+}
+
+function editDistance(a: string, b: string): number {
+  let row = Array.from({ length: b.length + 1 }, (_, j) => j);
+  for (const letter of a) {
+    const next = [(row[0] as number) + 1];
+    for (let j = 0; j < b.length; j++) {
+      const change = (row[j] as number) + (letter === b[j] ? 0 : 1);
+      next.push(Math.min((row[j + 1] as number) + 1, (next[j] as number) + 1, change));
+    }
+    row = next;
+  }
+  return row[b.length] as number;
 }
 
 /** Throws `unknown-name` with the known names and the nearest of them. */

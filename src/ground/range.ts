@@ -4,13 +4,14 @@ import { fail } from "./errors.ts";
 /** Lowest and highest allowed value, both included. */
 export type Range = readonly [number, number];
 
-/** "0 and 1": a range as error messages show it. */
-export const showRange = (range: Range): string => `${range[0]} and ${range[1]}`;
+/** "0 to 1": a range as error messages show it. */
+export const showRange = (range: Range): string => `${range[0]} to ${range[1]}`;
 
 /** Returns `value` if it is a finite number in the range; otherwise an error names the field, the range and the unit. */
 export function checkedNumber(value: unknown, path: string, unit: string, within?: Range): number {
   if (typeof value !== "number" || !Number.isFinite(value)) {
-    fail("not-a-number", { path, value, allowed: within ? `between ${showRange(within)}` : "", unit });
+    const code = value === undefined ? "missing" : "not-a-number";
+    fail(code, { path, value, allowed: within ? showRange(within) : "a finite number", unit });
   }
   if (within && !(value >= within[0] && value <= within[1])) {
     fail("out-of-range", { path, value, allowed: showRange(within), unit });

@@ -1,11 +1,10 @@
 // Makes a law from its ports and its formula.
 import type { LawCard, Port, Ports } from "../graph/card.ts";
-import { type Meaning, Quantity } from "../graph/node.ts";
-import { dimensionOf } from "../ground/dimension.ts";
+import { type DemandValue, Quantity } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
 import { checkedNumber } from "../ground/range.ts";
-import type { Body, Law, LawFacts, LawSpec } from "./types.ts";
-import { isList, type Wiring, wire } from "./wiring.ts";
+import type { Body, Law, LawDemand, LawFacts, LawSpec } from "./types.ts";
+import { isList, wire } from "./wiring.ts";
 
 /**
  * Defines a law of physics once: from its ports come the checks of inputs and units, the notes, the documentation and the
@@ -21,7 +20,7 @@ import { isList, type Wiring, wire } from "./wiring.ts";
  */
 export function defineLaw<const I extends Ports>(spec: LawSpec<I>): Law<I> {
   const card = cardOf(spec, false);
-  const slow = (wires: unknown) => record(spec, card, wire(spec.name, spec.inputs, wires));
+  const slow = (wires: Wired) => apply(spec, card, wires);
   return Object.assign(fastPath(spec, slow), { card }) as unknown as Law<I>;
 }
 
@@ -39,76 +38,75 @@ export function cardOf<I extends Ports>(facts: LawFacts<I>, sampled: boolean): L
   });
 }
 
+type Wired = Record<string, unknown>;
+
 /**
  * The common case with hardly an allocation: every port a number in its range or left to its default. Anything else
  * takes the slow path, which either records a quantity or throws the error that says what is wrong.
  */
 function fastPath<I extends Ports>(
   spec: LawSpec<I>,
-  slow: (wires: unknown) => unknown,
-): (wires: Record<string, unknown>) => unknown {
-  const ports = Object.entries(spec.inputs);
+  slow: (wires: Wired) => unknown,
+): (wires: Wired) => unknown {
+  const ports = Object.entries(spec.inputs) as [string, Port][];
   if (spec.demands || ports.some(([, p]) => isList(p) || p.optional)) return slow;
-  const names = ports.map(([name]) => name);
-  const low = Float64Array.from(ports, ([, p]) => (p as Port).within?.[0] ?? -Number.MAX_VALUE);
-  const high = Float64Array.from(ports, ([, p]) => (p as Port).within?.[1] ?? Number.MAX_VALUE);
-  const defaults = Float64Array.from(ports, ([, p]) => (p as Port).default ?? Number.NaN);
-  const write = spec.write as unknown as (wires: unknown) => unknown;
+  const limits = ports.map(
+    ([name, { within = [-Number.MAX_VALUE, Number.MAX_VALUE], default: fallback }]) => ({
+      name,
+      low: within[0],
+      high: within[1],
+      fallback,
+    }),
+  );
+  const write = spec.write as unknown as (wires: Wired) => unknown;
   return (wires) => {
     let unmatched = 0;
     for (const _ in wires) unmatched++;
     let body = wires;
-    for (let i = 0; i < names.length; i++) {
-      const name = names[i] as string;
+    for (const { name, low, high, fallback } of limits) {
       let value = wires?.[name];
       if (value === undefined) {
-        value = defaults[i];
+        value = fallback;
         if (body === wires) body = { ...wires };
-        if (name in body) unmatched--;
         body[name] = value;
       } else unmatched--;
-      if (!(typeof value === "number" && value >= (low[i] as number) && value <= (high[i] as number)))
-        return slow(wires);
+      if (!(typeof value === "number" && value >= low && value <= high)) return slow(wires);
     }
-    if (unmatched !== 0) return slow(wires);
-    const result = write(body);
-    return typeof result === "number" && Number.isFinite(result) ? result : slow(wires);
+    const result = unmatched === 0 ? write(body) : undefined;
+    return Number.isFinite(result) ? result : slow(wires);
   };
 }
 
-function record<I extends Ports>(spec: LawSpec<I>, card: LawCard<I>, wiring: Wiring): number | Quantity {
-  const { body, flat, graph } = wiring;
-  if (graph) graph.depth++;
-  try {
-    const demands = Object.entries(spec.demands ?? {}).map(
-      ([name, d]) => [name, d, d.write(body as Body<I>)] as const,
-    );
-    for (const [name, d, value] of demands) {
-      if (typeof value === "number")
-        checkedNumber(value, `${spec.name}.${name} (${d.about})`, d.unit, d.within);
-    }
-    const result = spec.write(body as Body<I>);
-    if (!graph) return checkedResult(spec.name, spec.output.unit, result);
-    const g = graph;
-    const meaning: Meaning = {
-      kind: "law",
-      card,
-      wires: Object.fromEntries(Object.entries(flat).map(([name, v]) => [name, g.lift(v)])),
-      demands: Object.fromEntries(
-        demands.map(([name, { unit, within, about }, v]) => [
-          name,
-          { node: g.lift(v), demand: { unit, within, about } },
-        ]),
-      ),
-    };
-    return new Quantity(g, g.mean(g.lift(result, spec.name), meaning, dimensionOf(spec.output.unit)));
-  } finally {
-    if (graph) graph.depth--;
+function apply<I extends Ports>(spec: LawSpec<I>, card: LawCard<I>, wires: unknown): number | Quantity {
+  const { body, flat, graph } = wire(spec.name, spec.inputs, wires);
+  const ports = body as Body<I>;
+  const run = () => ({
+    demands: Object.entries(spec.demands ?? {}).map(
+      ([name, d]): DemandValue => [name, d, checkedDemand(spec.name, name, d, ports)],
+    ),
+    result: spec.write(ports),
+  });
+  if (!graph) return checkedResult(card, run().result);
+  const { demands, result } = graph.inBody(run);
+  return graph.lawNode(card, flat, demands, result);
+}
+
+/** Evaluates or records a demand; a number outside its range is refused at once. */
+function checkedDemand<I extends Ports>(
+  law: string,
+  name: string,
+  demand: LawDemand<I>,
+  ports: Body<I>,
+): unknown {
+  const value = demand.write(ports);
+  if (!(value instanceof Quantity)) {
+    checkedNumber(value, `${law}.${name} (${demand.about})`, demand.unit, demand.within);
   }
+  return value;
 }
 
 /** The finite number that a law gives; anything else is an error that names the law. */
-export function checkedResult(law: string, unit: string, result: unknown): number {
+export function checkedResult({ name, output }: LawCard, result: unknown): number {
   if (typeof result === "number" && Number.isFinite(result)) return result;
-  return fail("not-finite", { path: law, value: result, allowed: "a finite number", unit });
+  return fail("not-finite", { path: name, value: result, allowed: "a finite number", unit: output.unit });
 }

@@ -1,24 +1,21 @@
-// Ports that many laws share, so that a temperature has one range everywhere.
+// Ports that many laws share, so that a temperature or an albedo has one range everywhere.
 
-/** Temperature of a surface or an atmosphere. */
-export const TEMPERATURE = { symbol: "T", unit: "K", within: [0, 1e5], about: "temperature" } as const;
+/** Temperature of a surface or an atmosphere, K. */
+export const temperaturePort = (symbol = "T", about = "temperature") =>
+  ({ symbol, unit: "K", within: [0, 1e5], about }) as const;
+
 /** Share of reflected light. */
-export const ALBEDO = { symbol: "α", unit: "1", within: [0, 1], about: "Bond albedo" } as const;
-/** Stellar flux normal to the beam. */
-export const FLUX = {
-  symbol: "S",
-  unit: "W m-2",
-  within: [0, 1e12],
-  about: "stellar flux normal to the beam",
-} as const;
-/** Emissivity of a grey surface. */
-export const EMISSIVITY = { symbol: "ε", unit: "1", within: [0, 1], about: "emissivity" } as const;
-/** Orbital eccentricity of a bound orbit. */
-export const ECCENTRICITY = {
-  symbol: "e",
-  unit: "1",
-  within: [0, 0.9999],
-  about: "orbital eccentricity",
-} as const;
-/** A flux that a law gives, W m⁻² of the planet's whole area unless said. */
-export const OUTGOING = { symbol: "F", unit: "W m-2", about: "outgoing longwave radiation" } as const;
+export const albedoPort = (symbol = "α", about = "Bond albedo") =>
+  ({ symbol, unit: "1", within: [0, 1], about }) as const;
+
+/** Stellar flux normal to the beam, W m⁻². */
+export const fluxPort = (symbol = "S", about = "stellar flux normal to the beam") =>
+  ({ symbol, unit: "W m-2", within: [0, 1e12], about }) as const;
+
+/** Eccentricity of a bound orbit. */
+export const eccentricityPort = () =>
+  ({ symbol: "e", unit: "1", within: [0, 0.9999], about: "orbital eccentricity" }) as const;
+
+/** Outgoing longwave radiation, W m⁻² of the planet's whole area. */
+export const outgoingPort = () =>
+  ({ symbol: "F", unit: "W m-2", about: "outgoing longwave radiation" }) as const;

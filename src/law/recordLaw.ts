@@ -1,6 +1,7 @@
 // Records a law alone, with every port a free input: for its slopes and its printed formula.
 import type { ListPort, Port, Ports } from "../graph/card.ts";
-import { Graph, Quantity } from "../graph/node.ts";
+import { Graph } from "../graph/node.ts";
+import { Quantity } from "../graph/quantity.ts";
 import { dimensionOf } from "../ground/dimension.ts";
 import type { Law } from "./types.ts";
 import { isList } from "./wiring.ts";

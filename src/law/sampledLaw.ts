@@ -1,7 +1,7 @@
 // A law given as an ordinary function of numbers: it can be read and searched, but not enclosed.
 import type { Ports } from "../graph/card.ts";
-import { type Compute, type Meaning, Quantity } from "../graph/node.ts";
-import { dimensionOf } from "../ground/dimension.ts";
+import type { Compute } from "../graph/op.ts";
+import type { Quantity } from "../graph/quantity.ts";
 import type { Range } from "../ground/range.ts";
 import { cardOf, checkedResult } from "./defineLaw.ts";
 import type { Law, LawFacts, NumberBody } from "./types.ts";
@@ -27,20 +27,13 @@ export function sampledLaw<const I extends Ports>(spec: SampledLawSpec<I>): Law<
   const ranges = names.map((n) => (spec.inputs[n] as { within?: Range }).within);
   const value = (...inputs: number[]): number => {
     const ports = Object.fromEntries(names.map((n, i) => [n, inputs[i]]));
-    return checkedResult(spec.name, spec.output.unit, spec.compute(ports as NumberBody<I>));
+    return checkedResult(card, spec.compute(ports as NumberBody<I>));
   };
   const compute = differentiable(value, ranges);
   const apply = (wires: unknown): number | Quantity => {
     const { flat, graph } = wire(spec.name, spec.inputs, wires);
     if (!graph) return value(...names.map((n) => flat[n] as number));
-    const ids = names.map((n) => graph.lift(flat[n]));
-    const meaning: Meaning = {
-      kind: "law",
-      card,
-      wires: Object.fromEntries(names.map((n, i) => [n, ids[i] as number])),
-      demands: {},
-    };
-    return new Quantity(graph, graph.mean(graph.call(compute, ids), meaning, dimensionOf(spec.output.unit)));
+    return graph.lawNode(card, flat, [], graph.callNode(compute, flat));
   };
   return Object.assign(apply, { card }) as unknown as Law<I>;
 }

@@ -1,6 +1,6 @@
 // The types of laws: what callers give, what a body receives, what comes back.
 import type { LawCard, ListPort, Port, Ports } from "../graph/card.ts";
-import type { Of, Quantity, Value } from "../graph/node.ts";
+import type { Of, Quantity, Value } from "../graph/quantity.ts";
 import type { Range } from "../ground/range.ts";
 
 type Optional = { readonly default: number } | { readonly optional: true };

@@ -1,5 +1,7 @@
 // Keeps the books while a budget is written: which names are taken, which nodes they stand for.
-import { BARE, Graph, Quantity } from "../graph/node.ts";
+import { BARE } from "../graph/dimensionOfNode.ts";
+import { Graph } from "../graph/node.ts";
+import { Quantity } from "../graph/quantity.ts";
 import { type Dimension, dimensionOf, multiplyDimensions, showDimension } from "../ground/dimension.ts";
 import { fail } from "../ground/errors.ts";
 import { checkedName, failUnknown } from "../ground/names.ts";

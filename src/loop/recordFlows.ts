@@ -1,7 +1,7 @@
 // The flows of a budget: who gives whom how much, and their sum.
 import type { Graph } from "../graph/node.ts";
-import { Quantity } from "../graph/node.ts";
 import { add, neg, sub } from "../graph/operations.ts";
+import { Quantity } from "../graph/quantity.ts";
 import { dimensionOf } from "../ground/dimension.ts";
 import { fail } from "../ground/errors.ts";
 import { checkedName, checkKeys } from "../ground/names.ts";

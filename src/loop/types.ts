@@ -1,5 +1,6 @@
 // The types of budgets and loops.
-import type { Graph, Quantity, Value } from "../graph/node.ts";
+import type { Graph } from "../graph/node.ts";
+import type { Quantity, Value } from "../graph/quantity.ts";
 import type { Range } from "../ground/range.ts";
 
 /** What the writer of a budget is given. */

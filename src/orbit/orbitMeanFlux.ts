@@ -1,6 +1,6 @@
 import { div, sqrt, square, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ECCENTRICITY, FLUX } from "../law/ports.ts";
+import { eccentricityPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Time-mean stellar flux over an eccentric orbit: ⟨S⟩ = S(a)/√(1 − e²), in W m⁻².
@@ -13,8 +13,8 @@ export const orbitMeanFlux = /* @__PURE__ */ defineLaw({
   about: "Time-mean stellar flux over an eccentric orbit.",
   output: { symbol: "⟨S⟩", unit: "W m-2" },
   inputs: {
-    fluxAtSemiMajorAxis: { ...FLUX, symbol: "S_a", about: "flux at the distance of the semi-major axis" },
-    eccentricity: ECCENTRICITY,
+    fluxAtSemiMajorAxis: /* @__PURE__ */ fluxPort("S_a", "flux at the distance of the semi-major axis"),
+    eccentricity: /* @__PURE__ */ eccentricityPort(),
   },
   source: "Kepler's second law; use: Quirrenbach 2022",
   write({ fluxAtSemiMajorAxis, eccentricity }) {

@@ -1,7 +1,7 @@
-import type { Value } from "../graph/node.ts";
 import { add, div, fourth, mul, sqrt, square, sub } from "../graph/operations.ts";
+import type { Value } from "../graph/quantity.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ECCENTRICITY, FLUX } from "../law/ports.ts";
+import { eccentricityPort, fluxPort } from "../law/ports.ts";
 
 /** Steps of the arithmetic-geometric mean; each doubles the digits, and eight reach 2⁻⁵³ up to e = 0.9999. */
 const MEAN_STEPS = 8;
@@ -18,8 +18,8 @@ export const temperatureMeanFlux = /* @__PURE__ */ defineLaw({
   about: "The steady flux whose equilibrium temperature is the time-mean over an eccentric orbit.",
   output: { symbol: "S_⟨T⟩", unit: "W m-2" },
   inputs: {
-    fluxAtSemiMajorAxis: { ...FLUX, symbol: "S_a", about: "flux at the distance of the semi-major axis" },
-    eccentricity: ECCENTRICITY,
+    fluxAtSemiMajorAxis: /* @__PURE__ */ fluxPort("S_a", "flux at the distance of the semi-major axis"),
+    eccentricity: /* @__PURE__ */ eccentricityPort(),
   },
   source: "Méndez & Rivera-Valentín 2017, ApJL 837, L1",
   write({ fluxAtSemiMajorAxis, eccentricity }) {

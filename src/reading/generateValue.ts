@@ -1,6 +1,7 @@
 // Writes a graph as straight-line code.
 import { coneOf } from "../graph/cone.ts";
-import type { Compute, Graph, Op } from "../graph/node.ts";
+import type { Graph } from "../graph/node.ts";
+import type { Compute, Op } from "../graph/op.ts";
 import { compiled } from "./generation.ts";
 import { functionOf, type Kernel, missingInput, type ReadingOf } from "./readingOf.ts";
 

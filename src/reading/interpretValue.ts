@@ -1,6 +1,7 @@
 // Runs a graph node by node, without generating code: the same bits as the generated kernel.
 import { coneOf } from "../graph/cone.ts";
-import type { Compute, Graph, Op } from "../graph/node.ts";
+import type { Graph } from "../graph/node.ts";
+import type { Compute, Op } from "../graph/op.ts";
 import { exp } from "../ground/elementary/exp.ts";
 import { log } from "../ground/elementary/log.ts";
 import { max, min } from "../ground/elementary/minMax.ts";
@@ -36,7 +37,10 @@ export function interpretValue(g: Graph, { inputs, outputs }: ReadingOf): Kernel
   const steps: ((x: Float64Array) => void)[] = [];
   inputs.forEach((id, i) => {
     const to = place.get(id);
-    if (to !== undefined) steps.push((x) => void (work[to] = x[i] as number));
+    if (to === undefined) return;
+    steps.push((x) => {
+      work[to] = x[i] as number;
+    });
   });
   for (const id of list) {
     if (given.has(id)) continue;

@@ -1,5 +1,7 @@
 // What a reading of a graph is asked for and what it gives, shared by the generator and the interpreter.
-import type { Compute, Graph } from "../graph/node.ts";
+
+import type { Graph } from "../graph/node.ts";
+import type { Compute } from "../graph/op.ts";
 import { fail } from "../ground/errors.ts";
 
 /** Writes the outputs for the inputs; both keep the order in which they were asked for. */

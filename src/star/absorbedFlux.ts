@@ -1,6 +1,6 @@
 import { div, mul, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { ALBEDO, FLUX } from "../law/ports.ts";
+import { albedoPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Starlight that a sphere absorbs, per unit of its whole area: F = S(1 − α)/4, in W m⁻².
@@ -11,7 +11,7 @@ export const absorbedFlux = /* @__PURE__ */ defineLaw({
   name: "absorbedFlux",
   about: "Starlight that a sphere absorbs, per unit of its whole area.",
   output: { symbol: "F_abs", unit: "W m-2" },
-  inputs: { flux: FLUX, albedo: ALBEDO },
+  inputs: { flux: /* @__PURE__ */ fluxPort(), albedo: /* @__PURE__ */ albedoPort() },
   source: "geometry of a sphere in a parallel beam",
   write({ flux, albedo }) {
     const coAlbedo = sub(1, albedo);

@@ -14,8 +14,8 @@ export const stellarFlux = /* @__PURE__ */ defineLaw({
   about: "Flux of a star at a distance, normal to the beam.",
   output: { symbol: "S", unit: "W m-2" },
   inputs: {
-    luminosity: { symbol: "L", unit: "W", within: [0, 1e40], about: "stellar luminosity" },
-    distance: { symbol: "d", unit: "m", within: [1, 1e22], about: "distance from the star" },
+    luminosity: { symbol: "L", unit: "W", within: [0, 1e40] },
+    distance: { symbol: "d", unit: "m", within: [1, 1e22] },
   },
   source: "inverse-square law",
   write: ({ luminosity, distance }) => div(luminosity, mul(FOUR_PI, square(distance))),

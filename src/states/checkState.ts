@@ -42,9 +42,9 @@ export function checksOf(loop: Loop): Check[] {
 }
 
 /** The notes of the checks that fail. */
-export function notesFrom(checks: readonly Check[], valueOf: (node: number) => number): Note[] {
+export function notesFrom(checks: readonly Check[], read: (node: number) => number): Note[] {
   return checks.flatMap(({ node, range, note }) => {
-    const value = valueOf(node);
+    const value = read(node);
     return value >= range[0] && value <= range[1] ? [] : [{ ...note, value, range }];
   });
 }

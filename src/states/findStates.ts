@@ -69,8 +69,8 @@ const prepared = new WeakMap<Loop, Prepared>();
 
 /** The kernels of a loop, made at its first search. */
 function preparedFor(loop: Loop): Prepared {
-  let found = prepared.get(loop);
-  if (!found) prepared.set(loop, (found = { balance: balanceOf(loop), read: stateReader(loop) }));
+  const found = prepared.get(loop) ?? { balance: balanceOf(loop), read: stateReader(loop) };
+  prepared.set(loop, found);
   return found;
 }
 

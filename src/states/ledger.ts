@@ -11,11 +11,7 @@ const CLOSURE = 1e-12;
  * The flows of a loop's state between its reservoirs. Storage is not made from the flows: at the surface it is N, a layer
  * without heat capacity stores nothing, and space is not asked. So a ledger that does not close can be seen.
  */
-export function ledgerOf(
-  flows: readonly FlowRecord[],
-  net: number,
-  valueOf: (node: number) => number,
-): Ledger {
+export function ledgerOf(flows: readonly FlowRecord[], net: number, read: (node: number) => number): Ledger {
   const names = [...new Set(["space", "surface", ...flows.flatMap((f) => [f.from, f.to])])];
   return {
     reservoirs: names.map((name) => ({
@@ -26,7 +22,7 @@ export function ledgerOf(
       name,
       from,
       to,
-      value: valueOf(node),
+      value: read(node),
       standardName,
     })),
   };

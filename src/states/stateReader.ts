@@ -36,17 +36,17 @@ export function stateReader(loop: Loop): StateReader {
   const kernel = valueKernel(graph, { inputs, outputs: nodes });
   const values = new Float64Array(nodes.length);
   const place = new Map(nodes.map((node, i) => [node, i]));
-  const valueOf = (node: number) => values[place.get(node) as number] as number;
+  const valueAt = (node: number) => values[place.get(node) as number] as number;
   const named = (list: readonly { name: string; node: number }[]) =>
-    Object.fromEntries(list.map(({ name, node }) => [name, valueOf(node)]));
+    Object.fromEntries(list.map(({ name, node }) => [name, valueAt(node)]));
   return ({ at, bracket }, given) => {
     kernel(Float64Array.of(at, ...given), values);
-    const lambda = valueOf(nodes[1] as number);
-    const scale = Math.max(...flowSlopes.map((s) => Math.abs(valueOf(s))));
-    const capacity = valueOf(heatCapacity);
+    const lambda = valueAt(nodes[1] as number);
+    const scale = Math.max(...flowSlopes.map((s) => Math.abs(valueAt(s))));
+    const capacity = valueAt(heatCapacity);
     const stability =
       Math.abs(lambda) > SLOPE_NOISE * scale ? (lambda < 0 ? "stable" : "unstable") : "undecided";
-    const ledger = ledgerOf(flows, valueOf(net), valueOf);
+    const ledger = ledgerOf(flows, valueAt(net), valueAt);
     return deepFreeze({
       variables: { temperature: { value: at, bracket } },
       temperature: at,
@@ -59,9 +59,9 @@ export function stateReader(loop: Loop): StateReader {
       feedbackParameter: lambda,
       settledFeedbackParameter: lambda,
       eFoldingTime: stability === "stable" ? -capacity / lambda : null,
-      imbalance: { temperature: Math.abs(valueOf(net)) },
+      imbalance: { temperature: Math.abs(valueAt(net)) },
       ledger,
-      notes: [...notesFrom(checks, valueOf), ...openReservoirs(ledger), ...capacityNotes(capacity)],
+      notes: [...notesFrom(checks, valueAt), ...openReservoirs(ledger), ...capacityNotes(capacity)],
     });
   };
 }

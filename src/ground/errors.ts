@@ -60,7 +60,12 @@ export class ThermosteadError extends Error implements ErrorDetails {
 
 /** Throws a {@link ThermosteadError}; an expression, so that it can stand where a value is needed. */
 export function fail(code: ErrorCode, details: ErrorDetails): never {
-  throw new ThermosteadError(code, details);
+  const { stackTraceLimit } = Error;
+  // V8 keeps ten frames unless told, and our own would hide the caller's line
+  Error.stackTraceLimit = 50;
+  const error = new ThermosteadError(code, details);
+  Error.stackTraceLimit = stackTraceLimit;
+  throw error;
 }
 
 function shown(value: unknown): string {

@@ -60,11 +60,17 @@ export interface Budget<N extends string = string> {
 }
 
 /** The names of the givens among the names a loop depends on. */
-export type Givens<N extends string> = N extends `given ${infer G}` ? G : never;
+export type Givens<N extends string> = string extends N ? string : N extends `given ${infer G}` ? G : never;
 /** The names of the couplings. */
-export type Couplings<N extends string> = N extends `coupling ${infer G}` ? G : never;
-/** The names of the variables. */
-export type Variables<N extends string> = N extends `variable ${infer G}` ? G : never;
+export type Couplings<N extends string> = string extends N
+  ? string
+  : N extends `coupling ${infer G}`
+    ? G
+    : never;
+/** The names of the variables; temperature is always one. */
+export type Variables<N extends string> = string extends N
+  ? string
+  : "temperature" | (N extends `variable ${infer G}` ? G : never);
 
 /** A state variable of a loop. */
 export interface VariableRecord {

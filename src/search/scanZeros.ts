@@ -18,8 +18,8 @@ export interface Crossing {
 /** Where sampling cannot decide. */
 export interface Doubt {
   readonly interval: readonly [number, number];
-  /** `fold`: an extremum that cannot be told from zero; `flat`: zero on a stretch; `edge`: a zero at an end of the range. */
-  readonly kind: "fold" | "flat" | "edge" | "undefined" | "effort";
+  /** `fold`: an extremum that cannot be told from zero; `flat`: zero on a stretch; `jump`: a change of sign without a zero; `edge`: a zero at an end of the range. */
+  readonly kind: "fold" | "flat" | "jump" | "edge" | "undefined" | "effort";
 }
 
 /** What a scan found and what it spent. */
@@ -94,8 +94,9 @@ function halve(
   const m = sample(a.x + (b.x - a.x) / 2);
   const predicted = (a.value + b.value) / 2 + ((b.x - a.x) * (a.slope - b.slope)) / 8;
   const least = Math.min(Math.abs(a.value), Math.abs(m.value), Math.abs(b.value));
-  const plain =
-    Math.abs(m.value - predicted) <= 0.25 * least || (a.sign === 0 && m.sign === 0 && b.sign === 0);
+  const signs = [a.sign, m.sign, b.sign];
+  const settled = signs.every((sign) => sign === 0) || signs.every(Number.isNaN);
+  const plain = settled || Math.abs(m.value - predicted) <= 0.25 * least;
   if (!plain && m.x > a.x && m.x < b.x) halve(a, m, left - 1, sample, push, may);
   push(m);
   if (!plain && m.x > a.x && m.x < b.x) halve(m, b, left - 1, sample, push, may);
@@ -114,7 +115,11 @@ function judge(
       doubts[doubts.length - 1] = { kind, interval: [last.interval[0], b] };
     else doubts.push({ kind, interval: [a, b] });
   };
-  const cross = (a: Point, b: Point) => crossings.push(refineZero(sample, a, b));
+  const cross = (a: Point, b: Point) => {
+    const { jump, ...crossing } = refineZero(sample, a, b);
+    if (jump) doubt(...crossing.bracket, "jump");
+    else crossings.push(crossing);
+  };
   for (let i = 0; i + 1 < points.length; ) {
     const a = points[i] as Point;
     let j = i + 1;

@@ -53,10 +53,10 @@ export interface State<N extends string = string> {
 export interface Undecided {
   readonly interval: readonly [number, number];
   /**
-   * `fold`: two states about to merge, or none. `flat`: balanced on a whole stretch. `edge`: a state at an end of the range.
+   * `fold`: two states about to merge, or none. `flat`: balanced on a whole stretch. `jump`: the balance changes sign without passing through zero. `edge`: a state at an end of the range.
    * `undefined`: the budget has no value there. `effort`: the search stopped before.
    */
-  readonly kind: "fold" | "flat" | "edge" | "undefined" | "effort";
+  readonly kind: "fold" | "flat" | "jump" | "edge" | "undefined" | "effort";
 }
 
 /** What a search for states found, how sure it is, and what it cost. */

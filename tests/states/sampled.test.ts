@@ -1,0 +1,176 @@
+// The sampled search: what it finds near folds, corners and flat stretches, and what it admits.
+import { describe, expect, test } from "vitest";
+import * as core from "../../src/index.ts";
+import { refusal } from "../refusal.ts";
+
+const ICE = { cold: 0.7, warm: 0.3, midpoint: 265, width: 10 };
+
+/** σ ∝ the case's own 5.67e-8, so that the folds of the published table apply. */
+const iceLoop = () =>
+  core.closeLoop(({ temperature, given }) => ({
+    heating: {
+      sunlight: core.absorbedFlux({
+        flux: given("flux", 1361, "W m-2", { within: [0, 1e5] }),
+        albedo: core.tanhAlbedo({ temperature, ...ICE }),
+      }),
+    },
+    cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+    heatCapacity: 4.2e8,
+  }));
+
+/** A loop whose net flux is a given formula of temperature. */
+const loopOf = (write: (temperature: core.Quantity) => core.Value) =>
+  core.closeLoop(({ temperature }) => ({
+    heating: { imagined: core.inUnit(write(core.inUnit(temperature, "1")), "W m-2") },
+    cooling: {},
+    heatCapacity: 1,
+  }));
+
+describe("the sampled search", () => {
+  const { add, div, findStates, log, max, mul, square, sub } = core;
+
+  test("says that it is one", () => {
+    const found = findStates(iceLoop(), { within: [150, 400] });
+    expect(found).toMatchObject({ proof: "sampled", complete: false, within: [150, 400] });
+    expect(found.notes.map((n) => n.code)).toEqual(["sampled-search"]);
+    expect(found.cost.evaluations).toBeGreaterThan(500);
+    expect(found.constants).toContain("CODATA 2018");
+  });
+
+  test("finds two states that are about to merge, and none beyond the fold", () => {
+    // double root at 300.3, distances from 1 to 1e-6 K; then none
+    for (const gap of [1, 1e-2, 1e-4, 1e-6]) {
+      const pair = loopOf((t) => sub(square(sub(t, 300.3)), (gap * gap) / 4));
+      const { states } = findStates(pair, { within: [150, 400] });
+      expect(states.map((s) => s.stability)).toEqual(["stable", "unstable"]);
+      expect((states[1]?.temperature as number) - (states[0]?.temperature as number)).toBeCloseTo(gap, 9);
+    }
+    const none = loopOf((t) => add(square(sub(t, 300.3)), 1e-9));
+    expect(findStates(none, { within: [150, 400] })).toMatchObject({ states: [], undecided: [] });
+  });
+
+  test("admits a fold that it cannot tell from a touching", () => {
+    const touching = loopOf((t) => square(sub(t, 300.3)));
+    const found = findStates(touching, { within: [150, 400] });
+    expect(found.states).toEqual([]);
+    expect(found.undecided).toMatchObject([{ kind: "fold" }]);
+  });
+
+  test("admits a stretch on which everything is balanced", () => {
+    const flat = loopOf((t) => max(0, sub(t, 300)));
+    const found = findStates(flat, { within: [150, 400] });
+    expect(found.states).toEqual([]);
+    expect(found.undecided).toMatchObject([{ kind: "flat" }]);
+    expect(found.undecided[0]?.interval[0]).toBe(150);
+    expect(found.undecided[0]?.interval[1]).toBeCloseTo(300, -1);
+  });
+
+  test("admits where the budget has no value", () => {
+    const partial = loopOf((t) => log(sub(t, 200)));
+    const found = findStates(partial, { within: [150, 400] });
+    expect(found.states.map((s) => s.temperature)).toEqual([201]);
+    expect(found.undecided.map((u) => u.kind)).toContain("undefined");
+  });
+
+  test("takes a pole for what it is not: no state is claimed with a large imbalance", () => {
+    const pole = loopOf((t) => div(1, sub(t, 300.123)));
+    const found = findStates(pole, { within: [150, 400] });
+    expect(found.states).toEqual([]);
+  });
+
+  test("says when its effort is spent, and where", () => {
+    const found = findStates(iceLoop(), { within: [150, 400], effort: 40 });
+    expect(found.cost.evaluations).toBeLessThan(400);
+    const short = loopOf((t) => core.tanh(mul(30, sub(t, 300.3))));
+    const stopped = findStates(short, { within: [150, 400], effort: 10 });
+    expect(stopped.states.length + stopped.undecided.length).toBeGreaterThan(0);
+  });
+
+  test("changes nothing but the givens it is told", () => {
+    const loop = iceLoop();
+    const warm = findStates(loop, { within: [150, 400], at: { flux: 1800 } });
+    expect(warm.states).toHaveLength(1);
+    expect(warm.states[0]?.givens).toEqual({ flux: 1800 });
+    expect(findStates(loop, { within: [150, 400] }).states).toHaveLength(3);
+    expect(findStates(loop, { within: [150, 400], at: { flux: undefined } }).states).toHaveLength(3);
+  });
+
+  test.each<[string, unknown, Partial<core.ThermosteadError>]>([
+    ["a reversed range", { within: [400, 150] }, { code: "out-of-range", path: "within[1]", unit: "K" }],
+    ["an empty range", { within: [300, 300] }, { code: "out-of-range" }],
+    ["no range", {}, { code: "unreadable", path: "within" }],
+    ["a range with NaN", { within: [Number.NaN, 400] }, { code: "not-a-number", path: "within[0]" }],
+    ["a range below absolute zero", { within: [-1, 400] }, { code: "out-of-range", path: "within[0]" }],
+    ["an unknown given", { within: [150, 400], at: { flx: 1 } }, { code: "unknown-name", path: "at.flx" }],
+    [
+      "a given outside its range",
+      { within: [150, 400], at: { flux: -1 } },
+      { code: "out-of-range", path: "at.flux", unit: "W m-2" },
+    ],
+    [
+      "a NaN given",
+      { within: [150, 400], at: { flux: Number.NaN } },
+      { code: "not-a-number", path: "at.flux" },
+    ],
+    [
+      "a given called __proto__",
+      { within: [150, 400], at: JSON.parse('{ "__proto__": 1 }') },
+      { code: "unknown-name" },
+    ],
+    [
+      "an unknown option",
+      { within: [150, 400], stepps: 3 },
+      { code: "unknown-name", path: "findStates.stepps" },
+    ],
+    ["an effort of 0", { within: [150, 400], effort: 0 }, { code: "out-of-range", path: "effort" }],
+  ])("refuses %s", (_, options, expected) => {
+    expect(refusal(() => findStates(iceLoop(), options as never))).toMatchObject(expected);
+  });
+});
+
+describe("a state", () => {
+  const [cold, middle, warm] = core.findStates(iceLoop(), { within: [150, 400] }).states;
+
+  test("is a frozen plain object that survives JSON", () => {
+    expect(JSON.parse(JSON.stringify(cold))).toEqual(cold);
+    expect(Object.isFrozen(cold?.ledger.flows[0])).toBe(true);
+  });
+
+  test("has times only where it returns", () => {
+    expect(cold?.eFoldingTime).toBeCloseTo(-4.2e8 / (cold?.feedbackParameter as number), -3);
+    expect(middle?.eFoldingTime).toBeNull();
+    expect(warm?.eigenvalues?.[0]?.re).toBeLessThan(0);
+  });
+
+  test("carries a caution outside the published range, and is invalid outside the hard one", () => {
+    const hot = core.findStates(iceLoop(), { within: [150, 600], at: { flux: 4000 } }).states.at(-1);
+    expect(hot?.notes).toMatchObject([
+      {
+        code: "outside-published",
+        severity: "caution",
+        about: "tanhAlbedo.temperature",
+        range: [200, 340],
+        unit: "K",
+      },
+    ]);
+    const overfull = core.closeLoop(({ temperature, given }) => ({
+      heating: {
+        sunlight: core.absorbedFlux({
+          flux: 1361,
+          albedo: core.mixAlbedo({
+            covers: [{ fraction: given("cover", 0.5, "1"), albedo: 0.2 }],
+            bare: 0.4,
+          }),
+        }),
+      },
+      cooling: { longwave: core.greyEmission({ temperature, emissivity: 1 }) },
+      heatCapacity: 1,
+    }));
+    expect(core.findStates(overfull, { within: [150, 400] }).states[0]?.notes).toEqual([]);
+    const [invalid] = core.findStates(overfull, { within: [150, 400], at: { cover: 1.2 } }).states;
+    expect(invalid?.notes).toMatchObject([
+      { code: "outside-range", severity: "invalid", about: "mixAlbedo.covers[0].fraction", value: 1.2 },
+      { code: "outside-range", severity: "invalid" },
+    ]);
+  });
+});

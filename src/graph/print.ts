@@ -1,4 +1,5 @@
 // Prints a node as a formula on paper: plain text that common expression parsers read, or TeX.
+import { coneOf } from "./cone.ts";
 import type { Graph } from "./node.ts";
 import type { Op } from "./op.ts";
 
@@ -20,15 +21,46 @@ interface Printed {
   readonly rank: number;
 }
 
-/** The formula of `node`. Shared parts are written out each time they occur. */
+/** A formula longer than this many operations, written out, is broken into named steps. */
+const LONGEST = 60;
+/** A shared part smaller than this is written out wherever it occurs. */
+const SMALLEST_STEP = 4;
+
+/**
+ * The formula of `node`. Shared parts are written out each time they occur, unless that becomes too long: then they are
+ * named first, one step a line (`s1 = ...`), and the last line is the formula.
+ */
 export function printNode(g: Graph, node: number, options: PrintOptions): string {
-  const known = new Map<number, Printed>();
-  const print = (id: number): Printed => {
-    const p = known.get(id) ?? printOne(g, id, options, print);
-    known.set(id, p);
-    return p;
-  };
-  return print(node).text;
+  const named = new Map(options.names);
+  const lines: string[] = [];
+  const printer = (id: number): Printed => printOne(g, id, { ...options, names: named }, printer);
+  const steps = stepsOf(g, node, options);
+  steps.forEach((id, i) => {
+    const text = printer(id).text;
+    const name = options.notation === "tex" ? `s_{${i + 1}}` : `s${i + 1}`;
+    lines.push(`${name} = ${text}`);
+    named.set(id, name);
+  });
+  lines.push(printer(node).text);
+  return lines.join(options.notation === "tex" ? " \\\\ " : "\n");
+}
+
+/** The shared parts to be named, each after those it needs; none when the formula is short enough. */
+function stepsOf(g: Graph, node: number, { names }: PrintOptions): number[] {
+  const cone = coneOf(g, [node], names.keys());
+  const size = new Map<number, number>();
+  const uses = new Map<number, number>();
+  for (const id of cone) {
+    const args = names.has(id) ? [] : (g.args[id] as readonly number[]);
+    size.set(
+      id,
+      args.reduce((total, a) => total + (size.get(a) as number), 1),
+    );
+    for (const a of new Set(args)) uses.set(a, (uses.get(a) ?? 0) + 1);
+  }
+  if ((size.get(node) as number) <= LONGEST) return [];
+  const shared = (id: number) => (uses.get(id) as number) > 1 && (size.get(id) as number) >= SMALLEST_STEP;
+  return cone.filter((id) => id !== node && shared(id) && !names.has(id) && g.ops[id] !== "mean");
 }
 
 function printOne(g: Graph, id: number, options: PrintOptions, print: (id: number) => Printed): Printed {

@@ -76,6 +76,7 @@ describe("the sampled search", () => {
     const pole = loopOf((t) => div(1, sub(t, 300.123)));
     const found = findStates(pole, { within: [150, 400] });
     expect(found.states).toEqual([]);
+    expect(found.undecided).toMatchObject([{ kind: "jump" }]);
   });
 
   test("says when its effort is spent, and where", () => {

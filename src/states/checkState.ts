@@ -41,12 +41,14 @@ export function checksOf(loop: Loop): Check[] {
   return checks;
 }
 
-/** The notes of the checks that fail. */
-export function notesFrom(checks: readonly Check[], read: (node: number) => number): Note[] {
-  return checks.flatMap(({ node, range, note }) => {
-    const value = read(node);
-    return value >= range[0] && value <= range[1] ? [] : [{ ...note, value, range }];
+/** The notes of the checks that fail, for the values of the checks' nodes in order. */
+export function notesFrom(checks: readonly Check[], values: Float64Array): Note[] {
+  const notes: Note[] = [];
+  checks.forEach(({ range, note }, i) => {
+    const value = values[i] as number;
+    if (!(value >= range[0] && value <= range[1])) notes.push(Object.freeze({ ...note, value, range }));
   });
+  return notes;
 }
 
 function hard(card: LawCard, wire: string, node: number, range: Range, unit: string): Check {

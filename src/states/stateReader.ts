@@ -1,11 +1,11 @@
 // Reads everything about a state of a loop of one variable at a temperature.
-
 import { derivative } from "../graph/derivative.ts";
+import { fail } from "../ground/errors.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { checksOf, notesFrom } from "./checkState.ts";
-import { ledgerOf, openReservoirs } from "./ledger.ts";
+import { ledgerWriter, openReservoirs } from "./ledger.ts";
 import type { Note } from "./note.ts";
 import type { State } from "./state.ts";
 
@@ -25,45 +25,77 @@ const SLOPE_NOISE = 1e-13;
 export function stateReader(loop: Loop): StateReader {
   const { graph, net, heatCapacity, flows, couplings, report, givens } = loop;
   const inputs = inputsOf(loop);
-  const temperature = inputs[0] as number;
-  const slopeOf = (node: number) => derivative(graph, node, temperature, inputs);
+  const slopeOf = (node: number) => derivative(graph, node, inputs[0] as number, inputs);
   const checks = checksOf(loop);
-  const flowSlopes = flows.map((f) => slopeOf(f.node));
-  const nodes = [
-    ...[net, slopeOf(net), heatCapacity, ...flowSlopes],
-    ...[...flows, ...couplings, ...report, ...checks].map((r) => r.node),
+  const groups = [
+    [net, slopeOf(net), heatCapacity],
+    flows.map((f) => slopeOf(f.node)),
+    ...[flows, couplings, report, checks].map((list) => list.map((r) => r.node)),
   ];
-  const kernel = valueKernel(graph, { inputs, outputs: nodes });
-  const values = new Float64Array(nodes.length);
-  const place = new Map(nodes.map((node, i) => [node, i]));
-  const valueAt = (node: number) => values[place.get(node) as number] as number;
-  const named = (list: readonly { name: string; node: number }[]) =>
-    Object.fromEntries(list.map(({ name, node }) => [name, valueAt(node)]));
-  return ({ at, bracket }, given) => {
-    kernel(Float64Array.of(at, ...given), values);
-    const lambda = valueAt(nodes[1] as number);
-    const scale = Math.max(...flowSlopes.map((s) => Math.abs(valueAt(s))));
-    const capacity = valueAt(heatCapacity);
-    const stability =
-      Math.abs(lambda) > SLOPE_NOISE * scale ? (lambda < 0 ? "stable" : "unstable") : "undecided";
-    const ledger = ledgerOf(flows, valueAt(net), valueAt);
-    return deepFreeze({
-      variables: { temperature: { value: at, bracket } },
+  const kernel = valueKernel(graph, { inputs, outputs: groups.flat() });
+  const all = new Float64Array(groups.flat().length);
+  // one view of the kernel's output for each group
+  let end = 0;
+  const views = groups.map((group) => {
+    end += group.length;
+    return all.subarray(end - group.length, end);
+  });
+  const [core, slopes, flowValues, coupled, reported, checked] = views as [
+    Values,
+    Values,
+    Values,
+    Values,
+    Values,
+    Values,
+  ];
+  const named = (list: readonly { name: string }[]) => list.map((r) => r.name);
+  const names = ["net flux", "feedbackParameter", "heatCapacity", ...flows.map((f) => `slope of ${f.name}`)];
+  names.push(...named(flows), ...named(couplings), ...named(report), ...checks.map((c) => c.note.about));
+  const writeLedger = ledgerWriter(flows);
+  return (located, given) => {
+    const { at } = located;
+    kernel(Float64Array.of(at, ...given), all);
+    for (let i = 0; i < all.length; i++) if (!Number.isFinite(all[i])) failAt(names[i] as string, all[i]);
+    const [netFlux, lambda, capacity] = core as unknown as [number, number, number];
+    const bracket = Object.freeze([located.bracket[0], located.bracket[1]] as const);
+    let scale = 0;
+    for (const slope of slopes) scale = Math.max(scale, Math.abs(slope));
+    const decided = Math.abs(lambda) > SLOPE_NOISE * scale;
+    const stability = decided ? (lambda < 0 ? "stable" : "unstable") : "undecided";
+    const ledger = writeLedger(flowValues, netFlux);
+    const notes = [...notesFrom(checks, checked), ...openReservoirs(ledger), ...capacityNotes(capacity)];
+    return Object.freeze({
+      variables: Object.freeze({ temperature: Object.freeze({ value: at, bracket }) }),
       temperature: at,
       bracket,
-      givens: Object.fromEntries(givens.map(({ name }, i) => [name, given[i] as number])),
-      couplings: named(couplings),
-      report: named(report),
+      givens: namedValues(givens, given),
+      couplings: namedValues(couplings, coupled),
+      report: namedValues(report, reported),
       stability,
-      eigenvalues: capacity > 0 ? [{ re: lambda / capacity, im: 0 }] : null,
+      eigenvalues: capacity > 0 ? Object.freeze([Object.freeze({ re: lambda / capacity, im: 0 })]) : null,
       feedbackParameter: lambda,
       settledFeedbackParameter: lambda,
       eFoldingTime: stability === "stable" ? -capacity / lambda : null,
-      imbalance: { temperature: Math.abs(valueAt(net)) },
+      imbalance: Object.freeze({ temperature: Math.abs(netFlux) }),
       ledger,
-      notes: [...notesFrom(checks, valueAt), ...openReservoirs(ledger), ...capacityNotes(capacity)],
+      notes: Object.freeze(notes),
     });
   };
+}
+
+/** No NaN and no infinity leaves in a state. */
+const failAt = (path: string, value: unknown): never =>
+  fail("not-finite", { path, value, allowed: "a finite number in every state" });
+
+type Values = Float64Array;
+
+function namedValues(
+  list: readonly { readonly name: string }[],
+  values: ArrayLike<number>,
+): Readonly<Record<string, number>> {
+  const record: Record<string, number> = {};
+  for (let i = 0; i < list.length; i++) record[(list[i] as { name: string }).name] = values[i] as number;
+  return Object.freeze(record);
 }
 
 function capacityNotes(capacity: number): Note[] {
@@ -72,12 +104,4 @@ function capacityNotes(capacity: number): Note[] {
   const range = [0, Number.MAX_VALUE] as const;
   const rest = { value: capacity, range, unit: "J m-2 K-1", text, source: null };
   return [{ code: "negative-heat-capacity", severity: "invalid", about: "heatCapacity", ...rest }];
-}
-
-function deepFreeze<T>(value: T): T {
-  if (typeof value === "object" && value !== null && !Object.isFrozen(value)) {
-    Object.values(value).forEach(deepFreeze);
-    Object.freeze(value);
-  }
-  return value;
 }

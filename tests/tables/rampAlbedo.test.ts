@@ -1,0 +1,98 @@
+// Table ii: every equilibrium with a ramp albedo and a straight-line emission.
+import { describe, expect, test } from "vitest";
+import { rampAlbedo } from "../../src/albedo/rampAlbedo.ts";
+import { linearEmission } from "../../src/greenhouse/linearEmission.ts";
+import { slopesOf } from "../../src/law/slopesOf.ts";
+import { closeLoop } from "../../src/loop/closeLoop.ts";
+import { absorbedFlux } from "../../src/star/absorbedFlux.ts";
+import { findStates } from "../../src/states/findStates.ts";
+import type { State } from "../../src/states/state.ts";
+import table from "../reference/computed/ii_ramp_linear.json" with { type: "json" };
+import { expectRow, expectState, type Reading } from "./compareState.ts";
+import { nearest, numbers, of, type ReferenceCase, type ReferenceRow } from "./table.ts";
+
+const cases = table.cases as unknown as ReferenceCase<
+  "A" | "B" | "T_ice" | "T_free" | "alpha_ice" | "alpha_free"
+>[];
+
+/** Rows that no search in doubles can decide: 4000/3, 550/3 and 8800/7 are not doubles, and a corner is touched, not crossed. */
+const UNDECIDABLE: Readonly<Record<string, readonly number[]>> = {
+  "ii-d2-continuum at 4000/3": [-20, 20],
+  "ii-e-corner-roots at 1800": [-10],
+  "ii-e-corner-roots at 8800/7": [10],
+};
+/** Temperatures searched, K: below every state of the table and above. */
+const WITHIN = [120, 460] as const;
+
+/** A case of the table: its loop, and how our states are read. */
+function prepared({ inputs, unit }: (typeof cases)[number]) {
+  // the zero of the Celsius cases is put at 273 K, an integer, so that no temperature is rounded by the shift
+  const zero = unit === "K" ? 0 : 273;
+  const p = numbers(inputs);
+  const albedo = {
+    cold: p.alpha_ice,
+    warm: p.alpha_free,
+    frozenBelow: p.T_ice + zero,
+    openAbove: p.T_free + zero,
+  };
+  const emission = { intercept: p.A, slope: p.B, reference: zero };
+  const loop = closeLoop(({ temperature, given, couple }) => {
+    const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+    return {
+      heating: {
+        sunlight: absorbedFlux({ flux, albedo: couple("albedo", rampAlbedo({ temperature, ...albedo })) }),
+      },
+      cooling: { longwave: linearEmission({ temperature, ...emission }) },
+      heatCapacity: 4e8,
+    };
+  });
+  const read = ({ temperature, givens, ledger }: State): Reading => ({
+    size: ledger.flows.reduce((sum, flow) => sum + Math.abs(flow.value), 2 * Math.abs(p.A)),
+    parts: {
+      outgoing: -of(slopesOf(linearEmission, { temperature, ...emission }).slopes, "temperature"),
+      albedo:
+        (-of(givens, "flux") / 4) *
+        of(slopesOf(rampAlbedo, { temperature, ...albedo }).slopes, "temperature"),
+    },
+    reference: "outgoing",
+  });
+  const search = (S: string) => findStates(loop, { within: WITHIN, at: { flux: nearest(S) } });
+  return { zero, read, search };
+}
+
+describe.each(cases)("$id", (reference) => {
+  const { zero, read, search } = prepared(reference);
+  const decidable = reference.rows.filter((row) => !(`${reference.id} at ${row.S}` in UNDECIDABLE));
+  test.each(decidable)("S = $S", (row) => {
+    expectRow(search(row.S) as never, row, zero, read);
+  });
+});
+
+describe("rows that are undecided", () => {
+  test.each(Object.entries(UNDECIDABLE))("%s", (name, corners) => {
+    const [id, S] = name.split(" at ") as [string, string];
+    const reference = cases.find((c) => c.id === id) as (typeof cases)[number];
+    const { zero, read, search } = prepared(reference);
+    const found = search(S);
+    const row = reference.rows.find((r) => r.S === S) as ReferenceRow;
+    const decided = row.states.filter((state) => state.onCorner === false);
+
+    expect(found.complete).toBe(false);
+    expect(found.undecided).toHaveLength(1);
+    const [low, high] = (found.undecided[0] as (typeof found.undecided)[number]).interval;
+    const [first, last] = [corners[0] as number, corners.at(-1) as number];
+    expect(low).toBeLessThanOrEqual(first + zero);
+    expect(high).toBeGreaterThanOrEqual(last + zero);
+    // no wider than it need be: a thousandth of the range
+    expect(high - low).toBeLessThanOrEqual(last - first + (WITHIN[1] - WITHIN[0]) / 1000);
+    expect(found.states).toHaveLength(decided.length);
+    decided.forEach((state, i) => {
+      expectState(found.states[i] as State, state, zero, read);
+    });
+  });
+});
+
+test("the table has every row", () => {
+  expect(cases.map((c) => c.rows.length)).toEqual([18, 18, 18, 4, 3, 4]);
+  expect(cases.flatMap((c) => c.rows.flatMap((row) => row.states))).toHaveLength(125);
+});

@@ -1,0 +1,73 @@
+// Inputs that say the same thing twice must agree, and the orbit must stay outside the star.
+import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
+import { fail } from "../ground/errors.ts";
+import { type PlanetNote, planetNote } from "./planetNote.ts";
+import type { PlanetDescription } from "./planetShape.ts";
+import { distanceWays, fluxWays, luminosityWays, type Way } from "./starlight.ts";
+
+/** How far two inputs for one quantity may lie apart: common practice, larger than rounded catalogue values differ. */
+const AGREEMENT = 0.02;
+
+/** 4π, the nearest double. */
+const FOUR_PI = 12.566370614359172;
+
+/** The values of a description by path. */
+export type Numbers = (path: string) => number;
+
+/** Notes on inputs that agree. Throws `contradiction` with both numbers, `missing`. */
+export function checkAgreement(d: PlanetDescription, numbers: Numbers): PlanetNote[] {
+  const notes = [
+    ...agreeing(luminosityWays(d), numbers, { name: "luminosity", unit: "W" }),
+    ...agreeing(distanceWays(d), numbers, { name: "semi-major axis", unit: "m" }),
+    ...agreeing(fluxWays(d), numbers, { name: "flux at the semi-major axis", unit: "W m-2" }),
+  ];
+  checkPeriastron(d, numbers);
+  return notes;
+}
+
+function agreeing(
+  [first, ...others]: readonly Way[],
+  numbers: Numbers,
+  { name, unit }: { name: string; unit: string },
+): PlanetNote[] {
+  return others.map((other) => {
+    const [used, spare] = [(first as Way).of(numbers) as number, other.of(numbers) as number];
+    const [from, by] = [(first as Way).uses.join(" and "), other.uses.join(" and ")];
+    if (!(Math.abs(spare - used) <= AGREEMENT * used)) {
+      fail("contradiction", {
+        path: by,
+        value: spare,
+        allowed: `2 % around what ${from} gives, ${used}`,
+        unit,
+      });
+    }
+    const text = `${by} give the ${name} within 2 % of ${from}, which is used`;
+    return planetNote({ code: "inputs-agree", about: by, value: spare, unit, text });
+  });
+}
+
+/** Throws `contradiction` when the planet comes as near to the star's centre as the star is large. */
+function checkPeriastron(d: PlanetDescription, numbers: Numbers): void {
+  const luminosity = luminosityWays(d)[0]?.of(numbers) as number | undefined;
+  const distance = distanceOf(d, numbers, luminosity);
+  const radius = radiusOf(d, numbers, luminosity);
+  if (distance === undefined || radius === undefined) return;
+  const eccentricity = d.orbit.eccentricity === undefined ? 0 : numbers("orbit.eccentricity");
+  const periastron = distance * (1 - eccentricity);
+  if (periastron > radius) return;
+  const allowed = `a periastron a(1 − e) above the radius of the star, ${radius}`;
+  fail("contradiction", { path: "orbit", value: periastron, allowed, unit: "m" });
+}
+
+function distanceOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {
+  const stated = distanceWays(d)[0]?.of(numbers) as number | undefined;
+  if (stated !== undefined || luminosity === undefined || d.orbit.flux === undefined) return stated;
+  return Math.sqrt(luminosity / (FOUR_PI * numbers("orbit.flux")));
+}
+
+function radiusOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {
+  if (d.star?.radius !== undefined) return numbers("star.radius");
+  if (d.star?.effectiveTemperature === undefined || luminosity === undefined) return undefined;
+  const squared = numbers("star.effectiveTemperature") * numbers("star.effectiveTemperature");
+  return Math.sqrt(luminosity / (FOUR_PI * STEFAN_BOLTZMANN)) / squared;
+}

@@ -1,0 +1,63 @@
+// All checks of a description, in the order in which their errors help most.
+import { fail } from "../ground/errors.ts";
+import { checkAgreement, type Numbers } from "./agreement.ts";
+import { checkCovers } from "./coverAlbedo.ts";
+import { plainCopy } from "./plainCopy.ts";
+import { planetBudget } from "./planetBudget.ts";
+import { type PlanetInput, planetInputs } from "./planetInputs.ts";
+import type { PlanetNote } from "./planetNote.ts";
+import { PLANET_SHAPE, type PlanetDescription } from "./planetShape.ts";
+import { failShape } from "./shapeError.ts";
+
+/** A temperature at which every law is tried with plain numbers, K. */
+const TRIAL_TEMPERATURE = 288;
+
+/** A description without a fault. */
+export interface CheckedPlanet {
+  readonly description: PlanetDescription;
+  readonly inputs: readonly PlanetInput[];
+  readonly numbers: Numbers;
+  readonly agreeing: readonly PlanetNote[];
+  /** What the budget reports at the trial temperature. */
+  readonly trial: Readonly<Record<string, number>>;
+}
+
+/** Checks size and kind of the data, then its shape, its units and ranges, its agreement, and its laws with numbers. */
+export function checkedPlanet(value: unknown): CheckedPlanet {
+  if (typeof value !== "object" || value === null) {
+    fail("unreadable", {
+      path: "description",
+      value,
+      allowed: "a description: an object (a JSON text must be parsed first)",
+    });
+  }
+  const plain = plainCopy(value);
+  const shaped = PLANET_SHAPE.safeParse(plain);
+  if (!shaped.success) failShape(PLANET_SHAPE, plain);
+  const description = plain as PlanetDescription;
+  const inputs = planetInputs(description);
+  const byPath = new Map(inputs.map((input) => [input.path, input.value]));
+  const numbers: Numbers = (path) => byPath.get(path) as number;
+  checkAverage(description, numbers);
+  if (typeof description.albedo === "object" && "covers" in description.albedo)
+    checkCovers(description.albedo.covers, numbers);
+  const agreeing = checkAgreement(description, numbers);
+  const { report } = planetBudget(description, {
+    wire: numbers,
+    temperature: TRIAL_TEMPERATURE,
+    couple: (_, albedo) => albedo,
+    redistribution: numbers("redistribution"),
+  });
+  return { description, inputs, numbers, agreeing, trial: report as Record<string, number> };
+}
+
+/** On an eccentric orbit the mean flux and the mean temperature differ, so one must be chosen. */
+function checkAverage({ orbit }: PlanetDescription, numbers: Numbers): void {
+  if (orbit.eccentricity === undefined || orbit.average !== undefined) return;
+  if (numbers("orbit.eccentricity") === 0) return;
+  fail("missing", {
+    path: "orbit.average",
+    value: undefined,
+    allowed: '"flux" or "temperature", because the eccentricity is not 0',
+  });
+}

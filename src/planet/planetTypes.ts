@@ -1,0 +1,37 @@
+// What reading a description gives.
+import type { Loop } from "../loop/types.ts";
+import type { PlanetAssumptions } from "./assumptions.ts";
+import type { PlanetInput } from "./planetInputs.ts";
+import type { PlanetNote } from "./planetNote.ts";
+import type { PlanetDescription } from "./planetShape.ts";
+
+/** The names of a planet's loop: its givens are the paths of its inputs. */
+export type PlanetNames = "variable temperature" | "coupling albedo" | `given ${string}`;
+
+/** The equilibrium temperature εσT⁴ = f·S(1 − A) + F_i with all that it depends on. It is not the surface temperature. */
+export interface PlanetEquilibriumTemperature {
+  /** K. */
+  readonly value: number;
+  readonly unit: "K";
+  readonly albedo: number;
+  readonly redistribution: number;
+  readonly emissivity: 1;
+  /** W m⁻². */
+  readonly internalFlux: number;
+}
+
+/** A planet that was read: its loop, and what its numbers rest on. */
+export interface Planet {
+  /** The description as it was given: checked, plain and frozen. */
+  readonly description: PlanetDescription;
+  /** Ready for `findStates`; every input that counts is a given named by its path. Reports flux, albedo and equilibriumTemperature. */
+  readonly loop: Loop<PlanetNames>;
+  /** All numeric values of the description in SI. */
+  readonly inputs: readonly PlanetInput[];
+  /** Stellar flux normal to the beam in the mean over the orbit, W m⁻²: S, not S/4. */
+  readonly flux: number;
+  /** Null where the albedo answers to temperature: then each state has its own, in `report.equilibriumTemperature`. */
+  readonly equilibriumTemperature: PlanetEquilibriumTemperature | null;
+  readonly assumptions: PlanetAssumptions;
+  readonly notes: readonly PlanetNote[];
+}

@@ -1,0 +1,58 @@
+// Reads a planet from its description.
+import { assumptionNotes, assumptionsOf } from "./assumptions.ts";
+import { checkedPlanet } from "./checkedPlanet.ts";
+import { planetLoop } from "./planetLoop.ts";
+import type { Planet } from "./planetTypes.ts";
+import { unusedNotes } from "./unusedNotes.ts";
+
+/**
+ * Reads a planet from its description in the format `thermostead-planet-1` and closes its energy budget:
+ * C dT/dt = f·S(1 − α) + internal heat − longwave, each per unit of the area over which heat is spread.
+ *
+ * Nothing in a description is ever evaluated: laws are named, units are looked up. The whole description must be plain
+ * data of moderate size. Every numeric input that counts becomes a given of the loop named by its path, such as
+ * `star.luminosity`, `albedo.cold` or `albedo.covers[0].albedo`. Two inputs that say the same thing must agree within
+ * 2 %; the first of them is used and a note says so. The periastron is compared with the radius of the star here, not
+ * when a given is changed later.
+ *
+ * Throws `unreadable`, `too-large`, `reserved-name`, `unknown-name`, `missing`, `not-a-number`, `out-of-range`,
+ * `unknown-unit`, `unit-mismatch`, `shares-not-one`, `repeated-name`, `contradiction`, `not-finite`.
+ *
+ * @example
+ * const { loop, notes } = readPlanet({
+ *   format: "thermostead-planet-1",
+ *   star: { luminosity: "0.42 solLum" },
+ *   orbit: { semiMajorAxis: "0.61 au" },
+ *   redistribution: "global",
+ *   albedo: 0.3,
+ *   longwave: { law: "greyEmission", emissivity: 0.6 },
+ *   heatCapacity: "4.2e8 J m-2 K-1",
+ * });
+ */
+export function readPlanet(description: unknown): Planet {
+  const checked = checkedPlanet(description);
+  const { inputs, numbers, agreeing, trial } = checked;
+  const loop = planetLoop(checked);
+  const albedo = trial.albedo as number;
+  const assumptions = assumptionsOf(checked.description, numbers, albedo);
+  const value = trial.equilibriumTemperature as number;
+  const { redistribution, internalHeat } = assumptions;
+  const equilibriumTemperature = { value, unit: "K", albedo, redistribution, emissivity: 1 } as const;
+  return {
+    loop,
+    ...frozen({
+      description: checked.description,
+      inputs,
+      flux: trial.flux as number,
+      equilibriumTemperature:
+        assumptions.albedo === null ? null : { ...equilibriumTemperature, internalFlux: internalHeat },
+      assumptions,
+      notes: [...assumptionNotes(assumptions), ...agreeing, ...unusedNotes(checked, loop)],
+    }),
+  };
+}
+
+function frozen<T>(value: T): T {
+  if (typeof value === "object" && value !== null) Object.values(Object.freeze(value)).forEach(frozen);
+  return value;
+}

@@ -6,30 +6,20 @@ import type { Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { checksOf, notesFrom } from "./checkState.ts";
 import { ledgerWriter, openReservoirs } from "./ledger.ts";
+import type { Located } from "./located.ts";
 import type { Note } from "./note.ts";
 import type { State } from "./state.ts";
 
-/** What a search found about a state before it is read. */
-export interface Located {
-  readonly at: number;
-  readonly bracket: readonly [number, number];
-}
-
 /** Makes states from temperatures. */
 export type StateReader = (located: Located, givens: readonly number[]) => State;
-
-/** λ that is this small against the largest slope of a single flow cannot be told from zero. */
-const SLOPE_NOISE = 1e-13;
 
 /** Prepares one kernel that reads all that a state holds. */
 export function stateReader(loop: Loop): StateReader {
   const { graph, net, heatCapacity, flows, couplings, report, givens } = loop;
   const inputs = inputsOf(loop);
-  const slopeOf = (node: number) => derivative(graph, node, inputs[0] as number, inputs);
   const checks = checksOf(loop);
   const groups = [
-    [net, slopeOf(net), heatCapacity],
-    flows.map((f) => slopeOf(f.node)),
+    [net, derivative(graph, net, inputs[0] as number, inputs), heatCapacity],
     ...[flows, couplings, report, checks].map((list) => list.map((r) => r.node)),
   ];
   const kernel = valueKernel(graph, { inputs, outputs: groups.flat() });
@@ -40,28 +30,17 @@ export function stateReader(loop: Loop): StateReader {
     end += group.length;
     return all.subarray(end - group.length, end);
   });
-  const [core, slopes, flowValues, coupled, reported, checked] = views as [
-    Values,
-    Values,
-    Values,
-    Values,
-    Values,
-    Values,
-  ];
+  const [core, flowValues, coupled, reported, checked] = views as [Values, Values, Values, Values, Values];
   const named = (list: readonly { name: string }[]) => list.map((r) => r.name);
-  const names = ["net flux", "feedbackParameter", "heatCapacity", ...flows.map((f) => `slope of ${f.name}`)];
+  const names = ["net flux", "feedbackParameter", "heatCapacity"];
   names.push(...named(flows), ...named(couplings), ...named(report), ...checks.map((c) => c.note.about));
   const writeLedger = ledgerWriter(flows);
   return (located, given) => {
-    const { at } = located;
+    const { at, stability, slope, imbalance } = located;
     kernel(Float64Array.of(at, ...given), all);
     for (let i = 0; i < all.length; i++) if (!Number.isFinite(all[i])) failAt(names[i] as string, all[i]);
     const [netFlux, lambda, capacity] = core as unknown as [number, number, number];
     const bracket = Object.freeze([located.bracket[0], located.bracket[1]] as const);
-    let scale = 0;
-    for (const slope of slopes) scale = Math.max(scale, Math.abs(slope));
-    const decided = Math.abs(lambda) > SLOPE_NOISE * scale;
-    const stability = decided ? (lambda < 0 ? "stable" : "unstable") : "undecided";
     const ledger = writeLedger(flowValues, netFlux);
     const notes = [...notesFrom(checks, checked), ...openReservoirs(ledger), ...capacityNotes(capacity)];
     return Object.freeze({
@@ -74,10 +53,12 @@ export function stateReader(loop: Loop): StateReader {
       stability,
       eigenvalues: capacity > 0 ? Object.freeze([Object.freeze({ re: lambda / capacity, im: 0 })]) : null,
       feedbackParameter: lambda,
+      feedbackParameterRange: slope && Object.freeze([slope[0], slope[1]] as const),
       settledFeedbackParameter: lambda,
       eFoldingTime: stability === "stable" ? -capacity / lambda : null,
-      imbalance: Object.freeze({ temperature: Math.abs(netFlux) }),
+      imbalance: Object.freeze({ temperature: imbalance }),
       ledger,
+      proved: slope !== null && !notes.some((n) => n.severity === "invalid"),
       notes: Object.freeze(notes),
     });
   };

@@ -1,0 +1,40 @@
+// How far each given is from the fold at which an undecided pair of states would merge.
+import { derivative } from "../graph/derivative.ts";
+import type { Range } from "../ground/range.ts";
+import { inputsOf } from "../loop/inputs.ts";
+import type { Loop } from "../loop/types.ts";
+import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKernel.ts";
+import { rangesOf } from "./enclosedBalance.ts";
+import type { Undecided } from "./state.ts";
+
+/** Distances for the givens' values and an interval of temperature. */
+export type FoldDistances = (givens: readonly number[], interval: Range) => Undecided["distances"];
+
+/** −N/(∂N/∂p) over the interval for every given p, to first order; the kernel is made when it is first needed. */
+export function foldDistances(loop: Loop): FoldDistances {
+  const { graph, net, givens } = loop;
+  const inputs = inputsOf(loop);
+  let kernel: EnclosureKernel | undefined;
+  return (values, interval) => {
+    kernel ??= enclosureKernel(graph, {
+      inputs,
+      outputs: [net, ...givens.map((p) => derivative(graph, net, p.node, inputs))],
+      wide: new Set([inputs[0] as number]),
+      ranges: rangesOf(loop),
+    });
+    const out = new Float64Array(3 + 3 * givens.length);
+    kernel(Float64Array.of(interval[0], ...values), Float64Array.of(interval[1], ...values), out);
+    const bounds = (i: number): Range => [
+      (out[3 * i] as number) - (out[3 * i + 2] as number),
+      (out[3 * i + 1] as number) + (out[3 * i + 2] as number),
+    ];
+    return Object.fromEntries(givens.map(({ name }, i) => [name, minusQuotient(bounds(0), bounds(1 + i))]));
+  };
+}
+
+/** The range of −a/b; `null` if b may be zero. */
+function minusQuotient(a: Range, b: Range): Range | null {
+  if (!(b[0] > 0 || b[1] < 0)) return null;
+  const corners = a.flatMap((x) => b.map((y) => -x / y));
+  return corners.every(Number.isFinite) ? [Math.min(...corners), Math.max(...corners)] : null;
+}

@@ -4,4 +4,5 @@ export const documents = [
   { file: "package.json", maker: ".config/doors.mjs" },
   { file: "docs/api-report.md", maker: ".config/apireport.mjs" },
   { file: "docs/laws.md", maker: ".config/lawsDoc.ts" },
+  { file: "docs/validation.md", maker: "tests/validation/document.ts" },
 ];

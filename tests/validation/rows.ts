@@ -1,0 +1,24 @@
+// Every comparison with the outside.
+import { albedoRows } from "./albedo.rows.ts";
+import { budgetRows } from "./budgets.rows.ts";
+import type { Check } from "./check.ts";
+import { constantRows } from "./constants.rows.ts";
+import { heatRows } from "./heat.rows.ts";
+import { longwaveRows } from "./longwave.rows.ts";
+import { orbitRows } from "./orbits.rows.ts";
+import { planetRows } from "./planets.rows.ts";
+import { starRows } from "./stars.rows.ts";
+
+/** By subject, in the order in which they are printed. */
+export const subjects: Readonly<Record<string, readonly Check[]>> = {
+  Constants: constantRows,
+  "Planets of the solar system": planetRows,
+  "Stars, flux, other planets": starRows,
+  Orbits: orbitRows,
+  Albedo: albedoRows,
+  Longwave: longwaveRows,
+  "Heat capacity": heatRows,
+  "Equilibria of published budgets": budgetRows,
+};
+
+export const rows: readonly Check[] = Object.values(subjects).flat();

@@ -1,8 +1,9 @@
 // Closes in a minimum that cannot be told from zero.
-import { stretchOf } from "./doubt.ts";
+
 import type { Place, Reader } from "./reader.ts";
 import { roundoffAt } from "./roundoff.ts";
 import { addZero, type Search } from "./search.ts";
+import { stretchOf } from "./stretch.ts";
 
 /**
  * Around `bottom`, near the minimum of a function convex towards zero between `left` and `right`, finds the nearest places

@@ -18,12 +18,17 @@ export interface Enclosed {
 /** A proved sign; 0: not proved. */
 export type Sign = 1 | -1 | 0;
 
-/** The sign of everything in [lo − err, hi + err], if it is the same and nothing in it is infinite or NaN. */
+/** Whether both bounds are finite and in order; false for NaN. */
+export const bounded = (low: number, high: number): boolean =>
+  low > Number.NEGATIVE_INFINITY && low <= high && high < Number.POSITIVE_INFINITY;
+
+/** The sign of everything in [lo − err, hi + err]. */
 export function signOf(lo: number, hi: number, err: number): Sign {
   // a difference of doubles has the sign of the exact difference, so nothing needs rounding here
-  if (lo - err > 0 && hi + err < Number.POSITIVE_INFINITY) return 1;
-  if (hi + err < 0 && lo - err > Number.NEGATIVE_INFINITY) return -1;
-  return 0;
+  const low = lo - err;
+  const high = hi + err;
+  if (!bounded(low, high)) return 0;
+  return low > 0 ? 1 : high < 0 ? -1 : 0;
 }
 
 /** Two units of roundoff: more than a sum of two doubles can be wrong by, relative to itself. */

@@ -1,15 +1,16 @@
 // All zeros of a function of one unknown, with proof. Knows nothing of what the function means.
 import { fail } from "../ground/errors.ts";
 import { decideBox } from "./decideBox.ts";
-import { mergeDoubts, stretchOf } from "./doubt.ts";
 import { doubtKind } from "./doubtKind.ts";
 import type { Enclosed } from "./enclosed.ts";
 import type { Enumeration } from "./enumeration.ts";
+import { mergeDoubts } from "./mergeDoubts.ts";
 import { type Place, Reader } from "./reader.ts";
 import { roundoffAt } from "./roundoff.ts";
 import type { Search } from "./search.ts";
 import { splitPlace } from "./splitPlace.ts";
 import { startPlaces } from "./startPlaces.ts";
+import { stretchOf } from "./stretch.ts";
 
 /** How a search is limited and helped. */
 export interface EnumerationOptions {

@@ -1,5 +1,5 @@
 // Reads enclosures into places and pieces, and counts the readings.
-import { above, below, type Enclosed, type Sign, signOf } from "./enclosed.ts";
+import { above, below, bounded, type Enclosed, type Sign, signOf } from "./enclosed.ts";
 
 /** A number at which the function has been read. Reused: the search allocates none in its loop. */
 export class Place {
@@ -26,9 +26,6 @@ export class Piece {
   continuous = false;
   smooth = false;
 }
-
-const bounded = (low: number, high: number): boolean =>
-  low > Number.NEGATIVE_INFINITY && high < Number.POSITIVE_INFINITY;
 
 /** A function being searched. */
 export class Reader {

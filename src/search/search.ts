@@ -1,9 +1,10 @@
 // What the parts of a proved search share.
-import type { Stretch } from "./doubt.ts";
+
 import type { Sign } from "./enclosed.ts";
 import type { ProvedZero } from "./enumeration.ts";
 import type { Place, Reader } from "./reader.ts";
 import { refineProved } from "./refineProved.ts";
+import type { Stretch } from "./stretch.ts";
 
 /** A search under way: what it reads and what it has found, from left to right. */
 export interface Search {

@@ -19,10 +19,9 @@ const exact = (x: number): Span => [x, x];
 
 const plus = (a: Span, b: Span): Span => wide(a[0] + b[0], a[1] + b[1]);
 const minus = (a: Span): Span => [-a[1], -a[0]];
-export function times(a: Span, b: Span): Span {
-  const products = a.flatMap((x) => b.map((y) => x * y));
-  if (products.some(Number.isNaN)) return NOTHING;
-  return wide(Math.min(...products), Math.max(...products));
+export function times([a, b]: Span, [c, d]: Span): Span {
+  const [p, q, r, s] = [a * c, a * d, b * c, b * d];
+  return wide(Math.min(p, q, r, s), Math.max(p, q, r, s));
 }
 const square = (a: Span): Span =>
   a[0] > 0 || a[1] < 0

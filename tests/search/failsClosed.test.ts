@@ -1,0 +1,169 @@
+// NaN, infinities and rounding: nothing may be decided that the enclosures do not prove.
+import { describe, expect, test } from "vitest";
+import type { Enclosed } from "../../src/search/enclosed.ts";
+import { greatestBetween, leastBetween } from "../../src/search/endpointForm.ts";
+import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
+import { Place, Reader } from "../../src/search/reader.ts";
+import { randomNumbers } from "../graph/randomGraph.ts";
+import { refusal } from "../refusal.ts";
+import { whole } from "./exact.ts";
+import { enclosed, type Problem, smooth } from "./problems.ts";
+
+const BAD = [Number.NaN, Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY];
+
+/** The function, with numbers of its readings replaced where `spoil` says so. */
+function spoilt(f: Enclosed, spoil: (index: number) => number | undefined): Enclosed {
+  const apply = (out: Float64Array, length: number): void => {
+    for (let i = 0; i < length; i++) out[i] = spoil(i) ?? (out[i] as number);
+  };
+  return {
+    box(a, b, out) {
+      f.box(a, b, out);
+      apply(out, 9);
+    },
+    point(x, out) {
+      f.point(x, out);
+      apply(out, 6);
+    },
+  };
+}
+
+/** Zeros that are in no bracket and no undecided stretch, and brackets that do not hold exactly one. */
+function faults(problem: Problem, f: Enclosed): string[] {
+  const { zeros, undecided } = enumerateZeros(f, problem.range, { effort: 300 });
+  const inside = (z: number, [a, b]: readonly [number, number]): boolean => {
+    const slack = 5e-15 * Math.abs(z);
+    return a <= z + slack && z - slack <= b;
+  };
+  return [
+    ...problem.zeros
+      .filter(
+        (z) =>
+          ![...zeros.map((p) => p.bracket), ...undecided.map((u) => u.interval)].some((i) => inside(z, i)),
+      )
+      .map((z) => `${problem.title}: ${z} is lost`),
+    ...zeros
+      .filter((p) => problem.zeros.filter((z) => inside(z, p.bracket)).length !== 1)
+      .map((p) => `${problem.title}: [${p.bracket}] is no bracket`),
+  ];
+}
+
+describe("a number that is not finite decides nothing", () => {
+  test.each([0, 1, 2, 3, 4, 5, 6, 7, 8])("number %i of every reading spoilt", (index) => {
+    for (const problem of smooth)
+      for (const bad of BAD)
+        expect(
+          faults(
+            problem,
+            spoilt(enclosed(problem), (i) => (i === index ? bad : undefined)),
+          ),
+        ).toEqual([]);
+  });
+
+  test.each([0, 1, 2])("everything from number %i × 3 on spoilt: nothing can be claimed from it", (part) => {
+    for (const problem of smooth)
+      for (const bad of BAD) {
+        const f = spoilt(enclosed(problem), (i) => (i >= part * 3 ? bad : undefined));
+        expect(faults(problem, f)).toEqual([]);
+        const { zeros } = enumerateZeros(f, problem.range, { effort: 300 });
+        if (part < 2) expect(zeros).toEqual([]);
+      }
+  });
+
+  test("readings spoilt here and there", () => {
+    const random = randomNumbers(3);
+    for (let k = 0; k < 300; k++) {
+      const often = random() * 0.3;
+      for (const problem of smooth) {
+        const f = spoilt(enclosed(problem), () =>
+          random() < often ? BAD[Math.floor(random() * 3)] : undefined,
+        );
+        expect(faults(problem, f)).toEqual([]);
+      }
+    }
+  });
+
+  test("a sign needs both bounds finite", () => {
+    const sign = (lo: number, hi: number, err: number): number => {
+      const f: Enclosed = {
+        box: () => undefined,
+        point: (_, out) => out.set([lo, hi, err, lo, hi, err]),
+      };
+      const place = new Reader(f).read(1, new Place());
+      expect(place.slopeSign).toBe(place.sign);
+      return place.sign;
+    };
+    expect([sign(1, 2, 0.5), sign(-2, -1, 0.5), sign(1, 2, 1), sign(-2, -1, 1)]).toEqual([1, -1, 0, 0]);
+    for (const bad of BAD)
+      expect([sign(1, 2, bad), sign(1, bad, 0), sign(bad, 2, 0), sign(-2, bad, 0), sign(bad, -1, 0)]).toEqual(
+        Array(5).fill(0),
+      );
+  });
+
+  test("a range that is none is refused", () => {
+    const [line] = smooth as [Problem];
+    for (const range of [
+      [1, 1],
+      [2, 1],
+      [0, Number.NaN],
+      [0, Number.POSITIVE_INFINITY],
+      [-1.7e308, 1.7e308],
+    ] as const)
+      expect(refusal(() => enumerateZeros(enclosed(line), range, { effort: 10 })).code).toBe("out-of-range");
+  });
+});
+
+describe("rounding is outwards", () => {
+  const ONE = 1n << 1074n;
+  test("bounds of a reading contain lo − err and hi + err exactly", () => {
+    const random = randomNumbers(21);
+    for (let k = 0; k < 3000; k++) {
+      const [lo, err] = [random() - 0.5, random() * 0.1 * random()];
+      const hi = lo + random();
+      const f: Enclosed = {
+        box: (_a, _b, out) => out.set([lo, hi, err, lo, hi, err, 0, 0, 0]),
+        point: (_, out) => out.set([lo, hi, err, lo, hi, err]),
+      };
+      const reader = new Reader(f);
+      for (const read of [reader.read(1, new Place()), reader.box(0, 1)]) {
+        for (const low of [read.low, read.slopeLow]) expect(whole(low) <= whole(lo) - whole(err)).toBe(true);
+        for (const high of [read.high, read.slopeHigh])
+          expect(whole(high) >= whole(hi) + whole(err)).toBe(true);
+      }
+    }
+  });
+
+  test("the end-point form is never above the exact bound, and close to it", () => {
+    const random = randomNumbers(22);
+    for (let k = 0; k < 5000; k++) {
+      const [left, right] = [random() * 3 - 1, random() * 3 - 1];
+      const [fall, rise, width] = [-random() * 2, random() * 2, random() * random()];
+      const [l, r, f, u, w] = [left, right, fall, rise, width].map(whole) as [
+        bigint,
+        bigint,
+        bigint,
+        bigint,
+        bigint,
+      ];
+      // (rise·left − fall·right + fall·rise·width) / (rise − fall)
+      const exact = (u * l - f * r) * ONE + f * u * w;
+      const low = leastBetween({ left, right }, { fall, rise }, width);
+      expect(whole(low) * (u - f) * ONE <= exact).toBe(true);
+      expect(whole(low + 2e-14) * (u - f) * ONE > exact).toBe(true);
+      const high = greatestBetween({ left: -left, right: -right }, { fall: -rise, rise: -fall }, width);
+      expect(high).toBe(-low);
+    }
+  });
+
+  test("the end-point form is a bound of a function that it fits exactly", () => {
+    // |x − 1| − p on [0, 3]: least value −p
+    expect(leastBetween({ left: 1, right: 2 }, { fall: -1, rise: 1 }, 3)).toBeCloseTo(0, 13);
+    expect(leastBetween({ left: 1.5, right: 2 }, { fall: 0, rise: 1 }, 3)).toBe(1.5);
+    expect(leastBetween({ left: 1.5, right: 1 }, { fall: -1, rise: 0 }, 3)).toBe(1);
+    for (const bad of [Number.NaN]) {
+      expect(leastBetween({ left: 1, right: 1 }, { fall: bad, rise: 1 }, 1) > 0).toBe(false);
+      expect(leastBetween({ left: 1, right: 1 }, { fall: -1, rise: bad }, 1) > 0).toBe(false);
+      expect(leastBetween({ left: 1, right: 1 }, { fall: 1, rise: bad }, 1) > 0).toBe(false);
+    }
+  });
+});

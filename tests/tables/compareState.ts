@@ -30,6 +30,9 @@ export function tolerancesOf(reference: ReferenceState, { size, parts }: Reading
   return { temperature, slope: 2 * ROUNDINGS * U * steepness + 2 * bend * temperature };
 }
 
+/** Notes besides that of a temperature outside the range a law was published for, which the tables leave on purpose. */
+const notesOf = ({ notes }: State) => notes.filter((note) => note.code !== "outside-published");
+
 /** Expects exactly the equilibria of a row. `zero`: what our temperatures have above those of the table. */
 export function expectRow(
   found: FoundStates,
@@ -59,6 +62,10 @@ export function expectState(
   expect(state.bracket[0]).toBeLessThanOrEqual(T + tolerance.temperature);
   expect(state.bracket[1]).toBeGreaterThanOrEqual(T - tolerance.temperature);
   expect(state.stability).toBe(reference.stable ? "stable" : "unstable");
+  expect({ proved: state.proved, notes: notesOf(state) }).toEqual({ proved: true, notes: [] });
+  const [least, most] = state.feedbackParameterRange ?? [Number.NaN, Number.NaN];
+  expect(least).toBeLessThanOrEqual(Number(reference.lambda) + tolerance.slope);
+  expect(most).toBeGreaterThanOrEqual(Number(reference.lambda) - tolerance.slope);
   expect(Math.abs(state.feedbackParameter - Number(reference.lambda))).toBeLessThanOrEqual(tolerance.slope);
   expect(Object.keys(reading.parts).sort()).toEqual(Object.keys(reference.parts).sort());
   const under = of(reading.parts, reading.reference);
@@ -79,13 +86,14 @@ export function expectState(
   expect(Math.abs(response - Number(reference.dTdS))).toBeLessThanOrEqual(allowed);
 }
 
-/** Where a search proves its result, it must have proved this one, in brackets no wider than promised. */
-function expectProof(found: FoundStates): void {
-  if ((found.proof as string) !== "proved") return;
-  expect(found.complete).toBe(true);
-  for (const { bracket, temperature } of found.states) {
+/** The list is proved to be all there is, in brackets no wider than promised and with the budget closed as promised. */
+function expectProof({ proof, complete, states }: FoundStates): void {
+  expect({ proof, complete }).toEqual({ proof: "proved", complete: true });
+  for (const { bracket, temperature, imbalance, ledger } of states) {
     expect(bracket[1] - bracket[0]).toBeLessThanOrEqual(1e-11);
     expect(bracket[0]).toBeLessThanOrEqual(temperature);
     expect(bracket[1]).toBeGreaterThanOrEqual(temperature);
+    const heating = ledger.flows.reduce((sum, f) => sum + (f.to === "surface" ? Math.abs(f.value) : 0), 0);
+    expect(of(imbalance, "temperature")).toBeLessThanOrEqual(Math.max(5e-12, 2e-14 * heating));
   }
 }

@@ -3,6 +3,7 @@ import { describe, expect, test } from "vitest";
 import { tanhAlbedo } from "../../src/albedo/tanhAlbedo.ts";
 import { greyEmission } from "../../src/greenhouse/greyEmission.ts";
 import { STEFAN_BOLTZMANN } from "../../src/ground/constants.ts";
+import { sampledLaw } from "../../src/law/sampledLaw.ts";
 import { slopesOf } from "../../src/law/slopesOf.ts";
 import { closeLoop } from "../../src/loop/closeLoop.ts";
 import { absorbedFlux } from "../../src/star/absorbedFlux.ts";
@@ -46,6 +47,35 @@ describe.each(cases)("$id", ({ inputs, within, rows }) => {
         of(slopesOf(tanhAlbedo, { temperature, ...albedo }).slopes, "temperature"),
     },
     reference: "planck",
+  });
+
+  test("the sampled search finds the same with an ordinary function in place of the law", () => {
+    const plainAlbedo = sampledLaw({
+      name: "plainAlbedo",
+      output: { symbol: "α", unit: "1", within: [0, 1] },
+      inputs: { temperature: { symbol: "T", unit: "K", within: [0, 1e5] } },
+      compute: ({ temperature }) => tanhAlbedo({ temperature, ...albedo }),
+    });
+    const sampled = closeLoop(({ temperature, given }) => ({
+      heating: {
+        sunlight: absorbedFlux({
+          flux: given("flux", 1361, "W m-2", { within: [0, 1e5] }),
+          albedo: plainAlbedo({ temperature }),
+        }),
+      },
+      cooling: { longwave: greyEmission({ temperature, emissivity }) },
+      heatCapacity: 4e8,
+    }));
+    for (const { S, states } of rows) {
+      const found = findStates(sampled, { within, at: { flux: nearest(S) } });
+      expect({ proof: found.proof, complete: found.complete }).toEqual({ proof: "sampled", complete: false });
+      const stabilities = states.map((state) => (state.stable ? "stable" : "unstable"));
+      expect(found.states.map((state) => state.stability)).toEqual(stabilities);
+      // the balance is the same to its last bits; only slopes are quotients
+      states.forEach((state, i) => {
+        expect(found.states[i]?.temperature).toBeCloseTo(Number(state.T), 10);
+      });
+    }
   });
 
   test.each(rows)("S = $S", (row) => {

@@ -1,0 +1,81 @@
+// Reads enclosures of a graph over boxes of its inputs.
+import { coneOf } from "../graph/cone.ts";
+import type { Graph } from "../graph/node.ts";
+import type { Op } from "../graph/op.ts";
+import type { Range } from "../ground/range.ts";
+import type { Enclosure } from "./enclosure.ts";
+import { ENCLOSE } from "./enclosureRules.ts";
+import { EnclosureWriter } from "./enclosureWriter.ts";
+import { generateScalar } from "./generateScalar.ts";
+import { mayGenerate } from "./generation.ts";
+import { interpretScalar } from "./interpretScalar.ts";
+import { missingInput, type ReadingOf } from "./readingOf.ts";
+import type { ScalarKernel } from "./scalarProgram.ts";
+
+/**
+ * Writes (lo, hi, err) for each output: over the box from `low` to `high` its true value lies in [lo − err, hi + err].
+ * Inputs that are not wide are points, read from `low`.
+ *
+ * What cannot be enclosed has an err that is NaN or infinite. That is also the answer to a box that is not one: an input
+ * that is NaN, infinite, out of order or outside its declared range.
+ */
+export type EnclosureKernel = ScalarKernel;
+
+/** An enclosure reading. */
+export interface EnclosureOf extends ReadingOf {
+  /** The inputs that may be intervals; fewer make a faster kernel. */
+  readonly wide: ReadonlySet<number>;
+  /** Ranges that inputs are declared to keep. Signs are known from these only. */
+  readonly ranges?: ReadonlyMap<number, Range>;
+}
+
+const ANY: Range = [-Number.MAX_VALUE, Number.MAX_VALUE];
+
+/** As generated code or by the interpreter: the same bits. Ordinary functions (sampled laws) cannot be enclosed. */
+export function enclosureKernel(
+  g: Graph,
+  { inputs, outputs, wide, ranges = new Map() }: EnclosureOf,
+): EnclosureKernel {
+  const w = new EnclosureWriter();
+  const known = new Map<number, Enclosure>();
+  const limits = new Float64Array(2 * inputs.length);
+  const isWide = inputs.map((id) => wide.has(id));
+  inputs.forEach((id, i) => {
+    const within = ranges.get(id) ?? ANY;
+    limits.set([Math.max(within[0], ANY[0]), Math.min(within[1], ANY[1])], 2 * i);
+    const lo = w.input("low", i);
+    known.set(id, { lo, hi: isWide[i] ? w.input("high", i) : lo, err: undefined, within });
+  });
+  for (const id of coneOf(g, outputs, inputs)) {
+    if (!known.has(id)) known.set(id, enclose(g, id, w, known));
+  }
+  const results = outputs.flatMap((id) => {
+    const { lo, hi, err = w.literal(0) } = known.get(id) as Enclosure;
+    return [lo, hi, err];
+  });
+  const run = mayGenerate() ? generateScalar(w, results) : interpretScalar(w, results);
+  return (low, high, out) => {
+    for (let i = 0; i < isWide.length; i++) {
+      const x = low[i] as number;
+      const y = isWide[i] ? (high[i] as number) : x;
+      if (!(x >= (limits[2 * i] as number) && x <= y && y <= (limits[2 * i + 1] as number))) {
+        out.fill(NaN);
+        return;
+      }
+    }
+    run(low, high, out);
+  };
+}
+
+function enclose(g: Graph, id: number, w: EnclosureWriter, known: ReadonlyMap<number, Enclosure>): Enclosure {
+  const op = g.ops[id] as Op;
+  if (op === "input") return missingInput(g, id);
+  if (op === "call") throw new Error("an ordinary function has no enclosure");
+  const value = g.values[id] as number;
+  if (op === "const") {
+    const k = w.datum(value);
+    return { lo: k, hi: k, err: undefined, within: [value, value] };
+  }
+  const args = (g.args[id] as readonly number[]).map((a) => known.get(a) as Enclosure);
+  return ENCLOSE[op](w, ...(args as [Enclosure, Enclosure, Enclosure, Enclosure]));
+}

@@ -1,0 +1,91 @@
+// How each operation encloses its result. In the comments a = a' + α with a' between a.lo and a.hi and |α| ≤ a.err is a
+// true value of a, and b = b' + β one of b.
+import type { Op } from "../graph/op.ts";
+import { encloseBranch } from "./encloseBranch.ts";
+import { type Enclosure, ofSign, signOf } from "./enclosure.ts";
+import type { EnclosureWriter } from "./enclosureWriter.ts";
+import { extremes, extremesOfSquare, reciprocalOrder } from "./extremes.ts";
+
+/** Encloses a node from its arguments; in a square they are one object. */
+type Rule = (w: EnclosureWriter, ...args: [Enclosure, Enclosure, Enclosure, Enclosure]) => Enclosure;
+
+const NOT_NEGATIVE = ofSign(1);
+
+/** One rule for each operation that can be enclosed; a missing one does not compile. */
+export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, Rule>> = {
+  mean: (_, a) => a,
+  neg: (w, { lo, hi, err, within: [least, greatest] }) => ({
+    ...{ lo: w.neg(hi), hi: w.neg(lo), err },
+    within: [-greatest, -least],
+  }),
+  add: (w, a, b) =>
+    w.roundedSum(w.add(a.lo, b.lo), w.add(a.hi, b.hi), w.sum(a.err, b.err), [
+      a.within[0] + b.within[0],
+      a.within[1] + b.within[1],
+    ]),
+  sub: (w, a, b) =>
+    w.roundedSum(w.sub(a.lo, b.hi), w.sub(a.hi, b.lo), w.sum(a.err, b.err), [
+      a.within[0] - b.within[1],
+      a.within[1] - b.within[0],
+    ]),
+  // ab − a'b' = a'β + b'α + αβ
+  mul(w, a, b) {
+    if (a === b) return square(w, a);
+    const first = w.sum(w.times(w.size(a), b.err), w.times(w.size(b), a.err));
+    const error = w.sum(first, w.times(a.err, b.err));
+    return w.rounded(...extremes(w, w.mul, a, b), error, ofSign(signOf(a) * signOf(b)));
+  },
+  // a/b − a'/b' = (α − (a'/b')β) / b; b must keep away from zero
+  div(w, a, b) {
+    const [lo, hi] = extremes(w, w.div, a, reciprocalOrder(b));
+    const within = ofSign(signOf(a) * signOf(b));
+    const zero = w.literal(0);
+    const above = w.less(b.lo, b.err);
+    const below = w.less(w.neg(b.hi), b.err);
+    const sign = signOf(b);
+    const distance = sign > 0 ? above : sign < 0 ? below : w.pick(zero, b.lo, above, below);
+    const change = w.sum(a.err, w.times(w.size({ lo, hi, within }), b.err));
+    const error = change === undefined ? undefined : w.div(change, distance);
+    const declared = b.err === undefined && (b.within[0] > 0 || b.within[1] < 0);
+    return w.rounded(lo, hi, declared ? error : w.provided(zero, distance, error), within);
+  },
+  // √a − √a' = α / (√a + √a'), no larger than α / √a'; a must not go below zero
+  sqrt(w, a) {
+    const [lo, hi] = [w.step("sqrt", a.lo), w.step("sqrt", a.hi)];
+    const zero = w.literal(0);
+    let error: number | undefined;
+    if (a.err !== undefined) error = w.provided(zero, w.sub(a.lo, a.err), w.div(a.err, lo));
+    else if (signOf(a) <= 0) error = w.pick(a.lo, zero, w.literal(NaN), zero);
+    return w.rounded(lo, hi, error, NOT_NEGATIVE);
+  },
+  // e^a − e^a' = e^a'·(e^α − 1), no larger than e^a'·1.06·|α| where |α| < 0.1
+  exp: (w, a) =>
+    w.approximate("exp", a, NOT_NEGATIVE, (hi, err) =>
+      err === undefined ? err : w.provided(err, w.literal(0.1), w.mul(w.mul(hi, w.literal(1.06)), err)),
+    ),
+  // ln a − ln a' is no larger than |α| / min(a, a'); a must stay above zero
+  log: (w, a) =>
+    w.approximate("log", a, ofSign(0), (_, err) => {
+      const least = w.less(a.lo, err);
+      return w.provided(w.literal(0), least, err === undefined ? err : w.div(err, least));
+    }),
+  // no steeper than 1
+  tanh: (w, a) => w.approximate("tanh", a, [signOf(a) > 0 ? 0 : -1, signOf(a) < 0 ? 0 : 1], (_, err) => err),
+  min: (w, a, b) => ({
+    ...{ lo: w.least(a.lo, b.lo), hi: w.least(a.hi, b.hi), err: w.widened(w.sum(a.err, b.err)) },
+    within: [Math.min(a.within[0], b.within[0]), Math.min(a.within[1], b.within[1])],
+  }),
+  max: (w, a, b) => ({
+    ...{ lo: w.greatest(a.lo, b.lo), hi: w.greatest(a.hi, b.hi), err: w.widened(w.sum(a.err, b.err)) },
+    within: [Math.max(a.within[0], b.within[0]), Math.max(a.within[1], b.within[1])],
+  }),
+  pick: (w, ...args) => encloseBranch(w, true, args),
+  jump: (w, ...args) => encloseBranch(w, false, args),
+};
+
+// a² − a'² = 2a'α + α²
+function square(w: EnclosureWriter, a: Enclosure): Enclosure {
+  const twice = w.times(w.mul(w.literal(2), w.size(a)), a.err);
+  const most = Math.max(-a.within[0], a.within[1]);
+  return w.rounded(...extremesOfSquare(w, a), w.sum(twice, w.times(a.err, a.err)), [0, most * most]);
+}

@@ -1,0 +1,72 @@
+// Writes the arithmetic of enclosures as steps of a scalar program.
+import type { Range } from "../ground/range.ts";
+import { type Enclosure, type Ends, isPoint, signOf } from "./enclosure.ts";
+import { ScalarProgram } from "./scalarProgram.ts";
+
+/** Above 2^-53 = 1.11e-16: + − × ÷ √ are wrong by at most this part of their result. Rounding the product is covered. */
+const HALF_ULP = 1.2e-16;
+/** Above 2^-52 = 2.22e-16: our exp, log and tanh are wrong by less than an ulp, at most this part of their result. */
+const ULP = 2.5e-16;
+/** 1 + 2^-49: fewer than 15 roundings go into an error, each at most 2^-53 of it. */
+const SLACK = 1.0000000000000018;
+/** Far above what underflow can take from a result and from the terms of its error, 2^-1075 = 2.5e-324 each. */
+const TINY = 1e-300;
+
+type Bound = number | undefined;
+
+/** The steps from which rules are made. Equal steps are one, so that the two bounds of a point cost nothing twice. */
+export class EnclosureWriter extends ScalarProgram {
+  neg = (a: number): number => this.step("neg", a);
+  add = (a: number, b: number): number => this.step("add", a, b);
+  sub = (a: number, b: number): number => this.step("sub", a, b);
+  mul = (a: number, b: number): number => this.step("mul", a, b);
+  div = (a: number, b: number): number => this.step("div", a, b);
+  abs = (a: number): number => this.step("abs", a);
+  /** c where a < b, else d (so also where one is NaN). */
+  pick = (a: number, b: number, c: number, d: number): number =>
+    c === d ? c : this.step("pick", a, b, c, d);
+  least = (a: number, b: number): number => this.pick(a, b, a, b);
+  greatest = (a: number, b: number): number => this.pick(b, a, a, b);
+  /** An error where a < b, else NaN. */
+  provided = (a: number, b: number, error: Bound): number =>
+    this.pick(a, b, error ?? this.literal(0), this.literal(NaN));
+
+  /** Arithmetic of errors, of which an absent one is zero. */
+  sum = (a: Bound, b: Bound): Bound => (a === undefined ? b : b === undefined ? a : this.add(a, b));
+  times = (a: Bound, b: Bound): Bound => (a === undefined || b === undefined ? undefined : this.mul(a, b));
+  less = (a: number, b: Bound): number => (b === undefined ? a : this.sub(a, b));
+  /** An error with the rounding of its own arithmetic. */
+  widened = (a: Bound): Bound => this.times(a, this.literal(SLACK));
+
+  /** An upper bound of the size of lo and hi. */
+  size(x: Ends): number {
+    const sign = signOf(x);
+    if (sign) return sign > 0 ? x.hi : this.neg(x.lo);
+    const low = this.abs(x.lo);
+    return isPoint(x) ? low : this.add(low, this.abs(x.hi));
+  }
+
+  /** The result of an operation with its own rounding, `unit` of its size. */
+  rounded(lo: number, hi: number, err: Bound, within: Range, unit = HALF_ULP): Enclosure {
+    const x = this.roundedSum(lo, hi, err, within, unit);
+    return { ...x, err: this.sum(x.err, this.literal(TINY)) };
+  }
+
+  /** The same of + and −, which are exact wherever underflow could come in. */
+  roundedSum(lo: number, hi: number, err: Bound, within: Range, unit = HALF_ULP): Enclosure {
+    const own = this.mul(this.literal(unit), this.size({ lo, hi, within }));
+    return { lo, hi, err: err === undefined ? own : this.widened(this.add(err, own)), within };
+  }
+
+  /** A value of our own functions. They need not keep the order of two arguments, so it is restored. */
+  approximate(
+    op: "exp" | "log" | "tanh",
+    a: Enclosure,
+    within: Range,
+    error: (hi: number, err: Bound) => Bound,
+  ): Enclosure {
+    const [first, second] = [this.step(op, a.lo), this.step(op, a.hi)];
+    const hi = this.greatest(first, second);
+    return this.rounded(this.least(first, second), hi, error(hi, a.err), within, ULP);
+  }
+}

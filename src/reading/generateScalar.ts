@@ -1,0 +1,55 @@
+// Prints a program of scalar steps as straight-line code.
+import { compiled } from "./generation.ts";
+import type { ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
+
+type Raw = (x: Float64Array, y: Float64Array, k: Float64Array, o: Float64Array) => void;
+type Emit = (a: string, b: string, c: string, d: string) => string;
+
+/** One line of code for each step; a missing one does not compile. */
+const EMIT: Readonly<Record<Step, Emit>> = {
+  add: (a, b) => `${a}+${b}`,
+  sub: (a, b) => `${a}-${b}`,
+  mul: (a, b) => `${a}*${b}`,
+  div: (a, b) => `${a}/${b}`,
+  neg: (a) => `-${a}`,
+  abs: (a) => `abs(${a})`,
+  sqrt: (a) => `sqrt(${a})`,
+  exp: (a) => `exp(${a})`,
+  log: (a) => `log(${a})`,
+  tanh: (a) => `tanh(${a})`,
+  pick: (a, b, c, d) => `${a}<${b}?${c}:${d}`,
+};
+const ARRAY = { low: "x", high: "y", data: "k" };
+
+/** A text up to this length that is needed once stands where it is needed; deeper nesting could exhaust a parser. */
+const INLINE = 80;
+
+/** A program as generated code. */
+export function generateScalar(program: ScalarProgram, outputs: readonly number[]): ScalarKernel {
+  const uses = program.uses(outputs);
+  const texts: string[] = [];
+  let code = "";
+  program.ops.forEach((op, id) => {
+    if (!uses[id]) return;
+    const text = textOf(program, op, id, texts);
+    const inline = op === "literal" || (uses[id] === 1 && text.length < INLINE);
+    texts[id] = inline ? `(${text})` : `r${id}`;
+    if (!inline) code += `const r${id}=${text};`;
+  });
+  const results = outputs.map((id, i) => `o[${i}]=${texts[id]};`).join("");
+  const run = compiled<Raw>(`return function(x,y,k,o){${code}${results}}`);
+  const k = Float64Array.from(program.data);
+  return (low, high, out) => run(low, high, k, out);
+}
+
+function textOf(
+  { args, values }: ScalarProgram,
+  op: Step | Source,
+  id: number,
+  texts: readonly string[],
+): string {
+  if (op === "literal") return `${values[id]}`;
+  if (op === "low" || op === "high" || op === "data") return `${ARRAY[op]}[${values[id]}]`;
+  const names = (args[id] as readonly number[]).map((a) => texts[a]);
+  return EMIT[op](...(names as [string, string, string, string]));
+}

@@ -1,0 +1,69 @@
+// Runs a program of scalar steps one by one, without generating code.
+import { exp } from "../ground/elementary/exp.ts";
+import { log } from "../ground/elementary/log.ts";
+import { tanh } from "../ground/elementary/tanh.ts";
+import type { ScalarKernel, ScalarProgram, Step } from "./scalarProgram.ts";
+
+/** A program as an interpreter. */
+export function interpretScalar(program: ScalarProgram, outputs: readonly number[]): ScalarKernel {
+  const { ops, args, values, data } = program;
+  const uses = program.uses(outputs);
+  const r = new Float64Array(ops.length);
+  const steps: Step[] = [];
+  /** For each step the register to fill and up to four to read. */
+  const places: number[] = [];
+  const inputs: { from: "low" | "high"; place: number; to: number }[] = [];
+  ops.forEach((op, id) => {
+    const value = values[id] as number;
+    if (!uses[id]) return;
+    if (op === "literal") r[id] = value;
+    else if (op === "data") r[id] = data[value] as number;
+    else if (op === "low" || op === "high") inputs.push({ from: op, place: value, to: id });
+    else {
+      const [a, b = 0, c = 0, d = 0] = args[id] as [number, number?, number?, number?];
+      steps.push(op);
+      places.push(id, a, b, c, d);
+    }
+  });
+  const at = Uint32Array.from(places);
+  return (low, high, out) => {
+    for (const { from, place, to } of inputs) r[to] = (from === "low" ? low : high)[place] as number;
+    for (let i = 0; i < steps.length; i++) {
+      const p = 5 * i;
+      const a = r[at[p + 1] as number] as number;
+      const b = r[at[p + 2] as number] as number;
+      r[at[p] as number] =
+        steps[i] === "pick"
+          ? (r[at[p + (a < b ? 3 : 4)] as number] as number)
+          : resultOf(steps[i] as Exclude<Step, "pick">, a, b);
+    }
+    outputs.forEach((id, i) => {
+      out[i] = r[id] as number;
+    });
+  };
+}
+
+function resultOf(step: Exclude<Step, "pick">, a: number, b: number): number {
+  switch (step) {
+    case "mul":
+      return a * b;
+    case "add":
+      return a + b;
+    case "sub":
+      return a - b;
+    case "div":
+      return a / b;
+    case "neg":
+      return -a;
+    case "abs":
+      return Math.abs(a);
+    case "sqrt":
+      return Math.sqrt(a);
+    case "exp":
+      return exp(a);
+    case "log":
+      return log(a);
+    case "tanh":
+      return tanh(a);
+  }
+}

@@ -58,5 +58,8 @@ export { absorbedFlux } from "./star/absorbedFlux.ts";
 export { stellarFlux } from "./star/stellarFlux.ts";
 export { stellarLuminosity } from "./star/stellarLuminosity.ts";
 export { type FindStatesOptions, findStates } from "./states/findStates.ts";
+export { type FindStatesForOptions, findStatesFor, type GivenColumns } from "./states/findStatesFor.ts";
 export type { Note, NoteCode } from "./states/note.ts";
+export { type CountTile, type ProveCountOptions, type ProvedCount, proveCount } from "./states/proveCount.ts";
 export type { FoundStates, Ledger, State, Undecided } from "./states/state.ts";
+export { ROW_STATUS, type StateColumns } from "./states/stateColumns.ts";

@@ -1,16 +1,12 @@
 // Finds the equilibria of a loop.
 import { CONSTANT_SET } from "../ground/constants.ts";
-import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange } from "../ground/range.ts";
 import { givensAt } from "../loop/inputs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
-import type { StateSearch } from "./located.ts";
 import type { Note } from "./note.ts";
-import { provedSearch } from "./provedSearch.ts";
-import { sampledSearch } from "./sampledSearch.ts";
+import { checkOneVariable, readerOf, searchOf } from "./prepared.ts";
 import type { FoundStates, State, Undecided } from "./state.ts";
-import { type StateReader, stateReader } from "./stateReader.ts";
 
 /** Where to look, for which parameters, and how hard. */
 export interface FindStatesOptions<N extends string = string> {
@@ -44,8 +40,8 @@ export function findStates<N extends string>(loop: Loop<N>, options: FindStatesO
   const within = checkedRange(options.within, "within", "K", loop.variables[0]?.within);
   const effort = checkedNumber(options.effort ?? (loop.sampled ? 20_000 : 500), "effort", "1", [10, 1e9]);
   const givens = givensAt(loop, options.at);
-  const { search, read } = preparedFor(loop);
-  const { located, undecided, cost } = search(givens, within, effort);
+  const { located, undecided, cost } = searchOf(loop, !loop.sampled)(givens, within, effort);
+  const read = readerOf(loop);
   const proof = loop.sampled ? "sampled" : undecided.length === 0 ? "proved" : "partial";
   return Object.freeze({
     states: Object.freeze(located.map((found) => read(found, givens) as State<N>)),
@@ -57,29 +53,6 @@ export function findStates<N extends string>(loop: Loop<N>, options: FindStatesO
     notes: Object.freeze(searchNotes(loop.sampled, undecided)),
     constants: CONSTANT_SET,
   });
-}
-
-/** Throws `several-variables` for a loop whose states cannot be searched yet. */
-export function checkOneVariable(loop: Loop, path: string): void {
-  const names = loop.variables.map((v) => v.name);
-  if (names.length > 1)
-    fail("several-variables", { path, value: names.join(), allowed: "temperature alone" });
-}
-
-interface Prepared {
-  readonly search: StateSearch;
-  readonly read: StateReader;
-}
-const prepared = new WeakMap<Loop, Prepared>();
-
-/** The kernels of a loop, made at its first search. */
-function preparedFor(loop: Loop): Prepared {
-  let found = prepared.get(loop);
-  if (!found) {
-    found = { search: loop.sampled ? sampledSearch(loop) : provedSearch(loop), read: stateReader(loop) };
-    prepared.set(loop, found);
-  }
-  return found;
 }
 
 function searchNotes(sampled: boolean, undecided: readonly Undecided[]): Note[] {

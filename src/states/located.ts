@@ -7,6 +7,8 @@ export interface Located {
   readonly at: number;
   readonly bracket: Range;
   readonly stability: State["stability"];
+  /** λ at the temperature, W m⁻² K⁻¹. */
+  readonly lambda: number;
   /** Proved bounds of λ over the bracket; `null` where nothing is proved. */
   readonly slope: Range | null;
   /** Bound of |N| at the temperature, W m⁻². */

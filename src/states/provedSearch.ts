@@ -57,18 +57,17 @@ const STABILITY: Readonly<Record<number, State["stability"]>> = {
 /** Bounds of N at the temperature and of λ over the bracket. */
 function locate({ net }: EnclosedBalance, { at, bracket, slopeSign }: ProvedZero): Located {
   net.point(at, values);
-  const [low, high, error] = values as unknown as [number, number, number];
-  const imbalance = above(Math.max(error - low, high + error));
-  net.box(bracket[0], bracket[1], values);
-  const slope = [
-    below((values[3] as number) - (values[5] as number)),
-    above((values[4] as number) + (values[5] as number)),
+  const [low, high, error, slopeLow, slopeHigh] = values as unknown as [
+    number,
+    number,
+    number,
+    number,
+    number,
   ];
-  return {
-    at,
-    bracket,
-    stability: STABILITY[slopeSign] ?? "undecided",
-    slope: slope as unknown as Range,
-    imbalance,
-  };
+  const imbalance = above(Math.max(error - low, high + error));
+  const lambda = slopeLow + (slopeHigh - slopeLow) / 2;
+  net.box(bracket[0], bracket[1], values);
+  const [, , , least, greatest, slopeError] = values as unknown as [0, 0, 0, number, number, number];
+  const slope: Range = [below(least - slopeError), above(greatest + slopeError)];
+  return { at, bracket, stability: STABILITY[slopeSign] ?? "undecided", lambda, slope, imbalance };
 }

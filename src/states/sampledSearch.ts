@@ -35,7 +35,7 @@ export function sampledSearch(loop: Loop): StateSearch {
     const [net, lambda] = values as unknown as [number, number];
     const decided = Math.abs(lambda) * at > SLOPE_NOISE * largest();
     const stability = decided ? (lambda < 0 ? "stable" : "unstable") : "undecided";
-    return { at, bracket, stability, slope: null, imbalance: Math.abs(net) };
+    return { at, bracket, stability, lambda, slope: null, imbalance: Math.abs(net) };
   };
   return (givens, within, effort) => {
     point.set(givens, 1);

@@ -1,5 +1,4 @@
 // Reads everything about a state of a loop of one variable at a temperature.
-import { derivative } from "../graph/derivative.ts";
 import { fail } from "../ground/errors.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
@@ -19,7 +18,7 @@ export function stateReader(loop: Loop): StateReader {
   const inputs = inputsOf(loop);
   const checks = checksOf(loop);
   const groups = [
-    [net, derivative(graph, net, inputs[0] as number, inputs), heatCapacity],
+    [net, heatCapacity],
     ...[flows, couplings, report, checks].map((list) => list.map((r) => r.node)),
   ];
   const kernel = valueKernel(graph, { inputs, outputs: groups.flat() });
@@ -32,14 +31,14 @@ export function stateReader(loop: Loop): StateReader {
   });
   const [core, flowValues, coupled, reported, checked] = views as [Values, Values, Values, Values, Values];
   const named = (list: readonly { name: string }[]) => list.map((r) => r.name);
-  const names = ["net flux", "feedbackParameter", "heatCapacity"];
+  const names = ["net flux", "heatCapacity"];
   names.push(...named(flows), ...named(couplings), ...named(report), ...checks.map((c) => c.note.about));
   const writeLedger = ledgerWriter(flows);
   return (located, given) => {
-    const { at, stability, slope, imbalance } = located;
+    const { at, stability, lambda, slope, imbalance } = located;
     kernel(Float64Array.of(at, ...given), all);
     for (let i = 0; i < all.length; i++) if (!Number.isFinite(all[i])) failAt(names[i] as string, all[i]);
-    const [netFlux, lambda, capacity] = core as unknown as [number, number, number];
+    const [netFlux, capacity] = core as unknown as [number, number];
     const bracket = Object.freeze([located.bracket[0], located.bracket[1]] as const);
     const ledger = writeLedger(flowValues, netFlux);
     const notes = [...notesFrom(checks, checked), ...openReservoirs(ledger), ...capacityNotes(capacity)];

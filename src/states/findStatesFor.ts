@@ -1,0 +1,126 @@
+// Finds the equilibria of many planets of one loop: columns of givens in, typed arrays out.
+import { type ErrorCode, fail, ThermosteadError } from "../ground/errors.ts";
+import { checkKeys, failUnknown } from "../ground/names.ts";
+import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
+import type { GivenRecord, Givens, Loop } from "../loop/types.ts";
+import { checkOneVariable, searchOf } from "./prepared.ts";
+import { StateCollector, type StateColumns } from "./stateColumns.ts";
+
+/** Columns of givens, each with one value a planet; givens without a column keep the value of the loop. */
+export type GivenColumns<N extends string = string> = { readonly [K in Givens<N>]?: ArrayLike<number> };
+
+/** Where to look, and how. */
+export interface FindStatesForOptions {
+  /** Lowest and highest temperature, K. */
+  readonly within: Range;
+  /** False searches by sampling: nothing is proved. */
+  readonly proof?: boolean;
+  /** What the search may spend on one planet, as in `findStates`. */
+  readonly effort?: number;
+}
+
+/**
+ * Finds all equilibria of a loop for every row of its columns, with the same proof as `findStates`. All rows share one set
+ * of compiled kernels. A row that cannot be searched, as with a NaN or a value outside its declared range, is flagged
+ * `refused` with its reason and has no states; it is never dropped, and it does not stop the others.
+ *
+ * Throws `missing` without a column, `contradiction` when columns differ in length, `unknown-name`, `unreadable`,
+ * `out-of-range`, `several-variables`.
+ */
+export function findStatesFor<N extends string>(
+  loop: Loop<N>,
+  columns: GivenColumns<N>,
+  options: FindStatesForOptions,
+): StateColumns {
+  checkKeys(options, "findStatesFor", ["within", "proof", "effort"]);
+  checkOneVariable(loop, "findStatesFor");
+  const within = checkedRange(options.within, "within", "K", loop.variables[0]?.within);
+  const proving = (options.proof ?? true) && !loop.sampled;
+  const effort = checkedNumber(options.effort ?? (proving ? 500 : 20_000), "effort", "1", [10, 1e9]);
+  const table = checkedColumns(loop, columns);
+  const search = searchOf(loop, proving);
+  const collector = new StateCollector(table.rows);
+  const values = loop.givens.map((g) => g.value);
+  for (let row = 0; row < table.rows; row++) {
+    const wrong = fillRow(values, table.columns, row);
+    if (wrong) {
+      collector.add(row, "refused", []);
+      collector.explain({ row, ...wrong });
+      continue;
+    }
+    const { located, undecided } = search(values, within, effort);
+    collector.add(row, proving ? (undecided.length === 0 ? "proved" : "partial") : "sampled", located);
+    for (const { kind, interval } of undecided) {
+      collector.explain({
+        row,
+        code: "undecided",
+        text: `${kind} between ${interval[0]} and ${interval[1]} K`,
+      });
+    }
+  }
+  return collector.columns();
+}
+
+/** A column and the given that it belongs to. */
+interface Column {
+  readonly given: GivenRecord;
+  readonly index: number;
+  readonly values: ArrayLike<number>;
+}
+
+function checkedColumns(
+  loop: Loop,
+  columns: GivenColumns,
+): { readonly rows: number; readonly columns: readonly Column[] } {
+  const known = loop.givens.map((g) => g.name);
+  const list = Object.entries(columns).map(([name, values]): Column => {
+    const path = `columns.${name}`;
+    const index = known.indexOf(name);
+    if (index < 0) failUnknown(path, name, known);
+    const isList = Array.isArray(values) || (ArrayBuffer.isView(values) && "length" in values);
+    if (!isList) fail("unreadable", { path, value: values, allowed: "a typed array or a list of numbers" });
+    return { given: loop.givens[index] as GivenRecord, index, values: values as ArrayLike<number> };
+  });
+  const rows = list[0]?.values.length;
+  if (rows === undefined)
+    return fail("missing", {
+      path: "columns",
+      value: columns,
+      allowed: `at least one of ${known.join(", ")}`,
+    });
+  for (const { given, values } of list) {
+    if (values.length !== rows) {
+      fail("contradiction", {
+        path: `columns.${given.name}`,
+        value: values.length,
+        allowed: `${rows} rows, as in the first column`,
+      });
+    }
+  }
+  return { rows, columns: list };
+}
+
+/** Writes a row's values; returns what is wrong with the first that is not allowed. */
+function fillRow(
+  values: number[],
+  columns: readonly Column[],
+  row: number,
+): { code: ErrorCode; text: string } | undefined {
+  for (const { given, index, values: column } of columns) {
+    const value = column[row] as number;
+    const [low, high] = given.within ?? [-Number.MAX_VALUE, Number.MAX_VALUE];
+    if (value >= low && value <= high) values[index] = value;
+    else return refusalOf(given, value);
+  }
+  return undefined;
+}
+
+function refusalOf({ name, unit, within }: GivenRecord, value: unknown): { code: ErrorCode; text: string } {
+  try {
+    checkedNumber(value, name, unit, within);
+  } catch (error) {
+    if (error instanceof ThermosteadError) return { code: error.code, text: error.message };
+    throw error;
+  }
+  return { code: "not-a-number", text: name };
+}

@@ -1,0 +1,101 @@
+// Many planets of one loop: the same states as one by one, and no row is dropped.
+import { describe, expect, test } from "vitest";
+import * as core from "../../src/index.ts";
+import { refusal } from "../refusal.ts";
+import { iceLoop } from "./iceLoop.ts";
+
+const loop = iceLoop();
+const within = [100, 500] as const;
+const flux = Float64Array.from({ length: 200 }, (_, i) => 900 + 5 * i);
+
+describe("findStatesFor", () => {
+  test("gives the bits of findStates, row by row", () => {
+    const emissivity = flux.map((_, i) => 0.55 + 0.0005 * i);
+    const found = core.findStatesFor(loop, { flux, emissivity }, { within });
+    flux.forEach((_, row) => {
+      const { states } = core.findStates(loop, {
+        within,
+        at: { flux: flux[row], emissivity: emissivity[row] },
+      });
+      const [start, end] = [found.first[row], found.first[row + 1]];
+      expect(found.counts[row]).toBe(states.length);
+      expect([...found.temperatures.slice(start, end)]).toEqual(states.map((s) => s.temperature));
+      expect([...found.feedbackParameters.slice(start, end)]).toEqual(states.map((s) => s.feedbackParameter));
+      const sign = { stable: -1, undecided: 0, unstable: 1 };
+      expect([...found.stability.slice(start, end)]).toEqual(states.map((s) => sign[s.stability]));
+      expect(core.ROW_STATUS[found.status[row] as number]).toBe("proved");
+    });
+    expect(found.reasons).toEqual([]);
+  });
+
+  test("flags a row that is refused, with its reason, and goes on", () => {
+    const found = core.findStatesFor(
+      loop,
+      { flux: [1000, Number.NaN, -5, Number.POSITIVE_INFINITY, 1361] },
+      { within },
+    );
+    expect([...found.counts]).toEqual([1, 0, 0, 0, 3]);
+    expect([...found.status].map((s) => core.ROW_STATUS[s])).toEqual([
+      "proved",
+      "refused",
+      "refused",
+      "refused",
+      "proved",
+    ]);
+    expect(found.reasons.map((r) => [r.row, r.code])).toEqual([
+      [1, "not-a-number"],
+      [2, "out-of-range"],
+      [3, "not-a-number"],
+    ]);
+    expect(found.reasons[1]?.text).toContain("0 to 100000 W m-2");
+  });
+
+  test("says of a row what is undecided in it", () => {
+    const found = core.findStatesFor(loop, { flux: [1361] }, { within, effort: 10 });
+    expect(core.ROW_STATUS[found.status[0] as number]).toBe("partial");
+    expect(found.reasons).toMatchObject([{ row: 0, code: "undecided" }]);
+  });
+
+  test("can be switched to sampling, which says so", () => {
+    const found = core.findStatesFor(loop, { flux }, { within, proof: false });
+    const proved = core.findStatesFor(loop, { flux }, { within });
+    expect(new Set([...found.status].map((s) => core.ROW_STATUS[s]))).toEqual(new Set(["sampled"]));
+    expect(found.counts).toEqual(proved.counts);
+    const apart = found.temperatures.map((t, i) => Math.abs(t - (proved.temperatures[i] as number)));
+    expect(Math.max(...apart)).toBeLessThan(1e-10);
+  });
+
+  test("takes more states than three a row", () => {
+    const wavy = core.closeLoop(({ temperature, given }) => {
+      const x = core.div(core.sub(temperature, given("middle", 300, "K")), 10);
+      const factors = [-4, -2, 0, 2, 4].map((root) => core.sub(x, root));
+      return {
+        heating: { imagined: core.inUnit(core.product(...factors), "W m-2") },
+        cooling: {},
+        heatCapacity: 1,
+      };
+    });
+    const middle = Float64Array.from({ length: 50 }, (_, i) => 290 + i / 3);
+    const found = core.findStatesFor(wavy, { middle }, { within });
+    expect([...found.counts]).toEqual(Array(50).fill(5));
+    expect(found.temperatures).toHaveLength(250);
+    expect(found.temperatures[245]).toBeCloseTo((middle[49] as number) - 40, 9);
+  });
+
+  test.each<[string, unknown, unknown, Partial<core.ThermosteadError>]>([
+    ["no columns", {}, { within }, { code: "missing", path: "columns" }],
+    ["an unknown column", { flx: [1] }, { within }, { code: "unknown-name", path: "columns.flx" }],
+    [
+      "columns of different lengths",
+      { flux: [1], emissivity: [0.5, 0.6] },
+      { within },
+      { code: "contradiction", path: "columns.emissivity" },
+    ],
+    ["a number for a column", { flux: 1361 }, { within }, { code: "unreadable", path: "columns.flux" }],
+    ["no range", { flux: [1361] }, {}, { code: "unreadable", path: "within" }],
+  ])("refuses %s", (_, columns, options, expected) => {
+    expect(refusal(() => core.findStatesFor(loop, columns as never, options as never))).toMatchObject(
+      expected,
+    );
+  });
+});

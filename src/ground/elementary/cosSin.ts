@@ -1,5 +1,5 @@
 // Cosine and sine.
-import { productError } from "./errorFree.ts";
+import { productError, sumError } from "./errorFree.ts";
 import { FARTHEST, reduceTurns, turnParts } from "./quarterTurns.ts";
 
 /** 2^-27: below it x³/6 is less than half the spacing of doubles at x. */
@@ -39,8 +39,9 @@ function sinSeries(r: number, tail: number): number {
   const z = r * r;
   const c13 = 1 / 6227020800 + z * (-1 / 1307674368000 + z * (1 / 355687428096000));
   const c7 = -1 / 5040 + z * (1 / 362880 + z * (-1 / 39916800 + z * c13));
-  const cube = r * z * (-1 / 6 + z * (1 / 120 + z * c7));
-  return r + (cube + tail * (1 - z / 2));
+  const cube = r * z;
+  const small = cube * z * (1 / 120 + z * c7) + tail * (1 - z / 2);
+  return r + (small - cube / 6);
 }
 
 function cosSeries(r: number, tail: number): number {
@@ -50,5 +51,5 @@ function cosSeries(r: number, tail: number): number {
   const c6 = -1 / 720 + z * (1 / 40320 + z * (-1 / 3628800 + z * c12));
   const fourth = z * z * (1 / 24 + z * c6);
   const near = 1 - half;
-  return near + (1 - near - half + (fourth - (productError(r, r, z) / 2 + r * tail)));
+  return near + (sumError(1, -half, near) + (fourth - (productError(r, r, z) / 2 + r * tail)));
 }

@@ -15,7 +15,8 @@ export function exp(x: number): number {
   if (!(x >= LEAST && x <= GREATEST)) return x < LEAST ? 0 : x > GREATEST ? Infinity : NaN;
   if (expHigh[0] === 0) fillExpTable();
   const k = x * STEPS + ROUNDER - ROUNDER;
-  const r = x - k * STEP_HIGH - k * STEP_LOW;
+  const a = x - k * STEP_HIGH;
+  const r = a - k * STEP_LOW;
   const p = r + r * r * (1 / 2 + r * (1 / 6 + r * (1 / 24 + r * (1 / 120))));
   const j = k & 127;
   const high = expHigh[j] as number;

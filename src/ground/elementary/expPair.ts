@@ -1,4 +1,4 @@
-// The exponential to about 65 bits, for the functions that are built on it.
+// The exponential to about 67 bits, for the functions that are built on it.
 import { productError, sumError } from "./errorFree.ts";
 import { STEP_HIGH, STEP_LOW, STEPS } from "./expReduction.ts";
 import { expHigh, expLow, fillExpTable } from "./expTable.ts";
@@ -8,8 +8,8 @@ import { ROUNDER } from "./rounder.ts";
 export const expParts = /* @__PURE__ */ new Float64Array(2);
 
 /**
- * e^(x + tail) = (expParts[0] + expParts[1])·2^m; returns m. |x| ≤ 746, |tail| ≤ 2^-50·|x| or so.
- * The sum of the parts lies in [0.99, 2.01] and is right to 2^-65 of itself.
+ * e^(x + tail) = (expParts[0] + expParts[1])·2^m; returns m. For x in [LEAST, GREATEST] and
+ * |tail| ≤ 2^-50·|x|. The sum of the parts lies in [0.99, 2.01] and is right to 2^-67 of itself.
  */
 export function expPair(x: number, tail: number): number {
   if (expHigh[0] === 0) fillExpTable();

@@ -3,7 +3,7 @@ import { expPair, expParts } from "./expPair.ts";
 import { GREATEST } from "./expReduction.ts";
 import { scale } from "./powersOfTwo.ts";
 
-/** From here down e^x is less than a quarter of the spacing of doubles under 1. */
+/** From here down e^x is less than half the spacing of doubles above −1. */
 const SATURATED = -38.2;
 /** 2^-54: below it x²/2 is less than a quarter of the spacing of doubles at x. */
 const TINY = 5.551115123125783e-17;
@@ -11,7 +11,7 @@ const TINY = 5.551115123125783e-17;
 /**
  * e^x − 1, accurate for small x too, the same bits on every engine.
  *
- * Taylor's series below 1/64, above it e^x in two doubles less 1. Error below 0.53 ulp (bounded by proof).
+ * Taylor's series below 1/64, above it e^x in two doubles less 1. Error below 0.52 ulp (bounded by proof).
  * expm1(±0) = ±0, expm1(−∞) = −1, expm1(∞) = ∞, expm1(NaN) = NaN; ∞ above 709.782712893384.
  */
 export function expm1(x: number): number {

@@ -4,7 +4,7 @@ import { logParts, reduceLog } from "./logReduction.ts";
 import { logSeries } from "./logSeries.ts";
 import { LN2_HIGH, LN2_LOW, logHigh, logLow } from "./logTable.ts";
 
-/** ln(x + tail) for finite x > 0 and |tail| up to half an ulp of x, to 0.52 ulp. */
+/** ln(x + tail) for finite x > 0 and |tail| up to half an ulp of x, to 0.514 ulp. */
 export function logOfSum(x: number, tail: number): number {
   const cell = reduceLog(x, tail);
   const f = logParts[0] as number;

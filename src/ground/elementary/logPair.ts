@@ -16,7 +16,7 @@ export function logPair(x: number): number {
   const square = f * f;
   const half = square / 2;
   const halfTail = productError(f, f, square) / 2 + f * fTail;
-  const c6 = -1 / 6 + f * (1 / 7 + f * (-1 / 8 + f * (1 / 9)));
+  const c6 = -1 / 6 + f * (1 / 7 + f * (-1 / 8 + f * (1 / 9 + f * (-1 / 10))));
   const cubic = f * square * (1 / 3 + f * (-1 / 4 + f * (1 / 5 + f * c6)));
   const base = e * LN2_HIGH + (logHigh[j] as number);
   const first = base + f;

@@ -28,8 +28,9 @@ export function reduceLog(x: number, tail: number): number {
   const c = reciprocal[j] as number;
   const m = x * unit;
   const upper = m + SPLITTER - SPLITTER;
+  const lower = m - upper;
   const a = upper * c - 1;
-  const b = (m - upper + tail * unit) * c;
+  const b = (lower + tail * unit) * c;
   const f = a + b;
   logParts[0] = f;
   logParts[1] = sumError(a, b, f);

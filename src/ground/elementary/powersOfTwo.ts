@@ -1,33 +1,31 @@
-// All powers of two that are doubles, and exact scaling by them.
+// Powers of two as products of a fine and a coarse one, so that few need to be tabulated.
 
-const LEAST = -1074;
-const GREATEST = 1023;
+/** 2^(i − 1) at index i; zeros until filled. */
+const fine = /* @__PURE__ */ new Float64Array(32);
+/** 2^(32i − 1074) at index i. */
+const coarse = /* @__PURE__ */ new Float64Array(66);
 
-/** 2^n at index n + 1074; zeros until filled. */
-const powers = /* @__PURE__ */ new Float64Array(GREATEST - LEAST + 1);
-
-/** Fills the table of powers of two; every table that is filled on first use calls this. */
+/** Fills the powers; every table that is filled on first use calls this. */
 export function fillPowersOfTwo(): void {
-  let power = 1;
-  for (let n = 0; n <= GREATEST; n++) {
-    powers[n - LEAST] = power;
+  let power = 0.5;
+  for (let i = 0; i < 32; i++) {
+    fine[i] = power;
     power *= 2;
   }
-  power = 1;
-  for (let n = 0; n >= LEAST; n--) {
-    powers[n - LEAST] = power;
-    power /= 2;
+  power = 5e-324;
+  for (let i = 0; i < 66; i++) {
+    coarse[i] = power;
+    power *= 4294967296;
   }
+}
+
+/** x·2^n, rounded once, for an integer n in [−1075, 1024] and |x| in [1/2, 4), or any smaller if n is above −1022. */
+export function scale(x: number, n: number): number {
+  const i = n + 1075;
+  return x * (fine[i & 31] as number) * (coarse[i >> 5] as number);
 }
 
 /** 2^n for an integer n in [−1074, 1023]. */
 export function powerOfTwo(n: number): number {
-  return powers[n - LEAST] as number;
-}
-
-/** x·2^n, rounded once, for an integer n in [−1075, 1024] and x in [1/2, 4) (or far smaller). */
-export function scale(x: number, n: number): number {
-  if (n > GREATEST) return x * 2 * powerOfTwo(GREATEST);
-  if (n < LEAST) return (x / 2) * powerOfTwo(LEAST);
-  return x * powerOfTwo(n);
+  return scale(1, n);
 }

@@ -73,5 +73,5 @@ export const HEAT_CAPACITY_LAWS = { mixedLayerCapacity, atmosphereCapacity } as 
 /** The port that a description never fills: it is bound to the temperature of the loop. */
 export const BOUND_PORT = "temperature";
 
-/** Ports that take a temperature difference, by law and port; a test compares this list with the ports' own words. */
+/** Ports that take a temperature difference, by law and port; a test compares this list with the ports' ranges. */
 export const DIFFERENCES: readonly string[] = ["tanhAlbedo.width"];

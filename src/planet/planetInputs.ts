@@ -31,7 +31,7 @@ export interface PlanetInput {
   /** Lower and upper error in `unit`, where they are given. */
   readonly minus: number | null;
   readonly plus: number | null;
-  /** The value as it is written, such as `0.61 au`. */
+  /** The value as it is written, such as `0.61 au` or `4680 +60 -60 K`. */
   readonly written: string;
   readonly source: string | null;
   readonly within: Range | null;
@@ -130,6 +130,6 @@ function input(path: string, port: Port, written: Written, difference = false): 
 function writtenAs(written: Written): string {
   if (typeof written !== "object") return String(written);
   const { value, unit = "1", minus, plus } = written;
-  const errors = minus === undefined && plus === undefined ? "" : ` (-${minus ?? "?"} +${plus ?? "?"})`;
+  const errors = `${plus === undefined ? "" : ` +${plus}`}${minus === undefined ? "" : ` -${minus}`}`;
   return `${value}${errors}${unit === "1" ? "" : ` ${unit}`}`;
 }

@@ -7,18 +7,21 @@ import type { Ledger } from "./state.ts";
 /** Rounding of a few flows, relative to the largest of them. */
 const CLOSURE = 1e-12;
 
+/** Reservoirs without bounds, whose storage is not asked: they give and take what the planet needs. */
+const BOUNDLESS: readonly string[] = ["space", "interior"];
+
 /** Makes ledgers from the values of the flows, in order, and the net flux. */
 export type LedgerWriter = (flowValues: Float64Array, net: number) => Ledger;
 
 /**
  * The flows of a loop's state between its reservoirs. Storage is not made from the flows: at the surface it is N, a layer
- * without heat capacity stores nothing, and space is not asked. So a ledger that does not close can be seen.
+ * without heat capacity stores nothing, space and the interior are not asked. So a ledger that does not close can be seen.
  */
 export function ledgerWriter(flows: readonly FlowRecord[]): LedgerWriter {
   const names = [...new Set(["space", "surface", ...flows.flatMap((f) => [f.from, f.to])])];
   return (flowValues, net) => {
     const reservoirs = names.map((name) =>
-      Object.freeze({ name, storage: name === "space" ? null : name === "surface" ? net : 0 }),
+      Object.freeze({ name, storage: BOUNDLESS.includes(name) ? null : name === "surface" ? net : 0 }),
     );
     const rows = flows.map(({ name, from, to, standardName }, i) =>
       Object.freeze({ name, from, to, value: flowValues[i] as number, standardName }),

@@ -2,11 +2,11 @@
 import type { Couplings, Givens, Variables } from "../loop/types.ts";
 import type { Note } from "./note.ts";
 
-/** Who gives whom how much: for every reservoir but space, inflow − outflow = storage. */
+/** Who gives whom how much: for every reservoir with a storage, inflow − outflow = storage. */
 export interface Ledger {
   readonly reservoirs: readonly {
     readonly name: string;
-    /** Heat taken up, W m⁻², known without the flows: N for the surface, 0 for a layer; `null` for space. */
+    /** Heat taken up, W m⁻², known without the flows: N for the surface, 0 for a layer; `null` for space and the interior. */
     readonly storage: number | null;
   }[];
   readonly flows: readonly {

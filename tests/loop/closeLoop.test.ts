@@ -334,6 +334,17 @@ describe("a second reservoir", () => {
     expect(state?.notes).toEqual([]);
   });
 
+  test("called interior gives heat without being asked for its storage", () => {
+    const heated = closeLoop(({ temperature }) => ({
+      heating: { internal: { value: 0.09, from: "interior" } },
+      cooling: { longwave: greyEmission({ temperature, emissivity: 1 }) },
+      heatCapacity: 0,
+    }));
+    const [state] = findStates(heated, { within: [10, 100] }).states;
+    expect(state?.ledger.reservoirs.find((r) => r.name === "interior")?.storage).toBeNull();
+    expect(state?.notes).toEqual([]);
+  });
+
   test("that does not balance is said to be open", () => {
     const [state] = findStates(layered(false), { within: [100, 500] }).states;
     expect(state?.notes).toMatchObject([

@@ -6,8 +6,19 @@ import { populations } from "./populations.mjs";
  * follows saturation, and a logarithmic forcing, here far beyond its published range, as a load for the search.
  */
 export function budgetsOf(core) {
-  const { absorbedFlux, add, defineLaw, div, exp, greyColumnEmission, greyEmission, log, mul, sub, tanhAlbedo } =
-    core;
+  const {
+    absorbedFlux,
+    add,
+    defineLaw,
+    div,
+    exp,
+    greyColumnEmission,
+    greyEmission,
+    log,
+    mul,
+    sub,
+    tanhAlbedo,
+  } = core;
 
   const temperaturePort = { symbol: "T", unit: "K", within: [1, 5000] };
   const vapourDepth = defineLaw({
@@ -36,7 +47,8 @@ export function budgetsOf(core) {
   const givensOf = (name, given) =>
     Object.fromEntries(
       Object.entries(populations[name].ranges).map(([key, within]) => {
-        const unit = { flux: "W m-2", internalFlux: "W m-2", midpoint: "K", width: "K", latent: "K" }[key] ?? "1";
+        const unit =
+          { flux: "W m-2", internalFlux: "W m-2", midpoint: "K", width: "K", latent: "K" }[key] ?? "1";
         return [key, given(key, (within[0] + within[1]) / 2, unit, { within })];
       }),
     );

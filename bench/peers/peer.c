@@ -30,9 +30,10 @@ static table read_table(const char *name, int columns) {
   return t;
 }
 
+// Processor time of this process: what others run at the same time is not in it.
 static double now(void) {
   struct timespec t;
-  clock_gettime(CLOCK_MONOTONIC, &t);
+  clock_gettime(CLOCK_PROCESS_CPUTIME_ID, &t);
   return t.tv_sec * 1e9 + t.tv_nsec;
 }
 

@@ -1,0 +1,6 @@
+// What the bench reads below the doors: the kernels behind a loop.
+export * from "../src/index.ts";
+export { inputsOf } from "../src/loop/inputs.ts";
+export { generateValue } from "../src/reading/generateValue.ts";
+export { interpretValue } from "../src/reading/interpretValue.ts";
+export { slopeNodes } from "../src/reading/slopeKernel.ts";

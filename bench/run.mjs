@@ -1,0 +1,80 @@
+// Everything about speed in one run: `npm run bench`. All contestants of a question take turns, round after round.
+//   node bench/run.mjs            prints
+//   node bench/run.mjs --quick    fewer rounds and planets, to see that it works
+//   node bench/run.mjs --write    also writes docs/performance.md
+import fs from "node:fs";
+import os from "node:os";
+import path from "node:path";
+import { load } from "../.config/load.mjs";
+import * as core from "../dist/index.js";
+import { evaluations } from "./evaluations.mjs";
+import { buildC, startPython, writeRows } from "./peer.mjs";
+import { columnsOf } from "./populations.mjs";
+import { describeMachine, performancePage, printQuestion } from "./report.mjs";
+import { consumed, interleave } from "./rounds.mjs";
+import { compareStates, searches } from "./searches.mjs";
+import { starts } from "./starts.mjs";
+import { threeStates } from "./threeStates.mjs";
+
+const quick = process.argv.includes("--quick");
+const ROUNDS = quick ? 7 : 25;
+const PLANETS = quick ? 2000 : 20000;
+const EVALUATIONS = 200_000;
+
+const folder = fs.mkdtempSync(path.join(os.tmpdir(), "thermostead-bench-"));
+const names = ["ice", "vapour"];
+const columns = Object.fromEntries(names.map((name) => [name, columnsOf(name, PLANETS)]));
+const rowFiles = names.map((name) => path.join(folder, `${name}.rows`));
+for (const [i, name] of names.entries()) writeRows(rowFiles[i], columns[name]);
+
+const c = buildC(folder, rowFiles);
+const python = await startPython(rowFiles);
+const machine = describeMachine(c, python);
+console.log(machine.text);
+const questions = [];
+
+/** Every contestant must give the first one's result before any is timed. */
+async function agree(question, contestants, tolerance) {
+  const totals = await Promise.all(contestants.map((it) => it.total(4096)));
+  for (const [i, total] of totals.entries()) {
+    if (!(Math.abs(total - totals[0]) <= tolerance * Math.abs(totals[0])))
+      throw new Error(`${question}: ${contestants[i].name} gives ${total}, not ${totals[0]}`);
+  }
+}
+
+async function ask(title, unit, contestants, rounds = ROUNDS) {
+  const question = { title, unit, contestants: await interleave(contestants, rounds) };
+  questions.push(question);
+  console.log(printQuestion(question));
+}
+
+try {
+  const internals = await load("bench/internals.ts");
+  const sums = evaluations({ ...internals }, columns.ice, c, EVALUATIONS);
+  for (const [title, contestants] of Object.entries(sums)) {
+    await agree(title, contestants, 1e-10);
+    await ask(title, "ns", contestants);
+  }
+  for (const name of names) {
+    const contestants = searches(core, name, columns[name], { c, python, folder });
+    const proved = await contestants.find((it) => it.ours).states();
+    for (const contestant of contestants) {
+      if (contestant.states) contestant.checked = compareStates(await contestant.states(), proved);
+      if (contestant.checked?.farthest > 1e-6)
+        throw new Error(`${contestant.name}: states ${contestant.checked.farthest} K off`);
+    }
+    await ask(`all states of a planet, ${name}`, "ns", contestants);
+  }
+  await ask("one planet with three states, whole result", "ns", threeStates(core));
+  for (const name of names) await ask(`from closing a loop to its states, ${name}`, "ms", starts(core, name));
+  machine.loadAfter = os.loadavg()[0];
+  console.log(
+    `load ${machine.loadBefore.toFixed(1)} before, ${machine.loadAfter.toFixed(1)} after (${consumed().toExponential(2)})`,
+  );
+  if (process.argv.includes("--write"))
+    fs.writeFileSync("docs/performance.md", performancePage(machine, questions));
+} finally {
+  c?.end();
+  python?.end();
+  fs.rmSync(folder, { recursive: true, force: true });
+}

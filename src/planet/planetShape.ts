@@ -1,15 +1,6 @@
 // The shape of a description. What values mean and whether they agree is checked after it.
-import type { infer as Inferred } from "zod/mini";
-import {
-  array,
-  discriminatedUnion,
-  literal,
-  enum as oneOf,
-  optional,
-  strictObject,
-  string,
-  union,
-} from "zod/mini";
+import type { output } from "zod/mini";
+import { array, discriminatedUnion, literal, optional, strictObject, string, union } from "zod/mini";
 import {
   ALBEDO_LAWS,
   ALBEDO_PORT,
@@ -48,14 +39,14 @@ const orbit = strictObject({
   flux: optional(measuredSchema(ORBIT_PORTS.flux)),
   eccentricity: optional(pureSchema(ORBIT_PORTS.eccentricity)),
   average: optional(
-    worded(oneOf(["flux", "temperature"]), '"flux" or "temperature"', {
+    worded(literal(["flux", "temperature"]), '"flux" or "temperature"', {
       description: "what is averaged over an eccentric orbit; required unless the eccentricity is 0",
     }),
   ),
 });
 
 const names = Object.keys(REDISTRIBUTIONS) as (keyof typeof REDISTRIBUTIONS)[];
-const named = worded(oneOf(names), names.map((name) => `"${name}"`).join(", "));
+const named = worded(literal(names), names.map((name) => `"${name}"`).join(", "));
 const redistribution = worded(
   union([named, ...pureSchema(REDISTRIBUTION_PORT).def.options]),
   'a number from 0.25 to 1, or "global", "dayside", "instant" or "substellar"',
@@ -136,4 +127,4 @@ export const PLANET_SHAPE = worded(
  * A planet in the trade's words, in the format `thermostead-planet-1`. A value with a unit is a text such as `"0.61 au"`,
  * or `{ value, unit }` with `minus`, `plus` and `source`; a pure number is a number, or an object in the same way.
  */
-export type PlanetDescription = Inferred<typeof PLANET_SHAPE>;
+export type PlanetDescription = output<typeof PLANET_SHAPE>;

@@ -35,7 +35,8 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     const error = w.sum(first, w.times(a.err, b.err));
     return w.rounded(...extremes(w, w.mul, a, b), error, ofSign(signOf(a) * signOf(b)));
   },
-  // a/b − a'/b' = (α − (a'/b')β) / b; b must keep away from zero
+  // a/b − a'/b' = α/b − (a'/b')(β/b), in an order in which nothing that underflows is divided by something small;
+  // b must keep away from zero
   div(w, a, b) {
     const [lo, hi] = extremes(w, w.div, a, reciprocalOrder(b));
     const within = ofSign(signOf(a) * signOf(b));
@@ -44,8 +45,10 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     const below = w.less(w.neg(b.hi), b.err);
     const sign = signOf(b);
     const distance = sign > 0 ? above : sign < 0 ? below : w.pick(zero, b.lo, above, below);
-    const change = w.sum(a.err, w.times(w.size({ lo, hi, within }), b.err));
-    const error = change === undefined ? undefined : w.div(change, distance);
+    const error = w.sum(
+      w.over(a.err, distance),
+      w.times(w.size({ lo, hi, within }), w.over(b.err, distance)),
+    );
     const declared = b.err === undefined && (b.within[0] > 0 || b.within[1] < 0);
     return w.rounded(lo, hi, declared ? error : w.provided(zero, distance, error), within);
   },
@@ -54,7 +57,7 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     const [lo, hi] = [w.step("sqrt", a.lo), w.step("sqrt", a.hi)];
     const zero = w.literal(0);
     let error: number | undefined;
-    if (a.err !== undefined) error = w.provided(zero, w.sub(a.lo, a.err), w.div(a.err, lo));
+    if (a.err !== undefined) error = w.provided(zero, w.sub(a.lo, a.err), w.over(a.err, lo));
     else if (signOf(a) <= 0) error = w.pick(a.lo, zero, w.literal(NaN), zero);
     return w.rounded(lo, hi, error, NOT_NEGATIVE);
   },
@@ -67,7 +70,7 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   log: (w, a) =>
     w.approximate("log", a, ofSign(0), (_, err) => {
       const least = w.less(a.lo, err);
-      return w.provided(w.literal(0), least, err === undefined ? err : w.div(err, least));
+      return w.provided(w.literal(0), least, w.over(err, least));
     }),
   // no steeper than 1
   tanh: (w, a) => w.approximate("tanh", a, [signOf(a) > 0 ? 0 : -1, signOf(a) < 0 ? 0 : 1], (_, err) => err),

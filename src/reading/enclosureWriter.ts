@@ -34,6 +34,7 @@ export class EnclosureWriter extends ScalarProgram {
   /** Arithmetic of errors, of which an absent one is zero. */
   sum = (a: Bound, b: Bound): Bound => (a === undefined ? b : b === undefined ? a : this.add(a, b));
   times = (a: Bound, b: Bound): Bound => (a === undefined || b === undefined ? undefined : this.mul(a, b));
+  over = (a: Bound, b: number): Bound => (a === undefined ? a : this.div(a, b));
   less = (a: number, b: Bound): number => (b === undefined ? a : this.sub(a, b));
   /** An error with the rounding of its own arithmetic. */
   widened = (a: Bound): Bound => this.times(a, this.literal(SLACK));

@@ -32,6 +32,18 @@ describe("the README", () => {
   });
 });
 
+test("docs/decisions.md gives a reason for every package", () => {
+  const { dependencies, devDependencies } = JSON.parse(fs.readFileSync("package.json", "utf8"));
+  const rows = fs
+    .readFileSync("docs/decisions.md", "utf8")
+    .split("\n")
+    .filter((line) => line.startsWith("| `"));
+  const reasoned = rows.flatMap((row) =>
+    [...(row.split("|")[1] as string).matchAll(/`([^`]+)`/g)].map((m) => m[1]),
+  );
+  for (const name of Object.keys({ ...dependencies, ...devDependencies })) expect(reasoned).toContain(name);
+});
+
 /** Places in documents of ours that a document links to: `file` or `file#section`. */
 function linksOf(file: string): string[] {
   const text = fs.readFileSync(file, "utf8");

@@ -33,7 +33,7 @@ export async function interleave(contestants, rounds) {
 export const ratioOf = (times, reference) => spreadOf(times.map((time, round) => time / reference[round]));
 
 /** Processor time of this process so far, in nanoseconds, all its threads: what others run at the same time is not in it. */
-const processorTime = () => {
+export const processorTime = () => {
   const { user, system } = process.cpuUsage();
   return (user + system) * 1000;
 };

@@ -8,9 +8,10 @@ import path from "node:path";
 import { load } from "../.config/load.mjs";
 import * as core from "../dist/index.js";
 import { evaluations } from "./evaluations.mjs";
+import { performancePage } from "./page.mjs";
 import { buildC, startPython, writeRows } from "./peer.mjs";
 import { columnsOf } from "./populations.mjs";
-import { describeMachine, performancePage, printQuestion } from "./report.mjs";
+import { describeMachine, printQuestion } from "./report.mjs";
 import { consumed, interleave } from "./rounds.mjs";
 import { compareStates, searches } from "./searches.mjs";
 import { starts } from "./starts.mjs";
@@ -30,7 +31,7 @@ for (const [i, name] of names.entries()) writeRows(rowFiles[i], columns[name]);
 const c = buildC(folder, rowFiles);
 const python = await startPython(rowFiles);
 const machine = describeMachine(c, python);
-console.log(machine.text);
+console.log(machine.lines.join("\n"));
 const questions = [];
 
 /** Every contestant must give the first one's result before any is timed. */
@@ -42,8 +43,9 @@ async function agree(question, contestants, tolerance) {
   }
 }
 
-async function ask(title, unit, contestants, rounds = ROUNDS) {
-  const question = { title, unit, contestants: await interleave(contestants, rounds) };
+/** `compared`: the first contestant is the measure of the others. */
+async function ask(title, unit, contestants, compared) {
+  const question = { title, unit, compared, contestants: await interleave(contestants, ROUNDS) };
   questions.push(question);
   console.log(printQuestion(question));
 }
@@ -53,7 +55,7 @@ try {
   const sums = evaluations({ ...internals }, columns.ice, c, EVALUATIONS);
   for (const [title, contestants] of Object.entries(sums)) {
     await agree(title, contestants, 1e-10);
-    await ask(title, "ns", contestants);
+    await ask(title, "ns", contestants, c !== null);
   }
   for (const name of names) {
     const contestants = searches(core, name, columns[name], { c, python, folder });
@@ -63,16 +65,20 @@ try {
       if (contestant.checked?.farthest > 1e-6)
         throw new Error(`${contestant.name}: states ${contestant.checked.farthest} K off`);
     }
-    await ask(`all states of a planet, ${name}`, "ns", contestants);
+    await ask(`all states of a planet, ${name}`, "ns", contestants, true);
   }
-  await ask("one planet with three states, whole result", "ns", threeStates(core));
-  for (const name of names) await ask(`from closing a loop to its states, ${name}`, "ms", starts(core, name));
+  await ask("one planet with three states, whole result", "ns", threeStates(core), false);
+  for (const name of names)
+    await ask(`from closing a loop to its states, ${name}`, "ms", starts(core, name), false);
   machine.loadAfter = os.loadavg()[0];
   console.log(
     `load ${machine.loadBefore.toFixed(1)} before, ${machine.loadAfter.toFixed(1)} after (${consumed().toExponential(2)})`,
   );
   if (process.argv.includes("--write"))
-    fs.writeFileSync("docs/performance.md", performancePage(machine, questions));
+    fs.writeFileSync(
+      "docs/performance.md",
+      performancePage(machine, questions, { rounds: ROUNDS, planets: PLANETS }),
+    );
 } finally {
   c?.end();
   python?.end();

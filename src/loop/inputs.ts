@@ -6,6 +6,13 @@ import type { Loop } from "./types.ts";
 /** The nodes that a reading of this loop takes as inputs: variables, then givens. */
 export const inputsOf = (loop: Loop): number[] => [...loop.variables, ...loop.givens].map((v) => v.node);
 
+/** The nodes of all that a loop computes: rates, flows, heat capacity, what is reported. */
+export const rootsOf = ({ variables, flows, report, heatCapacity }: Loop): number[] => [
+  ...variables.map((v) => v.rate),
+  ...[...flows, ...report].map((r) => r.node),
+  heatCapacity,
+];
+
 /** The values of the givens, with those in `at` replaced. Throws for an unknown name or a value that is not allowed. */
 export function givensAt(loop: Loop, at: Readonly<Record<string, unknown>> = {}): number[] {
   const known = loop.givens.map((g) => g.name);

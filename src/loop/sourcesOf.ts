@@ -1,5 +1,6 @@
 // The published sources behind a loop.
 import { coneOf } from "../graph/cone.ts";
+import { rootsOf } from "./inputs.ts";
 import type { Loop } from "./types.ts";
 
 /** A law that takes part in a loop, and where it is published. */
@@ -11,9 +12,8 @@ export interface LawSource {
 
 /** The laws of a loop in the order in which they were written, each once, with their sources. */
 export function sourcesOf(loop: Loop): readonly LawSource[] {
-  const roots = [...loop.flows, ...loop.report, ...loop.couplings].map((r) => r.node);
   const found = new Map<string, LawSource>();
-  for (const id of coneOf(loop.graph, [...roots, loop.heatCapacity, ...loop.variables.map((v) => v.rate)])) {
+  for (const id of coneOf(loop.graph, rootsOf(loop))) {
     const meaning = loop.graph.meanings[id];
     if (meaning?.kind !== "law") continue;
     const { name, about, source } = meaning.card;

@@ -3,6 +3,7 @@
 import type { LawCard, Port } from "../graph/card.ts";
 import { coneOf } from "../graph/cone.ts";
 import type { Range } from "../ground/range.ts";
+import { rootsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Note } from "./note.ts";
 
@@ -13,33 +14,48 @@ export interface Check {
   readonly note: Omit<Note, "value" | "range">;
 }
 
-/** Every port and demand of every law of a loop whose value depends on a quantity. */
+/** Every port and demand of every law of a loop whose value depends on a quantity, and the heat capacity. */
 export function checksOf(loop: Loop): Check[] {
-  const { graph } = loop;
-  const roots = [
-    ...loop.variables.map((v) => v.rate),
-    ...loop.flows.map((f) => f.node),
-    ...loop.report.map((r) => r.node),
-  ];
+  const { graph, heatCapacity } = loop;
   const checks: Check[] = [];
-  for (const id of coneOf(graph, [...roots, loop.heatCapacity])) {
+  const check = (kind: keyof typeof OUTSIDE, about: string, node: number, range: Range, rest: Rest) => {
+    if (graph.ops[node] !== "const") checks.push({ node, range, note: { ...OUTSIDE[kind], about, ...rest } });
+  };
+  check("range", "heatCapacity", heatCapacity, [0, Number.MAX_VALUE], { unit: "J m-2 K-1", source: null });
+  for (const id of coneOf(graph, rootsOf(loop))) {
     const meaning = graph.meanings[id];
     if (meaning?.kind !== "law") continue;
-    const { card } = meaning;
-    for (const [wire, node] of Object.entries(meaning.wires)) {
-      if (graph.ops[node] === "const") continue;
-      const port = portOf(card, wire);
-      if (port.within) checks.push(hard(card, wire, node, port.within, port.unit));
+    const { card, wires, demands } = meaning;
+    const source = card.source || null;
+    for (const [wire, node] of Object.entries(wires)) {
+      const { within, unit } = portOf(card, wire);
       const published = card.published[wire];
-      if (published) checks.push({ node, range: published, note: soft(card, wire, port.unit) });
+      const about = `${card.name}.${wire}`;
+      if (within) check("range", about, node, within, { unit, source });
+      if (published) check("published", about, node, published, { unit, source });
     }
-    for (const [name, { node, demand }] of Object.entries(meaning.demands)) {
-      if (graph.ops[node] !== "const")
-        checks.push(hard(card, `${name} (${demand.about})`, node, demand.within, demand.unit));
+    for (const [name, { node, demand }] of Object.entries(demands)) {
+      const { within, unit, about } = demand;
+      check("range", `${card.name}.${name} (${about})`, node, within, { unit, source });
     }
   }
   return checks;
 }
+
+type Rest = Pick<Note, "unit" | "source">;
+
+const OUTSIDE = {
+  range: {
+    code: "outside-range",
+    severity: "invalid",
+    text: "outside the range in which it has a meaning; do not use this state",
+  },
+  published: {
+    code: "outside-published",
+    severity: "caution",
+    text: "outside the range that the source covers; the law is extrapolated",
+  },
+} as const;
 
 /** The notes of the checks that fail, for the values of the checks' nodes in order. */
 export function notesFrom(checks: readonly Check[], values: Float64Array): Note[] {
@@ -49,34 +65,6 @@ export function notesFrom(checks: readonly Check[], values: Float64Array): Note[
     if (!(value >= range[0] && value <= range[1])) notes.push(Object.freeze({ ...note, value, range }));
   });
   return notes;
-}
-
-function hard(card: LawCard, wire: string, node: number, range: Range, unit: string): Check {
-  const text = "outside the range in which this law has a meaning; do not use this state";
-  return {
-    node,
-    range,
-    note: {
-      code: "outside-range",
-      severity: "invalid",
-      about: `${card.name}.${wire}`,
-      unit,
-      text,
-      source: card.source || null,
-    },
-  };
-}
-
-function soft(card: LawCard, wire: string, unit: string): Check["note"] {
-  const text = "outside the range that the source covers; the law is extrapolated";
-  return {
-    code: "outside-published",
-    severity: "caution",
-    about: `${card.name}.${wire}`,
-    unit,
-    text,
-    source: card.source || null,
-  };
 }
 
 /** The port of a wire; `covers[1].albedo` is a port of the records that `covers` lists. */

@@ -7,7 +7,6 @@ export type NoteCode =
   | "sampled-law"
   | "sampled-search"
   | "open-reservoir"
-  | "negative-heat-capacity"
   | "search-stopped";
 
 /** A caution: `info` can be ignored, `caution` weakens the number, `invalid` means that it should not be used. */

@@ -55,7 +55,10 @@ const STABILITY: Readonly<Record<number, State["stability"]>> = {
 };
 
 /** Bounds of N at the temperature and of λ over the bracket. */
-function locate({ net }: EnclosedBalance, { at, bracket, slopeSign }: ProvedZero): Located {
+export function locate(
+  { net }: Pick<EnclosedBalance, "net">,
+  { at, bracket, slopeSign }: ProvedZero,
+): Located {
   net.point(at, values);
   const [low, high, error, slopeLow, slopeHigh] = values as unknown as [
     number,

@@ -6,7 +6,6 @@ import { valueKernel } from "../reading/valueKernel.ts";
 import { checksOf, notesFrom } from "./checkState.ts";
 import { ledgerWriter, openReservoirs } from "./ledger.ts";
 import type { Located } from "./located.ts";
-import type { Note } from "./note.ts";
 import type { State } from "./state.ts";
 
 /** Makes states from temperatures. */
@@ -41,7 +40,7 @@ export function stateReader(loop: Loop): StateReader {
     const [netFlux, capacity] = core as unknown as [number, number];
     const bracket = Object.freeze([located.bracket[0], located.bracket[1]] as const);
     const ledger = writeLedger(flowValues, netFlux);
-    const notes = [...notesFrom(checks, checked), ...openReservoirs(ledger), ...capacityNotes(capacity)];
+    const notes = [...notesFrom(checks, checked), ...openReservoirs(ledger)];
     return Object.freeze({
       variables: Object.freeze({ temperature: Object.freeze({ value: at, bracket }) }),
       temperature: at,
@@ -76,12 +75,4 @@ function namedValues(
   const record: Record<string, number> = {};
   for (let i = 0; i < list.length; i++) record[(list[i] as { name: string }).name] = values[i] as number;
   return Object.freeze(record);
-}
-
-function capacityNotes(capacity: number): Note[] {
-  if (capacity >= 0) return [];
-  const text = "a heat capacity below zero has no meaning; do not use this state's times";
-  const range = [0, Number.MAX_VALUE] as const;
-  const rest = { value: capacity, range, unit: "J m-2 K-1", text, source: null };
-  return [{ code: "negative-heat-capacity", severity: "invalid", about: "heatCapacity", ...rest }];
 }

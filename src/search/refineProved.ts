@@ -69,10 +69,12 @@ function approach(bracket: Bracket, guess: number): { at: number; noise: number 
   return { at, noise };
 }
 
-/** Moves one end close to the zero: as far from it as noise reaches, then three times as far until the sign is proved. */
+/**
+ * Moves one end close to the zero: as far from it as noise reaches, then three times as far until the sign is proved. Once
+ * it is, what lies further out is no longer inside the bracket.
+ */
 function prove(bracket: Bracket, at: number, noise: number, side: 1 | -1): void {
-  const wanted = side < 0 ? bracket.below : -bracket.below;
   let gap = roundoffAt(at) + (noise < bracket.high.x - bracket.low.x ? 1.25 * noise : 0);
   for (let i = 0; i < MOST_WIDENINGS && bracket.holds(at + side * gap); i++, gap *= 3)
-    if (bracket.read(at + side * gap) === wanted) return;
+    bracket.read(at + side * gap);
 }

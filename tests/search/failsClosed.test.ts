@@ -70,9 +70,27 @@ describe("a number that is not finite decides nothing", () => {
       }
   });
 
+  test.each([0, 1, 2])(
+    "without bounds of the value over boxes (number %i spoilt) nothing is decided",
+    (index) => {
+      for (const problem of smooth)
+        for (const bad of BAD) {
+          const f = enclosed(problem);
+          const blind = spoilt(f, (i) => (i === index ? bad : undefined));
+          const found = enumerateZeros({ box: blind.box, point: f.point }, problem.range, { effort: 300 });
+          expect(found.zeros).toEqual([]);
+          expect(found.undecided[0]?.interval[0]).toBe(problem.range[0]);
+          expect(found.undecided.at(-1)?.interval[1]).toBe(problem.range[1]);
+          found.undecided.slice(1).forEach((u, k) => {
+            expect(u.interval[0]).toBe(found.undecided[k]?.interval[1]);
+          });
+        }
+    },
+  );
+
   test("readings spoilt here and there", () => {
     const random = randomNumbers(3);
-    for (let k = 0; k < 300; k++) {
+    for (let k = 0; k < 60; k++) {
       const often = random() * 0.3;
       for (const problem of smooth) {
         const f = spoilt(enclosed(problem), () =>
@@ -98,6 +116,18 @@ describe("a number that is not finite decides nothing", () => {
       expect([sign(1, 2, bad), sign(1, bad, 0), sign(bad, 2, 0), sign(-2, bad, 0), sign(bad, -1, 0)]).toEqual(
         Array(5).fill(0),
       );
+  });
+
+  test("no slope is claimed where there may be no value, no curvature where there may be no slope", () => {
+    const read = (value: number, slope: number, bend: number) =>
+      new Reader({
+        box: (_a, _b, out) => out.set([value, 2, 0, slope, 2, 0, bend, 2, 0]),
+        point: () => undefined,
+      }).box(0, 1);
+    expect(read(1, 1, 1)).toMatchObject({ sign: 1, slopeSign: 1, bend: 1, smooth: true });
+    expect(read(1, 1, Number.NaN)).toMatchObject({ sign: 1, slopeSign: 1, bend: 0, smooth: false });
+    expect(read(1, Number.NaN, 1)).toMatchObject({ sign: 1, slopeSign: 0, bend: 0, continuous: false });
+    expect(read(Number.NaN, 1, 1)).toMatchObject({ sign: 0, slopeSign: 0, bend: 0, defined: false });
   });
 
   test("a range that is none is refused", () => {

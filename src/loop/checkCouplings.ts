@@ -12,13 +12,18 @@ export function checkCouplings(
   for (const { name, node } of couplings) {
     const path = `couple("${name}")`;
     if (!used.has(node))
-      fail("coupling-unused", { path, value: name, allowed: "in a flow what couple returned" });
+      fail("coupling-unused", {
+        path,
+        value: name,
+        allowed: "the value that couple returned, used in a flow",
+      });
     const source = (g.args[node] as readonly number[])[0] as number;
     // only the value of a law: arithmetic such as T − 288 is shared by accident
     if (g.meanings[source]?.kind !== "law") continue;
     const bypass = reached.some(
       (id) => (g.args[id] as readonly number[]).includes(source) && g.meanings[id]?.kind !== "coupling",
     );
-    if (bypass) fail("coupling-bypassed", { path, value: name, allowed: "everywhere what couple returned" });
+    if (bypass)
+      fail("coupling-bypassed", { path, value: name, allowed: "only the value that couple returned" });
   }
 }

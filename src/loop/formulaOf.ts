@@ -1,4 +1,5 @@
 // The budget of a loop on paper.
+import type { Ports } from "../graph/card.ts";
 import { type Notation, printNode } from "../graph/print.ts";
 import { lawFormula } from "../law/lawFormula.ts";
 import type { Law } from "../law/types.ts";
@@ -19,7 +20,7 @@ export interface LoopFormula {
 }
 
 /** The formula of a law as text. */
-export function formulaOf(law: Law, options?: FormulaOptions): string;
+export function formulaOf<I extends Ports>(law: Law<I>, options?: FormulaOptions): string;
 /** The formulas of a loop's flows, in which couplings stand by name, and of its couplings. */
 export function formulaOf(loop: Loop, options?: FormulaOptions): LoopFormula;
 export function formulaOf(of: Law | Loop, { notation = "text" }: FormulaOptions = {}): string | LoopFormula {

@@ -100,7 +100,7 @@ export class BudgetRecorder {
       fail("repeated-name", {
         path: `${kind} ${name}`,
         value: name,
-        allowed: "variables, givens and couplings",
+        allowed: "each name once among variables, givens and couplings",
       });
     }
     this.#taken.add(name as string);

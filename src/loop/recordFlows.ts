@@ -23,7 +23,7 @@ export function flowsOf(recorder: BudgetRecorder, budget: Budget): FlowRecord[] 
       const path = `${side}.${name}`;
       checkedName(name, path);
       if (flows.some((f) => f.name === name))
-        fail("repeated-name", { path, value: name, allowed: "the flows of a budget" });
+        fail("repeated-name", { path, value: name, allowed: "each flow's name once" });
       flows.push({ name, sign, ...flowOf(recorder, flow, path, ends) });
     }
   }

@@ -7,28 +7,31 @@ import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKerne
 import { rangesOf } from "./enclosedBalance.ts";
 import type { Undecided } from "./state.ts";
 
-/** Distances for the givens' values and an interval of temperature. */
-export type FoldDistances = (givens: readonly number[], interval: Range) => Undecided["distances"];
+/** Distances for the givens' values, an interval of temperature, and the proved bounds of N there. */
+export type FoldDistances = (
+  givens: readonly number[],
+  fold: { readonly interval: Range; readonly enclosure: Range },
+) => Undecided["distances"];
 
 /** −N/(∂N/∂p) over the interval for every given p, to first order; the kernel is made when it is first needed. */
 export function foldDistances(loop: Loop): FoldDistances {
   const { graph, net, givens } = loop;
   const inputs = inputsOf(loop);
   let kernel: EnclosureKernel | undefined;
-  return (values, interval) => {
+  return (values, { interval, enclosure }) => {
     kernel ??= enclosureKernel(graph, {
       inputs,
-      outputs: [net, ...givens.map((p) => derivative(graph, net, p.node, inputs))],
+      outputs: givens.map((p) => derivative(graph, net, p.node, inputs)),
       wide: new Set([inputs[0] as number]),
       ranges: rangesOf(loop),
     });
-    const out = new Float64Array(3 + 3 * givens.length);
+    const out = new Float64Array(3 * givens.length);
     kernel(Float64Array.of(interval[0], ...values), Float64Array.of(interval[1], ...values), out);
     const bounds = (i: number): Range => [
       (out[3 * i] as number) - (out[3 * i + 2] as number),
       (out[3 * i + 1] as number) + (out[3 * i + 2] as number),
     ];
-    return Object.fromEntries(givens.map(({ name }, i) => [name, minusQuotient(bounds(0), bounds(1 + i))]));
+    return Object.fromEntries(givens.map(({ name }, i) => [name, minusQuotient(enclosure, bounds(i))]));
   };
 }
 

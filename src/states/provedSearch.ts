@@ -26,7 +26,7 @@ export function provedSearch(loop: Loop): StateSearch {
         kind,
         counts,
         enclosure: enclosure.every(Number.isFinite) ? enclosure : null,
-        distances: kind === "fold" || kind === "corner" ? distancesOf(givens, interval) : null,
+        distances: kind === "fold" || kind === "corner" ? distancesOf(givens, { interval, enclosure }) : null,
       })),
       cost: { boxes, points },
     };

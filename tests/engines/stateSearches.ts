@@ -37,13 +37,21 @@ export function stateSearches(): {
     const names = loop.givens.map((given) => given.name);
     const wanted = Object.fromEntries(Object.entries(columns).filter(([key]) => names.includes(key)));
     for (let row = 0; row < (wanted.flux?.length ?? 0); row++) {
-      const found = core.findStates(loop, { within: WITHIN as [number, number], at: rowOf(wanted, row) });
-      const print = new Fingerprint();
-      print.result(found);
-      prints[`${name}, planet ${row}`] = print.text;
-      tally.count++;
-      tally.states += found.states.length;
-      if (found.complete) tally.proved++;
+      const at = rowOf(wanted, row);
+      const search = (title: string, within: readonly [number, number]) => {
+        const found = core.findStates(loop, { within, at });
+        const print = new Fingerprint();
+        print.result(found);
+        prints[title] = print.text;
+        tally.count++;
+        tally.states += found.states.length;
+        if (found.complete) tally.proved++;
+        return found;
+      };
+      const [first] = search(`${name}, planet ${row}`, WITHIN as [number, number]).states;
+      // A range that ends at a state cannot be decided, so results with doubts are compared too.
+      if (first && row % 10 === 0)
+        search(`${name}, planet ${row} up to a state`, [WITHIN[0] as number, first.temperature]);
     }
   }
   return { ...tally, prints };

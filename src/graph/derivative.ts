@@ -31,7 +31,7 @@ export function derivative(g: Graph, node: number, wrt: number, held: Iterable<n
 }
 
 /** Records the arithmetic of derivatives, with the simplifications that only they may use. */
-class Writer {
+export class Writer {
   readonly g: Graph;
   constructor(g: Graph) {
     this.g = g;

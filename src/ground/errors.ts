@@ -10,6 +10,7 @@ export const ERROR_CODES = [
   "unknown-unit",
   "unit-mismatch",
   "other-loop",
+  "foreign-state",
   "not-a-quantity",
   "quantity-as-number",
   "shares-not-one",

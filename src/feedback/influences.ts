@@ -1,0 +1,85 @@
+// The influences between temperature, the chosen couplings and the net flux, each with everything else held.
+import { adjoint } from "../graph/adjoint.ts";
+import { derivative } from "../graph/derivative.ts";
+import type { Range } from "../ground/range.ts";
+import type { Taken } from "../loop/checkBelongs.ts";
+import { inputsOf } from "../loop/inputs.ts";
+import type { Loop } from "../loop/types.ts";
+import { enclosureKernel } from "../reading/enclosureKernel.ts";
+import { valueKernel } from "../reading/valueKernel.ts";
+import { rangesOf } from "../states/enclosedBalance.ts";
+import type { Bounds } from "./bounds.ts";
+
+/** A number with its proved bounds. */
+export interface Bounded {
+  readonly value: number;
+  readonly bounds: Bounds;
+}
+
+/** ∂ to / ∂ from. 0 is temperature, 1 to k are the chosen couplings in the order of the graph, k + 1 is the net flux. */
+export interface Influence extends Bounded {
+  readonly from: number;
+  readonly to: number;
+}
+
+/** All slopes at a state. */
+export interface Influences {
+  /** The direct ∂N/∂T and every other influence that is there at all. */
+  readonly edges: readonly Influence[];
+  /** λ, taken along all ways at once. */
+  readonly total: Bounded;
+  readonly heatCapacity: number;
+  /** ∂N/∂p of every given, W m⁻² per unit. */
+  readonly givens: readonly number[];
+}
+
+/**
+ * Prepares the reading of all influences of a loop through `chosen` (nodes by rising id). Each chosen coupling is cut: it
+ * counts as an input, and its own definition as a target. One sweep backwards from each target gives all its slopes.
+ */
+export function influencesOf(loop: Loop, chosen: readonly number[]): (at: Taken) => Influences {
+  const { graph, net, heatCapacity } = loop;
+  const inputs = inputsOf(loop);
+  const temperature = inputs[0] as number;
+  const sources = [temperature, ...chosen];
+  const edges: { from: number; to: number; node: number }[] = [];
+  const targets = [...chosen.map((c) => (graph.args[c] as readonly number[])[0] as number), net];
+  targets.forEach((target, i) => {
+    adjoint(graph, target, sources).forEach((node, from) => {
+      const absent = graph.ops[node] === "const" && graph.values[node] === 0;
+      if (!absent) edges.push({ from, to: i + 1, node });
+    });
+  });
+  const total = derivative(graph, net, temperature, inputs);
+  const givens = adjoint(graph, net, inputs).slice(loop.variables.length);
+  const bounded = [total, ...edges.map((e) => e.node)];
+  const outputs = [...bounded, heatCapacity, ...givens];
+  const kernel = valueKernel(graph, { inputs, outputs });
+  const boundsAt = loop.sampled ? undefined : boundsReader(loop, inputs, bounded);
+  const out = new Float64Array(outputs.length);
+  return (at) => {
+    kernel(at.values, out);
+    const bounds = boundsAt?.(at) ?? [];
+    const read = (i: number): Bounded => ({ value: out[i] as number, bounds: bounds[i] ?? null });
+    return {
+      edges: edges.map(({ from, to }, i) => ({ from, to, ...read(1 + i) })),
+      total: read(0),
+      heatCapacity: out[bounded.length] as number,
+      givens: [...out.subarray(bounded.length + 1)],
+    };
+  };
+}
+
+function boundsReader(loop: Loop, inputs: readonly number[], outputs: readonly number[]) {
+  const wide = new Set(loop.variables.map((v) => v.node));
+  const kernel = enclosureKernel(loop.graph, { inputs, outputs, wide, ranges: rangesOf(loop) });
+  const out = new Float64Array(3 * outputs.length);
+  return ({ low, high }: Taken): Bounds[] => {
+    kernel(low, high, out);
+    return outputs.map((_, i) => {
+      const [lo, hi, err] = out.subarray(3 * i) as unknown as [number, number, number];
+      const bounds: Range = [lo - err, hi + err];
+      return bounds.every(Number.isFinite) ? bounds : null;
+    });
+  };
+}

@@ -204,6 +204,7 @@ test("internal heat flows from the interior, and adds to what is absorbed", () =
   expect(state?.ledger.flows).toContainEqual(
     expect.objectContaining({ name: "internalHeat", from: "interior", to: "surface", value: 10 }),
   );
+  expect(state?.notes).toEqual([]);
   const heating = (0.25 * 1361 * 0.7 + 10) / (0.6 * 5.670374419e-8);
   expect(close((state?.temperature as number) ** 4, heating)).toBeLessThan(1e-13);
 });

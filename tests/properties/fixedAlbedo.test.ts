@@ -1,4 +1,4 @@
-// What holds for a planet of fixed albedo, through stars, orbits and loops; and for mixtures of surfaces.
+// What holds for a planet of fixed albedo, through stars, orbits and loops.
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import {
@@ -7,11 +7,8 @@ import {
   equilibriumTemperature,
   findStates,
   greyEmission,
-  mixAlbedo,
-  orbitMeanFlux,
   stellarFlux,
   stellarLuminosity,
-  temperatureMeanFlux,
 } from "../../src/index.ts";
 import { settings } from "./settings.ts";
 
@@ -116,91 +113,6 @@ describe("equilibrium temperature", () => {
         ratio(states[0]?.temperature as number, temperatureOf({ ...planet, redistribution: 0.25 }), 1);
       }),
       settings(100),
-    );
-  });
-});
-
-describe("means over an orbit", () => {
-  test("the mean flux rises with eccentricity, the flux of the mean temperature falls; they bracket the circular one", () => {
-    fc.assert(
-      fc.property(between(1, 1e5), between(0, 0.99), between(0, 0.0099), (fluxAtSemiMajorAxis, e, more) => {
-        const mean = (eccentricity: number) => orbitMeanFlux({ fluxAtSemiMajorAxis, eccentricity });
-        const cool = (eccentricity: number) => temperatureMeanFlux({ fluxAtSemiMajorAxis, eccentricity });
-        const rounding = fluxAtSemiMajorAxis * 64 * 2 ** -53;
-        expect(mean(e + more)).toBeGreaterThanOrEqual(mean(e) - rounding);
-        expect(cool(e + more)).toBeLessThanOrEqual(cool(e) + rounding);
-        expect(mean(e)).toBeGreaterThanOrEqual(fluxAtSemiMajorAxis);
-        expect(cool(e)).toBeLessThanOrEqual(fluxAtSemiMajorAxis + rounding);
-      }),
-      settings(300),
-    );
-  });
-});
-
-describe("a mixture of surfaces", () => {
-  const cover = fc.record({ fraction: between(0, 1), albedo: between(0, 1) });
-  const covers = fc.array(cover, { minLength: 1, maxLength: 8 }).map((list) => {
-    const total = list.reduce((sum, c) => sum + c.fraction, 0);
-    return list.map((c) => ({ ...c, fraction: total > 1 ? c.fraction / total : c.fraction }));
-  });
-  /** The sum of eight products. */
-  const ROUNDING = 16 * 2 ** -53;
-
-  test("lies between its parts", () => {
-    fc.assert(
-      fc.property(covers, between(0, 1), (list, bare) => {
-        const mixed = mixAlbedo({ covers: list, bare });
-        const parts = [bare, ...list.map((c) => c.albedo)];
-        expect(mixed).toBeGreaterThanOrEqual(Math.min(...parts) - ROUNDING);
-        expect(mixed).toBeLessThanOrEqual(Math.max(...parts) + ROUNDING);
-      }),
-      settings(300),
-    );
-  });
-
-  test("of shares in whole percents is an albedo, however bright its parts", () => {
-    const percents = fc
-      .array(fc.integer({ min: 0, max: 100 }), { minLength: 1, maxLength: 6 })
-      .map((cuts) => [0, ...cuts.sort((a, b) => a - b), 100])
-      .map((cuts) => cuts.slice(1).map((cut, i) => (cut - (cuts[i] as number)) / 100));
-    fc.assert(
-      fc.property(percents, (fractions) => {
-        const bright = mixAlbedo({ covers: fractions.map((fraction) => ({ fraction, albedo: 1 })) });
-        expect(bright).toBeLessThanOrEqual(1);
-        expect(absorbedFlux({ flux: 1361, albedo: bright })).toBeLessThanOrEqual(1361 * ROUNDING);
-      }),
-      settings(300),
-    );
-  });
-
-  test("does not depend on the order of its parts", () => {
-    fc.assert(
-      fc.property(
-        covers.chain((list) =>
-          fc.tuple(fc.constant(list), fc.shuffledSubarray(list, { minLength: list.length })),
-        ),
-        between(0, 1),
-        ([list, other], bare) => {
-          const difference = mixAlbedo({ covers: list, bare }) - mixAlbedo({ covers: other, bare });
-          expect(Math.abs(difference)).toBeLessThanOrEqual(ROUNDING);
-        },
-      ),
-      settings(300),
-    );
-  });
-
-  test("is the same with its last part as the rest of the surface", () => {
-    const complete = fc.array(cover, { minLength: 2, maxLength: 8 }).map((list) => {
-      const total = list.reduce((sum, c) => sum + c.fraction + 0.01, 0);
-      return list.map((c) => ({ ...c, fraction: (c.fraction + 0.01) / total }));
-    });
-    fc.assert(
-      fc.property(complete, (list) => {
-        const rest = list.at(-1)?.albedo as number;
-        const difference = mixAlbedo({ covers: list }) - mixAlbedo({ covers: list.slice(0, -1), bare: rest });
-        expect(Math.abs(difference)).toBeLessThanOrEqual(ROUNDING);
-      }),
-      settings(300),
     );
   });
 });

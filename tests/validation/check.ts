@@ -20,6 +20,9 @@ export interface Check {
 
 /** What rounding to a printed digit can hide. */
 export const halfUnit = (lastDigit: number): number => lastDigit / 2;
+/** Astropy's σ has more digits than CODATA prints: 3.3·10⁻¹¹ of the flux. */
+export const SIGMA_DIGITS = 4e-11;
+
 /** A computed reference: a dozen roundings of a double on either side. */
 export const ROUNDING = 24 * 2 ** -53;
 export const ROUNDED = "a dozen roundings on either side";

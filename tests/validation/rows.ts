@@ -3,7 +3,9 @@ import { albedoRows } from "./albedo.rows.ts";
 import { budgetRows } from "./budgets.rows.ts";
 import type { Check } from "./check.ts";
 import { constantRows } from "./constants.rows.ts";
+import { exoplanetRows } from "./exoplanets.rows.ts";
 import { heatRows } from "./heat.rows.ts";
+import { heatBalanceRows } from "./heatBalance.rows.ts";
 import { longwaveRows } from "./longwave.rows.ts";
 import { orbitRows } from "./orbits.rows.ts";
 import { planetRows } from "./planets.rows.ts";
@@ -13,7 +15,9 @@ import { starRows } from "./stars.rows.ts";
 export const subjects: Readonly<Record<string, readonly Check[]>> = {
   Constants: constantRows,
   "Planets of the solar system": planetRows,
-  "Stars, flux, other planets": starRows,
+  "Heat balance of planets": heatBalanceRows,
+  "Stars and their light": starRows,
+  "Planets of other stars": exoplanetRows,
   Orbits: orbitRows,
   Albedo: albedoRows,
   Longwave: longwaveRows,

@@ -2,5 +2,7 @@
 export * from "../src/index.ts";
 export { inputsOf } from "../src/loop/inputs.ts";
 export { generateValue } from "../src/reading/generateValue.ts";
+export { allowGeneration } from "../src/reading/generation.ts";
 export { interpretValue } from "../src/reading/interpretValue.ts";
 export { slopeNodes } from "../src/reading/slopeKernel.ts";
+export { enclosedBalance } from "../src/states/enclosedBalance.ts";

@@ -51,6 +51,6 @@ ${remarks}
 
 ## All tables
 
-${questions.map((question) => markdown(tableOf(question))).join("\n\n")}
+${questions.map((question) => [markdown(tableOf(question)), question.note].filter(Boolean).join("\n\n")).join("\n\n")}
 `;
 }

@@ -47,5 +47,5 @@ export function printQuestion(question) {
   const table = tableOf(question);
   const wide = table[0].map((_, i) => Math.max(...table.map((row) => row[i].length)));
   const line = (row) => row.map((text, i) => (i ? text.padStart(wide[i]) : text.padEnd(wide[i]))).join("  ");
-  return `\n${table.map(line).join("\n")}`;
+  return ["", ...table.map(line), question.note].join("\n");
 }

@@ -7,13 +7,14 @@ import os from "node:os";
 import path from "node:path";
 import { load } from "../.config/load.mjs";
 import * as core from "../dist/index.js";
+import { enclosures } from "./enclosures.mjs";
 import { evaluations } from "./evaluations.mjs";
 import { performancePage } from "./page.mjs";
 import { buildC, startPython, writeRows } from "./peer.mjs";
 import { columnsOf } from "./populations.mjs";
 import { describeMachine, printQuestion } from "./report.mjs";
 import { consumed, interleave } from "./rounds.mjs";
-import { compareStates, searches } from "./searches.mjs";
+import { compareStates, searches, workOf } from "./searches.mjs";
 import { starts } from "./starts.mjs";
 import { threeStates } from "./threeStates.mjs";
 
@@ -44,18 +45,22 @@ async function agree(question, contestants, tolerance) {
 }
 
 /** `compared`: the first contestant is the measure of the others. */
-async function ask(title, unit, contestants, compared) {
-  const question = { title, unit, compared, contestants: await interleave(contestants, ROUNDS) };
+async function ask(title, unit, contestants, compared, note = "") {
+  const question = { title, unit, compared, note, contestants: await interleave(contestants, ROUNDS) };
   questions.push(question);
   console.log(printQuestion(question));
 }
 
 try {
   const internals = await load("bench/internals.ts");
-  const sums = evaluations({ ...internals }, columns.ice, c, EVALUATIONS);
+  const sums = evaluations(internals, columns.ice, c, EVALUATIONS);
   for (const [title, contestants] of Object.entries(sums)) {
     await agree(title, contestants, 1e-10);
     await ask(title, "ns", contestants, c !== null);
+  }
+  for (const name of names) {
+    const title = `enclosures of N, ${name}`;
+    await ask(title, "ns", enclosures(internals, name, columns[name], EVALUATIONS / 10), false);
   }
   for (const name of names) {
     const contestants = searches(core, name, columns[name], { c, python, folder });
@@ -65,7 +70,7 @@ try {
       if (contestant.checked?.farthest > 1e-6)
         throw new Error(`${contestant.name}: states ${contestant.checked.farthest} K off`);
     }
-    await ask(`all states of a planet, ${name}`, "ns", contestants, true);
+    await ask(`all states of a planet, ${name}`, "ns", contestants, true, workOf(core, name, columns[name]));
   }
   await ask("one planet with three states, whole result", "ns", threeStates(core), false);
   for (const name of names)

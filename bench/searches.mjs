@@ -6,7 +6,7 @@ import { rowOf, WITHIN } from "./populations.mjs";
 import { timed } from "./rounds.mjs";
 
 /** Planets a round: enough for a few hundredths of a second each. */
-const PLANETS = { columns: 4000, single: 500, numpy: 4000, scipy: 1000 };
+const PLANETS = { columns: 4000, sampled: 300, single: 500, numpy: 4000, scipy: 1000 };
 
 const part = (columns, size) =>
   Object.fromEntries(Object.entries(columns).map(([given, column]) => [given, column.subarray(0, size)]));
@@ -16,7 +16,6 @@ export function searches(core, name, columns, { c, python, folder }) {
   const loop = core.closeLoop(budgetsOf(core)[name]);
   const rows = Object.values(columns)[0].length;
   const options = { within: WITHIN };
-  const few = part(columns, PLANETS.columns);
   const singles = Array.from({ length: PLANETS.single }, (_, row) => rowOf(columns, row));
 
   const fromPeer = async (peer, request) => {
@@ -34,13 +33,15 @@ export function searches(core, name, columns, { c, python, folder }) {
     );
     return list;
   };
-  const columnSearch = (title, proof) => ({
-    name: title,
-    ours: proof,
-    states: () => fromColumns(proof),
-    time: () =>
-      timed(PLANETS.columns, () => core.findStatesFor(loop, few, { ...options, proof }).temperatures.length),
-  });
+  const columnSearch = (title, proof, size) => {
+    const few = part(columns, size);
+    return {
+      name: title,
+      ours: proof,
+      states: () => fromColumns(proof),
+      time: () => timed(size, () => core.findStatesFor(loop, few, { ...options, proof }).temperatures.length),
+    };
+  };
   const peerSearch = (peer, title, method, size) => ({
     name: title,
     states: () => fromPeer(peer, `${method} ${name} ${rows}`),
@@ -53,8 +54,8 @@ export function searches(core, name, columns, { c, python, folder }) {
       states: () => fromPeer(c, name),
       time: async () => (await c.time(name)).each,
     },
-    columnSearch("findStatesFor, proved", true),
-    columnSearch("findStatesFor, sampled", false),
+    columnSearch("findStatesFor, proved", true, PLANETS.columns),
+    columnSearch("findStatesFor, sampled", false, PLANETS.sampled),
     {
       name: "findStates, proved, whole results",
       time: () =>
@@ -67,6 +68,20 @@ export function searches(core, name, columns, { c, python, folder }) {
     python && peerSearch(python, "NumPy, grid and Newton", "numpy", PLANETS.numpy),
     python?.scipy && peerSearch(python, "SciPy, grid and brentq", "scipy", PLANETS.scipy),
   ].filter(Boolean);
+}
+
+/** What the proved search reads on average: boxes and points a planet. */
+export function workOf(core, name, columns) {
+  const loop = core.closeLoop(budgetsOf(core)[name]);
+  const size = 1000;
+  const total = { boxes: 0, points: 0 };
+  for (let row = 0; row < size; row++) {
+    const { cost } = core.findStates(loop, { within: WITHIN, at: rowOf(columns, row) });
+    total.boxes += cost.boxes;
+    total.points += cost.points;
+  }
+  const each = (count) => (count / size).toFixed(1);
+  return `The proved search reads ${each(total.boxes)} boxes and ${each(total.points)} points a planet.`;
 }
 
 /** How a contestant's states compare with ours where ours are proved. */

@@ -57,7 +57,8 @@ describe("refused", () => {
   ])("%s", (_, value, code) => {
     const start = performance.now();
     expect(refusal(() => readPlanet(value)).code).toBe(code);
-    expect(performance.now() - start).toBeLessThan(1000);
+    // a tenth of a second or less on an idle machine; the bound leaves room for one with twenty other jobs
+    expect(performance.now() - start).toBeLessThan(5000);
   });
 
   test("an accessor, without calling it", () => {

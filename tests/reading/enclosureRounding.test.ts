@@ -1,6 +1,6 @@
 // Every rounding is taken outwards: compared with exact whole-number arithmetic, because doubles cannot show it.
 import { describe, expect, test } from "vitest";
-import { add, div, max, min, mul, neg, sqrt, square, sub } from "../../src/graph/operations.ts";
+import { add, div, log, max, min, mul, neg, sqrt, square, sub } from "../../src/graph/operations.ts";
 import type { Quantity, Value } from "../../src/graph/quantity.ts";
 import { enclosureKernel } from "../../src/reading/enclosureKernel.ts";
 import { randomNumbers } from "../graph/randomGraph.ts";
@@ -127,9 +127,58 @@ test.each(Object.keys(EXACT))("%s does not round and has no error", (name) => {
   }
 });
 
+describe("an argument that is known only vaguely", () => {
+  // (z + y) − y with y = 1 rounds to 0 or to 2^-52, where it is 1e-17 or 1.2e-16, and says so
+  const vague = (y: Value, z: Value) => sub(add(z, y), y);
+  const exact = big.fromDouble;
+  test.each<[string, Write, number, big.Big]>([
+    ["a product", (x, y, z) => mul(vague(y, z), vague(y, x)), 1e-17, big.mul(exact(1e-17), exact(1e-17))],
+    ["a square", (_, y, z) => square(vague(y, z)), 1e-17, big.mul(exact(1e-17), exact(1e-17))],
+    ["a quotient", (_, y, z) => div(y, vague(y, z)), 1.2e-16, big.div(exact(1), exact(1.2e-16))],
+    [
+      "a negative quotient",
+      (_, y, z) => div(y, neg(vague(y, z))),
+      1.2e-16,
+      big.div(exact(-1), exact(1.2e-16)),
+    ],
+    ["a root", (_, y, z) => sqrt(vague(y, z)), 1.2e-16, big.sqrt(exact(1.2e-16))],
+    ["a logarithm", (_, y, z) => log(vague(y, z)), 1.2e-16, big.log(exact(1.2e-16))],
+  ])("%s", (_name, write, z, truth) => {
+    for (const ranges of [{}, { x: [0, 1], y: [0, 1], z: [0, 1] }] as const) {
+      const [bounds] = enclosed(write, ranges)({ x: z, y: 1, z });
+      expect(isKnown(bounds)).toBe(true);
+      expect(holds(bounds, truth as big.Real)).toBe(true);
+      expect(holds(bounds, truth as big.Real, 0)).toBe(false);
+    }
+  });
+});
+
 test("a part of the error that would underflow is not lost when the divisor is tiny too", () => {
   const [x, y, z] = [-1.0633e-319, -1.1927877225728404e-301, -1.118081822086758e-301] as const;
   const [bounds] = enclosed((a, b, c) => div(a, add(b, c)))({ x, y, z });
   const divisor = big.add(big.fromDouble(y), big.fromDouble(z));
   expect(holds(bounds, big.div(big.fromDouble(x), divisor) as big.Real)).toBe(true);
+});
+
+test("an error is no smaller than the errors it sums, although it is itself rounded", () => {
+  const { graph, inputs } = recorded((x) => x);
+  const [x, y, z] = inputs as [number, number, number];
+  const left = graph.node("add", [graph.node("add", [x, y]), y]);
+  const right = graph.node("mul", [z, graph.constant(1)]);
+  const outputs = [left, right, graph.node("sub", [left, right])];
+  const kernel = enclosureKernel(graph, { inputs, outputs, wide: new Set() });
+  const out = new Float64Array(9);
+  const random = randomNumbers(3);
+  for (let k = 0; k < 200; k++) {
+    const [a, b] = [random(), random()];
+    kernel(Float64Array.of(a, b, a + b + b), Float64Array.of(a, b, a + b + b), out);
+    const [first, second, all] = [2, 5, 8].map((i) => big.fromDouble(out[i] as number)) as [
+      big.Real,
+      big.Real,
+      big.Real,
+    ];
+    // the difference is exactly zero, so that it adds no rounding of its own behind which the sum could hide
+    expect(out[6]).toBe(0);
+    expect(big.less(all, big.add(first, second))).toBe(false);
+  }
 });

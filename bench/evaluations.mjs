@@ -40,8 +40,10 @@ export function evaluations(core, columns, c, count) {
   const points = Array.from({ length: ROWS }, (_, row) =>
     Float64Array.of(0, ...loop.givens.map((given) => columns[given.name][row])),
   );
-  const reading = (make, nodes) => {
-    const kernel = make(loop.graph, { inputs, outputs: [loop.net, ...nodes] });
+  const reading = (generating, nodes) => {
+    core.allowGeneration(generating);
+    const kernel = core.valueKernel(loop.graph, { inputs, outputs: [loop.net, ...nodes] });
+    core.allowGeneration(true);
     const out = new Float64Array(2);
     return loopOver(kernel, points, out);
   };
@@ -77,8 +79,8 @@ export function evaluations(core, columns, c, count) {
 
     "N(T) of an icy planet": [
       inC("residual"),
-      contestant("our generated code", reading(core.generateValue, [])),
-      contestant("our interpreter", reading(core.interpretValue, [])),
+      contestant("our generated code", reading(true, [])),
+      contestant("our interpreter", reading(false, [])),
       contestant("JavaScript by hand, Math.tanh", (n) => {
         let total = 0;
         for (let i = 0; i < n; i++) {
@@ -95,8 +97,8 @@ export function evaluations(core, columns, c, count) {
 
     "N(T) and ∂N/∂T of an icy planet": [
       inC("slope"),
-      contestant("our generated code", reading(core.generateValue, slopes)),
-      contestant("our interpreter", reading(core.interpretValue, slopes)),
+      contestant("our generated code", reading(true, slopes)),
+      contestant("our interpreter", reading(false, slopes)),
     ].filter(Boolean),
   };
 }

@@ -5,7 +5,7 @@ import { powerOfTwo } from "./powersOfTwo.ts";
 
 const LEAST_NORMAL = 2.2250738585072014e-308;
 const TWO_TO_54 = 18014398509481984;
-/** Added and subtracted, it keeps the bits of a number in [1, 2) down to 2^-26, so that products with c are exact. */
+/** Added and taken away again, it keeps the bits of a number in [1, 2) down to 2^-26. */
 const SPLITTER = 67108864;
 
 const bits = /* @__PURE__ */ new DataView(/* @__PURE__ */ new ArrayBuffer(8));
@@ -14,8 +14,8 @@ const bits = /* @__PURE__ */ new DataView(/* @__PURE__ */ new ArrayBuffer(8));
 export const logParts = /* @__PURE__ */ new Float64Array(2);
 
 /**
- * x + tail = 2^e·(1 + logParts[0] + logParts[1])/c, where c is 2·reciprocal[j] from cell HALVED on; returns 128e + j.
- * For x > 0 and |tail| up to half an ulp of x; exact when the tail is 0.
+ * x + tail = 2^e·(1 + logParts[0] + logParts[1])/c, where c is 2·reciprocal[j] from cell HALVED on; returns
+ * 128e + j. For x > 0 and |tail| up to half an ulp of x; exact when the tail is 0.
  */
 export function reduceLog(x: number, tail: number): number {
   if (reciprocal[0] === 0) fillLogTable();

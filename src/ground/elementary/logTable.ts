@@ -1,4 +1,4 @@
-// The 128 cells of the argument of log, each with a short reciprocal and its logarithm, computed on first use.
+// The 128 cells of log's argument, each with a short reciprocal and its logarithm, computed on first use.
 import { fillPowersOfTwo } from "./powersOfTwo.ts";
 
 /** ln 2 to a multiple of 2^-42, so that its products with exponents are exact. */
@@ -10,7 +10,7 @@ export const HALVED = 53;
 /** Added and taken away again, it rounds a number of size below 512 to a multiple of 2^-42. */
 const ROUNDER_42 = 1536;
 
-/** c: about the reciprocal of the middle of cell j, which is [1 + j/128, 1 + (j + 1)/128); a multiple of 1/512. */
+/** c: a multiple of 1/512, near the reciprocal of the middle of cell j, from 1 + j/128 to 1 + (j + 1)/128. */
 export const reciprocal = /* @__PURE__ */ new Float64Array(128);
 /** −ln c, or −ln 2c from cell HALVED on, to a multiple of 2^-42. */
 export const logHigh = /* @__PURE__ */ new Float64Array(128);
@@ -18,9 +18,9 @@ export const logHigh = /* @__PURE__ */ new Float64Array(128);
 export const logLow = /* @__PURE__ */ new Float64Array(128);
 
 /**
- * Fills the cells from first towards end, away from the one whose c (or 2c) is 1: last is 512·c there.
- * From one cell to the next the logarithm grows by ln(a/b) = q + q³/12 + q⁵/80 + …, q = 2(a − b)/(a + b), for the
- * integers a and b that are 512·c of the two. The sum of the leading terms is kept exact.
+ * Fills the cells from first towards end, away from the one whose c (or 2c) is 1: last is 512·c there. From
+ * one cell to the next the logarithm grows by ln(a/b) = q + q³/12 + q⁵/80 + …, q = 2(a − b)/(a + b), for
+ * the integers a and b that are 512·c of the two. The sum of the leading terms is kept exact.
  */
 function walk(first: number, end: number, step: number, last: number): void {
   let high = 0;

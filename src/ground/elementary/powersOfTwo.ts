@@ -19,7 +19,7 @@ export function fillPowersOfTwo(): void {
   }
 }
 
-/** x·2^n, rounded once, for an integer n in [−1075, 1024] and |x| in [1/2, 4), or any smaller if n is above −1022. */
+/** x·2^n, rounded once: n an integer in [−1075, 1024], |x| in [1/2, 4), or smaller if n is above −1022. */
 export function scale(x: number, n: number): number {
   const i = n + 1075;
   return x * (fine[i & 31] as number) * (coarse[i >> 5] as number);

@@ -10,8 +10,8 @@ const TINY = 7.450580596923828e-9;
 /**
  * The hyperbolic tangent, the same bits on every engine, exactly odd.
  *
- * Below 1/16 Taylor's series, above it (E − 1)/(E + 1) with E = e^(2|x|) in two doubles and a corrected quotient.
- * Error below 0.505 ulp (bounded by proof). tanh(±0) = ±0, tanh(±∞) = ±1, tanh(NaN) = NaN.
+ * Below 1/16 Taylor's series, above it (E − 1)/(E + 1) with E = e^(2|x|) in two doubles and a corrected
+ * quotient. Error below 0.505 ulp (bounded by proof). tanh(±0) = ±0, tanh(±∞) = ±1, tanh(NaN) = NaN.
  */
 export function tanh(x: number): number {
   const a = Math.abs(x);

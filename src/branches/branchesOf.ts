@@ -1,0 +1,91 @@
+// Makes the branches of a run: the pieces of a curve between its critical places.
+import type { Range } from "../ground/range.ts";
+import { signOf } from "../search/enclosed.ts";
+import type { Critical } from "./criticals.ts";
+import type { Curve } from "./curve.ts";
+import type { Branch, BranchEnd } from "./diagram.ts";
+import { pointsOf } from "./pointsOf.ts";
+import type { Run, RunEnd } from "./runs.ts";
+
+/** What is needed besides the run. */
+export interface Drawing {
+  readonly between: Range;
+  /** Share of both ranges by which straight lines between points may miss the curve. */
+  readonly tolerance: number;
+  readonly within: Range;
+}
+
+/** The branches of a run by rising temperature, one more than it has critical places. */
+export function branchesOf(
+  curve: Curve,
+  { from, to }: Run,
+  criticals: readonly Critical[],
+  drawing: Drawing,
+): Branch[] {
+  const ends = [
+    runEnd(curve, from, drawing),
+    ...criticals.map((c) => criticalEnd(curve, c, drawing)),
+    runEnd(curve, to, drawing),
+  ];
+  return ends.slice(1).map((warm, i) => {
+    const cool = ends[i] as BranchEnd;
+    const [low, high] = cool.at <= warm.at ? [cool, warm] : [warm, cool];
+    const points = pointsOf(curve, cool, warm, drawing);
+    if (low === warm) points.reverse();
+    return Object.freeze({
+      stability: stabilityOf(curve, cool, warm),
+      parameters: frozen([low.at, high.at]),
+      temperatures: frozen([cool.temperature, warm.temperature]),
+      low,
+      high,
+      points: Object.freeze(points),
+    });
+  });
+}
+
+const frozen = (range: Range): Range => Object.freeze(range);
+
+function runEnd(curve: Curve, { kind, end, at, bracket }: RunEnd, { between }: Drawing): BranchEnd {
+  const exact = kind === "between" ? between[end] : undefined;
+  return Object.freeze({
+    kind,
+    at: exact ?? clamped(curve.at(at), between),
+    atBracket: exact === undefined ? boundsOf(curve, bracket, between) : frozen([exact, exact]),
+    temperature: at,
+    temperatureBracket: frozen(bracket),
+  });
+}
+
+function criticalEnd(curve: Curve, critical: Critical, { between }: Drawing): BranchEnd {
+  const { kind, decided, temperature, bracket } = critical;
+  return Object.freeze({
+    kind: decided ? (kind as "fold" | "corner") : "undecided",
+    at: clamped(curve.at(temperature), between),
+    atBracket: boundsOf(curve, bracket, between),
+    temperature,
+    temperatureBracket: frozen(bracket),
+  });
+}
+
+/** Proved bounds of the parameter over a bracket: at least, the range that was asked for. */
+export function boundsOf(curve: Curve, [low, high]: Range, between: Range): Range {
+  const [least, greatest] = curve.over(low, high);
+  return frozen([clamped(least, between, between[0]), clamped(greatest, between, between[1])]);
+}
+
+function clamped(p: number, [low, high]: Range, otherwise = (low + high) / 2): number {
+  return p < low ? low : p > high ? high : Number.isFinite(p) ? p : otherwise;
+}
+
+const values = new Float64Array(6);
+
+/** The sign of λ anywhere on the branch: it has no zero there. */
+function stabilityOf({ feedback }: Curve, cool: BranchEnd, warm: BranchEnd): Branch["stability"] {
+  const [low, high] = [cool.temperatureBracket[1], warm.temperatureBracket[0]];
+  for (const share of [0.5, 0.371, 0.629, 0, 1]) {
+    feedback.point(low + (high - low) * share, values);
+    const sign = signOf(values[0] as number, values[1] as number, values[2] as number);
+    if (sign !== 0) return sign < 0 ? "stable" : "unstable";
+  }
+  return "undecided";
+}

@@ -1,0 +1,76 @@
+// Where λ passes zero along a curve: folds, corner folds, and what cannot be decided.
+import type { Range } from "../ground/range.ts";
+import { signOf } from "../search/enclosed.ts";
+import { enumerateZeros } from "../search/enumerateZeros.ts";
+import type { DoubtKind } from "../search/enumeration.ts";
+import type { Curve } from "./curve.ts";
+
+/** A place on a curve between two branches. */
+export interface Critical {
+  readonly kind: "fold" | "corner" | DoubtKind;
+  readonly decided: boolean;
+  readonly temperature: number;
+  readonly bracket: Range;
+}
+
+/** What was found and what it cost. */
+export interface Criticals {
+  readonly list: readonly Critical[];
+  readonly boxes: number;
+  readonly points: number;
+}
+
+/** A sign change in a wider stretch, K, may be more than one corner. */
+const CORNER_WIDTH = 1e-6;
+/** Boxes that finding the place of one kink may cost. */
+const KINK_EFFORT = 60;
+
+/** The critical places of a curve in a range of temperature, by rising temperature. */
+export function criticalsOf(curve: Curve, range: Range, effort: number): Criticals {
+  const cuts: number[] = [];
+  for (const kink of curve.kinks) {
+    for (const { bracket } of enumerateZeros(kink, range, { effort: KINK_EFFORT }).zeros)
+      cuts.push(...bracket);
+  }
+  const found = enumerateZeros(curve.feedback, range, { effort, cuts });
+  const list = [
+    ...found.zeros.map(
+      (z): Critical => ({ kind: "fold", decided: true, temperature: z.at, bracket: z.bracket }),
+    ),
+    ...found.undecided.map(({ kind, interval }): Critical => {
+      const corner = kind === "jump" && changesSign(curve, interval);
+      const temperature = interval[0] + (interval[1] - interval[0]) / 2;
+      return { kind: corner ? "corner" : kind, decided: corner, temperature, bracket: interval };
+    }),
+  ];
+  list.sort((a, b) => a.temperature - b.temperature);
+  return { list: joined(list), boxes: found.boxes, points: found.points };
+}
+
+/** Neighbours that touch are one; one of them that is flat makes it a continuum. */
+function joined(list: readonly Critical[]): Critical[] {
+  const apart: Critical[] = [];
+  for (const next of list) {
+    const last = apart.at(-1);
+    if (!last || next.bracket[0] > last.bracket[1]) {
+      apart.push(next);
+      continue;
+    }
+    const bracket: Range = [last.bracket[0], Math.max(last.bracket[1], next.bracket[1])];
+    const kind = [last, next].find((c) => c.kind === "flat")?.kind ?? last.kind;
+    const temperature = bracket[0] + (bracket[1] - bracket[0]) / 2;
+    apart[apart.length - 1] = { kind, decided: false, temperature, bracket };
+  }
+  return apart;
+}
+
+const ends = new Float64Array(12);
+
+/** Whether λ is proved to have opposite signs at both ends: then the curve turns in between. */
+function changesSign({ feedback }: Curve, [low, high]: Range): boolean {
+  if (high - low > CORNER_WIDTH) return false;
+  feedback.point(low, ends);
+  const before = signOf(ends[0] as number, ends[1] as number, ends[2] as number);
+  feedback.point(high, ends);
+  return before !== 0 && before === -signOf(ends[0] as number, ends[1] as number, ends[2] as number);
+}

@@ -1,0 +1,47 @@
+// Says what is not decided in a diagram.
+import type { Range } from "../ground/range.ts";
+import type { DoubtKind } from "../search/enumeration.ts";
+import type { Note } from "../states/note.ts";
+import type { Critical } from "./criticals.ts";
+import type { UndecidedStretch } from "./diagram.ts";
+import type { Crossing } from "./runs.ts";
+
+/** What a doubt about N at an end of the parameter's range is in the diagram. */
+const AT_AN_END: Readonly<Record<DoubtKind | "level", UndecidedStretch["kind"]>> = {
+  fold: "edge",
+  corner: "edge",
+  edge: "edge",
+  flat: "continuum",
+  jump: "other",
+  undefined: "undefined",
+  effort: "effort",
+  level: "level",
+};
+
+/** What a doubt about λ on the curve is in the diagram. */
+const ON_THE_CURVE: Readonly<Record<DoubtKind, UndecidedStretch["kind"]>> = {
+  ...AT_AN_END,
+  fold: "cusp",
+  corner: "cusp",
+};
+
+/** The undecided stretch of a crossing, if it is in doubt. */
+export function crossingDoubt({ doubt, bracket, end }: Crossing, between: Range): UndecidedStretch[] {
+  if (doubt === null) return [];
+  const kind = AT_AN_END[doubt];
+  const parameters: Range = kind === "edge" || kind === "continuum" ? [between[end], between[end]] : between;
+  return [{ temperatures: bracket, parameters, kind }];
+}
+
+/** The undecided stretch of a critical place. */
+export function criticalDoubt({ kind, bracket }: Critical, parameters: Range): UndecidedStretch {
+  return { temperatures: bracket, parameters, kind: ON_THE_CURVE[kind] };
+}
+
+/** The note of a search that stopped before its end. */
+export function stoppedNote(undecided: readonly UndecidedStretch[]): Note[] {
+  if (!undecided.some((u) => u.kind === "effort")) return [];
+  const text = "the effort was spent before the ranges were searched";
+  const rest = { about: "traceBranches", value: null, range: null, unit: "1", text, source: null };
+  return [Object.freeze({ code: "search-stopped", severity: "caution", ...rest } as const)];
+}

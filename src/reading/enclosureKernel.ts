@@ -6,10 +6,8 @@ import type { Range } from "../ground/range.ts";
 import type { Enclosure } from "./enclosure.ts";
 import { ENCLOSE } from "./enclosureRules.ts";
 import { EnclosureWriter } from "./enclosureWriter.ts";
-import { generateScalar } from "./generateScalar.ts";
-import { mayGenerate } from "./generation.ts";
-import { interpretScalar } from "./interpretScalar.ts";
 import { missingInput, type ReadingOf } from "./readingOf.ts";
+import { runScalar } from "./runScalar.ts";
 import type { ScalarKernel } from "./scalarProgram.ts";
 
 /**
@@ -53,7 +51,7 @@ export function enclosureKernel(
     const { lo, hi, err = w.literal(0) } = known.get(id) as Enclosure;
     return [lo, hi, err];
   });
-  const run = mayGenerate() ? generateScalar(w, results) : interpretScalar(w, results);
+  const run = runScalar(w, results);
   return (low, high, out) => {
     for (let i = 0; i < isWide.length; i++) {
       const x = low[i] as number;

@@ -1,8 +1,11 @@
 // Prints a program of scalar steps as straight-line code.
-import { compiled } from "./generation.ts";
-import type { ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
 
-type Raw = (x: Float64Array, y: Float64Array, k: Float64Array, o: Float64Array) => void;
+import type { Compute } from "../graph/op.ts";
+import { compiled } from "./generation.ts";
+import type { Operation, ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
+
+type Functions = readonly Compute["value"][];
+type Raw = (x: Float64Array, y: Float64Array, k: Float64Array, f: Functions, o: Float64Array) => void;
 type Emit = (a: string, b: string, c: string, d: string) => string;
 
 /** One line of code for each step; a missing one does not compile. */
@@ -17,6 +20,8 @@ const EMIT: Readonly<Record<Step, Emit>> = {
   exp: (a) => `exp(${a})`,
   log: (a) => `log(${a})`,
   tanh: (a) => `tanh(${a})`,
+  min: (a, b) => `${a}<${b}?${a}:${b}<=${a}?${b}:NaN`,
+  max: (a, b) => `${a}>${b}?${a}:${b}>=${a}?${b}:NaN`,
   pick: (a, b, c, d) => `${a}<${b}?${c}:${d}`,
 };
 const ARRAY = { low: "x", high: "y", data: "k" };
@@ -37,19 +42,20 @@ export function generateScalar(program: ScalarProgram, outputs: readonly number[
     if (!inline) code += `const r${id}=${text};`;
   });
   const results = outputs.map((id, i) => `o[${i}]=${texts[id]};`).join("");
-  const run = compiled<Raw>(`return function(x,y,k,o){${code}${results}}`);
+  const run = compiled<Raw>(`return function(x,y,k,f,o){${code}${results}}`);
   const k = Float64Array.from(program.data);
-  return (low, high, out) => run(low, high, k, out);
+  return (low, high, out) => run(low, high, k, program.functions, out);
 }
 
 function textOf(
   { args, values }: ScalarProgram,
-  op: Step | Source,
+  op: Operation | Source,
   id: number,
   texts: readonly string[],
 ): string {
   if (op === "literal") return `${values[id]}`;
   if (op === "low" || op === "high" || op === "data") return `${ARRAY[op]}[${values[id]}]`;
   const names = (args[id] as readonly number[]).map((a) => texts[a]);
+  if (op === "call") return `f[${values[id]}](${names.join()})`;
   return EMIT[op](...(names as [string, string, string, string]));
 }

@@ -1,15 +1,16 @@
 // Runs a program of scalar steps one by one, without generating code.
 import { exp } from "../ground/elementary/exp.ts";
 import { log } from "../ground/elementary/log.ts";
+import { max, min } from "../ground/elementary/minMax.ts";
 import { tanh } from "../ground/elementary/tanh.ts";
-import type { ScalarKernel, ScalarProgram, Step } from "./scalarProgram.ts";
+import type { Operation, ScalarKernel, ScalarProgram, Step } from "./scalarProgram.ts";
 
 /** A program as an interpreter. */
 export function interpretScalar(program: ScalarProgram, outputs: readonly number[]): ScalarKernel {
-  const { ops, args, values, data } = program;
+  const { ops, args, values, data, functions } = program;
   const uses = program.uses(outputs);
   const r = new Float64Array(ops.length);
-  const steps: Step[] = [];
+  const steps: Operation[] = [];
   /** For each step the register to fill and up to four to read. */
   const places: number[] = [];
   const inputs: { from: "low" | "high"; place: number; to: number }[] = [];
@@ -32,10 +33,13 @@ export function interpretScalar(program: ScalarProgram, outputs: readonly number
       const p = 5 * i;
       const a = r[at[p + 1] as number] as number;
       const b = r[at[p + 2] as number] as number;
-      r[at[p] as number] =
-        steps[i] === "pick"
-          ? (r[at[p + (a < b ? 3 : 4)] as number] as number)
-          : resultOf(steps[i] as Exclude<Step, "pick">, a, b);
+      const to = at[p] as number;
+      const step = steps[i] as Operation;
+      if (step === "pick") r[to] = r[at[p + (a < b ? 3 : 4)] as number] as number;
+      else if (step === "call") {
+        const run = functions[values[to] as number] as (...inputs: number[]) => number;
+        r[to] = run(...(args[to] as readonly number[]).map((from) => r[from] as number));
+      } else r[to] = resultOf(step, a, b);
     }
     outputs.forEach((id, i) => {
       out[i] = r[id] as number;
@@ -65,5 +69,9 @@ function resultOf(step: Exclude<Step, "pick">, a: number, b: number): number {
       return log(a);
     case "tanh":
       return tanh(a);
+    case "min":
+      return min(a, b);
+    case "max":
+      return max(a, b);
   }
 }

@@ -1,7 +1,6 @@
 // What a reading of a graph is asked for and what it gives, shared by the generator and the interpreter.
 
 import type { Graph } from "../graph/node.ts";
-import type { Compute } from "../graph/op.ts";
 import { fail } from "../ground/errors.ts";
 
 /** Writes the outputs for the inputs; both keep the order in which they were asked for. */
@@ -12,10 +11,6 @@ export interface ReadingOf {
   readonly inputs: readonly number[];
   readonly outputs: readonly number[];
 }
-
-/** The ordinary function behind a `call` node. */
-export const functionOf = (g: Graph, id: number): Compute["value"] =>
-  (g.functions[g.values[id] as number] as Compute).value;
 
 /** A reading that needs an input which it was not given. */
 export const missingInput = (g: Graph, id: number): never => {

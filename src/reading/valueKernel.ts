@@ -1,11 +1,60 @@
 // Reads values of a graph.
+import { coneOf } from "../graph/cone.ts";
 import type { Graph } from "../graph/node.ts";
-import { generateValue } from "./generateValue.ts";
-import { mayGenerate } from "./generation.ts";
-import { interpretValue } from "./interpretValue.ts";
-import type { Kernel, ReadingOf } from "./readingOf.ts";
+import type { Compute, Op } from "../graph/op.ts";
+import { type Kernel, missingInput, type ReadingOf } from "./readingOf.ts";
+import { runScalar } from "./runScalar.ts";
+import { ScalarProgram, type Step } from "./scalarProgram.ts";
 
 /** As generated straight-line code, or by the interpreter where code must not be generated: the same bits. */
 export function valueKernel(g: Graph, reading: ReadingOf): Kernel {
-  return mayGenerate() ? generateValue(g, reading) : interpretValue(g, reading);
+  const { program, outputs } = valueProgram(g, reading);
+  const run = runScalar(program, outputs);
+  return (x, out) => run(x, x, out);
 }
+
+/** The program of a reading of values: one step for each node, in the order of the graph. */
+export function valueProgram(
+  g: Graph,
+  { inputs, outputs }: ReadingOf,
+): { program: ScalarProgram; outputs: number[] } {
+  const program = new ScalarProgram();
+  const known = new Map(inputs.map((id, i) => [id, program.input("low", i)]));
+  for (const id of coneOf(g, outputs, inputs)) {
+    if (!known.has(id)) known.set(id, registerOf(g, id, program, known));
+  }
+  return { program, outputs: outputs.map((id) => known.get(id) as number) };
+}
+
+function registerOf(
+  g: Graph,
+  id: number,
+  program: ScalarProgram,
+  known: ReadonlyMap<number, number>,
+): number {
+  const op = g.ops[id] as Op;
+  const args = (g.args[id] as readonly number[]).map((a) => known.get(a) as number);
+  const value = g.values[id] as number;
+  if (op === "input") return missingInput(g, id);
+  if (op === "const") return program.datum(value);
+  if (op === "call") return program.call((g.functions[value] as Compute).value, args);
+  if (op === "mean") return args[0] as number;
+  return program.step(STEP[op], ...args);
+}
+
+/** The step of each operation; a missing one does not compile. A jump reads like a pick. */
+const STEP: Readonly<Record<Exclude<Op, "const" | "input" | "mean" | "call">, Step>> = {
+  add: "add",
+  sub: "sub",
+  mul: "mul",
+  div: "div",
+  neg: "neg",
+  sqrt: "sqrt",
+  exp: "exp",
+  log: "log",
+  tanh: "tanh",
+  min: "min",
+  max: "max",
+  pick: "pick",
+  jump: "pick",
+};

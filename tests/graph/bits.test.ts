@@ -1,9 +1,20 @@
 // Numbers folded, generated code and the interpreter must give the same bits: there is one physics, not three.
 import { describe, expect, test } from "vitest";
-import { generateValue } from "../../src/reading/generateValue.ts";
-import { interpretValue } from "../../src/reading/interpretValue.ts";
+import type { Graph } from "../../src/graph/node.ts";
+import { generateScalar } from "../../src/reading/generateScalar.ts";
+import { interpretScalar } from "../../src/reading/interpretScalar.ts";
+import type { ReadingOf } from "../../src/reading/readingOf.ts";
 import { slopeNodes } from "../../src/reading/slopeKernel.ts";
+import { valueProgram } from "../../src/reading/valueKernel.ts";
 import { randomNumbers, randomPlan, recordPlan, runPlan } from "./randomGraph.ts";
+
+const kernelBy = (make: typeof generateScalar) => (graph: Graph, reading: ReadingOf) => {
+  const { program, outputs } = valueProgram(graph, reading);
+  const run = make(program, outputs);
+  return (x: Float64Array, out: Float64Array) => run(x, x, out);
+};
+const generateValue = kernelBy(generateScalar);
+const interpretValue = kernelBy(interpretScalar);
 
 const INPUTS = 3;
 const POINTS = [0, -0, 1, -1, 300, 1e-320, -1e200];

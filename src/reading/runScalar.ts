@@ -1,0 +1,9 @@
+// Makes a program of scalar steps run.
+import { generateScalar } from "./generateScalar.ts";
+import { mayGenerate } from "./generation.ts";
+import { interpretScalar } from "./interpretScalar.ts";
+import type { ScalarKernel, ScalarProgram } from "./scalarProgram.ts";
+
+/** As generated code where the host allows it, else by the interpreter: the same bits. */
+export const runScalar = (program: ScalarProgram, outputs: readonly number[]): ScalarKernel =>
+  (mayGenerate() ? generateScalar : interpretScalar)(program, outputs);

@@ -10,11 +10,10 @@ export interface ReferenceName {
   readonly contains: readonly string[];
 }
 
-const isFourth = (powers: Powers): boolean =>
-  powers !== null && powers.includes(4) && powers.every((n) => n === 0 || n === 4);
+/** A constant plus something that goes as this power. */
+const goesAs = (powers: Powers, power: number): boolean =>
+  powers !== null && !isFree(powers) && powers.every((n) => n === 0 || n === power);
 const isFree = (powers: Powers): boolean => powers?.length === 1 && powers[0] === 0;
-const isStraight = (powers: Powers): boolean =>
-  powers !== null && powers.includes(1) && powers.every((n) => n === 0 || n === 1);
 
 /**
  * Names the reference response of a loop: a Planck response only if all that answers directly goes as T⁴, as emission
@@ -58,8 +57,8 @@ const containing = (names: readonly string[]): string[] =>
 
 /** Why flows that answer directly are no emission that goes as the fourth power. */
 function reasonsOf(direct: readonly Direct[]): string[] {
-  const straight = direct.filter((f) => isStraight(f.powers));
-  const others = direct.filter((f) => !isFourth(f.powers) && !isStraight(f.powers));
+  const straight = direct.filter((f) => goesAs(f.powers, 1));
+  const others = direct.filter((f) => !goesAs(f.powers, 4) && !goesAs(f.powers, 1));
   const reasons: string[] = [];
   if (straight.length > 0)
     reasons.push(

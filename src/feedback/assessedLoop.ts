@@ -1,0 +1,44 @@
+// The linear climate of assessed feedbacks.
+import { inUnit, mul, neg, sub } from "../graph/operations.ts";
+import { fail } from "../ground/errors.ts";
+import { checkedNumber } from "../ground/range.ts";
+import { closeLoop } from "../loop/closeLoop.ts";
+import type { Flow, Loop } from "../loop/types.ts";
+import type { FeedbackAssessment } from "./assessment.ts";
+
+/** The names that such a loop has. */
+export type AssessedNames<F extends string> = "variable temperature" | "given forcing" | `coupling ${F}`;
+
+/**
+ * A loop whose terms are the assessed feedbacks, each a straight line: N = F + λ₀(T − T₀) + Σ λ_i (T − T₀). The reference
+ * response acts directly, every feedback is a coupling of its name, and the forcing F (W m⁻², positive when it warms; a
+ * reduction of outgoing radiation) is the given `forcing`, 0 unless set. At F = 0 the state is T₀, `temperature`, 288 K
+ * unless said; no answer depends on it. Heat capacity 0: there is no time in it.
+ *
+ * Valid for changes small enough for the feedbacks to stay constant. Throws `not-a-number`, `out-of-range`, `unreadable`.
+ * Source: Gregory et al. 2004, Geophys. Res. Lett. 31, L03205.
+ */
+export function assessedLoop<F extends string>(
+  assessment: FeedbackAssessment<F>,
+  { temperature: reference = 288 }: { readonly temperature?: number } = {},
+): Loop<AssessedNames<F>> {
+  const { feedbacks } = assessment;
+  if (typeof feedbacks !== "object" || feedbacks === null)
+    fail("unreadable", { path: "feedbacks", value: feedbacks, allowed: "estimates by name" });
+  const strength = (path: string, estimate: { readonly best: number }) =>
+    checkedNumber(estimate.best, `${path}.best`, "W m-2 K-1", [-1e3, 1e3]);
+  const origin = checkedNumber(reference, "temperature", "K", [0, 1e5]);
+  const loop = closeLoop(({ temperature, given, couple }) => {
+    const warmer = sub(temperature, origin);
+    // what is not radiated, so that cooling is its opposite
+    const kept = (lambda: number) => inUnit(mul(lambda, warmer), "W m-2");
+    const cooling: Record<string, Flow> = {
+      forcing: neg(given("forcing", 0, "W m-2")),
+      reference: neg(kept(strength("reference", assessment.reference))),
+    };
+    for (const [name, estimate] of Object.entries<{ readonly best: number }>(feedbacks))
+      cooling[`${name} feedback`] = neg(couple(name, kept(strength(`feedbacks.${name}`, estimate))));
+    return { heating: {}, cooling, heatCapacity: 0 };
+  });
+  return loop as unknown as Loop<AssessedNames<F>>;
+}

@@ -1,0 +1,112 @@
+// Follows a zero of a function while the function changes, with proof.
+import type { Sign } from "./enclosed.ts";
+import type { Course, Followed, Moving, Start } from "./moving.ts";
+import { Reader } from "./reader.ts";
+import { refineProved } from "./refineProved.ts";
+import { findTurning, proveTurning, type TurningPlace } from "./turning.ts";
+
+/** Steps of the path below this are not tried; two zeros closer to meeting than this are not told apart. */
+const FINEST_STEP = 1e-14;
+/** A turning point is looked for when steps fall below this, and each time they have become so much smaller again. */
+const SUSPECT = 1 / 64;
+/** How far a box reaches beyond its zeros, as a share of their distance; widened while its edges are not decided. */
+const FIRST_SPREAD = 0.25;
+const WIDEST_SPREAD = 64;
+/** The least reach of a box, relative to the place. */
+const LEAST_REACH = 1e-10;
+const MOST_TILES = 5000;
+
+/**
+ * Follows a zero from stage 0 to 1 by tiles, each a stretch of stages and a box. In a tile the slope has one proved sign, and
+ * the function has proved, opposite signs along both edges: so at each stage there is exactly one zero in the box, and
+ * boxes that overlap hold the same zero. Where steps become small the turning point ahead is found, the zero is followed to
+ * just before it, and then proved to be gone just behind it.
+ */
+export function followZero(f: Moving, start: Start, range: readonly [number, number]): Followed {
+  const reader = new Reader(f);
+  let at: Course = { ...start, stage: 0 };
+  let turning: TurningPlace | undefined;
+  let [step, spread, suspect] = [1, FIRST_SPREAD, SUSPECT];
+  let outside = false;
+  for (let i = 0; i < MOST_TILES; i++) {
+    const goal = turning ? turning.stages[0] : 1;
+    if (at.stage >= goal) break;
+    const next = Math.min(goal, at.stage + step);
+    const tile = tileTo(f, reader, { at, next, spread, range });
+    if (typeof tile !== "string") {
+      at = tile;
+      step *= 2;
+      continue;
+    }
+    outside = tile === "outside";
+    if (tile === "edges" && spread < WIDEST_SPREAD) {
+      spread *= 4;
+      continue;
+    }
+    spread = FIRST_SPREAD;
+    step = (next - at.stage) / 2;
+    if (step < FINEST_STEP) break;
+    if (!turning && step < suspect && !outside) {
+      turning = findTurning(f, reader, { at, step, range });
+      suspect /= 64;
+    }
+  }
+  if (at.stage === 1) return { outcome: "arrived", zero: refined(f, reader, at) };
+  const proved = turning && at.stage === turning.stages[0] ? proveTurning(f, reader, at, turning) : undefined;
+  if (proved) return { outcome: "turned", turning: proved };
+  return { outcome: outside ? "left" : "undecided", stage: at.stage, x: at.x };
+}
+
+interface Tile {
+  readonly at: Course;
+  readonly next: number;
+  readonly spread: number;
+  readonly range: readonly [number, number];
+}
+
+/** The zero at the next stage, or why it is not proved: the slope, the edges of the box, or the range. */
+function tileTo(f: Moving, reader: Reader, { at, next, spread, range }: Tile) {
+  f.between(next, next);
+  const x = newton(reader, at.x, at.slope);
+  if (x === undefined) return "slope";
+  const reach = spread * Math.abs(x - at.x) + LEAST_REACH * Math.abs(x);
+  const low = Math.min(x, at.x) - reach;
+  const high = Math.max(x, at.x) + reach;
+  if (low < range[0] || high > range[1]) return "outside";
+  f.between(at.stage, next);
+  if (reader.box(low, high).slopeSign !== at.slope) return "slope";
+  const place = reader.take();
+  const below = reader.read(low, place).sign;
+  const above = reader.read(high, place).sign;
+  reader.give(place);
+  // overlapping boxes share their zero: the ends of what they share have proved signs, too
+  const overlap = Math.max(low, at.low) < Math.min(high, at.high);
+  if (below !== -at.slope || above !== at.slope || !overlap) return "edges";
+  return { x, low, high, slope: at.slope, stage: next };
+}
+
+/** Newton's method from the zero at the stage before; only a guess, the box around it is what is proved. */
+function newton(reader: Reader, from: number, slope: Sign): number | undefined {
+  const place = reader.take();
+  let x = from;
+  for (let i = 0; i < 12; i++) {
+    reader.read(x, place);
+    const steep = (place.slopeLow + place.slopeHigh) / 2;
+    const step = (place.low + place.high) / 2 / steep;
+    if (!(steep * slope > 0)) break;
+    x -= step;
+    if (Math.abs(step) <= 0.01 * Math.abs(x - from) + 0.1 * LEAST_REACH * Math.abs(x)) {
+      reader.give(place);
+      return x;
+    }
+  }
+  reader.give(place);
+  return undefined;
+}
+
+function refined(f: Moving, reader: Reader, at: Course) {
+  f.between(1, 1);
+  const left = reader.read(at.low, reader.take());
+  const right = reader.read(at.high, reader.take());
+  return refineProved(reader, left, right, at.slope);
+}

@@ -1,0 +1,105 @@
+// How long a star needs to brighten by a factor.
+import { fail } from "../ground/errors.ts";
+import { checkKeys } from "../ground/names.ts";
+import { checkedNumber } from "../ground/range.ts";
+import { SOLAR_AGE, SOLAR_PACE, stellarBrightening } from "../star/stellarBrightening.ts";
+
+/** The history of the Sun (Gough 1981), for stars of 0.9 to 1.1 solar masses. */
+export interface SunlikeBrightening {
+  /** kg. */
+  readonly mass: number;
+  /** Age today, s; that of the Sun unless said. */
+  readonly age?: number;
+}
+
+/** A star that brightens by the same amount every second. */
+export interface SteadyBrightening {
+  /** (dL/dt)/L today, s⁻¹. */
+  readonly rate: number;
+}
+
+/** A star whose luminosity is tabled, straight between the entries. */
+export interface TabledBrightening {
+  /** By rising time; times in s, luminosities in any one unit. */
+  readonly table: readonly { readonly time: number; readonly luminosity: number }[];
+  /** The time of today in the table, s. */
+  readonly now: number;
+}
+
+/** How a star brightens. */
+export type Brightening = SunlikeBrightening | SteadyBrightening | TabledBrightening;
+
+/** The time until the star is brighter by a factor above 1, s; `null` if it never is, as far as is known. */
+export type TimeUntil = (factor: number) => number | null;
+
+/** Checks a brightening and returns the time until a factor is reached. */
+export function timeUntil(brightening: Brightening): TimeUntil {
+  if (typeof brightening !== "object" || brightening === null)
+    fail("unreadable", {
+      path: "brightening",
+      value: brightening,
+      allowed: "{ mass }, { rate } or { table, now }",
+    });
+  if ("rate" in brightening) return steady(brightening);
+  if ("table" in brightening) return tabled(brightening);
+  return sunlike(brightening);
+}
+
+/** 1 + 0.4(1 − t/t₀) is inversely proportional to luminosity. */
+function sunlike(brightening: SunlikeBrightening): TimeUntil {
+  checkKeys(brightening, "brightening", ["mass", "age"]);
+  const { mass, age = SOLAR_AGE } = brightening;
+  const now = 1 / stellarBrightening({ age, mass: checkedNumber(mass, "brightening.mass", "kg") });
+  return (factor) => ((now - now / factor) / SOLAR_PACE) * SOLAR_AGE;
+}
+
+function steady(brightening: SteadyBrightening): TimeUntil {
+  checkKeys(brightening, "brightening", ["rate"]);
+  const rate = checkedNumber(brightening.rate, "brightening.rate", "s-1", [-1, 1]);
+  return (factor) => (rate > 0 ? (factor - 1) / rate : null);
+}
+
+function tabled(brightening: TabledBrightening): TimeUntil {
+  checkKeys(brightening, "brightening", ["table", "now"]);
+  const { table } = brightening;
+  const path = "brightening.table";
+  if (!Array.isArray(table) || table.length < 2)
+    fail("unreadable", { path, value: table, allowed: "two or more entries { time, luminosity }" });
+  const rows = (table as TabledBrightening["table"]).map((row, i) => ({
+    time: checkedNumber(row?.time, `${path}[${i}].time`, "s"),
+    luminosity: checkedNumber(row?.luminosity, `${path}[${i}].luminosity`, "1", [0, 1e40]),
+  }));
+  const [first, last] = [rows[0], rows.at(-1)] as [(typeof rows)[number], (typeof rows)[number]];
+  rows.slice(1).forEach(({ time }, i) => {
+    const before = (rows[i] as (typeof rows)[number]).time;
+    if (!(time > before))
+      fail("out-of-range", {
+        path: `${path}[${i + 1}].time`,
+        value: time,
+        allowed: `above ${before}`,
+        unit: "s",
+      });
+  });
+  const now = checkedNumber(brightening.now, "brightening.now", "s", [first.time, last.time]);
+  const pieces = rows.slice(1).map((to, i) => ({ from: rows[i] as (typeof rows)[number], to }));
+  const today = pieces.find(({ to }) => to.time >= now) as (typeof pieces)[number];
+  const luminosity = between(today, (now - today.from.time) / (today.to.time - today.from.time));
+  return (factor) => {
+    const wanted = factor * luminosity;
+    for (const { from, to } of pieces) {
+      if (to.time <= now || to.luminosity < wanted || from.luminosity === to.luminosity) continue;
+      const share = (wanted - from.luminosity) / (to.luminosity - from.luminosity);
+      const time = from.time + Math.max(0, share) * (to.time - from.time);
+      return Math.max(0, time - now);
+    }
+    return null;
+  };
+}
+
+const between = (
+  {
+    from,
+    to,
+  }: { readonly from: { readonly luminosity: number }; readonly to: { readonly luminosity: number } },
+  share: number,
+): number => from.luminosity + share * (to.luminosity - from.luminosity);

@@ -1,0 +1,82 @@
+// The states of a diagram at one value of its parameter.
+import { fail } from "../ground/errors.ts";
+import { checkedNumber, type Range } from "../ground/range.ts";
+import { givensAt } from "../loop/inputs.ts";
+import type { Givens, Loop } from "../loop/types.ts";
+import { enumerateZeros } from "../search/enumerateZeros.ts";
+import { readerOf } from "../states/prepared.ts";
+import { locate } from "../states/provedSearch.ts";
+import type { State } from "../states/state.ts";
+import { balanceOf } from "./balanceOf.ts";
+import type { Branch, BranchEnd, Diagram } from "./diagram.ts";
+
+/** The states at one value of the parameter. */
+export interface StatesOnDiagram<N extends string = string> {
+  readonly at: number;
+  /** By rising temperature. */
+  readonly states: readonly State<N>[];
+  /** The index of each state's branch. */
+  readonly branches: readonly number[];
+  /** True only if it is proved that there are no others in the diagram's range of temperature. */
+  readonly complete: boolean;
+}
+
+/** What finding a state on its branch may cost, in boxes. */
+const EFFORT = 200;
+
+/**
+ * The states of a loop at one value of a diagram's parameter: one on every branch whose range holds it, found between the
+ * ends of that branch. `loop` is the one that the diagram was traced for; the diagram may come from `JSON.parse`. Inside the
+ * bracket of a fold it is not known whether its two states exist, and `complete` is false.
+ *
+ * Throws `out-of-range` outside of the diagram, `not-a-number`, `unknown-name` for a diagram of another loop.
+ */
+export function statesOnDiagram<N extends string>(
+  loop: Loop<N>,
+  diagram: Diagram<Givens<N>>,
+  at: number,
+): StatesOnDiagram<N> {
+  if (diagram?.method === undefined || !Array.isArray(diagram.branches))
+    fail("unreadable", { path: "diagram", value: diagram, allowed: "what traceBranches returned" });
+  const value = checkedNumber(at, "at", diagram.unit, diagram.between);
+  const given = { ...diagram.fixed, [diagram.along]: value };
+  const givens = givensAt(loop, given);
+  const inside = ([low, high]: Range) => low <= value && value <= high;
+  const branches: number[] = [];
+  const states: State<N>[] = [];
+  diagram.branches.forEach((branch, i) => {
+    const state = inside(branch.parameters) ? stateOn(loop, branch, givens) : undefined;
+    if (!state) return;
+    states.push(state as State<N>);
+    branches.push(i);
+  });
+  const doubtful = diagram.folds.some((f) => inside(f.atBracket));
+  const count = diagram.branches.filter((b) => inside(b.parameters)).length;
+  const complete = diagram.complete && !doubtful && count === states.length;
+  return Object.freeze({
+    at: value,
+    states: Object.freeze(states),
+    branches: Object.freeze(branches),
+    complete,
+  });
+}
+
+/** The state of a branch at givens inside its range; undefined where it is not proved. */
+export function stateOn(loop: Loop, branch: Branch, givens: readonly number[]): State | undefined {
+  const balance = balanceOf(loop);
+  balance.set(givens, givens);
+  const { zeros } = enumerateZeros(balance.net, reachOf(branch), { effort: EFFORT });
+  return zeros.length === 1
+    ? readerOf(loop)(locate(balance, zeros[0] as (typeof zeros)[0]), givens)
+    : undefined;
+}
+
+/** The temperatures of a branch with the brackets of its ends, so that a state at an end is inside. */
+function reachOf({ low, high }: Branch): Range {
+  const [cool, warm] = low.temperature <= high.temperature ? [low, high] : [high, low];
+  return [cool.temperatureBracket[0], warm.temperatureBracket[1]];
+}
+
+/** The end of a branch in a direction. */
+export const endOf = (branch: Branch, direction: "rise" | "fall"): BranchEnd =>
+  direction === "rise" ? branch.high : branch.low;

@@ -1,0 +1,159 @@
+// How far a state is from the ends of its branch, and what comes then.
+import { fail } from "../ground/errors.ts";
+import { checkKeys } from "../ground/names.ts";
+import { checkedRange, type Range } from "../ground/range.ts";
+import { checkBelongs, type StateLike } from "../loop/checkBelongs.ts";
+import type { Loop } from "../loop/types.ts";
+import { checkOneVariable } from "../states/prepared.ts";
+import type { State } from "../states/state.ts";
+import { type Brightening, type TimeUntil, timeUntil } from "./brightening.ts";
+import { checkedAlong } from "./checkedAlong.ts";
+import type { Branch, BranchPoint, Diagram } from "./diagram.ts";
+import type { Margin, TippingMargins, TippingMarginsOptions } from "./margins.ts";
+import { endOf, stateOn } from "./statesOnDiagram.ts";
+import { traceBranches } from "./traceBranches.ts";
+
+const WITHIN: Range = [2.7, 2000];
+
+/**
+ * The margins of a state along one given: the distance to the end of its branch in both directions, the temperature there, the
+ * state after the jump and whether there is a way back, the edges of its basin, and λ along the way. With a brightening star
+ * also the time until its branch ends, at fixed other givens: for the Sun's history Δt = 2.5·t₀·(1 − p/p_end).
+ *
+ * `state` may come from `JSON.parse`. Throws `foreign-state`, `unknown-name`, `missing` (no range for the given),
+ * `contradiction` (the budget does not depend on it; or time is asked along a given that is no luminosity or flux),
+ * `out-of-range` (a star that is not like the Sun), `not-a-number`, `unreadable`, `several-variables`.
+ *
+ * @example tippingMargins(loop, state, { along: "flux", between: [900, 1900] }).rise.relative
+ */
+export function tippingMargins<N extends string>(
+  loop: Loop<N>,
+  state: StateLike<N>,
+  options: TippingMarginsOptions<N>,
+): TippingMargins<N> {
+  const path = "tippingMargins";
+  checkKeys(options, path, ["along", "within", "between", "brightening", "effort", "tolerance"]);
+  checkOneVariable(loop, path);
+  const { name, given, place } = checkedAlong(loop, options.along, undefined, `${path}.along`);
+  const { values } = checkBelongs(loop, state, "state");
+  const [temperature, at] = [values[0] as number, values[place] as number];
+  const until = options.brightening === undefined ? undefined : timeFor(options.brightening, given);
+  const within = options.within ?? WITHIN;
+  const between = options.between ?? given.within;
+  if (!between) {
+    return fail("missing", {
+      path: "between",
+      value: between,
+      allowed: "a range for the given",
+      unit: given.unit,
+    });
+  }
+  checkHolds(within, temperature, "within", "K");
+  checkHolds(between, at, "between", given.unit);
+  const others = Object.fromEntries(
+    loop.givens.flatMap((g, i) => (g.name === name ? [] : [[g.name, values[i + loop.variables.length]]])),
+  );
+  const { effort, tolerance } = options;
+  const diagram = traceBranches(loop as Loop, {
+    ...{ along: name, between, within, at: others as Record<string, number> },
+    ...(effort === undefined ? {} : { effort }),
+    ...(tolerance === undefined ? {} : { tolerance }),
+  });
+  const index = branchAt(diagram, at, temperature);
+  const branch = diagram.branches[index];
+  const givens = [...values.subarray(loop.variables.length)];
+  const here = branch && stateOn(loop, branch, givens);
+  if (!here) {
+    const allowed = "a state on a branch that is decided";
+    return fail("foreign-state", { path: "state", value: temperature, allowed, unit: "K" });
+  }
+  const margin = (direction: Margin["direction"]): Margin<N> => {
+    const end = endOf(branch, direction);
+    const jump = diagram.jumps.find((j) => j.from === index && j.direction === direction) ?? null;
+    const target = diagram.branches[jump?.to?.branch ?? -1];
+    const there = givens.map((value, i) => (loop.givens[i]?.name === name ? end.at : value));
+    const distance = Math.abs(end.at - at);
+    return Object.freeze({
+      ...{ direction, end, distance, jump },
+      relative: at === 0 ? null : distance / Math.abs(at),
+      after: target ? ((stateOn(loop, target, there) ?? null) as State<N> | null) : null,
+      way: Object.freeze(wayTo(branch, here, { at, direction })),
+      time: until && at > 0 && end.at > at ? until(end.at / at) : null,
+    });
+  };
+  return Object.freeze({
+    ...{ along: options.along, unit: given.unit, at, temperature, stability: branch.stability },
+    rise: margin("rise"),
+    fall: margin("fall"),
+    basin: branch.stability === "stable" ? basinOf(loop, diagram, { index, at, givens }) : null,
+    fixed: diagram.fixed,
+    held: heldText(loop, name, diagram.fixed),
+    within: diagram.within,
+    between: diagram.between,
+    proof: diagram.proof,
+  });
+}
+
+function timeFor(brightening: Brightening, { name, unit }: { name: string; unit: string }): TimeUntil {
+  if (unit !== "W" && unit !== "W m-2") {
+    const allowed = "a luminosity or a flux, in W or W m-2, to tell a time";
+    fail("contradiction", { path: "along", value: `${name} in ${unit}`, allowed });
+  }
+  return timeUntil(brightening);
+}
+
+function checkHolds(range: unknown, value: number, path: string, unit: string): void {
+  const [low, high] = checkedRange(range, path, unit);
+  if (value >= low && value <= high) return;
+  fail("out-of-range", { path, value, allowed: "a range with the state in it", unit });
+}
+
+/** A state is known to a few roundings. */
+const SLACK = 1e-12;
+
+/** The branch that holds a state: the one whose temperatures are nearest. */
+function branchAt({ branches }: Diagram, at: number, temperature: number): number {
+  const missed = ({ parameters: [low, high], temperatures: [cold, hot] }: Branch): number => {
+    const slack = Math.abs(at) * SLACK;
+    if (at < low - slack || at > high + slack) return Number.POSITIVE_INFINITY;
+    return Math.max(0, cold - temperature, temperature - hot);
+  };
+  const misses = branches.map(missed);
+  const least = misses.reduce((a, b) => Math.min(a, b), Number.POSITIVE_INFINITY);
+  return least <= temperature * SLACK ? misses.indexOf(least) : -1;
+}
+
+/** The points of a branch from a state on to its end. */
+function wayTo(
+  { points }: Branch,
+  { temperature, feedbackParameter }: State,
+  { at, direction }: { at: number; direction: Margin["direction"] },
+): BranchPoint[] {
+  const ahead =
+    direction === "rise" ? points.filter((p) => p.at > at) : points.filter((p) => p.at < at).reverse();
+  return [Object.freeze({ at, temperature, feedbackParameter }), ...ahead];
+}
+
+/** The nearest states on both sides at the same givens: between a stable state and the next there is nothing. */
+function basinOf(
+  loop: Loop,
+  { branches }: Diagram,
+  { index, at, givens }: { index: number; at: number; givens: readonly number[] },
+): TippingMargins["basin"] {
+  const next = (side: 1 | -1): number | null => {
+    for (let i = index + side; i >= 0 && i < branches.length; i += side) {
+      const branch = branches[i] as Branch;
+      if (branch.parameters[0] <= at && at <= branch.parameters[1])
+        return stateOn(loop, branch, givens)?.temperature ?? null;
+    }
+    return null;
+  };
+  return Object.freeze({ coldest: next(-1), hottest: next(1) });
+}
+
+function heldText(loop: Loop, name: string, fixed: Readonly<Record<string, number>>): string {
+  const others = loop.givens.filter((g) => g.name !== name);
+  if (others.length === 0) return "nothing else is a given";
+  const list = others.map((g) => `${g.name} ${fixed[g.name]}${g.unit === "1" ? "" : ` ${g.unit}`}`);
+  return `at fixed ${list.join(", ")}`;
+}

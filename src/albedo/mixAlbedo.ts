@@ -1,4 +1,4 @@
-import { add, mul, sub, sum } from "../graph/operations.ts";
+import { add, min, mul, sub, sum } from "../graph/operations.ts";
 import type { Value } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
 import { compensatedSum } from "../ground/sum.ts";
@@ -45,9 +45,10 @@ export const mixAlbedo = /* @__PURE__ */ defineLaw({
   write({ covers, bare }) {
     const covered = sum(...covers.map((c) => c.fraction));
     const reflected = sum(...covers.map((c) => mul(c.fraction, c.albedo)));
-    if (bare !== undefined) return add(reflected, mul(sub(1, covered), bare));
+    // rounding must not make a surface brighter than its brightest cover could be
+    if (bare !== undefined) return min(1, add(reflected, mul(sub(1, covered), bare)));
     checkShares(covers.map((c) => c.fraction));
-    return reflected;
+    return min(1, reflected);
   },
 });
 

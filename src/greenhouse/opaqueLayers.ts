@@ -10,7 +10,7 @@ import { temperaturePort } from "../law/ports.ts";
 export const opaqueLayers = /* @__PURE__ */ defineLaw({
   name: "opaqueLayers",
   about: "Surface temperature under layers that are transparent to starlight and opaque to longwave.",
-  output: /* @__PURE__ */ temperaturePort("T_s", "surface temperature"),
+  output: { symbol: "T_s", unit: "K", within: [0, 1.1e6], about: "surface temperature" },
   inputs: {
     effectiveTemperature: /* @__PURE__ */ temperaturePort(
       "T_e",

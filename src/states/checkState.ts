@@ -2,6 +2,7 @@
 
 import type { LawCard, Port } from "../graph/card.ts";
 import { coneOf } from "../graph/cone.ts";
+import { deepFreeze } from "../ground/deepFreeze.ts";
 import type { Range } from "../ground/range.ts";
 import { rootsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
@@ -62,7 +63,9 @@ export function notesFrom(checks: readonly Check[], values: Float64Array): Note[
   const notes: Note[] = [];
   checks.forEach(({ range, note }, i) => {
     const value = values[i] as number;
-    if (!(value >= range[0] && value <= range[1])) notes.push(Object.freeze({ ...note, value, range }));
+    const [low, high] = range;
+    if (!(value >= low && value <= high))
+      notes.push(deepFreeze({ ...note, value, range: [low, high] as const }));
   });
   return notes;
 }

@@ -1,5 +1,6 @@
 // Finds the equilibria of a loop.
 import { CONSTANT_SET } from "../ground/constants.ts";
+import { deepFreeze } from "../ground/deepFreeze.ts";
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange } from "../ground/range.ts";
 import { givensAt } from "../loop/inputs.ts";
@@ -46,10 +47,10 @@ export function findStates<N extends string>(loop: Loop<N>, options: FindStatesO
   return Object.freeze({
     states: Object.freeze(located.map((found) => read(found, givens) as State<N>)),
     complete: proof === "proved",
-    undecided: Object.freeze(undecided) as readonly Undecided<N>[],
+    undecided: deepFreeze(undecided) as readonly Undecided<N>[],
     proof,
-    within,
-    cost,
+    within: Object.freeze(within),
+    cost: Object.freeze(cost),
     notes: Object.freeze(searchNotes(loop.sampled, undecided)),
     constants: CONSTANT_SET,
   });

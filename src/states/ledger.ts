@@ -1,4 +1,5 @@
 // The ledger of a state: reservoirs and the flows between them.
+import { deepFreeze } from "../ground/deepFreeze.ts";
 import { compensatedSum } from "../ground/sum.ts";
 import type { FlowRecord } from "../loop/types.ts";
 import type { Note } from "./note.ts";
@@ -53,7 +54,7 @@ function openNote(about: string, value: number, bound: number): Note {
   const text =
     "inflow and outflow of this reservoir do not match its storage: a flow is missing or counted twice";
   const rest = { value, range: [-bound, bound] as const, unit: "W m-2", text, source: null };
-  return { code: "open-reservoir", severity: "invalid", about, ...rest };
+  return deepFreeze({ code: "open-reservoir", severity: "invalid", about, ...rest });
 }
 
 function signedFlows(ledger: Ledger, reservoir: string): number[] {

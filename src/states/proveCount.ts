@@ -1,4 +1,5 @@
 // Proves how many equilibria a loop has for whole intervals of its parameters.
+import { deepFreeze } from "../ground/deepFreeze.ts";
 import { fail } from "../ground/errors.ts";
 import { checkKeys, failUnknown } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
@@ -71,7 +72,7 @@ export function proveCount<N extends string>(loop: Loop<N>, options: ProveCountO
   const total = sizeOf(box, box);
   const proved = tiled.tiles.filter((t) => t.count !== null).reduce((sum, t) => sum + sizeOf(t, box), 0);
   const undecided = tiled.tiles.some((t) => t.count === null);
-  return Object.freeze({
+  return deepFreeze({
     tiles: merged(tiled.tiles, box.sides).map(
       (t) => ({ over: named(t), count: t.count }) as unknown as CountTile<N>,
     ),

@@ -8,7 +8,7 @@ const iceLoop = () =>
   core.closeLoop(({ temperature, given }) => ({
     heating: {
       sunlight: core.absorbedFlux({
-        flux: given("flux", 1361, "W m-2", { within: [0, 1e5] }),
+        flux: given("flux", 1361, "W m-2", { within: [0, 1e7] }),
         albedo: core.tanhAlbedo({ temperature, ...ICE }),
       }),
     },
@@ -119,6 +119,24 @@ describe("the proved search", () => {
     expect(found.undecided.at(-1)).toMatchObject({ kind: "effort" });
     expect(found.undecided.at(-1)?.interval[1]).toBe(2000);
     expect(found.notes).toMatchObject([{ code: "search-stopped" }]);
+  });
+
+  test("the closure bound holds in its relative form where flows are huge", () => {
+    // an icy loop pushed to about 2000 K, and a bare rock at the flux of 55 Cancri e (S/S☉ = 2450, von Braun et al. 2011,
+    // from memory): half a unit in the last place of T alone is worth 1e-10 W m⁻²
+    const hot = findStates(iceLoop(), { within: [2.7, 3000], at: { flux: 3.9e6 } });
+    const rock = core.closeLoop(({ temperature }) => ({
+      heating: { sunlight: core.absorbedFlux({ flux: 2450 * core.SOLAR_IRRADIANCE, albedo: 0.06 }) },
+      cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.9 }) },
+      heatCapacity: 0,
+    }));
+    const found = [...hot.states, ...findStates(rock, { within: [2.7, 5000] }).states];
+    expect(found.map((s) => s.proved && s.temperature > 1900)).toEqual([true, true]);
+    for (const { imbalance, ledger, notes } of found) {
+      const heating = Math.max(...ledger.flows.map((f) => f.value));
+      expect(imbalance.temperature).toBeLessThanOrEqual(Math.max(5e-12, 2e-14 * heating));
+      expect(notes.filter((n) => n.severity === "invalid")).toEqual([]);
+    }
   });
 
   test("signs come from declared ranges only", () => {

@@ -7,19 +7,11 @@ import { log } from "../../src/ground/elementary/log.ts";
 import { log1p } from "../../src/ground/elementary/log1p.ts";
 import { power } from "../../src/ground/elementary/power.ts";
 import { tanh } from "../../src/ground/elementary/tanh.ts";
+import { between } from "./draws.ts";
 import { next, previous } from "./ulps.ts";
 
 /** Half an ulp of 1. */
 const UNIT = 2 ** -53;
-
-/** Numbers between low and high, the same on every run (Park and Miller's generator). */
-function between(low: number, high: number, count = 20_000): number[] {
-  let state = 20230;
-  return Array.from({ length: count }, () => {
-    state = (state * 48271) % 2147483647;
-    return low + (high - low) * (state / 2147483647);
-  });
-}
 
 /** The arguments where the law is off by more than its slack. */
 function offenders(xs: number[], off: (x: number) => number, slack: (x: number) => number): number[] {

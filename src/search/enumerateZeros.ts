@@ -41,7 +41,7 @@ export function enumerateZeros(
   const [from, to] = range;
   if (!(from < to && to - from < Number.POSITIVE_INFINITY))
     fail("out-of-range", { path: "range", value: range, allowed: "two rising finite numbers" });
-  const reader = new Reader(f);
+  const reader = Reader.of(f);
   const search: Search = { reader, range, fine, zeros: [], doubts: [] };
   // places still to pass, from right to left: the box under work lies between the last two
   const ahead = startPlaces(reader, range, { cuts, fine }).reverse();
@@ -67,6 +67,7 @@ export function enumerateZeros(
     ahead.pop();
     reader.give(left);
   }
+  for (const place of ahead) reader.give(place);
   return {
     zeros: search.zeros,
     undecided: mergeDoubts(search.doubts),

@@ -27,6 +27,8 @@ export class Piece {
   smooth = false;
 }
 
+const known = /* @__PURE__ */ new WeakMap<Enclosed, Reader>();
+
 /** A function being searched. */
 export class Reader {
   readonly piece = new Piece();
@@ -38,6 +40,15 @@ export class Reader {
 
   constructor(f: Enclosed) {
     this.#f = f;
+  }
+
+  /** The reader of a function, with its counts at 0: made once, so that searching a function again allocates no places. */
+  static of(f: Enclosed): Reader {
+    const reader = known.get(f) ?? new Reader(f);
+    known.set(f, reader);
+    reader.boxes = 0;
+    reader.points = 0;
+    return reader;
   }
 
   /** A place to be filled by `read`; to be given back. */

@@ -55,22 +55,12 @@ const STABILITY: Readonly<Record<number, State["stability"]>> = {
 };
 
 /** Bounds of N at the temperature and of λ over the bracket. */
-export function locate(
-  { net }: Pick<EnclosedBalance, "net">,
-  { at, bracket, slopeSign }: ProvedZero,
-): Located {
+export function locate({ net }: EnclosedBalance, { at, bracket, slopeSign }: ProvedZero): Located {
+  const value = (i: number) => values[i] as number;
   net.point(at, values);
-  const [low, high, error, slopeLow, slopeHigh] = values as unknown as [
-    number,
-    number,
-    number,
-    number,
-    number,
-  ];
-  const imbalance = above(Math.max(error - low, high + error));
-  const lambda = slopeLow + (slopeHigh - slopeLow) / 2;
+  const imbalance = above(Math.max(value(2) - value(0), value(1) + value(2)));
+  const lambda = value(3) + (value(4) - value(3)) / 2;
   net.box(bracket[0], bracket[1], values);
-  const [, , , least, greatest, slopeError] = values as unknown as [0, 0, 0, number, number, number];
-  const slope: Range = [below(least - slopeError), above(greatest + slopeError)];
+  const slope: Range = [below(value(3) - value(5)), above(value(4) + value(5))];
   return { at, bracket, stability: STABILITY[slopeSign] ?? "undecided", lambda, slope, imbalance };
 }

@@ -55,7 +55,10 @@ const STABILITY: Readonly<Record<number, State["stability"]>> = {
 };
 
 /** Bounds of N at the temperature and of λ over the bracket. */
-export function locate({ net }: EnclosedBalance, { at, bracket, slopeSign }: ProvedZero): Located {
+export function locate(
+  { net }: Pick<EnclosedBalance, "net">,
+  { at, bracket, slopeSign }: ProvedZero,
+): Located {
   const value = (i: number) => values[i] as number;
   net.point(at, values);
   const imbalance = above(Math.max(value(2) - value(0), value(1) + value(2)));

@@ -55,6 +55,7 @@ export { orbitMeanFlux } from "./orbit/orbitMeanFlux.ts";
 export { semiMajorAxis } from "./orbit/semiMajorAxis.ts";
 export { temperatureMeanFlux } from "./orbit/temperatureMeanFlux.ts";
 export { absorbedFlux } from "./star/absorbedFlux.ts";
+export { localAbsorbedFlux } from "./star/localAbsorbedFlux.ts";
 export { stellarFlux } from "./star/stellarFlux.ts";
 export { stellarLuminosity } from "./star/stellarLuminosity.ts";
 export { type FindStatesOptions, findStates } from "./states/findStates.ts";

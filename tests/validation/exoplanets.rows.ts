@@ -1,7 +1,9 @@
 // Planets of other stars: luminosity, flux and equilibrium temperature.
 import {
   ASTRONOMICAL_UNIT,
+  blackbodyTemperature,
   equilibriumTemperature,
+  localAbsorbedFlux,
   REDISTRIBUTION_GLOBAL,
   SOLAR_LUMINOSITY,
   SOLAR_RADIUS,
@@ -63,6 +65,20 @@ const astropyRows = exoplanets.rows.flatMap((row): Check[] => {
       published: row.T,
       unit: "K",
       ours: () => temperatureOf(row, row.albedo, row.redistribution),
+      tolerance: row.T * SIGMA_DIGITS,
+    },
+    {
+      ...rest,
+      covers: ["localAbsorbedFlux", "blackbodyTemperature"],
+      what: `${row.name}: temperature that radiates what it absorbs, A = ${row.albedo}, f = ${row.redistribution.toFixed(3)}`,
+      published: row.T,
+      unit: "K",
+      ours: () => {
+        const { albedo, redistribution } = row;
+        return blackbodyTemperature({
+          flux: localAbsorbedFlux({ flux: fluxOf(row), albedo, redistribution }),
+        });
+      },
       tolerance: row.T * SIGMA_DIGITS,
     },
   ];

@@ -76,5 +76,5 @@ test("the bits are those that were released", () => {
   for (const { rows, evaluate } of cases) {
     hash.update(Float64Array.from(rows, (row) => evaluate(row.arguments)));
   }
-  expect(hash.digest("hex").slice(0, 16)).toBe("1678d8e5a6b2b3fc");
+  expect(hash.digest("hex").slice(0, 16)).toBe("3ec7c7ac752bac9f");
 });

@@ -4,6 +4,7 @@ import type { Enclosed } from "../../src/search/enclosed.ts";
 import { greatestBetween, leastBetween } from "../../src/search/endpointForm.ts";
 import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
 import { Place, Reader } from "../../src/search/reader.ts";
+import { stretchOf } from "../../src/search/stretch.ts";
 import { randomNumbers } from "../graph/randomGraph.ts";
 import { refusal } from "../refusal.ts";
 import { whole } from "./exact.ts";
@@ -128,6 +129,20 @@ describe("a number that is not finite decides nothing", () => {
     expect(read(1, 1, Number.NaN)).toMatchObject({ sign: 1, slopeSign: 1, bend: 0, smooth: false });
     expect(read(1, Number.NaN, 1)).toMatchObject({ sign: 1, slopeSign: 0, bend: 0, continuous: false });
     expect(read(Number.NaN, 1, 1)).toMatchObject({ sign: 0, slopeSign: 0, bend: 0, defined: false });
+  });
+
+  test("an undecided stretch is not tightened by slopes that are not finite", () => {
+    const readings = (slope: number): Enclosed => ({
+      box: (_a, _b, out) => out.set([-9, 9, 0, 0.5, slope, 0, 1, 1, 0]),
+      point: (x, out) => out.set([x, x, 0, 1, 1, 0]),
+    });
+    const enclosure = (slope: number) => {
+      const reader = new Reader(readings(slope));
+      const ends = [reader.read(-1, new Place()), reader.read(1, new Place())] as const;
+      return stretchOf("jump", ...ends, reader.box(-1, 1)).enclosure.map((x) => Math.round(x));
+    };
+    expect(enclosure(1)).toEqual([-1, 1]);
+    for (const bad of BAD) expect(enclosure(bad)).toEqual([-9, 9]);
   });
 
   test("a range that is none is refused", () => {

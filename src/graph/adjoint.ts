@@ -42,7 +42,7 @@ const argumentsOf = (g: Graph, id: number): readonly number[] => g.args[id] as r
 
 type Rule = (x: Seeded) => readonly (number | undefined)[];
 const arg = (x: Seeded, i: number): number => x.args[i] as number;
-/** The seed for the argument that is chosen, 0 for the other. */
+/** The seeds of two arguments: all of it for the first where a < b, else for the second. */
 const chosen = (x: Seeded, op: "pick" | "jump", [a, b]: readonly number[]): number[] => {
   const zero = x.w.constant(0);
   const choose = (first: number, second: number) => x.w.g.node(op, [a as number, b as number, first, second]);
@@ -69,7 +69,7 @@ const RULES: Readonly<Record<Op, Rule>> = {
   log: (x) => [x.w.g.node("div", [x.seed, arg(x, 0)])],
   tanh: (x) => [x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), x.seed)],
   min: (x) => chosen(x, "pick", x.args),
-  max: (x) => chosen(x, "pick", [arg(x, 1), arg(x, 0)]).reverse(),
+  max: (x) => chosen(x, "pick", [arg(x, 1), arg(x, 0)]),
   pick: branch,
   jump: branch,
   call: (x) => {

@@ -1,6 +1,6 @@
 // Follows a zero of a function while the function changes, with proof.
 import type { Sign } from "./enclosed.ts";
-import type { Course, Followed, Moving, Start } from "./moving.ts";
+import type { Followed, Moving, Start, Underway } from "./moving.ts";
 import { Reader } from "./reader.ts";
 import { refineProved } from "./refineProved.ts";
 import { findTurning, proveTurning, type TurningPlace } from "./turning.ts";
@@ -24,7 +24,7 @@ const MOST_TILES = 5000;
  */
 export function followZero(f: Moving, start: Start, range: readonly [number, number]): Followed {
   const reader = new Reader(f);
-  let at: Course = { ...start, stage: 0 };
+  let at: Underway = { ...start, stage: 0 };
   let turning: TurningPlace | undefined;
   let [step, spread, suspect] = [1, FIRST_SPREAD, SUSPECT];
   let outside = false;
@@ -57,32 +57,45 @@ export function followZero(f: Moving, start: Start, range: readonly [number, num
   return { outcome: outside ? "left" : "undecided", stage: at.stage, x: at.x };
 }
 
+type Failure = "slope" | "edges" | "outside";
+
 interface Tile {
-  readonly at: Course;
+  readonly at: Underway;
   readonly next: number;
   readonly spread: number;
   readonly range: readonly [number, number];
 }
 
 /** The zero at the next stage, or why it is not proved: the slope, the edges of the box, or the range. */
-function tileTo(f: Moving, reader: Reader, { at, next, spread, range }: Tile) {
+function tileTo(f: Moving, reader: Reader, { at, next, spread, range }: Tile): Underway | Failure {
   f.between(next, next);
   const x = newton(reader, at.x, at.slope);
   if (x === undefined) return "slope";
-  const reach = spread * Math.abs(x - at.x) + LEAST_REACH * Math.abs(x);
-  const low = Math.min(x, at.x) - reach;
-  const high = Math.max(x, at.x) + reach;
-  if (low < range[0] || high > range[1]) return "outside";
   f.between(at.stage, next);
+  const [low, high] = boxAround(reader, x, spread);
+  if (!(low < high)) return "slope";
+  if (low < range[0] || high > range[1]) return "outside";
   if (reader.box(low, high).slopeSign !== at.slope) return "slope";
-  const place = reader.take();
-  const below = reader.read(low, place).sign;
-  const above = reader.read(high, place).sign;
-  reader.give(place);
   // overlapping boxes share their zero: the ends of what they share have proved signs, too
   const overlap = Math.max(low, at.low) < Math.min(high, at.high);
-  if (below !== -at.slope || above !== at.slope || !overlap) return "edges";
-  return { x, low, high, slope: at.slope, stage: next };
+  const proved = signAt(reader, low) === -at.slope && signAt(reader, high) === at.slope;
+  return proved && overlap ? { x, low, high, slope: at.slope, stage: next } : "edges";
+}
+
+/** Where the zero may be during the stretch: what the function is at x tells how far it is from there. */
+function boxAround(reader: Reader, x: number, spread: number): [number, number] {
+  const place = reader.read(x, reader.take());
+  const steep = (place.slopeLow + place.slopeHigh) / 2;
+  const [a, b] = [-place.low / steep, -place.high / steep];
+  reader.give(place);
+  const reach = spread * Math.abs(b - a) + LEAST_REACH * Math.abs(x);
+  return [x + Math.min(a, b) - reach, x + Math.max(a, b) + reach];
+}
+
+function signAt(reader: Reader, x: number): Sign {
+  const place = reader.read(x, reader.take());
+  reader.give(place);
+  return place.sign;
 }
 
 /** Newton's method from the zero at the stage before; only a guess, the box around it is what is proved. */
@@ -104,7 +117,7 @@ function newton(reader: Reader, from: number, slope: Sign): number | undefined {
   return undefined;
 }
 
-function refined(f: Moving, reader: Reader, at: Course) {
+function refined(f: Moving, reader: Reader, at: Underway) {
   f.between(1, 1);
   const left = reader.read(at.low, reader.take());
   const right = reader.read(at.high, reader.take());

@@ -21,7 +21,7 @@ export interface Start {
 }
 
 /** A zero on its way: at this stage it is the only one between `low` and `high`. */
-export interface Course extends Start {
+export interface Underway extends Start {
   readonly stage: number;
 }
 

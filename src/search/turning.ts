@@ -2,7 +2,7 @@
 import { crossing } from "./crossing.ts";
 import type { Sign } from "./enclosed.ts";
 import { enumerateZeros } from "./enumerateZeros.ts";
-import type { Course, Moving, Turning } from "./moving.ts";
+import type { Moving, Turning, Underway } from "./moving.ts";
 import type { Reader } from "./reader.ts";
 
 /** Where a turning point is thought to be. */
@@ -16,6 +16,8 @@ export interface TurningPlace {
 
 /** The stages between which the zero is lost are this far from the turning point, and `BEYOND` times as far behind it. */
 const NEAREST = 1e-9;
+/** Difference quotients do not resolve a slope closer to its zero. */
+const NEAREST_SAMPLED = 1e-6;
 const FARTHEST = 1e-3;
 const BEYOND = 8;
 /** The function there exceeds its rounding by this. */
@@ -24,7 +26,7 @@ const MOST_DOUBLINGS = 50;
 const PROOF_EFFORT = 400;
 
 interface Ahead {
-  readonly at: Course;
+  readonly at: Underway;
   readonly step: number;
   readonly range: readonly [number, number];
 }
@@ -67,7 +69,7 @@ export function findTurning(f: Moving, reader: Reader, { at, step, range }: Ahea
   const speed = Math.abs((read(far, x).value - read(stage, x).value) / (far - stage));
   const noise = place.high - place.low;
   reader.give(place);
-  const away = Math.max(NEAREST, (CLEAR * noise) / speed);
+  const away = Math.max(f.sampled ? NEAREST_SAMPLED : NEAREST, (CLEAR * noise) / speed);
   if (!(away < FARTHEST)) return undefined;
   return {
     stage,
@@ -85,7 +87,7 @@ export function findTurning(f: Moving, reader: Reader, { at, step, range }: Ahea
 export function proveTurning(
   f: Moving,
   reader: Reader,
-  at: Course,
+  at: Underway,
   { stage, x, side, stages }: TurningPlace,
 ): Turning | undefined {
   const sign = (-at.slope * side) as Sign;

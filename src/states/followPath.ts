@@ -58,7 +58,11 @@ export function followPath(
 function startAt(f: Moving, x: number, [from, to]: Range): Start | undefined {
   const reader = new Reader(f);
   const place = reader.take();
-  for (let gap = Math.max((to - from) / 2, 4 * roundoffAt(x)); gap < WIDEST_START; gap *= 4) {
+  for (
+    let gap = Math.max(Math.min((to - from) / 2, WIDEST_START / 1e3), 4 * roundoffAt(x));
+    gap < WIDEST_START;
+    gap *= 4
+  ) {
     const [low, high] = [x - gap, x + gap];
     const slope = reader.box(low, high).slopeSign;
     if (slope === 0) continue;

@@ -1,6 +1,5 @@
 // Makes the branches of a run: the pieces of a curve between its critical places.
 import type { Range } from "../ground/range.ts";
-import { signOf } from "../search/enclosed.ts";
 import type { Critical } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd } from "./diagram.ts";
@@ -77,14 +76,11 @@ function clamped(p: number, [low, high]: Range, otherwise = (low + high) / 2): n
   return p < low ? low : p > high ? high : Number.isFinite(p) ? p : otherwise;
 }
 
-const values = new Float64Array(6);
-
 /** The sign of λ anywhere on the branch: it has no zero there. */
-function stabilityOf({ feedback }: Curve, cool: BranchEnd, warm: BranchEnd): Branch["stability"] {
+function stabilityOf(curve: Curve, cool: BranchEnd, warm: BranchEnd): Branch["stability"] {
   const [low, high] = [cool.temperatureBracket[1], warm.temperatureBracket[0]];
   for (const share of [0.5, 0.371, 0.629, 0, 1]) {
-    feedback.point(low + (high - low) * share, values);
-    const sign = signOf(values[0] as number, values[1] as number, values[2] as number);
+    const sign = curve.signAt(low + (high - low) * share);
     if (sign !== 0) return sign < 0 ? "stable" : "unstable";
   }
   return "undecided";

@@ -1,9 +1,8 @@
 // Where λ passes zero along a curve: folds, corner folds, and what cannot be decided.
 import type { Range } from "../ground/range.ts";
-import { signOf } from "../search/enclosed.ts";
+import { type Enclosed, type Sign, signOf } from "../search/enclosed.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import type { DoubtKind } from "../search/enumeration.ts";
-import type { Curve } from "./curve.ts";
 
 /** A place on a curve between two branches. */
 export interface Critical {
@@ -25,20 +24,26 @@ const CORNER_WIDTH = 1e-6;
 /** Boxes that finding the place of one kink may cost. */
 const KINK_EFFORT = 60;
 
-/** The critical places of a curve in a range of temperature, by rising temperature. */
-export function criticalsOf(curve: Curve, range: Range, effort: number): Criticals {
+/** λ along a curve as a function of temperature, and differences that are zero at its kinks. */
+export interface Feedback {
+  readonly feedback: Enclosed;
+  readonly kinks: readonly Enclosed[];
+}
+
+/** The critical places of a curve in a range of temperature, by rising temperature: zeros of λ, and kinks where its sign changes. */
+export function criticalsOf({ feedback, kinks }: Feedback, range: Range, effort: number): Criticals {
   const cuts: number[] = [];
-  for (const kink of curve.kinks) {
+  for (const kink of kinks) {
     for (const { bracket } of enumerateZeros(kink, range, { effort: KINK_EFFORT }).zeros)
       cuts.push(...bracket);
   }
-  const found = enumerateZeros(curve.feedback, range, { effort, cuts });
+  const found = enumerateZeros(feedback, range, { effort, cuts });
   const list = [
     ...found.zeros.map(
       (z): Critical => ({ kind: "fold", decided: true, temperature: z.at, bracket: z.bracket }),
     ),
     ...found.undecided.map(({ kind, interval }): Critical => {
-      const corner = kind === "jump" && changesSign(curve, interval);
+      const corner = kind === "jump" && changesSign(feedback, interval);
       const temperature = interval[0] + (interval[1] - interval[0]) / 2;
       return { kind: corner ? "corner" : kind, decided: corner, temperature, bracket: interval };
     }),
@@ -64,13 +69,17 @@ function joined(list: readonly Critical[]): Critical[] {
   return apart;
 }
 
-const ends = new Float64Array(12);
-
 /** Whether λ is proved to have opposite signs at both ends: then the curve turns in between. */
-function changesSign({ feedback }: Curve, [low, high]: Range): boolean {
+function changesSign(feedback: Enclosed, [low, high]: Range): boolean {
   if (high - low > CORNER_WIDTH) return false;
-  feedback.point(low, ends);
-  const before = signOf(ends[0] as number, ends[1] as number, ends[2] as number);
-  feedback.point(high, ends);
-  return before !== 0 && before === -signOf(ends[0] as number, ends[1] as number, ends[2] as number);
+  const before = signAt(feedback, low);
+  return before !== 0 && before === -signAt(feedback, high);
+}
+
+const values = new Float64Array(6);
+
+/** The proved sign of a function at a place. */
+export function signAt(f: Enclosed, x: number): Sign {
+  f.point(x, values);
+  return signOf(values[0] as number, values[1] as number, values[2] as number);
 }

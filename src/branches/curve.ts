@@ -1,20 +1,24 @@
 // The curve p(T) on which a budget is balanced, where every temperature has at most one such parameter p.
 import type { Range } from "../ground/range.ts";
-import type { Enclosed } from "../search/enclosed.ts";
+import type { Sign } from "../search/enclosed.ts";
+import type { Criticals } from "./criticals.ts";
+import type { Diagram } from "./diagram.ts";
 
-/** The curve of a loop along one of its givens, once the others are set. */
+/** The curve of a loop along one of its givens. */
 export interface Curve {
-  readonly method: "line" | "monotone";
-  /** λ = ∂N/∂T on the curve, as a function of temperature: a fold is a zero, or a kink where its sign changes. */
-  readonly feedback: Enclosed;
-  /** Differences that are zero at kinks, as functions of temperature. */
-  readonly kinks: readonly Enclosed[];
-  /** Sets the other givens and the range of the parameter. */
-  set(givens: readonly number[], between: Range): void;
+  readonly method: Diagram["method"];
+  /** Whether the curve can be read a little outside of the parameter's range. */
+  readonly reachesBeyond: boolean;
+  /** Sets the other givens and the ranges; false if it is not known that each temperature has at most one parameter. */
+  set(givens: readonly number[], between: Range, within: Range): boolean;
   /** The parameter at a temperature, not proved. */
   at(temperature: number): number;
-  /** λ at a temperature on the curve, not proved. */
+  /** λ = ∂N/∂T at a temperature on the curve, not proved. */
   feedbackAt(temperature: number): number;
-  /** Proved bounds of the parameter for temperatures in [low, high]; not finite where there are none. */
+  /** The sign of λ there, proved unless the curve is sampled. */
+  signAt(temperature: number): Sign;
+  /** Bounds of the parameter for temperatures between two, proved unless the curve is sampled; not finite where there are none. */
   over(low: number, high: number): Range;
+  /** Where λ passes zero between two temperatures: the folds, and what cannot be decided. */
+  criticals(range: Range, effort: number): Criticals;
 }

@@ -9,6 +9,7 @@ import { valueKernel } from "../reading/valueKernel.ts";
 import { above, below } from "../search/enclosed.ts";
 import { rangesOf } from "../states/enclosedBalance.ts";
 import { balanceOf } from "./balanceOf.ts";
+import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import { gateValue, placeOf, sameValue } from "./gateValue.ts";
 import { lineOf } from "./line.ts";
@@ -18,11 +19,6 @@ const WIDE = 1e-3;
 const PARTS = 256;
 /** Above the roundings of a half width and a product. */
 const SLACK = 1 + 1e-15;
-
-/** A curve whose gate may turn out not to be monotone: then `set` says so. */
-export interface GateCurve extends Omit<Curve, "set"> {
-  set(givens: readonly number[], between: Range): boolean;
-}
 
 /** The nodes of a gate's curve. */
 export interface GateNodes {
@@ -59,7 +55,7 @@ function feedbackOn(loop: Loop, { offset, slope }: Gate, curve: number): number 
 }
 
 /** Prepares the curve along a given; undefined where the budget has no gate. */
-export function gateCurve(loop: Loop, along: string): GateCurve | undefined {
+export function gateCurve(loop: Loop, along: string): Curve | undefined {
   const nodes = gateNodes(loop, along);
   if (!nodes) return undefined;
   const { graph } = loop;
@@ -108,8 +104,9 @@ export function gateCurve(loop: Loop, along: string): GateCurve | undefined {
   };
   return {
     method: "line",
-    feedback,
-    kinks,
+    reachesBeyond: true,
+    signAt: (temperature) => signAt(feedback, temperature),
+    criticals: (range, effort) => criticalsOf({ feedback, kinks }, range, effort),
     set(givens, between) {
       point.set(givens, 1);
       feedback.values.set(givens, 1);

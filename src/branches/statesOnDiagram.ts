@@ -3,12 +3,10 @@ import { fail } from "../ground/errors.ts";
 import { checkedNumber, type Range } from "../ground/range.ts";
 import { givensAt } from "../loop/inputs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
-import { enumerateZeros } from "../search/enumerateZeros.ts";
 import { readerOf } from "../states/prepared.ts";
-import { locate } from "../states/provedSearch.ts";
 import type { State } from "../states/state.ts";
-import { balanceOf } from "./balanceOf.ts";
 import type { Branch, BranchEnd, Diagram } from "./diagram.ts";
+import { netReader } from "./netReader.ts";
 
 /** The states at one value of the parameter. */
 export interface StatesOnDiagram<N extends string = string> {
@@ -20,9 +18,6 @@ export interface StatesOnDiagram<N extends string = string> {
   /** True only if it is proved that there are no others in the diagram's range of temperature. */
   readonly complete: boolean;
 }
-
-/** What finding a state on its branch may cost, in boxes. */
-const EFFORT = 200;
 
 /**
  * The states of a loop at one value of a diagram's parameter: one on every branch whose range holds it, found between the
@@ -39,13 +34,11 @@ export function statesOnDiagram<N extends string>(
   if (diagram?.method === undefined || !Array.isArray(diagram.branches))
     fail("unreadable", { path: "diagram", value: diagram, allowed: "what traceBranches returned" });
   const value = checkedNumber(at, "at", diagram.unit, diagram.between);
-  const given = { ...diagram.fixed, [diagram.along]: value };
-  const givens = givensAt(loop, given);
   const inside = ([low, high]: Range) => low <= value && value <= high;
   const branches: number[] = [];
   const states: State<N>[] = [];
   diagram.branches.forEach((branch, i) => {
-    const state = inside(branch.parameters) ? stateOn(loop, branch, givens) : undefined;
+    const state = inside(branch.parameters) ? stateOn(loop, diagram, branch, value) : undefined;
     if (!state) return;
     states.push(state as State<N>);
     branches.push(i);
@@ -61,20 +54,17 @@ export function statesOnDiagram<N extends string>(
   });
 }
 
-/** The state of a branch at givens inside its range; undefined where it is not proved. */
-export function stateOn(loop: Loop, branch: Branch, givens: readonly number[]): State | undefined {
-  const balance = balanceOf(loop);
-  balance.set(givens, givens);
-  const { zeros } = enumerateZeros(balance.net, reachOf(branch), { effort: EFFORT });
-  return zeros.length === 1
-    ? readerOf(loop)(locate(balance, zeros[0] as (typeof zeros)[0]), givens)
-    : undefined;
-}
-
-/** The temperatures of a branch with the brackets of its ends, so that a state at an end is inside. */
-function reachOf({ low, high }: Branch): Range {
-  const [cool, warm] = low.temperature <= high.temperature ? [low, high] : [high, low];
-  return [cool.temperatureBracket[0], warm.temperatureBracket[1]];
+/** The state of a branch at a value of the diagram's parameter inside its range; undefined where it is not found. */
+export function stateOn(
+  loop: Loop,
+  { along, fixed }: Pick<Diagram, "along" | "fixed">,
+  branch: Branch,
+  at: number,
+): State | undefined {
+  const givens = givensAt(loop, { ...fixed, [along]: at });
+  const place = loop.givens.findIndex((g) => g.name === along);
+  const located = netReader(loop, place, givens).stateOn(branch, at);
+  return located && readerOf(loop)(located, givens);
 }
 
 /** The end of a branch in a direction. */

@@ -61,8 +61,7 @@ export function tippingMargins<N extends string>(
   });
   const index = branchAt(diagram, at, temperature);
   const branch = diagram.branches[index];
-  const givens = [...values.subarray(loop.variables.length)];
-  const here = branch && stateOn(loop, branch, givens);
+  const here = branch && stateOn(loop, diagram, branch, at);
   if (!here) {
     const allowed = "a state on a branch that is decided";
     return fail("foreign-state", { path: "state", value: temperature, allowed, unit: "K" });
@@ -71,12 +70,11 @@ export function tippingMargins<N extends string>(
     const end = endOf(branch, direction);
     const jump = diagram.jumps.find((j) => j.from === index && j.direction === direction) ?? null;
     const target = diagram.branches[jump?.to?.branch ?? -1];
-    const there = givens.map((value, i) => (loop.givens[i]?.name === name ? end.at : value));
     const distance = Math.abs(end.at - at);
     return Object.freeze({
       ...{ direction, end, distance, jump },
       relative: at === 0 ? null : distance / Math.abs(at),
-      after: target ? ((stateOn(loop, target, there) ?? null) as State<N> | null) : null,
+      after: target ? ((stateOn(loop, diagram, target, end.at) ?? null) as State<N> | null) : null,
       way: Object.freeze(wayTo(branch, here, { at, direction })),
       time: until && at > 0 && end.at > at ? until(end.at / at) : null,
     });
@@ -85,7 +83,7 @@ export function tippingMargins<N extends string>(
     ...{ along: options.along, unit: given.unit, at, temperature, stability: branch.stability },
     rise: margin("rise"),
     fall: margin("fall"),
-    basin: branch.stability === "stable" ? basinOf(loop, diagram, { index, at, givens }) : null,
+    basin: branch.stability === "stable" ? basinOf(loop, diagram, { index, at }) : null,
     fixed: diagram.fixed,
     held: heldText(loop, name, diagram.fixed),
     within: diagram.within,
@@ -137,14 +135,15 @@ function wayTo(
 /** The nearest states on both sides at the same givens: between a stable state and the next there is nothing. */
 function basinOf(
   loop: Loop,
-  { branches }: Diagram,
-  { index, at, givens }: { index: number; at: number; givens: readonly number[] },
+  diagram: Diagram,
+  { index, at }: { index: number; at: number },
 ): TippingMargins["basin"] {
+  const { branches } = diagram;
   const next = (side: 1 | -1): number | null => {
     for (let i = index + side; i >= 0 && i < branches.length; i += side) {
       const branch = branches[i] as Branch;
       if (branch.parameters[0] <= at && at <= branch.parameters[1])
-        return stateOn(loop, branch, givens)?.temperature ?? null;
+        return stateOn(loop, diagram, branch, at)?.temperature ?? null;
     }
     return null;
   };

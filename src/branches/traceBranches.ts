@@ -9,7 +9,12 @@ import type { Curve } from "./curve.ts";
 import type { Diagram } from "./diagram.ts";
 import { diagramOf, type Task } from "./diagramOf.ts";
 import { gateCurve } from "./gateCurve.ts";
+import { impliedCurve } from "./impliedCurve.ts";
 import { kept } from "./kept.ts";
+import { netReader } from "./netReader.ts";
+import { partsInColumns } from "./partsInColumns.ts";
+import { partsOnCurve } from "./partsOnCurve.ts";
+import { sampledCurve } from "./sampledCurve.ts";
 
 /** Along which parameter, where to look, and how hard. */
 export interface TraceBranchesOptions<N extends string = string> {
@@ -27,7 +32,9 @@ export interface TraceBranchesOptions<N extends string = string> {
   readonly tolerance?: number;
 }
 
-const curves = /* @__PURE__ */ kept((loop, along) => gateCurve(loop, along));
+const lines = /* @__PURE__ */ kept(gateCurve);
+const implied = /* @__PURE__ */ kept(impliedCurve);
+const sampled = /* @__PURE__ */ kept(sampledCurve);
 
 /**
  * The complete diagram of temperature against one given: every branch with its stability and ranges, every fold and corner
@@ -57,16 +64,21 @@ export function traceBranches<N extends string>(
   const within = checkedRange(options.within, "within", "K", loop.variables[0]?.within);
   const between = checkedRange(options.between, "between", given.unit, given.within);
   const task: Task = {
-    ...{ name, place, within, between, givens: givensAt(loop, options.at) },
+    ...{ name, place: place - loop.variables.length, within, between, givens: givensAt(loop, options.at) },
     effort: checkedNumber(options.effort ?? 20_000, "effort", "1", [10, 1e9]),
     tolerance: checkedNumber(options.tolerance ?? 0.002, "tolerance", "1", [1e-6, 1]),
   };
-  return diagramOf(loop, preparedCurve(loop, task), task) as Diagram<Givens<N>>;
+  const net = netReader(loop, task.place, task.givens);
+  const curve = curveOf(loop, task);
+  const parts = curve ? partsOnCurve(curve, task, net) : partsInColumns(loop, task, net);
+  return diagramOf(loop, task, net, parts) as Diagram<Givens<N>>;
 }
 
-/** The curve of a loop, its givens set. */
-function preparedCurve(loop: Loop, { name, givens, between }: Task): Curve {
-  const line = curves(loop, name);
-  if (line?.set(givens, between)) return line;
-  throw new Error("no curve");
+/** The first kind of curve that the loop is proved to have, its givens set. */
+function curveOf(loop: Loop, { name, givens, between, within }: Task): Curve | undefined {
+  for (const make of loop.sampled ? [sampled] : [lines, implied]) {
+    const curve = make(loop, name);
+    if (curve?.set(givens, between, within)) return curve;
+  }
+  return undefined;
 }

@@ -38,10 +38,26 @@ export function criticalDoubt({ kind, bracket }: Critical, parameters: Range): U
   return { temperatures: bracket, parameters, kind: ON_THE_CURVE[kind] };
 }
 
-/** The note of a search that stopped before its end. */
-export function stoppedNote(undecided: readonly UndecidedStretch[]): Note[] {
-  if (!undecided.some((u) => u.kind === "effort")) return [];
-  const text = "the effort was spent before the ranges were searched";
-  const rest = { about: "traceBranches", value: null, range: null, unit: "1", text, source: null };
-  return [Object.freeze({ code: "search-stopped", severity: "caution", ...rest } as const)];
+/** The notes of a diagram: that its search stopped, that it is sampled. */
+export function diagramNotes(sampled: boolean, undecided: readonly UndecidedStretch[]): Note[] {
+  const note = (code: Note["code"], severity: Note["severity"], text: string): Note =>
+    Object.freeze({
+      code,
+      severity,
+      about: "traceBranches",
+      value: null,
+      range: null,
+      unit: "1",
+      text,
+      source: null,
+    });
+  const notes: Note[] = [];
+  if (sampled) {
+    const text = "found by sampling: branches and folds may be missing";
+    notes.push(note("sampled-search", "caution", text));
+  }
+  if (undecided.some((u) => u.kind === "effort")) {
+    notes.push(note("search-stopped", "caution", "the effort was spent before the ranges were searched"));
+  }
+  return notes;
 }

@@ -1,0 +1,105 @@
+// The parts of a diagram without a curve: states in columns of one parameter each, joined where their number is constant.
+import type { Range } from "../ground/range.ts";
+import type { Loop } from "../loop/types.ts";
+import { proveCount } from "../states/proveCount.ts";
+import { fixedGivens, type Parts, type Task } from "./diagramOf.ts";
+import { type Change, type Column, joinColumns } from "./joinColumns.ts";
+import type { NetReader } from "./netReader.ts";
+import { passageOf } from "./passage.ts";
+
+/** A stretch of parameters with a number of states; `null` where it is not known. */
+interface Stretch {
+  readonly parameters: Range;
+  readonly count: number | null;
+}
+
+const COLUMNS = 33;
+const SAMPLES = 200;
+/** What the states of one column may cost. */
+const COLUMN_EFFORT = 2000;
+
+/**
+ * Proves the number of states over tiles of the parameter's range (or samples it, for a loop that cannot be enclosed) and
+ * joins the states of each tile into branches: where their number is proved they never meet, so they keep their order. In
+ * the narrow stretches between, a fold or a state that leaves the range is proved, or the stretch is undecided.
+ */
+export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
+  const { within, givens } = task;
+  const { stretches, cost } = loop.sampled ? sampledStretches(task, net) : provedStretches(loop, task);
+  const columnAt = (at: number): Column => {
+    const { zeros, boxes, points } = net.enumerate(at, within, COLUMN_EFFORT);
+    cost.boxes += boxes;
+    cost.points += points;
+    const states = zeros.map(({ at: temperature, slopeSign: sign }) => {
+      return { at, temperature, feedbackParameter: net.feedback(at, temperature), sign };
+    });
+    return { at, states };
+  };
+  const groups = stretches.flatMap(({ parameters, count }) => {
+    if (count === null) return [];
+    const columns = placesIn(parameters).map(columnAt);
+    return [columns.filter((c) => c.states.length === count)].filter((group) => group.length > 0);
+  });
+  const proved = new Set<number>();
+  const endOf = (change: Change) => {
+    const end = loop.sampled
+      ? sampledEnd(change, within)
+      : passageOf(loop, task.name)({ ...change, within, givens });
+    if (end) proved.add(change.parameters[0]);
+    return end;
+  };
+  const { branches, folds } = joinColumns(groups, endOf);
+  const undecided = stretches
+    .filter(({ count, parameters }) => count === null && !proved.has(parameters[0]))
+    .map(({ parameters }) => ({ temperatures: within, parameters, kind: "count" as const }));
+  return { method: loop.sampled ? "samples" : "tiles", branches, folds, undecided, cost };
+}
+
+function provedStretches(loop: Loop, { name, givens, between, within, effort }: Task) {
+  const at = fixedGivens(loop, name, givens);
+  const { tiles, cost } = proveCount(loop, { within, over: { [name]: between }, at, effort });
+  const stretches = tiles.map(({ over, count }): Stretch => ({ parameters: over[name] as Range, count }));
+  return { stretches, cost: { ...cost } };
+}
+
+function sampledStretches({ between: [low, high], within }: Task, net: NetReader) {
+  const cost = { boxes: 0, points: 0 };
+  const stretches: Stretch[] = [];
+  for (let i = 0; i <= SAMPLES; i++) {
+    const at = i === SAMPLES ? high : low + ((high - low) * i) / SAMPLES;
+    const { zeros, points } = net.enumerate(at, within, COLUMN_EFFORT);
+    cost.points += points;
+    const last = stretches.at(-1);
+    if (last?.count === zeros.length)
+      stretches[stretches.length - 1] = { ...last, parameters: [last.parameters[0], at] };
+    else {
+      if (last) stretches.push({ parameters: [last.parameters[1], at], count: null });
+      stretches.push({ parameters: [at, at], count: zeros.length });
+    }
+  }
+  return { stretches, cost };
+}
+
+/** What two samples tell: two states meet somewhere between, one leaves the range. */
+function sampledEnd({ parameters, temperatures }: Change, within: Range) {
+  const [first, second] = temperatures as [number, number?];
+  const at = parameters[0] + (parameters[1] - parameters[0]) / 2;
+  const edge = first - within[0] < within[1] - first ? within[0] : within[1];
+  const [low, high] = second === undefined ? [Math.min(first, edge), Math.max(first, edge)] : [first, second];
+  return Object.freeze({
+    kind: second === undefined ? ("within" as const) : ("fold" as const),
+    ...{ at, atBracket: Object.freeze(parameters) },
+    temperature: second === undefined ? edge : (first + second) / 2,
+    temperatureBracket: Object.freeze([low, high] as const),
+  });
+}
+
+/** Places in a stretch, closer together towards its ends, where branches are steep. */
+function placesIn([low, high]: Range): number[] {
+  if (low === high) return [low];
+  return Array.from({ length: COLUMNS }, (_, i) => {
+    const s = (2 * i) / (COLUMNS - 1) - 1;
+    const share = 0.5 + (s * (3 - s * s)) / 4;
+    return i === COLUMNS - 1 ? high : low + (high - low) * share;
+  });
+}

@@ -3,6 +3,18 @@ export { mixAlbedo } from "./albedo/mixAlbedo.ts";
 export { quadraticAlbedo } from "./albedo/quadraticAlbedo.ts";
 export { rampAlbedo } from "./albedo/rampAlbedo.ts";
 export { tanhAlbedo } from "./albedo/tanhAlbedo.ts";
+export { type AnalyseFeedbacksOptions, analyseFeedbacks } from "./feedback/analyseFeedbacks.ts";
+export { type AssessedNames, assessedLoop } from "./feedback/assessedLoop.ts";
+export {
+  type AssessedResponse,
+  type AssessedResponseOptions,
+  assessedResponse,
+} from "./feedback/assessedResponse.ts";
+export { AR6_FEEDBACKS, type Estimate, type FeedbackAssessment } from "./feedback/assessment.ts";
+export { type CompareHeldOptions, compareHeld } from "./feedback/compareHeld.ts";
+export type { FeedbackNote, FeedbackNoteCode } from "./feedback/feedbackNote.ts";
+export type { DisturbanceTimes, FeedbackLoop, FeedbackPart, Feedbacks } from "./feedback/feedbacks.ts";
+export type { BranchLoss, HeldComparison, HeldResponse, PathPlace } from "./feedback/heldComparison.ts";
 export type { LawCard, ListPort, Port, Ports } from "./graph/card.ts";
 export {
   add,
@@ -47,8 +59,10 @@ export { defineLaw } from "./law/defineLaw.ts";
 export { type SampledLawSpec, sampledLaw } from "./law/sampledLaw.ts";
 export { type Slopes, slopesOf } from "./law/slopesOf.ts";
 export type { Body, Law, LawDemand, LawFacts, LawSpec, NumberBody, Wires } from "./law/types.ts";
+export type { StateLike } from "./loop/checkBelongs.ts";
 export { closeLoop } from "./loop/closeLoop.ts";
 export { type FormulaOptions, formulaOf, type LoopFormula } from "./loop/formulaOf.ts";
+export { holdFixed } from "./loop/holdFixed.ts";
 export { type LawSource, sourcesOf } from "./loop/sourcesOf.ts";
 export type { Budget, Couplings, Flow, Givens, Loop, Named, Tools, Variables } from "./loop/types.ts";
 export { orbitMeanFlux } from "./orbit/orbitMeanFlux.ts";

@@ -4,7 +4,7 @@ import type { Couplings, Givens } from "../loop/types.ts";
 import type { FeedbackNote } from "./feedbackNote.ts";
 
 /** How a small disturbance goes on, s. Both are `null` where λ is 0 or not told from 0, or the heat capacity is below 0. */
-export interface Fate {
+export interface DisturbanceTimes {
   /** −C/λ: the time in which it falls to 1/e; `null` if it does not fall. */
   readonly eFoldingTime: number | null;
   /** C/λ: the time in which it grows by e; `null` if it does not grow. */
@@ -28,11 +28,11 @@ export interface FeedbackLoop<N extends string = string> extends FeedbackPart {
   /** `amplifies` (λ_i > 0) a disturbance, `counters` (λ_i < 0) it, or `none` (λ_i = 0). */
   readonly effect: "amplifies" | "counters" | "none";
   /** The state as it would be without this loop: λ − λ_i. */
-  readonly without: Fate & { readonly feedbackParameter: number };
+  readonly without: DisturbanceTimes & { readonly feedbackParameter: number };
 }
 
 /** The feedbacks that act in a state. A plain frozen object: it survives `JSON.stringify` and back. */
-export interface Feedbacks<N extends string = string> extends Fate {
+export interface Feedbacks<N extends string = string> extends DisturbanceTimes {
   /** K. */
   readonly temperature: number;
   readonly givens: { readonly [K in Givens<N>]: number };

@@ -4,7 +4,7 @@ import type { Taken } from "../loop/checkBelongs.ts";
 import type { Loop } from "../loop/types.ts";
 import { type Bounds, differenceOf, excludesZero } from "./bounds.ts";
 import { notesOf } from "./feedbackNotes.ts";
-import type { Fate, FeedbackLoop, FeedbackPart, Feedbacks } from "./feedbacks.ts";
+import type { DisturbanceTimes, FeedbackLoop, FeedbackPart, Feedbacks } from "./feedbacks.ts";
 import type { Bounded, Influences } from "./influences.ts";
 import type { ReferenceName } from "./referenceResponse.ts";
 import { strongestPaths } from "./strongestPaths.ts";
@@ -40,7 +40,7 @@ export function writeFeedbacks<N extends string>(
   const partOf = partWriter(reference);
   const size = paths.strongest.reduce((sum, p) => sum + Math.abs(p.value), Math.abs(reference.value));
   const isKnown = signKnown(total, SLOPE_NOISE * size);
-  const fateOf = (lambda: Bounded) => fate(lambda, heatCapacity, SLOPE_NOISE * size);
+  const timesOf = (lambda: Bounded) => disturbanceTimes(lambda, heatCapacity, SLOPE_NOISE * size);
   const loops = paths.strongest.map((path): FeedbackLoop<N> => {
     const rest = {
       value: total.value - path.value,
@@ -50,7 +50,7 @@ export function writeFeedbacks<N extends string>(
       through: Object.freeze(path.through.map((place) => chosen[place - 1] as string)) as never,
       ...partOf(path),
       effect: path.value > 0 ? "amplifies" : path.value < 0 ? "counters" : "none",
-      without: Object.freeze({ feedbackParameter: rest.value, ...fateOf(rest) }),
+      without: Object.freeze({ feedbackParameter: rest.value, ...timesOf(rest) }),
     });
   });
   const others = othersOf(total, [reference, ...paths.strongest], paths.count - loops.length, partOf);
@@ -82,7 +82,7 @@ export function writeFeedbacks<N extends string>(
       const flux = influences.givens[i] as number;
       return Object.freeze({ flux, temperature: isKnown ? 0 - flux / total.value : null, unit });
     }) as Feedbacks<N>["responses"],
-    ...fateOf(total),
+    ...timesOf(total),
     proved: isKnown && !loop.sampled,
     notes: Object.freeze(
       notesOf(loop, { reference, total, isKnown, count: paths.count, listed: loops.length }),
@@ -115,7 +115,7 @@ function othersOf(
 const signKnown = ({ value, bounds }: Bounded, noise: number): boolean =>
   bounds ? excludesZero(bounds) : Math.abs(value) > noise;
 
-function fate(lambda: Bounded, heatCapacity: number, noise: number): Fate {
+function disturbanceTimes(lambda: Bounded, heatCapacity: number, noise: number): DisturbanceTimes {
   if (!(heatCapacity >= 0) || !signKnown(lambda, noise)) return { eFoldingTime: null, growthTime: null };
   const time = heatCapacity / Math.abs(lambda.value);
   return lambda.value < 0

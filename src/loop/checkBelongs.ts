@@ -65,9 +65,8 @@ export function checkBelongs<N extends string>(loop: Loop<N>, state: StateLike<N
   if (outside)
     fail("foreign-state", {
       path,
-      value: `a balance from ${outside[0]} to ${outside[1]}`,
+      value: `a balance of ${outside.map((x) => x.toPrecision(6)).join(" to ")} W m-2`,
       allowed: "an equilibrium of this loop at the state's givens",
-      unit: "W m-2",
     });
   return taken;
 }

@@ -3,6 +3,8 @@ export { mixAlbedo } from "./albedo/mixAlbedo.ts";
 export { quadraticAlbedo } from "./albedo/quadraticAlbedo.ts";
 export { rampAlbedo } from "./albedo/rampAlbedo.ts";
 export { tanhAlbedo } from "./albedo/tanhAlbedo.ts";
+export { parabolicCover } from "./biosphere/parabolicCover.ts";
+export { steadyCover } from "./biosphere/steadyCover.ts";
 export { type AnalyseFeedbacksOptions, analyseFeedbacks } from "./feedback/analyseFeedbacks.ts";
 export { type AssessedNames, assessedLoop } from "./feedback/assessedLoop.ts";
 export {

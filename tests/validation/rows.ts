@@ -1,5 +1,6 @@
 // Every comparison with the outside.
 import { albedoRows } from "./albedo.rows.ts";
+import { biosphereRows } from "./biosphere.rows.ts";
 import { budgetRows } from "./budgets.rows.ts";
 import type { Check } from "./check.ts";
 import { constantRows } from "./constants.rows.ts";
@@ -22,6 +23,7 @@ export const subjects: Readonly<Record<string, readonly Check[]>> = {
   Albedo: albedoRows,
   Longwave: longwaveRows,
   "Heat capacity": heatRows,
+  Plants: biosphereRows,
   "Equilibria of published budgets": budgetRows,
 };
 

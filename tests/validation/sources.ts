@@ -122,6 +122,12 @@ export const BUDYKO = source(
   "The effect of solar radiation variations on the climate of the Earth, Tellus 21, 611",
   "ice at 72°, albedos 0.32 and 0.62",
 );
+export const WATSON_LOVELOCK = source(
+  "Watson & Lovelock",
+  "1983",
+  "Biological homeostasis of the global environment, Tellus 35B, 284",
+  "the parabola of growth, 22.5 °C, 0.003265, death rate 0.3",
+);
 export const NORTH = source(
   "North, Cahalan & Coakley",
   "1981",

@@ -5,7 +5,7 @@ set -e
 cd "$(dirname "$0")"
 python=${PYTHON:-/usr/bin/python3}
 for script in constants orbit_means planck_flux grey_columns oblate albedo_forms published_budgets exoplanets \
-  layer_ledgers ramp_tables state_tables; do
+  layer_ledgers ramp_tables state_tables cover_tables; do
   "$python" "$script.py"
 done
 cd ../../..

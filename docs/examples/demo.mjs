@@ -1,7 +1,14 @@
 // The climate of a described planet on one screen, from the packages as users import them.
 //   node docs/examples/demo.mjs [description.json] [--json]
 import fs from "node:fs";
-import { findStates, formulaOf, sourcesOf, ThermosteadError } from "thermostead";
+import {
+  analyseFeedbacks,
+  findStates,
+  formulaOf,
+  sourcesOf,
+  ThermosteadError,
+  tippingMargins,
+} from "thermostead";
 import { readPlanet } from "thermostead/planet";
 import { pageOf } from "./page.mjs";
 
@@ -12,15 +19,30 @@ const within = [50, 1000];
 function climateOf(description) {
   const planet = readPlanet(description);
   const found = findStates(planet.loop, { within });
-  const warmest = found.states.filter((state) => state.stability === "stable").at(-1);
+  const stable = found.states.filter((state) => state.stability === "stable");
+  const warmest = stable.at(-1);
   return {
     planet,
     found,
+    feedbacks: stable.map((state) => analyseFeedbacks(planet.loop, state)),
+    margins: marginsOf(planet, stable),
     formula: formulaOf(planet.loop),
     sources: sourcesOf(planet.loop),
     fixed:
       planet.assumptions.albedo === null && warmest ? withAlbedo(description, warmest.report.albedo) : null,
   };
+}
+
+/** How far each stable state is from the end of its branch as the star brightens or fades between a fifth and five times. */
+function marginsOf({ loop, inputs, description }, states) {
+  const valueOf = (path) => inputs.find((input) => input.path === path)?.value;
+  const along = ["star.luminosity", "orbit.flux"].find((name) => loop.givens.some((g) => g.name === name));
+  if (!along) return [];
+  const now = valueOf(along);
+  const rate = valueOf("star.brightening");
+  const options = { along, within, between: [now / 5, now * 5] };
+  if (description.star?.brightening !== undefined) options.brightening = { rate };
+  return states.map((state) => tippingMargins(loop, state, options));
 }
 
 /** The same planet with its albedo a plain number: it cannot answer to the climate. */

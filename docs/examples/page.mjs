@@ -4,7 +4,7 @@ const WIDTH = 80;
 const YEAR = 365.25 * 86400;
 
 /** The whole page. */
-export function pageOf({ planet, found, sources, fixed }) {
+export function pageOf({ planet, found, feedbacks, margins, sources, fixed }) {
   const { description } = planet;
   const star = description.star?.name ? `, a planet of ${description.star.name}` : "";
   const stable = found.states.filter((state) => state.stability === "stable");
@@ -15,6 +15,12 @@ export function pageOf({ planet, found, sources, fixed }) {
     ...section("Starlight", starlightLines(planet)),
     ...section(`States with the surface between ${found.within.join(" K and ")} K`, stateLines(found)),
     ...(stable.length > 0 ? section("Ledger of each stable state, W m-2", ledgerLines(stable)) : []),
+    ...(feedbacks.length > 0
+      ? section("What holds each stable state, W m-2 K-1", feedbackLines(feedbacks))
+      : []),
+    ...(margins.length > 0
+      ? section(`Where each branch ends, along ${margins[0].along}`, marginLines(margins))
+      : []),
     ...(fixed ? section("The same planet with its albedo a plain number", fixedLines(fixed)) : []),
     ...section("Notes", noteLines(planet, found)),
     ...section("Sources", sourceLines(planet, sources)),
@@ -102,10 +108,13 @@ function stateLines(found) {
   return [...table([head, units, ...rows], [0, 2, 3, 4, 5]), ...searchLines(found)];
 }
 
-function searchLines({ proof, complete, undecided }) {
-  const sure = complete ? "no other state in this range" : "more may exist";
+function searchLines({ proof, complete, undecided, within }) {
+  const range = `between ${within.join(" and ")} K`;
+  const said = complete
+    ? `proved: no other state ${range}`
+    : `${proof}: other states ${range} may exist; undecided stretches: ${undecided.length}`;
   return [
-    `search: ${proof}; ${sure}; undecided: ${undecided.length === 0 ? "nothing" : undecided.length}`,
+    said,
     ...undecided.map(
       ({ kind, interval }) => `  ${kind} between ${interval.map((t) => shown(t)).join(" and ")} K`,
     ),
@@ -138,6 +147,45 @@ function ledgerLines(states) {
   ];
   const right = states.map((_, i) => i + 2);
   return table([head, ...flows, ...sums], right);
+}
+
+/** λ of each state as the sum of its parts. */
+function feedbackLines(feedbacks) {
+  const signed = (value) => `${value < 0 ? "-" : "+"}${Math.abs(value).toFixed(3)}`;
+  const rows = feedbacks.flatMap(({ temperature, feedbackParameter, reference, loops, gain }) => [
+    [`at ${temperature.toFixed(2)} K`, reference.kind, signed(reference.feedbackParameter), ""],
+    ...loops.map((loop) => [
+      "",
+      loop.through.join(" to "),
+      signed(loop.feedbackParameter),
+      `${loop.effect}${loop.feedbackFactor === null ? "" : `, f = ${loop.feedbackFactor.toFixed(4)}`}`,
+    ]),
+    ["", "lambda", signed(feedbackParameter), gain === null ? "" : `gain ${gain.toFixed(3)}`],
+  ]);
+  return table(rows, [2]);
+}
+
+/** How far the star may brighten or fade before a state is lost, what comes then, and whether there is a way back. */
+function marginLines(margins) {
+  const lines = margins.flatMap((margin) =>
+    [margin.rise, margin.fall].map((side) => {
+      const { direction, end, relative, jump, time } = side;
+      const way = `${direction === "rise" ? "+" : "-"}${(100 * relative).toFixed(2)} %`;
+      const start = `at ${margin.temperature.toFixed(2)} K, ${direction} by ${way}:`;
+      if (!jump) return `${start} no end of the branch in the searched range`;
+      const next = jump.to
+        ? `jumps to ${jump.to.temperature.toFixed(2)} K`
+        : `leaves the range, ${jump.leaves}`;
+      const years = time === null ? "" : `, in ${(time / (1e9 * YEAR)).toFixed(2)} Gyr`;
+      const back =
+        jump.returnsAt === null ? "no return" : `returns at ${shown(jump.returnsAt / margin.at)} of today`;
+      return `${start} ${end.kind} at ${end.temperature.toFixed(2)} K${years}; ${next}; ${back}`;
+    }),
+  );
+  const [{ proof, at, unit }] = margins;
+  return [...lines, `today ${shown(at)} ${unit}; all else fixed; diagram: ${proof}`].flatMap((l) =>
+    wrapped(l, 2),
+  );
 }
 
 function fixedLines({ albedo, planet, found }) {

@@ -29,6 +29,12 @@ export const STAR_PORTS = {
     about: "effective temperature of the star",
   },
   mass: { ...semiMajorAxis.card.inputs.mass, about: "mass of the star" },
+  brightening: {
+    symbol: "(dL/dt)/L",
+    unit: "s-1",
+    within: [-1e-13, 1e-13],
+    about: "share of its luminosity by which the star brightens in a unit of time; for margins in time",
+  },
 } as const;
 
 /** Fields of `orbit`. */

@@ -30,6 +30,7 @@ const star = strictObject({
   radius: optional(measuredSchema(STAR_PORTS.radius)),
   effectiveTemperature: optional(measuredSchema(STAR_PORTS.effectiveTemperature)),
   mass: optional(measuredSchema(STAR_PORTS.mass)),
+  brightening: optional(measuredSchema(STAR_PORTS.brightening)),
 });
 
 const orbit = strictObject({

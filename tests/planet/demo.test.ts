@@ -32,17 +32,24 @@ describe("the page", () => {
   });
   it.each([
     ["inputs with units", /orbit\.semiMajorAxis +0\.46 au/],
-    ["the flux", /stellar flux S = 1289\.7 W m-2/],
+    ["the flux", /stellar flux S = 1290\.7 W m-2/],
     ["the redistribution", /f = 0\.25/],
-    ["the icy state", /^ +245\.9\d+ +stable .* 0\.61\d+ +216\.19$/m],
+    ["the icy state", /^ +245\.9\d+ +stable .* 0\.61\d+ +216\.23$/m],
     ["the unstable state", /^ +263\.\d+ +unstable /m],
     ["the temperate state", /^ +287\.\d+ +stable /m],
     ["what the equilibrium temperature is not", /not surface/],
     ["the ledger of each stable state", /sunlight +space to surface +123\.\d+ +231\.\d+/],
     [
       "the albedo as a number, with one state",
-      /plain number\n.*\n +surface 287\.508 K, stable.*\n +equilibrium/,
+      /plain number\n.*\n +surface 287\.567 K, stable.*\n +equilibrium/,
     ],
+    ["the proof", /proved: no other state between 50 and 1000 K/],
+    ["what holds each state", /at 246\.00 K +Planck response +-2\.016\n +albedo +\+0\.279 +amplifies/],
+    [
+      "the end of the icy branch and when",
+      /rise by \+8\.99 %: fold at 255\.81 K, in 2\.00 Gyr; jumps to 294\.04/,
+    ],
+    ["the way back", /returns at 0\.88104 of today/],
     ["notes", /^Notes$/m],
     ["sources", /tanhAlbedo: Kaper & Engler 2013/],
     ["what it is", /screening estimates from a zero-dimensional model/],

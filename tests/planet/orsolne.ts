@@ -1,10 +1,10 @@
-// The example planet, as a fresh object that a test may change.
+// A planet of an invented star that is known by radius and temperature, as a fresh object that a test may change.
 import fs from "node:fs";
 import type { PlanetDescription } from "../../src/planet/planetShape.ts";
 
 type Loose<T> = T extends object ? { -readonly [K in keyof T]: Loose<T[K]> } : T;
 
-const text = fs.readFileSync(new URL("../../docs/examples/orsolne.json", import.meta.url), "utf8");
+const text = fs.readFileSync(new URL("orsolne.json", import.meta.url), "utf8");
 
 /** A description that can be written to. */
 export const orsolne = (): Loose<PlanetDescription> => JSON.parse(text);

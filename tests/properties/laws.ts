@@ -49,6 +49,8 @@ const USUAL_PORTS: Readonly<Record<string, readonly [number, number]>> = {
   opticalDepth: [0.01, 50],
   effectiveTemperature: [150, 7000],
   radius: [1e8, 1e10],
+  // inside the ends of its range, so that differences can be taken on both sides
+  redistribution: [0.26, 0.95],
 };
 
 /** Numbers for a port where laws are used. */

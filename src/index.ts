@@ -5,6 +5,29 @@ export { rampAlbedo } from "./albedo/rampAlbedo.ts";
 export { tanhAlbedo } from "./albedo/tanhAlbedo.ts";
 export { parabolicCover } from "./biosphere/parabolicCover.ts";
 export { steadyCover } from "./biosphere/steadyCover.ts";
+export type {
+  Brightening,
+  SteadyBrightening,
+  SunlikeBrightening,
+  TabledBrightening,
+} from "./branches/brightening.ts";
+export type {
+  Branch,
+  BranchEnd,
+  BranchPoint,
+  Diagram,
+  Fold,
+  Gap,
+  Jump,
+  UndecidedStretch,
+} from "./branches/diagram.ts";
+export { type FollowedState, type FollowStateOptions, followState } from "./branches/followState.ts";
+export type { Margin, TippingMargins, TippingMarginsOptions } from "./branches/margins.ts";
+export type { Solution, Solutions } from "./branches/solutions.ts";
+export { type SolveForOptions, solveFor } from "./branches/solveFor.ts";
+export { type StatesOnDiagram, statesOnDiagram } from "./branches/statesOnDiagram.ts";
+export { tippingMargins } from "./branches/tippingMargins.ts";
+export { type TraceBranchesOptions, traceBranches } from "./branches/traceBranches.ts";
 export { type AnalyseFeedbacksOptions, analyseFeedbacks } from "./feedback/analyseFeedbacks.ts";
 export { type AssessedNames, assessedLoop } from "./feedback/assessedLoop.ts";
 export {
@@ -72,6 +95,7 @@ export { semiMajorAxis } from "./orbit/semiMajorAxis.ts";
 export { temperatureMeanFlux } from "./orbit/temperatureMeanFlux.ts";
 export { absorbedFlux } from "./star/absorbedFlux.ts";
 export { localAbsorbedFlux } from "./star/localAbsorbedFlux.ts";
+export { stellarBrightening } from "./star/stellarBrightening.ts";
 export { stellarFlux } from "./star/stellarFlux.ts";
 export { stellarLuminosity } from "./star/stellarLuminosity.ts";
 export { type FindStatesOptions, findStates } from "./states/findStates.ts";

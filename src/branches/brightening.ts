@@ -2,7 +2,7 @@
 import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber } from "../ground/range.ts";
-import { SOLAR_AGE, SOLAR_PACE, stellarBrightening } from "../star/stellarBrightening.ts";
+import { SOLAR_AGE, SOLAR_MASS, SOLAR_PACE, stellarBrightening } from "../star/stellarBrightening.ts";
 
 /** The history of the Sun (Gough 1981), for stars of 0.9 to 1.1 solar masses. */
 export interface SunlikeBrightening {
@@ -49,7 +49,12 @@ export function timeUntil(brightening: Brightening): TimeUntil {
 function sunlike(brightening: SunlikeBrightening): TimeUntil {
   checkKeys(brightening, "brightening", ["mass", "age"]);
   const { mass, age = SOLAR_AGE } = brightening;
-  const now = 1 / stellarBrightening({ age, mass: checkedNumber(mass, "brightening.mass", "kg") });
+  const suns = checkedNumber(mass, "brightening.mass", "kg") / SOLAR_MASS;
+  if (!(suns >= 0.9 && suns <= 1.1)) {
+    const allowed = "0.9 to 1.1 solar masses: the history is the Sun's, another star needs a rate or a table";
+    fail("out-of-range", { path: "brightening.mass", value: mass, allowed });
+  }
+  const now = 1 / stellarBrightening({ age });
   return (factor) => ((now - now / factor) / SOLAR_PACE) * SOLAR_AGE;
 }
 

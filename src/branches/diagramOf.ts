@@ -3,6 +3,7 @@ import { CONSTANT_SET } from "../ground/constants.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Branch, Diagram, Fold, UndecidedStretch } from "./diagram.ts";
+import { fixedGivens } from "./fixedGivens.ts";
 import { gapsOf } from "./gapsOf.ts";
 import { jumpsOf } from "./jumpsOf.ts";
 import type { NetReader } from "./netReader.ts";
@@ -54,11 +55,3 @@ export function diagramOf(loop: Loop, task: Task, net: NetReader, parts: Parts):
     constants: CONSTANT_SET,
   });
 }
-
-/** The givens besides one, and their values. */
-export const fixedGivens = (loop: Loop, name: string, givens: readonly number[]) =>
-  Object.freeze(
-    Object.fromEntries(
-      loop.givens.flatMap((g, i) => (g.name === name ? [] : [[g.name, givens[i] as number]])),
-    ),
-  );

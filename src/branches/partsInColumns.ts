@@ -2,7 +2,8 @@
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import { proveCount } from "../states/proveCount.ts";
-import { fixedGivens, type Parts, type Task } from "./diagramOf.ts";
+import type { Parts, Task } from "./diagramOf.ts";
+import { fixedGivens } from "./fixedGivens.ts";
 import { type Change, type Column, joinColumns } from "./joinColumns.ts";
 import type { NetReader } from "./netReader.ts";
 import { passageOf } from "./passage.ts";

@@ -3,7 +3,7 @@ import { GRAVITATION, SOLAR_MASS_PARAMETER } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
 
 /** Mass of the Sun, kg, from the nominal mass parameter. */
-const SOLAR_MASS = SOLAR_MASS_PARAMETER / GRAVITATION;
+export const SOLAR_MASS = SOLAR_MASS_PARAMETER / GRAVITATION;
 /** Age of the Sun in the source, 4.57 × 10⁹ Julian years, s. */
 export const SOLAR_AGE = 4.57e9 * 31557600;
 /** Growth of 1/L over the age of the Sun. */
@@ -11,8 +11,8 @@ export const SOLAR_PACE = 0.4;
 
 /**
  * Luminosity of the Sun in its history, as a share of today's: L/L₀ = 1/(1 + 0.4·(1 − t/t₀)) with t₀ = 4.57 × 10⁹ years.
- * Age in s since the Sun began to burn hydrogen, between 0 and 15 × 10⁹ years; after today extrapolated. Mass in kg, the
- * Sun's unless said: a star outside of 0.9 to 1.1 solar masses brightens at another pace and is refused.
+ * Age in s since the Sun began to burn hydrogen, between 0 and 15 × 10⁹ years; after today extrapolated. It says nothing of a
+ * star of another mass, which brightens at another pace: `tippingMargins` refuses it outside of 0.9 to 1.1 solar masses.
  * Errors: as for every law. Source: Gough 1981, Solar Physics 74, 21, eq. 1.
  */
 export const stellarBrightening = /* @__PURE__ */ defineLaw({
@@ -21,16 +21,6 @@ export const stellarBrightening = /* @__PURE__ */ defineLaw({
   output: { symbol: "L/L_0", unit: "1" },
   inputs: {
     age: { symbol: "t", unit: "s", within: [0, 4.75e17] },
-    mass: { symbol: "M", unit: "kg", within: [0, 1e33], default: SOLAR_MASS },
-  },
-  demands: {
-    solarMasses: {
-      unit: "1",
-      within: [0.9, 1.1],
-      about:
-        "mass over that of the Sun, whose history this is; another star needs a rate or a table of its own",
-      write: ({ mass }) => div(mass, SOLAR_MASS),
-    },
   },
   published: { age: [0, SOLAR_AGE] },
   source: "Gough 1981, Solar Physics 74, 21",

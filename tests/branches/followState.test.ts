@@ -1,0 +1,83 @@
+// The state on the same branch at other givens.
+import { describe, expect, test } from "vitest";
+import { followState } from "../../src/branches/followState.ts";
+import { traceBranches } from "../../src/branches/traceBranches.ts";
+import * as core from "../../src/index.ts";
+import { iceLoop } from "../states/iceLoop.ts";
+import { sampledLoop, stateOf, vapourLoop } from "./loops.ts";
+
+const WITHIN = [150, 400] as const;
+
+describe("a state that is followed", () => {
+  const loop = iceLoop();
+  type State = ReturnType<typeof stateOf<NonNullable<(typeof loop)["names"]>>>;
+  const [cold, middle, warm] = [0, 1, 2].map((i) => stateOf(loop, i)) as [State, State, State];
+
+  test("is the state of its branch at the new givens", () => {
+    for (const flux of [1200, 1360.9, 1361, 1450, 1670]) {
+      const { states } = core.findStates(loop, { within: WITHIN, at: { flux } });
+      [cold, middle, warm].forEach((state, i) => {
+        const followed = followState(loop, state, { to: { flux } });
+        expect(followed).toMatchObject({ lost: null, proof: "proved" });
+        expect(followed.state?.stability).toBe(state.stability);
+        expect(followed.state?.temperature).toBeCloseTo(states[i]?.temperature as number, 10);
+        expect(followed.state?.givens).toEqual({ flux, emissivity: 0.6 });
+      });
+    }
+  });
+
+  test("is lost at the fold, and the jump is that of the diagram", () => {
+    const { folds, jumps } = traceBranches(loop, { along: "flux", between: [900, 1900], within: WITHIN });
+    const up = followState(loop, cold, { to: { flux: 1800 } });
+    expect(up).toMatchObject({ state: null, proof: "proved", lost: { reason: "fold", drift: "warms" } });
+    expect(up.lost?.givens.flux).toBeCloseTo(folds[0]?.at as number, 7);
+    expect(up.lost?.temperature).toBeCloseTo(folds[0]?.temperature as number, 6);
+    expect(up.lost?.next?.temperature).toBeCloseTo(jumps[0]?.to?.temperature as number, 5);
+    const down = followState(loop, warm, { to: { flux: 1000 } });
+    expect(down.lost).toMatchObject({ reason: "fold", drift: "cools", nextIs: "found" });
+    expect(down.lost?.givens.flux).toBeCloseTo(folds[1]?.at as number, 7);
+  });
+
+  test("keeps its branch step by step, back and forth, with several givens at once", () => {
+    let state = warm;
+    for (let i = 0; i <= 200; i++) {
+      const to = { flux: 1361 - i, emissivity: 0.6 - i * 2e-4 };
+      state = followState(loop, state, { to }).state as State;
+      expect(state.stability).toBe("stable");
+    }
+    for (let i = 200; i >= 0; i--) {
+      state = followState(loop, state, { to: { flux: 1361 - i, emissivity: 0.6 - i * 2e-4 } }).state as State;
+    }
+    expect(state.temperature).toBeCloseTo(warm.temperature, 10);
+  });
+
+  test("may come from JSON, and may stay where it is", () => {
+    const again = JSON.parse(JSON.stringify(warm)) as State;
+    expect(followState(loop, again, { to: { flux: 1400 } })).toEqual(
+      followState(loop, warm, { to: { flux: 1400 } }),
+    );
+    expect(followState(loop, warm, { to: {} }).state?.temperature).toBeCloseTo(warm.temperature, 11);
+  });
+
+  test("may leave the range that is looked at", () => {
+    const found = followState(loop, warm, { to: { flux: 3000 }, within: [200, 320] });
+    expect(found).toMatchObject({ state: null, lost: { reason: "range" } });
+  });
+});
+
+test("ΔT of the acceptance case for a doubling of carbon", () => {
+  const loop = vapourLoop();
+  const state = stateOf(loop, 2);
+  const doubled = followState(loop, state, { to: { carbon: 560 } }).state;
+  // from an independent computation in high precision
+  expect((doubled?.temperature as number) - state.temperature).toBeCloseTo(4.15561428, 8);
+});
+
+test("a sampled loop is followed without proof", () => {
+  const loop = sampledLoop();
+  const state = stateOf(loop, 2);
+  const found = followState(loop, state, { to: { flux: 1400 } });
+  expect(found.proof).toBe("sampled");
+  const { states } = core.findStates(loop, { within: WITHIN, at: { flux: 1400 } });
+  expect(found.state?.temperature).toBeCloseTo(states[2]?.temperature as number, 9);
+});

@@ -4,7 +4,6 @@ import { mixAlbedo } from "../../src/albedo/mixAlbedo.ts";
 import { steadyCover } from "../../src/biosphere/steadyCover.ts";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import { fourth, inUnit, mul, product, sub } from "../../src/graph/operations.ts";
-import type { Quantity } from "../../src/graph/quantity.ts";
 import { closeLoop } from "../../src/loop/closeLoop.ts";
 import { findStates } from "../../src/states/findStates.ts";
 import table from "../reference/computed/iv_plant_cover.json" with { type: "json" };
@@ -26,28 +25,21 @@ function expectAround([low, high]: readonly [number, number], value: number): vo
 function planetOf({ exchange, inputs }: (typeof table.cases)[number]) {
   const p = numbers(inputs);
   const growth = { best: p.best, halfWidth: Math.sqrt(1 / p.k), deathRate: p.death_rate };
-  const emitted = (fourthPower: Quantity) => inUnit(mul(p.sigma, fourthPower), "W m-2");
+  const linear = exchange === "linear";
   return closeLoop(({ temperature, given, couple }) => {
     const luminosity = given("luminosity", 1, "1", { within: [0.01, 100] });
     const cover = couple("cover", steadyCover({ temperature, ...growth, available: p.available }));
     const albedo = mixAlbedo({ covers: [{ fraction: cover, albedo: p.plants }], bare: p.ground });
     const contrast = sub(albedo, p.plants);
-    const sunlight = inUnit(product(p.S, luminosity, sub(1, albedo)), "W m-2");
-    if (exchange === "linear") {
-      const planet = sub(temperature, inUnit(mul(p.q, contrast), "K"));
-      return {
-        heating: { sunlight },
-        cooling: { longwave: emitted(fourth(planet) as Quantity) },
-        heatCapacity: 4e8,
-        report: { cover },
-      };
-    }
-    const carried = inUnit(product(p.sigma, p.q, contrast), "W m-2");
+    // linear: the plants are warmer than the planet by q·contrast; else the same in fourth powers, as a flow of heat
+    const emitting = linear ? sub(temperature, inUnit(mul(p.q, contrast), "K")) : temperature;
     return {
-      heating: { sunlight, carried },
-      cooling: { longwave: emitted(fourth(temperature) as Quantity) },
+      heating: {
+        sunlight: inUnit(product(p.S, luminosity, sub(1, albedo)), "W m-2"),
+        carried: linear ? 0 : inUnit(product(p.sigma, p.q, contrast), "W m-2"),
+      },
+      cooling: { longwave: inUnit(mul(p.sigma, fourth(emitting)), "W m-2") },
       heatCapacity: 4e8,
-      report: { cover },
     };
   });
 }

@@ -106,6 +106,15 @@ describe.each([
     test.each([NaN, Infinity, -Infinity, -1, 6])("the point %s", (x) => {
       expect(read(cube, { x: [0, 5] })({ x }).map(isKnown)).toEqual([false, false, false]);
     });
+    test("NaN does not hide behind a min or a max", () => {
+      for (const side of [min, max]) {
+        for (const x of [NaN, [NaN, 9], [-9, NaN]] as const) {
+          for (const write of [(a: Quantity) => side(a, 5), (a: Quantity) => side(5, a)]) {
+            expect(isKnown(read(write)({ x })[0])).toBe(false);
+          }
+        }
+      }
+    });
     test("an infinite input in an infinite range", () => {
       expect(isKnown(read((x) => tanh(x), { x: [0, Infinity] })({ x: Infinity })[0])).toBe(false);
     });
@@ -140,6 +149,23 @@ describe.each([
       const [, slope, curvature] = read((x, y, z) => max(0, sub(add(x, y), z)))({ x: 1e-17, y: 1, z: 1 });
       expect(slope.slice(0, 2)).toEqual([0, 1]);
       expect(isKnown(curvature)).toBe(false);
+    });
+    test.each([
+      ["above the corner, computed below it", 1e-16, 5e-17],
+      ["below the corner, computed above it", 1.2e-16, 1.8e-16],
+    ])("%s: both sides, whichever side is the vague one", (_name, x, corner) => {
+      // (x + 1) − 1 is computed as 0 or 2^-52
+      const vague = (a: Quantity, b: Quantity) => sub(add(a, b), b);
+      for (const side of [min, max]) {
+        for (const write of [
+          (a: Quantity, b: Quantity, c: Quantity) => side(vague(a, b), c),
+          (a: Quantity, b: Quantity, c: Quantity) => side(c, vague(a, b)),
+        ]) {
+          const [, slope, curvature] = read(write)({ x, y: 1, z: corner });
+          expect(slope.slice(0, 2)).toEqual([0, 1]);
+          expect(isKnown(curvature)).toBe(false);
+        }
+      }
     });
     test("at the end of a box: the side of a = b belongs to the second, as when numbers are read", () => {
       const of = read((x, y) => max(y, x));

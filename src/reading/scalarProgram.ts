@@ -49,14 +49,22 @@ export class ScalarProgram {
     return this.#register(`f${place}`, "call", args, place);
   }
 
-  /** How often each register is read by others, if only `outputs` are wanted; each of them counts once more. */
+  /**
+   * How often each register is read by others, if only `outputs` are wanted; each of them counts once more. Min and max
+   * name their arguments more than once in a text, so these count twice.
+   */
   uses(outputs: readonly number[]): Uint32Array {
     const uses = new Uint32Array(this.ops.length);
     const read = (id: number) => {
       uses[id] = (uses[id] as number) + 1;
     };
     outputs.forEach(read);
-    for (let id = uses.length - 1; id >= 0; id--) if (uses[id]) this.args[id]?.forEach(read);
+    for (let id = uses.length - 1; id >= 0; id--) {
+      if (!uses[id]) continue;
+      const args = this.args[id] as readonly number[];
+      args.forEach(read);
+      if (this.ops[id] === "min" || this.ops[id] === "max") args.forEach(read);
+    }
     return uses;
   }
 

@@ -134,6 +134,12 @@ export const NORTH = source(
   "Energy balance climate models, Rev. Geophys. 19, 91",
   "Eq. 6: 203.3 and 2.09",
 );
+export const GOUGH = source(
+  "Gough",
+  "1981",
+  "Solar interior structure and luminosity variations, Solar Physics 74, 21",
+  "L/L☉ = 1/(1 + (2/5)(1 − t/t☉))",
+);
 export const QUIRRENBACH = source(
   "Quirrenbach",
   "2022",

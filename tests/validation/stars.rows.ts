@@ -11,12 +11,21 @@ import {
   SOLAR_IRRADIANCE,
   SOLAR_LUMINOSITY,
   SOLAR_RADIUS,
+  stellarBrightening,
   stellarFlux,
   stellarLuminosity,
 } from "../../src/index.ts";
 import planck from "../reference/computed/planck_flux.json" with { type: "json" };
 import { type Check, halfUnit, SIGMA_DIGITS } from "./check.ts";
-import { COWAN_AGOL, FACT_SHEETS, HEAT_BALANCE, IAU_B3, PLANCK_LAW, PLANET_TABLES } from "./sources.ts";
+import {
+  COWAN_AGOL,
+  FACT_SHEETS,
+  GOUGH,
+  HEAT_BALANCE,
+  IAU_B3,
+  PLANCK_LAW,
+  PLANET_TABLES,
+} from "./sources.ts";
 
 const planckRows = planck.rows.map(
   ({ T, flux }): Check => ({
@@ -86,7 +95,29 @@ const redistributionRows = (
   }),
 );
 
+/** 4.57 × 10⁹ Julian years, s. */
+const SUN = 4.57e9 * 31557600;
+const goughRows = (
+  [
+    [0, 0.7142857],
+    [0.5, 0.8333333],
+  ] as const
+).map(
+  ([share, published]): Check => ({
+    covers: ["stellarBrightening"],
+    what: `the Sun's luminosity over today's, at ${share} of its age`,
+    published,
+    unit: "1",
+    ours: () => stellarBrightening({ age: share * SUN }),
+    tolerance: halfUnit(1e-7),
+    because: "last digit",
+    source: GOUGH,
+    basis: "seen",
+  }),
+);
+
 export const starRows: readonly Check[] = [
+  ...goughRows,
   {
     covers: ["stellarLuminosity", "SOLAR_RADIUS", "SOLAR_EFFECTIVE_TEMPERATURE"],
     what: "Sun: luminosity from the nominal radius and effective temperature",

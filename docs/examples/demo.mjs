@@ -35,11 +35,11 @@ function climateOf(description) {
 
 /** How far each stable state is from the end of its branch as the star brightens or fades between a fifth and five times. */
 function marginsOf({ loop, inputs, description }, states) {
-  const valueOf = (path) => inputs.find((input) => input.path === path)?.value;
+  const inputAt = (path) => inputs.find((input) => input.path === path)?.value;
   const along = ["star.luminosity", "orbit.flux"].find((name) => loop.givens.some((g) => g.name === name));
   if (!along) return [];
-  const now = valueOf(along);
-  const rate = valueOf("star.brightening");
+  const now = inputAt(along);
+  const rate = inputAt("star.brightening");
   const options = { along, within, between: [now / 5, now * 5] };
   if (description.star?.brightening !== undefined) options.brightening = { rate };
   return states.map((state) => tippingMargins(loop, state, options));

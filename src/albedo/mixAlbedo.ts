@@ -1,4 +1,4 @@
-import { add, min, mul, sub, sum } from "../graph/operations.ts";
+import { add, max, min, mul, sub, sum } from "../graph/operations.ts";
 import type { Value } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
 import { compensatedSum } from "../ground/sum.ts";
@@ -9,7 +9,7 @@ import { albedoPort } from "../law/ports.ts";
 const SHARE_TOLERANCE = 1e-12;
 
 /**
- * Albedo of a surface of several covers: α = Σ fᵢαᵢ, or Σ fᵢαᵢ + (1 − Σ fᵢ)·bare where `bare` is the albedo of the rest.
+ * Albedo of a surface of several covers: α = Σ fᵢαᵢ, or bare + Σ fᵢ(αᵢ − bare) where `bare` is the albedo of the rest.
  * With `bare`, fractions may be quantities and their sum must not exceed 1 (checked in each state); without it they are
  * numbers that sum to 1 within 1e-12. Fractions and albedos between 0 and 1. Errors: as for every law; `shares-not-one`.
  * Source: reflected light adds by area.
@@ -43,14 +43,18 @@ export const mixAlbedo = /* @__PURE__ */ defineLaw({
   },
   source: "reflected light adds by area",
   write({ covers, bare }) {
-    const covered = sum(...covers.map((c) => c.fraction));
-    const reflected = sum(...covers.map((c) => mul(c.fraction, c.albedo)));
-    // rounding must not make a surface brighter than its brightest cover could be
-    if (bare !== undefined) return min(1, add(reflected, mul(sub(1, covered), bare)));
+    // each fraction stands once, so that an enclosure of the mixture is no wider than it must be
+    if (bare !== undefined) {
+      const over = covers.map((c) => mul(c.fraction, sub(c.albedo, bare)));
+      return asAlbedo(add(bare, sum(...over)));
+    }
     checkShares(covers.map((c) => c.fraction));
-    return min(1, reflected);
+    return asAlbedo(sum(...covers.map((c) => mul(c.fraction, c.albedo))));
   },
 });
+
+/** Rounding must not make a surface darker or brighter than any could be. */
+const asAlbedo = (mixed: Value): Value => min(1, max(0, mixed));
 
 function checkShares(fractions: readonly Value[]): void {
   const path = "mixAlbedo.covers";

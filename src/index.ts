@@ -21,6 +21,7 @@ export type {
   Jump,
   UndecidedStretch,
 } from "./branches/diagram.ts";
+export type { Cusp, FoldCurve, FoldCurveEnd, FoldDiagram, FoldPoint } from "./branches/foldDiagram.ts";
 export { type FollowedState, type FollowStateOptions, followState } from "./branches/followState.ts";
 export type { Margin, TippingMargins, TippingMarginsOptions } from "./branches/margins.ts";
 export type { Solution, Solutions } from "./branches/solutions.ts";
@@ -28,6 +29,7 @@ export { type SolveForOptions, solveFor } from "./branches/solveFor.ts";
 export { type StatesOnDiagram, statesOnDiagram } from "./branches/statesOnDiagram.ts";
 export { tippingMargins } from "./branches/tippingMargins.ts";
 export { type TraceBranchesOptions, traceBranches } from "./branches/traceBranches.ts";
+export { type TraceFoldsOptions, traceFolds } from "./branches/traceFolds.ts";
 export { type AnalyseFeedbacksOptions, analyseFeedbacks } from "./feedback/analyseFeedbacks.ts";
 export { type AssessedNames, assessedLoop } from "./feedback/assessedLoop.ts";
 export {

@@ -5,16 +5,13 @@ import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
-import { roundoffAt } from "../search/roundoff.ts";
 import { rangesOf } from "../states/enclosedBalance.ts";
 import { balanceOf } from "./balanceOf.ts";
 import type { BranchEnd } from "./diagram.ts";
 import { rangeAt, signOfRange } from "./interval.ts";
-import { endOf, LINE_EFFORT, middleOf, type Rest, type Stretch } from "./stretch.ts";
+import { endOf, LINE_EFFORT, middleOf, nearestProved, REACH, type Rest, type Stretch } from "./stretch.ts";
 
 const MOST_STEPS = 20;
-/** How far the box of a fold reaches beyond its two states, as a share of their distance. */
-const REACH = 1;
 
 /**
  * Over the temperatures around both states and all parameters of the stretch N bends one way, so it has at most two zeros,
@@ -90,12 +87,5 @@ export function foldFinder(loop: Loop, place: number) {
 }
 
 type Read = readonly [Range, Range, Range, Range, Range];
-
-/** The nearest place on a side where something is proved; at last the end of the range, where it is known. */
-function nearestProved(at: number, side: 1 | -1, [low, high]: Range, proved: (x: number) => boolean): number {
-  let gap = roundoffAt(at);
-  for (let x = at + side * gap; x > low && x < high; gap *= 4, x = at + side * gap) if (proved(x)) return x;
-  return side > 0 ? high : low;
-}
 
 const held = (x: number, [low, high]: Range): number => (x > low ? (x < high ? x : high) : low);

@@ -29,6 +29,8 @@ export interface GateNodes {
   readonly feedback: number;
   /** dg/dT = −λ/b. */
   readonly slope: number;
+  /** b = ∂N/∂g. */
+  readonly answer: number;
 }
 
 /** The nodes of the curve along a given, if there is a gate. */
@@ -42,7 +44,7 @@ export function gateNodes(loop: Loop, along: string): GateNodes | undefined {
   const curve = graph.node("div", [new Writer(graph).neg(gate.offset), gate.slope]);
   const feedback = feedbackOn(loop, gate, curve);
   const slope = graph.node("div", [new Writer(graph).neg(feedback), gate.slope]);
-  return { gate: gate.node, curve, feedback, slope };
+  return { gate: gate.node, curve, feedback, slope, answer: gate.slope };
 }
 
 function feedbackOn(loop: Loop, { offset, slope }: Gate, curve: number): number {

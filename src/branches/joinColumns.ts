@@ -76,9 +76,9 @@ export function joinColumns(
     for (const [k, i] of lost.entries()) (left[i] as Growing).high = lastEnds[k] as BranchEnd;
     const firstEnds = endsOf(born, to);
     for (const [k, j] of born.entries()) right[j] = start(to, j, firstEnds[k] as BranchEnd);
-    if (lastEnds[0]?.kind === "fold")
+    if (isFold(lastEnds[0]))
       pairs.push({ end: lastEnds[0], exists: "below", pair: lost.map((i) => left[i] as Growing) });
-    if (firstEnds[0]?.kind === "fold")
+    if (isFold(firstEnds[0]))
       pairs.push({ end: firstEnds[0], exists: "above", pair: born.map((j) => right[j] as Growing) });
     return right;
   }
@@ -88,11 +88,15 @@ export function joinColumns(
   const folds = pairs.map(({ end, exists, pair }): Fold => {
     const { at, atBracket, temperature, temperatureBracket } = end;
     const branches = pair.map((g) => all.indexOf(g)) as [number, number];
-    return Object.freeze({ kind: "fold", at, atBracket, temperature, temperatureBracket, exists, branches });
+    const kind = end.kind as Fold["kind"];
+    return Object.freeze({ kind, at, atBracket, temperature, temperatureBracket, exists, branches });
   });
   folds.sort((a, b) => a.temperature - b.temperature);
   return { branches: all.map(branchOf), folds };
 }
+
+const isFold = (end: BranchEnd | undefined): end is BranchEnd =>
+  end?.kind === "fold" || end?.kind === "corner";
 
 const exactEnd = (kind: BranchEnd["kind"], { at, temperature }: BranchPoint): BranchEnd =>
   Object.freeze({

@@ -14,7 +14,7 @@ import { searchOf } from "../states/prepared.ts";
 import { enumerateBalance, locate } from "../states/provedSearch.ts";
 import { balanceOf } from "./balanceOf.ts";
 import { signAt } from "./criticals.ts";
-import type { Branch, BranchPoint } from "./diagram.ts";
+import type { Branch, BranchEnd, BranchPoint } from "./diagram.ts";
 import { kept } from "./kept.ts";
 
 /** A loop along one of its givens, the others set. */
@@ -48,14 +48,14 @@ const SIGNS = { stable: -1, unstable: 1, undecided: 0 } as const;
 /** The reader of a loop; `place` is that of the parameter among the givens. */
 export function netReader(loop: Loop, place: number, givens: readonly number[]): NetReader {
   const set = [...givens];
-  const { net, slope } = valuesOf(loop);
   const out = new Float64Array(1);
   const read = (kernel: Kernel, parameter: number, temperature: number): number => {
     set[place] = parameter;
     kernel(Float64Array.of(temperature, ...set), out);
     return out[0] as number;
   };
-  const feedback = (parameter: number, temperature: number) => read(slope, parameter, temperature);
+  const feedback = (parameter: number, temperature: number) =>
+    read(valuesOf(loop).slope, parameter, temperature);
   const states = (parameter: number, within: Range, effort: number): StatesAt => {
     set[place] = parameter;
     const { located, undecided, cost } = searchOf(loop, false)(set, within, effort);
@@ -66,7 +66,7 @@ export function netReader(loop: Loop, place: number, givens: readonly number[]):
     return {
       feedback,
       enumerate: states,
-      sign: (parameter, temperature) => Math.sign(read(net, parameter, temperature)) as Sign,
+      sign: (parameter, temperature) => Math.sign(read(valuesOf(loop).net, parameter, temperature)) as Sign,
       stateOn(branch, parameter) {
         set[place] = parameter;
         const { located } = searchOf(loop, false)(set, reachOf(branch), SAMPLES);
@@ -105,12 +105,22 @@ const valuesOf = /* @__PURE__ */ kept((loop) => {
   return { net: kernel(loop.net), slope: kernel(slope) };
 });
 
-/** The temperatures of a branch with the brackets of its ends, and a little more: it may have only one temperature. */
+/**
+ * The temperatures of a branch with the brackets of its ends. Beyond a fold its neighbour begins; on other sides a little more,
+ * because a branch may keep its temperature.
+ */
 function reachOf({ temperatures: [cold, hot], low, high }: Branch): Range {
-  const [a, b] = [low.temperatureBracket, high.temperatureBracket];
-  const slack = LEAST_REACH * hot;
-  return [Math.min(cold - slack, a[0], b[0]), Math.max(hot + slack, a[1], b[1])];
+  const ends = [low, high];
+  const [from, to] = [
+    Math.min(cold, ...ends.map((e) => e.temperatureBracket[0])),
+    Math.max(hot, ...ends.map((e) => e.temperatureBracket[1])),
+  ];
+  const slackAt = (side: 0 | 1, x: number): number =>
+    ends.some((e) => isTurn(e) && e.temperatureBracket[side] === x) ? 0 : LEAST_REACH * hot;
+  return [from - slackAt(0, from), to + slackAt(1, to)];
 }
+
+const isTurn = ({ kind }: BranchEnd): boolean => kind === "fold" || kind === "corner";
 
 /** The one nearest to where the points of a branch say that it is. */
 function nearest<Z extends { readonly at: number }>(

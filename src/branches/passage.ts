@@ -1,7 +1,7 @@
 // Proves what happens in a narrow stretch of parameters between two numbers of states: a fold, or a state that leaves the range.
-import type { Loop } from "../loop/types.ts";
-import { enclosedBalance } from "../states/enclosedBalance.ts";
+import { type EnclosedBalance, enclosedBalance } from "../states/enclosedBalance.ts";
 import { enumerateBalance } from "../states/provedSearch.ts";
+import { cornerFinder } from "./cornerFinder.ts";
 import type { BranchEnd } from "./diagram.ts";
 import { exitFinder } from "./exitFinder.ts";
 import { foldFinder } from "./foldFinder.ts";
@@ -16,17 +16,19 @@ const REST_EFFORT = 400;
 /** Prepares the proofs for a loop along one of its givens. */
 export const passageOf = /* @__PURE__ */ kept<Passage>((loop, along) => {
   const place = loop.givens.findIndex((g) => g.name === along);
-  const rest = restCounter(loop, place);
+  const wide = enclosedBalance(loop, new Set([loop.givens[place]?.node as number]));
+  const rest = restCounter(wide, place);
   const fold = foldFinder(loop, place);
+  const corner = cornerFinder(loop, place, wide);
   const exit = exitFinder(loop, place);
   return (stretch) => {
     const [first, second] = stretch.temperatures as [number, number?];
-    return second === undefined ? exit(stretch, first, rest) : fold(stretch, [first, second], rest);
+    if (second === undefined) return exit(stretch, first, rest);
+    return fold(stretch, [first, second], rest) ?? corner(stretch, [first, second], rest);
   };
 });
 
-function restCounter(loop: Loop, place: number): Rest {
-  const balance = enclosedBalance(loop, new Set([loop.givens[place]?.node as number]));
+function restCounter(balance: EnclosedBalance, place: number): Rest {
   return ({ parameters, others, within, givens }, [from, to]) => {
     const [low, high] = parameters.map((p) => givens.map((v, i) => (i === place ? p : v)));
     balance.set(low as number[], high as number[]);

@@ -6,12 +6,12 @@ import type { Givens, Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
 import { checkedAlong } from "./checkedAlong.ts";
 import type { Curve } from "./curve.ts";
-import type { Diagram } from "./diagram.ts";
-import { diagramOf, type Task } from "./diagramOf.ts";
+import type { Diagram, UndecidedStretch } from "./diagram.ts";
+import { diagramOf, type Parts, type Task } from "./diagramOf.ts";
 import { gateCurve } from "./gateCurve.ts";
 import { impliedCurve } from "./impliedCurve.ts";
 import { kept } from "./kept.ts";
-import { netReader } from "./netReader.ts";
+import { type NetReader, netReader } from "./netReader.ts";
 import { partsInColumns } from "./partsInColumns.ts";
 import { partsOnCurve } from "./partsOnCurve.ts";
 import { sampledCurve } from "./sampledCurve.ts";
@@ -69,10 +69,20 @@ export function traceBranches<N extends string>(
     tolerance: checkedNumber(options.tolerance ?? 0.002, "tolerance", "1", [1e-6, 1]),
   };
   const net = netReader(loop, task.place, task.givens);
-  const curve = curveOf(loop, task);
-  const parts = curve ? partsOnCurve(curve, task, net) : partsInColumns(loop, task, net);
-  return diagramOf(loop, task, net, parts) as Diagram<Givens<N>>;
+  return diagramOf(loop, task, net, partsOf(loop, task, net)) as Diagram<Givens<N>>;
 }
+
+/** The parts of a diagram, on a curve if there is one. */
+function partsOf(loop: Loop, task: Task, net: NetReader): Parts {
+  const curve = curveOf(loop, task);
+  const onCurve = curve && partsOnCurve(curve, task, net);
+  if (onCurve && !onCurve.undecided.some((u) => NO_CURVE.includes(u.kind))) return onCurve;
+  const inColumns = partsInColumns(loop, task, net);
+  return onCurve && inColumns.branches.length === 0 ? onCurve : inColumns;
+}
+
+/** What is undecided where a state does not answer to the parameter, so that it lies on no curve. */
+const NO_CURVE: readonly UndecidedStretch["kind"][] = ["level", "other"];
 
 /** The first kind of curve that the loop is proved to have, its givens set. */
 function curveOf(loop: Loop, { name, givens, between, within }: Task): Curve | undefined {

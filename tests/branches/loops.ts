@@ -55,6 +55,15 @@ export const formulaLoop = (write: (temperature: core.Quantity, p: core.Quantity
     heatCapacity: 1,
   }));
 
+/** The same with two parameters p and q. */
+export const twoGivens = (
+  write: (temperature: core.Quantity, p: core.Quantity, q: core.Quantity) => core.Value,
+) =>
+  core.closeLoop(({ temperature, given }) => {
+    const imagined = write(inUnit(temperature, "1"), given("p", 0, "1"), given("q", 0, "1"));
+    return { heating: { imagined: inUnit(imagined, "W m-2") }, cooling: {}, heatCapacity: 1 };
+  });
+
 /** The ice loop with its albedo as an ordinary function. */
 export const sampledLoop = () => {
   const plainAlbedo = core.sampledLaw({

@@ -139,6 +139,30 @@ describe("the way a parameter takes", () => {
     expect(diagram.gaps).toMatchObject([{ too: "hot" }]);
   });
 
+  test("a parameter that only part of the states answer to", () => {
+    // a ramp albedo: below the ramp nothing answers to the albedo of the warm surface
+    const loop = core.closeLoop(({ temperature, given }) => {
+      const warm = given("warm", 0.3, "1", { within: [0, 1] });
+      const albedo = core.rampAlbedo({ temperature, cold: 0.7, warm, frozenBelow: 255, openAbove: 275 });
+      return {
+        heating: { sunlight: core.absorbedFlux({ flux: 1361, albedo }) },
+        cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+        heatCapacity: 4e8,
+      };
+    });
+    const diagram = traceBranches(loop, { along: "warm", between: [0.2, 0.6], within: WITHIN });
+    expect(diagram).toMatchObject({
+      complete: true,
+      method: "tiles",
+      folds: [{ kind: "corner", exists: "below" }],
+    });
+    expect(kinds(diagram)[0]).toEqual(["stable", "between", "between"]);
+    // N = 0 at the upper end of the ramp: (1 − warm)·1361/4 = 0.6·σ·275⁴
+    const exact = 1 - (4 * 0.6 * core.STEFAN_BOLTZMANN * 275 ** 4) / 1361;
+    expect(diagram.folds[0]?.at).toBeCloseTo(exact, 12);
+    expect(diagram.folds[0]?.temperature).toBeCloseTo(275, 9);
+  });
+
   test("corner folds where the budget is no straight line but monotone", () => {
     const kinked = formulaLoop((t, p) =>
       sub(
@@ -177,8 +201,19 @@ describe("what is not decided is said", () => {
   test("a state that does not answer to the parameter", () => {
     const crossing = formulaLoop((t, p) => mul(sub(t, 300), sub(p, sub(t, 300))));
     const diagram = traceBranches(crossing, { along: "p", between: [-2, 2.1], within: [250, 350] });
-    expect(diagram.complete).toBe(false);
-    expect(diagram.undecided).toMatchObject([{ kind: "level" }, {}]);
+    expect(diagram).toMatchObject({ complete: false, method: "tiles", undecided: [{ kind: "count" }] });
+    // T = 300 and T = 300 + p cross at p = 0 and exchange their stability
+    const [from, to] = diagram.undecided[0]?.parameters ?? [1, -1];
+    expect(from).toBeLessThan(0);
+    expect(to).toBeGreaterThan(0);
+    expect(to - from).toBeLessThan(1e-4);
+    for (const p of [-1, 1]) {
+      const { states, complete } = statesOnDiagram(crossing, diagram, p);
+      expect([complete, states.map((s) => Math.round(s.temperature * 1e9) / 1e9)]).toEqual([
+        false,
+        [300, 300 + p].sort((a, b) => a - b),
+      ]);
+    }
   });
 
   test("an effort that is spent", () => {

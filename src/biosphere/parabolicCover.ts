@@ -1,6 +1,6 @@
 import { max, mul } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { PARABOLA_PORTS, parabola } from "./parabola.ts";
+import { parabola, parabolaPorts } from "./parabola.ts";
 
 /**
  * Share of the surface under plants as a parabola in temperature: a = most·max(0, 1 − ((T − best)/halfWidth)²).
@@ -12,10 +12,9 @@ export const parabolicCover = /* @__PURE__ */ defineLaw({
   name: "parabolicCover",
   about: "Share of the surface under plants as a parabola in temperature.",
   output: { symbol: "a", unit: "1", within: [0, 1], about: "share of the surface" },
-  inputs: {
-    ...PARABOLA_PORTS,
+  inputs: /* @__PURE__ */ parabolaPorts({
     most: { symbol: "a_m", unit: "1", within: [0, 1], about: "cover at the best temperature" },
-  },
+  }),
   source: "a simplification used in teaching, no paper",
   write: ({ most, ...around }) => mul(most, max(0, parabola(around))),
 });

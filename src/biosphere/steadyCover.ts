@@ -1,6 +1,6 @@
 import { div, max, mul, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { PARABOLA_PORTS, parabola } from "./parabola.ts";
+import { parabola, parabolaPorts } from "./parabola.ts";
 
 /**
  * Share of the surface that one species of plants holds when it neither spreads nor retreats:
@@ -15,8 +15,7 @@ export const steadyCover = /* @__PURE__ */ defineLaw({
   name: "steadyCover",
   about: "Share of the surface that one species of plants holds when growth and death are in balance.",
   output: { symbol: "a", unit: "1", within: [0, 1], about: "share of the surface" },
-  inputs: {
-    ...PARABOLA_PORTS,
+  inputs: /* @__PURE__ */ parabolaPorts({
     deathRate: {
       symbol: "γ",
       unit: "1",
@@ -29,7 +28,7 @@ export const steadyCover = /* @__PURE__ */ defineLaw({
       within: [1e-6, 1],
       about: "share of the surface that it can hold",
     },
-  },
+  }),
   source: "Watson & Lovelock 1983, Tellus 35B, 284",
   write({ deathRate, available, ...around }) {
     const leastGrowth = div(deathRate, available);

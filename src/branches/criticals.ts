@@ -76,7 +76,7 @@ function changesSign(feedback: Enclosed, [low, high]: Range): boolean {
   return before !== 0 && before === -signAt(feedback, high);
 }
 
-const values = new Float64Array(6);
+const values = /* @__PURE__ */ new Float64Array(6);
 
 /** The proved sign of a function at a place. */
 export function signAt(f: Enclosed, x: number): Sign {

@@ -18,7 +18,7 @@ import { lineOf } from "./line.ts";
 const WIDE = 1e-3;
 const PARTS = 256;
 /** Above the roundings of a half width and a product. */
-const SLACK = 1 + 1e-15;
+const SLACK = 1.000000000000001;
 
 /** The nodes of a gate's curve. */
 export interface GateNodes {

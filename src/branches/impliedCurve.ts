@@ -19,7 +19,7 @@ const MOST_NEWTON = 6;
 const MOST_WIDENINGS = 12;
 /** An interval Newton step must take away this share, or no other is made. */
 const WORTHWHILE = 0.1;
-const NOWHERE: Range = [Number.NaN, Number.NaN];
+const nowhere = (): Range => [Number.NaN, Number.NaN];
 
 /** Prepares the curve along a given. */
 export function impliedCurve(loop: Loop, along: string): Curve {
@@ -94,7 +94,7 @@ export function impliedCurve(loop: Loop, along: string): Curve {
       const middle = p[0] + (p[1] - p[0]) / 2;
       const step = minus(over(netOver(t, [middle, middle]), slope));
       const next = meet(p, plus([middle, middle], step));
-      if (!(next[0] <= next[1])) return Number.isNaN(step[0]) ? p : NOWHERE;
+      if (!(next[0] <= next[1])) return Number.isNaN(step[0]) ? p : nowhere();
       const gained = next[1] - next[0] < (1 - WORTHWHILE) * (p[1] - p[0]);
       p = next;
       if (!gained) break;

@@ -19,11 +19,8 @@ const AT_AN_END: Readonly<Record<DoubtKind | "level", UndecidedStretch["kind"]>>
 };
 
 /** What a doubt about λ on the curve is in the diagram. */
-const ON_THE_CURVE: Readonly<Record<DoubtKind, UndecidedStretch["kind"]>> = {
-  ...AT_AN_END,
-  fold: "cusp",
-  corner: "cusp",
-};
+const onTheCurve = (kind: DoubtKind): UndecidedStretch["kind"] =>
+  kind === "fold" || kind === "corner" ? "cusp" : AT_AN_END[kind];
 
 /** The undecided stretch of a crossing, if it is in doubt. */
 export function crossingDoubt({ doubt, bracket, end }: Crossing, between: Range): UndecidedStretch[] {
@@ -35,7 +32,7 @@ export function crossingDoubt({ doubt, bracket, end }: Crossing, between: Range)
 
 /** The undecided stretch of a critical place. */
 export function criticalDoubt({ kind, bracket }: Critical, parameters: Range): UndecidedStretch {
-  return { temperatures: bracket, parameters, kind: ON_THE_CURVE[kind] };
+  return { temperatures: bracket, parameters, kind: onTheCurve(kind) };
 }
 
 /** The notes of a diagram: that its search stopped, that it is sampled. */

@@ -27,7 +27,8 @@ export interface EnclosureOf extends ReadingOf {
   readonly ranges?: ReadonlyMap<number, Range>;
 }
 
-const ANY: Range = [-Number.MAX_VALUE, Number.MAX_VALUE];
+/** All finite numbers. */
+const ANY: Range = [-1.7976931348623157e308, 1.7976931348623157e308];
 
 /** As generated code or by the interpreter: the same bits. Ordinary functions (sampled laws) cannot be enclosed. */
 export function enclosureKernel(

@@ -9,7 +9,7 @@ import { extremes, extremesOfSquare, reciprocalOrder } from "./extremes.ts";
 /** Encloses a node from its arguments; in a square they are one object. */
 type Rule = (w: EnclosureWriter, ...args: [Enclosure, Enclosure, Enclosure, Enclosure]) => Enclosure;
 
-const NOT_NEGATIVE = ofSign(1);
+const NOT_NEGATIVE = /* @__PURE__ */ ofSign(1);
 
 /** One rule for each operation that can be enclosed; a missing one does not compile. */
 export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, Rule>> = {

@@ -11,8 +11,19 @@ export type Operation = Step | "call";
 
 /** Tells steps apart in a key. */
 const PLACE = {
-  ...{ add: 0, sub: 1, mul: 2, div: 3, neg: 4, abs: 5 },
-  ...{ sqrt: 6, exp: 7, log: 8, tanh: 9, pick: 10, min: 11, max: 12 },
+  add: 0,
+  sub: 1,
+  mul: 2,
+  div: 3,
+  neg: 4,
+  abs: 5,
+  sqrt: 6,
+  exp: 7,
+  log: 8,
+  tanh: 9,
+  pick: 10,
+  min: 11,
+  max: 12,
 } as const;
 /** 2^24: more registers than a Map can tell apart, so that keys of two arguments stay exact and different. */
 const RADIX = 0x1000000;

@@ -8,7 +8,7 @@ import { findTurning, proveTurning, type TurningPlace } from "./turning.ts";
 /** Steps of the path below this are not tried; two zeros closer to meeting than this are not told apart. */
 const FINEST_STEP = 1e-14;
 /** A turning point is looked for when steps fall below this, and each time they have become so much smaller again. */
-const SUSPECT = 1 / 64;
+const SUSPECT = 0.015625;
 /** How far a box reaches beyond its zeros, as a share of their distance; widened while its edges are not decided. */
 const FIRST_SPREAD = 0.25;
 const WIDEST_SPREAD = 64;

@@ -1,11 +1,10 @@
 import { add, div, mul, sub } from "../graph/operations.ts";
-import { GRAVITATION, SOLAR_MASS_PARAMETER } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
 
-/** Mass of the Sun, kg, from the nominal mass parameter. */
-export const SOLAR_MASS = SOLAR_MASS_PARAMETER / GRAVITATION;
+/** Mass of the Sun, kg: the nominal mass parameter over G of CODATA 2018. */
+export const SOLAR_MASS = 1.988409870698051e30;
 /** Age of the Sun in the source, 4.57 × 10⁹ Julian years, s. */
-export const SOLAR_AGE = 4.57e9 * 31557600;
+export const SOLAR_AGE = 1.44218232e17;
 /** Growth of 1/L over the age of the Sun. */
 export const SOLAR_PACE = 0.4;
 

@@ -47,7 +47,7 @@ export function enumerateBalance(
   return enumerateZeros(net, within, { effort, cuts });
 }
 
-const values = new Float64Array(9);
+const values = /* @__PURE__ */ new Float64Array(9);
 const STABILITY: Readonly<Record<number, State["stability"]>> = {
   [-1]: "stable",
   0: "undecided",

@@ -76,13 +76,15 @@ export function traceBranches<N extends string>(
 function partsOf(loop: Loop, task: Task, net: NetReader): Parts {
   const curve = curveOf(loop, task);
   const onCurve = curve && partsOnCurve(curve, task, net);
-  if (onCurve && !onCurve.undecided.some((u) => NO_CURVE.includes(u.kind))) return onCurve;
+  const has = (kind: UndecidedStretch["kind"]) => onCurve?.undecided.some((u) => u.kind === kind);
+  if (onCurve && !has("level") && !has("other")) return onCurve;
   const inColumns = partsInColumns(loop, task, net);
-  return onCurve && inColumns.branches.length === 0 ? onCurve : inColumns;
+  if (!onCurve) return inColumns;
+  // a state on a level does not answer to the parameter and lies on no curve; any other place that is open on the curve is
+  // no wider than rounding, and says more than a stretch of parameters would
+  const open = inColumns.undecided.length > 0 && !has("level");
+  return open || inColumns.branches.length === 0 ? onCurve : inColumns;
 }
-
-/** What is undecided where a state does not answer to the parameter, so that it lies on no curve. */
-const NO_CURVE: readonly UndecidedStretch["kind"][] = ["level", "other"];
 
 /** The first kind of curve that the loop is proved to have, its givens set. */
 function curveOf(loop: Loop, { name, givens, between, within }: Task): Curve | undefined {

@@ -14,7 +14,7 @@ const budgets = [
   {
     title: "closeLoop, findStates and the operations",
     aim: 13000,
-    limit: 19100,
+    limit: 19500,
     consumers: [`closeLoop, findStates, ${operations}`],
   },
 ];

@@ -29,8 +29,12 @@ const ARRAY = { low: "x", high: "y", data: "k" };
 /** A text up to this length that is needed once stands where it is needed; deeper nesting could exhaust a parser. */
 const INLINE = 80;
 
-/** A program as generated code. */
-export function generateScalar(program: ScalarProgram, outputs: readonly number[]): ScalarKernel {
+/** A program as generated code; it reads `data` anew at each run. */
+export function generateScalar(
+  program: ScalarProgram,
+  outputs: readonly number[],
+  data: Float64Array = Float64Array.from(program.data),
+): ScalarKernel {
   const uses = program.uses(outputs);
   const texts: string[] = [];
   let code = "";
@@ -43,8 +47,7 @@ export function generateScalar(program: ScalarProgram, outputs: readonly number[
   });
   const results = outputs.map((id, i) => `o[${i}]=${texts[id]};`).join("");
   const run = compiled<Raw>(`return function(x,y,k,f,o){${code}${results}}`);
-  const k = Float64Array.from(program.data);
-  return (low, high, out) => run(low, high, k, program.functions, out);
+  return (low, high, out) => run(low, high, data, program.functions, out);
 }
 
 function textOf(

@@ -5,21 +5,24 @@ import { max, min } from "../ground/elementary/minMax.ts";
 import { tanh } from "../ground/elementary/tanh.ts";
 import type { Operation, ScalarKernel, ScalarProgram, Step } from "./scalarProgram.ts";
 
-/** A program as an interpreter. */
-export function interpretScalar(program: ScalarProgram, outputs: readonly number[]): ScalarKernel {
-  const { ops, args, values, data, functions } = program;
+/** A program as an interpreter; it reads `data` anew at each run. */
+export function interpretScalar(
+  program: ScalarProgram,
+  outputs: readonly number[],
+  data: Float64Array = Float64Array.from(program.data),
+): ScalarKernel {
+  const { ops, args, values, functions } = program;
   const uses = program.uses(outputs);
   const r = new Float64Array(ops.length);
   const steps: Operation[] = [];
   /** For each step the register to fill and up to four to read. */
   const places: number[] = [];
-  const inputs: { from: "low" | "high"; place: number; to: number }[] = [];
+  const inputs: { from: "low" | "high" | "data"; place: number; to: number }[] = [];
   ops.forEach((op, id) => {
     const value = values[id] as number;
     if (!uses[id]) return;
     if (op === "literal") r[id] = value;
-    else if (op === "data") r[id] = data[value] as number;
-    else if (op === "low" || op === "high") inputs.push({ from: op, place: value, to: id });
+    else if (op === "low" || op === "high" || op === "data") inputs.push({ from: op, place: value, to: id });
     else {
       const [a, b = 0, c = 0, d = 0] = args[id] as [number, number?, number?, number?];
       steps.push(op);
@@ -28,7 +31,8 @@ export function interpretScalar(program: ScalarProgram, outputs: readonly number
   });
   const at = Uint32Array.from(places);
   return (low, high, out) => {
-    for (const { from, place, to } of inputs) r[to] = (from === "low" ? low : high)[place] as number;
+    const read = { low, high, data };
+    for (const { from, place, to } of inputs) r[to] = read[from][place] as number;
     for (let i = 0; i < steps.length; i++) {
       const p = 5 * i;
       const a = r[at[p + 1] as number] as number;

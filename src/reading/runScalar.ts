@@ -5,5 +5,8 @@ import { interpretScalar } from "./interpretScalar.ts";
 import type { ScalarKernel, ScalarProgram } from "./scalarProgram.ts";
 
 /** As generated code where the host allows it, else by the interpreter: the same bits. */
-export const runScalar = (program: ScalarProgram, outputs: readonly number[]): ScalarKernel =>
-  (mayGenerate() ? generateScalar : interpretScalar)(program, outputs);
+export const runScalar = (
+  program: ScalarProgram,
+  outputs: readonly number[],
+  data?: Float64Array,
+): ScalarKernel => (mayGenerate() ? generateScalar : interpretScalar)(program, outputs, data);

@@ -23,12 +23,17 @@ export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set(
   const temperature = inputs[0] as number;
   const ranges = rangesOf(loop);
   const slope = (node: number) => derivative(graph, node, temperature, inputs);
+  const steady = new Set(inputs.slice(1));
+  const kernels: EnclosureKernel[] = [];
   const low = new Float64Array(inputs.length);
   const high = new Float64Array(inputs.length);
   const enclosed = (node: number): Enclosed => {
     const first = slope(node);
-    const over = (outputs: number[], intervals: Iterable<number>): EnclosureKernel =>
-      enclosureKernel(graph, { inputs, outputs, wide: new Set(intervals), ranges });
+    const over = (outputs: number[], intervals: Iterable<number>): EnclosureKernel => {
+      const kernel = enclosureKernel(graph, { inputs, outputs, wide: new Set(intervals), steady, ranges });
+      kernels.push(kernel);
+      return kernel;
+    };
     const box = over([node, first, slope(first)], [temperature, ...wide]);
     const point = over([node, first], wide);
     const read = (kernel: EnclosureKernel, a: number, b: number, out: Float64Array) => {
@@ -48,6 +53,7 @@ export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set(
     set(lows, highs) {
       low.set(lows, 1);
       high.set(highs, 1);
+      for (const kernel of kernels) kernel.prepare(low, high);
     },
   };
 }

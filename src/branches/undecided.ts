@@ -1,7 +1,7 @@
 // Says what is not decided in a diagram.
 import type { Range } from "../ground/range.ts";
 import type { DoubtKind } from "../search/enumeration.ts";
-import type { Note } from "../states/note.ts";
+import { type Note, type NoteCode, searchNote } from "../states/note.ts";
 import type { Critical } from "./criticals.ts";
 import type { UndecidedStretch } from "./diagram.ts";
 import type { Crossing } from "./runs.ts";
@@ -37,24 +37,14 @@ export function criticalDoubt({ kind, bracket }: Critical, parameters: Range): U
 
 /** The notes of a diagram: that its search stopped, that it is sampled. */
 export function diagramNotes(sampled: boolean, undecided: readonly UndecidedStretch[]): Note[] {
-  const note = (code: Note["code"], severity: Note["severity"], text: string): Note =>
-    Object.freeze({
-      code,
-      severity,
-      about: "traceBranches",
-      value: null,
-      range: null,
-      unit: "1",
-      text,
-      source: null,
-    });
+  const note = (code: NoteCode, text: string): Note => searchNote("traceBranches", code, "caution", text);
   const notes: Note[] = [];
   if (sampled) {
     const text = "found by sampling: branches and folds may be missing";
-    notes.push(note("sampled-search", "caution", text));
+    notes.push(note("sampled-search", text));
   }
   if (undecided.some((u) => u.kind === "effort")) {
-    notes.push(note("search-stopped", "caution", "the effort was spent before the ranges were searched"));
+    notes.push(note("search-stopped", "the effort was spent before the ranges were searched"));
   }
   return notes;
 }

@@ -1,9 +1,7 @@
 import { div, exp, log, product, square } from "../graph/operations.ts";
+import { FOUR_PI_SQUARED } from "../ground/circle.ts";
 import { GRAVITATION } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-
-/** 4π², the nearest double. */
-const FOUR_PI_SQUARED = 39.47841760435743;
 
 /**
  * Semi-major axis of a light body's orbit from its period: a = (G·M·P²/4π²)^⅓, in m.

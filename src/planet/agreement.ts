@@ -1,4 +1,5 @@
 // Inputs that say the same thing twice must agree, and the orbit must stay outside the star.
+import { FOUR_PI } from "../ground/circle.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { fail } from "../ground/errors.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
@@ -7,9 +8,6 @@ import { distanceWays, fluxWays, luminosityWays, type Way } from "./starlight.ts
 
 /** How far two inputs for one quantity may lie apart: common practice, larger than rounded catalogue values differ. */
 const AGREEMENT = 0.02;
-
-/** 4π, the nearest double. */
-const FOUR_PI = 12.566370614359172;
 
 /** The values of a description by path. */
 export type Numbers = (path: string) => number;

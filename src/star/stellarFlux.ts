@@ -1,8 +1,6 @@
 import { div, mul, square } from "../graph/operations.ts";
+import { FOUR_PI } from "../ground/circle.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-
-/** 4π, the nearest double. */
-const FOUR_PI = 12.566370614359172;
 
 /**
  * Flux of a star at a distance, normal to the beam: S = L/(4πd²), in W m⁻².

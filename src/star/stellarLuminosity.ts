@@ -1,9 +1,7 @@
 import { fourth, mul, product, square } from "../graph/operations.ts";
+import { FOUR_PI } from "../ground/circle.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-
-/** 4π, the nearest double. */
-const FOUR_PI = 12.566370614359172;
 
 /**
  * Luminosity of a star from its radius and effective temperature: L = 4πR²σT_eff⁴, in W.

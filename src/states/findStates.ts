@@ -5,7 +5,7 @@ import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange } from "../ground/range.ts";
 import { givensAt } from "../loop/inputs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
-import type { Note } from "./note.ts";
+import { type Note, type NoteCode, searchNote } from "./note.ts";
 import { checkOneVariable, readerOf, searchOf } from "./prepared.ts";
 import type { FoundStates, State, Undecided } from "./state.ts";
 
@@ -57,17 +57,8 @@ export function findStates<N extends string>(loop: Loop<N>, options: FindStatesO
 }
 
 function searchNotes(sampled: boolean, undecided: readonly Undecided[]): Note[] {
-  const note = (code: Note["code"], severity: Note["severity"], text: string): Note =>
-    Object.freeze({
-      code,
-      severity,
-      about: "findStates",
-      value: null,
-      range: null,
-      unit: "1",
-      text,
-      source: null,
-    });
+  const note = (code: NoteCode, severity: Note["severity"], text: string): Note =>
+    searchNote("findStates", code, severity, text);
   const notes: Note[] = [];
   if (sampled) {
     notes.push(

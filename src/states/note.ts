@@ -21,3 +21,7 @@ export interface Note {
   readonly text: string;
   readonly source: string | null;
 }
+
+/** A note on a whole search, about no single number. */
+export const searchNote = (about: string, code: NoteCode, severity: Note["severity"], text: string): Note =>
+  Object.freeze({ code, severity, about, value: null, range: null, unit: "1", text, source: null });

@@ -1,12 +1,11 @@
 // Proves that a state leaves the range of temperature in a narrow stretch of parameters, and brackets the place.
 import { derivative } from "../graph/derivative.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
+import { meet, rangeAt, signOfRange } from "../search/interval.ts";
 import type { BranchEnd } from "./diagram.ts";
-import { meet, rangeAt, signOfRange } from "./interval.ts";
 import { lineOf } from "./line.ts";
 import { endOf, LINE_EFFORT, type Rest, type Stretch } from "./stretch.ts";
 

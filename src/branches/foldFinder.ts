@@ -1,14 +1,13 @@
 // Proves that two states meet in a fold in a narrow stretch of parameters, and brackets it.
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
+import { rangeAt, signOfRange } from "../search/interval.ts";
 import { balanceOf } from "./balanceOf.ts";
 import type { BranchEnd } from "./diagram.ts";
-import { rangeAt, signOfRange } from "./interval.ts";
 import { endOf, LINE_EFFORT, middleOf, nearestProved, REACH, type Rest, type Stretch } from "./stretch.ts";
 
 const MOST_STEPS = 20;

@@ -2,12 +2,11 @@
 import { derivative, Writer } from "../graph/derivative.ts";
 import { type Gate, gateOf } from "../graph/gate.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { above, below } from "../search/enclosed.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
 import { balanceOf } from "./balanceOf.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";

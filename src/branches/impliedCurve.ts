@@ -1,17 +1,16 @@
 // The curve of a loop whose budget only rises or only falls with the parameter: N(T, p(T)) = 0, solved box by box.
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import type { Enclosed } from "../search/enclosed.ts";
+import { meet, minus, over, plus, rangeAt, signOfRange, times } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import { placeOf } from "./gateValue.ts";
-import { meet, minus, over, plus, rangeAt, signOfRange, times } from "./interval.ts";
 import { provedMonotone } from "./monotone.ts";
 
 const MOST_STEPS = 60;

@@ -1,10 +1,9 @@
 // Encloses a node of a loop as a function of one of its inputs.
 import { derivative } from "../graph/derivative.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import type { Enclosed } from "../search/enclosed.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
 
 /** A node along an input; the other inputs are read from `values`, in order, whenever it is read. */
 export interface Line extends Enclosed {

@@ -1,6 +1,6 @@
 // Proves that a balance only rises, or only falls, with a parameter wherever it can vanish.
 import type { Range } from "../ground/range.ts";
-import { signOfRange } from "./interval.ts";
+import { signOfRange } from "../search/interval.ts";
 
 /** Reads N and ∂N/∂p over a box of temperature and parameter. */
 export interface BoxReader {

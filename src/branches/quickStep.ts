@@ -1,12 +1,11 @@
 // One step along a branch, proved in a dozen readings; where it does not succeed nothing is known.
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { above, below, type Sign, signOf } from "../search/enclosed.ts";
 import { roundoffAt } from "../search/roundoff.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
 import type { Located } from "../states/located.ts";
 import { kept } from "./kept.ts";
 

@@ -2,7 +2,7 @@
 import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
@@ -10,7 +10,6 @@ import { above, below, signOf } from "../search/enclosed.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import type { DoubtKind } from "../search/enumeration.ts";
 import { scanZeros } from "../search/scanZeros.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
 import { kept } from "./kept.ts";
 import { lineOf } from "./line.ts";
 import { sampledLine } from "./sampledLine.ts";

@@ -1,13 +1,13 @@
 // The influences between temperature, the chosen couplings and the net flux, each with everything else held.
+
 import { adjoint } from "../graph/adjoint.ts";
 import { derivative } from "../graph/derivative.ts";
-import type { Range } from "../ground/range.ts";
 import type { Taken } from "../loop/checkBelongs.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import { rangesOf } from "../states/enclosedBalance.ts";
+import { rangeAt } from "../search/interval.ts";
 import type { Bounds } from "./bounds.ts";
 
 /** A number with its proved bounds. */
@@ -77,8 +77,7 @@ function boundsReader(loop: Loop, inputs: readonly number[], outputs: readonly n
   return ({ low, high }: Taken): Bounds[] => {
     kernel(low, high, out);
     return outputs.map((_, i) => {
-      const [lo, hi, err] = out.subarray(3 * i) as unknown as [number, number, number];
-      const bounds: Range = [lo - err, hi + err];
+      const bounds = rangeAt(out, i);
       return bounds.every(Number.isFinite) ? bounds : null;
     });
   };

@@ -5,7 +5,8 @@ import type { Range } from "../ground/range.ts";
 import { checkedNumber, showRange } from "../ground/range.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import { inputsOf } from "./inputs.ts";
+import { rangeAt } from "../search/interval.ts";
+import { inputsOf, rangesOf } from "./inputs.ts";
 import type { Couplings, Givens, Loop, Variables } from "./types.ts";
 
 /** What must be known of a state to take it up again: a `State` is one, also after `JSON.parse`. */
@@ -94,20 +95,16 @@ function balancesOf(loop: Loop): Balances {
   return made;
 }
 
-function enclosedBalances({ graph, variables, givens, flows }: Loop): Balances {
+function enclosedBalances(loop: Loop): Balances {
+  const { graph, variables, givens, flows } = loop;
   const inputs = [...variables, ...givens].map((v) => v.node);
   const outputs = [...variables.map((v) => v.rate), ...flows.map((f) => f.node)];
-  const ranges = new Map<number, Range>();
-  for (const { node, within } of [...variables, ...givens]) if (within) ranges.set(node, within);
   const wide = new Set(variables.map((v) => v.node));
-  const kernel = enclosureKernel(graph, { inputs, outputs, wide, ranges });
+  const kernel = enclosureKernel(graph, { inputs, outputs, wide, ranges: rangesOf(loop) });
   const out = new Float64Array(3 * outputs.length);
   return ({ low, high }) => {
     kernel(low, high, out);
-    const bounds = outputs.map((_, i): Range => {
-      const [lo, hi, err] = out.subarray(3 * i) as unknown as [number, number, number];
-      return [lo - err, hi + err];
-    });
+    const bounds = outputs.map((_, i) => rangeAt(out, i));
     return widened(bounds, variables.length);
   };
 }

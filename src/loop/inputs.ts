@@ -1,6 +1,6 @@
 // The inputs of a loop's readings, and their values at a point.
 import { failUnknown } from "../ground/names.ts";
-import { checkedNumber } from "../ground/range.ts";
+import { checkedNumber, type Range } from "../ground/range.ts";
 import type { Loop } from "./types.ts";
 
 /** The nodes that a reading of this loop takes as inputs: variables, then givens. */
@@ -21,4 +21,11 @@ export function givensAt(loop: Loop, at: Readonly<Record<string, unknown>> = {})
     const set = Object.hasOwn(at, name) ? at[name] : undefined;
     return set === undefined ? value : checkedNumber(set, `at.${name}`, unit, within);
   });
+}
+
+/** The ranges that variables and givens are declared to keep, by node. */
+export function rangesOf({ variables, givens }: Loop): Map<number, Range> {
+  const ranges = new Map<number, Range>();
+  for (const { node, within } of [...variables, ...givens]) if (within) ranges.set(node, within);
+  return ranges;
 }

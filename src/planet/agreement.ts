@@ -1,7 +1,7 @@
 // Inputs that say the same thing twice must agree, and the orbit must stay outside the star.
-import { FOUR_PI } from "../ground/circle.ts";
-import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
+import { blackbodyFlux } from "../greenhouse/blackbodyFlux.ts";
 import { fail } from "../ground/errors.ts";
+import { stellarFlux } from "../star/stellarFlux.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { distanceWays, fluxWays, luminosityWays, type Way } from "./starlight.ts";
@@ -60,12 +60,19 @@ function checkPeriastron(d: PlanetDescription, numbers: Numbers): void {
 function distanceOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {
   const stated = distanceWays(d)[0]?.of(numbers) as number | undefined;
   if (stated !== undefined || luminosity === undefined || d.orbit.flux === undefined) return stated;
-  return Math.sqrt(luminosity / (FOUR_PI * numbers("orbit.flux")));
+  return distanceAt({ luminosity, flux: numbers("orbit.flux") });
 }
 
 function radiusOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {
   if (d.star?.radius !== undefined) return numbers("star.radius");
   if (d.star?.effectiveTemperature === undefined || luminosity === undefined) return undefined;
-  const squared = numbers("star.effectiveTemperature") * numbers("star.effectiveTemperature");
-  return Math.sqrt(luminosity / (FOUR_PI * STEFAN_BOLTZMANN)) / squared;
+  return distanceAt({
+    luminosity,
+    flux: blackbodyFlux({ temperature: numbers("star.effectiveTemperature") }),
+  });
+}
+
+/** Where the star has this flux: the inverse-square law from its value at 1 m. */
+function distanceAt({ luminosity, flux }: { luminosity: number; flux: number }): number {
+  return Math.sqrt(stellarFlux({ luminosity, distance: 1 }) / flux);
 }

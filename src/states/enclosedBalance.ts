@@ -1,8 +1,7 @@
 // Enclosures of a loop's balance, and of its kinks, as functions of temperature.
 import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
-import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKernel.ts";
 import type { Enclosed } from "../search/enclosed.ts";
@@ -56,11 +55,4 @@ export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set(
       for (const kernel of kernels) kernel.prepare(low, high);
     },
   };
-}
-
-/** The ranges that variables and givens are declared to keep, by node. */
-export function rangesOf({ variables, givens }: Loop): Map<number, Range> {
-  const ranges = new Map<number, Range>();
-  for (const { node, within } of [...variables, ...givens]) if (within) ranges.set(node, within);
-  return ranges;
 }

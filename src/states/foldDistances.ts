@@ -1,10 +1,11 @@
 // How far each given is from the fold at which an undecided pair of states would merge.
+
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
+import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKernel.ts";
-import { rangesOf } from "./enclosedBalance.ts";
+import { minus, over, rangeAt } from "../search/interval.ts";
 import type { Undecided } from "./state.ts";
 
 /** Distances for the givens' values, an interval of temperature, and the proved bounds of N there. */
@@ -27,17 +28,12 @@ export function foldDistances(loop: Loop): FoldDistances {
     });
     const out = new Float64Array(3 * givens.length);
     kernel(Float64Array.of(interval[0], ...values), Float64Array.of(interval[1], ...values), out);
-    const bounds = (i: number): Range => [
-      (out[3 * i] as number) - (out[3 * i + 2] as number),
-      (out[3 * i + 1] as number) + (out[3 * i + 2] as number),
-    ];
-    return Object.fromEntries(givens.map(({ name }, i) => [name, minusQuotient(enclosure, bounds(i))]));
+    return Object.fromEntries(givens.map(({ name }, i) => [name, minusQuotient(enclosure, rangeAt(out, i))]));
   };
 }
 
 /** The range of −a/b; `null` if b may be zero. */
 function minusQuotient(a: Range, b: Range): Range | null {
-  if (!(b[0] > 0 || b[1] < 0)) return null;
-  const corners = a.flatMap((x) => b.map((y) => -x / y));
-  return corners.every(Number.isFinite) ? [Math.min(...corners), Math.max(...corners)] : null;
+  const quotient = over(minus(a), b);
+  return quotient.every(Number.isFinite) ? quotient : null;
 }

@@ -1,6 +1,6 @@
 // Arithmetic of a few intervals with outward rounding.
 import type { Range } from "../ground/range.ts";
-import { above, below } from "../search/enclosed.ts";
+import { above, below } from "./enclosed.ts";
 
 /** An interval in one of its three numbers (lo, hi, err) of an enclosure. */
 export const rangeAt = (out: Float64Array, i: number): Range => [

@@ -92,6 +92,7 @@ export { type FormulaOptions, formulaOf, type LoopFormula } from "./loop/formula
 export { holdFixed } from "./loop/holdFixed.ts";
 export { type LawSource, sourcesOf } from "./loop/sourcesOf.ts";
 export type { Budget, Couplings, Flow, Givens, Loop, Named, Tools, Variables } from "./loop/types.ts";
+export { withGivens } from "./loop/withGivens.ts";
 export { orbitMeanFlux } from "./orbit/orbitMeanFlux.ts";
 export { semiMajorAxis } from "./orbit/semiMajorAxis.ts";
 export { temperatureMeanFlux } from "./orbit/temperatureMeanFlux.ts";

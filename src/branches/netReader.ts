@@ -3,6 +3,7 @@
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
+import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Kernel } from "../reading/readingOf.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
@@ -15,7 +16,6 @@ import { enumerateBalance, locate } from "../states/provedSearch.ts";
 import { balanceOf } from "./balanceOf.ts";
 import { signAt } from "./criticals.ts";
 import type { Branch, BranchEnd, BranchPoint } from "./diagram.ts";
-import { kept } from "./kept.ts";
 
 /** A loop along one of its givens, the others set. */
 export interface NetReader {

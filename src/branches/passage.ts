@@ -1,11 +1,12 @@
 // Proves what happens in a narrow stretch of parameters between two numbers of states: a fold, or a state that leaves the range.
+
+import { kept } from "../loop/kept.ts";
 import { type EnclosedBalance, enclosedBalance } from "../states/enclosedBalance.ts";
 import { enumerateBalance } from "../states/provedSearch.ts";
 import { cornerFinder } from "./cornerFinder.ts";
 import type { BranchEnd } from "./diagram.ts";
 import { exitFinder } from "./exitFinder.ts";
 import { foldFinder } from "./foldFinder.ts";
-import { kept } from "./kept.ts";
 import type { Rest, Stretch } from "./stretch.ts";
 
 /** The end of the branches of these states, if it is proved that nothing else happens in the stretch. */

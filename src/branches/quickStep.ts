@@ -2,12 +2,12 @@
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf, rangesOf } from "../loop/inputs.ts";
+import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { above, below, type Sign, signOf } from "../search/enclosed.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import type { Located } from "../states/located.ts";
-import { kept } from "./kept.ts";
 
 /** A state and the givens before and after; the bracket holds the state. */
 export interface Step {

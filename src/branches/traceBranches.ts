@@ -2,6 +2,7 @@
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
 import { givensAt } from "../loop/inputs.ts";
+import { kept } from "../loop/kept.ts";
 import type { Givens, Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
 import { checkedAlong } from "./checkedAlong.ts";
@@ -10,7 +11,6 @@ import type { Diagram, UndecidedStretch } from "./diagram.ts";
 import { diagramOf, type Parts, type Task } from "./diagramOf.ts";
 import { gateCurve } from "./gateCurve.ts";
 import { impliedCurve } from "./impliedCurve.ts";
-import { kept } from "./kept.ts";
 import { type NetReader, netReader } from "./netReader.ts";
 import { partsInColumns } from "./partsInColumns.ts";
 import { partsOnCurve } from "./partsOnCurve.ts";

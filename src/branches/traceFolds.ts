@@ -4,6 +4,7 @@ import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
 import { givensAt, inputsOf } from "../loop/inputs.ts";
+import { kept } from "../loop/kept.ts";
 import type { Givens, Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { checkOneVariable } from "../states/prepared.ts";
@@ -11,7 +12,6 @@ import { checkedAlong } from "./checkedAlong.ts";
 import type { Branch, BranchEnd } from "./diagram.ts";
 import type { Cusp, FoldCurve, FoldCurveEnd, FoldDiagram, FoldPoint } from "./foldDiagram.ts";
 import { gateNodes } from "./gateCurve.ts";
-import { kept } from "./kept.ts";
 import { netReader } from "./netReader.ts";
 import { partsInColumns } from "./partsInColumns.ts";
 

@@ -2,6 +2,7 @@
 import { checkKeys } from "../ground/names.ts";
 import { checkBelongs, type StateLike, type Taken } from "../loop/checkBelongs.ts";
 import { couplingsNamed } from "../loop/holdFixed.ts";
+import { kept } from "../loop/kept.ts";
 import type { Couplings, Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
 import type { Feedbacks } from "./feedbacks.ts";
@@ -51,11 +52,10 @@ interface Prepared {
   readonly name: ReferenceName;
   readonly read: (at: Taken) => Influences;
 }
-const prepared = /* @__PURE__ */ new WeakMap<Loop, Map<string, Prepared>>();
+const prepared = /* @__PURE__ */ kept(() => new Map<string, Prepared>());
 
 function preparedFor(loop: Loop, couplings: Loop["couplings"]): Prepared {
-  const known = prepared.get(loop) ?? new Map<string, Prepared>();
-  prepared.set(loop, known);
+  const known = prepared(loop);
   const ordered = [...couplings].sort((a, b) => a.node - b.node);
   const nodes = ordered.map((c) => c.node);
   const found = known.get(nodes.join());

@@ -7,6 +7,7 @@ import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { rangeAt } from "../search/interval.ts";
 import { inputsOf, rangesOf } from "./inputs.ts";
+import { kept } from "./kept.ts";
 import type { Couplings, Givens, Loop, Variables } from "./types.ts";
 
 /** What must be known of a state to take it up again: a `State` is one, also after `JSON.parse`. */
@@ -84,16 +85,11 @@ function placeOf(place: unknown, path: string, unit: string, within: Range) {
 }
 
 type Balances = (at: Taken) => readonly Range[];
-const prepared = /* @__PURE__ */ new WeakMap<Loop, Balances>();
 
 /** Bounds of every rate of a loop over the bracket of a state; for a sampled loop, the values at its ends. */
-function balancesOf(loop: Loop): Balances {
-  const known = prepared.get(loop);
-  if (known) return known;
-  const made = loop.sampled ? sampledBalances(loop) : enclosedBalances(loop);
-  prepared.set(loop, made);
-  return made;
-}
+const balancesOf = /* @__PURE__ */ kept<Balances>((loop) =>
+  loop.sampled ? sampledBalances(loop) : enclosedBalances(loop),
+);
 
 function enclosedBalances(loop: Loop): Balances {
   const { graph, variables, givens, flows } = loop;

@@ -2,6 +2,7 @@
 import { adjoint } from "../graph/adjoint.ts";
 import { substitute } from "../graph/substitute.ts";
 import type { Range } from "../ground/range.ts";
+import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
@@ -21,7 +22,7 @@ export interface GivenPath {
 /** Makes the balance along a path; what was made before for the same loop is then no longer set. */
 export type PathBalance = (path: GivenPath) => Moving;
 
-const prepared = /* @__PURE__ */ new WeakMap<Loop, Map<string, PathBalance>>();
+const prepared = /* @__PURE__ */ kept(() => new Map<string, PathBalance>());
 
 /** The balances of a loop in which `holdable` (nodes of couplings, at most 30) can be held and `changed` givens change. */
 export function pathBalanceOf(
@@ -29,8 +30,7 @@ export function pathBalanceOf(
   holdable: readonly number[],
   changed: readonly number[],
 ): PathBalance {
-  const known = prepared.get(loop) ?? new Map<string, PathBalance>();
-  prepared.set(loop, known);
+  const known = prepared(loop);
   const key = `${holdable.join()};${changed.join()}`;
   const found = known.get(key);
   if (found) return found;

@@ -5,5 +5,5 @@ export type { PlanetNote, PlanetNoteCode } from "./planet/planetNote.ts";
 export { type PlanetSchema, planetJsonSchema, planetSchema } from "./planet/planetSchema.ts";
 export { PLANET_FORMAT, type PlanetDescription } from "./planet/planetShape.ts";
 export type { Planet, PlanetEquilibriumTemperature, PlanetNames } from "./planet/planetTypes.ts";
-export { readPlanet } from "./planet/readPlanet.ts";
+export { type ReadPlanetOptions, readPlanet } from "./planet/readPlanet.ts";
 export { UNITS, type UnitMeaning } from "./planet/units.ts";

@@ -12,26 +12,45 @@ const AGREEMENT = 0.02;
 /** The values of a description by path. */
 export type Numbers = (path: string) => number;
 
-/** Notes on inputs that agree. Throws `contradiction` with both numbers, `missing`. */
-export function checkAgreement(d: PlanetDescription, numbers: Numbers): PlanetNote[] {
+/** What becomes of two inputs for one quantity that lie far apart: an error, or a caution and the first of them is used. */
+export type Contradictions = "refuse" | "note";
+
+/** Notes on inputs that agree. Throws `contradiction` with both numbers unless that is to be noted, `missing`. */
+export function checkAgreement(
+  d: PlanetDescription,
+  numbers: Numbers,
+  contradictions: Contradictions,
+): PlanetNote[] {
+  const compare = (ways: readonly Way[], name: string, unit: string) =>
+    compared(ways, numbers, { name, unit, contradictions });
   const notes = [
-    ...agreeing(luminosityWays(d), numbers, { name: "luminosity", unit: "W" }),
-    ...agreeing(distanceWays(d), numbers, { name: "semi-major axis", unit: "m" }),
-    ...agreeing(fluxWays(d), numbers, { name: "flux at the semi-major axis", unit: "W m-2" }),
+    ...compare(luminosityWays(d), "luminosity", "W"),
+    ...compare(distanceWays(d), "semi-major axis", "m"),
+    ...compare(fluxWays(d), "flux at the semi-major axis", "W m-2"),
   ];
-  checkPeriastron(d, numbers);
-  return notes;
+  return [...notes, ...checkPeriastron(d, numbers, contradictions)];
 }
 
-function agreeing(
+function compared(
   [first, ...others]: readonly Way[],
   numbers: Numbers,
-  { name, unit }: { name: string; unit: string },
+  { name, unit, contradictions }: { name: string; unit: string; contradictions: Contradictions },
 ): PlanetNote[] {
   return others.map((other) => {
     const [used, spare] = [(first as Way).of(numbers) as number, other.of(numbers) as number];
     const [from, by] = [(first as Way).uses.join(" and "), other.uses.join(" and ")];
     if (!(Math.abs(spare - used) <= AGREEMENT * used)) {
+      if (contradictions === "note") {
+        const text = `${by} give another ${name} than ${from}, which is used: ${spare} against ${used} ${unit}`;
+        return planetNote({
+          code: "inputs-contradict",
+          severity: "caution",
+          about: by,
+          value: spare,
+          unit,
+          text,
+        });
+      }
       fail("contradiction", {
         path: by,
         value: spare,
@@ -44,17 +63,33 @@ function agreeing(
   });
 }
 
-/** Throws `contradiction` when the planet comes as near to the star's centre as the star is large. */
-function checkPeriastron(d: PlanetDescription, numbers: Numbers): void {
+/** A planet that comes as near to the star's centre as the star is large: an error, or a caution. */
+function checkPeriastron(
+  d: PlanetDescription,
+  numbers: Numbers,
+  contradictions: Contradictions,
+): PlanetNote[] {
   const luminosity = luminosityWays(d)[0]?.of(numbers) as number | undefined;
   const distance = distanceOf(d, numbers, luminosity);
   const radius = radiusOf(d, numbers, luminosity);
-  if (distance === undefined || radius === undefined) return;
+  if (distance === undefined || radius === undefined) return [];
   const eccentricity = d.orbit.eccentricity === undefined ? 0 : numbers("orbit.eccentricity");
   const periastron = distance * (1 - eccentricity);
-  if (periastron > radius) return;
+  if (periastron > radius) return [];
   const allowed = `a periastron a(1 − e) above the radius of the star, ${radius}`;
-  fail("contradiction", { path: "orbit", value: periastron, allowed, unit: "m" });
+  if (contradictions === "refuse")
+    fail("contradiction", { path: "orbit", value: periastron, allowed, unit: "m" });
+  const text = `the orbit passes through the star: ${periastron} m is not ${allowed} m`;
+  return [
+    planetNote({
+      code: "inputs-contradict",
+      severity: "caution",
+      about: "orbit",
+      value: periastron,
+      unit: "m",
+      text,
+    }),
+  ];
 }
 
 function distanceOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {

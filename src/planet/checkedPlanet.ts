@@ -1,6 +1,6 @@
 // All checks of a description, in the order in which their errors help most.
 import { fail } from "../ground/errors.ts";
-import { checkAgreement, type Numbers } from "./agreement.ts";
+import { type Contradictions, checkAgreement, type Numbers } from "./agreement.ts";
 import { checkCovers } from "./coverAlbedo.ts";
 import { plainCopy } from "./plainCopy.ts";
 import { planetBudget } from "./planetBudget.ts";
@@ -23,7 +23,7 @@ export interface CheckedPlanet {
 }
 
 /** Checks size and kind of the data, then its shape, its units and ranges, its agreement, and its laws with numbers. */
-export function checkedPlanet(value: unknown): CheckedPlanet {
+export function checkedPlanet(value: unknown, contradictions: Contradictions): CheckedPlanet {
   if (typeof value !== "object" || value === null) {
     fail("unreadable", {
       path: "description",
@@ -41,7 +41,7 @@ export function checkedPlanet(value: unknown): CheckedPlanet {
   checkAverage(description, numbers);
   if (typeof description.albedo === "object" && "covers" in description.albedo)
     checkCovers(description.albedo.covers, numbers);
-  const agreeing = checkAgreement(description, numbers);
+  const agreeing = checkAgreement(description, numbers, contradictions);
   const { report } = planetBudget(description, {
     wire: numbers,
     temperature: TRIAL_TEMPERATURE,

@@ -1,8 +1,5 @@
 // The ports behind the fields of a description: units and ranges come from the laws that take the values.
 import { mixAlbedo } from "../albedo/mixAlbedo.ts";
-import { quadraticAlbedo } from "../albedo/quadraticAlbedo.ts";
-import { rampAlbedo } from "../albedo/rampAlbedo.ts";
-import { tanhAlbedo } from "../albedo/tanhAlbedo.ts";
 import {
   equilibriumTemperature,
   REDISTRIBUTION_DAYSIDE,
@@ -10,9 +7,6 @@ import {
   REDISTRIBUTION_INSTANT,
   REDISTRIBUTION_SUBSTELLAR,
 } from "../greenhouse/equilibriumTemperature.ts";
-import { greyColumnEmission } from "../greenhouse/greyColumnEmission.ts";
-import { greyEmission } from "../greenhouse/greyEmission.ts";
-import { linearEmission } from "../greenhouse/linearEmission.ts";
 import { atmosphereCapacity } from "../heat/atmosphereCapacity.ts";
 import { mixedLayerCapacity } from "../heat/mixedLayerCapacity.ts";
 import { orbitMeanFlux } from "../orbit/orbitMeanFlux.ts";
@@ -70,14 +64,3 @@ export const REDISTRIBUTIONS = {
   instant: REDISTRIBUTION_INSTANT,
   substellar: REDISTRIBUTION_SUBSTELLAR,
 } as const;
-
-/** Laws that may stand in each place, by the name under which they are exported. */
-export const ALBEDO_LAWS = { tanhAlbedo, rampAlbedo, quadraticAlbedo } as const;
-export const LONGWAVE_LAWS = { greyEmission, linearEmission, greyColumnEmission } as const;
-export const HEAT_CAPACITY_LAWS = { mixedLayerCapacity, atmosphereCapacity } as const;
-
-/** The port that a description never fills: it is bound to the temperature of the loop. */
-export const BOUND_PORT = "temperature";
-
-/** Ports that take a temperature difference, by law and port; a test compares this list with the ports' ranges. */
-export const DIFFERENCES: readonly string[] = ["tanhAlbedo.width"];

@@ -3,9 +3,10 @@ import type { Range } from "../ground/range.ts";
 
 /**
  * What a planet's note is about. `assumption`: holds for every number of this planet. `inputs-agree`: two inputs say the
- * same within 2 %, and the first is used. `input-unused`: nothing depends on this input.
+ * same within 2 %, and the first is used. `inputs-contradict`: they do not, and the first is used all the same, as was asked.
+ * `input-unused`: nothing depends on this input.
  */
-export type PlanetNoteCode = "assumption" | "inputs-agree" | "input-unused";
+export type PlanetNoteCode = "assumption" | "inputs-agree" | "inputs-contradict" | "input-unused";
 
 /** A note of a planet; its fields are those of a state's note. */
 export interface PlanetNote {

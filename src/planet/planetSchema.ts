@@ -31,7 +31,7 @@ export const planetSchema: PlanetSchema = {
     vendor: "thermostead",
     validate(value) {
       try {
-        return { value: checkedPlanet(value).description };
+        return { value: checkedPlanet(value, "refuse").description };
       } catch (error) {
         if (!(error instanceof ThermosteadError)) throw error;
         return { issues: [{ message: error.message, path: keysOf(error.path) }] };

@@ -1,9 +1,19 @@
 // Reads a planet from its description.
+
+import { fail } from "../ground/errors.ts";
+import { checkKeys } from "../ground/names.ts";
+import type { Contradictions } from "./agreement.ts";
 import { assumptionNotes, assumptionsOf } from "./assumptions.ts";
 import { checkedPlanet } from "./checkedPlanet.ts";
 import { planetLoop } from "./planetLoop.ts";
 import type { Planet } from "./planetTypes.ts";
 import { unusedNotes } from "./unusedNotes.ts";
+
+/** How to read. */
+export interface ReadPlanetOptions {
+  /** What to do about two inputs for one quantity that differ by more than 2 %: refuse them, unless said. */
+  readonly contradictions?: Contradictions;
+}
 
 /**
  * Reads a planet from its description in the format `thermostead-planet-1` and closes its energy budget:
@@ -12,7 +22,8 @@ import { unusedNotes } from "./unusedNotes.ts";
  * Nothing in a description is ever evaluated: laws are named, units are looked up. The whole description must be plain
  * data of moderate size. Every numeric input that counts becomes a given of the loop named by its path, such as
  * `star.luminosity`, `albedo.cold` or `albedo.covers[0].albedo`. Two inputs that say the same thing must agree within
- * 2 %; the first of them is used and a note says so. The periastron is compared with the radius of the star here, not
+ * 2 %; the first of them is used and a note says so. With `contradictions: "note"` two that do not agree are no error: the
+ * first is used, and a caution says how far apart they are. The periastron is compared with the radius of the star here, not
  * when a given is changed later.
  *
  * Throws `unreadable`, `too-large`, `reserved-name`, `unknown-name`, `missing`, `not-a-number`, `out-of-range`,
@@ -29,8 +40,12 @@ import { unusedNotes } from "./unusedNotes.ts";
  *   heatCapacity: "4.2e8 J m-2 K-1",
  * });
  */
-export function readPlanet(description: unknown): Planet {
-  const checked = checkedPlanet(description);
+export function readPlanet(description: unknown, options: ReadPlanetOptions = {}): Planet {
+  checkKeys(options, "readPlanet", ["contradictions"]);
+  const { contradictions = "refuse" } = options;
+  if (contradictions !== "refuse" && contradictions !== "note")
+    fail("unreadable", { path: "contradictions", value: contradictions, allowed: '"refuse" or "note"' });
+  const checked = checkedPlanet(description, contradictions);
   const { inputs, numbers, agreeing, trial } = checked;
   const loop = planetLoop(checked);
   const albedo = trial.albedo as number;

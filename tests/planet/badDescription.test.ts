@@ -141,6 +141,17 @@ describe("a description is refused for", () => {
 });
 
 describe("contradictions carry both numbers", () => {
+  it("which are noted, and the first is used, where that is asked for", () => {
+    const description = orsolneWith({ orbit: orbit({ flux: "1000 W m-2" }) });
+    const planet = readPlanet(description, { contradictions: "note" });
+    const noted = planet.notes.filter((note) => note.code === "inputs-contradict");
+    expect(noted).toMatchObject([{ about: "orbit.flux", severity: "caution", value: 1000, unit: "W m-2" }]);
+    expect(planet.flux).toBe(readPlanet(orsolne()).flux);
+    expect(refusal(() => readPlanet(description, { contradictions: "ignore" as never })).code).toBe(
+      "unreadable",
+    );
+  });
+
   test("luminosity against radius and effective temperature", () => {
     // 4π·(0.68·6.957e8)²·5.670374419e-8·4680⁴ = 7.650095e25 W (from memory of the formula, worked out with bc)
     const error = refusal(() => readPlanet(orsolneWith({ star: star({ luminosity: "0.42 solLum" }) })));

@@ -4,7 +4,8 @@ import { type Contradictions, checkAgreement, type Numbers } from "./agreement.t
 import { checkCovers } from "./coverAlbedo.ts";
 import { plainCopy } from "./plainCopy.ts";
 import { planetBudget } from "./planetBudget.ts";
-import { type PlanetInput, planetInputs } from "./planetInputs.ts";
+import type { PlanetInput } from "./planetInput.ts";
+import { planetInputs } from "./planetInputs.ts";
 import type { PlanetNote } from "./planetNote.ts";
 import { PLANET_SHAPE, type PlanetDescription } from "./planetShape.ts";
 import { failShape } from "./shapeError.ts";

@@ -7,7 +7,6 @@ import {
   REDISTRIBUTION_INSTANT,
   REDISTRIBUTION_SUBSTELLAR,
 } from "../greenhouse/equilibriumTemperature.ts";
-import { atmosphereCapacity } from "../heat/atmosphereCapacity.ts";
 import { mixedLayerCapacity } from "../heat/mixedLayerCapacity.ts";
 import { orbitMeanFlux } from "../orbit/orbitMeanFlux.ts";
 import { semiMajorAxis } from "../orbit/semiMajorAxis.ts";
@@ -50,7 +49,9 @@ const { redistribution, internalFlux, albedo } = equilibriumTemperature.card.inp
 export const REDISTRIBUTION_PORT = { ...redistribution, about: "redistribution factor" } as const;
 export const INTERNAL_HEAT_PORT = { ...internalFlux, about: "internal heat" } as const;
 export const ALBEDO_PORT = { ...albedo, about: "Bond albedo" } as const;
-export const COVER_PORTS = mixAlbedo.card.inputs.covers.each;
+const { fraction, albedo: coverAlbedo } = mixAlbedo.card.inputs.covers.each;
+export const COVER_PORTS = { share: fraction, albedo: coverAlbedo } as const;
+export const COVERED_PORTS = { covers: { each: COVER_PORTS } } as const;
 export const HEAT_CAPACITY_PORT = {
   ...mixedLayerCapacity.card.output,
   within: [0, 1e15],

@@ -3,7 +3,7 @@ import type { ZodMiniLiteral, ZodMiniObject, ZodMiniOptional } from "zod/mini";
 import { literal, optional, strictObject } from "zod/mini";
 import type { Port, Ports } from "../graph/card.ts";
 import type { Law } from "../law/types.ts";
-import { BOUND_PORT } from "./fieldPorts.ts";
+import { BOUND_PORT } from "./fieldLaws.ts";
 import { type ValueSchema, valueSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 

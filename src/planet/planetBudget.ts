@@ -4,7 +4,7 @@ import { equilibriumTemperature, REDISTRIBUTION_GLOBAL } from "../greenhouse/equ
 import type { Budget } from "../loop/types.ts";
 import { localAbsorbedFlux } from "../star/localAbsorbedFlux.ts";
 import { coverAlbedo } from "./coverAlbedo.ts";
-import { ALBEDO_LAWS, HEAT_CAPACITY_LAWS, LONGWAVE_LAWS } from "./fieldPorts.ts";
+import { ALBEDO_LAWS, HEAT_CAPACITY_LAWS, LONGWAVE_LAWS } from "./fieldLaws.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { meanFlux } from "./starlight.ts";
 import { callLaw, type Wire } from "./wire.ts";

@@ -1,14 +1,12 @@
 // The shape of a description. What values mean and whether they agree is checked after it.
 import type { output } from "zod/mini";
 import { array, discriminatedUnion, literal, optional, strictObject, string, union } from "zod/mini";
+import { ALBEDO_LAWS, HEAT_CAPACITY_LAWS, LONGWAVE_LAWS } from "./fieldLaws.ts";
 import {
-  ALBEDO_LAWS,
   ALBEDO_PORT,
   COVER_PORTS,
-  HEAT_CAPACITY_LAWS,
   HEAT_CAPACITY_PORT,
   INTERNAL_HEAT_PORT,
-  LONGWAVE_LAWS,
   ORBIT_PORTS,
   REDISTRIBUTION_PORT,
   REDISTRIBUTIONS,
@@ -55,7 +53,7 @@ const redistribution = worded(
 );
 
 const share = worded(
-  union([worded(literal("rest"), '"rest"'), ...pureSchema(COVER_PORTS.fraction).def.options]),
+  union([worded(literal("rest"), '"rest"'), ...pureSchema(COVER_PORTS.share).def.options]),
   'a number from 0 to 1, or "rest"',
   { description: "share of the surface" },
 );

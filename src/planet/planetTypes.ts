@@ -1,7 +1,7 @@
 // What reading a description gives.
 import type { Loop } from "../loop/types.ts";
 import type { PlanetAssumptions } from "./assumptions.ts";
-import type { PlanetInput } from "./planetInputs.ts";
+import type { PlanetInput } from "./planetInput.ts";
 import type { PlanetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 

@@ -7,7 +7,7 @@ import {
   DIFFERENCES,
   HEAT_CAPACITY_LAWS,
   LONGWAVE_LAWS,
-} from "../../src/planet/fieldPorts.ts";
+} from "../../src/planet/fieldLaws.ts";
 import { planetJsonSchema } from "../../src/planet/planetSchema.ts";
 
 const LAWS = Object.entries({ ...ALBEDO_LAWS, ...LONGWAVE_LAWS, ...HEAT_CAPACITY_LAWS });

@@ -15,8 +15,9 @@ export const REDISTRIBUTION_SUBSTELLAR = 1;
 /**
  * Equilibrium temperature: εσT⁴ = f·S(1 − A) + F_i, solved for T in K. It is not the surface temperature.
  * Stellar flux normal to the beam and internal flux (per unit of whole area, not multiplied by f) in W m⁻², Bond albedo
- * between 0 and 1, emissivity above 0 (1 unless said). The redistribution factor f between 1/4 and 1 must be given: 1/4
- * whole sphere, 1/2 day side, 2/3 day side without transport seen from the star, 1 substellar point. Errors: as for every law.
+ * between 0 and 1, emissivity above 0 (1 unless said). The redistribution factor f between 0 and 1 must be given: 1/4
+ * whole sphere, 1/2 day side, 2/3 day side without transport seen from the star, 1 substellar point, from 0 to 1/4 a night
+ * side. Errors: as for every law.
  * Source: Hansen 2008; Cowan & Agol 2011, ApJ 729, 54.
  */
 export const equilibriumTemperature = /* @__PURE__ */ defineLaw({
@@ -26,7 +27,7 @@ export const equilibriumTemperature = /* @__PURE__ */ defineLaw({
   inputs: {
     flux: /* @__PURE__ */ fluxPort(),
     albedo: /* @__PURE__ */ albedoPort("A"),
-    redistribution: { symbol: "f", unit: "1", within: [0.25, 1], about: "redistribution factor" },
+    redistribution: { symbol: "f", unit: "1", within: [0, 1], about: "redistribution factor" },
     emissivity: { symbol: "ε", unit: "1", within: [1e-9, 1], default: 1, about: "emissivity" },
     internalFlux: { symbol: "F_i", unit: "W m-2", within: [0, 1e9], default: 0, about: "internal heat" },
   },

@@ -4,8 +4,8 @@ import { albedoPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Starlight absorbed per unit of the area over which its heat is spread: F = f·S(1 − α), in W m⁻².
- * Flux normal to the beam in W m⁻², Bond albedo between 0 and 1, redistribution factor f between 1/4 (whole sphere, the
- * same as `absorbedFlux`) and 1 (substellar point). Errors: as for every law.
+ * Flux normal to the beam in W m⁻², Bond albedo between 0 and 1, redistribution factor f between 0 and 1: 1/4 for the
+ * whole sphere (the same as `absorbedFlux`), 1 for the substellar point. Errors: as for every law.
  * Source: Hansen 2008; Cowan & Agol 2011, ApJ 729, 54.
  */
 export const localAbsorbedFlux = /* @__PURE__ */ defineLaw({
@@ -15,7 +15,7 @@ export const localAbsorbedFlux = /* @__PURE__ */ defineLaw({
   inputs: {
     flux: /* @__PURE__ */ fluxPort(),
     albedo: /* @__PURE__ */ albedoPort(),
-    redistribution: { symbol: "f", unit: "1", within: [0.25, 1], about: "redistribution factor" },
+    redistribution: { symbol: "f", unit: "1", within: [0, 1], about: "redistribution factor" },
   },
   source: "Hansen 2008, ApJS 179, 484; Cowan & Agol 2011, ApJ 729, 54",
   write({ flux, albedo, redistribution }) {

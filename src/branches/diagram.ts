@@ -16,11 +16,11 @@ export interface BranchPoint {
 /** Where a branch ends. */
 export interface BranchEnd {
   /**
-   * `fold`: it turns back smoothly and goes on as its neighbour; `corner`: the same at a kink of a law; `between`: at an end
-   * of the range of the parameter; `within`: at an end of the range of temperature; `undecided`: next to a stretch where
-   * nothing is proved.
+   * `fold`: it turns back smoothly and goes on as its neighbour; `corner`: the same at a kink of a law; `transcritical`:
+   * another branch crosses, and both go on with each other's stability; `between`: at an end of the range of the parameter;
+   * `within`: at an end of the range of temperature; `undecided`: next to a stretch where nothing is proved.
    */
-  readonly kind: "fold" | "corner" | "between" | "within" | "undecided";
+  readonly kind: "fold" | "corner" | "transcritical" | "between" | "within" | "undecided";
   readonly at: number;
   /** Proved bounds of the parameter there. */
   readonly atBracket: Range;
@@ -61,6 +61,22 @@ export interface Fold {
   readonly branches: readonly [number, number];
 }
 
+/** A point at which two branches cross and exchange their stability (a transcritical point). Proved. */
+export interface BranchCrossing {
+  readonly kind: "transcritical";
+  readonly at: number;
+  /** Proved bounds of the parameter. */
+  readonly atBracket: Range;
+  /** K. */
+  readonly temperature: number;
+  /** Proved bounds of the temperature, K. */
+  readonly temperatureBracket: Range;
+  /** Indices of the cooler and the warmer branch at lower parameters. */
+  readonly below: readonly [number, number];
+  /** The same at higher parameters; the stable one of these goes on where the stable one below ends. */
+  readonly above: readonly [number, number];
+}
+
 /** What happens when a slow change of the parameter passes the end of a stable branch. */
 export interface Jump {
   /** `rise`: the parameter grows; `fall`: it shrinks. */
@@ -95,10 +111,13 @@ export interface UndecidedStretch {
   /**
    * `edge`: a fold or a state on an end of a range, inside or outside. `cusp`: two folds about to merge, or none.
    * `continuum`: balanced, as far as can be told, on a whole stretch of temperatures at one parameter. `level`: a temperature
-   * that is balanced whatever the parameter is. `count`: parameters at which the number of states is not proved. `undefined`:
-   * the budget has no finite value somewhere. `effort`: the search stopped before. `other`: none of these.
+   * that is balanced whatever the parameter is. `transcritical`: two branches cross and exchange their stability, or they turn
+   * away from each other closer than rounding can tell. `count`: parameters at which the number of states is not proved.
+   * `undefined`: the budget has no finite value somewhere. `effort`: the search stopped before. `other`: none of these.
    */
-  readonly kind: "edge" | "cusp" | "continuum" | "level" | "count" | "undefined" | "effort" | "other";
+  readonly kind:
+    | ("edge" | "cusp" | "continuum" | "level" | "transcritical")
+    | ("count" | "undefined" | "effort" | "other");
 }
 
 /** The diagram of temperature against one parameter. A plain frozen object: it survives `JSON.stringify` and back. */
@@ -119,6 +138,8 @@ export interface Diagram<A extends string = string> {
   readonly branches: readonly Branch[];
   /** By rising temperature. */
   readonly folds: readonly Fold[];
+  /** By rising temperature. */
+  readonly crossings: readonly BranchCrossing[];
   readonly jumps: readonly Jump[];
   readonly gaps: readonly Gap[];
   readonly undecided: readonly UndecidedStretch[];

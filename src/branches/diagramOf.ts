@@ -2,7 +2,7 @@
 import { CONSTANT_SET } from "../ground/constants.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
-import type { Branch, Diagram, Fold, UndecidedStretch } from "./diagram.ts";
+import type { Branch, BranchCrossing, Diagram, Fold, UndecidedStretch } from "./diagram.ts";
 import { fixedGivens } from "./fixedGivens.ts";
 import { gapsOf } from "./gapsOf.ts";
 import { jumpsOf } from "./jumpsOf.ts";
@@ -26,6 +26,7 @@ export interface Parts {
   readonly method: Diagram["method"];
   readonly branches: readonly Branch[];
   readonly folds: readonly Fold[];
+  readonly crossings: readonly BranchCrossing[];
   readonly undecided: readonly UndecidedStretch[];
   readonly cost: Diagram["cost"];
 }
@@ -33,7 +34,7 @@ export interface Parts {
 /** The diagram of these parts. */
 export function diagramOf(loop: Loop, task: Task, net: NetReader, parts: Parts): Diagram {
   const { name, place, givens, between, within } = task;
-  const { method, branches, folds, undecided, cost } = parts;
+  const { method, branches, folds, crossings, undecided, cost } = parts;
   const complete = undecided.length === 0 && !loop.sampled;
   const middle = within[0] + (within[1] - within[0]) / 2;
   return Object.freeze({
@@ -45,7 +46,8 @@ export function diagramOf(loop: Loop, task: Task, net: NetReader, parts: Parts):
     method,
     branches: Object.freeze(branches),
     folds: Object.freeze(folds),
-    jumps: Object.freeze(jumpsOf(branches, folds, (branch, p) => net.stateOn(branch, p)?.at)),
+    crossings: Object.freeze(crossings),
+    jumps: Object.freeze(jumpsOf({ branches, folds, crossings }, (branch, p) => net.stateOn(branch, p)?.at)),
     gaps: Object.freeze(gapsOf(branches, between, (p) => net.sign(p, middle))),
     undecided: Object.freeze(undecided.map((u) => Object.freeze(u))),
     complete,

@@ -1,7 +1,7 @@
 // Joins the states of columns into branches.
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
-import type { Branch, BranchEnd, BranchPoint, Fold } from "./diagram.ts";
+import type { Branch, BranchCrossing, BranchEnd, BranchPoint, Fold } from "./diagram.ts";
 import { matchStates } from "./matchStates.ts";
 
 /** The states at one parameter, by rising temperature. */
@@ -22,6 +22,9 @@ export interface Change {
 /** The common end of the branches that are lost or born in a stretch; undefined where it is not proved. */
 export type EndOf = (change: Change) => BranchEnd | undefined;
 
+/** Where two branches meet and four end, in a stretch with as many states on both sides; undefined where none is known. */
+export type MetIn = (parameters: Range) => { readonly index: number; readonly end: BranchEnd } | undefined;
+
 /** A branch while it grows to the right. */
 interface Growing {
   readonly points: (BranchPoint & { readonly sign: Sign })[];
@@ -33,8 +36,10 @@ interface Growing {
 export function joinColumns(
   groups: readonly (readonly Column[])[],
   endOf: EndOf,
-): { branches: Branch[]; folds: Fold[] } {
+  metIn: MetIn,
+): { branches: Branch[]; folds: Fold[]; crossings: BranchCrossing[] } {
   const all: Growing[] = [];
+  const crossed: { end: BranchEnd; below: readonly Growing[]; above: readonly Growing[] }[] = [];
   const pairs: { end: BranchEnd; exists: Fold["exists"]; pair: readonly Growing[] }[] = [];
   const start = ({ states }: Column, i: number, low: BranchEnd): Growing => {
     const grown = { points: [states[i] as Growing["points"][number]], low };
@@ -59,6 +64,8 @@ export function joinColumns(
     const temperaturesOf = ({ states }: Column) => states.map((s) => s.temperature);
     const { kept, lost, born } = matchStates(temperaturesOf(from), temperaturesOf(to));
     const others = kept.length;
+    const met = lost.length + born.length === 0 ? metIn(parameters) : undefined;
+    const meets = (i: number) => met !== undefined && (i === met.index || i === met.index + 1);
     const endsOf = (which: readonly number[], { states }: Column): BranchEnd[] => {
       const gone = which.map((i) => states[i] as BranchPoint);
       const temperatures = gone.map((s) => s.temperature);
@@ -69,8 +76,17 @@ export function joinColumns(
     const right: Growing[] = [];
     for (const [i, j] of kept) {
       const grown = left[i] as Growing;
+      if (met && meets(i)) {
+        grown.high = met.end;
+        right[j] = start(to, j, met.end);
+        continue;
+      }
       grown.points.push(to.states[j] as Growing["points"][number]);
       right[j] = grown;
+    }
+    if (met?.end.kind === "transcritical") {
+      const pair = (list: readonly Growing[]) => list.filter((_, i) => meets(i));
+      crossed.push({ end: met.end, below: pair(left), above: pair(right) });
     }
     const lastEnds = endsOf(lost, from);
     for (const [k, i] of lost.entries()) (left[i] as Growing).high = lastEnds[k] as BranchEnd;
@@ -85,15 +101,32 @@ export function joinColumns(
 
   const coldest = new Map(all.map((g) => [g, Math.min(...g.points.map((p) => p.temperature))]));
   all.sort((a, b) => (coldest.get(a) as number) - (coldest.get(b) as number));
+  const indices = (pair: readonly Growing[]) =>
+    Object.freeze(pair.map((g) => all.indexOf(g))) as [number, number];
   const folds = pairs.map(({ end, exists, pair }): Fold => {
     const { at, atBracket, temperature, temperatureBracket } = end;
-    const branches = pair.map((g) => all.indexOf(g)) as [number, number];
     const kind = end.kind as Fold["kind"];
-    return Object.freeze({ kind, at, atBracket, temperature, temperatureBracket, exists, branches });
+    return Object.freeze({
+      kind,
+      at,
+      atBracket,
+      temperature,
+      temperatureBracket,
+      exists,
+      branches: indices(pair),
+    });
   });
   folds.sort((a, b) => a.temperature - b.temperature);
-  return { branches: all.map(branchOf), folds };
+  const crossings = crossed.map(({ end, below, above }): BranchCrossing => {
+    const { at, atBracket, temperature, temperatureBracket } = end;
+    const around = { at, atBracket, temperature, temperatureBracket };
+    return Object.freeze({ kind: "transcritical", ...around, below: indices(below), above: indices(above) });
+  });
+  crossings.sort((a, b) => a.temperature - b.temperature);
+  return { branches: all.map(branchOf), folds, crossings };
 }
+
+const isZero = (kind: BranchEnd["kind"]): boolean => kind === "fold" || kind === "transcritical";
 
 const isFold = (end: BranchEnd | undefined): end is BranchEnd =>
   end?.kind === "fold" || end?.kind === "corner";
@@ -113,10 +146,10 @@ const STABILITY = { [-1]: "stable", 0: "undecided", 1: "unstable" } as const;
 
 function branchOf({ points, low, high }: Growing): Branch {
   const ends = [low, high as BranchEnd] as const;
-  // at a fold λ is zero; a state that leaves the range has that of its last point
+  // at a fold and at a crossing λ is zero; a state that leaves the range has that of its last point
   const [left, right] = ends.map(({ kind, at, temperature }, i): BranchPoint => {
     const next = (i === 0 ? points[0] : points.at(-1)) as BranchPoint;
-    return { at, temperature, feedbackParameter: kind === "fold" ? 0 : next.feedbackParameter };
+    return { at, temperature, feedbackParameter: isZero(kind) ? 0 : next.feedbackParameter };
   }) as [BranchPoint, BranchPoint];
   const inner = points.map(({ at, temperature, feedbackParameter }) => ({
     at,

@@ -1,8 +1,14 @@
 // Where the climate goes when a slow change of the parameter passes the end of a stable branch.
-import type { Branch, BranchEnd, Fold, Jump } from "./diagram.ts";
+import type { Branch, BranchCrossing, BranchEnd, Fold, Jump } from "./diagram.ts";
 
 /** The temperature of a branch at a parameter inside its range, if its state is found. */
 export type TemperatureOn = (branch: Branch, parameter: number) => number | undefined;
+
+interface Met {
+  readonly branches: readonly Branch[];
+  readonly folds: readonly Fold[];
+  readonly crossings: readonly BranchCrossing[];
+}
 
 interface Lost {
   readonly end: BranchEnd;
@@ -11,14 +17,10 @@ interface Lost {
 }
 
 /**
- * The jumps of all stable branches. Beyond a fold N has one sign up to the next state: where the branch lost its state to a
+ * The jumps of all stable branches; where two branches cross the climate goes on along the one that is stable. Beyond a fold N has one sign up to the next state: where the branch lost its state to a
  * warmer neighbour, nothing cools the planet any more, and it warms; where to a cooler one, it cools.
  */
-export function jumpsOf(
-  branches: readonly Branch[],
-  folds: readonly Fold[],
-  temperatureOn: TemperatureOn,
-): Jump[] {
+export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: TemperatureOn): Jump[] {
   const known = new Map<string, Lost | undefined>();
   const lostFrom = (from: number, direction: Jump["direction"]): Lost | undefined => {
     const key = `${direction} ${from}`;
@@ -44,13 +46,21 @@ export function jumpsOf(
     });
     return { end, to, leaves: to ? null : side > 0 ? "hotter" : "colder" };
   };
+  /** The stable branch behind a crossing in which a branch ends. */
+  const onward = (from: number, direction: Jump["direction"]): number | undefined => {
+    const [here, beyond] =
+      direction === "rise" ? (["below", "above"] as const) : (["above", "below"] as const);
+    const crossing = crossings.find((c) => c[here].includes(from));
+    return crossing?.[beyond].find((i) => branches[i]?.stability === "stable");
+  };
   /** Follows a slow way back from a landing until it meets the branch that was left. */
   const returnOf = (home: number, { to }: Lost, back: Jump["direction"]): number | null => {
     let at = to?.branch;
     for (let i = 0; at !== undefined && i < branches.length; i++) {
+      const { low, high }: Branch = branches[at] as Branch;
       const lost = lostFrom(at, back);
-      at = lost?.to?.branch;
-      if (lost && at === home) return lost.end.at;
+      at = lost ? lost.to?.branch : onward(at, back);
+      if (at === home) return lost ? lost.end.at : (back === "rise" ? high : low).at;
     }
     return null;
   };

@@ -2,9 +2,11 @@
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import { proveCount } from "../states/proveCount.ts";
+import type { BranchEnd, UndecidedStretch } from "./diagram.ts";
 import type { Parts, Task } from "./diagramOf.ts";
 import { fixedGivens } from "./fixedGivens.ts";
 import { type Change, type Column, joinColumns } from "./joinColumns.ts";
+import { type Met, meetingOf } from "./meeting.ts";
 import type { NetReader } from "./netReader.ts";
 import { passageOf } from "./passage.ts";
 
@@ -22,11 +24,11 @@ const COLUMN_EFFORT = 2000;
 /**
  * Proves the number of states over tiles of the parameter's range (or samples it, for a loop that cannot be enclosed) and
  * joins the states of each tile into branches: where their number is proved they never meet, so they keep their order. In
- * the narrow stretches between, a fold or a state that leaves the range is proved, or the stretch is undecided.
+ * the narrow stretches between, a fold, a crossing or a state that leaves the range is proved, or the stretch is undecided.
  */
 export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
   const { within, givens } = task;
-  const { stretches, cost } = loop.sampled ? sampledStretches(task, net) : provedStretches(loop, task);
+  const { stretches: found, cost } = loop.sampled ? sampledStretches(task, net) : provedStretches(loop, task);
   const columnAt = (at: number): Column => {
     const { zeros, boxes, points } = net.enumerate(at, within, COLUMN_EFFORT);
     cost.boxes += boxes;
@@ -36,6 +38,9 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
     });
     return { at, states };
   };
+  const { stretches, met, folded } = loop.sampled
+    ? { stretches: found, met: new Map<number, Met>(), folded: new Map<number, BranchEnd>() }
+    : looked(loop, task, found, columnAt);
   const groups = stretches.flatMap(({ parameters, count }) => {
     if (count === null) return [];
     const columns = placesIn(parameters).map(columnAt);
@@ -45,15 +50,61 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
   const endOf = (change: Change) => {
     const end = loop.sampled
       ? sampledEnd(change, within)
-      : passageOf(loop, task.name)({ ...change, within, givens });
+      : (folded.get(change.parameters[0]) ?? passageOf(loop, task.name)({ ...change, within, givens }));
     if (end) proved.add(change.parameters[0]);
     return end;
   };
-  const { branches, folds } = joinColumns(groups, endOf);
+  const metIn = ([from]: Range) => {
+    const meeting = met.get(from);
+    if (meeting?.kind === "crossing") proved.add(from);
+    return meeting?.kind === "crossing" || meeting?.kind === "near" ? meeting : undefined;
+  };
+  const { branches, folds, crossings } = joinColumns(groups, endOf, metIn);
   const undecided = stretches
     .filter(({ count, parameters }) => count === null && !proved.has(parameters[0]))
-    .map(({ parameters }) => ({ temperatures: within, parameters, kind: "count" as const }));
-  return { method: loop.sampled ? "samples" : "tiles", branches, folds, undecided, cost };
+    .map(({ parameters }): UndecidedStretch => {
+      const meeting = met.get(parameters[0]);
+      if (meeting?.kind !== "near") return { temperatures: within, parameters, kind: "count" };
+      return { temperatures: meeting.end.temperatureBracket, parameters, kind: "transcritical" };
+    });
+  return { method: loop.sampled ? "samples" : "tiles", branches, folds, crossings, undecided, cost };
+}
+
+/** Looks into the stretches between two of the same number of states, where two of them may meet. */
+function looked(
+  loop: Loop,
+  { name, within, givens }: Task,
+  found: readonly Stretch[],
+  columnAt: (at: number) => Column,
+) {
+  const met = new Map<number, Met>();
+  const folded = new Map<number, BranchEnd>();
+  const stretches = found.flatMap((stretch, i): Stretch[] => {
+    const { parameters, count } = stretch;
+    const around = [found[i - 1]?.count ?? null, found[i + 1]?.count ?? null];
+    if (count !== null || around[0] === null || around[0] !== around[1]) return [stretch];
+    const [before, after] = parameters.map((p) => columnAt(p).states.map((s) => s.temperature)) as [
+      number[],
+      number[],
+    ];
+    if (before.length !== around[0] || after.length !== around[0]) return [stretch];
+    const meeting = meetingOf(loop, name)({ parameters, before, after }, { within, givens });
+    if (!meeting) return [stretch];
+    if (meeting.kind === "apart") return [{ parameters, count: around[0] }];
+    if (meeting.kind !== "gap") {
+      met.set(parameters[0], meeting);
+      return [stretch];
+    }
+    const { at, ends } = meeting;
+    folded.set(parameters[0], ends[0]);
+    folded.set(at, ends[1]);
+    return [
+      { parameters: [parameters[0], at], count: null },
+      { parameters: [at, at], count: around[0] - 2 },
+      { parameters: [at, parameters[1]], count: null },
+    ];
+  });
+  return { stretches, met, folded };
 }
 
 function provedStretches(loop: Loop, { name, givens, between, within, effort }: Task) {

@@ -51,7 +51,7 @@ export function partsOnCurve(curve: Curve, task: Task, net: NetReader): Parts {
   for (const { stability, temperatures, parameters } of branches) {
     if (stability === "undecided") undecided.push({ temperatures, parameters, kind: "other" });
   }
-  return { method: curve.method, branches, folds, undecided, cost };
+  return { method: curve.method, branches, folds, crossings: [], undecided, cost };
 }
 
 /** The fold at the end that two branches share. */

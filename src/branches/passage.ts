@@ -29,7 +29,8 @@ export const passageOf = /* @__PURE__ */ kept<Passage>((loop, along) => {
   };
 });
 
-function restCounter(balance: EnclosedBalance, place: number): Rest {
+/** Counts the states outside of a range of temperature. */
+export function restCounter(balance: EnclosedBalance, place: number): Rest {
   return ({ parameters, others, within, givens }, [from, to]) => {
     const [low, high] = parameters.map((p) => givens.map((v, i) => (i === place ? p : v)));
     balance.set(low as number[], high as number[]);

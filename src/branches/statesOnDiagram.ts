@@ -22,7 +22,8 @@ export interface StatesOnDiagram<N extends string = string> {
 /**
  * The states of a loop at one value of a diagram's parameter: one on every branch whose range holds it, found between the
  * ends of that branch. `loop` is the one that the diagram was traced for; the diagram may come from `JSON.parse`. Inside the
- * bracket of a fold it is not known whether its two states exist, and `complete` is false.
+ * bracket of a fold it is not known whether its two states exist, nor inside that of a crossing whether they are one; there
+ * `complete` is false.
  *
  * Throws `out-of-range` outside of the diagram, `not-a-number`, `unknown-name` for a diagram of another loop.
  */
@@ -43,7 +44,7 @@ export function statesOnDiagram<N extends string>(
     states.push(state as State<N>);
     branches.push(i);
   });
-  const doubtful = diagram.folds.some((f) => inside(f.atBracket));
+  const doubtful = [...diagram.folds, ...diagram.crossings].some((f) => inside(f.atBracket));
   const count = diagram.branches.filter((b) => inside(b.parameters)).length;
   const complete = diagram.complete && !doubtful && count === states.length;
   return Object.freeze({

@@ -96,7 +96,7 @@ export function traceFolds<N extends string>(
   });
 
   function endName({ kind }: BranchEnd): FoldCurveEnd {
-    return kind === "fold" || kind === "corner" ? "cusp" : kind;
+    return kind === "fold" || kind === "corner" ? "cusp" : kind === "transcritical" ? "undecided" : kind;
   }
 }
 

@@ -1,7 +1,8 @@
-import { add, div, fourth, mul, product } from "../graph/operations.ts";
+import { div, fourth, mul } from "../graph/operations.ts";
 import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
 import { outgoingPort, temperaturePort } from "../law/ports.ts";
+import { closurePort, greyBlanket, opticalDepthPort } from "./greyBlanket.ts";
 
 /**
  * Emission to space of a grey column in radiative equilibrium over a black ground: F = σT⁴/(1 + ½·closure·τ), in W m⁻².
@@ -14,17 +15,12 @@ export const greyColumnEmission = /* @__PURE__ */ defineLaw({
   output: /* @__PURE__ */ outgoingPort(),
   inputs: {
     temperature: /* @__PURE__ */ temperaturePort("T", "temperature of the ground"),
-    opticalDepth: {
-      symbol: "τ",
-      unit: "1",
-      within: [0, 1e6],
-      about: "longwave optical depth of the whole column",
-    },
-    closure: { symbol: "D", unit: "1", within: [1, 2], default: 1.5, about: "diffusivity factor" },
+    opticalDepth: /* @__PURE__ */ opticalDepthPort(),
+    closure: /* @__PURE__ */ closurePort(),
   },
   source: "Eddington approximation; Goody & Yung 1989, Atmospheric Radiation",
   write({ temperature, opticalDepth, closure }) {
-    const blanket = add(1, product(0.5, closure, opticalDepth));
+    const blanket = greyBlanket(closure, opticalDepth);
     return div(mul(STEFAN_BOLTZMANN, fourth(temperature)), blanket);
   },
 });

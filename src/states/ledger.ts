@@ -9,7 +9,7 @@ import type { Ledger } from "./state.ts";
 const CLOSURE = 1e-12;
 
 /** Reservoirs without bounds, whose storage is not asked: they give and take what the planet needs. */
-const BOUNDLESS: readonly string[] = ["space", "interior"];
+export const BOUNDLESS: readonly string[] = ["space", "interior"];
 
 /** Makes ledgers from the values of the flows, in order, and the net flux. */
 export type LedgerWriter = (flowValues: Float64Array, net: number) => Ledger;
@@ -57,7 +57,8 @@ function openNote(about: string, value: number, bound: number): Note {
   return deepFreeze({ code: "open-reservoir", severity: "invalid", about, ...rest });
 }
 
-function signedFlows(ledger: Ledger, reservoir: string): number[] {
+/** What flows in, and what flows out as negative numbers, W m⁻². */
+export function signedFlows(ledger: Pick<Ledger, "flows">, reservoir: string): number[] {
   const signed: number[] = [];
   for (const { from, to, value } of ledger.flows) {
     if (to === reservoir) signed.push(value);

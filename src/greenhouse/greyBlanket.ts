@@ -1,0 +1,24 @@
+// What the grey column and its layers have in common: how much more the ground emits than leaves at the top.
+import { add, product } from "../graph/operations.ts";
+import type { Of, Value } from "../graph/quantity.ts";
+
+/** Longwave optical depth of a whole column. */
+export const opticalDepthPort = () =>
+  ({
+    symbol: "τ",
+    unit: "1",
+    within: [0, 1e6],
+    about: "longwave optical depth of the whole column",
+  }) as const;
+
+/** Closure of the two-stream equations. */
+export const closurePort = () =>
+  ({ symbol: "D", unit: "1", within: [1, 2], default: 1.5, about: "diffusivity factor" }) as const;
+
+/** Optical depth along the slanted path of the streams, halved: ½Dτ. */
+export const halfSlantDepth = <N extends string = never>(closure: Value<N>, opticalDepth: Value<N>): Of<N> =>
+  product(0.5, closure, opticalDepth);
+
+/** σT⁴ of the ground over what leaves at the top of a column in radiative equilibrium: 1 + ½Dτ. */
+export const greyBlanket = <N extends string = never>(closure: Value<N>, opticalDepth: Value<N>): Of<N> =>
+  add(1, halfSlantDepth(closure, opticalDepth) as Value<N>);

@@ -1,0 +1,29 @@
+import { mul, sqrt } from "../graph/operations.ts";
+import { defineLaw } from "../law/defineLaw.ts";
+import { temperaturePort } from "../law/ports.ts";
+import { closurePort, greyBlanket, opticalDepthPort } from "./greyBlanket.ts";
+
+/**
+ * Temperature of the black ground under a grey column in radiative equilibrium: T_g = T_e·(1 + ½Dτ)^¼, in K. The air
+ * that touches the ground is colder, and the skin at the top is colder still (`greySkinTemperature`).
+ * Effective temperature in K, total longwave optical depth from 0, closure (diffusivity factor) 3/2 for Eddington's or 2.
+ * Errors: as for every law. Source: Eddington's grey atmosphere; Goody & Yung 1989, Atmospheric Radiation.
+ */
+export const greyGroundTemperature = /* @__PURE__ */ defineLaw({
+  name: "greyGroundTemperature",
+  about: "Temperature of the black ground under a grey column in radiative equilibrium.",
+  output: { symbol: "T_g", unit: "K", within: [0, 3.2e6], about: "ground temperature" },
+  inputs: {
+    effectiveTemperature: /* @__PURE__ */ temperaturePort(
+      "T_e",
+      "effective temperature of emission to space",
+    ),
+    opticalDepth: /* @__PURE__ */ opticalDepthPort(),
+    closure: /* @__PURE__ */ closurePort(),
+  },
+  source: "Eddington approximation; Goody & Yung 1989, Atmospheric Radiation",
+  write({ effectiveTemperature, opticalDepth, closure }) {
+    const blanket = greyBlanket(closure, opticalDepth);
+    return mul(sqrt(sqrt(blanket)), effectiveTemperature);
+  },
+});

@@ -15,6 +15,8 @@ const ROOMS = [
   ["greenhouse", "Emission and temperature"],
   ["heat", "Heat capacity"],
   ["forcing", "Forcing"],
+  ["water", "Water and frost"],
+  ["habitable", "Habitable zone"],
   ["carbon", "Carbon"],
   ["biosphere", "Biosphere"],
 ] as const;
@@ -43,7 +45,7 @@ function isLaw(entry: [string, unknown]): entry is [string, AnyLaw] {
 }
 
 function sectionOf(name: string, law: AnyLaw): string {
-  const { about, output, inputs, published, source } = law.card;
+  const { about, output, inputs, published, source, reduces } = law.card;
   const lines = core.formulaOf(law).split("\n");
   lines.push(`${name} = ${lines.pop()}`);
   const parts = [
@@ -61,6 +63,7 @@ function sectionOf(name: string, law: AnyLaw): string {
     ...Object.entries(published).map(
       ([port, within]) => `Published range of ${port}: ${rangeOf(within, unitOf(inputs, port))}.`,
     ),
+    ...(reduces ? ["A reduction of cooling: a budget takes it on its cooling side, subtracted."] : []),
     `Source: ${source.replace(/\.$/, "")}.`,
   ];
   return parts.join("\n\n");

@@ -34,6 +34,8 @@ export interface LawCard<I extends Ports = Ports> {
   /** Ranges that the source covers; outside there is an answer, with a note. */
   readonly published: Readonly<Record<string, Range>>;
   readonly source: string;
+  /** Set for a forcing: it reduces the cooling side of a budget, and is refused where it would do anything else. */
+  readonly reduces?: "cooling";
   /** True for a law given as an ordinary function: it cannot be enclosed, its slope is a difference quotient. */
   readonly sampled: boolean;
 }

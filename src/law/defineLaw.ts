@@ -26,7 +26,7 @@ export function defineLaw<const I extends Ports>(spec: LawSpec<I>): Law<I> {
 
 /** The card of a law from its facts. */
 export function cardOf<I extends Ports>(facts: LawFacts<I>, sampled: boolean): LawCard<I> {
-  const { name, about = "", output, inputs, source = "", published = {} } = facts;
+  const { name, about = "", output, inputs, source = "", published = {}, reduces } = facts;
   return Object.freeze({
     name,
     about,
@@ -35,6 +35,7 @@ export function cardOf<I extends Ports>(facts: LawFacts<I>, sampled: boolean): L
     source,
     published: published as LawCard["published"],
     sampled,
+    ...(reduces ? { reduces } : {}),
   });
 }
 

@@ -45,6 +45,8 @@ export interface LawFacts<I extends Ports> {
   /** Ranges that the source covers; outside there is an answer, with a note. */
   readonly published?: { readonly [K in keyof I]?: Range };
   readonly source?: string;
+  /** For a forcing: a budget takes it on its cooling side only, subtracted. */
+  readonly reduces?: "cooling";
 }
 
 /** The definition of a law. */

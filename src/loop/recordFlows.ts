@@ -5,6 +5,7 @@ import { Quantity } from "../graph/quantity.ts";
 import { dimensionOf } from "../ground/dimension.ts";
 import { fail } from "../ground/errors.ts";
 import { checkedName, checkKeys } from "../ground/names.ts";
+import { checkReductions } from "./checkReductions.ts";
 import type { BudgetRecorder } from "./recordBudget.ts";
 import type { Budget, FlowRecord } from "./types.ts";
 
@@ -24,7 +25,9 @@ export function flowsOf(recorder: BudgetRecorder, budget: Budget): FlowRecord[] 
       checkedName(name, path);
       if (flows.some((f) => f.name === name))
         fail("repeated-name", { path, value: name, allowed: "each flow's name once" });
-      flows.push({ name, sign, ...flowOf(recorder, flow, path, ends) });
+      const written = flowOf(recorder, flow, path, ends);
+      checkReductions(recorder.graph, written.node, sign, path);
+      flows.push({ name, sign, ...written });
     }
   }
   return flows;

@@ -5,10 +5,10 @@ const floors = [
   ["graph"],
   ["reading"],
   ["law", "search"],
-  ["star", "orbit", "albedo", "greenhouse", "forcing", "biosphere", "carbon", "heat"],
+  ["star", "orbit", "albedo", "greenhouse", "forcing", "biosphere", "carbon", "heat", "water", "habitable"],
   ["loop"],
   ["states"],
-  ["feedback"],
+  ["feedback", "ledger"],
   ["branches", "dynamics"],
   ["planet", "chart", "formula", "sweep"],
 ];

@@ -19,7 +19,7 @@ export const stellarBrightening = /* @__PURE__ */ defineLaw({
   about: "Luminosity of the Sun in its history, as a share of today's.",
   output: { symbol: "L/L_0", unit: "1" },
   inputs: {
-    age: { symbol: "t", unit: "s", within: [0, 4.75e17] },
+    age: { symbol: "t", unit: "s", within: [0, 4.75e17], about: "age since hydrogen began to burn" },
   },
   published: { age: [0, SOLAR_AGE] },
   source: "Gough 1981, Solar Physics 74, 21",

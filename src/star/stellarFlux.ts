@@ -1,6 +1,7 @@
 import { div, mul, square } from "../graph/operations.ts";
 import { FOUR_PI } from "../ground/circle.ts";
 import { defineLaw } from "../law/defineLaw.ts";
+import { distancePort, luminosityPort } from "./starPorts.ts";
 
 /**
  * Flux of a star at a distance, normal to the beam: S = L/(4πd²), in W m⁻².
@@ -10,11 +11,8 @@ import { defineLaw } from "../law/defineLaw.ts";
 export const stellarFlux = /* @__PURE__ */ defineLaw({
   name: "stellarFlux",
   about: "Flux of a star at a distance, normal to the beam.",
-  output: { symbol: "S", unit: "W m-2" },
-  inputs: {
-    luminosity: { symbol: "L", unit: "W", within: [0, 1e40] },
-    distance: { symbol: "d", unit: "m", within: [1, 1e22] },
-  },
+  output: { symbol: "S", unit: "W m-2", about: "stellar flux normal to the beam" },
+  inputs: { luminosity: /* @__PURE__ */ luminosityPort(), distance: /* @__PURE__ */ distancePort() },
   source: "inverse-square law",
   write: ({ luminosity, distance }) => div(luminosity, mul(FOUR_PI, square(distance))),
 });

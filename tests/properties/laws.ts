@@ -15,7 +15,17 @@ export const laws: readonly AnyLaw[] = Object.values(door).filter(
 ) as unknown as AnyLaw[];
 
 /** Laws with conditions that join several ports, so that inputs may be refused though each is in its range. */
-export const JOINED: readonly string[] = ["mixAlbedo", "quadraticAlbedo", "rampAlbedo"];
+export const JOINED: readonly string[] = [
+  "bandFraction",
+  "mixAlbedo",
+  "quadraticAlbedo",
+  "rampAlbedo",
+  "iceShare",
+  "bondAlbedo",
+  "cloudyAlbedo",
+  "surfaceShareBelowCloud",
+  "cloudShareAbsorbed",
+];
 
 /** Inputs by port; a list port holds records. */
 export type Inputs = Readonly<Record<string, number | readonly Readonly<Record<string, number>>[]>>;
@@ -37,6 +47,9 @@ const USUAL: Readonly<Record<string, readonly [number, number]>> = {
   "J kg-1 K-1": [500, 5000],
   "kg m-3": [500, 5000],
   "W m-2 K-1": [0.5, 5],
+  "J m-2 K-1": [1e6, 1e9],
+  "K m-1": [1e-3, 1e-2],
+  "m2 kg-1": [1e-3, 1],
 };
 /** Ports for which the unit says too little. */
 const USUAL_PORTS: Readonly<Record<string, readonly [number, number]>> = {
@@ -49,16 +62,45 @@ const USUAL_PORTS: Readonly<Record<string, readonly [number, number]>> = {
   opticalDepth: [0.01, 50],
   effectiveTemperature: [150, 7000],
   radius: [1e8, 1e10],
+  height: [100, 10000],
+  // together no more than all light
+  reflectance: [0.05, 0.6],
+  absorptance: [0.05, 0.35],
+  geometric: [0.05, 0.6],
+  phaseIntegral: [0.5, 1.6],
+  exponent: [0.6, 2.5],
+  radii: [2, 500],
+  mass: [2e29, 1e31],
+  from: [1e-6, 8e-6],
+  to: [1e-5, 5e-5],
+  // gases by their symbols; a forcing is smooth on either side of its reference
+  "concentration C": [3e-4, 1.9e-3],
+  "reference C_0": [2e-4, 2.9e-4],
+  "concentration M": [9e-7, 3.5e-6],
+  "reference M_0": [3.4e-7, 8e-7],
+  "concentration N": [3e-7, 5e-7],
+  "reference N_0": [2e-7, 2.9e-7],
+  co2: [2e-4, 1.9e-3],
+  // of a planet in Earth's range, short of the ends where its interpolation stops
+  "mass m": [6.5e23, 2.9e25],
+  sunlike: [0.3, 1.8],
+  linear: [5e-5, 2e-4],
+  quadratic: [1e-9, 3e-8],
+  cubic: [-1e-11, -2e-12],
+  quartic: [-3e-15, -4e-16],
   // inside the ends of its range, so that differences can be taken on both sides
   redistribution: [0.26, 0.95],
 };
 
 /** Numbers for a port where laws are used. */
-function usual(name: string, { unit, within = [-1e300, 1e300] }: Port): fc.Arbitrary<number> {
-  const range = USUAL_PORTS[name] ?? USUAL[unit];
+function usual(name: string, { symbol, unit, within = [-1e300, 1e300] }: Port): fc.Arbitrary<number> {
+  const range = USUAL_PORTS[`${name} ${symbol}`] ?? USUAL_PORTS[name] ?? USUAL[unit];
   if (!range) throw new Error(`no usual range for ${name} in ${unit}`);
-  const [min, max] = [Math.max(range[0], within[0]), Math.min(range[1], within[1])];
-  return fc.double({ min, max, noNaN: true });
+  // inside the ends of the range, so that differences can be taken on both sides
+  const [low, high] = [within[0] + 1e-3 * Math.abs(within[0]), within[1] - 1e-3 * Math.abs(within[1])];
+  const [min, max] = [Math.max(range[0], low), Math.min(range[1], high)];
+  // a port that allows nothing of what is usual for its unit says itself where it is used
+  return fc.double(min < max ? { min, max, noNaN: true } : { min: low, max: high, noNaN: true });
 }
 
 /** Any number that a port allows, small and large ones alike. */

@@ -189,3 +189,204 @@ export const TWO_STREAM = source(
   "Atmospheric Radiation",
   "two-stream equations of a grey atmosphere",
 );
+export const EKER = source(
+  "Eker et al.",
+  "2018",
+  "Interrelated main-sequence mass–luminosity, mass–radius and mass–effective temperature relations, MNRAS 479, 5491",
+  "table 4",
+);
+export const INCROPERA_BANDS = source(
+  "Incropera & DeWitt",
+  "2002",
+  "Fundamentals of Heat and Mass Transfer, 5th edition",
+  "table 12.1",
+);
+export const BRIGHT_STARS = source(
+  "Ducati",
+  "2002",
+  "Catalogue of stellar photometry in Johnson's 11-colour system, VizieR II/237",
+  "V of the components, and of the pair as commonly quoted",
+);
+export const KEPLER = source("Kepler", "1609", "Astronomia nova", "equal areas in equal times");
+export const JI = source(
+  "Ji, Chatterjee, Park Coy & Kite",
+  "2023",
+  "The inner habitable zone boundary for eccentric exoplanets, ApJL 943, L1",
+  "abstract",
+);
+export const STOKES = source(
+  "Stokes",
+  "1862",
+  "On the intensity of the light reflected from or transmitted through a pile of plates, Proc. R. Soc. 11, 545",
+  "the sum of reflections between two layers",
+);
+export const WILD_2015 = source(
+  "Wild et al.",
+  "2015",
+  "The energy balance over land and oceans, Clim. Dyn. 44, 3393",
+  "Fig. 1",
+);
+export const SHIELDS = source(
+  "Shields et al.",
+  "2013",
+  "The effect of host star spectral energy distribution and ice-albedo feedback, Astrobiology 13, 715",
+  "two bands of ice",
+);
+export const SURFACE_ALBEDOS = source(
+  "Markvart & Castañer; Tetzlaff; Betts & Ball",
+  "undated",
+  "Typical surface albedos, as encyclopaedias print them",
+  "table",
+);
+export const JUPITER_HEAT = source(
+  "Hanel et al.",
+  "1981",
+  "Albedo, internal heat, and energy balance of Jupiter, JGR 86, 8705",
+  "abstract",
+);
+export const SATURN_HEAT = source(
+  "Hanel et al.",
+  "1983",
+  "Albedo, internal heat flux, and energy balance of Saturn, Icarus 53, 262",
+  "abstract",
+);
+export const NEPTUNE_HEAT = source(
+  "Pearl & Conrath",
+  "1991",
+  "The albedo, effective temperature, and energy balance of Neptune, JGR 96, 18921",
+  "abstract",
+);
+export const SEAGER = source("Seager", "2010", "Exoplanet Atmospheres", "ch. 3: a Lambert sphere");
+export const KOLL_CRONIN = source(
+  "Koll & Cronin",
+  "2018",
+  "Earth's outgoing longwave radiation linear due to H2O greenhouse effect, PNAS 115, 10293",
+  "abstract and Fig. 1",
+);
+export const LOEB_2018 = source(
+  "Loeb et al.",
+  "2018",
+  "CERES EBAF Edition 4.0, J. Climate 31, 895",
+  "global means",
+);
+export const ROBINSON_CATLING = source(
+  "Robinson & Catling",
+  "2012",
+  "An analytic radiative-convective model for planetary atmospheres, ApJ 757, 104",
+  "optical depth as a power of pressure",
+);
+export const CLAUSIUS_CLAPEYRON = source(
+  "Clausius; Clapeyron",
+  "1850",
+  "the relation with a constant latent heat",
+  "L = 2.5e6 J/kg, R_v = 461.5 J/kg/K",
+);
+export const STEAM_TABLES = source("IAPWS", "1997", "Industrial formulation IF97", "saturation line");
+export const NAKAJIMA = source(
+  "Nakajima, Hayashi & Abe",
+  "1992",
+  "A study on the runaway greenhouse effect with a one-dimensional model, J. Atmos. Sci. 49, 2256",
+  "upper limits of outgoing radiation",
+);
+export const GOLDBLATT = source(
+  "Goldblatt et al.",
+  "2013",
+  "Low simulated radiation limit for runaway greenhouse climates, Nat. Geosci. 6, 661",
+  "abstract",
+);
+export const LECONTE = source(
+  "Leconte et al.",
+  "2013",
+  "Increased insolation threshold for runaway greenhouse processes on Earth-like planets, Nature 504, 268",
+  "abstract",
+);
+export const GOLDBLATT_WATSON = source(
+  "Goldblatt & Watson",
+  "2012",
+  "The runaway greenhouse, Phil. Trans. R. Soc. A 370, 4197",
+  "abstract",
+);
+export const STANDARD_ATMOSPHERE = source(
+  "NOAA, NASA & USAF",
+  "1976",
+  "U.S. Standard Atmosphere",
+  "temperature by geopotential height",
+);
+export const MYHRE = source(
+  "Myhre, Highwood, Shine & Stordal",
+  "1998",
+  "New estimates of radiative forcing due to well mixed greenhouse gases, GRL 25, 2715",
+  "5.35 ln(C/C₀)",
+);
+export const IPCC_2001 = source(
+  "IPCC",
+  "2001",
+  "Climate Change 2001: The Scientific Basis, chapter 6",
+  "Tables 6.1 and 6.2",
+);
+export const ETMINAN = source(
+  "Etminan, Myhre, Highwood & Shine",
+  "2016",
+  "Radiative forcing of carbon dioxide, methane, and nitrous oxide, GRL 43, 12614",
+  "abstract and Table 1",
+);
+export const AR6_FORCING = source(
+  "IPCC; Forster et al.",
+  "2021",
+  "Climate Change 2021: The Physical Science Basis, chapter 7",
+  "§7.3.2, Tables 7.2, 7.8 and 7.SM.1",
+);
+export const BONY = source(
+  "Bony et al.",
+  "2006",
+  "How well do we understand and evaluate climate change feedback processes?, J. Climate 19, 3445",
+  "Planck's response",
+);
+export const IF97 = source(
+  "IAPWS; Wagner et al.",
+  "1997",
+  "Industrial Formulation 1997 for the thermodynamic properties of water and steam",
+  "Tables 35 and 36; triple and critical point",
+);
+export const NIST_WATER = source(
+  "NIST",
+  "undated",
+  "Chemistry WebBook, water",
+  "normal boiling point 99.974 °C",
+);
+export const WAGNER_PRUSS = source(
+  "Wagner & Pruss",
+  "1993",
+  "International equations for the saturation properties of ordinary water, JPCRD 22, 783",
+  "vapour pressure",
+);
+export const IAPWS_ICE = source(
+  "Wagner, Riethmann, Feistel & Harvey",
+  "2011",
+  "New equations for the sublimation pressure and melting pressure of H₂O ice Ih, JPCRD 40, 043103",
+  "sublimation pressure",
+);
+export const SPAN_WAGNER = source(
+  "Span & Wagner",
+  "1996",
+  "A new equation of state for carbon dioxide, JPCRD 25, 1509",
+  "sublimation pressure",
+);
+export const KOPPARAPU_2013 = source(
+  "Kopparapu et al.",
+  "2013",
+  "Habitable zones around main-sequence stars: new estimates, ApJ 765, 131; erratum ApJ 770, 82",
+  "limits of the Sun, as corrected",
+);
+export const KOPPARAPU_2014 = source(
+  "Kopparapu et al.",
+  "2014",
+  "Habitable zones around main-sequence stars: dependence on planetary mass, ApJL 787, L29",
+  "abstract and limits of the Sun",
+);
+export const ANGLADA_ESCUDE = source(
+  "Anglada-Escudé et al.",
+  "2016",
+  "A terrestrial planet candidate in a temperate orbit around Proxima Centauri, Nature 536, 437",
+  "Table 1",
+);

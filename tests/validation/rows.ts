@@ -11,11 +11,12 @@ import { forcingRows } from "./forcing.rows.ts";
 import { habitableRows } from "./habitable.rows.ts";
 import { heatRows } from "./heat.rows.ts";
 import { heatBalanceRows } from "./heatBalance.rows.ts";
+import { ledgerRows } from "./ledgers.rows.ts";
 import { longwaveRows } from "./longwave.rows.ts";
 import { orbitShelfRows } from "./orbitShelf.rows.ts";
 import { orbitRows } from "./orbits.rows.ts";
 import { planetRows } from "./planets.rows.ts";
-import { starShelfRows, twoBandRows } from "./starShelf.rows.ts";
+import { starShelfRows } from "./starShelf.rows.ts";
 import { starRows } from "./stars.rows.ts";
 import { waterRows } from "./water.rows.ts";
 
@@ -27,9 +28,10 @@ export const subjects: Readonly<Record<string, readonly Check[]>> = {
   "Stars and their light": [...starRows, ...starShelfRows],
   "Planets of other stars": exoplanetRows,
   Orbits: [...orbitRows, ...orbitShelfRows],
-  Albedo: [...albedoRows, ...twoBandRows],
+  Albedo: albedoRows,
   "Covers and clouds": cloudsRows,
   Longwave: longwaveRows,
+  "Layers and ledgers": ledgerRows,
   "Emission, its limits and its height": emissionRows,
   Forcing: forcingRows,
   "Water and frost": waterRows,

@@ -16,21 +16,11 @@ import {
   SOLAR_LUMINOSITY,
   SOLAR_MASS_PARAMETER,
   SOLAR_RADIUS,
-  twoBandAlbedo,
 } from "../../src/index.ts";
 import bands from "../reference/computed/ix_planck_bands.json" with { type: "json" };
 import stars from "../reference/computed/mass_luminosity.json" with { type: "json" };
-import { type Check, halfUnit, ROUNDED, ROUNDING } from "./check.ts";
-import {
-  BRIGHT_STARS,
-  COWAN_AGOL,
-  EKER,
-  IAU_B3,
-  INCROPERA_BANDS,
-  PLANCK_LAW,
-  SHIELDS,
-  TORRES,
-} from "./sources.ts";
+import { type Check, halfUnit, ROUNDING } from "./check.ts";
+import { BRIGHT_STARS, COWAN_AGOL, EKER, IAU_B3, INCROPERA_BANDS, PLANCK_LAW, TORRES } from "./sources.ts";
 
 const SUN = SOLAR_MASS_PARAMETER / GRAVITATION;
 const luminosityOf = (suns: number) => massLuminosity({ mass: suns * SUN }) / SOLAR_LUMINOSITY;
@@ -226,19 +216,4 @@ export const starShelfRows: readonly Check[] = [
   },
   ...transitRows,
   ...transportRows,
-];
-
-/** Stands with the albedos. */
-export const twoBandRows: readonly Check[] = [
-  {
-    covers: ["twoBandAlbedo"],
-    what: "ice of 0.73 in the visible and 0.33 in the near infrared, 52 % of the energy visible",
-    published: 0.538,
-    unit: "1",
-    ours: () => twoBandAlbedo({ visible: 0.73, nearInfrared: 0.33, visibleShare: 0.52 }),
-    tolerance: ROUNDING,
-    because: ROUNDED,
-    source: SHIELDS,
-    basis: "from memory",
-  },
 ];

@@ -25,6 +25,7 @@ export const JOINED: readonly string[] = [
   "cloudyAlbedo",
   "surfaceShareBelowCloud",
   "cloudShareAbsorbed",
+  "leakyStackEmission",
 ];
 
 /** Inputs by port; a list port holds records. */
@@ -67,6 +68,9 @@ const USUAL_PORTS: Readonly<Record<string, readonly [number, number]>> = {
   reflectance: [0.05, 0.6],
   absorptance: [0.05, 0.35],
   geometric: [0.05, 0.6],
+  // apart from temperatures and emissions, so that few inputs stand on a kink
+  hotAbove: [50, 140],
+  ceiling: [250, 600],
   phaseIntegral: [0.5, 1.6],
   exponent: [0.6, 2.5],
   radii: [2, 500],

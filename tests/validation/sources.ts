@@ -65,11 +65,23 @@ export const TFK_2009 = source(
   "Earth's global energy budget, BAMS 90, 311",
   "Fig. 1 and text",
 );
+export const STEPHENS_2012 = source(
+  "Stephens et al.",
+  "2012",
+  "An update on Earth's energy balance in light of the latest global observations, Nat. Geosci. 5, 691",
+  "Fig. B1",
+);
 export const KT_1997 = source(
   "Kiehl & Trenberth",
   "1997",
   "Earth's annual global mean energy budget, BAMS 78, 197",
   "text",
+);
+export const CATLING_KASTING = source(
+  "Catling & Kasting",
+  "2017",
+  "Atmospheric Evolution on Inhabited and Lifeless Worlds",
+  "skin temperature of a grey atmosphere",
 );
 export const MARSHALL_PLUMB = source(
   "Marshall & Plumb",

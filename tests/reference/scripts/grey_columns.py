@@ -5,7 +5,7 @@ from scipy.integrate import solve_ivp
 from common import made_by, save
 
 
-def ground_temperature(olr, depth, closure):
+def temperatures(olr, depth, closure):
     """Streams along optical depth t: dU/dt = D(U - B), dW/dt = D(B - W), and B = (U + W)/2 where no heat piles up."""
 
     def change(_, streams):
@@ -14,16 +14,17 @@ def ground_temperature(olr, depth, closure):
         return [closure * (up - source), closure * (source - down)]
 
     run = solve_ivp(change, [0, depth], [olr, 0], method="DOP853", rtol=1e-12, atol=1e-9)
-    return (run.y[0, -1] / sigma) ** 0.25
+    skin, ground = (run.y[0, 0] + run.y[1, 0]) / 2, run.y[0, -1]
+    return {"ground": (ground / sigma) ** 0.25, "skin": (skin / sigma) ** 0.25}
 
 
 rows = []
 for depth, closure in ((0, 1.5), (0.5, 1.5), (1, 1.5), (2, 1.5), (4, 1.5), (1, 2), (3, 2), (10, 1.66), (100, 1.5)):
-    rows.append({"olr": 238.175, "depth": depth, "closure": closure, "ground": ground_temperature(238.175, depth, closure)})
+    rows.append({"olr": 238.175, "depth": depth, "closure": closure, **temperatures(238.175, depth, closure)})
 save(
     "grey_columns",
     {
-        "title": "Ground temperature, K, under a grey column that emits a given flux to space",
+        "title": "Ground temperature under a grey column that emits a given flux to space, and skin temperature at its top, K",
         "made": made_by(__file__, "two streams integrated downwards with an explicit Runge-Kutta method", "scipy"),
         "rows": rows,
     },

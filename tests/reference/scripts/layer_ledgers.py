@@ -38,14 +38,18 @@ def column(S, albedo, ground_emissivity, emissivities, absorptivities, layer_hea
     # sunlight: down through the layers, back up from the ground
     sun = [Fraction(0)] * (n + 1)
     beam = Fraction(S) / 4
+    sun_down, sun_up = [beam], []
     for k in range(n):
         sun[k] += beam * a[k]
         beam *= 1 - a[k]
+        sun_down.append(beam)
     sun[n] = beam * (1 - Fraction(albedo))
     beam *= Fraction(albedo)
+    sun_up.insert(0, beam)
     for k in reversed(range(n)):
         sun[k] += beam * a[k]
         beam *= 1 - a[k]
+        sun_up.insert(0, beam)
     planetary_albedo = beam / (Fraction(S) / 4)
 
     # longwave: fluxes as linear forms in sigma T^4 of the layers (from the top) and the ground
@@ -83,6 +87,15 @@ def column(S, albedo, ground_emissivity, emissivities, absorptivities, layer_hea
             "longwaveAbsorbed": written(ground * value(down[n])),
             "longwaveEmitted": written(ground * fourth[n]),
         },
+        "interfaces": [
+            {
+                "sunlightDown": written(sun_down[k]),
+                "sunlightUp": written(sun_up[k]),
+                "longwaveDown": written(value(down[k])),
+                "longwaveUp": written(value(up[k])),
+            }
+            for k in range(n + 1)
+        ],
         "planetaryAlbedo": written(planetary_albedo),
         "olr": written(value(up[0])),
     }

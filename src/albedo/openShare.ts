@@ -4,13 +4,18 @@ import { div, max, min, sub } from "../graph/operations.ts";
 import type { Quantity, Value } from "../graph/quantity.ts";
 import { albedoPort, temperaturePort } from "../law/ports.ts";
 
+/** Port: the temperature below which all is frozen. */
+export const FROZEN_BELOW = /* @__PURE__ */ temperaturePort("T_f", "all frozen below");
+/** Port: the temperature above which all is open. */
+export const OPEN_ABOVE = /* @__PURE__ */ temperaturePort("T_o", "all open above");
+
 /** Ports of an albedo that changes between two temperatures. */
 export const RAMP_PORTS = {
   temperature: /* @__PURE__ */ temperaturePort(),
   cold: /* @__PURE__ */ albedoPort("α_c", "albedo of the frozen planet"),
   warm: /* @__PURE__ */ albedoPort("α_w", "albedo of the open planet"),
-  frozenBelow: /* @__PURE__ */ temperaturePort("T_f", "all frozen below"),
-  openAbove: /* @__PURE__ */ temperaturePort("T_o", "all open above"),
+  frozenBelow: FROZEN_BELOW,
+  openAbove: OPEN_ABOVE,
 } as const;
 
 type Between = { readonly frozenBelow: Quantity; readonly openAbove: Quantity };

@@ -1,6 +1,6 @@
-import { add, mul, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
 import { outgoingPort, temperaturePort } from "../law/ports.ts";
+import { STRAIGHT_RANGE, straightLine } from "./straightLine.ts";
 
 /**
  * Outgoing longwave radiation as a straight line: F = A + B(T − T₀), in W m⁻².
@@ -23,8 +23,7 @@ export const linearEmission = /* @__PURE__ */ defineLaw({
     slope: { symbol: "B", unit: "W m-2 K-1", within: [0, 1e4], about: "increase with temperature" },
     reference: /* @__PURE__ */ temperaturePort("T_0", "reference temperature"),
   },
-  published: { temperature: [230, 300] },
+  published: { temperature: STRAIGHT_RANGE },
   source: "Budyko 1969, Tellus 21, 611; Koll & Cronin 2018, PNAS 115, 10293",
-  write: ({ temperature, intercept, slope, reference }) =>
-    add(intercept, mul(slope, sub(temperature, reference))),
+  write: straightLine,
 });

@@ -1,0 +1,22 @@
+import { add, mul } from "../graph/operations.ts";
+import { defineLaw } from "../law/defineLaw.ts";
+import { temperaturePort } from "../law/ports.ts";
+import { EMISSION_HEIGHT, LAPSE_RATE } from "./lapse.ts";
+
+/**
+ * Ground temperature below the height from which a planet emits: T_s = T_e + Γ·z_e, in K.
+ * Temperature in K, lapse rate in K m⁻¹, height in m. Errors: as for every law.
+ * Source: Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441.
+ */
+export const groundBelowEmission = /* @__PURE__ */ defineLaw({
+  name: "groundBelowEmission",
+  about: "Ground temperature below the height from which a planet emits.",
+  output: { symbol: "T_s", unit: "K", about: "temperature of the ground" },
+  inputs: {
+    emissionTemperature: /* @__PURE__ */ temperaturePort("T_e", "effective temperature of emission to space"),
+    lapseRate: LAPSE_RATE,
+    height: EMISSION_HEIGHT,
+  },
+  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441",
+  write: ({ emissionTemperature, lapseRate, height }) => add(emissionTemperature, mul(lapseRate, height)),
+});

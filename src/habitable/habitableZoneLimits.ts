@@ -74,6 +74,8 @@ const limits = (): HabitableZoneLimit[] => [
  * `habitableZoneDistance`. The models have a cloudless Earth that turns fast on a nearly circular orbit: where a planet turns
  * slowly, clouds move the inner limits towards the star; where the orbit is eccentric, the mean flux stands for it at best.
  * A limit is where a model or a planet changed; it says nothing of life.
+ * As published, the polynomials of 2013 for the runaway and the moist greenhouse cross: between 3659 and 5027 K the runaway
+ * lies outside the moist greenhouse, by at most 0.7 % of the flux.
  * Source: Kopparapu et al. 2013, Table 3 as in the erratum; Kopparapu et al. 2014, Table 1.
  */
 export const HABITABLE_ZONE_LIMITS: readonly HabitableZoneLimit[] = /* @__PURE__ */ deepFreeze(

@@ -1,10 +1,11 @@
-// Inputs that say the same thing twice must agree, and the orbit must stay outside the star.
-import { blackbodyFlux } from "../greenhouse/blackbodyFlux.ts";
+// Inputs that say the same thing twice must agree, and the orbit must stay outside the stars.
 import { fail } from "../ground/errors.ts";
-import { stellarFlux } from "../star/stellarFlux.ts";
+import { approaches } from "./approaches.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
-import { distanceWays, fluxWays, luminosityWays, type Way } from "./starlight.ts";
+import { fluxWays } from "./starlight.ts";
+import { starsOf } from "./stars.ts";
+import { direct, distanceWays, luminosityWays, periodWays, pressureWays, type Way } from "./ways.ts";
 
 /** How far two inputs for one quantity may lie apart: common practice, larger than rounded catalogue values differ. */
 const AGREEMENT = 0.02;
@@ -23,12 +24,20 @@ export function checkAgreement(
 ): PlanetNote[] {
   const compare = (ways: readonly Way[], name: string, unit: string) =>
     compared(ways, numbers, { name, unit, contradictions });
-  const notes = [
-    ...compare(luminosityWays(d), "luminosity", "W"),
+  return [
+    ...starsOf(d).flatMap((star) => compare(luminosityWays(star), "luminosity", "W")),
     ...compare(distanceWays(d), "semi-major axis", "m"),
     ...compare(fluxWays(d), "flux at the semi-major axis", "W m-2"),
+    ...compare(rotationWays(d), "rotation period of a locked planet", "s"),
+    ...compare(pressureWays(d), "surface pressure", "Pa"),
+    ...approaches(d, numbers).flatMap((approach) => checkedApproach(approach, contradictions)),
   ];
-  return [...notes, ...checkPeriastron(d, numbers, contradictions)];
+}
+
+/** A locked planet turns once in an orbit. */
+function rotationWays(d: PlanetDescription): Way[] {
+  if (!d.rotation?.locked || d.rotation.period === undefined) return [];
+  return [...periodWays(d), direct("rotation.period")];
 }
 
 function compared(
@@ -39,75 +48,31 @@ function compared(
   return others.map((other) => {
     const [used, spare] = [(first as Way).of(numbers) as number, other.of(numbers) as number];
     const [from, by] = [(first as Way).uses.join(" and "), other.uses.join(" and ")];
-    if (!(Math.abs(spare - used) <= AGREEMENT * used)) {
-      if (contradictions === "note") {
-        const text = `${by} give another ${name} than ${from}, which is used: ${spare} against ${used} ${unit}`;
-        return planetNote({
-          code: "inputs-contradict",
-          severity: "caution",
-          about: by,
-          value: spare,
-          unit,
-          text,
-        });
-      }
-      fail("contradiction", {
-        path: by,
-        value: spare,
-        allowed: `2 % around what ${from} gives, ${used}`,
-        unit,
-      });
+    if (Math.abs(spare - used) <= AGREEMENT * used) {
+      const text = `${by} give the ${name} within 2 % of ${from}, which is used`;
+      return planetNote({ code: "inputs-agree", about: by, value: spare, unit, text });
     }
-    const text = `${by} give the ${name} within 2 % of ${from}, which is used`;
-    return planetNote({ code: "inputs-agree", about: by, value: spare, unit, text });
+    if (contradictions === "refuse") {
+      const allowed = `2 % around what ${from} gives, ${used}`;
+      fail("contradiction", { path: by, value: spare, allowed, unit });
+    }
+    const text = `${by} give another ${name} than ${from}, which is used: ${spare} against ${used} ${unit}`;
+    return contradicting({ about: by, value: spare, unit, text });
   });
 }
 
-/** A planet that comes as near to the star's centre as the star is large: an error, or a caution. */
-function checkPeriastron(
-  d: PlanetDescription,
-  numbers: Numbers,
+/** A planet that comes as near to a star's centre as the star is large: an error, or a caution. */
+function checkedApproach(
+  { periastron, radius }: { readonly periastron: number; readonly radius: number },
   contradictions: Contradictions,
 ): PlanetNote[] {
-  const luminosity = luminosityWays(d)[0]?.of(numbers) as number | undefined;
-  const distance = distanceOf(d, numbers, luminosity);
-  const radius = radiusOf(d, numbers, luminosity);
-  if (distance === undefined || radius === undefined) return [];
-  const eccentricity = d.orbit.eccentricity === undefined ? 0 : numbers("orbit.eccentricity");
-  const periastron = distance * (1 - eccentricity);
   if (periastron > radius) return [];
   const allowed = `a periastron a(1 − e) above the radius of the star, ${radius}`;
-  if (contradictions === "refuse")
-    fail("contradiction", { path: "orbit", value: periastron, allowed, unit: "m" });
+  const unit = "m";
+  if (contradictions === "refuse") fail("contradiction", { path: "orbit", value: periastron, allowed, unit });
   const text = `the orbit passes through the star: ${periastron} m is not ${allowed} m`;
-  return [
-    planetNote({
-      code: "inputs-contradict",
-      severity: "caution",
-      about: "orbit",
-      value: periastron,
-      unit: "m",
-      text,
-    }),
-  ];
+  return [contradicting({ about: "orbit", value: periastron, unit, text })];
 }
 
-function distanceOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {
-  const stated = distanceWays(d)[0]?.of(numbers) as number | undefined;
-  if (stated !== undefined || luminosity === undefined || d.orbit.flux === undefined) return stated;
-  return distanceAt({ luminosity, flux: numbers("orbit.flux") });
-}
-
-function radiusOf(d: PlanetDescription, numbers: Numbers, luminosity?: number): number | undefined {
-  if (d.star?.radius !== undefined) return numbers("star.radius");
-  if (d.star?.effectiveTemperature === undefined || luminosity === undefined) return undefined;
-  return distanceAt({
-    luminosity,
-    flux: blackbodyFlux({ temperature: numbers("star.effectiveTemperature") }),
-  });
-}
-
-/** Where the star has this flux: the inverse-square law from its value at 1 m. */
-function distanceAt({ luminosity, flux }: { luminosity: number; flux: number }): number {
-  return Math.sqrt(stellarFlux({ luminosity, distance: 1 }) / flux);
-}
+const contradicting = (note: Pick<PlanetNote, "about" | "value" | "unit" | "text">): PlanetNote =>
+  planetNote({ code: "inputs-contradict", severity: "caution", ...note });

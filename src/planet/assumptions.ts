@@ -1,15 +1,19 @@
-// The assumptions behind every number of a planet, echoed with them.
+// The assumptions behind every number of a planet.
 import { CONSTANT_SET } from "../ground/constants.ts";
-import { REDISTRIBUTIONS } from "./fieldPorts.ts";
-import { type PlanetNote, planetNote } from "./planetNote.ts";
+import type { CheckedPlanet } from "./checkedPlanet.ts";
 import type { PlanetDescription } from "./planetShape.ts";
+import { redistributionOf } from "./redistribution.ts";
+import { isAnswering } from "./reflection.ts";
+import { hasSky } from "./sunlight.ts";
 
 /** What every number of a planet rests on. */
 export interface PlanetAssumptions {
   /** The Bond albedo as a number, or null where it answers to temperature. */
   readonly albedo: number | null;
-  /** The law of the albedo, or null where it is a number. */
+  /** The law of the albedo, of the planet or of its surface, or null where it is told by numbers. */
   readonly albedoLaw: string | null;
+  /** Where the Bond albedo comes from: stated of the whole planet, or from what lies below clear air, or below clouds. */
+  readonly albedoOf: "planet" | "surface" | "surface and sky";
   readonly redistribution: number;
   readonly eccentricity: number;
   /** What is averaged over the orbit, or null where nothing is. */
@@ -21,51 +25,26 @@ export interface PlanetAssumptions {
 }
 
 /** The assumptions of a description. */
-export function assumptionsOf(
-  d: PlanetDescription,
-  numbers: (path: string) => number | undefined,
-  albedo: number,
-): PlanetAssumptions {
-  const law = typeof d.albedo === "object" && "law" in d.albedo ? d.albedo.law : null;
-  const eccentricity = numbers("orbit.eccentricity") ?? 0;
+export function assumptionsOf({ description: d, numbers, trial }: CheckedPlanet): PlanetAssumptions {
+  const written = d.albedo ?? d.surface;
+  const eccentricity = d.orbit.eccentricity === undefined ? 0 : numbers("orbit.eccentricity");
   return {
-    albedo: law === null ? albedo : null,
-    albedoLaw: law,
-    redistribution: numbers("redistribution") as number,
+    albedo: isAnswering(written) ? null : (trial.albedo as number),
+    albedoLaw: lawOf(written),
+    albedoOf: d.albedo !== undefined ? "planet" : hasSky(d) ? "surface and sky" : "surface",
+    redistribution: redistributionOf(d, numbers) as number,
     eccentricity,
     average: eccentricity === 0 ? null : (d.orbit.average ?? null),
-    internalHeat: numbers("internalHeat") ?? 0,
+    internalHeat: d.internalHeat === undefined ? 0 : numbers("internalHeat"),
     constants: CONSTANT_SET,
   };
 }
 
-const SPREAD: Readonly<Record<keyof typeof REDISTRIBUTIONS, string>> = {
-  global: "heat is spread over the whole sphere",
-  dayside: "heat is spread evenly over the day side, and the states are those of the day side",
-  instant: "heat is re-radiated where it falls, the day side as seen from the star",
-  substellar: "the point under the star, without any transport of heat",
-};
-const MEAN_FLUX = "the time-mean of the flux, which suits a thermal time much longer than the orbital period";
-const MEAN_TEMPERATURE =
-  "the flux of the time-mean temperature, which suits a body without thermal inertia and with a constant albedo";
-
-/** The assumptions as notes in plain words. */
-export function assumptionNotes(a: PlanetAssumptions): PlanetNote[] {
-  const note = (about: string, text: string, value: number | null = null) =>
-    planetNote({ code: "assumption", about, text, value });
-  const names = Object.keys(SPREAD) as (keyof typeof REDISTRIBUTIONS)[];
-  const name = names.find((n) => REDISTRIBUTIONS[n] === a.redistribution);
-  return [
-    a.albedoLaw === null
-      ? note("albedo", "Bond albedo as a number: it does not answer to the climate", a.albedo)
-      : note(
-          "albedo",
-          `Bond albedo from ${a.albedoLaw}: it answers to temperature, so each state has its own`,
-        ),
-    note("redistribution", name ? SPREAD[name] : "a factor between the usual cases", a.redistribution),
-    a.average === null
-      ? note("orbit.average", "a circular orbit, nothing is averaged")
-      : note("orbit.average", a.average === "flux" ? MEAN_FLUX : MEAN_TEMPERATURE, a.eccentricity),
-    note("equilibriumTemperature", "the temperature of re-radiation with emissivity 1, not the surface's"),
-  ];
+function lawOf(written: PlanetDescription["albedo"] | PlanetDescription["surface"]): string | null {
+  if (typeof written !== "object" || "value" in written) return null;
+  if ("law" in written) return written.law;
+  const laws = written.covers.map(({ share }) =>
+    typeof share === "object" && "law" in share ? share.law : null,
+  );
+  return laws.find((law) => law !== null) ?? null;
 }

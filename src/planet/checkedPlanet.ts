@@ -1,7 +1,8 @@
 // All checks of a description, in the order in which their errors help most.
 import { fail } from "../ground/errors.ts";
 import { type Contradictions, checkAgreement, type Numbers } from "./agreement.ts";
-import { checkCovers } from "./coverAlbedo.ts";
+import { checkCombinations } from "./combinations.ts";
+import { checkCovers } from "./covers.ts";
 import { plainCopy } from "./plainCopy.ts";
 import { planetBudget } from "./planetBudget.ts";
 import type { PlanetInput } from "./planetInput.ts";
@@ -21,6 +22,8 @@ export interface CheckedPlanet {
   readonly agreeing: readonly PlanetNote[];
   /** What the budget reports at the trial temperature. */
   readonly trial: Readonly<Record<string, number>>;
+  /** J m⁻² K⁻¹; 0 where it is not known. */
+  readonly heatCapacity: number;
 }
 
 /** Checks size and kind of the data, then its shape, its units and ranges, its agreement, and its laws with numbers. */
@@ -36,20 +39,20 @@ export function checkedPlanet(value: unknown, contradictions: Contradictions): C
   const shaped = PLANET_SHAPE.safeParse(plain);
   if (!shaped.success) failShape(PLANET_SHAPE, plain);
   const description = plain as PlanetDescription;
+  checkCombinations(description);
   const inputs = planetInputs(description);
   const byPath = new Map(inputs.map((input) => [input.path, input.value]));
   const numbers: Numbers = (path) => byPath.get(path) as number;
   checkAverage(description, numbers);
-  if (typeof description.albedo === "object" && "covers" in description.albedo)
-    checkCovers(description.albedo.covers, numbers);
+  checkAllCovers(description, numbers);
   const agreeing = checkAgreement(description, numbers, contradictions);
-  const { report } = planetBudget(description, {
+  const { report, heatCapacity } = planetBudget(description, {
     wire: numbers,
     temperature: TRIAL_TEMPERATURE,
-    couple: (_, albedo) => albedo,
-    redistribution: numbers("redistribution"),
+    couple: (_, value) => value,
   });
-  return { description, inputs, numbers, agreeing, trial: report as Record<string, number> };
+  const trial = report as Record<string, number>;
+  return { description, inputs, numbers, agreeing, trial, heatCapacity: heatCapacity as number };
 }
 
 /** On an eccentric orbit the mean flux and the mean temperature differ, so one must be chosen. */
@@ -61,4 +64,12 @@ function checkAverage({ orbit }: PlanetDescription, numbers: Numbers): void {
     value: undefined,
     allowed: '"flux" or "temperature", because the eccentricity is not 0',
   });
+}
+
+function checkAllCovers(d: PlanetDescription, numbers: Numbers): void {
+  for (const field of ["albedo", "surface"] as const) {
+    const written = d[field];
+    if (typeof written === "object" && "covers" in written)
+      checkCovers(written.covers, `${field}.covers`, numbers);
+  }
 }

@@ -1,37 +1,44 @@
 // The schema of a law in a description: its name and its ports, all taken from its card.
-import type { ZodMiniLiteral, ZodMiniObject, ZodMiniOptional } from "zod/mini";
-import { literal, optional, strictObject } from "zod/mini";
-import type { Port, Ports } from "../graph/card.ts";
+import type { ZodMiniArray, ZodMiniLiteral, ZodMiniObject, ZodMiniOptional, ZodMiniType } from "zod/mini";
+import { array, literal, optional, strictObject } from "zod/mini";
+import type { ListPort, Port, Ports } from "../graph/card.ts";
 import type { Law } from "../law/types.ts";
-import { BOUND_PORT } from "./fieldLaws.ts";
+import { isBound } from "./fieldLaws.ts";
 import { type ValueSchema, valueSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
+type Bound<Name> = "temperature" | (Name extends "pressureOpticalDepth" ? "pressure" : never);
 type Omissible = { readonly default: number } | { readonly optional: true };
-type Fields<I extends Ports> = {
-  [K in Exclude<keyof I, typeof BOUND_PORT>]: I[K] extends Omissible
-    ? ZodMiniOptional<ValueSchema<I[K]>>
-    : ValueSchema<I[K]>;
-};
-type LawSchema<Name extends string, I extends Ports> = ZodMiniObject<
-  { law: ZodMiniLiteral<Name> } & Fields<I>
+type FieldOf<P> = P extends ListPort
+  ? ZodMiniArray<ZodMiniObject<Fields<never, P["each"]>>>
+  : P extends Omissible
+    ? ZodMiniOptional<ValueSchema<P>>
+    : ValueSchema<P>;
+type Fields<Name, I extends Ports> = { [K in Exclude<keyof I, Bound<Name>>]: FieldOf<I[K]> };
+type Replaced<Name, I extends Ports, R> = Omit<Fields<Name, I>, keyof R> & R;
+type LawSchema<Name extends string, I extends Ports, R> = ZodMiniObject<
+  { law: ZodMiniLiteral<Name> } & { [K in keyof Replaced<Name, I, R>]: Replaced<Name, I, R>[K] }
 >;
 
-/** `{ law, …ports }` for a law whose ports are all single values; `temperature` is bound by the loop. */
-export function lawSchema<const Name extends string, I extends Ports>(
-  name: Name,
-  law: Law<I>,
-): LawSchema<Name, I> {
-  const fields = Object.entries(law.card.inputs as Readonly<Record<string, Port>>)
-    .filter(([port]) => port !== BOUND_PORT)
-    .map(([port, of]) => {
-      const schema = valueSchema(of);
-      return [port, of.default === undefined ? schema : optional(schema)] as const;
-    });
+/** `{ law, …ports }`; ports that a description does not fill are left out, those in `instead` take more than a value. */
+export function lawSchema<
+  const Name extends string,
+  I extends Ports,
+  R extends Readonly<Record<string, ZodMiniType>> = Record<never, never>,
+>(name: Name, law: Law<I>, instead?: R): LawSchema<Name, I, R> {
+  const fields = Object.entries(law.card.inputs)
+    .filter(([port]) => !isBound(name, port))
+    .map(([port, of]) => [port, instead?.[port] ?? fieldSchema(port, of)] as const);
   const named = worded(literal(name), `"${name}"`);
   const schema = strictObject({ law: named, ...Object.fromEntries(fields) });
-  return worded(schema, `{ law: "${name}" }`, { description: law.card.about }) as unknown as LawSchema<
-    Name,
-    I
-  >;
+  const described = worded(schema, `{ law: "${name}" }`, { description: law.card.about });
+  return described as unknown as LawSchema<Name, I, R>;
+}
+
+function fieldSchema(name: string, port: Port | ListPort): ZodMiniType {
+  if (!("each" in port)) return port.default === undefined ? valueSchema(port) : optional(valueSchema(port));
+  const record = Object.entries(port.each).map(([key, each]) => [key, valueSchema(each)] as const);
+  const keys = record.map(([key]) => key).join(", ");
+  const shape = worded(strictObject(Object.fromEntries(record)), `{ ${keys} }`);
+  return worded(array(shape), `a list of { ${keys} }`, { minItems: 1, description: name });
 }

@@ -1,31 +1,46 @@
 // Every numeric value of a description, read in SI under its path.
 import type { ListPort, Port, Ports } from "../graph/card.ts";
-import { DIFFERENCES, portsOf } from "./fieldLaws.ts";
+import { DIFFERENCES, isLaw, lawNamed } from "./fieldLaws.ts";
 import {
   ALBEDO_PORT,
+  ATMOSPHERE_PORTS,
+  BODY_PORTS,
+  CLOUD_PORTS,
   COVERED_PORTS,
   HEAT_CAPACITY_PORT,
   INTERNAL_HEAT_PORT,
   ORBIT_PORTS,
   REDISTRIBUTION_PORT,
   REDISTRIBUTIONS,
+  ROTATION_PORTS,
   STAR_PORTS,
+  SURFACE_PORT,
+  TRANSPORT_PORTS,
 } from "./fieldPorts.ts";
 import { type PlanetInput, readInput, type Written, writtenAs } from "./planetInput.ts";
 import type { PlanetDescription } from "./planetShape.ts";
+import { starsOf } from "./stars.ts";
 
 export type { PlanetInput };
 
 /** Reads all values of a description. Throws the error of the first that is wrong. */
 export function planetInputs(d: PlanetDescription): PlanetInput[] {
   return [
-    ...inputsIn("star", STAR_PORTS, d.star),
+    ...starsOf(d).flatMap(({ path, star }) => inputsIn(path, STAR_PORTS, star)),
     ...inputsIn("orbit", ORBIT_PORTS, d.orbit),
-    redistributionInput(d.redistribution),
-    ...albedoInputs("albedo", d.albedo),
+    ...redistributionInputs(d.redistribution),
+    ...albedoInputs("albedo", ALBEDO_PORT, d.albedo),
+    ...albedoInputs("surface", SURFACE_PORT, d.surface),
+    ...inputsIn("clouds", CLOUD_PORTS, d.clouds),
+    ...inputsIn("atmosphere", ATMOSPHERE_PORTS, d.atmosphere),
     ...inputsAt("longwave", undefined, d.longwave),
+    ...inputsAt("forcing", undefined, d.forcing),
     ...inputsAt("heatCapacity", HEAT_CAPACITY_PORT, d.heatCapacity),
     ...inputsAt("internalHeat", INTERNAL_HEAT_PORT, d.internalHeat),
+    ...inputsIn("rotation", ROTATION_PORTS, d.rotation),
+    ...Object.entries(BODY_PORTS).flatMap(([name, port]) =>
+      inputsAt(name, port, d[name as keyof typeof BODY_PORTS]),
+    ),
   ];
 }
 
@@ -37,30 +52,40 @@ function inputsIn(path: string, ports: Ports, record: object = {}): PlanetInput[
   );
 }
 
-/** What stands in one place: nothing, a word, a law with its ports, a list of records, or a value. */
+/** Words that stand in place of a value. */
+const WORDS: readonly unknown[] = [undefined, "rest", "unknown"];
+
+/** What stands in one place: nothing, a word, a law with its ports, a list, or a value. */
 function inputsAt(
   path: string,
   port: Port | ListPort | undefined,
   value: unknown,
   difference = false,
 ): PlanetInput[] {
-  if (value === undefined || value === "rest") return [];
-  if (isLaw(value)) return inputsIn(path, portsOf(value.law), value);
-  if (port === undefined) return [];
-  if (!("each" in port)) return [readInput(path, port, value as Written, difference)];
-  return (value as object[]).flatMap((record, i) => inputsIn(`${path}[${i}]`, port.each, record));
+  if (WORDS.includes(value)) return [];
+  if (isLaw(value)) return inputsIn(path, lawNamed(value.law).card.inputs, value);
+  if (Array.isArray(value)) {
+    return value.flatMap((each: object, i) => {
+      const at = `${path}[${i}]`;
+      return port && "each" in port ? inputsIn(at, port.each, each) : inputsAt(at, port, each);
+    });
+  }
+  return port === undefined || "each" in port ? [] : [readInput(path, port, value as Written, difference)];
 }
 
-const albedoInputs = (path: string, albedo: PlanetDescription["albedo"]): PlanetInput[] =>
-  typeof albedo === "object" && "covers" in albedo
-    ? inputsIn(path, COVERED_PORTS, albedo)
-    : inputsAt(path, ALBEDO_PORT, albedo);
+function albedoInputs(
+  path: string,
+  port: Port,
+  albedo: PlanetDescription["albedo"] | PlanetDescription["surface"],
+): PlanetInput[] {
+  if (typeof albedo === "object" && "covers" in albedo) return inputsIn(path, COVERED_PORTS, albedo);
+  return inputsAt(path, port, albedo);
+}
 
-function redistributionInput(redistribution: PlanetDescription["redistribution"]): PlanetInput {
+function redistributionInputs(redistribution: PlanetDescription["redistribution"]): PlanetInput[] {
+  const path = "redistribution";
+  if (typeof redistribution === "object" && "side" in redistribution)
+    return inputsIn(path, TRANSPORT_PORTS, redistribution);
   const factor = typeof redistribution === "string" ? REDISTRIBUTIONS[redistribution] : redistribution;
-  const read = readInput("redistribution", REDISTRIBUTION_PORT, factor);
-  return { ...read, written: writtenAs(redistribution) };
+  return [{ ...readInput(path, REDISTRIBUTION_PORT, factor), written: writtenAs(redistribution) }];
 }
-
-const isLaw = (value: unknown): value is { readonly law: string } =>
-  typeof value === "object" && value !== null && "law" in value;

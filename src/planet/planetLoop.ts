@@ -7,7 +7,7 @@ import { planetBudget } from "./planetBudget.ts";
 import type { PlanetNames } from "./planetTypes.ts";
 
 /** The loop of a planet. */
-export function planetLoop({ description, inputs, numbers }: CheckedPlanet): Loop<PlanetNames> {
+export function planetLoop({ description, inputs }: CheckedPlanet): Loop<PlanetNames> {
   const byPath = new Map(inputs.map((input) => [input.path, input]));
   return closeLoop<PlanetNames>(({ temperature, given, couple }) => {
     const made = new Map<string, Quantity>();
@@ -17,7 +17,6 @@ export function planetLoop({ description, inputs, numbers }: CheckedPlanet): Loo
       made.set(path, quantity);
       return quantity;
     };
-    const redistribution = numbers("redistribution");
-    return planetBudget(description, { wire, temperature, couple, redistribution }) as never;
+    return planetBudget(description, { wire, temperature, couple }) as never;
   });
 }

@@ -4,9 +4,14 @@ import type { Range } from "../ground/range.ts";
 /**
  * What a planet's note is about. `assumption`: holds for every number of this planet. `inputs-agree`: two inputs say the
  * same within 2 %, and the first is used. `inputs-contradict`: they do not, and the first is used all the same, as was asked.
- * `input-unused`: nothing depends on this input.
+ * `input-unused`: nothing depends on this input. `counted-twice`: two inputs may stand for the same thing, and both count.
  */
-export type PlanetNoteCode = "assumption" | "inputs-agree" | "inputs-contradict" | "input-unused";
+export type PlanetNoteCode =
+  | "assumption"
+  | "inputs-agree"
+  | "inputs-contradict"
+  | "input-unused"
+  | "counted-twice";
 
 /** A note of a planet; its fields are those of a state's note. */
 export interface PlanetNote {

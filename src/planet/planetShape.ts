@@ -1,18 +1,22 @@
 // The shape of a description. What values mean and whether they agree is checked after it.
 import type { output } from "zod/mini";
-import { array, discriminatedUnion, literal, optional, strictObject, string, union } from "zod/mini";
-import { ALBEDO_LAWS, HEAT_CAPACITY_LAWS, LONGWAVE_LAWS } from "./fieldLaws.ts";
+import { array, boolean, discriminatedUnion, literal, optional, strictObject, string, union } from "zod/mini";
+import { forcingShape, longwaveShape } from "./emissionShape.ts";
+import { HEAT_CAPACITY_LAWS } from "./fieldLaws.ts";
 import {
-  ALBEDO_PORT,
-  COVER_PORTS,
+  ATMOSPHERE_PORTS,
+  BODY_PORTS,
+  CLOUD_PORTS,
   HEAT_CAPACITY_PORT,
   INTERNAL_HEAT_PORT,
-  ORBIT_PORTS,
   REDISTRIBUTION_PORT,
   REDISTRIBUTIONS,
-  STAR_PORTS,
+  ROTATION_PORTS,
+  TRANSPORT_PORTS,
 } from "./fieldPorts.ts";
 import { lawSchema } from "./lawSchema.ts";
+import { orbitShape, starShape } from "./starShape.ts";
+import { albedoShape, surfaceShape } from "./surfaceShape.ts";
 import { measuredSchema, pureSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
@@ -22,85 +26,64 @@ export const PLANET_FORMAT = "thermostead-planet-1";
 const text = (description: string) => worded(string(), "a text", { description });
 const texts = (description: string) => worded(array(text(description)), "a list of texts");
 
-const star = strictObject({
-  name: optional(text("name of the star")),
-  luminosity: optional(measuredSchema(STAR_PORTS.luminosity)),
-  radius: optional(measuredSchema(STAR_PORTS.radius)),
-  effectiveTemperature: optional(measuredSchema(STAR_PORTS.effectiveTemperature)),
-  mass: optional(measuredSchema(STAR_PORTS.mass)),
-  brightening: optional(measuredSchema(STAR_PORTS.brightening)),
-});
-
-const orbit = strictObject({
-  semiMajorAxis: optional(measuredSchema(ORBIT_PORTS.semiMajorAxis)),
-  period: optional(measuredSchema(ORBIT_PORTS.period)),
-  distanceInStellarRadii: optional(pureSchema(ORBIT_PORTS.distanceInStellarRadii)),
-  flux: optional(measuredSchema(ORBIT_PORTS.flux)),
-  eccentricity: optional(pureSchema(ORBIT_PORTS.eccentricity)),
-  average: optional(
-    worded(literal(["flux", "temperature"]), '"flux" or "temperature"', {
-      description: "what is averaged over an eccentric orbit; required unless the eccentricity is 0",
-    }),
-  ),
-});
-
 const names = Object.keys(REDISTRIBUTIONS) as (keyof typeof REDISTRIBUTIONS)[];
 const named = worded(literal(names), names.map((name) => `"${name}"`).join(", "));
+const side = strictObject({
+  transport: pureSchema(TRANSPORT_PORTS.transport),
+  side: worded(literal(["day", "night"]), '"day" or "night"'),
+});
 const redistribution = worded(
-  union([named, ...pureSchema(REDISTRIBUTION_PORT).def.options]),
-  'a number from 0.25 to 1, or "global", "dayside", "instant" or "substellar"',
+  union([
+    named,
+    ...pureSchema(REDISTRIBUTION_PORT).def.options,
+    worded(side, "{ transport, side }", { description: "one side of a planet that keeps it to its star" }),
+  ]),
+  'a number from 0.25 to 1, "global", "dayside", "instant" or "substellar", or { transport, side }',
   { description: "share of the flux that a unit of area receives: 1/4, 1/2, 2/3 or 1" },
 );
 
-const share = worded(
-  union([worded(literal("rest"), '"rest"'), ...pureSchema(COVER_PORTS.share).def.options]),
-  'a number from 0 to 1, or "rest"',
-  { description: "share of the surface" },
-);
-const cover = strictObject({
-  name: optional(text("name of the cover")),
-  share,
-  albedo: pureSchema(COVER_PORTS.albedo),
-});
-const covers = worded(
+const clouds = worded(
   strictObject({
-    covers: worded(array(cover), "a list of { share, albedo }", { minItems: 1, maxItems: 100 }),
+    share: pureSchema(CLOUD_PORTS.share),
+    reflectance: optional(pureSchema(CLOUD_PORTS.reflectance)),
+    absorptance: optional(pureSchema(CLOUD_PORTS.absorptance)),
+    emissivity: optional(pureSchema(CLOUD_PORTS.emissivity)),
+    temperature: optional(measuredSchema(CLOUD_PORTS.temperature)),
   }),
-  "{ covers }",
-);
-const albedo = worded(
-  union([
-    ...pureSchema(ALBEDO_PORT).def.options,
-    covers,
-    discriminatedUnion("law", [
-      lawSchema("tanhAlbedo", ALBEDO_LAWS.tanhAlbedo),
-      lawSchema("rampAlbedo", ALBEDO_LAWS.rampAlbedo),
-      lawSchema("quadraticAlbedo", ALBEDO_LAWS.quadraticAlbedo),
-    ]),
-  ]),
-  "a number from 0 to 1, { covers } or { law }",
-  { description: "Bond albedo" },
+  "{ share } with { reflectance, absorptance } or { emissivity, temperature } or all of them",
+  { description: "clouds over a share of the sky: what they do to sunlight, to longwave, or both" },
 );
 
-const longwave = worded(
-  discriminatedUnion("law", [
-    lawSchema("greyEmission", LONGWAVE_LAWS.greyEmission),
-    lawSchema("linearEmission", LONGWAVE_LAWS.linearEmission),
-    lawSchema("greyColumnEmission", LONGWAVE_LAWS.greyColumnEmission),
-  ]),
-  '{ law }, as in { law: "greyEmission", emissivity: 0.6 }',
-  { description: "outgoing longwave radiation" },
+const atmosphere = worded(
+  strictObject({
+    pressure: optional(measuredSchema(ATMOSPHERE_PORTS.pressure)),
+    lapseRate: optional(measuredSchema(ATMOSPHERE_PORTS.lapseRate)),
+    reflectance: optional(pureSchema(ATMOSPHERE_PORTS.reflectance)),
+    absorptance: optional(pureSchema(ATMOSPHERE_PORTS.absorptance)),
+  }),
+  "{ pressure, lapseRate, reflectance, absorptance }, all as known",
+);
+
+const rotation = worded(
+  strictObject({
+    period: optional(measuredSchema(ROTATION_PORTS.period)),
+    locked: optional(
+      worded(boolean(), "true or false", { description: "whether it always shows one side to its star" }),
+    ),
+  }),
+  "{ period } or { locked }",
 );
 
 const heatCapacity = worded(
   union([
+    worded(literal("unknown"), '"unknown"'),
     ...measuredSchema(HEAT_CAPACITY_PORT).def.options,
     discriminatedUnion("law", [
       lawSchema("mixedLayerCapacity", HEAT_CAPACITY_LAWS.mixedLayerCapacity),
       lawSchema("atmosphereCapacity", HEAT_CAPACITY_LAWS.atmosphereCapacity),
     ]),
   ]),
-  'a number with its unit, as in "4.2e8 J m-2 K-1", or { law }',
+  'a number with its unit, as in "4.2e8 J m-2 K-1", or { law }, or "unknown"',
   { description: HEAT_CAPACITY_PORT.about },
 );
 
@@ -111,19 +94,32 @@ export const PLANET_SHAPE = worded(
     name: optional(text("name of the planet")),
     source: optional(text("where the description comes from")),
     notes: optional(texts("anything a reader should know")),
-    star: optional(worded(star, "{ luminosity } or { radius, effectiveTemperature }")),
-    orbit: worded(orbit, "{ semiMajorAxis }, { period }, { distanceInStellarRadii } or { flux }"),
+    star: optional(starShape),
+    orbit: orbitShape,
     redistribution,
-    albedo,
-    longwave,
+    albedo: optional(albedoShape),
+    surface: optional(surfaceShape),
+    clouds: optional(clouds),
+    atmosphere: optional(atmosphere),
+    longwave: longwaveShape,
+    forcing: optional(forcingShape),
     heatCapacity,
     internalHeat: optional(measuredSchema(INTERNAL_HEAT_PORT)),
+    rotation: optional(rotation),
+    mass: optional(measuredSchema(BODY_PORTS.mass)),
+    radius: optional(measuredSchema(BODY_PORTS.radius)),
   }),
   "a description: an object (a JSON text must be parsed first)",
+  { oneOf: [{ required: ["albedo"] }, { required: ["surface"] }] },
 );
+
+type Shape = output<typeof PLANET_SHAPE>;
+type Reflecting =
+  | { albedo: NonNullable<Shape["albedo"]>; surface?: undefined }
+  | { surface: NonNullable<Shape["surface"]>; albedo?: undefined };
 
 /**
  * A planet in the trade's words, in the format `thermostead-planet-1`. A value with a unit is a text such as `"0.61 au"`,
  * or `{ value, unit }` with `minus`, `plus` and `source`; a pure number is a number, or an object in the same way.
  */
-export type PlanetDescription = output<typeof PLANET_SHAPE>;
+export type PlanetDescription = Omit<Shape, "albedo" | "surface"> & Reflecting;

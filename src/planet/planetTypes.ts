@@ -1,12 +1,21 @@
 // What reading a description gives.
 import type { Loop } from "../loop/types.ts";
 import type { PlanetAssumptions } from "./assumptions.ts";
+import type { PlanetFacts } from "./facts.ts";
 import type { PlanetInput } from "./planetInput.ts";
 import type { PlanetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 
-/** The names of a planet's loop: its givens are the paths of its inputs. */
-export type PlanetNames = "variable temperature" | "coupling albedo" | `given ${string}`;
+/**
+ * The names of a planet's loop: its givens are the paths of its inputs. A coupling is there where the description lets that
+ * quantity answer to temperature.
+ */
+export type PlanetNames =
+  | "variable temperature"
+  | "coupling albedo"
+  | "coupling surfaceAlbedo"
+  | "coupling opticalDepth"
+  | `given ${string}`;
 
 /** The equilibrium temperature εσT⁴ = f·S(1 − A) + F_i with all that it depends on. It is not the surface temperature. */
 export interface PlanetEquilibriumTemperature {
@@ -33,5 +42,7 @@ export interface Planet {
   /** Null where the albedo answers to temperature: then each state has its own, in `report.equilibriumTemperature`. */
   readonly equilibriumTemperature: PlanetEquilibriumTemperature | null;
   readonly assumptions: PlanetAssumptions;
+  /** What the description says of star, orbit and body in SI, with null for what it does not. */
+  readonly facts: PlanetFacts;
   readonly notes: readonly PlanetNote[];
 }

@@ -3,8 +3,10 @@
 import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
 import type { Contradictions } from "./agreement.ts";
-import { assumptionNotes, assumptionsOf } from "./assumptions.ts";
+import { assumptionNotes } from "./assumptionNotes.ts";
+import { assumptionsOf } from "./assumptions.ts";
 import { checkedPlanet } from "./checkedPlanet.ts";
+import { factsOf } from "./facts.ts";
 import { planetLoop } from "./planetLoop.ts";
 import type { Planet } from "./planetTypes.ts";
 import { unusedNotes } from "./unusedNotes.ts";
@@ -46,10 +48,10 @@ export function readPlanet(description: unknown, options: ReadPlanetOptions = {}
   if (contradictions !== "refuse" && contradictions !== "note")
     fail("unreadable", { path: "contradictions", value: contradictions, allowed: '"refuse" or "note"' });
   const checked = checkedPlanet(description, contradictions);
-  const { inputs, numbers, agreeing, trial } = checked;
+  const { inputs, agreeing, trial } = checked;
   const loop = planetLoop(checked);
   const albedo = trial.albedo as number;
-  const assumptions = assumptionsOf(checked.description, numbers, albedo);
+  const assumptions = assumptionsOf(checked);
   const value = trial.equilibriumTemperature as number;
   const { redistribution, internalHeat } = assumptions;
   const equilibriumTemperature = { value, unit: "K", albedo, redistribution, emissivity: 1 } as const;
@@ -62,7 +64,8 @@ export function readPlanet(description: unknown, options: ReadPlanetOptions = {}
       equilibriumTemperature:
         assumptions.albedo === null ? null : { ...equilibriumTemperature, internalFlux: internalHeat },
       assumptions,
-      notes: [...assumptionNotes(assumptions), ...agreeing, ...unusedNotes(checked, loop)],
+      facts: factsOf(checked),
+      notes: [...assumptionNotes(checked, assumptions), ...agreeing, ...unusedNotes(checked, loop)],
     }),
   };
 }

@@ -43,6 +43,8 @@ function explain(schema: Schema, value: unknown, path: string): never {
 /** A union is explained by the option that is meant: the law of that name, or the object that shares most fields. */
 function explainUnion(union: Schema, value: unknown, path: string): never {
   const options = flattened(union);
+  const list = options.find((o) => o._zod.def.type === "array");
+  if (list && Array.isArray(value)) return explain(list, value, path);
   if (!isRecord(value)) {
     const single = options.find((o) => o._zod.def.type === typeof value && !o._zod.def.shape);
     return refuse(single ?? union, value, path);
@@ -50,6 +52,8 @@ function explainUnion(union: Schema, value: unknown, path: string): never {
   const laws = options.filter((o) => o._zod.def.shape?.law);
   const named = laws.find((o) => lawOf(o) === value.law);
   if (named) return explain(named, value, path);
+  const [only, another] = options.filter((o) => o._zod.def.shape);
+  if (only && !another && laws.length === 0) return explain(only, value, path);
   const shared = (o: Schema) => Object.keys(o._zod.def.shape ?? {}).filter((key) => key in value).length;
   const meant = options.reduce((best, o) => (shared(o) > shared(best) ? o : best), union);
   if (laws.includes(meant)) return failLaw(laws.map(lawOf), value.law, joined(path, "law"));

@@ -6,12 +6,10 @@ import type { PlanetDescription } from "./planetShape.ts";
 import { fluxWays } from "./starlight.ts";
 import { starsOf } from "./stars.ts";
 import { direct, distanceWays, luminosityWays, periodWays, pressureWays, type Way } from "./ways.ts";
+import type { Numbers } from "./wire.ts";
 
 /** How far two inputs for one quantity may lie apart: common practice, larger than rounded catalogue values differ. */
 const AGREEMENT = 0.02;
-
-/** The values of a description by path. */
-export type Numbers = (path: string) => number;
 
 /** What becomes of two inputs for one quantity that lie far apart: an error, or a caution and the first of them is used. */
 export type Contradictions = "refuse" | "note";

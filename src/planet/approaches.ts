@@ -2,9 +2,9 @@
 
 import { blackbodyFlux } from "../greenhouse/blackbodyFlux.ts";
 import { stellarFlux } from "../star/stellarFlux.ts";
-import type { Numbers } from "./agreement.ts";
 import { type DescribedStar, hostsOf, type Lit } from "./stars.ts";
 import { distanceWays, luminosityWays } from "./ways.ts";
+import type { Numbers } from "./wire.ts";
 
 /** The periastron and the radius of each star for which both follow, m. */
 export function approaches(d: Lit, numbers: Numbers): { periastron: number; radius: number }[] {

@@ -1,6 +1,6 @@
 // All checks of a description, in the order in which their errors help most.
 import { fail } from "../ground/errors.ts";
-import { type Contradictions, checkAgreement, type Numbers } from "./agreement.ts";
+import { type Contradictions, checkAgreement } from "./agreement.ts";
 import { checkCombinations } from "./combinations.ts";
 import { checkCovers } from "./covers.ts";
 import { plainCopy } from "./plainCopy.ts";
@@ -10,6 +10,7 @@ import { planetInputs } from "./planetInputs.ts";
 import type { PlanetNote } from "./planetNote.ts";
 import { PLANET_SHAPE, type PlanetDescription } from "./planetShape.ts";
 import { failShape } from "./shapeError.ts";
+import type { Numbers } from "./wire.ts";
 
 /** A temperature at which every law is tried with plain numbers, K. */
 const TRIAL_TEMPERATURE = 288;

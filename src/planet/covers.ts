@@ -1,9 +1,9 @@
 // The covers of a surface: shares that are complete, with ice over them.
 import { fail } from "../ground/errors.ts";
 import { compensatedSum } from "../ground/sum.ts";
-import type { Numbers } from "./agreement.ts";
 import { isLaw } from "./fieldLaws.ts";
 import type { PlanetDescription } from "./planetShape.ts";
+import type { Numbers } from "./wire.ts";
 
 /** One cover of a description. */
 export type Cover = Extract<PlanetDescription["albedo"], { covers: unknown }>["covers"][number];

@@ -21,8 +21,6 @@ import { type PlanetInput, readInput, type Written, writtenAs } from "./planetIn
 import type { PlanetDescription } from "./planetShape.ts";
 import { starsOf } from "./stars.ts";
 
-export type { PlanetInput };
-
 /** Reads all values of a description. Throws the error of the first that is wrong. */
 export function planetInputs(d: PlanetDescription): PlanetInput[] {
   return [

@@ -6,6 +6,9 @@ import { lawNamed } from "./fieldLaws.ts";
 /** The value at a path of the description. */
 export type Wire = (path: string) => Value;
 
+/** The same in numbers, SI. */
+export type Numbers = (path: string) => number;
+
 /** What a budget is written from. */
 export interface Sources {
   readonly wire: Wire;

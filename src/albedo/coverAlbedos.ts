@@ -12,6 +12,8 @@ export interface CoverAlbedo {
   /** Share of light above 0.7 µm reflected, where published. */
   readonly nearInfrared?: number;
   readonly source: string;
+  /** Where the two bands were published. */
+  readonly bandSource?: string;
 }
 
 const TEXTBOOK = "Marshall & Plumb 2008, Atmosphere, Ocean, and Climate Dynamics, Table 2.2";
@@ -24,7 +26,8 @@ const cover = (albedo: number, range: Range, source: string): CoverAlbedo =>
   Object.freeze({ albedo, range: Object.freeze(range), source });
 
 type Bands = Required<Pick<CoverAlbedo, "visible" | "nearInfrared">>;
-const banded = (whole: CoverAlbedo, bands: Bands) => Object.freeze({ ...whole, ...bands });
+const banded = (whole: CoverAlbedo, bands: Bands, bandSource: string) =>
+  Object.freeze({ ...whole, ...bands, bandSource });
 
 /**
  * Typical albedos of covers of the Earth in sunlight, pure numbers. Ice and snow also in two bands, split at 0.7 µm: a
@@ -42,12 +45,14 @@ export const COVER_ALBEDOS = /* @__PURE__ */ Object.freeze({
   city: /* @__PURE__ */ cover(0.16, [0.14, 0.18], TEXTBOOK),
   desert: /* @__PURE__ */ cover(0.4, [0.35, 0.45], TEXTBOOK),
   seaIce: /* @__PURE__ */ banded(
-    /* @__PURE__ */ cover(0.6, [0.5, 0.7], `${ENERGY_TABLE}; bands: ${SEA_ICE}`),
+    /* @__PURE__ */ cover(0.6, [0.5, 0.7], ENERGY_TABLE),
     { visible: 0.73, nearInfrared: 0.33 },
+    SEA_ICE,
   ),
   oldSnow: /* @__PURE__ */ cover(0.5, [0.4, 0.6], TEXTBOOK),
   freshSnow: /* @__PURE__ */ banded(
-    /* @__PURE__ */ cover(0.85, [0.75, 0.95], `${TEXTBOOK}; bands: ${SEA_ICE}`),
+    /* @__PURE__ */ cover(0.85, [0.75, 0.95], TEXTBOOK),
     { visible: 0.96, nearInfrared: 0.68 },
+    SEA_ICE,
   ),
 });

@@ -4,6 +4,8 @@ import { describe, expect, test } from "vitest";
 import {
   absorbedFlux,
   bondAlbedo,
+  COVER_ALBEDOS,
+  type CoverAlbedo,
   closeLoop,
   cloudShareAbsorbed,
   cloudyAlbedo,
@@ -15,6 +17,7 @@ import {
   quadraticAlbedo,
   rampAlbedo,
   surfaceShareBelowCloud,
+  twoBandAlbedo,
 } from "../../src/index.ts";
 import { refusal } from "../refusal.ts";
 import { settings } from "./settings.ts";
@@ -161,6 +164,21 @@ describe("ice as a share of the surface", () => {
   test("needs its two temperatures in order", () => {
     const turned = { temperature: 270, frozenBelow: 280, openAbove: 260 };
     expect(refusal(() => iceShare(turned)).code).toBe("out-of-range");
+  });
+});
+
+describe("published covers", () => {
+  const covers: readonly (readonly [string, CoverAlbedo])[] = Object.entries(COVER_ALBEDOS);
+
+  test.each(covers)("%s reflects what its range allows, and no band more than all", (_, cover) => {
+    const { albedo, range, visible = albedo, nearInfrared = albedo } = cover;
+    expect(albedo).toBeGreaterThanOrEqual(range[0]);
+    expect(albedo).toBeLessThanOrEqual(range[1]);
+    // sunlight is about half visible
+    const sunlit = twoBandAlbedo({ visible, nearInfrared, visibleShare: 0.52 });
+    expect(sunlit).toBeGreaterThanOrEqual(range[0]);
+    expect(sunlit).toBeLessThanOrEqual(range[1]);
+    expect(Object.isFrozen(cover) && Object.isFrozen(range)).toBe(true);
   });
 });
 

@@ -1,7 +1,7 @@
 // A ledger from the numbers of a paper, which need not close.
 import { deepFreeze } from "../ground/deepFreeze.ts";
 import { balanceOf } from "./balanceOf.ts";
-import { notesOf } from "./ledgerNote.ts";
+import { notesOf } from "./notesOf.ts";
 import type { PublishedBudget, PublishedLedger } from "./published.ts";
 import { readPublished } from "./readPublished.ts";
 

@@ -85,8 +85,8 @@ function checkedFields<K extends string>(
 function checkedLayer(layer: Required<LeakyLayer>, path: string): Required<LeakyLayer> {
   const heating = layer.sunlight + layer.convection;
   if (layer.emissivity === 0 && heating !== 0) {
-    const allowed = "0 (a layer of emissivity 0 has no steady state when it is heated),";
-    fail("out-of-range", { path: `${path} (sunlight + convection)`, value: heating, allowed, unit: "W m-2" });
+    const place = `${path} (sunlight + convection; with emissivity 0 no steady state)`;
+    fail("out-of-range", { path: place, value: heating, allowed: "0", unit: "W m-2" });
   }
   return layer;
 }

@@ -304,13 +304,13 @@ describe("a stack refuses", () => {
       "a layer in sunlight that cannot emit",
       () => leakyStackLedger({ layers: [{ emissivity: 0, sunlight: 1 }], surface }),
       "out-of-range",
-      "leakyStackLedger.layers[0] (sunlight + convection)",
+      "leakyStackLedger.layers[0] (sunlight + convection; with emissivity 0 no steady state)",
     ],
     [
       "a layer that air heats and that cannot emit",
       () => leakyStackLedger({ layers: [{ emissivity: 1 }, { emissivity: 0, convection: 1 }], surface }),
       "out-of-range",
-      "leakyStackLedger.layers[1] (sunlight + convection)",
+      "leakyStackLedger.layers[1] (sunlight + convection; with emissivity 0 no steady state)",
     ],
     [
       "a layer that gives away more than it gets",

@@ -111,6 +111,13 @@ describe("a residual beyond its error", () => {
     expect(small({ value: 233 }, { surface: { value: 20.1, error: 12 } }).notes).toHaveLength(2);
   });
 
+  test("is more uncertain below by what the storage may be above", () => {
+    const storage = { surface: { value: 0, range: [-1, 9] as const } };
+    const surface = balance(small({}, storage), "surface");
+    expect(surface.storageError).toEqual([1, 9]);
+    expect(surface.unexplainedError).toEqual([Math.sqrt(25 + 81), Math.sqrt(25 + 1)]);
+  });
+
   test("uses the side of the error on which it lies", () => {
     const sided = (value: number) =>
       publishedLedger({
@@ -126,6 +133,9 @@ describe("a residual beyond its error", () => {
     const rounded = { value: 234, error: 4, lastDigit: 12 };
     expect(small(rounded).notes).toEqual([]);
     expect(small({ ...rounded, lastDigit: 11 }).notes).toHaveLength(2);
+    // 5.5 from the flow and half of 1 from the storage
+    const storage = { surface: { value: 0, error: 1, lastDigit: 1 } };
+    expect(small({ ...rounded, lastDigit: 11 }, storage).notes.map((note) => note.about)).toEqual(["top"]);
   });
 });
 

@@ -11,7 +11,7 @@ const parts = ({ temperature, given, couple }: Tools) => {
   const clear = linearEmission({ temperature, intercept: 240, slope: 2, reference: 288 });
   const concentration = given("co2", 556e-6, "1");
   const forcing = couple("forcing", co2AdjustedForcingMyhre({ concentration, reference: 278e-6 }));
-  return { clear, forcing };
+  return { clear, forcing, factor: given("factor", -1, "1") };
 };
 type Parts = ReturnType<typeof parts>;
 
@@ -57,9 +57,10 @@ describe("a forcing is refused", () => {
 
 describe("a forcing is taken", () => {
   test.each<[string, (p: Parts) => Budget["cooling"]]>([
-    ["by forcedEmission", (p) => ({ olr: forcedEmission(p) })],
+    ["by forcedEmission", ({ clear, forcing }) => ({ olr: forcedEmission({ clear, forcing }) })],
     ["subtracted", (p) => ({ olr: sub(p.clear, p.forcing) })],
     ["as a negative cooling", (p) => ({ olr: p.clear, co2: neg(p.forcing) })],
+    ["times what may be negative", (p) => ({ olr: add(p.clear, mul(p.factor, p.forcing)) })],
     ["times −1", (p) => ({ olr: add(p.clear, mul(-1, p.forcing)) })],
   ])("%s, and warms by forcing over slope", (_, cooling) => {
     const loop = closeLoop((tools) => ({

@@ -99,6 +99,36 @@ describe("at the edges of their regimes", () => {
     expect(Math.abs(at(1.2e-3) - at(0.6e-3) - first)).toBeGreaterThan(0.1);
   });
 
+  test("the coefficient of Meinshausen's logarithm never falls, from d₁ below to d₁ − b₁²/4a₁ above", () => {
+    const [reference, n] = [277.15e-6, 273.87e-9];
+    const coefficient = (concentration: number) =>
+      co2AdjustedForcingMeinshausen({ concentration, reference, nitrousOxide: n }) /
+        Math.log(concentration / reference) +
+      0.0021492 * Math.sqrt(273.87);
+    fc.assert(
+      fc.property(fc.double({ min: 1.001, max: 20, noNaN: true }), (ratio) => {
+        const [less, more] = [coefficient(ratio * reference), coefficient(1.01 * ratio * reference)];
+        expect(more).toBeGreaterThanOrEqual(less - 1e-11);
+        expect(coefficient(reference / ratio)).toBeCloseTo(5.2488, 9);
+      }),
+      settings(300),
+    );
+    // the table's own closed form above C_max
+    expect(coefficient(1809e-6)).toBeCloseTo(5.2488 + 0.00075906 ** 2 / (4 * 2.4785e-7), 9);
+    expect(coefficient(0.1)).toBeCloseTo(5.2488 + 0.00075906 ** 2 / (4 * 2.4785e-7), 9);
+  });
+
+  test("Etminan's coefficient is as large below the reference as above it", () => {
+    const [reference, meanNitrousOxide] = [800e-6, 300e-9];
+    const coefficient = (concentration: number) =>
+      co2AdjustedForcingEtminan({ concentration, reference, meanNitrousOxide }) /
+      Math.log(concentration / reference);
+    for (const step of [10e-6, 100e-6, 500e-6]) {
+      expect(coefficient(reference - step) / coefficient(reference + step)).toBeCloseTo(1, 10);
+      expect(coefficient(reference + step)).toBeGreaterThan(coefficient(reference + step / 2));
+    }
+  });
+
   test("Etminan's CO₂ has no step and no kink at the reference", () => {
     fc.assert(
       fc.property(share, nitrousOxide, (reference, meanNitrousOxide) => {

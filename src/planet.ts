@@ -1,4 +1,29 @@
 // The door of planets: descriptions in the trade's words. Needs mathjs and zod.
+export type {
+  Appraisal,
+  AppraisalSource,
+  ConventionalTemperature,
+  EquilibriumTemperatures,
+  MissingField,
+  OrbitAveraging,
+  PlaceTemperatures,
+  Starlight,
+  StateAppraisal,
+  StatedFlux,
+  StatedLimit,
+  SurfacePhases,
+} from "./appraisal/appraisal.ts";
+export type { AppraisalNote, AppraisalNoteCode } from "./appraisal/appraisalNote.ts";
+export { type AppraisePlanetOptions, appraisePlanet } from "./appraisal/appraisePlanet.ts";
+export type { CatalogueRow, Cell, Column, Refused } from "./appraisal/catalogueCell.ts";
+export {
+  type CatalogueEntry,
+  type CatalogueMapping,
+  fromCatalogueRow,
+} from "./appraisal/fromCatalogueRow.ts";
+export { toMarkdown } from "./appraisal/toMarkdown.ts";
+export { type AppraisalRow, toRows } from "./appraisal/toRows.ts";
+export { toText } from "./appraisal/toText.ts";
 export type { PlanetAssumptions } from "./planet/assumptions.ts";
 export type { PlanetFacts, StarFacts } from "./planet/facts.ts";
 export type { PlanetInput } from "./planet/planetInput.ts";

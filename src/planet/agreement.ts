@@ -4,7 +4,7 @@ import { approaches } from "./approaches.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { fluxWays } from "./starlight.ts";
-import { starsOf } from "./stars.ts";
+import { type Lit, starsOf } from "./stars.ts";
 import { direct, distanceWays, luminosityWays, periodWays, pressureWays, type Way } from "./ways.ts";
 import type { Numbers } from "./wire.ts";
 
@@ -23,12 +23,21 @@ export function checkAgreement(
   const compare = (ways: readonly Way[], name: string, unit: string) =>
     compared(ways, numbers, { name, unit, contradictions });
   return [
-    ...starsOf(d).flatMap((star) => compare(luminosityWays(star), "luminosity", "W")),
-    ...compare(distanceWays(d), "semi-major axis", "m"),
+    ...checkStarAndOrbit(d, numbers, contradictions),
     ...compare(fluxWays(d), "flux at the semi-major axis", "W m-2"),
     ...compare(rotationWays(d), "rotation period of a locked planet", "s"),
     ...compare(pressureWays(d), "surface pressure", "Pa"),
     ...approaches(d, numbers).flatMap((approach) => checkedApproach(approach, contradictions)),
+  ];
+}
+
+/** The same for luminosities and the semi-major axis alone, which can be had where a flux cannot. */
+export function checkStarAndOrbit(d: Lit, numbers: Numbers, contradictions: Contradictions): PlanetNote[] {
+  const luminosity = { name: "luminosity", unit: "W", contradictions };
+  const axis = { name: "semi-major axis", unit: "m", contradictions };
+  return [
+    ...starsOf(d).flatMap((star) => compared(luminosityWays(star), numbers, luminosity)),
+    ...compared(distanceWays(d), numbers, axis),
   ];
 }
 

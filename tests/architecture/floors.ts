@@ -11,6 +11,7 @@ const floors = [
   ["feedback", "ledger"],
   ["branches", "dynamics"],
   ["planet", "chart", "formula", "sweep"],
+  ["appraisal"],
 ];
 
 export const floorOf: ReadonlyMap<string, number> = new Map(
@@ -19,4 +20,6 @@ export const floorOf: ReadonlyMap<string, number> = new Map(
 
 /** Rooms that may import packages, and which. */
 export const packages: readonly string[] = ["mathjs", "zod"];
-export const packageFloor = floors.length - 1;
+/** Doors stand above all rooms. */
+export const doorFloor = floors.length;
+export const packageFloor = floors.findIndex((rooms) => rooms.includes("planet"));

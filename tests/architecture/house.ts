@@ -1,7 +1,7 @@
 // The rules of the house, checked over a set of source files (path from src → text); each fault is one line of text.
 import path from "node:path";
 import ts from "typescript";
-import { floorOf, packageFloor, packages } from "./floors.ts";
+import { doorFloor, floorOf, packageFloor, packages } from "./floors.ts";
 import { importsOf, parse } from "./imports.ts";
 
 export type Sources = ReadonlyMap<string, string>;
@@ -12,7 +12,7 @@ const roomOf = (file: string): string => file.slice(0, file.indexOf("/"));
 
 /** Doors stand above every room. */
 function floorOfFile(file: string): number | undefined {
-  return isDoor(file) ? packageFloor + 1 : floorOf.get(roomOf(file));
+  return isDoor(file) ? doorFloor : floorOf.get(roomOf(file));
 }
 
 function packageFault(file: string, specifier: string): string | null {

@@ -1,4 +1,4 @@
-// Thousands of planets of an open catalogue, when the variable THERMOSTEAD_EXOPLANETS holds the path of its table.
+// Thousands of planets of an open catalogue, when the variable THERMOSTEAD_CATALOGUE holds the path of its table.
 //
 // The table has one row for each planet of the Open Exoplanet Catalogue (Rein 2012, arXiv:1211.7121; census of October
 // 2023, 5,414 rows). The counts were made once from the same rows by a script that does not read this library.
@@ -17,7 +17,7 @@ import {
 } from "../../src/index.ts";
 import { type Planet, positive, readCatalogue } from "./catalogue.ts";
 
-const path = process.env.THERMOSTEAD_EXOPLANETS;
+const path = process.env.THERMOSTEAD_CATALOGUE;
 
 /** Semi-major axis from period and mass of the star, au. */
 function keplerAxis(planet: Planet): number | undefined {
@@ -39,8 +39,8 @@ function fluxOf(planet: Planet): number | undefined {
 }
 
 if (path === undefined) {
-  test("without THERMOSTEAD_EXOPLANETS no catalogue is compared", () => {
-    console.log("catalogue of planets: not compared; set THERMOSTEAD_EXOPLANETS to the path of its table");
+  test("without THERMOSTEAD_CATALOGUE no catalogue is compared", () => {
+    console.log("catalogue of planets: not compared; set THERMOSTEAD_CATALOGUE to the path of its table");
     expect(path).toBeUndefined();
   });
 } else {

@@ -1,0 +1,28 @@
+// What a reader of an appraisal must know beside the notes of the planet and its states.
+import type { PlanetNote } from "../planet/planetNote.ts";
+
+/**
+ * What a note of an appraisal is about. `albedo-of-another-star`: one number for the albedo under a cool star.
+ * `eccentric-orbit`: the orbit is far from a circle. `average-not-favoured`: the heat capacity speaks for the other average.
+ * `star-outside-limits`: no limits are published for such a star. `slow-rotation`: the limits are for a planet that turns fast.
+ * `incomplete-budget`: no states, because a part of the budget is not given. `published-temperature`: what a table's
+ * temperature may mean.
+ */
+export type AppraisalNoteCode =
+  | "albedo-of-another-star"
+  | "eccentric-orbit"
+  | "average-not-favoured"
+  | "star-outside-limits"
+  | "slow-rotation"
+  | "incomplete-budget"
+  | "published-temperature";
+
+/** A note of an appraisal; its fields are those of a planet's note. */
+export type AppraisalNote = Omit<PlanetNote, "code"> & {
+  readonly code: PlanetNote["code"] | AppraisalNoteCode;
+};
+
+/** A note with what most notes leave open. */
+export const appraisalNote = (
+  note: Pick<AppraisalNote, "code" | "about" | "text"> & Partial<AppraisalNote>,
+): AppraisalNote => ({ severity: "info", value: null, range: null, unit: "1", source: null, ...note });

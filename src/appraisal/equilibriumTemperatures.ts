@@ -1,0 +1,68 @@
+// Temperatures of re-radiation under stated assumptions.
+import { daysideRedistribution } from "../greenhouse/daysideRedistribution.ts";
+import {
+  equilibriumTemperature,
+  REDISTRIBUTION_DAYSIDE,
+  REDISTRIBUTION_GLOBAL,
+  REDISTRIBUTION_SUBSTELLAR,
+} from "../greenhouse/equilibriumTemperature.ts";
+import { nightsideRedistribution } from "../greenhouse/nightsideRedistribution.ts";
+import { temperatureMeanFlux } from "../orbit/temperatureMeanFlux.ts";
+import type { PlanetEquilibriumTemperature } from "../planet/planetTypes.ts";
+import type {
+  ConventionalTemperature,
+  EquilibriumTemperatures,
+  PlaceTemperatures,
+  Starlight,
+} from "./appraisal.ts";
+
+/** The pairs that tables of planets quote for the flux at the semi-major axis, mostly without saying which. */
+const CONVENTIONAL = [
+  { albedo: 0, redistribution: REDISTRIBUTION_GLOBAL, spread: "the whole sphere" },
+  { albedo: 0.3, redistribution: REDISTRIBUTION_GLOBAL, spread: "the whole sphere" },
+  { albedo: 0, redistribution: REDISTRIBUTION_DAYSIDE, spread: "the day side" },
+  { albedo: 0.3, redistribution: REDISTRIBUTION_DAYSIDE, spread: "the day side" },
+] as const;
+
+/** What re-radiates at a place: its Bond albedo and what comes from below, W m⁻². */
+export interface Ground {
+  readonly albedo: number;
+  readonly internalFlux: number;
+}
+
+/** All equilibrium temperatures of a planet; `ground` is null where the albedo is not a number. */
+export function equilibriumTemperatures(
+  { mean, atSemiMajorAxis, eccentricity }: Starlight,
+  described: PlanetEquilibriumTemperature | null,
+  ground: Ground | null,
+): EquilibriumTemperatures {
+  const { flux } = mean;
+  const dark = { albedo: 0, redistribution: REDISTRIBUTION_GLOBAL };
+  const overTime = temperatureMeanFlux({ fluxAtSemiMajorAxis: atSemiMajorAxis.flux, eccentricity });
+  return {
+    described,
+    conventional: CONVENTIONAL.map(({ albedo, redistribution, spread }): ConventionalTemperature => {
+      const value = equilibriumTemperature({ flux: atSemiMajorAxis.flux, albedo, redistribution });
+      return { albedo, redistribution, spread, value };
+    }),
+    places: ground && placeTemperatures(flux, ground),
+    orbit: {
+      ofMeanFlux: equilibriumTemperature({ flux, ...dark }),
+      meanOverTime: equilibriumTemperature({ flux: overTime, ...dark }),
+    },
+  };
+}
+
+/** Substellar point, day and night side between no transport of heat and a complete one. */
+function placeTemperatures(flux: number, ground: Ground): PlaceTemperatures {
+  const at = (redistribution: number) => equilibriumTemperature({ flux, ...ground, redistribution });
+  const between = (share: (ports: { transport: number }) => number) => ({
+    still: at(share({ transport: 0 })),
+    spread: at(share({ transport: 1 })),
+  });
+  return {
+    substellar: at(REDISTRIBUTION_SUBSTELLAR),
+    day: between(daysideRedistribution),
+    night: between(nightsideRedistribution),
+  };
+}

@@ -1,0 +1,179 @@
+// Makes a description of a row of any table of planets.
+import type { Port } from "../graph/card.ts";
+import { fail, ThermosteadError } from "../ground/errors.ts";
+import { checkKeys } from "../ground/names.ts";
+import { temperaturePort } from "../law/ports.ts";
+import { checkStarAndOrbit } from "../planet/agreement.ts";
+import { ORBIT_PORTS, STAR_PORTS } from "../planet/fieldPorts.ts";
+import { type PlanetInput, readInput } from "../planet/planetInput.ts";
+import { PLANET_FORMAT } from "../planet/planetShape.ts";
+import type { Lit } from "../planet/stars.ts";
+import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
+import { type CatalogueRow, type Cell, type Column, cellOf, type Refused, textOf } from "./catalogueCell.ts";
+
+/** Which columns of a table hold what. Whatever is left out is not read. */
+export interface CatalogueMapping {
+  /** Column with the name of the planet. */
+  readonly name?: string;
+  readonly star?: {
+    /** Column with the name of the star. */
+    readonly name?: string;
+    readonly luminosity?: Column;
+    readonly radius?: Column;
+    readonly effectiveTemperature?: Column;
+    readonly mass?: Column;
+  };
+  readonly orbit?: {
+    readonly semiMajorAxis?: Column;
+    readonly period?: Column;
+    readonly distanceInStellarRadii?: Column;
+    readonly flux?: Column;
+    readonly eccentricity?: Column;
+  };
+  /** The temperature that the table gives for the planet, whatever it means there. */
+  readonly publishedTemperature?: Column;
+  /** Column that says how the planet was found, and the word in it for imaging. */
+  readonly discovery?: { readonly column: string; readonly imaging: string };
+  /**
+   * What the table does not say and you take on yourself: the other fields of a description, such as `redistribution`,
+   * `albedo`, `longwave`, `heatCapacity`, or `orbit: { average: "flux" }`.
+   */
+  readonly assume?: Readonly<Record<string, unknown>>;
+}
+
+/** A row that was read. */
+export interface CatalogueEntry {
+  /** For `appraisePlanet`: what the row and `assume` say, and nothing else. */
+  readonly description: Readonly<Record<string, unknown>>;
+  /** Fields that are mapped to a column which is empty in this row, such as `star.radius`. */
+  readonly missing: readonly string[];
+  /** Cells that are no number, numbers that their field cannot have, and errors below 0. They are left out. */
+  readonly refused: readonly Refused[];
+  /** The published temperature as the table has it, with unit and errors. */
+  readonly publishedTemperature: Cell | null;
+  /** Luminosities and semi-major axes that agree or not, and what the published temperature may mean. */
+  readonly notes: readonly AppraisalNote[];
+}
+
+const { luminosity, radius, effectiveTemperature, mass } = STAR_PORTS;
+const STAR = { luminosity, radius, effectiveTemperature, mass };
+const { semiMajorAxis, period, distanceInStellarRadii, flux, eccentricity } = ORBIT_PORTS;
+const ORBIT = { semiMajorAxis, period, distanceInStellarRadii, flux, eccentricity };
+const TEMPERATURE = temperaturePort();
+
+/**
+ * A description of a planet from a row of any table: `mapping` says which column holds what, and in which unit. What is
+ * missing is reported, not guessed; what is no number is reported and left out. Values keep their errors, so that they
+ * reach the appraisal. Units are those of `UNITS`.
+ *
+ * Throws `unreadable` for a row or a mapping that is no object, `unknown-name` for a field that a mapping does not have,
+ * `unknown-unit` and `unit-mismatch` for a unit that its field cannot have.
+ *
+ * @example
+ * const { description, missing } = fromCatalogueRow(
+ *   { planet: "Vellamar b", teff: "4680", radius: "0.68", a: "0.46" },
+ *   {
+ *     name: "planet",
+ *     star: { radius: { column: "radius", unit: "solRad" }, effectiveTemperature: { column: "teff", unit: "K" } },
+ *     orbit: { semiMajorAxis: { column: "a", unit: "au" } },
+ *   },
+ * );
+ */
+export function fromCatalogueRow(row: CatalogueRow, mapping: CatalogueMapping): CatalogueEntry {
+  checkObject(row, "row");
+  checkObject(mapping, "mapping");
+  checkKeys(mapping, "mapping", ["name", "star", "orbit", "publishedTemperature", "discovery", "assume"]);
+  checkKeys(mapping.star ?? {}, "mapping.star", ["name", ...Object.keys(STAR)]);
+  checkKeys(mapping.orbit ?? {}, "mapping.orbit", Object.keys(ORBIT));
+  const missing: string[] = [];
+  const values = new Map<string, number>();
+  const refused: Refused[] = [];
+  const read = (path: string, column: Column | undefined, port: Port): Cell | null => {
+    if (column === undefined) return null;
+    const before = refused.length;
+    const cell = cellOf(row, column, `mapping.${path}`, refused);
+    if (cell === null && refused.length === before) missing.push(path);
+    const input = cell && allowed(cell, { path, column, port }, refused);
+    if (input) values.set(path, input.value);
+    return input && cell;
+  };
+  const part = <K extends string>(place: "star" | "orbit", ports: Readonly<Record<K, Port>>) => {
+    const columns = (mapping[place] ?? {}) as Readonly<Partial<Record<K, Column>>>;
+    return Object.fromEntries(
+      (Object.keys(ports) as K[]).flatMap((field) => {
+        const cell = read(`${place}.${field}`, columns[field], ports[field]);
+        return cell === null ? [] : [[field, cell]];
+      }),
+    );
+  };
+  const { assume = {}, publishedTemperature } = mapping;
+  const [name, starName] = [textOf(row, mapping.name), textOf(row, mapping.star?.name)];
+  const star = {
+    ...(starName === null ? {} : { name: starName }),
+    ...part("star", STAR),
+    ...under(assume, "star"),
+  };
+  const orbit = { ...part("orbit", ORBIT), ...under(assume, "orbit") };
+  const published = read("publishedTemperature", publishedTemperature, TEMPERATURE);
+  const description = {
+    format: PLANET_FORMAT,
+    ...(name === null ? {} : { name }),
+    ...assume,
+    ...(Object.keys(star).length === 0 ? {} : { star }),
+    orbit,
+  };
+  return Object.freeze({
+    description,
+    missing,
+    refused,
+    publishedTemperature: published,
+    notes: [
+      ...checkStarAndOrbit({ star, orbit } as Lit, (path) => values.get(path) as number, "note"),
+      ...(published === null ? [] : notesOn(published, row, mapping)),
+    ],
+  });
+}
+
+/** The cell in SI, if a description may hold it; a number outside of the range of its field is refused. */
+function allowed(
+  cell: Cell,
+  { path, column, port }: { path: string; column: Column; port: Port },
+  refused: Refused[],
+): PlanetInput | null {
+  try {
+    return readInput(path, port, cell);
+  } catch (error) {
+    if (!(error instanceof ThermosteadError) || error.code !== "out-of-range") throw error;
+    const name = typeof column === "string" ? column : column.column;
+    refused.push({
+      column: name,
+      value: cell.value,
+      reason: `${path} is out of range; allowed: ${error.allowed}`,
+    });
+    return null;
+  }
+}
+
+function notesOn(published: Cell, row: CatalogueRow, { discovery }: CatalogueMapping): AppraisalNote[] {
+  const note = {
+    code: "published-temperature",
+    about: "publishedTemperature",
+    value: published.value,
+    unit: published.unit,
+  } as const;
+  if (discovery && textOf(row, discovery.column) === discovery.imaging) {
+    const text = "the planet was imaged: its temperature is that of its own glow, not of its star's light";
+    return [appraisalNote({ ...note, severity: "caution", text })];
+  }
+  const text =
+    "tables mix surface temperatures with equilibrium temperatures for albedo 0 and for 0.3; try both";
+  return [appraisalNote({ ...note, text })];
+}
+
+const under = (assume: Readonly<Record<string, unknown>>, place: string): object =>
+  typeof assume[place] === "object" && assume[place] !== null ? assume[place] : {};
+
+function checkObject(value: unknown, path: string): void {
+  if (typeof value !== "object" || value === null || Array.isArray(value))
+    fail("unreadable", { path, value, allowed: "an object" });
+}

@@ -1,0 +1,39 @@
+// A report as sections of lines and tables, before it is written in one notation or another.
+
+/** A table: the first row is its head; columns named in `right` hold numbers. */
+export interface Table {
+  readonly head: readonly string[];
+  readonly rows: readonly (readonly string[])[];
+  readonly right: readonly number[];
+}
+
+/** A part of a report under a title. */
+export interface Section {
+  readonly title: string;
+  readonly blocks: readonly (string | Table)[];
+}
+
+/** A whole report. */
+export interface Report {
+  readonly title: string;
+  readonly sections: readonly Section[];
+  /** What the numbers are not. */
+  readonly caution: string;
+}
+
+/** A number for reading: some significant digits, and powers of ten only where they help. */
+export function shown(value: number, digits = 5): string {
+  if (value === 0) return "0";
+  const size = Math.abs(value);
+  return size < 1e-3 || size >= 1e6
+    ? value.toExponential(digits - 2)
+    : String(Number(value.toPrecision(digits)));
+}
+
+/** The same with its sign. */
+export const signed = (value: number, digits = 4): string =>
+  value < 0 ? shown(value, digits) : `+${shown(value, digits)}`;
+
+/** A number with its unit; pure numbers have none. */
+export const withUnit = (value: number, unit: string, digits = 5): string =>
+  unit === "1" ? shown(value, digits) : `${shown(value, digits)} ${unit}`;

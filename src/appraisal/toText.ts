@@ -1,0 +1,46 @@
+// An appraisal as plain text of at most 80 columns.
+import type { Appraisal } from "./appraisal.ts";
+import type { Section, Table } from "./report.ts";
+import { reportOf } from "./reportOf.ts";
+
+const WIDTH = 80;
+const INDENT = 2;
+
+/**
+ * The whole appraisal as plain text of at most 80 columns, tables apart: for a terminal or a log. Nothing in it is lost to
+ * rounding that a reader would miss; `JSON.stringify(appraisal)` has every digit.
+ */
+export function toText(appraisal: Appraisal): string {
+  const { title, sections, caution } = reportOf(appraisal);
+  return [title, ...sections.flatMap(sectionLines), "", ...wrapped(caution, WIDTH, 0), ""].join("\n");
+}
+
+function sectionLines({ title, blocks }: Section): string[] {
+  const lines = blocks.flatMap((block) =>
+    typeof block === "string" ? wrapped(block, WIDTH - INDENT, INDENT) : tableLines(block),
+  );
+  return ["", title, ...lines.map((line) => `${" ".repeat(INDENT)}${line}`.trimEnd())];
+}
+
+/** Breaks a text at spaces; lines after the first are indented by `hang`. */
+function wrapped(text: string, width: number, hang: number): string[] {
+  const lines: string[] = [];
+  let line = "";
+  for (const word of text.split(/\s+/).filter(Boolean)) {
+    if (line.trim() !== "" && line.length + 1 + word.length > width) {
+      lines.push(line);
+      line = " ".repeat(hang) + word;
+    } else line += (line.trim() === "" ? "" : " ") + word;
+  }
+  return line === "" ? lines : [...lines, line];
+}
+
+function tableLines({ head, rows, right }: Table): string[] {
+  const all = [head, ...rows];
+  const widths = head.map((_, i) => Math.max(...all.map((row) => (row[i] ?? "").length)));
+  return all.map((row) =>
+    widths
+      .map((width, i) => (right.includes(i) ? (row[i] ?? "").padStart(width) : (row[i] ?? "").padEnd(width)))
+      .join("  "),
+  );
+}

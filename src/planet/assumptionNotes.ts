@@ -16,11 +16,11 @@ const MEAN_FLUX = "the time-mean of the flux, which suits a thermal time much lo
 const MEAN_TEMPERATURE =
   "the flux of the time-mean temperature, which suits a body without thermal inertia and with a constant albedo";
 
-/** What an albedo is of, as notes begin. */
-const OF = {
-  planet: "Bond albedo",
-  surface: "no air and no cloud reflects sunlight: Bond albedo of the surface",
-  "surface and sky": "Bond albedo of surface, air and clouds, whose reflections are followed to and fro",
+/** Where a Bond albedo comes from that is not stated of the whole planet. */
+const BELOW = {
+  planet: "",
+  surface: ", of the surface: no air and no cloud reflects sunlight",
+  "surface and sky": ", of surface, air and clouds: light goes to and fro between them any number of times",
 } as const;
 
 /** The assumptions as notes in plain words. */
@@ -44,8 +44,15 @@ function albedoNote({ albedo, albedoLaw, albedoOf }: PlanetAssumptions): PlanetN
   const about = albedoOf === "planet" ? "albedo" : "surface";
   const from = albedoLaw === null ? "" : ` from ${albedoLaw}`;
   return albedo === null
-    ? note(about, `${OF[albedoOf]}${from}: it answers to temperature, so each state has its own`)
-    : note(about, `${OF[albedoOf]}${from} as a number: it does not answer to the climate`, albedo);
+    ? note(
+        about,
+        `Bond albedo${from}: it answers to temperature, so each state has its own${BELOW[albedoOf]}`,
+      )
+    : note(
+        about,
+        `Bond albedo${from} as a number: it does not answer to the climate${BELOW[albedoOf]}`,
+        albedo,
+      );
 }
 
 function spreadNote({ description: d }: CheckedPlanet, { redistribution }: PlanetAssumptions): PlanetNote {

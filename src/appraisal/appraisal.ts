@@ -1,4 +1,5 @@
 // Everything that is said of a described planet. A plain frozen object: it survives `JSON.stringify` and back.
+import type { Diagram } from "../branches/diagram.ts";
 import type { TippingMargins } from "../branches/margins.ts";
 import type { Feedbacks } from "../feedback/feedbacks.ts";
 import type { PlanetAssumptions } from "../planet/assumptions.ts";
@@ -150,6 +151,8 @@ export interface Appraisal {
   readonly found: FoundStates | null;
   /** By rising temperature. */
   readonly states: readonly StateAppraisal[];
+  /** All climates as the star brightens or fades, from a fifth to five times; null where nothing stands for the star. */
+  readonly diagram: Diagram | null;
   /** Published limits; empty where the effective temperature is not given or outside of their range. */
   readonly habitableZone: readonly StatedLimit[];
   /** Where the planet's own stable branches end. */

@@ -63,7 +63,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
   const loop = (star?.planet ?? planet).loop;
   const climates: Climates = hasBudget
     ? statesOfPlanet({ loop, facts, star }, { within, effort })
-    : { found: null, states: [] };
+    : { found: null, states: [], diagram: null };
   const albedoIsNumber = hasBudget && assumptions.albedo !== null;
   const ground = { albedo: assumptions.albedo ?? 0, internalFlux: assumptions.internalHeat };
   const temperature = facts.stars[0]?.effectiveTemperature ?? null;

@@ -1,6 +1,8 @@
 // The climates of a planet and everything that is said of each.
 
+import type { Diagram } from "../branches/diagram.ts";
 import { tippingMargins } from "../branches/tippingMargins.ts";
+import { traceBranches } from "../branches/traceBranches.ts";
 import { analyseFeedbacks } from "../feedback/analyseFeedbacks.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
@@ -25,6 +27,7 @@ export interface Search {
 export interface Climates {
   readonly found: FoundStates | null;
   readonly states: readonly StateAppraisal[];
+  readonly diagram: Diagram | null;
 }
 
 /** A loop, what is known beside it, and the given that stands for its star. */
@@ -39,6 +42,7 @@ export function statesOfPlanet({ loop, facts, star }: Subject, { within, effort 
   const spend = effort === undefined ? {} : { effort };
   const found = findStates(loop, { within, ...spend });
   const { heatCapacity, orbitalPeriod: period, surfacePressure } = facts;
+  const diagram = branchesOf(loop, found.states, star, { within, ...spend });
   const states = found.states.map((state): StateAppraisal => {
     const holds = state.stability === "stable";
     const equilibriumTemperature = state.report.equilibriumTemperature as number;
@@ -49,20 +53,31 @@ export function statesOfPlanet({ loop, facts, star }: Subject, { within, effort 
       greenhouseWarming: temperature - equilibriumTemperature,
       averaging: orbitAveraging(loop, state, { heatCapacity, period }),
       feedbacks: holds ? analyseFeedbacks(loop, state) : null,
-      margins: holds && star ? marginsOf(loop, state, star, { within, ...spend }) : null,
+      margins: holds && star && diagram ? marginsOf(loop, state, star, diagram) : null,
       surface: surfacePressure === null ? null : surfacePhases({ temperature, pressure: surfacePressure }),
     };
   });
-  return { found, states };
+  return { found, states, diagram };
 }
 
-function marginsOf(
+/** The diagram of all climates as the star brightens or fades; null where there is none that holds, or no given for the star. */
+function branchesOf(
+  loop: Loop,
+  states: readonly State[],
+  star: AlongStar | null,
+  search: { readonly within: Range; readonly effort?: number },
+): Diagram | null {
+  if (star === null || !states.some((state) => state.stability === "stable")) return null;
+  const { along, now } = star;
+  const [low, high] = loop.givens.find((given) => given.name === along)?.within ?? [0, Number.MAX_VALUE];
+  const between = [Math.max(FACTORS[0] * now, low), Math.min(FACTORS[1] * now, high)] as const;
+  return traceBranches(loop, { along, between, ...search });
+}
+
+const marginsOf = (
   loop: Loop,
   state: State,
-  { along, now, brightening }: AlongStar,
-  search: { readonly within: Range; readonly effort?: number },
-): StateAppraisal["margins"] {
-  const declared = loop.givens.find((given) => given.name === along)?.within ?? [0, Number.MAX_VALUE];
-  const between = [Math.max(FACTORS[0] * now, declared[0]), Math.min(FACTORS[1] * now, declared[1])] as const;
-  return tippingMargins(loop, state, { along, between, ...search, ...(brightening ? { brightening } : {}) });
-}
+  { along, brightening }: AlongStar,
+  diagram: Diagram,
+): StateAppraisal["margins"] =>
+  tippingMargins(loop, state, { along, diagram, ...(brightening ? { brightening } : {}) });

@@ -13,6 +13,11 @@ export interface TippingMarginsOptions<N extends string = string> {
   readonly within?: Range;
   /** Lowest and highest value of the given; its declared range unless said. */
   readonly between?: Range;
+  /**
+   * The diagram along this given, if it was traced before: several states share one. Its ranges count then, and its other givens
+   * must have the values of the state.
+   */
+  readonly diagram?: Diagram<Givens<N>>;
   /** How the star brightens; then the time to the end of the branch is told, for a given that grows with luminosity. */
   readonly brightening?: Brightening;
   readonly effort?: number;

@@ -1,7 +1,7 @@
 // How far a state is from the ends of its branch, and what comes then.
 import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
-import { checkedRange, type Range } from "../ground/range.ts";
+import type { Range } from "../ground/range.ts";
 import { checkBelongs, type StateLike } from "../loop/checkBelongs.ts";
 import type { Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
@@ -9,6 +9,7 @@ import type { State } from "../states/state.ts";
 import { type Brightening, type TimeUntil, timeUntil } from "./brightening.ts";
 import { checkedAlong } from "./checkedAlong.ts";
 import type { Branch, BranchPoint, Diagram } from "./diagram.ts";
+import { fixedGivens } from "./fixedGivens.ts";
 import type { Margin, TippingMargins, TippingMarginsOptions } from "./margins.ts";
 import { endOf, stateOn } from "./statesOnDiagram.ts";
 import { traceBranches } from "./traceBranches.ts";
@@ -21,7 +22,8 @@ const WITHIN: Range = [2.7, 2000];
  * also the time until its branch ends, at fixed other givens: for the Sun's history Δt = 2.5·t₀·(1 − p/p_end).
  *
  * `state` may come from `JSON.parse`. Throws `foreign-state`, `unknown-name`, `missing` (no range for the given),
- * `contradiction` (the budget does not depend on it; or time is asked along a given that is no luminosity or flux),
+ * `contradiction` (the budget does not depend on it; the diagram is another; or time is asked along a given that is no
+ * luminosity or flux),
  * `out-of-range` (a star that is not like the Sun), `not-a-number`, `unreadable`, `several-variables`.
  *
  * @example tippingMargins(loop, state, { along: "flux", between: [900, 1900] }).rise.relative
@@ -32,33 +34,20 @@ export function tippingMargins<N extends string>(
   options: TippingMarginsOptions<N>,
 ): TippingMargins<N> {
   const path = "tippingMargins";
-  checkKeys(options, path, ["along", "within", "between", "brightening", "effort", "tolerance"]);
+  checkKeys(options, path, ["along", "within", "between", "diagram", "brightening", "effort", "tolerance"]);
   checkOneVariable(loop, path);
   const { name, given, place } = checkedAlong(loop, options.along, undefined, `${path}.along`);
   const { values } = checkBelongs(loop, state, "state");
   const [temperature, at] = [values[0] as number, values[place] as number];
   const until = options.brightening === undefined ? undefined : timeFor(options.brightening, given);
-  const within = options.within ?? WITHIN;
-  const between = options.between ?? given.within;
-  if (!between) {
-    return fail("missing", {
-      path: "between",
-      value: between,
-      allowed: "a range for the given",
-      unit: given.unit,
-    });
+  const others = fixedGivens(loop, name, [...values.subarray(loop.variables.length)]);
+  const diagram = options.diagram ?? diagramAround(loop, options, { along: name, others });
+  if (diagram.along !== name || !sameValues(diagram.fixed, others)) {
+    const allowed = `a diagram along ${name} with the other givens of the state`;
+    fail("contradiction", { path: "diagram", value: `along ${diagram.along}`, allowed });
   }
-  checkHolds(within, temperature, "within", "K");
-  checkHolds(between, at, "between", given.unit);
-  const others = Object.fromEntries(
-    loop.givens.flatMap((g, i) => (g.name === name ? [] : [[g.name, values[i + loop.variables.length]]])),
-  );
-  const { effort, tolerance } = options;
-  const diagram = traceBranches(loop as Loop, {
-    ...{ along: name, between, within, at: others as Record<string, number> },
-    ...(effort === undefined ? {} : { effort }),
-    ...(tolerance === undefined ? {} : { tolerance }),
-  });
+  checkHolds(diagram.within, temperature, "within", "K");
+  checkHolds(diagram.between, at, "between", given.unit);
   const index = branchAt(diagram, at, temperature);
   const branch = diagram.branches[index];
   const here = branch && stateOn(loop, diagram, branch, at);
@@ -92,6 +81,27 @@ export function tippingMargins<N extends string>(
   });
 }
 
+function diagramAround<N extends string>(
+  loop: Loop<N>,
+  { within = WITHIN, between, effort, tolerance }: TippingMarginsOptions<N>,
+  { along, others }: { along: string; others: Readonly<Record<string, number>> },
+): Diagram {
+  const given = loop.givens.find((g) => g.name === along);
+  const range = between ?? given?.within;
+  if (!range) {
+    const allowed = "a range for the given";
+    return fail("missing", { path: "between", value: range, allowed, unit: given?.unit ?? "1" });
+  }
+  return traceBranches(loop as Loop, {
+    ...{ along, between: range, within, at: others },
+    ...(effort === undefined ? {} : { effort }),
+    ...(tolerance === undefined ? {} : { tolerance }),
+  });
+}
+
+const sameValues = (a: Readonly<Record<string, number>>, b: Readonly<Record<string, number>>): boolean =>
+  Object.keys(a).length === Object.keys(b).length && Object.entries(b).every(([name, x]) => a[name] === x);
+
 function timeFor(brightening: Brightening, { name, unit }: { name: string; unit: string }): TimeUntil {
   if (unit !== "W" && unit !== "W m-2") {
     const allowed = "a luminosity or a flux, in W or W m-2, to tell a time";
@@ -100,8 +110,7 @@ function timeFor(brightening: Brightening, { name, unit }: { name: string; unit:
   return timeUntil(brightening);
 }
 
-function checkHolds(range: unknown, value: number, path: string, unit: string): void {
-  const [low, high] = checkedRange(range, path, unit);
+function checkHolds([low, high]: Range, value: number, path: string, unit: string): void {
   if (value >= low && value <= high) return;
   fail("out-of-range", { path, value, allowed: "a range with the state in it", unit });
 }

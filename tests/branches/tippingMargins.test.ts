@@ -23,6 +23,18 @@ describe("the margins of a state", () => {
   ];
   const { folds, jumps } = traceBranches(loop, options);
 
+  test("are the same on a diagram that was traced before, and another diagram is refused", () => {
+    const diagram = traceBranches(loop, options);
+    for (const [i, margins] of [cold, middle, warm].entries())
+      expect(tippingMargins(loop, states[i] as never, { along: "flux", diagram })).toEqual(margins);
+    const ask = (other: typeof diagram, along = "flux") =>
+      refusal(() => tippingMargins(loop, states[0], { along, diagram: other } as never)).code;
+    const [given] = Object.keys(diagram.fixed) as [never];
+    expect(ask(traceBranches(loop, { ...options, at: { [given]: 0.61 } }))).toBe("contradiction");
+    expect(ask(diagram, given)).toBe("contradiction");
+    expect(ask(traceBranches(loop, { ...options, between: [1400, 1900] }))).toBe("out-of-range");
+  });
+
   test("are the distances to the folds of its branch", () => {
     const [high, low] = folds.map((f) => f.at) as [number, number];
     expect(cold.rise).toMatchObject({

@@ -25,19 +25,37 @@ export interface Wanted {
   readonly difference: boolean;
 }
 
+/** A unit in SI: its size, and its zero point, which only temperatures have. */
+interface Scale {
+  readonly size: number;
+  readonly zero: number;
+}
+
+/** The scales that were asked for before: there are few, and a catalogue asks for them thousands of times. */
+const scales = /* @__PURE__ */ new Map<string, Scale>();
+const MOST_SCALES = 500;
+
 /** Converts a number in a unit to SI. Throws `unit-mismatch`, `unknown-unit`, `unreadable`, `not-a-number`. */
 export function inSI(value: number, unitText: string, wanted: Wanted, path: string): number {
-  const factors = unitFactors(unitText, path);
-  checkCelsius(factors, unitText, wanted, path);
-  known ??= unitClass();
-  const target = plainText(unitFactors(wanted.unit, path));
-  const measured = new known(value, plainText(factors));
-  if (!measured.equalBase(new known(1, target))) mismatch(unitText, wanted, path);
-  const converted = measured.toNumber(target);
+  const key = `${unitText}|${wanted.unit}|${wanted.difference}`;
+  const scale = scales.get(key) ?? scaleOf(unitText, wanted, path);
+  if (scales.size < MOST_SCALES) scales.set(key, scale);
+  const converted = value * scale.size + scale.zero;
   if (!Number.isFinite(converted)) {
     fail("not-a-number", { path, value, allowed: "that stays finite when converted to", unit: wanted.unit });
   }
   return converted;
+}
+
+function scaleOf(unitText: string, wanted: Wanted, path: string): Scale {
+  const factors = unitFactors(unitText, path);
+  checkCelsius(factors, unitText, wanted, path);
+  known ??= unitClass();
+  const target = plainText(unitFactors(wanted.unit, path));
+  const [one, none] = [new known(1, plainText(factors)), new known(0, plainText(factors))];
+  if (!one.equalBase(new known(1, target))) mismatch(unitText, wanted, path);
+  const zero = none.toNumber(target);
+  return { size: zero === 0 ? one.toNumber(target) : 1, zero };
 }
 
 /** Throws `unit-mismatch` with an example of what fits. */

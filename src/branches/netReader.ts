@@ -12,7 +12,7 @@ import { enumerateZeros } from "../search/enumerateZeros.ts";
 import type { DoubtKind } from "../search/enumeration.ts";
 import type { Located } from "../states/located.ts";
 import { searchOf } from "../states/prepared.ts";
-import { enumerateBalance, locate } from "../states/provedSearch.ts";
+import { enumerateBalance, located } from "../states/provedSearch.ts";
 import { balanceOf } from "./balanceOf.ts";
 import { signAt } from "./criticals.ts";
 import type { Branch, BranchEnd, BranchPoint } from "./diagram.ts";
@@ -93,7 +93,7 @@ export function netReader(loop: Loop, place: number, givens: readonly number[]):
       at(parameter);
       const { zeros } = enumerateZeros(balance.net, reachOf(branch), { effort: ON_BRANCH });
       const zero = nearest(zeros, branch, parameter);
-      return zero && locate(balance, zero);
+      return zero && located(zero);
     },
   };
 }

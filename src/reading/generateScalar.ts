@@ -5,7 +5,7 @@ import { compiled } from "./generation.ts";
 import type { Operation, ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
 
 type Functions = readonly Compute["value"][];
-type Raw = (x: Float64Array, y: Float64Array, k: Float64Array, f: Functions, o: Float64Array) => void;
+type Bind = (data: Float64Array, functions: Functions) => ScalarKernel;
 type Emit = (a: string, b: string, c: string, d: string) => string;
 
 /** One line of code for each step; a missing one does not compile. */
@@ -46,8 +46,10 @@ export function generateScalar(
     if (!inline) code += `const r${id}=${text};`;
   });
   const results = outputs.map((id, i) => `o[${i}]=${texts[id]};`).join("");
-  const run = compiled<Raw>(`return function(x,y,k,f,o){${code}${results}}`);
-  return (low, high, out) => run(low, high, data, program.functions, out);
+  return compiled<Bind>(`return function(k,f){return function(x,y,o){${code}${results}}}`)(
+    data,
+    program.functions,
+  );
 }
 
 function textOf(

@@ -1,48 +1,48 @@
 // Two places with proved, opposite signs.
-import type { Sign } from "./enclosed.ts";
 import type { Place, Reader } from "./reader.ts";
 
-/** Shrinks as places with proved signs are read inside it. */
+/** Shrinks as places with proved signs are read inside it. Made once for a function, and used again and again. */
 export class Bracket {
+  readonly reader: Reader;
   low: Place;
   high: Place;
   /** The place read last, unless its sign moved an end there. */
   trial: Place;
-  readonly below: Sign;
-  readonly #reader: Reader;
-  readonly #ends: readonly [Place, Place];
+  /** Places of its own; the ends that it starts from belong to others. */
+  readonly #own: readonly [Place, Place, Place];
+  #used = 0;
 
-  constructor(reader: Reader, low: Place, high: Place) {
-    this.#reader = reader;
-    this.#ends = [low, high];
-    this.low = low;
-    this.high = high;
-    this.below = low.sign;
-    this.trial = reader.take();
+  constructor(reader: Reader) {
+    this.reader = reader;
+    this.#own = [reader.take(), reader.take(), reader.take()];
+    [this.low, this.high, this.trial] = this.#own;
   }
 
-  holds(x: number): boolean {
-    return x > this.low.x && x < this.high.x;
+  start(low: Place, high: Place): void {
+    this.low = low;
+    this.high = high;
+    this.#used = 0;
+    this.trial = this.#own[0];
   }
 
   middle(): number {
     return this.low.x + (this.high.x - this.low.x) / 2;
   }
 
-  /** Reads at x, inside; where the sign is proved, the end with that sign moves to x. Returns the sign. */
-  read(x: number): Sign {
-    const place = this.#reader.read(x, this.trial);
-    if (place.sign === 0) return 0;
-    const below = place.sign === this.below;
+  holds(x: number): boolean {
+    return x > this.low.x && x < this.high.x;
+  }
+
+  /** Reads at `trial.x`, inside; where the sign is proved, the end with that sign moves there. Returns the place read. */
+  readTrial(): Place {
+    const place = this.reader.readAt(this.trial);
+    if (place.sign === 0) return place;
+    const below = place.sign === this.low.sign;
     const replaced = below ? this.low : this.high;
     if (below) this.low = place;
     else this.high = place;
-    this.trial = this.#ends.includes(replaced) ? this.#reader.take() : replaced;
-    return place.sign;
-  }
-
-  close(): void {
-    for (const place of [this.trial, this.low, this.high])
-      if (!this.#ends.includes(place)) this.#reader.give(place);
+    const mine = replaced === this.#own[0] || replaced === this.#own[1] || replaced === this.#own[2];
+    this.trial = mine ? replaced : (this.#own[++this.#used] as Place);
+    return place;
   }
 }

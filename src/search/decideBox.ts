@@ -1,11 +1,14 @@
 // Decides a box, if what was read over it allows.
 import { leastBetween } from "./endpointForm.ts";
 import { judgeValley } from "./judgeValley.ts";
-import type { Place } from "./reader.ts";
-import { addZero, type Search } from "./search.ts";
+import type { Piece, Place } from "./reader.ts";
+import type { Search } from "./search.ts";
+
+/** In boxes wider than this many times `fine`, the curvature decides too little to be read. */
+const BENT = 4;
 
 /**
- * Tries, over the box between two places that `reader.piece` was read over: the sign of the value; monotony with proved
+ * Tries, over the box between two places that the reader's piece was read over: the sign of the value; monotony with proved
  * signs at both ends; the end-point form; the sign of the curvature. True when the zeros of the box are known (and added).
  */
 export function decideBox(search: Search, left: Place, right: Place): boolean {
@@ -14,20 +17,23 @@ export function decideBox(search: Search, left: Place, right: Place): boolean {
   const s = left.sign;
   if (s === 0 || right.sign === 0 || !piece.continuous) return false;
   if (piece.slopeSign !== 0) {
-    addZero(search, left, right, piece.slopeSign);
+    search.addZero(left, right);
     return true;
   }
-  if (s !== right.sign) {
-    // strictly convex or concave: exactly one zero
-    if (piece.bend !== 0) addZero(search, left, right, 0);
-    return piece.bend !== 0;
-  }
-  const ends = s > 0 ? { left: left.low, right: right.low } : { left: -left.high, right: -right.high };
-  const slopes =
-    s > 0
-      ? { fall: piece.slopeLow, rise: piece.slopeHigh }
-      : { fall: -piece.slopeHigh, rise: -piece.slopeLow };
-  if (leastBetween(ends, slopes, right.x - left.x) > 0) return true;
-  if (piece.bend === s) judgeValley(search, left, right);
-  return piece.bend !== 0;
+  if (s === right.sign && isClear(piece, left, right)) return true;
+  if (right.x - left.x > BENT * search.fine) return false;
+  const { bend } = search.reader.bend();
+  // strictly convex or concave: one zero where the signs differ, and none where a hill lies between equal ones
+  if (s !== right.sign && bend !== 0) search.addZero(left, right);
+  else if (bend === s) judgeValley(search, left, right);
+  return bend !== 0;
+}
+
+/** Whether the ends, which have one sign, and the slope between keep the function away from zero. */
+function isClear({ slopeLow, slopeHigh }: Piece, left: Place, right: Place): boolean {
+  const width = right.x - left.x;
+  return left.sign > 0
+    ? leastBetween({ left: left.low, right: right.low }, { fall: slopeLow, rise: slopeHigh }, width) > 0
+    : leastBetween({ left: -left.high, right: -right.high }, { fall: -slopeHigh, rise: -slopeLow }, width) >
+        0;
 }

@@ -2,7 +2,7 @@
 
 import type { Place, Reader } from "./reader.ts";
 import { roundoffAt } from "./roundoff.ts";
-import { addZero, type Search } from "./search.ts";
+import type { Search } from "./search.ts";
 import { stretchOf } from "./stretch.ts";
 
 /**
@@ -19,10 +19,10 @@ export function doubtAround(search: Search, left: Place, bottom: Place, right: P
   const a = leaving(reader, { bottom, end: left, spare: low }, start);
   const b = a.sign === -s ? a : leaving(reader, { bottom, end: right, spare: high }, start);
   if (b.sign === -s) {
-    addZero(search, left, b, 0);
-    addZero(search, b, right, 0);
+    search.addZero(left, b);
+    search.addZero(b, right);
   } else {
-    const piece = reader.box(a.x, b.x);
+    const piece = reader.between(a, b);
     if (piece.sign === 0) search.doubts.push({ ...stretchOf("fold", a, b, piece), most: 2 });
   }
   reader.give(low);

@@ -8,7 +8,7 @@ const POINT = 0.01;
 /** The kind of an undecided box; `faint`: no sign could be proved at any place inside it. */
 export function doubtKind(
   { left, right, piece }: { left: Place; right: Place; piece: Piece },
-  { range: [from, to], fine }: { range: readonly [number, number]; fine: number },
+  { from, to, fine }: { from: number; to: number; fine: number },
   faint: boolean,
 ): DoubtKind {
   if (!piece.defined) return "undefined";

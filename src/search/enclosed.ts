@@ -13,6 +13,39 @@ export interface Enclosed {
   box(a: number, b: number, out: Float64Array): void;
   /** Writes value and slope at x: 6 numbers. Where boxes on both sides of x have curvatures, the slope is the one they share. */
   point(x: number, out: Float64Array): void;
+  /** The same readings for less, where boxes share their ends. */
+  readonly ends?: Ends;
+}
+
+/** Readings of a function over boxes whose ends are read first. */
+export interface Ends {
+  /** How many numbers an end takes: x, which the caller writes; value and slope at x; and what boxes need of their ends. */
+  readonly size: number;
+  point(end: Float64Array): void;
+  /** Writes value and slope over the box between two ends that were read: 6 numbers. */
+  box(left: Float64Array, right: Float64Array, out: Float64Array): void;
+  /** Writes the curvature, 3 numbers; only for the box that was read last. */
+  bend(left: Float64Array, right: Float64Array, out: Float64Array): void;
+}
+
+/** The ends of a function that is read box by box. */
+export function endsOf(f: Enclosed): Ends {
+  if (f.ends) return f.ends;
+  const [point, box] = [new Float64Array(6), new Float64Array(9)];
+  return {
+    size: 7,
+    point(end) {
+      f.point(end[0] as number, point);
+      end.set(point, 1);
+    },
+    box(left, right, out) {
+      f.box(left[0] as number, right[0] as number, box);
+      for (let i = 0; i < 6; i++) out[i] = box[i] as number;
+    },
+    bend(_left, _right, out) {
+      for (let i = 0; i < 3; i++) out[i] = box[6 + i] as number;
+    },
+  };
 }
 
 /** A proved sign; 0: not proved. */

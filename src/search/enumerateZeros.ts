@@ -3,11 +3,10 @@ import { fail } from "../ground/errors.ts";
 import { decideBox } from "./decideBox.ts";
 import { doubtKind } from "./doubtKind.ts";
 import type { Enclosed } from "./enclosed.ts";
-import type { Enumeration } from "./enumeration.ts";
-import { mergeDoubts } from "./mergeDoubts.ts";
-import { type Place, Reader } from "./reader.ts";
+import type { DoubtKind, Enumeration } from "./enumeration.ts";
+import type { Place } from "./reader.ts";
 import { roundoffAt } from "./roundoff.ts";
-import type { Search } from "./search.ts";
+import { Search } from "./search.ts";
 import { splitPlace } from "./splitPlace.ts";
 import { startPlaces } from "./startPlaces.ts";
 import { stretchOf } from "./stretch.ts";
@@ -18,12 +17,15 @@ export interface EnumerationOptions {
   readonly effort: number;
   /** Places of known kinks; where they are missing or wrong, the search takes longer. */
   readonly cuts?: readonly number[];
+  /** Places at which the function may turn; numbers outside of the range and NaN are left out. */
+  readonly guides?: ArrayLike<number>;
   /** A length over which the function changes little, in the unit of x; 8 unless said. */
   readonly fine?: number;
 }
 
 /** Boxes are halved down to this part of `fine`, or to a few units in the last place. */
 const FINEST = 1e-13;
+const NONE: readonly number[] = [];
 
 /**
  * Finds every zero in the range, from left to right. A box between two places is decided by the sign of the value over it;
@@ -36,46 +38,68 @@ const FINEST = 1e-13;
 export function enumerateZeros(
   f: Enclosed,
   range: readonly [number, number],
-  { effort, cuts = [], fine = 8 }: EnumerationOptions,
+  options: EnumerationOptions,
 ): Enumeration {
-  const [from, to] = range;
-  if (!(from < to && to - from < Number.POSITIVE_INFINITY))
-    fail("out-of-range", { path: "range", value: range, allowed: "two rising finite numbers" });
-  const reader = Reader.of(f);
-  const search: Search = { reader, range, fine, zeros: [], doubts: [] };
-  // places still to pass, from right to left: the box under work lies between the last two
-  const ahead = startPlaces(reader, range, { cuts, fine }).reverse();
-  while (ahead.length > 1) {
-    const left = ahead.at(-1) as Place;
-    const right = ahead.at(-2) as Place;
-    if (!(reader.boxes < effort)) {
-      const end = ahead[0] as Place;
-      search.doubts.push(stretchOf("effort", left, end, reader.box(left.x, end.x)));
-      break;
-    }
-    const piece = reader.box(left.x, right.x);
-    if (!decideBox(search, left, right)) {
-      const coarse = right.x - left.x > finest(left.x, right.x, fine);
-      const place = coarse ? splitPlace(reader, left, right, fine) : undefined;
-      if (place) {
-        ahead[ahead.length - 1] = place;
-        ahead.push(left);
-        continue;
-      }
-      search.doubts.push(stretchOf(doubtKind({ left, right, piece }, search, coarse), left, right, piece));
-    }
-    ahead.pop();
-    reader.give(left);
-  }
-  for (const place of ahead) reader.give(place);
+  const search = searchZeros(f, range, options);
+  const { reader, found } = search;
   return {
-    zeros: search.zeros,
-    undecided: mergeDoubts(search.doubts),
+    zeros: search.zeros.slice(0, found).map((zero) => zero.proved),
+    undecided: search.undecided,
     boxes: reader.boxes,
     points: reader.points,
   };
 }
 
-function finest(a: number, b: number, fine: number): number {
-  return Math.max(fine * FINEST, 16 * roundoffAt(a), 16 * roundoffAt(b));
+/** The same; what is found stays in the search, until the function is searched again. Allocates nothing unless in doubt. */
+export function searchZeros(
+  f: Enclosed,
+  range: readonly [number, number],
+  { effort, cuts = NONE, guides = NONE, fine = 8 }: EnumerationOptions,
+): Search {
+  const from = range[0];
+  const to = range[1];
+  if (!(from < to && to - from < Number.POSITIVE_INFINITY))
+    fail("out-of-range", { path: "range", value: range, allowed: "two rising finite numbers" });
+  const search = Search.of(f);
+  const { reader, ahead } = search;
+  search.start(from, to, fine);
+  startPlaces(search, cuts, guides);
+  // the box under work lies between the last two places
+  while (ahead.length > 1) {
+    const left = ahead[ahead.length - 1] as Place;
+    const right = ahead[ahead.length - 2] as Place;
+    if (!(reader.boxes < effort)) {
+      const end = ahead[0] as Place;
+      reader.between(left, end);
+      doubt(search, "effort", left, end);
+      break;
+    }
+    reader.between(left, right);
+    if (!decideBox(search, left, right)) {
+      const coarse = isCoarse(left, right, search);
+      const place = coarse ? splitPlace(search, left, right) : undefined;
+      if (place) {
+        ahead[ahead.length - 1] = place;
+        ahead.push(left);
+        continue;
+      }
+      const kind = doubtKind({ left, right, piece: reader.bend() }, search, coarse);
+      doubt(search, kind, left, right);
+    }
+    ahead.pop();
+    reader.give(left);
+  }
+  while (ahead.length > 0) reader.give(ahead.pop() as Place);
+  return search;
+}
+
+/** Adds the stretch between two places, over which the last piece was read. */
+function doubt({ reader, doubts }: Search, kind: DoubtKind, left: Place, right: Place): void {
+  doubts.push(stretchOf(kind, left, right, reader.bend()));
+}
+
+/** Whether a box is wide enough to be split. */
+function isCoarse(left: Place, right: Place, { fine }: Search): boolean {
+  const width = right.x - left.x;
+  return width > fine * FINEST && width > 16 * roundoffAt(left.x) && width > 16 * roundoffAt(right.x);
 }

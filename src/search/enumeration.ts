@@ -10,6 +10,11 @@ export interface ProvedZero {
   readonly slopeSign: Sign;
   /** 1: the function rises through zero; −1: it falls. Proved. */
   readonly direction: 1 | -1;
+  /** A bound of the function's size at `at`. */
+  readonly size: number;
+  /** The slope at `at`, not proved, and bounds of the slope over the bracket. */
+  readonly slope: number;
+  readonly slopes: readonly [number, number];
 }
 
 /**

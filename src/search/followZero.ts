@@ -1,9 +1,11 @@
 // Follows a zero of a function while the function changes, with proof.
+import { Bracket } from "./bracket.ts";
 import type { Sign } from "./enclosed.ts";
 import type { Followed, Moving, Start, Underway } from "./moving.ts";
 import { Reader } from "./reader.ts";
 import { refineProved } from "./refineProved.ts";
 import { findTurning, proveTurning, type TurningPlace } from "./turning.ts";
+import { Zero } from "./zero.ts";
 
 /** Steps of the path below this are not tried; two zeros closer to meeting than this are not told apart. */
 const FINEST_STEP = 1e-14;
@@ -121,5 +123,8 @@ function refined(f: Moving, reader: Reader, at: Underway) {
   f.between(1, 1);
   const left = reader.read(at.low, reader.take());
   const right = reader.read(at.high, reader.take());
-  return refineProved(reader, left, right, at.slope);
+  reader.between(left, right);
+  const zero = new Zero();
+  refineProved(new Bracket(reader), left, right, zero);
+  return zero.proved;
 }

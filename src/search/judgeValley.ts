@@ -2,7 +2,7 @@
 import { doubtAround } from "./doubtAround.ts";
 import { leastBetween } from "./endpointForm.ts";
 import type { Place, Reader } from "./reader.ts";
-import { addZero, type Search } from "./search.ts";
+import type { Search } from "./search.ts";
 
 const MOST_STEPS = 60;
 
@@ -15,8 +15,8 @@ export function judgeValley(search: Search, left: Place, right: Place): void {
   const taken: Place[] = [];
   const bottom = bottomBetween(reader, left, right, taken);
   if (bottom && bottom.sign === -left.sign) {
-    addZero(search, left, bottom, 0);
-    addZero(search, bottom, right, 0);
+    search.addZero(left, bottom);
+    search.addZero(bottom, right);
   } else if (bottom) doubtAround(search, left, bottom, right);
   for (const place of taken) reader.give(place);
 }

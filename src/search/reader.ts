@@ -1,33 +1,60 @@
 // Reads enclosures into places and pieces, and counts the readings.
-import { above, below, bounded, type Enclosed, type Sign, signOf } from "./enclosed.ts";
+import { above, below, bounded, type Enclosed, type Ends, endsOf, type Sign } from "./enclosed.ts";
 
-/** A number at which the function has been read. Reused: the search allocates none in its loop. */
-export class Place {
-  x = Number.NaN;
-  low = Number.NaN;
-  high = Number.NaN;
-  slopeLow = Number.NaN;
-  slopeHigh = Number.NaN;
+// Numbers go from array to array: passed to a function or returned, each would be an object to collect.
+
+/** Bounds of a value and a slope, rounded outwards. */
+class Bounds {
+  readonly bounds = new Float64Array(4).fill(Number.NaN);
   sign: Sign = 0;
   slopeSign: Sign = 0;
+
+  get low(): number {
+    return this.bounds[0] as number;
+  }
+  get high(): number {
+    return this.bounds[1] as number;
+  }
+  get slopeLow(): number {
+    return this.bounds[2] as number;
+  }
+  get slopeHigh(): number {
+    return this.bounds[3] as number;
+  }
+}
+
+/** A number at which the function has been read. Reused: the search allocates none in its loop. */
+export class Place extends Bounds {
+  /** The reading itself, x first. */
+  readonly end: Float64Array;
+
+  constructor(size = 7) {
+    super();
+    this.end = new Float64Array(size);
+  }
+
+  get x(): number {
+    return this.end[0] as number;
+  }
+  /** Where it is to be read next. */
+  set x(x: number) {
+    this.end[0] = x;
+  }
 }
 
 /** What is known of the function over the box read last. */
-export class Piece {
-  low = Number.NaN;
-  high = Number.NaN;
-  slopeLow = Number.NaN;
-  slopeHigh = Number.NaN;
-  sign: Sign = 0;
-  slopeSign: Sign = 0;
+export class Piece extends Bounds {
+  /** The curvature. */
+  readonly bends = new Float64Array(2);
   /** Sign of the curvature. */
   bend: Sign = 0;
   defined = false;
   continuous = false;
+  /** True if the curvature is finite, as far as it has been read. */
   smooth = false;
 }
 
-const known = /* @__PURE__ */ new WeakMap<Enclosed, Reader>();
+const NONE = /* @__PURE__ */ new Float64Array(0);
 
 /** A function being searched. */
 export class Reader {
@@ -35,25 +62,22 @@ export class Reader {
   boxes = 0;
   points = 0;
   readonly #f: Enclosed;
+  readonly #ends: Ends;
   readonly #out = new Float64Array(9);
+  readonly #bend = this.#out.subarray(6);
   readonly #free: Place[] = [];
+  /** The ends of the box whose curvature is still to be read. */
+  #left: Float64Array = NONE;
+  #right: Float64Array = NONE;
 
   constructor(f: Enclosed) {
     this.#f = f;
-  }
-
-  /** The reader of a function, with its counts at 0: made once, so that searching a function again allocates no places. */
-  static of(f: Enclosed): Reader {
-    const reader = known.get(f) ?? new Reader(f);
-    known.set(f, reader);
-    reader.boxes = 0;
-    reader.points = 0;
-    return reader;
+    this.#ends = endsOf(f);
   }
 
   /** A place to be filled by `read`; to be given back. */
   take(): Place {
-    return this.#free.pop() ?? new Place();
+    return this.#free.pop() ?? new Place(this.#ends.size);
   }
 
   give(place: Place): void {
@@ -62,40 +86,78 @@ export class Reader {
 
   /** Reads value and slope at x. */
   read(x: number, into: Place): Place {
-    const out = this.#out;
-    this.points++;
-    this.#f.point(x, out);
-    const [lo, hi, err] = [out[0] as number, out[1] as number, out[2] as number];
-    const [slopeLo, slopeHi, slopeErr] = [out[3] as number, out[4] as number, out[5] as number];
     into.x = x;
-    into.low = below(lo - err);
-    into.high = above(hi + err);
-    into.slopeLow = below(slopeLo - slopeErr);
-    into.slopeHigh = above(slopeHi + slopeErr);
-    into.sign = signOf(lo, hi, err);
-    into.slopeSign = signOf(slopeLo, slopeHi, slopeErr);
-    return into;
+    return this.readAt(into);
   }
 
-  /** Reads a box into `piece`. */
+  /** Reads value and slope where the place is. */
+  readAt(place: Place): Place {
+    const { end, bounds } = place;
+    this.points++;
+    this.#ends.point(end);
+    place.sign = widen(end, 1, bounds, 0);
+    place.slopeSign = widen(end, 4, bounds, 2);
+    return place;
+  }
+
+  /** Reads value, slope and curvature over a box. */
   box(a: number, b: number): Piece {
-    const { piece } = this;
-    const out = this.#out;
-    this.boxes++;
-    this.#f.box(a, b, out);
-    const [lo, hi, err] = [out[0] as number, out[1] as number, out[2] as number];
-    const [slopeLo, slopeHi, slopeErr] = [out[3] as number, out[4] as number, out[5] as number];
-    const [bendLo, bendHi, bendErr] = [out[6] as number, out[7] as number, out[8] as number];
-    piece.low = below(lo - err);
-    piece.high = above(hi + err);
-    piece.slopeLow = below(slopeLo - slopeErr);
-    piece.slopeHigh = above(slopeHi + slopeErr);
-    piece.sign = signOf(lo, hi, err);
-    piece.defined = bounded(piece.low, piece.high);
-    piece.continuous = piece.defined && bounded(piece.slopeLow, piece.slopeHigh);
-    piece.smooth = piece.continuous && bounded(bendLo - bendErr, bendHi + bendErr);
-    piece.slopeSign = piece.continuous ? signOf(slopeLo, slopeHi, slopeErr) : 0;
-    piece.bend = piece.smooth ? signOf(bendLo, bendHi, bendErr) : 0;
+    this.#f.box(a, b, this.#out);
+    this.#fill(this.piece);
+    this.#fillBend();
+    return this.piece;
+  }
+
+  /** Reads value and slope over the box between two places, into a piece of its own if one is given. */
+  between(left: Place, right: Place, piece = this.piece): Piece {
+    this.#ends.box(left.end, right.end, this.#out);
+    this.#fill(piece);
+    if (piece === this.piece) {
+      this.#left = left.end;
+      this.#right = right.end;
+    }
     return piece;
   }
+
+  /** Reads also the curvature over the box read last; its places must still be as they were. */
+  bend(): Piece {
+    if (this.#left.length > 0) {
+      this.#ends.bend(this.#left, this.#right, this.#bend);
+      this.#fillBend();
+    }
+    return this.piece;
+  }
+
+  #fill(piece: Piece): void {
+    const { bounds } = piece;
+    this.boxes++;
+    piece.sign = widen(this.#out, 0, bounds, 0);
+    const slopeSign = widen(this.#out, 3, bounds, 2);
+    piece.defined = bounded(bounds[0] as number, bounds[1] as number);
+    piece.continuous = piece.defined && bounded(bounds[2] as number, bounds[3] as number);
+    piece.slopeSign = piece.continuous ? slopeSign : 0;
+    piece.smooth = false;
+    piece.bend = 0;
+  }
+
+  #fillBend(): void {
+    const { piece } = this;
+    const { bends } = piece;
+    const bend = widen(this.#bend, 0, bends, 0);
+    piece.smooth = piece.continuous && bounded(bends[0] as number, bends[1] as number);
+    piece.bend = piece.smooth ? bend : 0;
+    this.#left = NONE;
+  }
+}
+
+/** Writes bounds of [lo − err, hi + err], three numbers from place i on, to places j and j + 1; returns their sign. */
+function widen(from: Float64Array, i: number, to: Float64Array, j: number): Sign {
+  const err = from[i + 2] as number;
+  const low = (from[i] as number) - err;
+  const high = (from[i + 1] as number) + err;
+  to[j] = below(low);
+  to[j + 1] = above(high);
+  // a difference of doubles has the sign of the exact difference, so the signs need no rounding
+  if (!bounded(low, high)) return 0;
+  return low > 0 ? 1 : high < 0 ? -1 : 0;
 }

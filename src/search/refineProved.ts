@@ -1,80 +1,82 @@
 // Closes a bracket around the only zero of a stretch.
-import { Bracket } from "./bracket.ts";
-import type { Sign } from "./enclosed.ts";
-import type { ProvedZero } from "./enumeration.ts";
-import type { Place, Reader } from "./reader.ts";
+import { approach } from "./approach.ts";
+import type { Bracket } from "./bracket.ts";
+import { above, below } from "./enclosed.ts";
+import { Piece, type Place } from "./reader.ts";
 import { roundoffAt } from "./roundoff.ts";
+import type { Zero } from "./zero.ts";
 
-const MOST_STEPS = 120;
 const MOST_WIDENINGS = 60;
+/** Takes away more than the rounding of a few products. */
+const SURELY = 1 - 1e-15;
 
 /**
- * The zero between two places with proved, opposite signs, known to be the only one there. Newton's method inside the
- * bracket finds it; then the signs are proved just below and just above. `slope`: the proved sign of the slope, if it is
- * known over the whole stretch; 0: the slope is monotone there, and its signs at both ends decide.
+ * Writes down the zero between two places with proved, opposite signs, known to be the only one there. The reader's piece
+ * must have been read over the stretch, or over more. The signs next to the zero follow from the mean value theorem, or
+ * else are read.
  */
-export function refineProved(reader: Reader, left: Place, right: Place, slope: Sign): ProvedZero {
-  const bracket = new Bracket(reader, left, right);
-  const { at, noise } = approach(bracket, firstGuess(left, right, slope));
-  prove(bracket, at, noise, -1);
-  prove(bracket, at, noise, 1);
-  const { low, high } = bracket;
-  const zero: ProvedZero = {
-    at: at >= low.x && at <= high.x ? at : bracket.middle(),
-    bracket: [low.x, high.x],
-    slopeSign: slope || (low.slopeSign === high.slopeSign ? low.slopeSign : 0),
-    direction: left.sign === 1 ? -1 : 1,
-  };
-  bracket.close();
-  return zero;
+export function refineProved(bracket: Bracket, left: Place, right: Place, zero: Zero): void {
+  bracket.start(left, right);
+  const place = approach(bracket);
+  const { reader } = bracket;
+  zero.at = place.x;
+  zero.direction = left.sign === 1 ? -1 : 1;
+  zero.size = Math.max(place.high, -place.low);
+  zero.slope = place.slopeLow + (place.slopeHigh - place.slopeLow) / 2;
+  if (!closeByMeanValue(reader.bend(), place, zero)) closeByReading(bracket, zero);
+  if (bracket.low.x > zero.low) zero.low = bracket.low.x;
+  if (bracket.high.x < zero.high) zero.high = bracket.high.x;
 }
 
 /**
- * Newton's step from the end where the function is smaller, if it stays inside; from the other; the middle. Where the
- * slope may vanish at an end, as at the bottom of a valley: the parabola that has its vertex there.
+ * Near the place, the slope is what it is there, but for what the curvature can change. How far the function moves at least
+ * tells from where on its sign is proved. False where that is not known.
  */
-function firstGuess(left: Place, right: Place, slope: Sign): number {
-  const [flat, steep] = Math.abs(left.slopeLow) < Math.abs(right.slopeLow) ? [left, right] : [right, left];
-  if (slope === 0) {
-    const guess = flat.x + (steep.x - flat.x) * Math.sqrt(flat.low / (flat.low - steep.low));
-    if (guess > left.x && guess < right.x) return guess;
-  }
-  const near = Math.abs(left.low) < Math.abs(right.low) ? left : right;
-  for (const p of [near, near === left ? right : left]) {
-    const guess = p.x - (p.low + p.high) / (p.slopeLow + p.slopeHigh);
-    if (guess > left.x && guess < right.x) return guess;
-  }
-  return left.x + (right.x - left.x) / 2;
+function closeByMeanValue({ smooth, bends }: Piece, place: Place, zero: Zero): boolean {
+  if (!smooth) return false;
+  const rising = zero.direction > 0;
+  const steep = rising ? place.slopeLow : -place.slopeHigh;
+  const reach = (2 * zero.size) / steep + 8 * roundoffAt(zero.at);
+  const curvature = Math.max(-(bends[0] as number), bends[1] as number);
+  const change = above(curvature * reach);
+  zero.slopeLow = below(place.slopeLow - change);
+  zero.slopeHigh = above(place.slopeHigh + change);
+  const least = rising ? zero.slopeLow : -zero.slopeHigh;
+  if (!(steep > 0 && least > 0)) return false;
+  zero.low = awayFrom(zero.at, -reach, (rising ? place.high : -place.low) / (least * SURELY));
+  zero.high = awayFrom(zero.at, reach, (rising ? -place.low : place.high) / (least * SURELY));
+  return zero.low <= zero.at && zero.at <= zero.high;
 }
 
-/** Newton's method, with bisection where a step leaves the bracket or does not halve the one before. */
-function approach(bracket: Bracket, guess: number): { at: number; noise: number } {
-  let x = guess;
-  let at = guess;
-  let noise = 0;
-  let step = bracket.high.x - bracket.low.x;
-  for (let i = 0; i < MOST_STEPS; i++) {
-    const place = bracket.trial;
-    const sign = bracket.read(x);
-    const slope = (place.slopeLow + place.slopeHigh) / 2;
-    const newton = x - (place.low + place.high) / 2 / slope;
-    noise = (place.high - place.low) / 2 / Math.abs(slope);
-    at = bracket.holds(newton) ? newton : x;
-    if (sign === 0) break;
-    const next = at === newton && Math.abs(newton - x) <= step / 2 ? newton : bracket.middle();
-    if (!bracket.holds(next)) break;
-    step = Math.abs(next - x);
-    x = next;
+/** The next number at least `gap` away from x, but nearer than `reach`, on its side; NaN if there is none. */
+function awayFrom(x: number, reach: number, gap: number): number {
+  if (gap < 0) return x;
+  const side = reach > 0 ? 1 : -1;
+  let wider = gap + roundoffAt(x);
+  for (let i = 0; i < 4; i++, wider *= 1.25) {
+    const end = x + side * wider;
+    const apart = Math.abs(end - x);
+    if (apart * SURELY > gap && apart < Math.abs(reach) * SURELY) return end;
   }
-  return { at, noise };
+  return Number.NaN;
 }
 
-/**
- * Moves one end close to the zero: as far from it as noise reaches, then three times as far until the sign is proved. Once
- * it is, what lies further out is no longer inside the bracket.
- */
-function prove(bracket: Bracket, at: number, noise: number, side: 1 | -1): void {
-  let gap = roundoffAt(at) + (noise < bracket.high.x - bracket.low.x ? 1.25 * noise : 0);
-  for (let i = 0; i < MOST_WIDENINGS && bracket.holds(at + side * gap); i++, gap *= 3)
-    bracket.read(at + side * gap);
+const around = /* @__PURE__ */ new Piece();
+
+/** Reads the signs on both sides, and the slope between. */
+function closeByReading(bracket: Bracket, zero: Zero): void {
+  const noise = zero.size / Math.abs(zero.slope);
+  const start = roundoffAt(zero.at) + (noise < bracket.high.x - bracket.low.x ? 1.25 * noise : 0);
+  for (let side = -1; side <= 1; side += 2) {
+    let gap = start;
+    for (let i = 0; i < MOST_WIDENINGS && bracket.holds(zero.at + side * gap); i++, gap *= 3) {
+      bracket.trial.x = zero.at + side * gap;
+      bracket.readTrial();
+    }
+  }
+  zero.low = bracket.low.x;
+  zero.high = bracket.high.x;
+  bracket.reader.between(bracket.low, bracket.high, around);
+  zero.slopeLow = around.slopeLow;
+  zero.slopeHigh = around.slopeHigh;
 }

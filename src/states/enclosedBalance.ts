@@ -2,57 +2,85 @@
 import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
 import { inputsOf, rangesOf } from "../loop/inputs.ts";
+import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
-import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKernel.ts";
+import { type SpanKernel, spanKernel } from "../reading/spanKernel.ts";
 import type { Enclosed } from "../search/enclosed.ts";
+import { shouldersOf } from "./shoulders.ts";
 
 /** A balance that can be enclosed over boxes of temperature, for givens that can be set. */
 export interface EnclosedBalance {
   readonly net: Enclosed;
   /** For every min(a, b) and max(a, b) behind the balance: a − b, which is zero at the kink. */
   readonly kinks: readonly Enclosed[];
+  /** For searches of the balance, which write down here where it is to be cut; the guides change with the givens. */
+  readonly limits: { effort: number; readonly cuts: number[]; readonly guides: Float64Array };
   /** Sets the values of the givens, in order; `high` differs from `low` where they are intervals. */
   set(low: ArrayLike<number>, high: ArrayLike<number>): void;
 }
+
+/** The balance of a loop, made once; whoever reads it sets the givens first. */
+export const balanceOf: (loop: Loop) => EnclosedBalance = /* @__PURE__ */ kept((loop) =>
+  enclosedBalance(loop),
+);
 
 /** Prepares the enclosures of a loop's balance; `wide` are the nodes of the givens that may be intervals. */
 export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set()): EnclosedBalance {
   const { graph, net } = loop;
   const inputs = inputsOf(loop);
-  const temperature = inputs[0] as number;
   const ranges = rangesOf(loop);
-  const slope = (node: number) => derivative(graph, node, temperature, inputs);
-  const steady = new Set(inputs.slice(1));
-  const kernels: EnclosureKernel[] = [];
-  const low = new Float64Array(inputs.length);
-  const high = new Float64Array(inputs.length);
+  const slope = (node: number) => derivative(graph, node, inputs[0] as number, inputs);
+  const kernels: SpanKernel[] = [];
   const enclosed = (node: number): Enclosed => {
     const first = slope(node);
-    const over = (outputs: number[], intervals: Iterable<number>): EnclosureKernel => {
-      const kernel = enclosureKernel(graph, { inputs, outputs, wide: new Set(intervals), steady, ranges });
-      kernels.push(kernel);
-      return kernel;
-    };
-    const box = over([node, first, slope(first)], [temperature, ...wide]);
-    const point = over([node, first], wide);
-    const read = (kernel: EnclosureKernel, a: number, b: number, out: Float64Array) => {
-      low[0] = a;
-      high[0] = b;
-      kernel(low, high, out);
-    };
-    return { box: (a, b, out) => read(box, a, b, out), point: (x, out) => read(point, x, x, out) };
+    const outputs = [node, first];
+    const over = [outputs, [slope(first)]];
+    const kernel = spanKernel(graph, { inputs, atEnds: outputs, over, wide, ranges });
+    kernels.push(kernel);
+    return enclosedBy(kernel);
   };
   const pairs = coneOf(graph, [net], inputs).filter(
     (id) => graph.ops[id] === "min" || graph.ops[id] === "max",
   );
   const differences = new Set(pairs.map((id) => graph.node("sub", graph.args[id] as readonly number[])));
+  const shoulders = shouldersOf(loop);
+  const low = new Float64Array(inputs.length);
+  const high = new Float64Array(inputs.length);
   return {
     net: enclosed(net),
     kinks: [...differences].map(enclosed),
+    limits: { effort: 0, cuts: [], guides: shoulders.places },
     set(lows, highs) {
-      low.set(lows, 1);
-      high.set(highs, 1);
-      for (const kernel of kernels) kernel.prepare(low, high);
+      for (let i = 1; i < low.length; i++) {
+        low[i] = lows[i - 1] as number;
+        high[i] = highs[i - 1] as number;
+      }
+      for (let i = 0; i < kernels.length; i++) kernels[i]?.prepare(low, high);
+      shoulders.set(lows);
+    },
+  };
+}
+
+/** What a kernel reads, by its ends or at once. */
+function enclosedBy({ size, point, over }: SpanKernel): Enclosed {
+  const [box, bend] = over as [SpanKernel["over"][0], SpanKernel["over"][0]];
+  const [left, right] = [new Float64Array(size), new Float64Array(size)];
+  const curvature = new Float64Array(3);
+  return {
+    ends: { size, point, box, bend },
+    point(x, out) {
+      left[0] = x;
+      point(left);
+      out.set(left.subarray(1, 7));
+    },
+    box(a, b, out) {
+      left[0] = a;
+      right[0] = b;
+      point(left);
+      point(right);
+      box(left, right, out);
+      bend(left, right, curvature);
+      out.set(curvature, 6);
     },
   };
 }

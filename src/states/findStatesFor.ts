@@ -3,7 +3,8 @@ import { type ErrorCode, fail, ThermosteadError } from "../ground/errors.ts";
 import { checkKeys, failUnknown } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
 import type { GivenRecord, Givens, Loop } from "../loop/types.ts";
-import { checkOneVariable, searchOf } from "./prepared.ts";
+import { checkOneVariable } from "./prepared.ts";
+import { provedRows, type RowResult, sampledRows } from "./rowSearch.ts";
 import { StateCollector, type StateColumns } from "./stateColumns.ts";
 
 /** Columns of givens, each with one value a planet; givens without a column keep the value of the loop. */
@@ -38,27 +39,33 @@ export function findStatesFor<N extends string>(
   const proving = (options.proof ?? true) && !loop.sampled;
   const effort = checkedNumber(options.effort ?? (proving ? 500 : 20_000), "effort", "1", [10, 1e9]);
   const table = checkedColumns(loop, columns);
-  const search = searchOf(loop, proving);
+  const search = (proving ? provedRows : sampledRows)(loop, within, effort);
   const collector = new StateCollector(table.rows);
-  const values = loop.givens.map((g) => g.value);
+  const values = Float64Array.from(loop.givens, (g) => g.value);
   for (let row = 0; row < table.rows; row++) {
     const wrong = fillRow(values, table.columns, row);
     if (wrong) {
-      collector.add(row, "refused", []);
-      collector.explain({ row, ...wrong });
+      collector.add(row, "refused", [], 0);
+      collector.explain({ row, ...refusalOf(wrong.given, wrong.values[row]) });
       continue;
     }
-    const { located, undecided } = search(values, within, effort);
-    collector.add(row, proving ? (undecided.length === 0 ? "proved" : "partial") : "sampled", located);
-    for (const { kind, interval } of undecided) {
-      collector.explain({
-        row,
-        code: "undecided",
-        text: `${kind} between ${interval[0]} and ${interval[1]} K`,
-      });
-    }
+    const result = search(values);
+    collector.add(
+      row,
+      proving ? (result.decided ? "proved" : "partial") : "sampled",
+      result.zeros,
+      result.found,
+    );
+    if (!result.decided) explainDoubts(collector, row, result);
   }
   return collector.columns();
+}
+
+function explainDoubts(collector: StateCollector, row: number, { undecided }: RowResult): void {
+  for (const { kind, interval } of undecided) {
+    const text = `${kind} between ${interval[0]} and ${interval[1]} K`;
+    collector.explain({ row, code: "undecided", text });
+  }
 }
 
 /** A column and the given that it belongs to. */
@@ -66,6 +73,8 @@ interface Column {
   readonly given: GivenRecord;
   readonly index: number;
   readonly values: ArrayLike<number>;
+  readonly low: number;
+  readonly high: number;
 }
 
 function checkedColumns(
@@ -79,7 +88,9 @@ function checkedColumns(
     if (index < 0) failUnknown(path, name, known);
     const isList = Array.isArray(values) || (ArrayBuffer.isView(values) && "length" in values);
     if (!isList) fail("unreadable", { path, value: values, allowed: "a typed array or a list of numbers" });
-    return { given: loop.givens[index] as GivenRecord, index, values: values as ArrayLike<number> };
+    const given = loop.givens[index] as GivenRecord;
+    const [low, high] = given.within ?? [-Number.MAX_VALUE, Number.MAX_VALUE];
+    return { given, index, values: values as ArrayLike<number>, low, high };
   });
   const rows = list[0]?.values.length;
   if (rows === undefined)
@@ -100,17 +111,13 @@ function checkedColumns(
   return { rows, columns: list };
 }
 
-/** Writes a row's values; returns what is wrong with the first that is not allowed. */
-function fillRow(
-  values: number[],
-  columns: readonly Column[],
-  row: number,
-): { code: ErrorCode; text: string } | undefined {
-  for (const { given, index, values: column } of columns) {
-    const value = column[row] as number;
-    const [low, high] = given.within ?? [-Number.MAX_VALUE, Number.MAX_VALUE];
-    if (value >= low && value <= high) values[index] = value;
-    else return refusalOf(given, value);
+/** Writes a row's values; returns the first column whose value is not allowed. */
+function fillRow(values: Float64Array, columns: readonly Column[], row: number): Column | undefined {
+  for (let i = 0; i < columns.length; i++) {
+    const column = columns[i] as Column;
+    const value = column.values[row] as number;
+    if (value >= column.low && value <= column.high) values[column.index] = value;
+    else return column;
   }
   return undefined;
 }

@@ -2,13 +2,14 @@
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
+import type { ProvedZero } from "../search/enumeration.ts";
 import { followZero } from "../search/followZero.ts";
 import type { Moving, Start, Turning } from "../search/moving.ts";
 import { Reader } from "../search/reader.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { scanZeros } from "../search/scanZeros.ts";
 import type { Located } from "./located.ts";
-import { locate } from "./provedSearch.ts";
+import { located as stateOf } from "./provedSearch.ts";
 
 /** Where a branch ends. The stage runs from 0, the old givens, to 1, the new ones. */
 export interface LostAt {
@@ -82,12 +83,10 @@ function lost(f: Moving, turning: Turning, within: Range): Omit<LostAt, "outcome
 }
 
 /** A zero as a state; its bounds mean nothing if it was sampled. */
-function located(f: Moving, zero: Parameters<typeof locate>[1]): Located {
-  const found = locate({ net: f }, zero);
-  return f.sampled ? { ...found, slope: null } : found;
-}
+const located = (f: Moving, zero: ProvedZero): Located =>
+  f.sampled ? { ...stateOf(zero), slope: null } : stateOf(zero);
 
-type Next = Parameters<typeof locate>[1] | "outside" | "undecided";
+type Next = ProvedZero | "outside" | "undecided";
 
 /** The first zero in the direction of the drift: upwards where the balance is positive. */
 function provedNext(f: Moving, ahead: Range, sign: Sign): Next {
@@ -108,6 +107,9 @@ function sampledNext(f: Moving, ahead: Range, sign: Sign): Next {
   const { crossings } = scanZeros({ at }, ahead, NEXT_SAMPLES);
   const first = sign > 0 ? crossings[0] : crossings.at(-1);
   if (!first) return "outside";
+  const { at: x, bracket } = first;
   const direction = first.falling ? -1 : 1;
-  return { at: first.at, bracket: first.bracket, slopeSign: direction, direction };
+  f.point(x, read);
+  const [size, slope] = [Math.abs(read[0] as number), read[3] as number];
+  return { at: x, bracket, slopeSign: direction, direction, size, slope, slopes: [slope, slope] };
 }

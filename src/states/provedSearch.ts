@@ -1,26 +1,28 @@
 // The proved search: every equilibrium in a range of temperature, each enclosed, and proof that there is no other.
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
-import { above, below } from "../search/enclosed.ts";
-import { enumerateZeros } from "../search/enumerateZeros.ts";
+import type { Enclosed } from "../search/enclosed.ts";
+import { type EnumerationOptions, enumerateZeros, searchZeros } from "../search/enumerateZeros.ts";
 import type { Enumeration, ProvedZero } from "../search/enumeration.ts";
-import { type EnclosedBalance, enclosedBalance } from "./enclosedBalance.ts";
+import type { Search } from "../search/search.ts";
+import type { Zero } from "../search/zero.ts";
+import { balanceOf, type EnclosedBalance } from "./enclosedBalance.ts";
 import { foldDistances } from "./foldDistances.ts";
 import type { Located, StateSearch } from "./located.ts";
 import type { State } from "./state.ts";
 
-/** Boxes that finding the place of one kink may cost; a kink that is not found only makes the search longer. */
-const KINK_EFFORT = 60;
+/** What finding the place of one kink may cost; a kink that is not found only makes the search longer. */
+const KINK_LIMITS = { effort: 60 };
 
 /** Prepares the proved search of a loop. Its effort is a number of boxes. */
 export function provedSearch(loop: Loop): StateSearch {
-  const balance = enclosedBalance(loop);
+  const balance = balanceOf(loop);
   const distancesOf = foldDistances(loop);
   return (givens, within, effort) => {
     balance.set(givens, givens);
     const { zeros, undecided, boxes, points } = enumerateBalance(balance, within, effort);
     return {
-      located: zeros.map((zero) => locate(balance, zero)),
+      located: zeros.map(located),
       undecided: undecided.map(({ interval, kind, counts, enclosure }) => ({
         interval,
         kind,
@@ -33,37 +35,36 @@ export function provedSearch(loop: Loop): StateSearch {
   };
 }
 
-/** Enumerates the zeros of a balance whose givens are set; the range is cut at both ends of each kink's bracket first. */
-export function enumerateBalance(
-  { net, kinks }: EnclosedBalance,
-  within: Range,
-  effort: number,
-): Enumeration {
-  const cuts: number[] = [];
-  for (const kink of kinks) {
-    for (const { bracket } of enumerateZeros(kink, within, { effort: KINK_EFFORT }).zeros)
-      cuts.push(...bracket);
-  }
-  return enumerateZeros(net, within, { effort, cuts });
+/** Enumerates the zeros of a balance whose givens are set. */
+export function enumerateBalance(balance: EnclosedBalance, within: Range, effort: number): Enumeration {
+  return enumerateZeros(balance.net, within, cutsOf(balance, within, effort));
 }
 
-const values = /* @__PURE__ */ new Float64Array(9);
+/** The same; what is found stays in the search, until the balance is searched again. */
+export function searchBalance(balance: EnclosedBalance, within: Range, effort: number): Search {
+  return searchZeros(balance.net, within, cutsOf(balance, within, effort));
+}
+
+/** The range is cut at both ends of each kink's bracket and at shoulders. The same object for each search of a balance. */
+function cutsOf({ kinks, limits }: EnclosedBalance, within: Range, effort: number): EnumerationOptions {
+  const { cuts } = limits;
+  limits.effort = effort;
+  if (cuts.length > 0) cuts.length = 0;
+  for (let k = 0; k < kinks.length; k++) {
+    const { zeros, found } = searchZeros(kinks[k] as Enclosed, within, KINK_LIMITS);
+    for (let i = 0; i < found; i++) cuts.push((zeros[i] as Zero).low, (zeros[i] as Zero).high);
+  }
+  return limits;
+}
+
 const STABILITY: Readonly<Record<number, State["stability"]>> = {
   [-1]: "stable",
   0: "undecided",
   1: "unstable",
 };
 
-/** Bounds of N at the temperature and of λ over the bracket. */
-export function locate(
-  { net }: Pick<EnclosedBalance, "net">,
-  { at, bracket, slopeSign }: ProvedZero,
-): Located {
-  const value = (i: number) => values[i] as number;
-  net.point(at, values);
-  const imbalance = above(Math.max(value(2) - value(0), value(1) + value(2)));
-  const lambda = value(3) + (value(4) - value(3)) / 2;
-  net.box(bracket[0], bracket[1], values);
-  const slope: Range = [below(value(3) - value(5)), above(value(4) + value(5))];
-  return { at, bracket, stability: STABILITY[slopeSign] ?? "undecided", lambda, slope, imbalance };
-}
+/** A zero of the balance as a state: λ is its slope. */
+export const located = ({ at, bracket, slopeSign, size, slope, slopes }: ProvedZero): Located => ({
+  ...{ at, bracket, stability: STABILITY[slopeSign] as State["stability"] },
+  ...{ lambda: slope, slope: slopes, imbalance: size },
+});

@@ -1,6 +1,5 @@
 // The states of many planets as typed arrays.
 import type { ErrorCode } from "../ground/errors.ts";
-import type { Located } from "./located.ts";
 
 /** How sure the states of a row are, by the number in `status`. */
 export const ROW_STATUS = ["proved", "partial", "sampled", "refused"] as const;
@@ -31,7 +30,12 @@ export interface StateColumns {
 /** A reason for a row that is refused or not wholly decided. */
 type Reason = StateColumns["reasons"][number];
 
-const STABILITY = { stable: -1, undecided: 0, unstable: 1 } as const;
+/** What is written down of a state; the sign of λ is its stability. */
+export interface Found {
+  readonly at: number;
+  readonly slope: number;
+  readonly slopeSign: number;
+}
 
 /** Collects the states of rows; its arrays double when they are full, so that a row costs no allocation. */
 export class StateCollector {
@@ -53,16 +57,17 @@ export class StateCollector {
     this.#stability = new Int8Array(capacity);
   }
 
-  /** Adds a row; rows come in order. */
-  add(row: number, status: (typeof ROW_STATUS)[number], located: readonly Located[]): void {
-    while (this.#size + located.length > this.#temperatures.length) this.#grow();
+  /** Adds a row with the first `count` of the states found; rows come in order. */
+  add(row: number, status: (typeof ROW_STATUS)[number], found: readonly Found[], count: number): void {
+    while (this.#size + count > this.#temperatures.length) this.#grow();
     this.#first[row] = this.#size;
-    this.#counts[row] = located.length;
+    this.#counts[row] = count;
     this.#status[row] = ROW_STATUS.indexOf(status);
-    for (const { at, lambda, stability } of located) {
-      this.#temperatures[this.#size] = at;
-      this.#lambdas[this.#size] = lambda;
-      this.#stability[this.#size] = STABILITY[stability];
+    for (let i = 0; i < count; i++) {
+      const state = found[i] as Found;
+      this.#temperatures[this.#size] = state.at;
+      this.#lambdas[this.#size] = state.slope;
+      this.#stability[this.#size] = state.slopeSign;
       this.#size++;
     }
     this.#first[row + 1] = this.#size;

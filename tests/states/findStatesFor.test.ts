@@ -6,6 +6,16 @@ import { iceLoop } from "./iceLoop.ts";
 
 const loop = iceLoop();
 const within = [100, 500] as const;
+/** Five states around its middle. */
+const wavy = core.closeLoop(({ temperature, given }) => {
+  const x = core.div(core.sub(temperature, given("middle", 300, "K")), 10);
+  const factors = [-4, -2, 0, 2, 4].map((root) => core.sub(x, root));
+  return {
+    heating: { imagined: core.inUnit(core.product(...factors), "W m-2") },
+    cooling: {},
+    heatCapacity: 1,
+  };
+});
 const flux = Float64Array.from({ length: 200 }, (_, i) => 900 + 5 * i);
 
 describe("findStatesFor", () => {
@@ -51,7 +61,7 @@ describe("findStatesFor", () => {
   });
 
   test("says of a row what is undecided in it", () => {
-    const found = core.findStatesFor(loop, { flux: [1361] }, { within, effort: 10 });
+    const found = core.findStatesFor(wavy, { middle: [300] }, { within, effort: 10 });
     expect(core.ROW_STATUS[found.status[0] as number]).toBe("partial");
     expect(found.reasons).toMatchObject([{ row: 0, code: "undecided" }]);
   });
@@ -66,15 +76,6 @@ describe("findStatesFor", () => {
   });
 
   test("takes more states than three a row", () => {
-    const wavy = core.closeLoop(({ temperature, given }) => {
-      const x = core.div(core.sub(temperature, given("middle", 300, "K")), 10);
-      const factors = [-4, -2, 0, 2, 4].map((root) => core.sub(x, root));
-      return {
-        heating: { imagined: core.inUnit(core.product(...factors), "W m-2") },
-        cooling: {},
-        heatCapacity: 1,
-      };
-    });
     const middle = Float64Array.from({ length: 50 }, (_, i) => 290 + i / 3);
     const found = core.findStatesFor(wavy, { middle }, { within });
     expect([...found.counts]).toEqual(Array(50).fill(5));

@@ -1,0 +1,27 @@
+// A zero as the search writes it down.
+import type { Sign } from "./enclosed.ts";
+import type { ProvedZero } from "./enumeration.ts";
+
+/** A zero that is being closed in, or was; reused by later searches. */
+export class Zero {
+  at = Number.NaN;
+  low = Number.NaN;
+  high = Number.NaN;
+  size = Number.NaN;
+  slope = Number.NaN;
+  slopeLow = Number.NaN;
+  slopeHigh = Number.NaN;
+  direction: 1 | -1 = 1;
+
+  /** The proved sign of the slope over the bracket. */
+  get slopeSign(): Sign {
+    return this.slopeLow > 0 ? 1 : this.slopeHigh < 0 ? -1 : 0;
+  }
+
+  /** The same for good. */
+  get proved(): ProvedZero {
+    const { at, slopeSign, direction, size, slope } = this;
+    const bracket = [this.low, this.high] as const;
+    return { at, bracket, slopeSign, direction, size, slope, slopes: [this.slopeLow, this.slopeHigh] };
+  }
+}

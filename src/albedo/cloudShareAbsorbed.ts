@@ -14,7 +14,7 @@ export const cloudShareAbsorbed = /* @__PURE__ */ defineLaw({
   output: { symbol: "f_c", unit: "1", within: [0, 1], about: "share that the cloud absorbs" },
   inputs: CLOUD_PORTS,
   demands: CLOUD_DEMANDS,
-  source: "Donohoe & Battisti 2011, J. Climate 24, 4402",
+  source: "Donohoe & Battisti 2011, J. Climate 24, 4402 (doi:10.1175/2011JCLI3946.1)",
   write(layer) {
     const upward = mul(layer.surface, sunlightBelow(layer));
     return mul(layer.absorptance, add(1, upward));

@@ -16,7 +16,7 @@ export const cloudyAlbedo = /* @__PURE__ */ defineLaw({
   output: /* @__PURE__ */ albedoPort("A", "planetary albedo below the cloud's top"),
   inputs: CLOUD_PORTS,
   demands: CLOUD_DEMANDS,
-  source: "Donohoe & Battisti 2011, J. Climate 24, 4402",
+  source: "Donohoe & Battisti 2011, J. Climate 24, 4402 (doi:10.1175/2011JCLI3946.1)",
   write(layer) {
     const fromSurface = product(transmittance(layer), layer.surface, sunlightBelow(layer));
     // rounding must not reflect more than all light

@@ -13,6 +13,6 @@ export const surfaceShareBelowCloud = /* @__PURE__ */ defineLaw({
   output: { symbol: "f_s", unit: "1", within: [0, 1], about: "share that the surface absorbs" },
   inputs: CLOUD_PORTS,
   demands: CLOUD_DEMANDS,
-  source: "Donohoe & Battisti 2011, J. Climate 24, 4402",
+  source: "Donohoe & Battisti 2011, J. Climate 24, 4402 (doi:10.1175/2011JCLI3946.1)",
   write: (layer) => mul(sub(1, layer.surface), sunlightBelow(layer)),
 });

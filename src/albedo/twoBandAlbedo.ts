@@ -22,6 +22,6 @@ export const twoBandAlbedo = /* @__PURE__ */ defineLaw({
       about: "share of the star's energy at shorter wavelengths",
     },
   },
-  source: "reflected energy adds; Shields et al. 2013, Astrobiology 13, 715",
+  source: "reflected energy adds; Shields et al. 2013, Astrobiology 13, 715 (doi:10.1089/ast.2012.0961)",
   write: ({ visible, nearInfrared, visibleShare }) => mix(nearInfrared, visible, visibleShare),
 });

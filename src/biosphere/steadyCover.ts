@@ -29,7 +29,7 @@ export const steadyCover = /* @__PURE__ */ defineLaw({
       about: "share of the surface that it can hold",
     },
   }),
-  source: "Watson & Lovelock 1983, Tellus 35B, 284",
+  source: "Watson & Lovelock 1983, Tellus 35B, 284 (doi:10.1111/j.1600-0889.1983.tb00031.x)",
   write({ deathRate, available, ...around }) {
     const leastGrowth = div(deathRate, available);
     const growth = max(parabola(around), leastGrowth);

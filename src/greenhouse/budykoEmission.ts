@@ -13,6 +13,6 @@ export const budykoEmission = /* @__PURE__ */ defineLaw({
   output: /* @__PURE__ */ outgoingPort(),
   inputs: { temperature: /* @__PURE__ */ temperaturePort() },
   published: { temperature: STRAIGHT_RANGE },
-  source: "Budyko 1969, Tellus 21, 611",
+  source: "Budyko 1969, Tellus 21, 611 (doi:10.1111/j.2153-3490.1969.tb00466.x)",
   write: ({ temperature }) => straightLine({ temperature, intercept: 202, slope: 1.45, reference: 273.15 }),
 });

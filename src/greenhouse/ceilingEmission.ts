@@ -34,7 +34,7 @@ export const ceilingEmission = /* @__PURE__ */ defineLaw({
       about: "share that gets out of what the ground emits beyond that",
     },
   },
-  source: "Goldblatt & Watson 2012, Phil. Trans. R. Soc. A 370, 4197",
+  source: "Goldblatt & Watson 2012, Phil. Trans. R. Soc. A 370, 4197 (doi:10.1098/rsta.2012.0004)",
   write({ temperature, emission, ceiling, hotAbove, window }) {
     const beyond = max(0, sub(fourth(temperature), fourth(hotAbove)));
     return add(min(emission, ceiling), mul(mul(window, STEFAN_BOLTZMANN), beyond));

@@ -17,7 +17,7 @@ export const emissionHeight = /* @__PURE__ */ defineLaw({
     emissionTemperature: /* @__PURE__ */ temperaturePort("T_e", "effective temperature of emission to space"),
     lapseRate: LAPSE_RATE,
   },
-  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441",
+  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441 (doi:10.1146/annurev.energy.25.1.441)",
   write: ({ surfaceTemperature, emissionTemperature, lapseRate }) =>
     div(sub(surfaceTemperature, emissionTemperature), lapseRate),
 });

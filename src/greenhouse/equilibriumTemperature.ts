@@ -31,7 +31,8 @@ export const equilibriumTemperature = /* @__PURE__ */ defineLaw({
     emissivity: { symbol: "ε", unit: "1", within: [1e-9, 1], default: 1, about: "emissivity" },
     internalFlux: { symbol: "F_i", unit: "W m-2", within: [0, 1e9], default: 0, about: "internal heat" },
   },
-  source: "Hansen 2008, ApJS 179, 484; Cowan & Agol 2011, ApJ 729, 54",
+  source:
+    "Hansen 2008, ApJS 179, 484 (doi:10.1086/591964); Cowan & Agol 2011, ApJ 729, 54 (doi:10.1088/0004-637X/729/1/54)",
   write({ flux, albedo, redistribution, emissivity, internalFlux }) {
     const heating = add(product(redistribution, flux, sub(1, albedo)), internalFlux);
     const fourthPower = div(heating, mul(emissivity, STEFAN_BOLTZMANN));

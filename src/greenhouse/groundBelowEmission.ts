@@ -17,6 +17,6 @@ export const groundBelowEmission = /* @__PURE__ */ defineLaw({
     lapseRate: LAPSE_RATE,
     height: EMISSION_HEIGHT,
   },
-  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441",
+  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441 (doi:10.1146/annurev.energy.25.1.441)",
   write: ({ emissionTemperature, lapseRate, height }) => add(emissionTemperature, mul(lapseRate, height)),
 });

@@ -18,7 +18,7 @@ export const heightEmission = /* @__PURE__ */ defineLaw({
     lapseRate: LAPSE_RATE,
     height: EMISSION_HEIGHT,
   },
-  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441",
+  source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441 (doi:10.1146/annurev.energy.25.1.441)",
   write({ temperature, lapseRate, height }) {
     const emitting = max(0, sub(temperature, mul(lapseRate, height)));
     return mul(STEFAN_BOLTZMANN, fourth(emitting));

@@ -24,7 +24,8 @@ export const kollCroninEmission = /* @__PURE__ */ defineLaw({
     reference: { symbol: "T_0", unit: "K", within: [0, 1e5], default: 288, about: "reference temperature" },
   },
   published: { temperature: STRAIGHT_RANGE },
-  source: "Koll & Cronin 2018, PNAS 115, 10293; Loeb et al. 2018, J. Climate 31, 895",
+  source:
+    "Koll & Cronin 2018, PNAS 115, 10293 (doi:10.1073/pnas.1809868115); Loeb et al. 2018, J. Climate 31, 895 (doi:10.1175/JCLI-D-17-0208.1)",
   write: ({ temperature, known, reference }) =>
     straightLine({ temperature, intercept: known, slope: 2.2, reference }),
 });

@@ -24,6 +24,7 @@ export const linearEmission = /* @__PURE__ */ defineLaw({
     reference: /* @__PURE__ */ temperaturePort("T_0", "reference temperature"),
   },
   published: { temperature: STRAIGHT_RANGE },
-  source: "Budyko 1969, Tellus 21, 611; Koll & Cronin 2018, PNAS 115, 10293",
+  source:
+    "Budyko 1969, Tellus 21, 611 (doi:10.1111/j.2153-3490.1969.tb00466.x); Koll & Cronin 2018, PNAS 115, 10293 (doi:10.1073/pnas.1809868115)",
   write: straightLine,
 });

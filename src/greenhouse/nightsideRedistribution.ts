@@ -14,6 +14,6 @@ export const nightsideRedistribution = /* @__PURE__ */ defineLaw({
   inputs: {
     transport: { symbol: "ε", unit: "1", within: [0, 1], about: "efficiency of heat transport" },
   },
-  source: "Cowan & Agol 2011, ApJ 729, 54",
+  source: "Cowan & Agol 2011, ApJ 729, 54 (doi:10.1088/0004-637X/729/1/54)",
   write: ({ transport }) => div(transport, 4),
 });

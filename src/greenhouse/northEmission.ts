@@ -13,6 +13,6 @@ export const northEmission = /* @__PURE__ */ defineLaw({
   output: /* @__PURE__ */ outgoingPort(),
   inputs: { temperature: /* @__PURE__ */ temperaturePort() },
   published: { temperature: STRAIGHT_RANGE },
-  source: "North, Cahalan & Coakley 1981, Rev. Geophys. 19, 91",
+  source: "North, Cahalan & Coakley 1981, Rev. Geophys. 19, 91 (doi:10.1029/RG019i001p00091)",
   write: ({ temperature }) => straightLine({ temperature, intercept: 203.3, slope: 2.09, reference: 273.15 }),
 });

@@ -26,7 +26,7 @@ export const pressureOpticalDepth = /* @__PURE__ */ defineLaw({
     exponent: { symbol: "n", unit: "1", within: [0.5, 3], about: "exponent of pressure" },
   },
   published: { exponent: [1, 2] },
-  source: "Robinson & Catling 2012, ApJ 757, 104",
+  source: "Robinson & Catling 2012, ApJ 757, 104 (doi:10.1088/0004-637X/757/1/104)",
   write: ({ pressure, referencePressure, referenceDepth, exponent }) =>
     mul(referenceDepth, exp(mul(exponent, log(div(pressure, referencePressure))))),
 });

@@ -21,7 +21,7 @@ export const orbitMeanTemperature = /* @__PURE__ */ defineLaw({
     ),
     eccentricity: /* @__PURE__ */ eccentricityPort(),
   },
-  source: "Méndez & Rivera-Valentín 2017, ApJL 837, L1",
+  source: "Méndez & Rivera-Valentín 2017, ApJL 837, L1 (doi:10.3847/2041-8213/aa5f13)",
   write: ({ temperatureAtSemiMajorAxis, eccentricity }) =>
     mul(temperatureAtSemiMajorAxis, meanTemperatureRatio(eccentricity)),
 });

@@ -19,7 +19,7 @@ export const temperatureMeanFlux = /* @__PURE__ */ defineLaw({
     fluxAtSemiMajorAxis: /* @__PURE__ */ fluxPort("S_a", "flux at the distance of the semi-major axis"),
     eccentricity: /* @__PURE__ */ eccentricityPort(),
   },
-  source: "Méndez & Rivera-Valentín 2017, ApJL 837, L1",
+  source: "Méndez & Rivera-Valentín 2017, ApJL 837, L1 (doi:10.3847/2041-8213/aa5f13)",
   write: ({ fluxAtSemiMajorAxis, eccentricity }) =>
     mul(fluxAtSemiMajorAxis, fourth(meanTemperatureRatio(eccentricity))),
 });

@@ -16,7 +16,8 @@ export const fluxAtRadii = /* @__PURE__ */ defineLaw({
     effectiveTemperature: { symbol: "T_eff", unit: "K", within: [0, 1e6], about: "effective temperature" },
     radii: { symbol: "d/R", unit: "1", within: [1, 1e14], about: "distance in stellar radii" },
   },
-  source: "definition of effective temperature; use: Cowan & Agol 2011, ApJ 729, 54",
+  source:
+    "definition of effective temperature; use: Cowan & Agol 2011, ApJ 729, 54 (doi:10.1088/0004-637X/729/1/54)",
   write: ({ effectiveTemperature, radii }) =>
     div(mul(STEFAN_BOLTZMANN, fourth(effectiveTemperature)), square(radii)),
 });

@@ -17,7 +17,8 @@ export const localAbsorbedFlux = /* @__PURE__ */ defineLaw({
     albedo: /* @__PURE__ */ albedoPort(),
     redistribution: { symbol: "f", unit: "1", within: [0, 1], about: "redistribution factor" },
   },
-  source: "Hansen 2008, ApJS 179, 484; Cowan & Agol 2011, ApJ 729, 54",
+  source:
+    "Hansen 2008, ApJS 179, 484 (doi:10.1086/591964); Cowan & Agol 2011, ApJ 729, 54 (doi:10.1088/0004-637X/729/1/54)",
   write({ flux, albedo, redistribution }) {
     const coAlbedo = sub(1, albedo);
     return product(redistribution, flux, coAlbedo);

@@ -47,7 +47,7 @@ export const massLuminosity = /* @__PURE__ */ defineLaw({
   },
   // 0.179 to 31 solar masses
   published: { mass: [3.559253668549511e29, 6.164070599163958e31] },
-  source: "Eker et al. 2018, MNRAS 479, 5491, table 4",
+  source: "Eker et al. 2018, MNRAS 479, 5491 (doi:10.1093/mnras/sty1834), table 4",
   write({ mass }) {
     const suns = div(mass, SOLAR_MASS);
     const logMass = div(log(suns), LN10);

@@ -22,6 +22,6 @@ export const stellarBrightening = /* @__PURE__ */ defineLaw({
     age: { symbol: "t", unit: "s", within: [0, 4.75e17], about: "age since hydrogen began to burn" },
   },
   published: { age: [0, SOLAR_AGE] },
-  source: "Gough 1981, Solar Physics 74, 21",
+  source: "Gough 1981, Solar Physics 74, 21 (doi:10.1007/BF00151270)",
   write: ({ age }) => div(1, add(1, mul(SOLAR_PACE, sub(1, div(age, SOLAR_AGE))))),
 });

@@ -16,7 +16,8 @@ export const stellarLuminosity = /* @__PURE__ */ defineLaw({
     radius: { symbol: "R", unit: "m", within: [0, 1e14], about: "stellar radius" },
     effectiveTemperature: { symbol: "T_eff", unit: "K", within: [0, 1e6], about: "effective temperature" },
   },
-  source: "definition of effective temperature; Prša et al. 2016, AJ 152, 41",
+  source:
+    "definition of effective temperature; Prša et al. 2016, AJ 152, 41 (doi:10.3847/0004-6256/152/2/41)",
   write({ radius, effectiveTemperature }) {
     const area = mul(FOUR_PI, square(radius));
     return product(area, STEFAN_BOLTZMANN, fourth(effectiveTemperature));

@@ -1,7 +1,8 @@
 // The shape of what leaves the planet: emission by one of several laws, and forcings that reduce it.
-import { array, discriminatedUnion, union } from "zod/mini";
+import { discriminatedUnion, union } from "zod/mini";
 import { DEPTH_LAWS, EMISSION_LAWS, FORCING_LAWS, LONGWAVE_LAWS } from "./fieldLaws.ts";
 import { lawSchema } from "./lawSchema.ts";
+import { listOf } from "./listOf.ts";
 import { pureSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
@@ -16,11 +17,7 @@ const depthPart = worded(
   "a number from 0 to 1000000, or { law }",
 );
 const opticalDepth = worded(
-  union([
-    ...pureSchema(depthPort).def.options,
-    depthLaw(),
-    worded(array(depthPart), "a list of optical depths", { minItems: 1, maxItems: 20 }),
-  ]),
+  union([...pureSchema(depthPort).def.options, depthLaw(), listOf(depthPart, "optical depths", 20)]),
   "a number from 0 to 1000000, { law }, or a list of such, which add",
   { description: `${depthPort.about}; several of a list add` },
 );
@@ -71,7 +68,7 @@ const forcing = () =>
 
 /** What `forcing` may be. */
 export const forcingShape = worded(
-  union([forcing(), worded(array(forcing()), "a list of { law }", { minItems: 1, maxItems: 20 })]),
+  union([forcing(), listOf(forcing(), "{ law }", 20)]),
   "{ law }, or a list of such, which add",
   {
     description:

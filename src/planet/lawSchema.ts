@@ -1,9 +1,10 @@
 // The schema of a law in a description: its name and its ports, all taken from its card.
 import type { ZodMiniArray, ZodMiniLiteral, ZodMiniObject, ZodMiniOptional, ZodMiniType } from "zod/mini";
-import { array, literal, optional, strictObject } from "zod/mini";
+import { literal, optional, strictObject } from "zod/mini";
 import type { ListPort, Port, Ports } from "../graph/card.ts";
 import type { Law } from "../law/types.ts";
 import { isBound } from "./fieldLaws.ts";
+import { listOf } from "./listOf.ts";
 import { type ValueSchema, valueSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
@@ -40,5 +41,5 @@ function fieldSchema(name: string, port: Port | ListPort): ZodMiniType {
   const record = Object.entries(port.each).map(([key, each]) => [key, valueSchema(each)] as const);
   const keys = record.map(([key]) => key).join(", ");
   const shape = worded(strictObject(Object.fromEntries(record)), `{ ${keys} }`);
-  return worded(array(shape), `a list of { ${keys} }`, { minItems: 1, description: name });
+  return listOf(shape, `{ ${keys} }`, 100, { description: name });
 }

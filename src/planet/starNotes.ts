@@ -1,13 +1,10 @@
 // What is assumed of the light of the stars.
-import { visibleShareOf } from "./bands.ts";
+import { hasBands, visibleShareOf } from "./bands.ts";
 import type { CheckedPlanet } from "./checkedPlanet.ts";
+import { COOL_STAR } from "./coolStar.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
-import type { PlanetDescription } from "./planetShape.ts";
 import { hostsOf, starsOf } from "./stars.ts";
 import { temperatureWays } from "./ways.ts";
-
-/** Below this effective temperature molecules shape the spectrum: the stars of class M, K (a convention). */
-const COOL = 3900;
 
 /** A black body where nothing is known of the spectrum; one distance for all stars that the planet orbits. */
 export function starNotes({ description: d, numbers }: CheckedPlanet): PlanetNote[] {
@@ -20,18 +17,11 @@ export function starNotes({ description: d, numbers }: CheckedPlanet): PlanetNot
   for (const described of starsOf(d)) {
     if (described.star.visibleShare !== undefined) continue;
     const temperature = temperatureWays(described)[0]?.of(numbers) as number;
-    const cool = temperature < COOL;
+    const cool = temperature < COOL_STAR;
     const text = `share of a black body's energy below 0.7 µm${cool ? ": a poor likeness of so cool a star" : ""}`;
     const about = `${described.path}.visibleShare`;
     const value = visibleShareOf(described, numbers) as number;
     notes.push(planetNote({ code: "assumption", severity: cool ? "caution" : "info", about, text, value }));
   }
   return notes;
-}
-
-function hasBands({ albedo, surface }: PlanetDescription): boolean {
-  const written = albedo ?? surface;
-  return (
-    typeof written === "object" && "covers" in written && written.covers.some((cover) => "visible" in cover)
-  );
 }

@@ -1,6 +1,7 @@
 // The shape of a star, of several stars, and of the orbit.
-import { array, literal, optional, strictObject, string, union } from "zod/mini";
+import { literal, optional, strictObject, string, union } from "zod/mini";
 import { ORBIT_PORTS, STAR_PORTS } from "./fieldPorts.ts";
+import { listOf } from "./listOf.ts";
 import { measuredSchema, pureSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
@@ -21,10 +22,7 @@ const listed = worded(
 
 /** What `star` may be. */
 export const starShape = worded(
-  union([
-    worded(strictObject(fields()), WORDS),
-    worded(array(listed), "a list of stars", { minItems: 1, maxItems: 10 }),
-  ]),
+  union([worded(strictObject(fields()), WORDS), listOf(listed, "stars", 10)]),
   `${WORDS}, or a list of such`,
   { description: "the star, or all stars that light the planet" },
 );

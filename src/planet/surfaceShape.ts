@@ -1,8 +1,9 @@
 // The shape of what reflects: a planet as a whole, or its surface below air and clouds.
-import { array, discriminatedUnion, literal, optional, strictObject, string, union } from "zod/mini";
+import { discriminatedUnion, literal, optional, strictObject, string, union } from "zod/mini";
 import { ALBEDO_LAWS, SHARE_LAWS, SURFACE_LAWS } from "./fieldLaws.ts";
 import { ALBEDO_PORT, COVER_PORTS, SURFACE_PORT } from "./fieldPorts.ts";
 import { lawSchema } from "./lawSchema.ts";
+import { listOf } from "./listOf.ts";
 import { pureSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
@@ -37,7 +38,7 @@ const cover = worded(union([grey, inTwoBands]), "{ share, albedo } or { share, v
 const covers = () =>
   worded(
     strictObject({
-      covers: worded(array(cover), "a list of { share, albedo }", { minItems: 1, maxItems: 100 }),
+      covers: listOf(cover, "{ share, albedo }", 100),
     }),
     "{ covers }",
   );

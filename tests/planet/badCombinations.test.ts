@@ -222,6 +222,22 @@ const FAULTS: readonly Fault[] = [
   ],
   ["no layers", emitting({ law: "leakyStackEmission", layers: [] }), "unreadable", "longwave.layers"],
   [
+    "more layers than a list may have",
+    emitting({
+      law: "leakyStackEmission",
+      layers: new Array(101).fill({ emissivity: 1, heating: "0 W m-2" }),
+    }),
+    "unreadable",
+    "longwave.layers",
+  ],
+  ["more stars than a list may have", lit(new Array(11).fill(sun)), "unreadable", "star"],
+  [
+    "more covers than a list may have",
+    covered(...new Array(101).fill({ share: 0, albedo: 0 })),
+    "unreadable",
+    "surface.covers",
+  ],
+  [
     "a layer without heating",
     emitting({ law: "leakyStackEmission", layers: [{ emissivity: 0.5 }] }),
     "missing",

@@ -17,17 +17,20 @@ export interface FoldCurve {
   readonly exists: "above" | "below";
   /** Lowest and highest value of the second given. */
   readonly range: Range;
-  /** Why it ends where it does: `cusp`, `between`, `within` or `undecided`. */
+  /** Why it ends where it does. */
   readonly ends: readonly [FoldCurveEnd, FoldCurveEnd];
   /** By rising second given. */
   readonly points: readonly FoldPoint[];
 }
 
-/** How a fold curve ends: in a cusp; at an end of the range of the second given, or of temperature; or not decided. */
-export type FoldCurveEnd = "cusp" | "between" | "within" | "undecided";
+/**
+ * How a fold curve ends: with another fold in a `cusp`, at an `isola` or at a `transcritical` point; at an end of the range of the
+ * second given (`between`), of the first (`along`) or of temperature (`within`); or not decided.
+ */
+export type FoldCurveEnd = "cusp" | "isola" | "transcritical" | "between" | "along" | "within" | "undecided";
 
-/** A point at which two folds meet and vanish: beyond it the answer to the first given is smooth and unique. */
-export interface Cusp extends FoldPoint {
+/** A point at which two folds meet and vanish as the second given changes. */
+export interface FoldMeeting extends FoldPoint {
   /** Proved bounds of the second given. */
   readonly andBracket: Range;
   /** Proved bounds of the temperature, K. */
@@ -38,15 +41,31 @@ export interface Cusp extends FoldPoint {
   readonly curves: readonly [number, number];
 }
 
+/** Beyond a cusp the answer to the first given is smooth and unique. */
+export interface Cusp extends FoldMeeting {}
+
+/**
+ * Two folds at one temperature: an `isola` is an island of states that shrinks to a point and is gone; at a `transcritical` point
+ * two branches cross, which pass each other on one side of it and turn back in two folds on the other.
+ */
+export interface FoldTouch extends FoldMeeting {
+  readonly kind: "isola" | "transcritical";
+}
+
 /** All folds in two givens. A plain frozen object. */
 export interface FoldDiagram<A extends string = string> {
   readonly along: A;
   readonly and: A;
   readonly between: Range;
+  /** The range of the first given; `null` where it takes any value. */
+  readonly alongBetween: Range | null;
   readonly within: Range;
   /** By rising temperature. */
   readonly curves: readonly FoldCurve[];
   readonly cusps: readonly Cusp[];
+  readonly touches: readonly FoldTouch[];
+  /** `line`: the budget is a straight line in the first given, which takes any value; `space`: both have a range. */
+  readonly method: "line" | "space";
   /** Values of the second given at which the number of folds is not proved. */
   readonly undecided: readonly Range[];
   /** True only if it is proved that there is no other fold at temperatures of the range. */

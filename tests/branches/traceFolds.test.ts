@@ -2,7 +2,7 @@
 import { describe, expect, test } from "vitest";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import { traceFolds } from "../../src/branches/traceFolds.ts";
-import { add, mul, square, sub } from "../../src/index.ts";
+import { add, exp, mul, square, sub } from "../../src/index.ts";
 import { refusal } from "../refusal.ts";
 import { distantLoop, formulaLoop, sampledLoop, twoGivens, vapourLoop } from "./loops.ts";
 
@@ -77,9 +77,23 @@ describe("refused", () => {
   test.each([
     [() => traceFolds(vapourLoop(), { ...base, along: "carbon" }), "contradiction", /another given/],
     [
-      () => traceFolds(vapourLoop(), { ...base, along: "carbon", and: "flux" }),
+      () => traceFolds(sampledLoop(), { along: "width", and: "flux", between: [900, 1900], within: WITHIN }),
       "contradiction",
       /straight line/,
+    ],
+    [
+      () =>
+        traceFolds(
+          twoGivens((t, p, q) => add(exp(p), mul(q, t))),
+          { along: "p", and: "q", between: [0, 1], within: WITHIN },
+        ),
+      "missing",
+      /alongBetween/,
+    ],
+    [
+      () => traceFolds(vapourLoop(), { ...base, along: "flux", alongBetween: [1900, 900] }),
+      "out-of-range",
+      /alongBetween/,
     ],
     [() => traceFolds(vapourLoop(), { ...base, along: "fluxx" as never }), "unknown-name", /nearest: flux/],
     [

@@ -1,0 +1,119 @@
+// A tube around a fold that moves with the second given: it holds exactly one fold at each value.
+import type { Range } from "../ground/range.ts";
+import { above, below } from "../search/enclosed.ts";
+import { plus, times } from "../search/interval.ts";
+import { boxAt, type FoldBox, type FoldPlace, type FoldSystem, middles } from "./foldSystem.ts";
+import { pointAt } from "./planeReader.ts";
+import { middleOf } from "./stretch.ts";
+
+/** For every q in `q`: one fold within `reach` of the straight line through `at` with slopes `along`, and it is within `core`. */
+export interface FoldTube {
+  readonly q: Range;
+  readonly at: FoldPlace;
+  readonly along: readonly [t: number, p: number];
+  readonly reach: readonly [t: number, p: number];
+  readonly core: readonly [t: number, p: number];
+}
+
+const MOST_INFLATIONS = 10;
+const MOST_ENLARGEMENTS = 30;
+/** Tubes are widened by such a factor as long as that succeeds, then by the lesser. */
+const FASTEST = 12;
+const SLOWEST = 2;
+/** The least reach, as a share of the place. */
+const LEAST = 1e-12;
+
+/**
+ * Krawczyk's operator in coordinates that move along with the fold: with Y about the inverse of the Jacobian J of (N, N_T) in
+ * (T, p), each fold in the tube is within |Y·(N, N_T)| on the line, plus |1 − Y·J|·reach, of the line; if that is less than the
+ * reach, there is exactly one at each q. On the line N changes by (N_q + N_T·T′ + N_p·p′)·(q − q₀), and N_T likewise.
+ */
+export function foldTube(system: FoldSystem, near: FoldPlace, q: Range): FoldTube | undefined {
+  const middle = middleOf(q);
+  const at = system.fold({ ...near, q: middle });
+  if (!Number.isFinite(at.t + at.p)) return undefined;
+  const start = system.read(boxAt(at));
+  const m = middles(start);
+  const scale = m.nt * m.ntp - m.np * m.ntt;
+  const inverse = [m.ntp / scale, -m.np / scale, -m.ntt / scale, m.nt / scale] as const;
+  const along = [
+    -(inverse[0] * m.nq + inverse[1] * m.ntq),
+    -(inverse[2] * m.nq + inverse[3] * m.ntq),
+  ] as const;
+  if (!Number.isFinite(along[0] + along[1])) return undefined;
+  const line = system.read(boxOf({ at, along, reach: [0, 0] }, q));
+  const [dt, dp] = [pointAt(along[0]), pointAt(along[1])];
+  const away: Range = [below(q[0] - middle), above(q[1] - middle)];
+  const onLine = (value: Range, byQ: Range, byT: Range, byP: Range) =>
+    plus(value, times(plus(byQ, plus(times(byT, dt), times(byP, dp))), away));
+  const [n, slope] = [
+    onLine(start.n, line.nq, line.nt, line.np),
+    onLine(start.nt, line.ntq, line.ntt, line.ntp),
+  ];
+  const row = (i: 0 | 2) => [pointAt(inverse[i]), pointAt(inverse[i + 1] as number)] as const;
+  const miss = ([a, b]: readonly [Range, Range]) => size(plus(times(a, n), times(b, slope)));
+  const [missT, missP] = [miss(row(0)), miss(row(2))];
+  /** How far a fold in the tube can be from its line. */
+  const within = (reach: readonly [number, number]): readonly [number, number] => {
+    const { nt, np, ntt, ntp } = system.read(boxOf({ at, along, reach }, q));
+    const far = ([a, b]: readonly [Range, Range], own: 0 | 1) => {
+      const byT = size(plus(pointAt(own === 0 ? -1 : 0), plus(times(a, nt), times(b, ntt))));
+      const byP = size(plus(pointAt(own === 1 ? -1 : 0), plus(times(a, np), times(b, ntp))));
+      return above(above(byT * reach[0]) + above(byP * reach[1]));
+    };
+    return [above(missT + far(row(0), 0)), above(missP + far(row(2), 1))];
+  };
+  let reach: readonly [number, number] = [
+    2 * missT + LEAST * Math.abs(at.t),
+    2 * missP + LEAST * Math.abs(at.p) + 1e-250,
+  ];
+  let core = within(reach);
+  for (let i = 0; !(core[0] < reach[0] && core[1] < reach[1]); i++) {
+    if (i === MOST_INFLATIONS || !Number.isFinite(core[0] + core[1])) return undefined;
+    reach = [Math.max(reach[0], 1.5 * core[0]), Math.max(reach[1], 1.5 * core[1])];
+    core = within(reach);
+  }
+  // where the proof holds in a wider tube as well, it says that nothing else is there
+  for (let [i, growT, growP] = [0, FASTEST, FASTEST]; i < MOST_ENLARGEMENTS && growT + growP > 2; i++) {
+    const turn = growT > 1 && (i % 2 === 0 || growP === 1);
+    const wider: readonly [number, number] = turn
+      ? [growT * reach[0], reach[1]]
+      : [reach[0], growP * reach[1]];
+    const wide = within(wider);
+    if (wide[0] < wider[0] && wide[1] < wider[1]) reach = wider;
+    else if (turn) growT = growT > SLOWEST ? SLOWEST : 1;
+    else growP = growP > SLOWEST ? SLOWEST : 1;
+  }
+  return { q, at, along, reach, core };
+}
+
+const size = (r: Range): number => Math.max(-r[0], r[1]);
+
+type Around = Pick<FoldTube, "at" | "along" | "reach">;
+
+/** Bounds of a tube over some values of the second given. */
+export function boxOf({ at, along, reach }: Around, q: Range): FoldBox {
+  const side = (x: number, slope: number, r: number): Range => {
+    const moves = times(pointAt(slope), [below(q[0] - at.q), above(q[1] - at.q)]);
+    return plus(plus(pointAt(x), moves), [-r, r]);
+  };
+  return { t: side(at.t, along[0], reach[0]), p: side(at.p, along[1], reach[1]), q };
+}
+
+/** What every section of a tube over some values of the second given holds; in the wrong order where that is nothing. */
+export function commonOf({ at, along, reach }: Around, q: Range): Pick<FoldBox, "t" | "p"> {
+  const side = (x: number, slope: number, r: number): Range => {
+    const [low, high] = times(pointAt(slope), [below(q[0] - at.q), above(q[1] - at.q)]);
+    return [above(above(x - r) + high), below(below(x + r) + low)];
+  };
+  return { t: side(at.t, along[0], reach[0]), p: side(at.p, along[1], reach[1]) };
+}
+
+/** Closer bounds of the fold in a tube. */
+export const foldIn = (tube: FoldTube, q: Range): FoldBox => boxOf({ ...tube, reach: tube.core }, q);
+
+/** About where the fold of a tube is. */
+export const placeIn = ({ at, along }: FoldTube, q: number): FoldPlace => ({
+  ...{ t: at.t + along[0] * (q - at.q), p: at.p + along[1] * (q - at.q) },
+  q,
+});

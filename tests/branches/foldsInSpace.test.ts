@@ -1,0 +1,216 @@
+// The folds in two givens where the budget is a straight line in neither, or where both have a range.
+import { describe, expect, test } from "vitest";
+import type { FoldDiagram } from "../../src/branches/foldDiagram.ts";
+import { traceBranches } from "../../src/branches/traceBranches.ts";
+import { traceFolds } from "../../src/branches/traceFolds.ts";
+import { add, max, mul, STEFAN_BOLTZMANN, square, sub } from "../../src/index.ts";
+import { distantLoop, twoGivens, vapourLoop } from "./loops.ts";
+
+const WITHIN = [150, 400] as const;
+const AROUND = [250, 350] as const;
+const ends = ({ curves }: FoldDiagram) => curves.map((c) => c.ends);
+
+describe("along the width of an ice line, with the luminosity", () => {
+  const loop = distantLoop();
+  const range = { alongBetween: [2, 60], between: [3e26, 5e26], within: WITHIN } as const;
+  const diagram = traceFolds(loop, { along: "width", and: "luminosity", ...range });
+
+  test("all folds are proved", () => {
+    expect(diagram).toMatchObject({ method: "space", proof: "proved", complete: true, undecided: [] });
+    expect(diagram.curves).toHaveLength(3);
+  });
+
+  test("two of them meet where the width does not matter, at 265 K", () => {
+    // there tanh = 0, and N = N_T = 0 is 0.5·s = 0.6σT⁴ and 0.2·s/w = 2.4σT³ for the flux s of the whole sphere: w = T/10
+    expect(diagram.touches).toMatchObject([{ kind: "transcritical", exists: "below" }]);
+    const [{ at, and, andBracket, temperature }] = diagram.touches as [FoldDiagram["touches"][number]];
+    const luminosity = 1.2 * STEFAN_BOLTZMANN * 265 ** 4 * 16 * Math.PI * 149597870700 ** 2;
+    expect(at).toBeCloseTo(26.5, 9);
+    expect(temperature).toBeCloseTo(265, 9);
+    expect(Math.abs(and / luminosity - 1)).toBeLessThan(1e-13);
+    // the formula is rounded a dozen times
+    expect(andBracket[0] / luminosity).toBeLessThan(1 + 1e-14);
+    expect(andBracket[1] / luminosity).toBeGreaterThan(1 - 1e-14);
+  });
+
+  test("two meet in the cusp that is found along the luminosity", () => {
+    const along = traceFolds(loop, { along: "luminosity", and: "width", between: [2, 60], within: WITHIN });
+    expect(along).toMatchObject({ method: "line", complete: true });
+    const [there] = along.cusps;
+    const [here] = diagram.cusps;
+    expect(diagram.cusps).toHaveLength(1);
+    expect(Math.abs((here?.at as number) - (there?.and as number))).toBeLessThan(1e-9);
+    expect(Math.abs((here?.and as number) / (there?.at as number) - 1)).toBeLessThan(1e-12);
+    // the temperature of a cusp is less well known than its givens
+    expect(here?.temperature).toBeCloseTo(there?.temperature as number, 4);
+  });
+
+  test("each is a fold of the diagram along the width", () => {
+    for (const { points, exists } of diagram.curves) {
+      for (const { at, and, temperature } of points.filter((_, i) => i % 40 === 20)) {
+        const options = {
+          along: "width",
+          between: [1, 61],
+          within: WITHIN,
+          at: { luminosity: and },
+        } as const;
+        const misses = traceBranches(loop, options)
+          .folds.filter((f) => f.exists === exists)
+          .map((f) => Math.abs(f.at - at) + Math.abs(f.temperature - temperature));
+        expect(Math.min(...misses)).toBeLessThan(1e-5);
+      }
+    }
+  });
+
+  test("the same with ranges along the luminosity", () => {
+    const options = { along: "luminosity", and: "width", between: [10, 60], within: WITHIN } as const;
+    const space = traceFolds(loop, { ...options, alongBetween: [1e26, 8e26] });
+    expect(space).toMatchObject({ method: "space", complete: true, touches: [] });
+    expect(ends(space)).toEqual(ends(traceFolds(loop, options)));
+    expect(space.curves.map((c) => c.exists)).toEqual(["below", "above"]);
+  });
+});
+
+test("folds in carbon and flux pass through those of the acceptance case", () => {
+  // an independent computation in high precision: at C = 280 folds lie at these fluxes
+  for (const [flux, temperature] of [
+    [1276.3234109303, 272.87849932],
+    [1471.9530876739, 255.37444344],
+  ] as const) {
+    const options = { along: "carbon", alongBetween: [100, 2000], and: "flux", within: [200, 290] } as const;
+    const { curves, complete } = traceFolds(vapourLoop(), { ...options, between: [flux, flux + 20] });
+    expect(complete).toBe(true);
+    const first = curves
+      .map((c) => c.points[0])
+      .find((p) => Math.abs((p?.temperature as number) - temperature) < 1);
+    // the flux is given to 5e-11; dC/dS = N_S/N_C is about −30
+    expect(first?.at).toBeCloseTo(280, 7);
+    expect(first?.temperature).toBeCloseTo(temperature, 7);
+  }
+});
+
+describe("known places", () => {
+  const x = (t: Parameters<Parameters<typeof twoGivens>[0]>[0]) => sub(t, 300);
+
+  test("a cusp, and folds that leave the range of the first given", () => {
+    // p + 0.1p² = x³ − qx has folds at x² = q/3, where it is −2x³
+    const loop = twoGivens((t, p, q) => {
+      const cubic = sub(mul(square(x(t)), x(t)), mul(q, x(t)));
+      return sub(add(p, mul(0.1, square(p))), cubic);
+    });
+    const options = {
+      along: "p",
+      alongBetween: [-3, 3],
+      and: "q",
+      between: [-4, 5],
+      within: AROUND,
+    } as const;
+    const { curves, cusps, touches, complete } = traceFolds(loop, options);
+    expect({ complete, touches }).toEqual({ complete: true, touches: [] });
+    expect(cusps).toMatchObject([{ exists: "above", curves: [0, 1] }]);
+    expect(Math.abs(cusps[0]?.and as number)).toBeLessThan(1e-9);
+    expect(curves.map((c) => c.ends)).toEqual([
+      ["cusp", "along"],
+      ["cusp", "along"],
+    ]);
+    // −2x³ = 3.9 and −2.1 at p = 3 and −3, q = 3x²
+    expect(curves[0]?.range[1]).toBeCloseTo(3 * 1.95 ** (2 / 3), 9);
+    expect(curves[1]?.range[1]).toBeCloseTo(3 * 1.05 ** (2 / 3), 9);
+    for (const { points } of curves) {
+      for (const { at, and, temperature } of points.slice(1, -1)) {
+        const place = temperature - 300;
+        expect(place * place).toBeCloseTo(and / 3, 9);
+        expect(at + 0.1 * at * at).toBeCloseTo(-2 * place * place * place, 9);
+      }
+    }
+  });
+
+  // ẋ = q + px − x² (Strogatz, section 3.6, imperfect bifurcations, from memory): folds at p² = −4q
+  test("a transcritical point and its imperfections", () => {
+    const loop = twoGivens((t, p, q) => add(q, sub(mul(p, x(t)), square(x(t)))));
+    const options = {
+      along: "p",
+      alongBetween: [-3, 3],
+      and: "q",
+      between: [-1, 1.1],
+      within: AROUND,
+    } as const;
+    const { curves, cusps, touches, complete } = traceFolds(loop, options);
+    expect({ complete, cusps }).toEqual({ complete: true, cusps: [] });
+    expect(touches).toMatchObject([{ kind: "transcritical", exists: "below" }]);
+    expect(touches[0]?.andBracket[0]).toBeLessThanOrEqual(0);
+    expect(touches[0]?.andBracket[1]).toBeGreaterThanOrEqual(0);
+    expect(curves.map((c) => c.exists)).toEqual(["below", "above"]);
+    for (const { points } of curves)
+      for (const { at, and } of points) expect(at * at).toBeCloseTo(-4 * and, 9);
+  });
+
+  test("an island of states that vanishes", () => {
+    const loop = twoGivens((t, p, q) => sub(sub(q, square(x(t))), square(p)));
+    const options = {
+      along: "p",
+      alongBetween: [-3, 3],
+      and: "q",
+      between: [-1, 1.1],
+      within: AROUND,
+    } as const;
+    const { curves, touches, complete } = traceFolds(loop, options);
+    expect(complete).toBe(true);
+    expect(touches).toMatchObject([{ kind: "isola", exists: "above", at: 0 }]);
+    for (const { points } of curves) for (const { at, and } of points) expect(at * at).toBeCloseTo(and, 9);
+  });
+
+  test("a fold that leaves the range of temperature", () => {
+    // p² + p = (x − q)²: a fold at x = q, p = 0
+    const loop = twoGivens((t, p, q) => sub(add(square(p), p), square(sub(x(t), q))));
+    const options = {
+      along: "p",
+      alongBetween: [-0.4, 3],
+      and: "q",
+      between: [-9, 80],
+      within: [290, 340],
+    } as const;
+    const { curves, complete } = traceFolds(loop, options);
+    expect(complete).toBe(true);
+    expect(curves.map((c) => c.ends)).toEqual([["between", "within"]]);
+    expect(curves[0]?.range[1]).toBeCloseTo(40, 9);
+  });
+
+  test("none", () => {
+    const loop = twoGivens((t, p, q) => sub(add(square(p), q), x(t)));
+    const options = { along: "p", alongBetween: [0, 3], and: "q", between: [-1, 1], within: AROUND } as const;
+    expect(traceFolds(loop, options)).toMatchObject({ complete: true, curves: [], cusps: [], touches: [] });
+  });
+});
+
+describe("what is not decided is said", () => {
+  test("folds at the kink of a law", () => {
+    // a valley with its bottom at the kink x = q, at p = 0
+    const loop = twoGivens((t, p, q) => {
+      const away = sub(sub(t, 300), q);
+      return sub(add(p, square(p)), max(away, mul(-2, away)));
+    });
+    const options = {
+      along: "p",
+      alongBetween: [-0.4, 1],
+      and: "q",
+      between: [-1, 1],
+      within: [290, 310],
+    } as const;
+    const { complete, undecided } = traceFolds(loop, { ...options, effort: 3000 });
+    expect(complete).toBe(false);
+    expect(undecided).toEqual([[-1, 1]]);
+  });
+
+  test("an effort that is spent", () => {
+    const options = {
+      along: "width",
+      alongBetween: [2, 60],
+      and: "luminosity",
+      between: [3e26, 5e26],
+    } as const;
+    const { proof, undecided } = traceFolds(distantLoop(), { ...options, within: WITHIN, effort: 300 });
+    expect(proof).toBe("partial");
+    expect(undecided.length).toBeGreaterThan(0);
+  });
+});

@@ -17,7 +17,7 @@ export function checkCombinations(d: PlanetDescription): void {
   checkReflecting(d);
   checkLayers(d);
   checkStars(d);
-  checkDepths(d);
+  checkEmission(d);
   checkForcings(d);
   if (d.rotation && d.rotation.period === undefined && d.rotation.locked === undefined)
     missing("rotation.period", "period or locked");
@@ -76,8 +76,10 @@ function checkStars(d: PlanetDescription): void {
     contradiction(`${stars[0]?.path}.distance`, "a distance", "one star without it, which the planet orbits");
 }
 
-function checkDepths({ longwave, atmosphere }: PlanetDescription): void {
+function checkEmission({ longwave, atmosphere }: PlanetDescription): void {
   const { written, path } = innerEmission(longwave);
+  if (written.law === "heightEmission" && atmosphere?.lapseRate === undefined)
+    missing("atmosphere.lapseRate", "the fall of temperature with height, for heightEmission");
   if (!("opticalDepth" in written)) return;
   const { opticalDepth } = written;
   if (Array.isArray(opticalDepth)) needOne(opticalDepth, `${path}.opticalDepth`);

@@ -30,6 +30,7 @@ const emissions = () =>
     lawSchema("budykoEmission", EMISSION_LAWS.budykoEmission),
     lawSchema("northEmission", EMISSION_LAWS.northEmission),
     lawSchema("kollCroninEmission", EMISSION_LAWS.kollCroninEmission),
+    lawSchema("heightEmission", EMISSION_LAWS.heightEmission),
     lawSchema("leakyStackEmission", EMISSION_LAWS.leakyStackEmission),
   ] as const;
 const EXAMPLE = '{ law }, as in { law: "greyEmission", emissivity: 0.6 }';

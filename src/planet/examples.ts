@@ -8,6 +8,7 @@ const EXAMPLES: Readonly<Record<string, string>> = {
   K: "288 K",
   W: "0.42 solLum",
   Pa: "1.1 bar",
+  "K m-1": "6.5 K km-1",
   "W m-2": "870 W m-2",
   "W m-2 K-1": "2.1 W m-2 K-1",
   "J m-2 K-1": "4.2e8 J m-2 K-1",

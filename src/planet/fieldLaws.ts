@@ -21,6 +21,7 @@ import { budykoEmission } from "../greenhouse/budykoEmission.ts";
 import { ceilingEmission } from "../greenhouse/ceilingEmission.ts";
 import { greyColumnEmission } from "../greenhouse/greyColumnEmission.ts";
 import { greyEmission } from "../greenhouse/greyEmission.ts";
+import { heightEmission } from "../greenhouse/heightEmission.ts";
 import { kollCroninEmission } from "../greenhouse/kollCroninEmission.ts";
 import { leakyStackEmission } from "../greenhouse/leakyStackEmission.ts";
 import { linearEmission } from "../greenhouse/linearEmission.ts";
@@ -44,6 +45,7 @@ export const EMISSION_LAWS = {
   budykoEmission,
   northEmission,
   kollCroninEmission,
+  heightEmission,
   leakyStackEmission,
 } as const;
 export const LONGWAVE_LAWS = { ...EMISSION_LAWS, ceilingEmission } as const;
@@ -81,9 +83,18 @@ export const DESCRIPTION_LAWS: Readonly<Record<string, NamedLaw>> = {
 /** The law of that name. */
 export const lawNamed = (name: string): NamedLaw => DESCRIPTION_LAWS[name] as NamedLaw;
 
-/** Ports that a description never fills: temperature is that of the loop, pressure that of `atmosphere`. */
+/** Ports that take what stands elsewhere in the description, by law and port. */
+const ELSEWHERE: Readonly<Record<string, string>> = {
+  "pressureOpticalDepth.pressure": "atmosphere.pressure",
+  "heightEmission.lapseRate": "atmosphere.lapseRate",
+};
+
+/** The path of what a port takes from elsewhere in the description. */
+export const elsewhere = (law: string, port: string): string | undefined => ELSEWHERE[`${law}.${port}`];
+
+/** Ports that a law in a description does not fill: temperature is that of the loop. */
 export const isBound = (law: string, port: string): boolean =>
-  port === "temperature" || `${law}.${port}` === "pressureOpticalDepth.pressure";
+  port === "temperature" || elsewhere(law, port) !== undefined;
 
 /** Ports that take a temperature difference, by law and port; a test compares this list with the ports' ranges. */
 export const DIFFERENCES: readonly string[] = ["tanhAlbedo.width"];

@@ -8,7 +8,10 @@ import { listOf } from "./listOf.ts";
 import { type ValueSchema, valueSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
-type Bound<Name> = "temperature" | (Name extends "pressureOpticalDepth" ? "pressure" : never);
+type Bound<Name> =
+  | "temperature"
+  | (Name extends "pressureOpticalDepth" ? "pressure" : never)
+  | (Name extends "heightEmission" ? "lapseRate" : never);
 type Omissible = { readonly default: number } | { readonly optional: true };
 type FieldOf<P> = P extends ListPort
   ? ZodMiniArray<ZodMiniObject<Fields<never, P["each"]>>>

@@ -58,8 +58,7 @@ function depth(written: Depth, path: string, from: Sources): Value {
 
 function depthPart(written: unknown, path: string, from: Sources): Value {
   if (!isLaw(written)) return from.wire(path);
-  if (written.law !== "pressureOpticalDepth") return callWritten(written, path, from);
-  return callWritten(written, path, from, { pressure: from.wire("atmosphere.pressure") });
+  return callWritten(written, path, from);
 }
 
 /** The emission without a ceiling, and where it stands. */

@@ -1,7 +1,7 @@
 // How a description's values reach the laws: as numbers for a first check, as givens when the loop is closed.
 import type { Value } from "../graph/quantity.ts";
 import { ThermosteadError } from "../ground/errors.ts";
-import { lawNamed } from "./fieldLaws.ts";
+import { elsewhere, lawNamed } from "./fieldLaws.ts";
 
 /** The value at a path of the description. */
 export type Wire = (path: string) => Value;
@@ -26,15 +26,23 @@ export interface WrittenLaw {
 export const answersToTemperature = ({ law }: WrittenLaw): boolean =>
   Object.hasOwn(lawNamed(law).card.inputs, "temperature");
 
-/** A law of a description, its temperature bound to the planet's, with `bound` in place of the ports of these names. */
+/**
+ * A law of a description: its temperature is the planet's, some ports take what stands elsewhere, and `bound` stands in
+ * place of the ports of these names.
+ */
 export function callWritten(
   written: WrittenLaw,
   path: string,
   { wire, temperature }: Pick<Sources, "wire" | "temperature">,
   bound: Readonly<Record<string, Value>> = {},
 ): Value {
-  const all = answersToTemperature(written) ? { temperature, ...bound } : bound;
-  return callLaw(lawNamed(written.law), { path, written, wire, bound: all });
+  const law = lawNamed(written.law);
+  const given = Object.keys(law.card.inputs).flatMap((port): [string, Value][] => {
+    if (port === "temperature") return [[port, temperature]];
+    const from = elsewhere(written.law, port);
+    return from === undefined ? [] : [[port, wire(from)]];
+  });
+  return callLaw(law, { path, written, wire, bound: { ...Object.fromEntries(given), ...bound } });
 }
 
 /** Fills a law's ports from the fields of `written`; its errors name the place in the description. */

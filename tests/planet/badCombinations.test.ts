@@ -203,6 +203,12 @@ const FAULTS: readonly Fault[] = [
   ],
   ["pressure that is not known", emitting(column(dry)), "missing", "atmosphere.pressure"],
   [
+    "an emission from a height without lapse rate",
+    emitting({ law: "heightEmission", height: "5 km" }),
+    "missing",
+    "atmosphere.lapseRate",
+  ],
+  [
     "pressure stated twice",
     emitting(column({ ...dry, pressure: "1 bar" }), { atmosphere: { pressure: "1 bar" } }),
     "unknown-name",

@@ -29,6 +29,17 @@ describe("published lines", () => {
   });
 });
 
+test("a height of emission takes the lapse rate of the atmosphere, which is then no idle fact", () => {
+  const longwave = { law: "heightEmission", height: "5 km" };
+  const atmosphere = { lapseRate: "6 K km-1" };
+  const [state] = statesOf(longwave, { atmosphere });
+  // (0.25·1361·0.7/σ)^¼ = 254.58 K at 5 km, and 30 K more at the ground
+  expect(state?.temperature).toBeCloseTo(254.58 + 30, 2);
+  const planet = readPlanet(simple({ longwave, atmosphere }));
+  expect(planet.loop.givens.map(({ name }) => name)).toContain("atmosphere.lapseRate");
+  expect(planet.notes.filter(({ code }) => code === "input-unused")).toEqual([]);
+});
+
 test("leaky layers from a list: one of emissivity 1 without heating is an opaque layer, T⁴ = 2F/σ", () => {
   const layers = [{ emissivity: 1, heating: "0 W m-2" }];
   const longwave = { law: "leakyStackEmission", layers };

@@ -30,7 +30,15 @@ export type {
   Jump,
   UndecidedStretch,
 } from "./branches/diagram.ts";
-export type { Cusp, FoldCurve, FoldCurveEnd, FoldDiagram, FoldMeeting, FoldPoint, FoldTouch } from "./branches/foldDiagram.ts";
+export type {
+  Cusp,
+  FoldCurve,
+  FoldCurveEnd,
+  FoldDiagram,
+  FoldMeeting,
+  FoldPoint,
+  FoldTouch,
+} from "./branches/foldDiagram.ts";
 export { type FollowedState, type FollowStateOptions, followState } from "./branches/followState.ts";
 export type { Margin, TippingMargins, TippingMarginsOptions } from "./branches/margins.ts";
 export type { Solution, Solutions } from "./branches/solutions.ts";

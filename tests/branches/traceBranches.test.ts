@@ -183,6 +183,47 @@ describe("the way a parameter takes", () => {
   });
 });
 
+describe("a corner that moves with the parameter", () => {
+  const loop = core.closeLoop(({ temperature, given }) => {
+    const frozenBelow = given("frozenBelow", 255, "K", { within: [100, 255.5] });
+    const openAbove = given("openAbove", 275, "K", { within: [256, 400] });
+    const albedo = core.rampAlbedo({ temperature, cold: 0.7, warm: 0.3, frozenBelow, openAbove });
+    return {
+      heating: { sunlight: core.absorbedFlux({ flux: 1361, albedo }) },
+      cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+      heatCapacity: 4e8,
+    };
+  });
+
+  // beyond the ramp nothing answers to its ends; a state is lost when the end of the ramp has come up to it
+  test.each([
+    ["openAbove", [260, 350], 0.3, "below"],
+    ["frozenBelow", [150, 255], 0.7, "above"],
+  ] as const)("is decided up to the fold, along %s", (along, between, albedo, exists) => {
+    const diagram = traceBranches(loop, { along, between, within: WITHIN });
+    expect(diagram).toMatchObject({ complete: true, method: "tiles", folds: [{ kind: "corner", exists }] });
+    const exact = (((1 - albedo) * 1361) / 4 / (0.6 * core.STEFAN_BOLTZMANN)) ** 0.25;
+    const [{ at, atBracket, temperature }] = diagram.folds as [Diagram["folds"][number]];
+    expect(at).toBeCloseTo(exact, 11);
+    expect(temperature).toBeCloseTo(exact, 11);
+    expect(atBracket[1] - atBracket[0]).toBeLessThan(1e-11);
+    expect(diagram.branches).toHaveLength(3);
+  });
+
+  test("is decided where both sides answer", () => {
+    // with y = T − 300 − p/2: p = max(y, −2y), so y = p and y = −p/2 above p = 0
+    const moving = formulaLoop((t, p) => {
+      const y = sub(sub(t, 300), div(p, 2));
+      return sub(p, max(y, mul(-2, y)));
+    });
+    const diagram = traceBranches(moving, { along: "p", between: [-2, 2.1], within: [290, 310] });
+    expect(diagram).toMatchObject({ complete: true, folds: [{ kind: "corner", exists: "above" }] });
+    expect(Math.abs(diagram.folds[0]?.at as number)).toBeLessThan(1e-12);
+    const { states } = statesOnDiagram(moving, diagram, 1);
+    expect(states.map((s) => s.temperature)).toEqual([300, 301.5]);
+  });
+});
+
 describe("what is not decided is said", () => {
   test("two folds that are about to merge", () => {
     const cusp = formulaLoop((t, p) => sub(p, mul(square(sub(t, 300)), sub(t, 300))));

@@ -35,13 +35,12 @@ export function coverAlbedo(d: Lit, covers: readonly Cover[], path: string, from
 function openAlbedo(d: Lit, covers: Numbered, from: Sources): Value {
   const rest = covers.findIndex(({ cover }) => cover.share === "rest");
   const last = rest < 0 ? covers.length - 1 : rest;
-  const albedos = covers.map(({ cover, at }) => albedoOf(d, cover, at, from));
-  const bare = albedos[last] as Value;
+  const albedoAt = ({ cover, at }: Numbered[number]) => albedoOf(d, cover, at, from);
+  const bare = albedoAt(covers[last] as Numbered[number]);
   if (covers.length === 1) return bare;
+  const others = covers.filter((_, i) => i !== last);
   return mixAlbedo({
-    covers: covers.flatMap(({ at }, i) =>
-      i === last ? [] : [{ fraction: from.wire(`${at}.share`), albedo: albedos[i] as Value }],
-    ),
+    covers: others.map((each) => ({ fraction: from.wire(`${each.at}.share`), albedo: albedoAt(each) })),
     bare,
   });
 }

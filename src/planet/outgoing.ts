@@ -43,7 +43,7 @@ function emission(written: Longwave, path: string, from: Sources, report: Record
   }
   if (!("opticalDepth" in written)) return callWritten(written, path, from);
   const opticalDepth = depth(written.opticalDepth, `${path}.opticalDepth`, from);
-  report.opticalDepth = opticalDepth;
+  if (depthLaws(written.opticalDepth).length > 0) report.opticalDepth = opticalDepth;
   return callWritten(written, path, from, { opticalDepth });
 }
 

@@ -17,9 +17,9 @@ export function planetBudget(d: PlanetDescription, from: Sources): Budget {
   const { wire } = from;
   const flux = meanFlux(d, wire);
   const light = sharedSunlight(d, from);
-  const { longwave, report } = outgoing(d, from);
   const redistribution = redistributionOf(d, wire);
   const internalFlux = d.internalHeat === undefined ? 0 : wire("internalHeat");
+  const { longwave, report } = outgoing(d, from);
   const { heating, exchange } = sunlightFlows(light, { flux, redistribution, whole: isWhole(d) });
   const { albedo, surfaceAlbedo } = light;
   return {

@@ -22,8 +22,9 @@ export function fluxWays(d: Lit): Way[] {
     ways.push({
       uses: [...luminosities.flatMap((way) => way.uses), ...distance.uses],
       of: (wire) => {
+        const lights = luminosities.map((way) => way.of(wire));
         const at = distance.of(wire);
-        return fluxOf(luminosities.map((way) => ({ luminosity: way.of(wire), distance: at })));
+        return fluxOf(lights.map((luminosity) => ({ luminosity, distance: at })));
       },
     });
   }

@@ -4,6 +4,7 @@ import fs from "node:fs";
 
 export const doors = [
   "index", // laws, loops and states; needs no package
+  "chart", // pictures and tables of results; needs no package
   "planet", // descriptions of planets; needs mathjs and zod
 ];
 

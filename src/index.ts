@@ -8,6 +8,7 @@ export { iceShare } from "./albedo/iceShare.ts";
 export { mixAlbedo } from "./albedo/mixAlbedo.ts";
 export { quadraticAlbedo } from "./albedo/quadraticAlbedo.ts";
 export { rampAlbedo } from "./albedo/rampAlbedo.ts";
+export { stepAlbedo } from "./albedo/stepAlbedo.ts";
 export { surfaceShareBelowCloud } from "./albedo/surfaceShareBelowCloud.ts";
 export { tanhAlbedo } from "./albedo/tanhAlbedo.ts";
 export { twoBandAlbedo } from "./albedo/twoBandAlbedo.ts";
@@ -88,6 +89,7 @@ export {
   product,
   sqrt,
   square,
+  step,
   sub,
   sum,
   tanh,
@@ -187,6 +189,12 @@ export { MASS_LUMINOSITY_STEPS, massLuminosity } from "./star/massLuminosity.ts"
 export { stellarBrightening } from "./star/stellarBrightening.ts";
 export { stellarFlux } from "./star/stellarFlux.ts";
 export { stellarLuminosity } from "./star/stellarLuminosity.ts";
+export {
+  type BudgetCurve,
+  type BudgetCurveOptions,
+  type BudgetPoint,
+  budgetCurve,
+} from "./states/budgetCurve.ts";
 export { type FindStatesOptions, findStates } from "./states/findStates.ts";
 export { type FindStatesForOptions, findStatesFor, type GivenColumns } from "./states/findStatesFor.ts";
 export type { Note, NoteCode } from "./states/note.ts";

@@ -1,0 +1,24 @@
+// Round places on an axis.
+import type { Range } from "../ground/range.ts";
+import { numeral } from "./wording.ts";
+
+/** A place on an axis and what is written there. */
+export interface Tick {
+  readonly at: number;
+  readonly text: string;
+}
+
+/** Multiples of 1, 2 or 5 times a power of ten in a range: about as many as asked for. */
+export function ticksIn([low, high]: Range, about: number): Tick[] {
+  const least = (high - low) / about;
+  let power = 1;
+  while (power > least) power /= 10;
+  while (power * 10 <= least) power *= 10;
+  const step = [1, 2, 5, 10].map((k) => k * power).find((s) => s >= least) as number;
+  const ticks: Tick[] = [];
+  for (let i = Math.ceil(low / step); i * step <= high; i++) {
+    // 12 digits: a multiple of a decimal fraction is written as people write it
+    ticks.push({ at: i * step, text: numeral(i * step, 12) });
+  }
+  return ticks;
+}

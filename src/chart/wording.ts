@@ -1,0 +1,40 @@
+// How numbers, units and names are written in tables and pictures.
+import type { Range } from "../ground/range.ts";
+
+const raised = (digits: string): string =>
+  digits.replace(/[-\d]/g, (digit) => "⁰¹²³⁴⁵⁶⁷⁸⁹"[Number(digit)] ?? "⁻");
+
+/** A number with so many digits, a real minus sign and a raised exponent. */
+export const numeral = (value: number, digits = 6): string =>
+  String(Number(value.toPrecision(digits)))
+    .replace(/e\+?(.*)/, (_, power: string) => `×10${raised(power)}`)
+    .replace(/^-/, "−");
+
+/** The same with its sign, also if that is +. */
+export const signed = (value: number): string => (value > 0 ? "+" : "") + numeral(value, 4);
+
+/** Lowest and highest value. */
+export const rangeText = ([low, high]: Range, digits?: number): string =>
+  `${numeral(low, digits)} to ${numeral(high, digits)}`;
+
+/** "W m-2" and "W.m**-2" as W m⁻²; nothing for "1". */
+export const unitText = (unit: string): string =>
+  unit === "1"
+    ? ""
+    : unit.replace(/\./g, " ").replace(/(?<=[a-z])(?:\*\*)?(-?\d+)/gi, (_, power) => raised(power));
+
+/** A name with its unit, as on an axis. */
+export const titled = (name: string, unit: string): string =>
+  unitText(unit) === "" ? name : `${name} (${unitText(unit)})`;
+
+/** The mark of the i-th of several things: a letter, and a number where there is none left. */
+export const letterOf = (i: number): string => (i < 26 ? String.fromCharCode(97 + i) : String(i + 1));
+
+export const FLUX = "W m-2";
+export const FEEDBACK = "W m-2 K-1";
+
+/** What HTML and SVG allow: no markup, and no letter that XML cannot hold. */
+export const escaped = (text: unknown): string =>
+  String(text)
+    .replace(/[\p{Cc}\p{Cs}\ufffe\uffff]/gu, " ")
+    .replace(/[&<>"']/g, (letter) => `&#${letter.charCodeAt(0)};`);

@@ -7,6 +7,7 @@ export type {
   MissingField,
   OrbitAveraging,
   PlaceTemperatures,
+  Sensitivity,
   Starlight,
   StateAppraisal,
   StatedFlux,

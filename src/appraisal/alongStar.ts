@@ -1,12 +1,14 @@
 // The given of a planet's loop that stands for the brightness of its star.
 import type { Brightening } from "../branches/brightening.ts";
+import type { Loop } from "../loop/types.ts";
 import type { Planet } from "../planet/planetTypes.ts";
 import { type ReadPlanetOptions, readPlanet } from "../planet/readPlanet.ts";
 
-/** A planet whose budget depends on its star through one given. */
+/** A budget that depends on its star through one given. */
 export interface AlongStar {
-  readonly planet: Planet;
-  /** `star.luminosity` or `orbit.flux`. */
+  /** The planet's own loop, or the same budget with a luminosity in place of radius and effective temperature. */
+  readonly loop: Loop;
+  /** A luminosity or `orbit.flux`. */
   readonly along: string;
   readonly now: number;
   readonly brightening: Brightening | null;
@@ -14,25 +16,30 @@ export interface AlongStar {
 
 /**
  * The given to follow as the star brightens; null where there are several stars. A star that is told by radius and effective
- * temperature is told by its luminosity instead, in the same planet.
+ * temperature is told by its luminosity as well, which then comes first.
  */
 export function alongStar(planet: Planet, options: ReadPlanetOptions): AlongStar | null {
-  const direct = ["star.luminosity", "orbit.flux"].find((name) => has(planet, name));
-  if (direct !== undefined) return follow(planet, direct);
-  const [star, ...others] = planet.facts.stars;
+  const { stars } = planet.facts;
+  if (has(planet, "orbit.flux")) return follow(planet, "orbit.flux");
+  const [star] = stars;
+  if (!star || stars.length > 1) return null;
+  const along = `${star.path}.luminosity`;
+  if (has(planet, along)) return follow(planet, along);
+  if (star.luminosity === null) return null;
   const { description } = planet;
-  if (!star || others.length > 0 || star.luminosity === null || Array.isArray(description.star)) return null;
-  const { radius: _, effectiveTemperature: __, ...rest } = description.star ?? {};
   const luminosity = { value: star.luminosity, unit: "W" };
-  const lit = readPlanet({ ...description, star: { ...rest, luminosity } }, options);
-  return has(lit, "star.luminosity") ? follow(lit, "star.luminosity") : null;
+  const lit = Array.isArray(description.star)
+    ? [{ ...description.star[0], luminosity }]
+    : { ...description.star, luminosity };
+  const told = readPlanet({ ...description, star: lit }, options);
+  return has(told, along) ? follow(told, along) : null;
 }
 
 const has = (planet: Planet, name: string): boolean =>
   planet.loop.givens.some((given) => given.name === name);
 
-function follow(planet: Planet, along: string): AlongStar {
-  const now = planet.loop.givens.find((given) => given.name === along)?.value as number;
-  const rate = planet.facts.stars[0]?.brightening ?? null;
-  return { planet, along, now, brightening: rate === null ? null : { rate } };
+function follow({ loop, facts }: Planet, along: string): AlongStar {
+  const now = loop.givens.find((given) => given.name === along)?.value as number;
+  const rate = facts.stars.length === 1 ? (facts.stars[0]?.brightening ?? null) : null;
+  return { loop, along, now, brightening: rate === null ? null : { rate } };
 }

@@ -18,7 +18,7 @@ export interface StatedFlux {
 
 /** The light that reaches the planet. */
 export interface Starlight {
-  /** W; null where it is neither given nor follows. */
+  /** Of all stars that the planet orbits together, W; null where it is neither given nor follows. */
   readonly luminosity: number | null;
   /** Semi-major axis, m. */
   readonly semiMajorAxis: number | null;
@@ -31,9 +31,11 @@ export interface Starlight {
   readonly mean: StatedFlux;
   readonly periastron: StatedFlux;
   readonly apoastron: StatedFlux;
+  /** What stars that it does not orbit add, at their distances; in none of the fluxes above. Null where there are none. */
+  readonly companions: StatedFlux | null;
 }
 
-/** An equilibrium temperature at the semi-major axis, under an albedo and a redistribution that everybody uses. */
+/** An equilibrium temperature for the flux at the semi-major axis, under an albedo and a redistribution that everybody uses. */
 export interface ConventionalTemperature {
   readonly albedo: number;
   readonly redistribution: number;
@@ -45,17 +47,24 @@ export interface ConventionalTemperature {
 
 /** Temperatures of re-radiation. None of them is the temperature of a surface below an atmosphere. */
 export interface EquilibriumTemperatures {
-  /** As described; null where albedo or redistribution are not given, or where the albedo answers to temperature. */
+  /** As described; null where albedo or redistribution are not given, or where the albedo answers to temperature: see each state. */
   readonly described: PlanetEquilibriumTemperature | null;
   readonly conventional: readonly ConventionalTemperature[];
-  /** For the described albedo, without internal heat: null where that is no number. */
+  /** For the described albedo, flux and internal heat: null where the albedo is no number. */
   readonly places: PlaceTemperatures | null;
-  /** For the orbit's mean flux, and for its mean temperature with albedo 0 and f = 1/4; they differ where e > 0. */
-  readonly orbit: { readonly ofMeanFlux: number; readonly meanOverTime: number };
+  /**
+   * Of the orbit's mean flux, and the mean over time of the temperature of the moment, with albedo 0 and f = 1/4; they differ
+   * where e > 0. The second is null where stars shine that the planet does not orbit.
+   */
+  readonly orbit: { readonly ofMeanFlux: number; readonly meanOverTime: number | null };
 }
 
-/** Temperatures of places, K, as heat stays where it falls (`still`) or is spread over the planet (`spread`). */
+/**
+ * Temperatures of re-radiation of places of a planet that keeps one side to its star, K, where no heat is transported
+ * (`still`) and where it is spread over the whole planet (`spread`).
+ */
 export interface PlaceTemperatures {
+  /** Under the star, without transport of heat: f = 1. */
   readonly substellar: number;
   readonly day: { readonly still: number; readonly spread: number };
   readonly night: { readonly still: number; readonly spread: number };
@@ -73,16 +82,31 @@ export interface OrbitAveraging {
 export interface SurfacePhases {
   /** Pa. */
   readonly pressure: number;
-  /** What pure water is at this temperature and pressure. */
+  /** What pure water is at this temperature and pressure. Ice is taken to melt at the triple point. */
   readonly water: "ice" | "liquid" | "vapour" | "supercritical";
   /** Saturation pressure of water at the temperature of the surface, Pa; null outside of the range of the published lines. */
   readonly saturationPressure: number | null;
   /** Where water boils at this pressure, K; null where it does not. */
   readonly boilingTemperature: number | null;
-  /** Where carbon dioxide of this pressure freezes, K; null outside of the published range. */
+  /** Where carbon dioxide freezes if the whole pressure is its own, K; less of it freezes colder. Null outside of the range. */
   readonly carbonDioxideFrostPoint: number | null;
-  /** Whether the surface is below that; null where it is not known. */
+  /** Whether the surface is below that; null where that is not known. */
   readonly carbonDioxideFreezes: boolean | null;
+}
+
+/** How the temperature of a climate answers to an input, to first order along the branch: −(∂N/∂p)/λ. */
+export interface Sensitivity {
+  /** The input, such as `albedo.warm`. */
+  readonly path: string;
+  /** Its unit. */
+  readonly unit: string;
+  /** K for one more of its unit. */
+  readonly perUnit: number;
+  /** K for 1 % more of its value. */
+  readonly perPercent: number;
+  /** K that its lower and its upper error make, with their signs; null where none is given. */
+  readonly minus: number | null;
+  readonly plus: number | null;
 }
 
 /** What is said of one state. */
@@ -92,19 +116,28 @@ export interface StateAppraisal {
   readonly equilibriumTemperature: number;
   /** Temperature of the state less its equilibrium temperature, K. */
   readonly greenhouseWarming: number;
+  /** With the albedo of this state; null where that is beyond 0 and 1, which a note says. */
+  readonly places: PlaceTemperatures | null;
   readonly averaging: OrbitAveraging;
   /** What holds it; null for a state that does not hold. */
   readonly feedbacks: Feedbacks | null;
-  /** How far the star may brighten or fade; null for a state that does not hold, and where nothing stands for the star. */
+  /** What would change it, by size of the change for 1 %; null for a state that does not hold. */
+  readonly sensitivities: readonly Sensitivity[] | null;
+  /** How far the star may brighten or fade; null for a state that does not hold, and where no one given stands for the star. */
   readonly margins: TippingMargins | null;
   /** Null where no surface pressure is given. */
   readonly surface: SurfacePhases | null;
 }
 
-/** A published limit of the habitable zone, or one of the planet's own budget, and where the planet is. */
+/**
+ * A published limit of the habitable zone, or one of the planet's own budget, and where the planet is. What a planet is like
+ * there does not follow.
+ */
 export interface StatedLimit {
   /** What the limit is, such as `runaway greenhouse`. */
   readonly name: string;
+  /** Which edge of the zone; null for a limit of the planet's own budget. */
+  readonly edge: "inner" | "outer" | null;
   /** Where it is published; null for a limit of the planet's own budget. */
   readonly paper: string | null;
   readonly doi: string | null;
@@ -112,15 +145,17 @@ export interface StatedLimit {
   readonly massEarths: number | null;
   /** Flux at the limit. */
   readonly limit: StatedFlux;
-  /** Distance at which the star gives this flux, m. */
+  /** Distance at which the star gives this flux, m; null where its luminosity is not known. */
   readonly distance: number | null;
   /** Mean flux of the planet over the flux of the limit. */
   readonly ratio: number;
+  /** Whether the planet gets more light than at the limit, less, or one after the other along its orbit. */
+  readonly position: "nearer" | "farther" | "crosses";
   /** K, at the limit; null where none is published. */
   readonly temperature: number | null;
 }
 
-/** A field that was left out, and what cannot be said without it. */
+/** What is not given and does not follow, and what cannot be said without it. */
 export interface MissingField {
   readonly path: string;
   readonly text: string;
@@ -128,10 +163,11 @@ export interface MissingField {
 
 /** Where a law or a number of the appraisal is published. */
 export interface AppraisalSource {
-  /** Laws and inputs that rest on it. */
+  /** Laws, inputs and cautions that rest on it. */
   readonly of: readonly string[];
   readonly source: string;
-  readonly doi: string | null;
+  /** All that stand in it, without `doi:`. */
+  readonly dois: readonly string[];
 }
 
 /** What `appraisePlanet` returns. */
@@ -141,7 +177,7 @@ export interface Appraisal {
   readonly version: string;
   readonly name: string | null;
   readonly star: string | null;
-  /** The description as it was given. */
+  /** The description as it was given, copied. */
   readonly description: unknown;
   readonly inputs: readonly PlanetInput[];
   readonly missing: readonly MissingField[];
@@ -157,6 +193,7 @@ export interface Appraisal {
   readonly habitableZone: readonly StatedLimit[];
   /** Where the planet's own stable branches end. */
   readonly ownLimits: readonly StatedLimit[];
+  /** Null where albedo or redistribution are not given. */
   readonly assumptions: PlanetAssumptions | null;
   readonly notes: readonly AppraisalNote[];
   readonly sources: readonly AppraisalSource[];

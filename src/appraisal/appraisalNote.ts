@@ -3,8 +3,10 @@ import type { PlanetNote } from "../planet/planetNote.ts";
 
 /**
  * What a note of an appraisal is about. `albedo-of-another-star`: one number for the albedo under a cool star.
- * `eccentric-orbit`: the orbit is far from a circle. `average-not-favoured`: the heat capacity speaks for the other average.
- * `star-outside-limits`: no limits are published for such a star. `slow-rotation`: the limits are for a planet that turns fast.
+ * `eccentric-orbit`: the orbit is far from a circle. `average-not-favoured`: the heat capacity does not speak for the average
+ * over the orbit that was taken.
+ * `star-outside-limits`: no limits are published for such a star. `several-stars`: the limits are for the light of one of them.
+ * `slow-rotation`: the limits are for a planet that turns fast.
  * `incomplete-budget`: no states, because a part of the budget is not given. `published-temperature`: what a table's
  * temperature may mean.
  */
@@ -13,6 +15,7 @@ export type AppraisalNoteCode =
   | "eccentric-orbit"
   | "average-not-favoured"
   | "star-outside-limits"
+  | "several-stars"
   | "slow-rotation"
   | "incomplete-budget"
   | "published-temperature";

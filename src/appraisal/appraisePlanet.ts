@@ -6,13 +6,17 @@ import { checkKeys } from "../ground/names.ts";
 import type { Range } from "../ground/range.ts";
 import { VERSION } from "../ground/version.ts";
 import { sourcesOf } from "../loop/sourcesOf.ts";
+import type { PlanetFacts } from "../planet/facts.ts";
+import { plainCopy } from "../planet/plainCopy.ts";
 import { readPlanet } from "../planet/readPlanet.ts";
 import { alongStar } from "./alongStar.ts";
 import type { Appraisal } from "./appraisal.ts";
-import { completed } from "./completed.ts";
+import { completed, hasBudget as isWhole } from "./completed.ts";
 import { equilibriumTemperatures } from "./equilibriumTemperatures.ts";
+import { hostOf } from "./hostOf.ts";
 import { lawsBeside } from "./lawsBeside.ts";
 import { ownLimits, publishedLimits } from "./limits.ts";
+import { missingFacts } from "./missingFacts.ts";
 import { notesOfAppraisal } from "./notesOfAppraisal.ts";
 import { sourcesOfAppraisal } from "./sourcesOfAppraisal.ts";
 import { starlightOf } from "./starlightOf.ts";
@@ -37,8 +41,8 @@ const CAUTION =
  * every published limit of the habitable zone, and where the planet's own climates end; water and CO₂ frost at the surface
  * where its pressure is given; assumptions, cautions and sources. It says nothing of life, and gives no score.
  *
- * The description is that of `readPlanet`, and may be incomplete: without `albedo`, `longwave` or `redistribution` there
- * are no states, without `heatCapacity` no times; `missing` says so. Inputs that contradict each other are noted, and the
+ * The description is that of `readPlanet`, and may be incomplete: without `albedo` (or `surface`), `longwave` or
+ * `redistribution` there are no states, without `heatCapacity` no times; `missing` says so. Inputs that contradict each other are noted, and the
  * first is used. All numbers in SI. The record survives `JSON.stringify`; `toText`, `toMarkdown` and `toRows` write it.
  *
  * Throws what `readPlanet` throws, except for contradictions, and what `findStates` throws for `within` and `effort`.
@@ -54,67 +58,84 @@ const CAUTION =
 export function appraisePlanet(description: unknown, options: AppraisePlanetOptions = {}): Appraisal {
   checkKeys(options, "appraisePlanet", ["within", "effort"]);
   const { within = WITHIN, effort } = options;
-  const { description: whole, missing, hasBudget } = completed(description);
+  const isObject = typeof description === "object" && description !== null;
+  const given = isObject ? plainCopy(description) : description;
+  const whole = completed(given);
+  const { filled } = whole;
+  const hasBudget = isWhole(whole);
   const reading = { contradictions: "note" } as const;
-  const planet = readPlanet(whole, reading);
-  const { facts, assumptions } = planet;
+  const planet = readPlanet(whole.description, reading);
+  const { facts, loop } = planet;
   const starlight = starlightOf(facts);
+  const inputs = planet.inputs.filter(({ path }) => !filled.has(fieldOf(path)));
   const star = hasBudget ? alongStar(planet, reading) : null;
-  const loop = (star?.planet ?? planet).loop;
   const climates: Climates = hasBudget
-    ? statesOfPlanet({ loop, facts, star }, { within, effort })
+    ? statesOfPlanet({ loop, facts, inputs, star }, { within, effort })
     : { found: null, states: [], diagram: null };
-  const albedoIsNumber = hasBudget && assumptions.albedo !== null;
-  const ground = { albedo: assumptions.albedo ?? 0, internalFlux: assumptions.internalHeat };
-  const temperature = facts.stars[0]?.effectiveTemperature ?? null;
-  const absent = new Set(missing.map(({ path }) => path));
-  const inputs = planet.inputs.filter(({ path }) => !absent.has(path.split(/[.[]/)[0] as string));
-  const habitableZone = publishedLimits(temperature, starlight);
+  const { states } = climates;
+  const hasAlbedo = !filled.has("albedo") && !filled.has("surface");
+  const hasShare = hasAlbedo && !filled.has("redistribution");
+  const { albedo, internalHeat } = planet.assumptions;
+  const ground = { flux: facts.meanFlux, albedo: albedo ?? 0, internalFlux: internalHeat };
   const equilibrium = equilibriumTemperatures(
     starlight,
-    hasBudget ? planet.equilibriumTemperature : null,
-    albedoIsNumber ? ground : null,
+    hasShare ? planet.equilibriumTemperature : null,
+    hasAlbedo && albedo !== null ? ground : null,
   );
-  const { states } = climates;
-  const used = [
-    ...(habitableZone.length > 0 ? ["star.effectiveTemperature"] : []),
-    ...(facts.surfacePressure === null ? [] : ["atmosphere.pressure"]),
-    ...(facts.orbitalPeriod === null ? [] : ["orbit.period", "star.mass"]),
-    ...(facts.rotationPeriod === null ? [] : ["rotation.period"]),
+  const host = hostOf(facts);
+  const subject = { effectiveTemperature: host?.effectiveTemperature ?? null, mass: facts.mass };
+  const habitableZone = publishedLimits(subject, starlight);
+  const used = inputsBeside(facts, habitableZone.length > 0);
+  const notes = [
+    ...planet.notes.filter(({ code, about }) => {
+      if (code === "assumption") return !filled.has(fieldOf(about));
+      return code !== "input-unused" || (hasBudget && !used.has(about));
+    }),
+    ...notesOfAppraisal({ planet, states, hasBudget }),
   ];
+  const laws = sourcesOf(loop).filter(({ law }) => hasBudget || LAWS_OF_LIGHT.includes(law));
+  const beside = lawsBeside({ inputs, starlight, equilibrium, habitableZone, states });
   return deepFreeze({
     format: "thermostead-appraisal-1",
     version: VERSION,
     name: planet.description.name ?? null,
-    star: facts.stars[0]?.name ?? null,
-    description,
+    star: host?.name ?? null,
+    description: given,
     inputs,
-    missing,
+    missing: [...whole.missing, ...missingFacts(facts, { hasBudget })],
     starlight,
     equilibrium,
     ...climates,
     habitableZone,
     ownLimits: ownLimits(states, starlight),
-    assumptions: hasBudget ? assumptions : null,
-    notes: [
-      ...planet.notes.filter((note) => counts(note, { hasBudget, used })),
-      ...notesOfAppraisal(planet, states, hasBudget),
-    ],
-    sources: sourcesOfAppraisal(
-      hasBudget ? sourcesOf(loop) : [],
-      lawsBeside({ starlight, equilibrium, habitableZone, states }),
-      inputs,
-    ),
+    assumptions: hasShare ? planet.assumptions : null,
+    notes,
+    sources: sourcesOfAppraisal(laws, beside, inputs, notes),
     constants: CONSTANT_SET,
     caution: CAUTION,
   } satisfies Appraisal) as Appraisal;
 }
 
-/** Leaves out what is said of a budget that is not there, and of inputs that have no part in states but in the appraisal. */
-function counts(
-  { code, about }: Appraisal["notes"][number],
-  { hasBudget, used }: { hasBudget: boolean; used: readonly string[] },
-): boolean {
-  if (code === "assumption") return hasBudget;
-  return code !== "input-unused" || (hasBudget && !used.includes(about));
+/** What a loop uses that is not its budget. */
+const LAWS_OF_LIGHT: readonly string[] = [
+  "stellarLuminosity",
+  "stellarFlux",
+  "combinedFlux",
+  "semiMajorAxis",
+];
+
+/** The field of a description to which a path belongs. */
+const fieldOf = (path: string): string => path.split(/[.[]/)[0] as string;
+
+/** Inputs that have no part in states but in the rest of an appraisal. */
+function inputsBeside(facts: PlanetFacts, hasLimits: boolean): ReadonlySet<string> {
+  const stars = facts.stars.map(({ path }) => path);
+  return new Set([
+    ...(hasLimits
+      ? ["mass", ...stars.flatMap((at) => [`${at}.effectiveTemperature`, `${at}.luminosity`])]
+      : []),
+    ...(facts.surfacePressure === null ? [] : ["atmosphere.pressure"]),
+    ...(facts.orbitalPeriod === null ? [] : ["orbit.period", ...stars.map((at) => `${at}.mass`)]),
+    ...(facts.rotationPeriod === null ? [] : ["rotation.period"]),
+  ]);
 }

@@ -5,37 +5,46 @@ import type { MissingField } from "./appraisal.ts";
 export interface Completed {
   readonly description: unknown;
   readonly missing: readonly MissingField[];
-  /** False where a part of the budget was filled, so that its states mean nothing. */
-  readonly hasBudget: boolean;
+  /** The fields that were filled: what follows from them means nothing. */
+  readonly filled: ReadonlySet<string>;
 }
 
 type Fields = Readonly<Record<string, unknown>>;
 
+/** Without these there is no budget. */
+const BUDGET: readonly string[] = ["redistribution", "albedo", "surface", "longwave"];
+
+/** False where a part of the budget was filled, so that its states mean nothing. */
+export const hasBudget = ({ filled }: Completed): boolean => !BUDGET.some((field) => filled.has(field));
+
 /** Fills the fields that an appraisal can do without; anything else is left to the checks of a description. */
 export function completed(description: unknown): Completed {
-  if (!isRecord(description)) return { description, missing: [], hasBudget: true };
   const missing: MissingField[] = [];
-  const filled: Record<string, unknown> = { ...description };
-  const fill = (path: string, value: unknown, text: string) => {
-    if (filled[path] !== undefined) return;
-    filled[path] = value;
-    missing.push({ path, text });
+  const filled = new Set<string>();
+  if (!isRecord(description)) return { description, missing, filled };
+  const whole: Record<string, unknown> = { ...description };
+  const fill = (field: string, value: unknown, text: string) => {
+    if (whole[field] !== undefined) return;
+    whole[field] = value;
+    filled.add(field);
+    missing.push({ path: field, text });
   };
-  fill("redistribution", "global", "no states, and equilibrium temperatures by convention only");
-  if (filled.surface === undefined)
-    fill("albedo", 0, "no states, and equilibrium temperatures by convention only");
-  fill("longwave", { law: "greyEmission", emissivity: 1 }, "no states");
-  const hasBudget = missing.length === 0;
-  fill("heatCapacity", "unknown", "no times, and no word on which average over the orbit suits");
-  const { orbit } = filled;
-  if (isRecord(orbit) && isEccentric(orbit.eccentricity) && orbit.average === undefined) {
-    filled.orbit = { ...orbit, average: "flux" };
-    missing.push({
-      path: "orbit.average",
-      text: "the mean of the flux is taken, which suits a large thermal inertia",
-    });
+  fill("redistribution", "global", "no states, and no equilibrium temperature but by convention");
+  const dark = "no states, and no equilibrium temperature but by convention, nor those of places";
+  if (whole.albedo === undefined) {
+    // below air or clouds that act on sunlight it is the surface that is missing, and so it is where one is given
+    if (whole.surface !== undefined || hasSky(whole)) fill("surface", 0, dark);
+    else fill("albedo", 0, dark);
   }
-  return { description: filled, missing, hasBudget };
+  fill("longwave", { law: "greyEmission", emissivity: 1 }, "no states");
+  fill("heatCapacity", "unknown", "no times, and no word on which average over the orbit suits");
+  const { orbit } = whole;
+  if (isRecord(orbit) && isEccentric(orbit.eccentricity) && orbit.average === undefined) {
+    whole.orbit = { ...orbit, average: "flux" };
+    const text = "the mean of the flux is taken, which suits a large thermal inertia";
+    missing.push({ path: "orbit.average", text });
+  }
+  return { description: whole, missing, filled };
 }
 
 const isRecord = (value: unknown): value is Fields =>
@@ -45,3 +54,8 @@ function isEccentric(written: unknown): boolean {
   const value = isRecord(written) ? written.value : written;
   return value !== undefined && value !== 0;
 }
+
+const hasSky = ({ clouds, atmosphere }: Fields): boolean =>
+  [clouds, atmosphere].some(
+    (layer) => isRecord(layer) && (layer.reflectance !== undefined || layer.absorptance !== undefined),
+  );

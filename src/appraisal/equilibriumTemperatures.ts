@@ -15,6 +15,7 @@ import type {
   PlaceTemperatures,
   Starlight,
 } from "./appraisal.ts";
+import { withCompanions } from "./starlightOf.ts";
 
 /** The pairs that tables of planets quote for the flux at the semi-major axis, mostly without saying which. */
 const CONVENTIONAL = [
@@ -24,38 +25,40 @@ const CONVENTIONAL = [
   { albedo: 0.3, redistribution: REDISTRIBUTION_DAYSIDE, spread: "the day side" },
 ] as const;
 
-/** What re-radiates at a place: its Bond albedo and what comes from below, W m⁻². */
+/** What re-radiates at a place: the flux of all stars and what comes from below, W m⁻², and its Bond albedo. */
 export interface Ground {
+  readonly flux: number;
   readonly albedo: number;
   readonly internalFlux: number;
 }
 
 /** All equilibrium temperatures of a planet; `ground` is null where the albedo is not a number. */
 export function equilibriumTemperatures(
-  { mean, atSemiMajorAxis, eccentricity }: Starlight,
+  starlight: Starlight,
   described: PlanetEquilibriumTemperature | null,
   ground: Ground | null,
 ): EquilibriumTemperatures {
-  const { flux } = mean;
+  const { mean, atSemiMajorAxis, eccentricity, companions } = starlight;
+  const flux = withCompanions(atSemiMajorAxis.flux, starlight);
   const dark = { albedo: 0, redistribution: REDISTRIBUTION_GLOBAL };
   const overTime = temperatureMeanFlux({ fluxAtSemiMajorAxis: atSemiMajorAxis.flux, eccentricity });
   return {
     described,
     conventional: CONVENTIONAL.map(({ albedo, redistribution, spread }): ConventionalTemperature => {
-      const value = equilibriumTemperature({ flux: atSemiMajorAxis.flux, albedo, redistribution });
+      const value = equilibriumTemperature({ flux, albedo, redistribution });
       return { albedo, redistribution, spread, value };
     }),
-    places: ground && placeTemperatures(flux, ground),
+    places: ground && placeTemperatures(ground),
     orbit: {
-      ofMeanFlux: equilibriumTemperature({ flux, ...dark }),
-      meanOverTime: equilibriumTemperature({ flux: overTime, ...dark }),
+      ofMeanFlux: equilibriumTemperature({ flux: withCompanions(mean.flux, starlight), ...dark }),
+      meanOverTime: companions ? null : equilibriumTemperature({ flux: overTime, ...dark }),
     },
   };
 }
 
 /** Substellar point, day and night side between no transport of heat and a complete one. */
-function placeTemperatures(flux: number, ground: Ground): PlaceTemperatures {
-  const at = (redistribution: number) => equilibriumTemperature({ flux, ...ground, redistribution });
+export function placeTemperatures(ground: Ground): PlaceTemperatures {
+  const at = (redistribution: number) => equilibriumTemperature({ ...ground, redistribution });
   const between = (share: (ports: { transport: number }) => number) => ({
     still: at(share({ transport: 0 })),
     spread: at(share({ transport: 1 })),

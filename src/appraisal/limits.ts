@@ -1,37 +1,76 @@
 // Where the planet is among published limits, and where its own climates end.
 
 import type { Margin } from "../branches/margins.ts";
+import { EARTH_MASS_PARAMETER, GRAVITATION } from "../ground/constants.ts";
 import { habitableZoneDistance } from "../habitable/habitableZoneDistance.ts";
 import { habitableZoneFlux } from "../habitable/habitableZoneFlux.ts";
 import { HABITABLE_ZONE_LIMITS } from "../habitable/habitableZoneLimits.ts";
+import { interpolatedRunawayFlux } from "../habitable/interpolatedRunawayFlux.ts";
 import type { Starlight, StateAppraisal, StatedLimit } from "./appraisal.ts";
+import { rangeOf, takes } from "./portRange.ts";
+import { withCompanions } from "./starlightOf.ts";
 import { statedFlux } from "./stated.ts";
 
 /** The stars for which limits are published, K. */
-export const [COOLEST_STAR, HOTTEST_STAR] = habitableZoneFlux.card.inputs.effectiveTemperature.within;
+export const PUBLISHED_STARS = /* @__PURE__ */ rangeOf(habitableZoneFlux, "effectiveTemperature");
 
 /** Whether the limits are published for stars of this temperature, K. */
 export const limitsArePublished = (effectiveTemperature: number | null): effectiveTemperature is number =>
-  effectiveTemperature !== null &&
-  effectiveTemperature >= COOLEST_STAR &&
-  effectiveTemperature <= HOTTEST_STAR;
+  effectiveTemperature !== null && takes(habitableZoneFlux, "effectiveTemperature", effectiveTemperature);
 
-/** Every published limit, with the planet's mean flux over that of the limit. */
+/** What a limit depends on besides its paper: the star's effective temperature, K, and the planet's mass, kg. */
+export interface LimitSubject {
+  readonly effectiveTemperature: number | null;
+  readonly mass: number | null;
+}
+
+type Published = Pick<StatedLimit, "name" | "edge" | "paper" | "doi" | "massEarths"> & {
+  readonly flux: number;
+};
+
+/** Every published limit, and that of the runaway greenhouse for the planet's own mass; with the planet's flux over it. */
 export function publishedLimits(
-  effectiveTemperature: number | null,
-  { mean, luminosity }: Starlight,
+  { effectiveTemperature, mass }: LimitSubject,
+  starlight: Starlight,
 ): StatedLimit[] {
   if (!limitsArePublished(effectiveTemperature)) return [];
-  return HABITABLE_ZONE_LIMITS.map(({ name, paper, doi, massEarths, coefficients }) => {
-    const flux = habitableZoneFlux({ effectiveTemperature, ...coefficients });
-    return {
-      ...{ name, paper, doi, massEarths },
-      limit: statedFlux(flux),
-      distance: luminosity === null ? null : habitableZoneDistance({ luminosity, flux }),
-      ratio: mean.flux / flux,
-      temperature: null,
-    };
-  });
+  const published = HABITABLE_ZONE_LIMITS.map(
+    ({ name, edge, paper, doi, massEarths, coefficients }): Published => {
+      const flux = habitableZoneFlux({ effectiveTemperature, ...coefficients });
+      return { name, edge, paper, doi, massEarths, flux };
+    },
+  );
+  return [...published, ...ofOwnMass(effectiveTemperature, mass)].map(({ flux, ...limit }) => ({
+    ...limit,
+    limit: statedFlux(flux),
+    distance: distanceOf(flux, starlight.luminosity),
+    ...positionAt(flux, starlight),
+    temperature: null,
+  }));
+}
+
+/** The runaway greenhouse between the masses for which it was computed. */
+function ofOwnMass(effectiveTemperature: number, mass: number | null): Published[] {
+  if (mass === null || !takes(interpolatedRunawayFlux, "mass", mass)) return [];
+  const computed = HABITABLE_ZONE_LIMITS.find((l) => l.year === 2014 && l.name === "runaway greenhouse");
+  const { paper, doi } = computed as (typeof HABITABLE_ZONE_LIMITS)[number];
+  const massEarths = mass / (EARTH_MASS_PARAMETER / GRAVITATION);
+  const flux = interpolatedRunawayFlux({ effectiveTemperature, mass });
+  return [{ name: "runaway greenhouse, interpolated here", edge: "inner", paper, doi, massEarths, flux }];
+}
+
+const distanceOf = (flux: number, luminosity: number | null): number | null =>
+  luminosity === null || !takes(habitableZoneDistance, "luminosity", luminosity)
+    ? null
+    : habitableZoneDistance({ luminosity, flux });
+
+/** The planet at a flux: its mean flux over it, and on which side of it the orbit lies. */
+function positionAt(flux: number, starlight: Starlight): Pick<StatedLimit, "ratio" | "position"> {
+  const [mean, most, least] = [starlight.mean, starlight.periastron, starlight.apoastron].map((at) =>
+    withCompanions(at.flux, starlight),
+  ) as [number, number, number];
+  const position = least >= flux ? "nearer" : most <= flux ? "farther" : "crosses";
+  return { ratio: mean / flux, position };
 }
 
 /** The folds and corners at which the climates that hold end as the star brightens or fades. */
@@ -47,14 +86,15 @@ export function ownLimits(
     );
     return ended.map(({ direction, end }: Margin): StatedLimit => {
       const brighter = end.at / at;
-      const change = direction === "rise" ? "brightens" : "fades";
       return {
-        name: `the climate at ${state.temperature.toFixed(2)} K ends in a ${end.kind} as the star ${change}`,
-        ...{ paper: null, doi: null, massEarths: null },
+        name: `${end.kind} of the climate at ${state.temperature.toFixed(2)} K, star ${direction === "rise" ? "brighter" : "fainter"}`,
+        ...{ edge: null, paper: null, doi: null, massEarths: null },
         limit: statedFlux(mean.flux * brighter),
         // under today's star the same flux is met farther in, or out, by the inverse-square law
         distance: semiMajorAxis === null ? null : semiMajorAxis / Math.sqrt(brighter),
         ratio: 1 / brighter,
+        // a budget knows the mean flux alone, so that its orbit has no two sides
+        position: direction === "rise" ? "farther" : "nearer",
         temperature: end.temperature,
       };
     });

@@ -3,14 +3,15 @@
 import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
-import { thermalInertiaRatio } from "../orbit/thermalInertiaRatio.ts";
+import {
+  INSTANT_FLUX_INERTIA,
+  MEAN_FLUX_INERTIA,
+  thermalInertiaRatio,
+} from "../orbit/thermalInertiaRatio.ts";
 import { slopeKernel } from "../reading/slopeKernel.ts";
 import type { State } from "../states/state.ts";
 import type { OrbitAveraging } from "./appraisal.ts";
-
-/** Above this Π the mean flux is the better guide, below the other the temperature of the moment (Ji et al. 2023). */
-const SLOW = 1;
-const PROMPT = 0.01;
+import { takes } from "./portRange.ts";
 
 /** Reads Σ ∂(cooling)/∂T in a state, W m⁻² K⁻¹. */
 const emissionSlopeOf = /* @__PURE__ */ kept((loop: Loop) => {
@@ -35,22 +36,21 @@ export function orbitAveraging(
   if (period === null) return unknown("the orbital period is not known");
   const emissionSlope = emissionSlopeOf(loop)(state);
   if (!(emissionSlope > 0)) return unknown("emission does not rise with temperature here");
-  const ratio = thermalInertiaRatio({ heatCapacity, period, emissionSlope });
-  if (ratio >= SLOW)
-    return {
-      thermalInertiaRatio: ratio,
-      favours: "flux",
-      text: "slow against the orbit: the mean flux decides",
-    };
-  if (ratio <= PROMPT)
-    return {
-      thermalInertiaRatio: ratio,
-      favours: "temperature",
-      text: "prompt: temperature follows the flux",
-    };
-  return {
+  const ports = { heatCapacity, period, emissionSlope };
+  const ranged = Object.entries(ports).every(([port, value]) => takes(thermalInertiaRatio, port, value));
+  if (!ranged) return unknown("heat capacity, period or emission is beyond what the law takes");
+  const ratio = thermalInertiaRatio(ports);
+  const said = (favours: OrbitAveraging["favours"], text: string): OrbitAveraging => ({
     thermalInertiaRatio: ratio,
-    favours: null,
-    text: "between the cases: neither average is a good guide",
-  };
+    favours,
+    text,
+  });
+  if (ratio >= MEAN_FLUX_INERTIA)
+    return said("flux", "slow against the orbit, the mean of the flux is the guide");
+  if (ratio <= INSTANT_FLUX_INERTIA)
+    return said(
+      "temperature",
+      "prompt, temperature follows the flux of the moment and its own mean is the guide",
+    );
+  return said(null, "between the cases, neither average is a good guide");
 }

@@ -3,14 +3,17 @@ import type { LawCard } from "../graph/card.ts";
 import type { LawSource } from "../loop/sourcesOf.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
 import type { AppraisalSource } from "./appraisal.ts";
+import type { AppraisalNote } from "./appraisalNote.ts";
 
-const DOI = /\b10\.\d{4,9}\/[^\s;,()]*[^\s;,().]/;
+/** Parentheses belong to a DOI where they are balanced, a full stop at its end does not. */
+const DOI = /\b10\.\d{4,9}\/(?:\([^\s()]*\)|[^\s;,()])*(?:\([^\s()]*\)|[^\s;,.()])/g;
 
-/** Sources of the laws in the loop, of those used beside it, of limits, and of the inputs that name theirs. */
+/** Sources of the laws in the loop, of those used beside it, of limits, and of the inputs and cautions that name theirs. */
 export function sourcesOfAppraisal(
   laws: readonly LawSource[],
   beside: readonly { readonly card: LawCard }[],
   inputs: readonly PlanetInput[],
+  notes: readonly AppraisalNote[],
 ): AppraisalSource[] {
   const bySource = new Map<string, Set<string>>();
   const add = (name: string, source: string) => {
@@ -21,9 +24,10 @@ export function sourcesOfAppraisal(
   for (const { law, source } of laws) add(law, source);
   for (const { card } of beside) add(card.name, card.source);
   for (const { path, source } of inputs) add(path, source ?? "");
+  for (const { code, source } of notes) add(code, source ?? "");
   return [...bySource].map(([source, of]) => ({
     of: [...of],
     source,
-    doi: DOI.exec(source)?.[0] ?? null,
+    dois: source.match(DOI) ?? [],
   }));
 }

@@ -4,15 +4,23 @@ import type { Diagram } from "../branches/diagram.ts";
 import { tippingMargins } from "../branches/tippingMargins.ts";
 import { traceBranches } from "../branches/traceBranches.ts";
 import { analyseFeedbacks } from "../feedback/analyseFeedbacks.ts";
+import { equilibriumTemperature } from "../greenhouse/equilibriumTemperature.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { PlanetFacts } from "../planet/facts.ts";
+import type { PlanetInput } from "../planet/planetInput.ts";
 import { findStates } from "../states/findStates.ts";
 import type { FoundStates, State } from "../states/state.ts";
 import type { AlongStar } from "./alongStar.ts";
 import type { StateAppraisal } from "./appraisal.ts";
+import { placeTemperatures } from "./equilibriumTemperatures.ts";
 import { orbitAveraging } from "./orbitAveraging.ts";
+import { takes } from "./portRange.ts";
+import { sensitivitiesOf } from "./sensitivities.ts";
 import { surfacePhases } from "./surfacePhases.ts";
+
+/** What the budget of every planet reports. */
+type Reported = Readonly<Record<"flux" | "albedo" | "equilibriumTemperature", number>>;
 
 /** How far the star is brightened and dimmed in looking for the end of a branch. */
 const FACTORS = [0.2, 5] as const;
@@ -34,26 +42,33 @@ export interface Climates {
 export interface Subject {
   readonly loop: Loop;
   readonly facts: PlanetFacts;
+  readonly inputs: readonly PlanetInput[];
   readonly star: AlongStar | null;
 }
 
 /** All climates of a planet. */
-export function statesOfPlanet({ loop, facts, star }: Subject, { within, effort }: Search): Climates {
+export function statesOfPlanet({ loop, facts, inputs, star }: Subject, { within, effort }: Search): Climates {
   const spend = effort === undefined ? {} : { effort };
   const found = findStates(loop, { within, ...spend });
   const { heatCapacity, orbitalPeriod: period, surfacePressure } = facts;
-  const diagram = branchesOf(loop, found.states, star, { within, ...spend });
+  const diagram = branchesOf(found.states, star, { within, ...spend });
+  const internalFlux = inputs.find(({ path }) => path === "internalHeat")?.value ?? 0;
   const states = found.states.map((state): StateAppraisal => {
     const holds = state.stability === "stable";
-    const equilibriumTemperature = state.report.equilibriumTemperature as number;
+    const { flux, albedo, equilibriumTemperature: reradiating } = state.report as Reported;
     const { temperature } = state;
+    const feedbacks = holds ? analyseFeedbacks(loop, state) : null;
     return {
       state,
-      equilibriumTemperature,
-      greenhouseWarming: temperature - equilibriumTemperature,
+      equilibriumTemperature: reradiating,
+      greenhouseWarming: temperature - reradiating,
       averaging: orbitAveraging(loop, state, { heatCapacity, period }),
-      feedbacks: holds ? analyseFeedbacks(loop, state) : null,
-      margins: holds && star && diagram ? marginsOf(loop, state, star, diagram) : null,
+      places: takes(equilibriumTemperature, "albedo", albedo)
+        ? placeTemperatures({ flux, albedo, internalFlux })
+        : null,
+      feedbacks,
+      sensitivities: feedbacks && sensitivitiesOf(feedbacks, inputs),
+      margins: holds && star && diagram ? marginsOf(state, star, diagram) : null,
       surface: surfacePressure === null ? null : surfacePhases({ temperature, pressure: surfacePressure }),
     };
   });
@@ -62,22 +77,24 @@ export function statesOfPlanet({ loop, facts, star }: Subject, { within, effort 
 
 /** The diagram of all climates as the star brightens or fades; null where there is none that holds, or no given for the star. */
 function branchesOf(
-  loop: Loop,
   states: readonly State[],
   star: AlongStar | null,
   search: { readonly within: Range; readonly effort?: number },
 ): Diagram | null {
   if (star === null || !states.some((state) => state.stability === "stable")) return null;
-  const { along, now } = star;
+  const { loop, along, now } = star;
   const [low, high] = loop.givens.find((given) => given.name === along)?.within ?? [0, Number.MAX_VALUE];
   const between = [Math.max(FACTORS[0] * now, low), Math.min(FACTORS[1] * now, high)] as const;
   return traceBranches(loop, { along, between, ...search });
 }
 
-const marginsOf = (
-  loop: Loop,
+/** The budget along the star has the same flux in the same bits, so that a state of the planet's loop is one of it. */
+function marginsOf(
   state: State,
-  { along, brightening }: AlongStar,
+  { loop, along, brightening }: AlongStar,
   diagram: Diagram,
-): StateAppraisal["margins"] =>
-  tippingMargins(loop, state, { along, diagram, ...(brightening ? { brightening } : {}) });
+): StateAppraisal["margins"] {
+  const givens = Object.fromEntries(loop.givens.map(({ name, value }) => [name, value]));
+  const options = { along, diagram, ...(brightening ? { brightening } : {}) };
+  return tippingMargins(loop, { ...state, givens }, options);
+}

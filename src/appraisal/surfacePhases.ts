@@ -1,19 +1,19 @@
 // What water and carbon dioxide do at a surface of known temperature and pressure.
-import type { LawCard } from "../graph/card.ts";
 import { co2FrostPoint } from "../water/co2FrostPoint.ts";
 import { saturationPressureIce } from "../water/saturationPressureIce.ts";
 import { saturationPressureLiquid } from "../water/saturationPressureLiquid.ts";
 import { saturationTemperature } from "../water/saturationTemperature.ts";
 import type { SurfacePhases } from "./appraisal.ts";
+import { rangeOf, takes } from "./portRange.ts";
 
 /** The phases of pure water at a surface, and the frost point of an atmosphere of carbon dioxide. */
 export function surfacePhases(place: { temperature: number; pressure: number }): SurfacePhases {
   const { temperature, pressure } = place;
-  const frostPoint = holds(co2FrostPoint, "pressure", pressure) ? co2FrostPoint({ pressure }) : null;
+  const frostPoint = takes(co2FrostPoint, "pressure", pressure) ? co2FrostPoint({ pressure }) : null;
   return {
     pressure,
     ...water(temperature, pressure),
-    boilingTemperature: holds(saturationTemperature, "pressure", pressure)
+    boilingTemperature: takes(saturationTemperature, "pressure", pressure)
       ? saturationTemperature({ pressure })
       : null,
     carbonDioxideFrostPoint: frostPoint,
@@ -30,23 +30,12 @@ function water(temperature: number, pressure: number): Pick<SurfacePhases, "wate
     water: pressure >= saturationPressure ? phase : ("vapour" as const),
     saturationPressure,
   });
-  if (holds(saturationPressureLiquid, "temperature", temperature))
+  if (takes(saturationPressureLiquid, "temperature", temperature))
     return condensed(saturationPressureLiquid({ temperature }), "liquid");
-  if (holds(saturationPressureIce, "temperature", temperature))
+  if (takes(saturationPressureIce, "temperature", temperature))
     return condensed(saturationPressureIce({ temperature }), "ice");
   const hot = temperature > rangeOf(saturationPressureLiquid, "temperature")[1];
   if (!hot) return { water: "ice", saturationPressure: null };
   const supercritical = pressure > rangeOf(saturationTemperature, "pressure")[1];
   return { water: supercritical ? "supercritical" : "vapour", saturationPressure: null };
-}
-
-type Carded = { readonly card: Pick<LawCard, "inputs"> };
-
-/** The range of a port of a law: the ends of the published lines are written there and nowhere else. */
-const rangeOf = ({ card }: Carded, port: string): readonly [number, number] =>
-  (card.inputs as Readonly<Record<string, { within: readonly [number, number] }>>)[port]?.within ?? [0, 0];
-
-function holds(law: Carded, port: string, value: number): boolean {
-  const [low, high] = rangeOf(law, port);
-  return value >= low && value <= high;
 }

@@ -1,14 +1,12 @@
 // What the report says of the states of a planet.
-import type { TippingMargins } from "../branches/margins.ts";
 import type { Appraisal, StateAppraisal } from "./appraisal.ts";
-import { type Section, shown, signed, type Table } from "./report.ts";
+import { feedbackTable } from "./feedbackTable.ts";
+import { ledgerTable } from "./ledgerTable.ts";
+import { marginLines } from "./marginLines.ts";
+import { kelvin, type Section, shown, signed, type Table, YEAR } from "./report.ts";
 
-const YEAR = 365.25 * 86400;
-const GIGAYEAR = 1e9 * YEAR;
-const kelvin = (value: number) => value.toFixed(2);
-
-/** States, ledgers, what holds them, how far they are from an end, and their surfaces. */
-export function climateSections({ found, states }: Appraisal): Section[] {
+/** States, ledgers, what holds and what would change them, how far they are from an end, and their surfaces. */
+export function climateSections({ found, states, starlight, equilibrium }: Appraisal): Section[] {
   if (!found) return [];
   const range = `${found.within.join(" and ")} K`;
   const holding = states.filter((s) => s.feedbacks !== null);
@@ -17,11 +15,22 @@ export function climateSections({ found, states }: Appraisal): Section[] {
       title: `Climates with the surface between ${range}`,
       blocks: [...stateBlocks(states), ...searchLines(found)],
     },
+    {
+      title: "Equilibrium temperatures of places in each climate, K",
+      blocks: equilibrium.places ? [] : placeTable(states),
+    },
     { title: "Energy ledger of each climate that holds, W m-2", blocks: ledgerTable(holding) },
-    { title: "What holds each climate, W m-2 K-1", blocks: feedbackTable(holding) },
-    { title: "How far each climate is from an end of its branch", blocks: holding.flatMap(marginLines) },
-    { title: "Which average over the orbit suits", blocks: averagingLines(holding) },
-    { title: "Water and carbon dioxide at the surface", blocks: surfaceTable(states) },
+    { title: "What holds each climate", blocks: feedbackTable(holding) },
+    { title: "What would change each climate, to first order", blocks: sensitivityTable(holding) },
+    { title: "How far each climate is from an end of its branch", blocks: marginLines(holding) },
+    {
+      title: "Which average over the orbit suits",
+      blocks: [
+        ...(starlight.eccentricity === 0 ? ["the orbit is a circle, so that all averages are the same"] : []),
+        ...averagingLines(holding),
+      ],
+    },
+    { title: "Water and carbon dioxide at the surface", blocks: surfaceBlocks(states) },
   ];
 }
 
@@ -34,7 +43,7 @@ function stateBlocks(states: readonly StateAppraisal[]): Table[] {
     "e-folding, yr",
     "albedo",
     "T equilibrium, K",
-    "warming, K",
+    "greenhouse, K",
   ];
   const rows = states.map(({ state, equilibriumTemperature, greenhouseWarming }) => [
     state.temperature.toFixed(3),
@@ -43,128 +52,90 @@ function stateBlocks(states: readonly StateAppraisal[]): Table[] {
     state.eFoldingTime === null || state.eFoldingTime === 0 ? "-" : shown(state.eFoldingTime / YEAR, 4),
     state.report.albedo === undefined ? "" : state.report.albedo.toFixed(4),
     kelvin(equilibriumTemperature),
-    kelvin(greenhouseWarming),
+    signed(greenhouseWarming),
   ]);
   return [{ head, rows, right: [0, 2, 3, 4, 5, 6] }];
 }
 
-function searchLines({
-  complete,
-  proof,
-  within,
-  undecided,
-  states,
-}: NonNullable<Appraisal["found"]>): string[] {
+const LEGEND =
+  "lambda is what one kelvin more adds to the net flux, below 0 where the climate holds; greenhouse is T surface - T equilibrium";
+
+function searchLines(found: NonNullable<Appraisal["found"]>): string[] {
+  const { complete, proof, within, undecided, states } = found;
   const range = `between ${within.join(" and ")} K`;
   const none = states.length === 0 ? "no state" : "no other state";
-  const said = complete ? `proved: ${none} ${range}` : `${proof}: other states ${range} may exist`;
+  const legend = states.length === 0 ? [] : [LEGEND];
+  const open = proof === "sampled" ? "found by sampling, not proved" : "not all is decided";
   return [
-    said,
-    ...undecided.map((u) => `undecided, ${u.kind}: ${u.interval.map((t) => shown(t)).join(" to ")} K`),
+    ...legend,
+    complete ? `proved: ${none} ${range}` : `${open}: other states ${range} may exist`,
+    ...undecided.map(
+      ({ kind, interval }) => `undecided (${kind}) from ${interval.map((t) => shown(t, 8)).join(" to ")} K`,
+    ),
   ];
 }
 
-/** One column for each state; the last rows show that what goes in comes out or is stored. */
-function ledgerTable(states: readonly StateAppraisal[]): Table[] {
-  const ledgers = states.map((s) => s.state.ledger);
-  const [first] = ledgers;
-  if (!first) return [];
-  const number = (value: number) => value.toFixed(4).replace(/^-(0\.0*)$/, "$1");
-  const flows = first.flows.map(({ name, from, to }, i) => [
-    name,
-    `${from} to ${to}`,
-    ...ledgers.map((ledger) => number(ledger.flows[i]?.value ?? 0)),
-  ]);
-  const balanced = first.reservoirs.filter((r) => r.storage !== null).map((r) => r.name);
-  const sums = balanced.flatMap((name) => {
-    const net = ledgers.map(({ flows }) =>
-      flows.reduce((sum, f) => sum + (f.to === name ? f.value : f.from === name ? -f.value : 0), 0),
+/** Where the albedo answers to temperature, each climate has its own. */
+function placeTable(states: readonly StateAppraisal[]): Table[] {
+  const rows = states.flatMap(({ state, places }) =>
+    places
+      ? [
+          [
+            ...[state.temperature, places.substellar, places.day.still, places.day.spread],
+            ...[places.night.still, places.night.spread],
+          ].map(kelvin),
+        ]
+      : [],
+  );
+  const head = ["T surface", "substellar", "day, still", "day, spread", "night, still", "night, spread"];
+  return rows.length === 0 ? [] : [{ head, rows, right: head.map((_, i) => i) }];
+}
+
+/** Inputs that move a climate by less than this for 1 % of their value are not worth a line, K. */
+const WEAK = 0.001;
+
+function sensitivityTable(states: readonly StateAppraisal[]): Table[] {
+  const rows = states.flatMap(({ state, sensitivities }) => {
+    const worth = (sensitivities ?? []).filter(
+      ({ perPercent, minus, plus }) => Math.abs(perPercent) >= WEAK || minus !== null || plus !== null,
     );
-    const stored = ledgers.map((l) => l.reservoirs.find((r) => r.name === name)?.storage ?? 0);
-    return [
-      [name, "in minus out", ...net.map(number)],
-      ["", "stored", ...stored.map(number)],
-    ];
+    return worth.map(({ path, perPercent, minus, plus }, i) => [
+      i === 0 ? `at ${kelvin(state.temperature)} K` : "",
+      path,
+      signed(perPercent, 3),
+      [plus, minus].flatMap((error) => (error === null ? [] : [signed(error, 3)])).join(" "),
+    ]);
   });
-  const head = ["flow", "", ...states.map((s) => `at ${kelvin(s.state.temperature)} K`)];
-  return [{ head, rows: [...flows, ...sums], right: states.map((_, i) => i + 2) }];
+  const head = ["climate", "input", "K for 1 % more", "K for its errors, + and -"];
+  return rows.length === 0 ? [] : [{ head, rows, right: [2, 3] }];
 }
 
-/** λ of each state as the sum of its parts. */
-function feedbackTable(states: readonly StateAppraisal[]): Table[] {
-  const rows = states.flatMap(({ feedbacks }) => {
-    if (!feedbacks) return [];
-    const { temperature, feedbackParameter, reference, loops, others, gain } = feedbacks;
-    return [
-      [`at ${kelvin(temperature)} K`, reference.kind, signed(reference.feedbackParameter), ""],
-      ...loops.map((loop) => [
-        "",
-        loop.through.join(" to "),
-        signed(loop.feedbackParameter),
-        `${loop.effect}${loop.feedbackFactor === null ? "" : `, f = ${shown(loop.feedbackFactor, 4)}`}`,
-      ]),
-      ...(others ? [["", `${others.count} weaker loops`, signed(others.feedbackParameter), ""]] : []),
-      ["", "lambda", signed(feedbackParameter), gain === null ? "" : `gain ${shown(gain, 4)}`],
-    ];
-  });
-  return rows.length === 0 ? [] : [{ head: ["climate", "part", "W m-2 K-1", ""], rows, right: [2] }];
-}
-
-/** How far the star may brighten or fade before a state is lost, what comes then, and whether there is a way back. */
-function marginLines({ state, margins }: StateAppraisal): string[] {
-  if (!margins) return [];
-  const lines = [margins.rise, margins.fall].map((side) => marginLine(state.temperature, margins, side));
-  const basin = margins.basin && basinText(margins.basin);
-  return basin ? [...lines, `at ${kelvin(state.temperature)} K, ${basin}`] : lines;
-}
-
-function marginLine(
-  temperature: number,
-  { along, at }: TippingMargins,
-  side: TippingMargins["rise"],
-): string {
-  const { direction, end, relative, jump, time } = side;
-  const change = `${direction === "rise" ? "+" : "-"}${(100 * (relative ?? 0)).toFixed(2)} %`;
-  const start = `at ${kelvin(temperature)} K, ${along} ${change}:`;
-  if (!jump) return `${start} no end of the branch in the searched range`;
-  const next = jump.to
-    ? `jumps to ${kelvin(jump.to.temperature)} K`
-    : `leaves the range, ${jump.leaves ?? "undecided"}`;
-  const years = time === null ? "" : `, in ${shown(time / GIGAYEAR, 3)} Gyr`;
-  const back = jump.returnsAt === null ? "no return" : `returns at ${shown(jump.returnsAt / at)} of today`;
-  return `${start} ${end.kind} at ${kelvin(end.temperature)} K${years}; ${next}; ${back}`;
-}
-
-function basinText({ coldest, hottest }: { coldest: number | null; hottest: number | null }): string {
-  const edges = [
-    coldest === null ? "" : `below ${kelvin(coldest)} K`,
-    hottest === null ? "" : `above ${kelvin(hottest)} K`,
-  ].filter(Boolean);
-  return edges.length === 0 ? "" : `it is left for another climate from ${edges.join(" or ")}`;
-}
-
-/** Only where there is more than one average: the reader chose one for an eccentric orbit. */
 const averagingLines = (states: readonly StateAppraisal[]): string[] =>
   states.map(({ state, averaging: { thermalInertiaRatio, text } }) => {
     const ratio =
-      thermalInertiaRatio === null ? "" : `thermal inertia ratio ${shown(thermalInertiaRatio, 4)}, `;
+      thermalInertiaRatio === null
+        ? ""
+        : `thermal time / orbital period = ${shown(thermalInertiaRatio, 4)}: `;
     return `at ${kelvin(state.temperature)} K: ${ratio}${text}`;
   });
 
-function surfaceTable(states: readonly StateAppraisal[]): Table[] {
+function surfaceBlocks(states: readonly StateAppraisal[]): (string | Table)[] {
+  const or = (value: number | null) => (value === null ? "-" : kelvin(value));
   const rows = states.flatMap(({ state, surface }) => {
     if (!surface) return [];
-    const { pressure, water, boilingTemperature, carbonDioxideFrostPoint } = surface;
-    const frost = carbonDioxideFrostPoint === null ? "" : kelvin(carbonDioxideFrostPoint);
-    const boils = boilingTemperature === null ? "" : kelvin(boilingTemperature);
-    return [[kelvin(state.temperature), shown(pressure), water, boils, frost]];
+    const { pressure, water, boilingTemperature, carbonDioxideFrostPoint, carbonDioxideFreezes } = surface;
+    const frost = carbonDioxideFreezes === null ? "-" : carbonDioxideFreezes ? "yes" : "no";
+    return [
+      [
+        ...[kelvin(state.temperature), shown(pressure), water, or(boilingTemperature)],
+        ...[or(carbonDioxideFrostPoint), frost],
+      ],
+    ];
   });
-  const head = [
-    "T surface, K",
-    "pressure, Pa",
-    "water is",
-    "boils at, K",
-    "CO2 of this pressure freezes at, K",
+  if (rows.length === 0) return [];
+  const head = ["T surface, K", "pressure, Pa", "water is", "boils at, K", "CO2 freezes at, K", "CO2 frost"];
+  return [
+    { head, rows, right: [0, 1, 3, 4] },
+    "pure water at the mean temperature; carbon dioxide as if the whole pressure were its own, less of it freezes at a lower temperature",
   ];
-  return rows.length === 0 ? [] : [{ head, rows, right: [0, 1, 3, 4] }];
 }

@@ -16,10 +16,18 @@ export interface Section {
 /** A whole report. */
 export interface Report {
   readonly title: string;
+  /** Where the description comes from and what its author says; may be empty. */
+  readonly about: string;
   readonly sections: readonly Section[];
   /** What the numbers are not. */
   readonly caution: string;
 }
+
+/** Julian year, s. */
+export const YEAR = 365.25 * 86400;
+
+/** A temperature for reading, K. */
+export const kelvin = (value: number): string => value.toFixed(2);
 
 /** A number for reading: some significant digits, and powers of ten only where they help. */
 export function shown(value: number, digits = 5): string {
@@ -37,3 +45,10 @@ export const signed = (value: number, digits = 4): string =>
 /** A number with its unit; pure numbers have none. */
 export const withUnit = (value: number, unit: string, digits = 5): string =>
   unit === "1" ? shown(value, digits) : `${shown(value, digits)} ${unit}`;
+
+/** A text of somebody else's on one line, without characters that steer a terminal or turn the direction of writing. */
+export const oneLine = (text: string): string =>
+  text
+    .replace(/[\p{Cc}\u2028\u2029\u200e\u200f\u202a-\u202e\u2066-\u2069]+/gu, " ")
+    .replace(/\s+/gu, " ")
+    .trim();

@@ -8,13 +8,15 @@ import { reportOf } from "./reportOf.ts";
  * that no markup of theirs has an effect.
  */
 export function toMarkdown(appraisal: Appraisal): string {
-  const { title, sections, caution } = reportOf(appraisal);
-  const parts = [`# ${escaped(title)}`, ...sections.flatMap(sectionParts), `*${escaped(caution)}*`];
-  return `${parts.join("\n\n")}\n`;
+  const { title, about, sections, caution } = reportOf(appraisal);
+  const parts = [`# ${escaped(title)}`, block(about), ...sections.flatMap(sectionParts), block(caution)];
+  return `${parts.filter(Boolean).join("\n\n")}\n`;
 }
 
 function sectionParts({ title, blocks }: Section): string[] {
-  return [`## ${escaped(title)}`, ...blocks.map((b) => (typeof b === "string" ? escaped(b) : tableOf(b)))];
+  const lines = blocks.filter((b) => typeof b === "string").map((line) => `- ${escaped(line)}`);
+  const tables = blocks.filter((b) => typeof b !== "string").map(tableOf);
+  return [`## ${escaped(title)}`, ...tables, lines.join("\n")].filter(Boolean);
 }
 
 function tableOf({ head, rows, right }: Table): string {
@@ -24,12 +26,16 @@ function tableOf({ head, rows, right }: Table): string {
   return [line(cells(head)), line(rule), ...rows.map((row) => line(cells(row)))].join("\n");
 }
 
-/** Characters with a meaning in Markdown or HTML lose it. */
+/** A paragraph of its own, which is no list and no heading whatever it begins with. */
+const block = (text: string): string => escaped(text).replace(/^(?:[-+=]|\d+(?=[.)]))/, "&#8203;$&");
+
+/** Characters with a meaning in Markdown or HTML lose it, and so do addresses that would become links. */
 const escaped = (text: string): string =>
   text
-    .replace(/\s+/g, " ")
-    .replace(/[\\`*_[\]|~]/g, "\\$&")
     .replace(/&/g, "&amp;")
     .replace(/</g, "&lt;")
     .replace(/>/g, "&gt;")
-    .replace(/^(#|\+|-|\d+\.)/, "\\$1");
+    .replace(/[\\`*_[\]|~#$]/g, "\\$&")
+    .replace(/:(?=\/\/)/g, "&#58;")
+    .replace(/@/g, "&#64;")
+    .replace(/\b(www)\./gi, "$1&#46;");

@@ -1,5 +1,5 @@
 // An appraisal as flat rows with units, for tables of many planets.
-import type { Appraisal } from "./appraisal.ts";
+import type { Appraisal, PlaceTemperatures } from "./appraisal.ts";
 
 /** One number, or one word, of an appraisal. */
 export interface AppraisalRow {
@@ -19,6 +19,7 @@ export function toRows(appraisal: Appraisal): AppraisalRow[] {
   const add = (name: string, value: number | string | null | undefined, unit = "1") => {
     if (value !== null && value !== undefined) rows.push({ name, value, unit });
   };
+  add("version", appraisal.version);
   add("name", appraisal.name);
   add("star", appraisal.star);
   for (const { path, value, unit, minus, plus } of appraisal.inputs) {
@@ -35,13 +36,15 @@ export function toRows(appraisal: Appraisal): AppraisalRow[] {
     ["habitableZone", appraisal.habitableZone],
     ["ownLimits", appraisal.ownLimits],
   ] as const) {
-    limits.forEach(({ name, paper, massEarths, limit, distance, ratio }, i) => {
+    limits.forEach(({ name, paper, massEarths, limit, distance, ratio, position, temperature }, i) => {
       add(`${list}[${i}].name`, name);
       add(`${list}[${i}].paper`, paper);
       add(`${list}[${i}].massEarths`, massEarths);
       add(`${list}[${i}].flux`, limit.flux, "W m-2");
       add(`${list}[${i}].distance`, distance, "m");
       add(`${list}[${i}].ratio`, ratio);
+      add(`${list}[${i}].position`, position);
+      add(`${list}[${i}].temperature`, temperature, "K");
     });
   }
   return rows;
@@ -50,13 +53,13 @@ export function toRows(appraisal: Appraisal): AppraisalRow[] {
 type Add = (name: string, value: number | string | null | undefined, unit?: string) => void;
 
 function starlightRows({ starlight }: Appraisal, add: Add): void {
-  const { mean, atSemiMajorAxis, periastron, apoastron } = starlight;
+  const { mean, atSemiMajorAxis, periastron, apoastron, companions } = starlight;
   add("starlight.luminosity", starlight.luminosity, "W");
   add("starlight.semiMajorAxis", starlight.semiMajorAxis, "m");
   add("starlight.period", starlight.period, "s");
-  for (const [name, stated] of Object.entries({ mean, atSemiMajorAxis, periastron, apoastron })) {
-    add(`starlight.${name}.flux`, stated.flux, "W m-2");
-    add(`starlight.${name}.earths`, stated.earths);
+  for (const [name, stated] of Object.entries({ atSemiMajorAxis, mean, periastron, apoastron, companions })) {
+    add(`starlight.${name}.flux`, stated?.flux, "W m-2");
+    add(`starlight.${name}.earths`, stated?.earths);
   }
 }
 
@@ -64,20 +67,25 @@ function equilibriumRows({ equilibrium }: Appraisal, add: Add): void {
   const { described, conventional, places, orbit } = equilibrium;
   add("equilibrium.described", described?.value, "K");
   for (const { albedo, redistribution, value } of conventional)
-    add(`equilibrium.albedo=${albedo},redistribution=${redistribution}`, value, "K");
-  add("equilibrium.substellar", places?.substellar, "K");
+    add(`equilibrium.conventional.albedo=${albedo}.redistribution=${redistribution}`, value, "K");
+  placeRows("equilibrium.places", places, add);
+  add("equilibrium.orbit.ofMeanFlux", orbit.ofMeanFlux, "K");
+  add("equilibrium.orbit.meanOverTime", orbit.meanOverTime, "K");
+}
+
+function placeRows(path: string, places: PlaceTemperatures | null, add: Add): void {
+  add(`${path}.substellar`, places?.substellar, "K");
   for (const side of ["day", "night"] as const) {
-    add(`equilibrium.${side}.still`, places?.[side].still, "K");
-    add(`equilibrium.${side}.spread`, places?.[side].spread, "K");
+    add(`${path}.${side}.still`, places?.[side].still, "K");
+    add(`${path}.${side}.spread`, places?.[side].spread, "K");
   }
-  add("equilibrium.ofMeanFlux", orbit.ofMeanFlux, "K");
-  add("equilibrium.meanOverTime", orbit.meanOverTime, "K");
 }
 
 function stateRows({ states }: Appraisal, i: number, add: Add): void {
   const at = states[i];
   if (!at) return;
-  const { state, equilibriumTemperature, greenhouseWarming, averaging, feedbacks, margins, surface } = at;
+  const { state, equilibriumTemperature, greenhouseWarming, places, averaging, feedbacks } = at;
+  const { sensitivities, margins, surface } = at;
   const own = (name: string, value: number | string | null | undefined, unit?: string) =>
     add(`states[${i}].${name}`, value, unit);
   own("temperature", state.temperature, "K");
@@ -89,11 +97,18 @@ function stateRows({ states }: Appraisal, i: number, add: Add): void {
   for (const [name, value] of Object.entries(state.couplings)) own(`couplings.${name}`, value);
   own("equilibriumTemperature", equilibriumTemperature, "K");
   own("greenhouseWarming", greenhouseWarming, "K");
+  placeRows(`states[${i}].places`, places, add);
   own("thermalInertiaRatio", averaging.thermalInertiaRatio);
+  own("favours", averaging.favours);
   own("referenceResponse", feedbacks?.reference.feedbackParameter, "W m-2 K-1");
   for (const loop of feedbacks?.loops ?? [])
     own(`feedback.${loop.through.join(">")}`, loop.feedbackParameter, "W m-2 K-1");
   own("gain", feedbacks?.gain);
+  for (const { path, perPercent, minus, plus } of sensitivities ?? []) {
+    own(`sensitivity.${path}.perPercent`, perPercent, "K");
+    own(`sensitivity.${path}.minus`, minus, "K");
+    own(`sensitivity.${path}.plus`, plus, "K");
+  }
   for (const side of ["rise", "fall"] as const) {
     const margin = margins?.[side];
     if (!margin?.jump) continue;
@@ -104,4 +119,6 @@ function stateRows({ states }: Appraisal, i: number, add: Add): void {
   }
   own("water", surface?.water);
   own("saturationPressure", surface?.saturationPressure, "Pa");
+  own("boilingTemperature", surface?.boilingTemperature, "K");
+  own("carbonDioxideFrostPoint", surface?.carbonDioxideFrostPoint, "K");
 }

@@ -11,8 +11,9 @@ const INDENT = 2;
  * rounding that a reader would miss; `JSON.stringify(appraisal)` has every digit.
  */
 export function toText(appraisal: Appraisal): string {
-  const { title, sections, caution } = reportOf(appraisal);
-  return [title, ...sections.flatMap(sectionLines), "", ...wrapped(caution, WIDTH, 0), ""].join("\n");
+  const { title, about, sections, caution } = reportOf(appraisal);
+  const head = [title, about].flatMap((text) => wrapped(text, WIDTH, 0));
+  return [...head, ...sections.flatMap(sectionLines), "", ...wrapped(caution, WIDTH, 0), ""].join("\n");
 }
 
 function sectionLines({ title, blocks }: Section): string[] {
@@ -22,11 +23,12 @@ function sectionLines({ title, blocks }: Section): string[] {
   return ["", title, ...lines.map((line) => `${" ".repeat(INDENT)}${line}`.trimEnd())];
 }
 
-/** Breaks a text at spaces; lines after the first are indented by `hang`. */
+/** Breaks a text at spaces, and words that are too long anywhere; lines after the first are indented by `hang`. */
 function wrapped(text: string, width: number, hang: number): string[] {
   const lines: string[] = [];
   let line = "";
-  for (const word of text.split(/\s+/).filter(Boolean)) {
+  const most = new RegExp(`.{1,${width - hang}}`, "gu");
+  for (const word of text.split(" ").flatMap((long) => long.match(most) ?? [])) {
     if (line.trim() !== "" && line.length + 1 + word.length > width) {
       lines.push(line);
       line = " ".repeat(hang) + word;

@@ -1,0 +1,54 @@
+// How far the climates that hold are from an end of their branches, in words.
+import type { Margin, TippingMargins } from "../branches/margins.ts";
+import type { StateAppraisal } from "./appraisal.ts";
+import { kelvin, shown, YEAR } from "./report.ts";
+
+const GIGAYEAR = 1e9 * YEAR;
+
+/** How far the star may brighten or fade before a state is lost, what comes then, and whether there is a way back. */
+export function marginLines(states: readonly StateAppraisal[]): string[] {
+  const lines = states.flatMap(({ state, margins }) => {
+    if (!margins) return [];
+    const at = `at ${kelvin(state.temperature)} K: `;
+    const basin = margins.basin ? basinText(margins.basin) : "";
+    const all = [marginText(margins, margins.rise), marginText(margins, margins.fall), basin];
+    return all.filter(Boolean).map((text) => at + text);
+  });
+  const [first] = states.flatMap(({ margins }) => margins ?? []);
+  if (!first) return [];
+  const [low, high] = first.between.map((end) => shown(end / first.at, 4));
+  return [
+    ...lines,
+    `followed: ${first.along} from ${low} to ${high} of today, all else fixed; diagram: ${first.proof}`,
+  ];
+}
+
+function marginText({ along, at }: TippingMargins, { direction, end, relative, jump, time }: Margin): string {
+  const light = along.endsWith("luminosity") ? "star" : "flux";
+  const verbs = light === "star" ? (["brightens", "fades"] as const) : (["rises", "falls"] as const);
+  const change = `if the ${light} ${verbs[direction === "rise" ? 0 : 1]}`;
+  const by = `${change} by ${(100 * (relative ?? 0)).toFixed(2)} %${time === null ? "" : `, in ${(time / GIGAYEAR).toFixed(2)} Gyr`}`;
+  if (jump) {
+    const next = jump.to
+      ? `jumps to ${kelvin(jump.to.temperature)} K`
+      : `leaves the searched range${jump.leaves ? `, ${jump.leaves}` : ""}`;
+    const back =
+      jump.returnsAt === null
+        ? "there is no way back"
+        : `the way back is at ${shown(jump.returnsAt / at, 4)} of today`;
+    return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K and ${next}; ${back}`;
+  }
+  if (end.kind === "between")
+    return `${change}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} of today`;
+  if (end.kind === "within") return `${by}, it leaves the searched range at ${kelvin(end.temperature)} K`;
+  if (end.kind === "undecided") return `${by}, nothing is proved beyond ${kelvin(end.temperature)} K`;
+  return `${by}, it ends in a ${end.kind} point at ${kelvin(end.temperature)} K`;
+}
+
+function basinText({ coldest, hottest }: { coldest: number | null; hottest: number | null }): string {
+  const edges = [
+    coldest === null ? "" : `below ${kelvin(coldest)} K`,
+    hottest === null ? "" : `above ${kelvin(hottest)} K`,
+  ].filter(Boolean);
+  return edges.length === 0 ? "" : `pushed ${edges.join(" or ")}, it goes to another climate`;
+}

@@ -108,12 +108,13 @@ export function fromCatalogueRow(row: CatalogueRow, mapping: CatalogueMapping): 
   };
   const { assume = {}, publishedTemperature } = mapping;
   const [name, starName] = [textOf(row, mapping.name), textOf(row, mapping.star?.name)];
+  const cells = { star: part("star", STAR), orbit: part("orbit", ORBIT) };
   const star = {
     ...(starName === null ? {} : { name: starName }),
-    ...part("star", STAR),
+    ...cells.star,
     ...under(assume, "star"),
   };
-  const orbit = { ...part("orbit", ORBIT), ...under(assume, "orbit") };
+  const orbit = { ...cells.orbit, ...under(assume, "orbit") };
   const published = read("publishedTemperature", publishedTemperature, TEMPERATURE);
   const description = {
     format: PLANET_FORMAT,
@@ -128,11 +129,15 @@ export function fromCatalogueRow(row: CatalogueRow, mapping: CatalogueMapping): 
     refused,
     publishedTemperature: published,
     notes: [
-      ...checkStarAndOrbit({ star, orbit } as Lit, (path) => values.get(path) as number, "note"),
+      // what is assumed is compared when the description is appraised
+      ...checkStarAndOrbit(cells as Lit, (path) => values.get(path) as number, "note"),
       ...(published === null ? [] : notesOn(published, row, mapping)),
     ],
   });
 }
+
+/** Errors of a number; those of a unit are errors of the mapping. */
+const OF_A_CELL: readonly string[] = ["out-of-range", "not-a-number"];
 
 /** The cell in SI, if a description may hold it; a number outside of the range of its field is refused. */
 function allowed(
@@ -143,13 +148,10 @@ function allowed(
   try {
     return readInput(path, port, cell);
   } catch (error) {
-    if (!(error instanceof ThermosteadError) || error.code !== "out-of-range") throw error;
+    if (!(error instanceof ThermosteadError) || !OF_A_CELL.includes(error.code)) throw error;
     const name = typeof column === "string" ? column : column.column;
-    refused.push({
-      column: name,
-      value: cell.value,
-      reason: `${path} is out of range; allowed: ${error.allowed}`,
-    });
+    const reason = `${path} is ${error.code.replace(/-/g, " ")}; allowed: ${error.allowed}`;
+    refused.push({ column: name, value: cell.value, reason });
     return null;
   }
 }

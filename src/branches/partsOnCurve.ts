@@ -61,5 +61,13 @@ export function foldBetween(branches: readonly Branch[], pair: readonly [number,
   const { at, atBracket, temperature, temperatureBracket } = end;
   const exists = end === cool.low ? "above" : "below";
   const kind = end.kind as Fold["kind"];
-  return Object.freeze({ kind, at, atBracket, temperature, temperatureBracket, exists, branches: pair });
+  return Object.freeze({
+    kind,
+    at,
+    atBracket,
+    temperature,
+    temperatureBracket,
+    exists,
+    branches: Object.freeze(pair),
+  });
 }

@@ -63,12 +63,12 @@ export function writeFeedbacks<N extends string>(
     givens: record(loop.givens, (i) => givens[i] as number) as Feedbacks<N>["givens"],
     through: Object.freeze([...chosen]) as never,
     feedbackParameter: total.value,
-    feedbackParameterRange: total.bounds,
+    feedbackParameterRange: frozen(total.bounds),
     settledFeedbackParameter: total.value,
     reference: Object.freeze({
       kind: reference.value < 0 ? name.kind : "reference response",
       feedbackParameter: reference.value,
-      feedbackParameterRange: loop.sampled ? null : reference.bounds,
+      feedbackParameterRange: loop.sampled ? null : frozen(reference.bounds),
       text: name.text,
       contains: Object.freeze([...name.contains]) as never,
     }),
@@ -90,12 +90,14 @@ export function writeFeedbacks<N extends string>(
   });
 }
 
+const frozen = (bounds: Bounds): Bounds => bounds && Object.freeze([...bounds] as const);
+
 /** The fields that every part of λ has. */
 const partWriter =
   (reference: Bounded) =>
   ({ value, bounds }: Bounded): FeedbackPart => ({
     feedbackParameter: value,
-    feedbackParameterRange: bounds,
+    feedbackParameterRange: frozen(bounds),
     feedbackFactor: reference.value < 0 ? value / -reference.value : null,
   });
 

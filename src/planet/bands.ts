@@ -4,6 +4,7 @@ import type { Value } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
 import { bandFraction } from "../star/bandFraction.ts";
 import { stellarFlux } from "../star/stellarFlux.ts";
+import { inBands } from "./covers.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { companionPlace, fluxWays, overOrbit } from "./starlight.ts";
 import { companionsOf, type DescribedStar, hostsOf, type Lit } from "./stars.ts";
@@ -16,9 +17,7 @@ const DIVIDING_WAVELENGTH = 0.7e-6;
 /** True where a cover reflects visible and near-infrared light differently. */
 export function hasBands({ albedo, surface }: PlanetDescription): boolean {
   const written = albedo ?? surface;
-  return (
-    typeof written === "object" && "covers" in written && written.covers.some((cover) => "visible" in cover)
-  );
+  return typeof written === "object" && "covers" in written && written.covers.some(inBands);
 }
 
 /** The visible share of a star's energy: as given, or that of a black body of its effective temperature. Throws `missing`. */

@@ -11,6 +11,9 @@ export type Cover = Extract<PlanetDescription["albedo"], { covers: unknown }>["c
 /** How far the shares of a complete surface may be from 1. */
 const SHARE_TOLERANCE = 1e-12;
 
+/** True for a cover that reflects two bands differently. */
+export const inBands = (cover: Cover): boolean => "visible" in cover;
+
 /** True for a cover whose share is a law. */
 export const isIce = ({ share }: Cover): boolean => isLaw(share);
 

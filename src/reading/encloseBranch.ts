@@ -25,7 +25,7 @@ export function encloseBranch(
       : w.pick(a.lo, b.hi, either, second);
     return w.pick(isFirst[0] as number, isFirst[1] as number, first, rest);
   };
-  const either = w.widened(w.sum(w.sum(x.err, y.err), w.times(zero, error)));
+  const either = w.sum(w.sum(x.err, y.err), w.times(zero, error));
   const exact = exists && either === undefined;
   return {
     lo: branch(x.lo, y.lo, exists ? w.least(x.lo, y.lo) : failed),

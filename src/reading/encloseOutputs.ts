@@ -26,8 +26,8 @@ export function encloseOutputs(
     if (!known.has(id)) known.set(id, enclose(g, id, w, known));
   }
   return outputs.flatMap((id) => {
-    const { lo, hi, err = w.literal(0) } = known.get(id) as Enclosure;
-    return [lo, hi, err];
+    const { lo, hi, err } = known.get(id) as Enclosure;
+    return [lo, hi, w.widened(err) ?? w.literal(0)];
   });
 }
 

@@ -31,8 +31,7 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   // ab − a'b' = a'β + b'α + αβ
   mul(w, a, b) {
     if (a === b) return square(w, a);
-    const first = w.sum(w.times(w.size(a), b.err), w.times(w.size(b), a.err));
-    const error = w.sum(first, w.times(a.err, b.err));
+    const error = w.sum(w.times(w.sum(w.size(a), a.err), b.err), w.times(w.size(b), a.err));
     return w.rounded(...extremes(w, w.mul, a, b), error, ofSign(signOf(a) * signOf(b)));
   },
   // a/b − a'/b' = α/b − (a'/b')(β/b), in an order in which nothing that underflows is divided by something small;
@@ -57,14 +56,16 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     const [lo, hi] = [w.step("sqrt", a.lo), w.step("sqrt", a.hi)];
     const zero = w.literal(0);
     let error: number | undefined;
-    if (a.err !== undefined) error = w.provided(zero, w.sub(a.lo, a.err), w.over(a.err, lo));
+    if (a.err !== undefined) error = w.provided(zero, w.less(a.lo, a.err), w.over(a.err, lo));
     else if (signOf(a) <= 0) error = w.pick(a.lo, zero, w.literal(NaN), zero);
     return w.rounded(lo, hi, error, NOT_NEGATIVE);
   },
   // e^a − e^a' = e^a'·(e^α − 1), no larger than e^a'·1.06·|α| where |α| < 0.1
   exp: (w, a) =>
     w.approximate("exp", a, NOT_NEGATIVE, (hi, err) =>
-      err === undefined ? err : w.provided(err, w.literal(0.1), w.mul(w.mul(hi, w.literal(1.06)), err)),
+      err === undefined
+        ? err
+        : w.provided(w.widened(err) as number, w.literal(0.1), w.times(w.times(hi, w.literal(1.06)), err)),
     ),
   // ln a − ln a' is no larger than |α| / min(a, a'); a must stay above zero
   log: (w, a) =>
@@ -75,11 +76,11 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   // no steeper than 1
   tanh: (w, a) => w.approximate("tanh", a, [signOf(a) > 0 ? 0 : -1, signOf(a) < 0 ? 0 : 1], (_, err) => err),
   min: (w, a, b) => ({
-    ...{ lo: w.least(a.lo, b.lo), hi: w.least(a.hi, b.hi), err: w.widened(w.sum(a.err, b.err)) },
+    ...{ lo: w.least(a.lo, b.lo), hi: w.least(a.hi, b.hi), err: w.sum(a.err, b.err) },
     within: [Math.min(a.within[0], b.within[0]), Math.min(a.within[1], b.within[1])],
   }),
   max: (w, a, b) => ({
-    ...{ lo: w.greatest(a.lo, b.lo), hi: w.greatest(a.hi, b.hi), err: w.widened(w.sum(a.err, b.err)) },
+    ...{ lo: w.greatest(a.lo, b.lo), hi: w.greatest(a.hi, b.hi), err: w.sum(a.err, b.err) },
     within: [Math.max(a.within[0], b.within[0]), Math.max(a.within[1], b.within[1])],
   }),
   pick: (w, ...args) => encloseBranch(w, true, args),
@@ -88,7 +89,7 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
 
 // a² − a'² = 2a'α + α²
 function square(w: EnclosureWriter, a: Enclosure): Enclosure {
-  const twice = w.times(w.mul(w.literal(2), w.size(a)), a.err);
+  const error = w.times(w.sum(w.times(w.literal(2), w.size(a)), a.err), a.err);
   const most = Math.max(-a.within[0], a.within[1]);
-  return w.rounded(...extremesOfSquare(w, a), w.sum(twice, w.times(a.err, a.err)), [0, most * most]);
+  return w.rounded(...extremesOfSquare(w, a), error, [0, most * most]);
 }

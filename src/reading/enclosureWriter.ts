@@ -7,8 +7,10 @@ import { ScalarProgram } from "./scalarProgram.ts";
 const HALF_ULP = 1.2e-16;
 /** Above 2^-52 = 2.22e-16: our exp, log and tanh are wrong by less than an ulp, at most this part of their result. */
 const ULP = 2.5e-16;
-/** 1 + 2^-49: fewer than 15 roundings go into an error, each at most 2^-53 of it. */
-const SLACK = 1.0000000000000018;
+/** 1 + 2^-43: fewer than 1024 roundings, each at most 2^-53, take less than this from an error. */
+const SLACK = 1.0000000000001137;
+/** Two errors with as many stay below that number when they are multiplied. */
+const MOST_ROUNDINGS = 500;
 /** Far above what underflow can take from a result and from the terms of its error, 2^-1075 = 2.5e-324 each. */
 const TINY = 1e-300;
 
@@ -23,28 +25,54 @@ export class EnclosureWriter extends ScalarProgram {
   div = (a: number, b: number): number => this.step("div", a, b);
   abs = (a: number): number => this.step("abs", a);
   /** c where a < b, else d (so also where one is NaN). */
-  pick = (a: number, b: number, c: number, d: number): number =>
-    c === d ? c : this.step("pick", a, b, c, d);
+  pick(a: number, b: number, c: number, d: number): number {
+    if (c === d) return c;
+    return this.#rounded(this.step("pick", a, b, c, d), Math.max(this.#roundings(c), this.#roundings(d)));
+  }
   least = (a: number, b: number): number => this.pick(a, b, a, b);
   greatest = (a: number, b: number): number => this.pick(b, a, a, b);
   /** An error where a < b, else NaN. */
   provided = (a: number, b: number, error: Bound): number =>
     this.pick(a, b, error ?? this.literal(0), this.literal(NaN));
 
-  /** Arithmetic of errors, of which an absent one is zero. */
-  sum = (a: Bound, b: Bound): Bound => (a === undefined ? b : b === undefined ? a : this.add(a, b));
-  times = (a: Bound, b: Bound): Bound => (a === undefined || b === undefined ? undefined : this.mul(a, b));
-  over = (a: Bound, b: number): Bound => (a === undefined ? a : this.div(a, b));
-  less = (a: number, b: Bound): number => (b === undefined ? a : this.sub(a, b));
-  /** An error with the rounding of its own arithmetic. */
-  widened = (a: Bound): Bound => this.times(a, this.literal(SLACK));
+  // Arithmetic of errors, of which an absent one is zero. Nothing in it is negative, so its own roundings add up to a share of
+  // the result; they are counted, and made good where an error is compared, or handed out.
+
+  readonly #counts = new Map<number, number>();
+  #roundings = (id: number): number => this.#counts.get(id) ?? 0;
+  #rounded(id: number, count: number): number {
+    if (count > MOST_ROUNDINGS) return this.mul(id, this.literal(SLACK));
+    if (count > this.#roundings(id)) this.#counts.set(id, count);
+    return id;
+  }
+
+  sum(a: Bound, b: Bound): Bound {
+    if (a === undefined || b === undefined) return a ?? b;
+    return this.#rounded(this.add(a, b), 1 + Math.max(this.#roundings(a), this.#roundings(b)));
+  }
+  times(a: Bound, b: Bound): Bound {
+    if (a === undefined || b === undefined) return undefined;
+    return this.#rounded(this.mul(a, b), 1 + this.#roundings(a) + this.#roundings(b));
+  }
+  /** By a reciprocal, which several errors may share; a subnormal one is rounded like four. */
+  over(a: Bound, b: number): Bound {
+    if (a === undefined) return a;
+    const inverse = this.#rounded(this.div(this.literal(1), b), 4 + this.#roundings(b));
+    return this.times(a, inverse);
+  }
+  /** What is certainly left. */
+  less = (a: number, b: Bound): number =>
+    b === undefined ? a : this.#rounded(this.sub(a, this.widened(b) as number), 1);
+  /** An error with the roundings of its own arithmetic. */
+  widened = (a: Bound): Bound =>
+    a === undefined || this.#roundings(a) === 0 ? a : this.mul(a, this.literal(SLACK));
 
   /** An upper bound of the size of lo and hi. */
   size(x: Ends): number {
     const sign = signOf(x);
     if (sign) return sign > 0 ? x.hi : this.neg(x.lo);
     const low = this.abs(x.lo);
-    return isPoint(x) ? low : this.add(low, this.abs(x.hi));
+    return isPoint(x) ? low : (this.sum(low, this.abs(x.hi)) as number);
   }
 
   /** The result of an operation with its own rounding, `unit` of its size. */
@@ -55,8 +83,8 @@ export class EnclosureWriter extends ScalarProgram {
 
   /** The same of + and −, which are exact wherever underflow could come in. */
   roundedSum(lo: number, hi: number, err: Bound, within: Range, unit = HALF_ULP): Enclosure {
-    const own = this.mul(this.literal(unit), this.size({ lo, hi, within }));
-    return { lo, hi, err: err === undefined ? own : this.widened(this.add(err, own)), within };
+    const own = this.times(this.literal(unit), this.size({ lo, hi, within }));
+    return { lo, hi, err: this.sum(err, own), within };
   }
 
   /** A value of our own functions. They need not keep the order of two arguments, so it is restored. */

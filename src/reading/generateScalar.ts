@@ -58,7 +58,8 @@ function textOf(
   id: number,
   texts: readonly string[],
 ): string {
-  if (op === "literal") return `${values[id]}`;
+  // the name NaN is looked up, and what is looked up is an object
+  if (op === "literal") return Number.isNaN(values[id]) ? "0/0" : `${values[id]}`;
   if (op === "low" || op === "high" || op === "data") return `${ARRAY[op]}[${values[id]}]`;
   const names = (args[id] as readonly number[]).map((a) => texts[a]);
   if (op === "call") return `f[${values[id]}](${names.join()})`;

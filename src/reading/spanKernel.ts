@@ -70,7 +70,8 @@ export function spanKernel(g: Graph, { inputs, atEnds, over, wide, ranges }: Spa
     over: spans.map(({ program, outputs }) => {
       const read = runScalar(program, outputs, data);
       return (left, right, out) => {
-        const [a, b] = [left[0] as number, right[0] as number];
+        const a = left[0] as number;
+        const b = right[0] as number;
         if (prepared && a >= least && a <= b && b <= greatest) read(left, right, out);
         else out.fill(NaN, 0, outputs.length);
       };

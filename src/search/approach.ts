@@ -3,8 +3,8 @@ import type { Bracket } from "./bracket.ts";
 import type { Place } from "./reader.ts";
 
 const MOST_STEPS = 120;
-/** The inverse of a function may leave its chord by this many times the chord's own slope, and still be taken for rising. */
-const STEEPEST = 3;
+/** A function that rises between two places is taken for steady if its slopes there are no less than this part of the chord's. */
+const FLATTEST = 1 / 3;
 
 /**
  * Reads ever closer to the zero in a bracket, until its sign cannot be told or no number is left between; returns the place read
@@ -12,43 +12,48 @@ const STEEPEST = 3;
  * bracket or does not halve the one before.
  */
 export function approach(bracket: Bracket): Place {
-  const { low, high } = bracket;
-  let step = high.x - low.x;
-  let x = interpolated(low, high);
-  if (!bracket.holds(x)) x = vertexed(low, high);
-  if (!bracket.holds(x)) x = bracket.middle();
+  let step = bracket.high.x - bracket.low.x;
+  interpolate(bracket);
+  if (!bracket.holdsTrial()) aimBesideVertex(bracket);
+  if (!bracket.holdsTrial()) halve(bracket);
   for (let i = 0; ; i++) {
-    bracket.trial.x = x;
     const place = bracket.readTrial();
     if (place.sign === 0 || i === MOST_STEPS) return place;
-    let next = interpolated(bracket.low, bracket.high);
-    if (!bracket.holds(next)) next = newton(place);
-    if (!(bracket.holds(next) && Math.abs(next - x) <= step / 2)) next = bracket.middle();
-    if (!bracket.holds(next)) return place;
-    step = Math.abs(next - x);
-    x = next;
+    const { trial } = bracket;
+    interpolate(bracket);
+    if (!bracket.holdsTrial())
+      trial.x = place.x - (place.low + place.high) / (place.slopeLow + place.slopeHigh);
+    if (!(bracket.holdsTrial() && Math.abs(trial.x - place.x) <= step / 2)) halve(bracket);
+    if (!bracket.holdsTrial()) return place;
+    step = Math.abs(trial.x - place.x);
   }
 }
 
-/** Where the cubic through both places, with their slopes, taken as x over the value, passes zero; NaN if it turns. */
-function interpolated(a: Place, b: Place): number {
+/** Where the cubic through both ends, with their slopes, taken as x over the value, passes zero; NaN where it may turn. */
+function interpolate({ low: a, high: b, trial }: Bracket): void {
   const from = a.low + a.high;
-  const rise = b.low + b.high - from;
+  const to = b.low + b.high;
   const width = b.x - a.x;
-  const first = rise / ((a.slopeLow + a.slopeHigh) * width);
-  const last = rise / ((b.slopeLow + b.slopeHigh) * width);
-  if (!(first > 0 && first <= STEEPEST && last > 0 && last <= STEEPEST)) return Number.NaN;
-  const t = -from / rise;
-  const u = (b.low + b.high) / rise;
-  const tilt = t * u * (u * first - t * last);
-  return t < u ? a.x + width * (t * t * (3 - 2 * t) + tilt) : b.x - width * (u * u * (3 - 2 * u) - tilt);
+  const share = 1 / (to - from);
+  const first = (a.slopeLow + a.slopeHigh) * width * share;
+  const last = (b.slopeLow + b.slopeHigh) * width * share;
+  const t = -from * share;
+  const u = to * share;
+  const tilt = t * u * (u / first - t / last);
+  trial.x = !(first >= FLATTEST && last >= FLATTEST)
+    ? Number.NaN
+    : t < u
+      ? a.x + width * (t * t * (3 - 2 * t) + tilt)
+      : b.x - width * (u * u * (3 - 2 * u) - tilt);
 }
 
-const newton = (p: Place): number => p.x - (p.low + p.high) / (p.slopeLow + p.slopeHigh);
-
 /** The parabola that has its vertex at the end with the lesser slope, as at the bottom of a valley. */
-function vertexed(low: Place, high: Place): number {
+function aimBesideVertex({ low, high, trial }: Bracket): void {
   const flat = Math.abs(low.slopeLow) < Math.abs(high.slopeLow) ? low : high;
   const steep = flat === low ? high : low;
-  return flat.x + (steep.x - flat.x) * Math.sqrt(flat.low / (flat.low - steep.low));
+  trial.x = flat.x + (steep.x - flat.x) * Math.sqrt(flat.low / (flat.low - steep.low));
+}
+
+function halve({ low, high, trial }: Bracket): void {
+  trial.x = low.x + (high.x - low.x) / 2;
 }

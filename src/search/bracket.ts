@@ -25,15 +25,12 @@ export class Bracket {
     this.trial = this.#own[0];
   }
 
-  middle(): number {
-    return this.low.x + (this.high.x - this.low.x) / 2;
+  /** Whether the trial lies inside. */
+  holdsTrial(): boolean {
+    return this.trial.x > this.low.x && this.trial.x < this.high.x;
   }
 
-  holds(x: number): boolean {
-    return x > this.low.x && x < this.high.x;
-  }
-
-  /** Reads at `trial.x`, inside; where the sign is proved, the end with that sign moves there. Returns the place read. */
+  /** Reads at the trial, inside; where the sign is proved, the end with that sign moves there. Returns the place read. */
   readTrial(): Place {
     const place = this.reader.readAt(this.trial);
     if (place.sign === 0) return place;

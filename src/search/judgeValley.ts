@@ -12,40 +12,56 @@ const MOST_STEPS = 60;
  */
 export function judgeValley(search: Search, left: Place, right: Place): void {
   const { reader } = search;
-  const taken: Place[] = [];
-  const bottom = bottomBetween(reader, left, right, taken);
-  if (bottom && bottom.sign === -left.sign) {
+  const bottom = bottomBetween(reader, left, right);
+  if (!bottom) return;
+  if (bottom.sign === -left.sign) {
     search.addZero(left, bottom);
     search.addZero(bottom, right);
-  } else if (bottom) doubtAround(search, left, bottom, right);
-  for (const place of taken) reader.give(place);
+  } else doubtAround(search, left, bottom, right);
+  reader.give(bottom);
 }
 
 /** A place near the minimum that is not proved to have the sign of the ends, or as near as it gets; undefined: no zero. */
-function bottomBetween(reader: Reader, left: Place, right: Place, taken: Place[]): Place | undefined {
+function bottomBetween(reader: Reader, left: Place, right: Place): Place | undefined {
   const s = left.sign;
-  const fall = (p: Place): number => (s > 0 ? p.slopeLow : -p.slopeHigh);
-  const rise = (p: Place): number => (s > 0 ? p.slopeHigh : -p.slopeLow);
-  const floor = (p: Place): number => (s > 0 ? p.low : -p.high);
-  // the slope between two places lies between their slopes
-  const clear = (a: Place, b: Place): boolean =>
-    leastBetween({ left: floor(a), right: floor(b) }, { fall: fall(a), rise: rise(b) }, b.x - a.x) > 0;
-  let [a, b] = [left, right];
-  for (let i = 0; ; i++) {
-    if (clear(a, b)) return undefined;
+  let a = left;
+  let b = right;
+  let bottom: Place | undefined;
+  for (let i = 0; !isClear(a, b); i++) {
     const m = reader.take();
-    taken.push(m);
-    reader.read(estimate(a, b, fall(a) / (fall(a) - rise(b)), i), m);
-    if (m.sign !== s || i === MOST_STEPS) return m;
-    if (clear(a, m) && clear(m, b)) return undefined;
-    if (m.slopeSign === 0 || m.x === a.x || m.x === b.x) return m;
-    if (m.slopeSign === s) b = m;
+    aim(m, a, b, i);
+    reader.readAt(m);
+    if (m.sign === s && i < MOST_STEPS && isClear(a, m) && isClear(m, b)) {
+      reader.give(m);
+      break;
+    }
+    if (m.sign !== s || i === MOST_STEPS || m.slopeSign === 0 || m.x === a.x || m.x === b.x) {
+      bottom = m;
+      break;
+    }
+    const passed = m.slopeSign === s ? b : a;
+    if (passed === b) b = m;
     else a = m;
+    if (passed !== left && passed !== right) reader.give(passed);
   }
+  if (a !== left) reader.give(a);
+  if (b !== right) reader.give(b);
+  return bottom;
+}
+
+/** Whether the function has no zero between two places of one sign; its slope lies between their slopes. */
+function isClear(a: Place, b: Place): boolean {
+  const width = b.x - a.x;
+  return a.sign > 0
+    ? leastBetween({ left: a.low, right: b.low }, { fall: a.slopeLow, rise: b.slopeHigh }, width) > 0
+    : leastBetween({ left: -a.high, right: -b.high }, { fall: -a.slopeHigh, rise: -b.slopeLow }, width) > 0;
 }
 
 /** Where the slope, taken as straight, passes zero; every third time the middle, so that the stretch surely shrinks. */
-function estimate(a: Place, b: Place, share: number, i: number): number {
-  const x = a.x + (b.x - a.x) * share;
-  return i % 3 !== 2 && x > a.x && x < b.x ? x : a.x + (b.x - a.x) / 2;
+function aim(place: Place, a: Place, b: Place, i: number): void {
+  const width = b.x - a.x;
+  const fall = a.sign > 0 ? a.slopeLow : a.slopeHigh;
+  const rise = a.sign > 0 ? b.slopeHigh : b.slopeLow;
+  place.x = a.x + width * (fall / (fall - rise));
+  if (i % 3 === 2 || !(place.x > a.x && place.x < b.x)) place.x = a.x + width / 2;
 }

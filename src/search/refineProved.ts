@@ -29,36 +29,46 @@ export function refineProved(bracket: Bracket, left: Place, right: Place, zero: 
 }
 
 /**
- * Near the place, the slope is what it is there, but for what the curvature can change. How far the function moves at least
+ * Near the place, the slope is what it is there, but for what the curvature can change. So how far the function moves at least
  * tells from where on its sign is proved. False where that is not known.
  */
 function closeByMeanValue({ smooth, bends }: Piece, place: Place, zero: Zero): boolean {
   if (!smooth) return false;
-  const rising = zero.direction > 0;
-  const steep = rising ? place.slopeLow : -place.slopeHigh;
-  const reach = (2 * zero.size) / steep + 8 * roundoffAt(zero.at);
+  const steep = zero.direction > 0 ? place.slopeLow : -place.slopeHigh;
+  const reach = (2 * zero.size) / steep + 8 * roundoffAt(place.x);
   const curvature = Math.max(-(bends[0] as number), bends[1] as number);
   const change = above(curvature * reach);
   zero.slopeLow = below(place.slopeLow - change);
   zero.slopeHigh = above(place.slopeHigh + change);
-  const least = rising ? zero.slopeLow : -zero.slopeHigh;
+  const least = zero.direction > 0 ? zero.slopeLow : -zero.slopeHigh;
   if (!(steep > 0 && least > 0)) return false;
-  zero.low = awayFrom(zero.at, -reach, (rising ? place.high : -place.low) / (least * SURELY));
-  zero.high = awayFrom(zero.at, reach, (rising ? -place.low : place.high) / (least * SURELY));
-  return zero.low <= zero.at && zero.at <= zero.high;
+  for (let side = -1; side <= 1; side += 2) {
+    // how far the function may still be on the wrong side of zero
+    const rest = side * zero.direction > 0 ? -place.low : place.high;
+    const gap = rest / (least * SURELY);
+    let end = rest < 0 ? place.x : Number.NaN;
+    for (let i = 1, far = gap + roundoffAt(place.x); Number.isNaN(end) && i < 5; i++, far *= 1.25) {
+      const x = place.x + side * far;
+      const apart = Math.abs(x - place.x);
+      if (apart * SURELY > gap && apart < reach * SURELY) end = x;
+    }
+    if (side < 0) zero.low = end;
+    else zero.high = end;
+  }
+  if (!(zero.low <= zero.at && zero.at <= zero.high)) return false;
+  if (place.sign === 0) step(place, zero);
+  return true;
 }
 
-/** The next number at least `gap` away from x, but nearer than `reach`, on its side; NaN if there is none. */
-function awayFrom(x: number, reach: number, gap: number): number {
-  if (gap < 0) return x;
-  const side = reach > 0 ? 1 : -1;
-  let wider = gap + roundoffAt(x);
-  for (let i = 0; i < 4; i++, wider *= 1.25) {
-    const end = x + side * wider;
-    const apart = Math.abs(end - x);
-    if (apart * SURELY > gap && apart < Math.abs(reach) * SURELY) return end;
-  }
-  return Number.NaN;
+/** One more step of Newton's method, so small that the function there need not be read. */
+function step(place: Place, zero: Zero): void {
+  const at = place.x - (place.low + place.high) / (2 * zero.slope);
+  if (!(at >= zero.low && at <= zero.high)) return;
+  const moved = at - place.x;
+  const low = below(place.low + below((moved > 0 ? zero.slopeLow : zero.slopeHigh) * moved));
+  const high = above(place.high + above((moved > 0 ? zero.slopeHigh : zero.slopeLow) * moved));
+  zero.at = at;
+  zero.size = Math.max(high, -low);
 }
 
 const around = /* @__PURE__ */ new Piece();
@@ -68,9 +78,9 @@ function closeByReading(bracket: Bracket, zero: Zero): void {
   const noise = zero.size / Math.abs(zero.slope);
   const start = roundoffAt(zero.at) + (noise < bracket.high.x - bracket.low.x ? 1.25 * noise : 0);
   for (let side = -1; side <= 1; side += 2) {
-    let gap = start;
-    for (let i = 0; i < MOST_WIDENINGS && bracket.holds(zero.at + side * gap); i++, gap *= 3) {
+    for (let gap = start, i = 0; i < MOST_WIDENINGS; i++, gap *= 3) {
       bracket.trial.x = zero.at + side * gap;
+      if (!bracket.holdsTrial()) break;
       bracket.readTrial();
     }
   }

@@ -160,25 +160,48 @@ test("a part of the error that would underflow is not lost when the divisor is t
   expect(holds(bounds, big.div(big.fromDouble(x), divisor) as big.Real)).toBe(true);
 });
 
-test("an error is no smaller than the errors it sums, although it is itself rounded", () => {
-  const { graph, inputs } = recorded((x) => x);
-  const [x, y, z] = inputs as [number, number, number];
-  const left = graph.node("add", [graph.node("add", [x, y]), y]);
-  const right = graph.node("mul", [z, graph.constant(1)]);
-  const outputs = [left, right, graph.node("sub", [left, right])];
-  const kernel = enclosureKernel(graph, { inputs, outputs, wide: new Set() });
-  const out = new Float64Array(9);
+describe("an error is no smaller than the roundings it sums, although it is itself rounded", () => {
+  // what a sum or a product adds: its own rounding is at most 2^-53 of it, for which 1.2e-16 is taken
+  const own = (size: number) => big.mul(big.fromDouble(1.2e-16), big.fromDouble(Math.abs(size)));
   const random = randomNumbers(3);
-  for (let k = 0; k < 200; k++) {
-    const [a, b] = [random(), random()];
-    kernel(Float64Array.of(a, b, a + b + b), Float64Array.of(a, b, a + b + b), out);
-    const [first, second, all] = [2, 5, 8].map((i) => big.fromDouble(out[i] as number)) as [
-      big.Real,
-      big.Real,
-      big.Real,
-    ];
-    // the difference is exactly zero, so that it adds no rounding of its own behind which the sum could hide
-    expect(out[6]).toBe(0);
-    expect(big.less(all, big.add(first, second))).toBe(false);
-  }
+
+  test("of a difference that is exactly zero, so that no rounding of its own hides a lack", () => {
+    const { graph, inputs } = recorded((x) => x);
+    const [x, y, z] = inputs as [number, number, number];
+    const left = graph.node("add", [graph.node("add", [x, y]), y]);
+    const right = graph.node("mul", [z, graph.constant(1)]);
+    const kernel = enclosureKernel(graph, {
+      inputs,
+      outputs: [graph.node("sub", [left, right])],
+      wide: new Set(),
+    });
+    const out = new Float64Array(3);
+    for (let k = 0; k < 200; k++) {
+      const [a, b] = [random(), random()];
+      kernel(Float64Array.of(a, b, a + b + b), Float64Array.of(a, b, a + b + b), out);
+      expect(out[0]).toBe(0);
+      const least = [a + b, a + b + b, a + b + b].map(own).reduce(big.add);
+      expect(big.less(big.fromDouble(out[2] as number) as big.Real, least as big.Real)).toBe(false);
+    }
+  });
+
+  test.each([10, 700, 3000])("of %i sums", (count) => {
+    const { graph, inputs } = recorded((x) => x);
+    const [x, y] = inputs as [number, number, number];
+    let sum = x;
+    for (let i = 0; i < count; i++) sum = graph.node("add", [sum, graph.node("neg", [y])]);
+    const kernel = enclosureKernel(graph, { inputs, outputs: [sum], wide: new Set() });
+    const out = new Float64Array(3);
+    for (let k = 0; k < 5; k++) {
+      const [a, b] = [random(), random()];
+      kernel(Float64Array.of(a, b, 0), Float64Array.of(a, b, 0), out);
+      let [s, least] = [a, big.fromDouble(0)];
+      for (let i = 0; i < count; i++) {
+        s -= b;
+        least = big.add(least, own(s));
+      }
+      expect(out[0]).toBe(s);
+      expect(big.less(big.fromDouble(out[2] as number) as big.Real, least as big.Real)).toBe(false);
+    }
+  });
 });

@@ -21,13 +21,17 @@ export function branchesOf(
   criticals: readonly Critical[],
   drawing: Drawing,
 ): Branch[] {
+  // at a leap the two branches end at different parameters
   const ends = [
-    runEnd(curve, from, drawing),
-    ...criticals.map((c) => criticalEnd(curve, c, drawing)),
-    runEnd(curve, to, drawing),
+    { warm: runEnd(curve, from, drawing), cool: undefined },
+    ...criticals.map((c) => {
+      const cool = criticalEnd(curve, c, drawing, 0);
+      return { cool, warm: c.kind === "jump" ? criticalEnd(curve, c, drawing, 1) : cool };
+    }),
+    { warm: undefined, cool: runEnd(curve, to, drawing) },
   ];
-  return ends.slice(1).map((warm, i) => {
-    const cool = ends[i] as BranchEnd;
+  return ends.slice(1).map((next, i) => {
+    const [cool, warm] = [ends[i]?.warm, next.cool] as [BranchEnd, BranchEnd];
     const [low, high] = cool.at <= warm.at ? [cool, warm] : [warm, cool];
     const points = pointsOf(curve, cool, warm, drawing);
     if (low === warm) points.reverse();
@@ -55,8 +59,9 @@ function runEnd(curve: Curve, { kind, end, at, bracket }: RunEnd, { between }: D
   });
 }
 
-function criticalEnd(curve: Curve, critical: Critical, { between }: Drawing): BranchEnd {
-  const { kind, decided, temperature, bracket } = critical;
+function criticalEnd(curve: Curve, critical: Critical, { between }: Drawing, side: 0 | 1): BranchEnd {
+  const { kind, decided, bracket } = critical;
+  const temperature = kind === "jump" ? bracket[side] : critical.temperature;
   return Object.freeze({
     kind: decided ? (kind as "fold" | "corner") : "undecided",
     at: clamped(curve.at(temperature), between),

@@ -24,19 +24,27 @@ const CORNER_WIDTH = 1e-6;
 /** Boxes that finding the place of one kink may cost. */
 const KINK_EFFORT = 60;
 
-/** λ along a curve as a function of temperature, and differences that are zero at its kinks. */
+/** λ along a curve as a function of temperature, and what is zero at its kinks and leaps. */
 export interface Feedback {
   readonly feedback: Enclosed;
   readonly kinks: readonly Enclosed[];
+  /** Those of the kinks at which the curve itself leaps. */
+  readonly leaps: readonly Enclosed[];
 }
 
 /** The critical places of a curve in a range of temperature, by rising temperature: zeros of λ, and kinks where its sign changes. */
-export function criticalsOf({ feedback, kinks }: Feedback, range: Range, effort: number): Criticals {
+export function criticalsOf({ feedback, kinks, leaps }: Feedback, range: Range, effort: number): Criticals {
   const cuts: number[] = [];
+  const leapsAt: Range[] = [];
   for (const kink of kinks) {
-    for (const { bracket } of enumerateZeros(kink, range, { effort: KINK_EFFORT }).zeros)
+    for (const { bracket } of enumerateZeros(kink, range, { effort: KINK_EFFORT }).zeros) {
       cuts.push(...bracket);
+      if (leaps.includes(kink)) leapsAt.push(bracket);
+    }
   }
+  // where the curve leaps λ has no value
+  const leapsIn = ([low, high]: Range) =>
+    high - low < CORNER_WIDTH && leapsAt.some(([a, b]) => a <= high && b >= low);
   const found = enumerateZeros(feedback, range, { effort, cuts });
   const list = [
     ...found.zeros.map(
@@ -45,7 +53,8 @@ export function criticalsOf({ feedback, kinks }: Feedback, range: Range, effort:
     ...found.undecided.map(({ kind, interval }): Critical => {
       const corner = kind === "jump" && changesSign(feedback, interval);
       const temperature = interval[0] + (interval[1] - interval[0]) / 2;
-      return { kind: corner ? "corner" : kind, decided: corner, temperature, bracket: interval };
+      const named = kind === "undefined" && leapsIn(interval) ? "jump" : kind;
+      return { kind: corner ? "corner" : named, decided: corner, temperature, bracket: interval };
     }),
   ];
   list.sort((a, b) => a.temperature - b.temperature);

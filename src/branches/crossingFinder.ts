@@ -5,7 +5,7 @@ import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { minus, over, plus, signOfRange } from "../search/interval.ts";
-import type { Meeting } from "./meeting.ts";
+import type { Meeting } from "./met.ts";
 import { planeReader, pointAt } from "./planeReader.ts";
 import { endOf, middleOf, nearestProved } from "./stretch.ts";
 

@@ -112,11 +112,11 @@ export interface UndecidedStretch {
    * `edge`: a fold or a state on an end of a range, inside or outside. `cusp`: two folds about to merge, or none.
    * `continuum`: balanced, as far as can be told, on a whole stretch of temperatures at one parameter. `level`: a temperature
    * that is balanced whatever the parameter is. `transcritical`: two branches cross and exchange their stability, or they turn
-   * away from each other closer than rounding can tell. `count`: parameters at which the number of states is not proved.
+   * away from each other closer than rounding can tell. `jump`: the balance leaps through zero, at a step of a law. `count`: parameters at which the number of states is not proved.
    * `undefined`: the budget has no finite value somewhere. `effort`: the search stopped before. `other`: none of these.
    */
   readonly kind:
-    | ("edge" | "cusp" | "continuum" | "level" | "transcritical")
+    | ("edge" | "cusp" | "continuum" | "level" | "transcritical" | "jump")
     | ("count" | "undefined" | "effort" | "other");
 }
 

@@ -1,15 +1,9 @@
 // A box around the place where two folds meet and vanish as the second given changes.
 import type { Range } from "../ground/range.ts";
-import { minus, over, plus, signOfRange, times } from "../search/interval.ts";
-import {
-  boxAt,
-  closer,
-  type FoldBox,
-  type FoldPlace,
-  type FoldSystem,
-  inside,
-  middles,
-} from "./foldSystem.ts";
+import { minus, over, plus, signOfRange } from "../search/interval.ts";
+import { CUSP, POINT, type Shape } from "./foldShape.ts";
+import { boxAt, type FoldBox, type FoldPlace, type FoldSystem, inside } from "./foldSystem.ts";
+import { meetingNear } from "./meetingNear.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf, nearestProved } from "./stretch.ts";
 
@@ -60,116 +54,6 @@ function largestCap(system: FoldSystem, at: FoldPlace, shape: Shape, space: Fold
 }
 
 const within = (a: Range, b: Range): boolean => a[0] >= b[0] && a[1] <= b[1];
-
-/**
- * Both kinds of meeting have one shape. One equation is solved for y, as a function y(x, q), wherever its slope in y has one sign
- * and it has opposite signs at both ends of y. What is left is φ(x, q), bent one way in x and at both ends of x on the side to
- * which it bends, so that it has two zeros, or none, as its extremum lies on one side of zero or the other; and as φ only
- * rises or only falls with q, the extremum passes zero once.
- */
-interface Shape {
-  readonly x: "t" | "p";
-  readonly y: "t" | "p";
-  /** The third equation: zero where folds meet, and its slopes in T, p, q. */
-  readonly third: (system: FoldSystem, box: FoldBox) => readonly [Range, Range, Range, Range];
-  /** The solved equation and its slope in y. */
-  readonly solved: (system: FoldSystem, box: FoldBox) => readonly [Range, Range];
-  /** φ, its slope in q and its bend in x. */
-  readonly left: (system: FoldSystem, box: FoldBox) => readonly [Range, Range, Range];
-}
-
-/** N = 0 gives p(T, q); φ = N_T with φ_q = N_Tq − N_Tp·N_q/N_p and the second derivative of N_T along p(T, q). */
-const CUSP: Shape = {
-  x: "t",
-  y: "p",
-  third(system, box) {
-    const { ntt } = system.read(box);
-    const { nttt, nttp, nttq } = system.further(box);
-    return [ntt, nttt, nttp, nttq];
-  },
-  solved(system, box) {
-    const { n, np } = closer(system, box);
-    return [n, np];
-  },
-  left(system, box) {
-    const { nt, np, nq, ntt, ntp, ntq } = closer(system, box);
-    const { npp, nttt, nttp, ntpp } = system.further(box);
-    const turn = minus(over(nt, np));
-    const twice = (r: Range) => times([2, 2], r);
-    const turning = minus(over(plus(ntt, plus(twice(times(ntp, turn)), times(npp, squared(turn)))), np));
-    const bend = plus(
-      plus(nttt, twice(times(nttp, turn))),
-      plus(times(ntpp, squared(turn)), times(ntp, turning)),
-    );
-    return [nt, plus(ntq, minus(over(times(ntp, nq), np))), bend];
-  },
-};
-
-/** N_T = 0 gives T(p, q); φ = N with φ_q = N_q and φ_pp = N_pp − N_Tp²/N_TT along it. */
-const POINT: Shape = {
-  x: "p",
-  y: "t",
-  third(system, box) {
-    const { np, ntp } = system.read(box);
-    const { npp, npq } = system.further(box);
-    return [np, ntp, npp, npq];
-  },
-  solved(system, box) {
-    const { nt, ntt } = closer(system, box);
-    return [nt, ntt];
-  },
-  left(system, box) {
-    const { n, nq, ntt, ntp } = closer(system, box);
-    return [n, nq, plus(system.further(box).npp, minus(over(squared(ntp), ntt)))];
-  },
-};
-
-const squared = ([low, high]: Range): Range => {
-  const [a, b] = [times([low, low], [low, low]), times([high, high], [high, high])];
-  return low <= 0 && high >= 0 ? [0, Math.max(a[1], b[1])] : [Math.min(a[0], b[0]), Math.max(a[1], b[1])];
-};
-
-function meetingNear(system: FoldSystem, near: FoldPlace, shape: Shape): FoldPlace | undefined {
-  let at = near;
-  for (let i = 0; i < MOST_STEPS; i++) {
-    const box = boxAt(at);
-    const m = middles(system.read(box));
-    const [f, ft, fp, fq] = shape.third(system, box).map(middleOf) as [number, number, number, number];
-    const step = solved3(
-      [
-        [m.nt, m.np, m.nq],
-        [m.ntt, m.ntp, m.ntq],
-        [ft, fp, fq],
-      ],
-      [m.n, m.nt, f],
-    );
-    if (!step.every(Number.isFinite)) return undefined;
-    at = { t: at.t - step[0], p: at.p - step[1], q: at.q - step[2] };
-    const size = [at.t, at.p, at.q].map(Math.abs) as [number, number, number];
-    if (step.every((s, j) => Math.abs(s) <= 1e-13 * (size[j] as number) + 1e-15)) return at;
-  }
-  return at;
-}
-
-type Three = readonly [number, number, number];
-
-/** Cramer's rule. */
-function solved3(rows: readonly [Three, Three, Three], right: Three): Three {
-  const det = (m: readonly [Three, Three, Three]) =>
-    m[0][0] * (m[1][1] * m[2][2] - m[1][2] * m[2][1]) -
-    m[0][1] * (m[1][0] * m[2][2] - m[1][2] * m[2][0]) +
-    m[0][2] * (m[1][0] * m[2][1] - m[1][1] * m[2][0]);
-  const whole = det(rows);
-  const replaced = (column: number) =>
-    det(
-      rows.map((row, i) => row.map((v, j) => (j === column ? right[i] : v))) as unknown as [
-        Three,
-        Three,
-        Three,
-      ],
-    );
-  return [replaced(0) / whole, replaced(1) / whole, replaced(2) / whole];
-}
 
 /** Tries a cap that reaches so far in the second given. */
 function capAround(

@@ -2,7 +2,8 @@
 import type { Range } from "../ground/range.ts";
 import { meet, signOfRange } from "../search/interval.ts";
 import type { FoldCap } from "./foldCap.ts";
-import type { FoldChain, Space } from "./foldChains.ts";
+import type { FoldChain } from "./foldChain.ts";
+import type { Space } from "./foldChains.ts";
 import {
   boxAt,
   closer,

@@ -101,7 +101,7 @@ export function boxOf({ at, along, reach }: Around, q: Range): FoldBox {
 }
 
 /** What every section of a tube over some values of the second given holds; in the wrong order where that is nothing. */
-export function commonOf({ at, along, reach }: Around, q: Range): Pick<FoldBox, "t" | "p"> {
+export function commonOf({ at, along, reach }: Around, q: Range): Plane {
   const side = (x: number, slope: number, r: number): Range => {
     const [low, high] = times(pointAt(slope), [below(q[0] - at.q), above(q[1] - at.q)]);
     return [above(above(x - r) + high), below(below(x + r) + low)];
@@ -117,3 +117,16 @@ export const placeIn = ({ at, along }: FoldTube, q: number): FoldPlace => ({
   ...{ t: at.t + along[0] * (q - at.q), p: at.p + along[1] * (q - at.q) },
   q,
 });
+
+/** Ranges of temperature and of the first given. */
+export type Plane = Pick<FoldBox, "t" | "p">;
+
+export const isPart = (a: Range, b: Range): boolean => a[0] >= b[0] && a[1] <= b[1];
+export const isWithin = (a: Plane, b: Plane): boolean => isPart(a.t, b.t) && isPart(a.p, b.p);
+
+/** The fold of a tube at one value, in tight bounds. */
+export function sectionOf(system: FoldSystem, tube: FoldTube, q: number): FoldBox {
+  const fine = foldTube(system, placeIn(tube, q), pointAt(q));
+  const tight = fine && foldIn(fine, pointAt(q));
+  return tight && isWithin(tight, commonOf(tube, pointAt(q))) ? tight : foldIn(tube, pointAt(q));
+}

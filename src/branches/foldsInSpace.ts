@@ -2,7 +2,8 @@
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { FoldCap } from "./foldCap.ts";
-import { type ChainEnd, type FoldChain, foldChains, type Space } from "./foldChains.ts";
+import type { ChainEnd, FoldChain } from "./foldChain.ts";
+import { foldChains, type Space } from "./foldChains.ts";
 import { foldCover } from "./foldCover.ts";
 import type { FoldCurve, FoldMeeting, FoldPoint, FoldTouch } from "./foldDiagram.ts";
 import { type FoldPlace, type FoldSystem, foldSystem } from "./foldSystem.ts";

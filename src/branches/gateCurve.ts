@@ -71,7 +71,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
     ranges: rangesOf(loop),
   });
   const kernel = valueKernel(graph, { inputs, outputs: [nodes.curve, nodes.feedback] });
-  const { kinks, set: setKinks } = balanceOf(loop);
+  const { kinks, leaps, set: setKinks } = balanceOf(loop);
   const point = new Float64Array(inputs.length);
   const high = new Float64Array(inputs.length);
   const out = new Float64Array(6);
@@ -107,7 +107,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
     method: "line",
     reachesBeyond: true,
     signAt: (temperature) => signAt(feedback, temperature),
-    criticals: (range, effort) => criticalsOf({ feedback, kinks }, range, effort),
+    criticals: (range, effort) => criticalsOf({ feedback, kinks, leaps }, range, effort),
     set(givens, between) {
       point.set(givens, 1);
       feedback.values.set(givens, 1);

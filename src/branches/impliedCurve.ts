@@ -126,7 +126,7 @@ export function impliedCurve(loop: Loop, along: string): Curve {
     method: "monotone",
     reachesBeyond: false,
     signAt: (t) => signAt(feedback, t),
-    criticals: (t, effort) => criticalsOf({ feedback, kinks: [] }, t, effort),
+    criticals: (t, effort) => criticalsOf({ feedback, kinks: [], leaps: [] }, t, effort),
     set(givens, range, within) {
       low.set(givens, 1);
       high.set(givens, 1);

@@ -3,7 +3,7 @@ import type { Range } from "../ground/range.ts";
 import { kept } from "../loop/kept.ts";
 import { enclosedBalance } from "../states/enclosedBalance.ts";
 import { crossingFinder } from "./crossingFinder.ts";
-import type { BranchEnd } from "./diagram.ts";
+import type { Meeting } from "./met.ts";
 import { restCounter } from "./passage.ts";
 import { saddleFinder } from "./saddleFinder.ts";
 import type { Stretch } from "./stretch.ts";
@@ -14,15 +14,6 @@ export interface Sides {
   readonly before: readonly number[];
   readonly after: readonly number[];
 }
-
-/**
- * `crossing`: the two branches cross, proved. `near`: they cross, or turn away from each other closer than rounding.
- * `apart`: they are two branches that never meet. `gap`: they end in folds on both sides of a parameter without the two.
- */
-export type Meeting =
-  | { readonly kind: "crossing" | "near"; readonly end: BranchEnd }
-  | { readonly kind: "apart" }
-  | { readonly kind: "gap"; readonly at: number; readonly ends: readonly [BranchEnd, BranchEnd] };
 
 /** Two neighbours (the index of the cooler) and how they meet. */
 export type Met = Meeting & { readonly index: number };

@@ -6,15 +6,11 @@ import type { BranchEnd, UndecidedStretch } from "./diagram.ts";
 import type { Parts, Task } from "./diagramOf.ts";
 import { fixedGivens } from "./fixedGivens.ts";
 import { type Change, type Column, joinColumns } from "./joinColumns.ts";
-import { type Met, meetingOf } from "./meeting.ts";
+import { type Counted, lookedInto } from "./lookedInto.ts";
+import type { Met } from "./meeting.ts";
 import type { NetReader } from "./netReader.ts";
 import { passageOf } from "./passage.ts";
-
-/** A stretch of parameters with a number of states; `null` where it is not known. */
-interface Stretch {
-  readonly parameters: Range;
-  readonly count: number | null;
-}
+import { middleOf } from "./stretch.ts";
 
 const COLUMNS = 33;
 const SAMPLES = 200;
@@ -40,7 +36,7 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
   };
   const { stretches, met, folded } = loop.sampled
     ? { stretches: found, met: new Map<number, Met>(), folded: new Map<number, BranchEnd>() }
-    : looked(loop, task, found, columnAt);
+    : lookedInto(loop, task, found, columnAt);
   const groups = stretches.flatMap(({ parameters, count }) => {
     if (count === null) return [];
     const columns = placesIn(parameters).map(columnAt);
@@ -59,64 +55,37 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
     if (meeting?.kind === "crossing") proved.add(from);
     return meeting?.kind === "crossing" || meeting?.kind === "near" ? meeting : undefined;
   };
+  const counted = (parameters: Range) => ({ temperatures: within, parameters, kind: "count" as const });
+  /** A stretch in whose middle nothing is undecided but one leap of the balance through zero. */
+  const leapIn = (parameters: Range): UndecidedStretch | undefined => {
+    const { undecided } = net.enumerate(middleOf(parameters), within, COLUMN_EFFORT);
+    const [leap, ...others] = undecided;
+    return leap?.kind === "jump" && others.length === 0
+      ? { temperatures: leap.interval, parameters, kind: "jump" }
+      : undefined;
+  };
   const { branches, folds, crossings } = joinColumns(groups, endOf, metIn);
   const undecided = stretches
     .filter(({ count, parameters }) => count === null && !proved.has(parameters[0]))
     .map(({ parameters }): UndecidedStretch => {
       const meeting = met.get(parameters[0]);
-      if (meeting?.kind !== "near") return { temperatures: within, parameters, kind: "count" };
+      if (meeting?.kind !== "near")
+        return loop.sampled ? counted(parameters) : (leapIn(parameters) ?? counted(parameters));
       return { temperatures: meeting.end.temperatureBracket, parameters, kind: "transcritical" };
     });
   return { method: loop.sampled ? "samples" : "tiles", branches, folds, crossings, undecided, cost };
 }
 
-/** Looks into the stretches between two of the same number of states, where two of them may meet. */
-function looked(
-  loop: Loop,
-  { name, within, givens }: Task,
-  found: readonly Stretch[],
-  columnAt: (at: number) => Column,
-) {
-  const met = new Map<number, Met>();
-  const folded = new Map<number, BranchEnd>();
-  const stretches = found.flatMap((stretch, i): Stretch[] => {
-    const { parameters, count } = stretch;
-    const around = [found[i - 1]?.count ?? null, found[i + 1]?.count ?? null];
-    if (count !== null || around[0] === null || around[0] !== around[1]) return [stretch];
-    const [before, after] = parameters.map((p) => columnAt(p).states.map((s) => s.temperature)) as [
-      number[],
-      number[],
-    ];
-    if (before.length !== around[0] || after.length !== around[0]) return [stretch];
-    const meeting = meetingOf(loop, name)({ parameters, before, after }, { within, givens });
-    if (!meeting) return [stretch];
-    if (meeting.kind === "apart") return [{ parameters, count: around[0] }];
-    if (meeting.kind !== "gap") {
-      met.set(parameters[0], meeting);
-      return [stretch];
-    }
-    const { at, ends } = meeting;
-    folded.set(parameters[0], ends[0]);
-    folded.set(at, ends[1]);
-    return [
-      { parameters: [parameters[0], at], count: null },
-      { parameters: [at, at], count: around[0] - 2 },
-      { parameters: [at, parameters[1]], count: null },
-    ];
-  });
-  return { stretches, met, folded };
-}
-
 function provedStretches(loop: Loop, { name, givens, between, within, effort }: Task) {
   const at = fixedGivens(loop, name, givens);
   const { tiles, cost } = proveCount(loop, { within, over: { [name]: between }, at, effort });
-  const stretches = tiles.map(({ over, count }): Stretch => ({ parameters: over[name] as Range, count }));
+  const stretches = tiles.map(({ over, count }): Counted => ({ parameters: over[name] as Range, count }));
   return { stretches, cost: { ...cost } };
 }
 
 function sampledStretches({ between: [low, high], within }: Task, net: NetReader) {
   const cost = { boxes: 0, points: 0 };
-  const stretches: Stretch[] = [];
+  const stretches: Counted[] = [];
   for (let i = 0; i <= SAMPLES; i++) {
     const at = i === SAMPLES ? high : low + ((high - low) * i) / SAMPLES;
     const { zeros, points } = net.enumerate(at, within, COLUMN_EFFORT);

@@ -5,7 +5,7 @@ import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { above, below } from "../search/enclosed.ts";
 import { minus, plus, signOfRange, times } from "../search/interval.ts";
-import type { Meeting } from "./meeting.ts";
+import type { Meeting } from "./met.ts";
 import { planeReader, pointAt } from "./planeReader.ts";
 import { endOf, middleOf, nearestProved } from "./stretch.ts";
 

@@ -37,9 +37,12 @@ function enclosed(loop: Loop, place: number): Solver {
   const { graph, net } = loop;
   const inputs = inputsOf(loop);
   const line = lineOf(loop, net, place);
-  const kinks = coneOf(graph, [net], inputs)
-    .filter((id) => graph.ops[id] === "min" || graph.ops[id] === "max")
-    .map((id) => lineOf(loop, graph.node("sub", graph.args[id] as readonly number[]), place));
+  const kinks = coneOf(graph, [net], inputs).flatMap((id) => {
+    const args = graph.args[id] as readonly number[];
+    if (graph.ops[id] === "step") return [lineOf(loop, args[0] as number, place)];
+    const isKink = graph.ops[id] === "min" || graph.ops[id] === "max";
+    return isKink ? [lineOf(loop, graph.node("sub", args), place)] : [];
+  });
   return (values, within, effort) => {
     const fine = (within[1] - within[0]) / FINE_PARTS;
     const cuts: number[] = [];

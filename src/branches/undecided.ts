@@ -12,7 +12,7 @@ const AT_AN_END: Readonly<Record<DoubtKind | "level", UndecidedStretch["kind"]>>
   corner: "edge",
   edge: "edge",
   flat: "continuum",
-  jump: "other",
+  jump: "jump",
   undefined: "undefined",
   effort: "effort",
   level: "level",

@@ -70,6 +70,7 @@ const RULES: Readonly<Record<Op, Rule>> = {
   tanh: (x) => [x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), x.seed)],
   min: (x) => chosen(x, "pick", x.args),
   max: (x) => chosen(x, "pick", [arg(x, 1), arg(x, 0)]),
+  step: (x) => [x.w.g.node("jump", [arg(x, 0), ...[0, 0, 0].map(x.w.constant)])],
   pick: branch,
   jump: branch,
   call: (x) => {

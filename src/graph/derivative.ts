@@ -87,6 +87,8 @@ const RULES: Readonly<Record<Op, Rule>> = {
   tanh: (x) => x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), first(x)),
   min: (x) => choose("pick", x, arg(x, 0), arg(x, 1), 0),
   max: (x) => choose("pick", x, arg(x, 1), arg(x, 0), 0),
+  // zero on both sides, and none at the leap
+  step: (x) => x.w.g.node("jump", [arg(x, 0), ...[0, 0, 0].map(x.w.constant)]),
   pick: (x) => choose("jump", x, arg(x, 0), arg(x, 1), 2),
   jump: (x) => choose("jump", x, arg(x, 0), arg(x, 1), 2),
   call(x) {

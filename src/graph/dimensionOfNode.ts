@@ -22,7 +22,8 @@ interface Dimensioned {
 }
 
 /**
- * In + − min max a bare number takes the other operand's unit, in × ÷ it has none; exp, log and tanh take pure numbers.
+ * In + − min max a bare number takes the other operand's unit, in × ÷ it has none; exp, log and tanh take pure numbers, a
+ * step takes anything and is one.
  * Outside law bodies a disagreement throws `unit-mismatch`; inside, the dimension is left open (`undefined`), because a
  * law's body may hold an empirical formula: it is checked at its ports.
  */
@@ -38,6 +39,8 @@ export function dimensionOfNode(g: Dimensioned, op: Op, args: readonly number[])
       return rootDimension(pure(x));
     case "neg":
       return x;
+    case "step":
+      return NO_DIMENSION;
     case "exp":
     case "log":
     case "tanh":

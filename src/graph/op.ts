@@ -2,7 +2,7 @@
 import type { LawCard } from "./card.ts";
 
 /**
- * What a node does. `pick(a, b, x, y)` is x where a < b, else y: the slope at a kink. `jump` is the same for what does not
+ * What a node does. `step` is 0 below zero and 1 from zero on. `pick(a, b, x, y)` is x where a < b, else y: the slope at a kink. `jump` is the same for what does not
  * exist at the kink (a curvature). `call` runs an ordinary function. `mean` passes its argument on and carries meaning.
  */
 export type Op =
@@ -20,6 +20,7 @@ export type Op =
       | "tanh"
       | "min"
       | "max"
+      | "step"
     )
   | ("pick" | "jump" | "call" | "mean");
 

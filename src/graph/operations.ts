@@ -2,6 +2,7 @@
 import { exp as expOf } from "../ground/elementary/exp.ts";
 import { log as logOf } from "../ground/elementary/log.ts";
 import { max as maxOf, min as minOf } from "../ground/elementary/minMax.ts";
+import { step as stepOf } from "../ground/elementary/step.ts";
 import { tanh as tanhOf } from "../ground/elementary/tanh.ts";
 import { fail } from "../ground/errors.ts";
 import type { Op } from "./op.ts";
@@ -40,6 +41,11 @@ export const div: Two = /* @__PURE__ */ two("div", (a, b) => a / b);
 export const min: Two = /* @__PURE__ */ two("min", minOf);
 /** The larger of two; a kink where they cross. */
 export const max: Two = /* @__PURE__ */ two("max", maxOf);
+/**
+ * 0 where a is below zero, 1 at zero and above: a leap. Its slope is 0 on both sides and none at the leap; no state is ever found
+ * there, a search says that the balance leaps through zero (`jump`).
+ */
+export const step: One = /* @__PURE__ */ one("step", stepOf);
 /** −a. */
 export const neg: One = /* @__PURE__ */ one("neg", (a) => -a);
 /** Square root. */

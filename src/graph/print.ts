@@ -88,6 +88,9 @@ function printOne(g: Graph, id: number, options: PrintOptions, print: (id: numbe
       return { text: `-${at(0, 3)}`, rank: 1 };
     case "sqrt":
       return { text: tex ? `\\sqrt{${at(0, 0)}}` : `sqrt(${at(0, 0)})`, rank: 5 };
+    case "step":
+      // Iverson's bracket: 1 where it is true, else 0
+      return { text: tex ? `\\left[${at(0, 0)} \\ge 0\\right]` : `(${at(0, 0)} >= 0)`, rank: 5 };
     default:
       return { text: printCall(g, id, op, parts, tex), rank: 5 };
   }

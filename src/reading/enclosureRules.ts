@@ -83,9 +83,19 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     ...{ lo: w.greatest(a.lo, b.lo), hi: w.greatest(a.hi, b.hi), err: w.sum(a.err, b.err) },
     within: [Math.max(a.within[0], b.within[0]), Math.max(a.within[1], b.within[1])],
   }),
+  step: (w, a) => leap(w, a),
   pick: (w, ...args) => encloseBranch(w, true, args),
   jump: (w, ...args) => encloseBranch(w, false, args),
 };
+
+// 0 or 1 where the sign is proved, both where it is not; a failure of a stays one
+function leap(w: EnclosureWriter, a: Enclosure): Enclosure {
+  const [zero, one] = [w.literal(0), w.literal(1)];
+  const error = w.widened(a.err);
+  const lo = error === undefined ? w.pick(a.lo, zero, zero, one) : w.pick(error, a.lo, one, zero);
+  const hi = error === undefined ? w.pick(a.hi, zero, zero, one) : w.pick(a.hi, w.neg(error), zero, one);
+  return { lo, hi, err: w.times(zero, error), within: [0, 1] };
+}
 
 // a² − a'² = 2a'α + α²
 function square(w: EnclosureWriter, a: Enclosure): Enclosure {

@@ -39,11 +39,19 @@ function registerOf(
   if (op === "const") return program.datum(value);
   if (op === "call") return program.call((g.functions[value] as Compute).value, args);
   if (op === "mean") return args[0] as number;
+  if (op === "step") return unitStep(program, args[0] as number);
   return program.step(STEP[op], ...args);
 }
 
+/** 0 below zero, else 1; NaN for NaN, which alone has no size below 1 when that is negative. */
+function unitStep(program: ScalarProgram, a: number): number {
+  const [zero, one, none] = [0, 1, NaN].map(program.literal) as [number, number, number];
+  const known = program.step("pick", program.step("neg", program.step("abs", a)), one, one, none);
+  return program.step("pick", a, zero, zero, known);
+}
+
 /** The step of each operation; a missing one does not compile. A jump reads like a pick. */
-const STEP: Readonly<Record<Exclude<Op, "const" | "input" | "mean" | "call">, Step>> = {
+const STEP: Readonly<Record<Exclude<Op, "const" | "input" | "mean" | "call" | "step">, Step>> = {
   add: "add",
   sub: "sub",
   mul: "mul",

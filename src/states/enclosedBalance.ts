@@ -11,8 +11,10 @@ import { shouldersOf } from "./shoulders.ts";
 /** A balance that can be enclosed over boxes of temperature, for givens that can be set. */
 export interface EnclosedBalance {
   readonly net: Enclosed;
-  /** For every min(a, b) and max(a, b) behind the balance: a − b, which is zero at the kink. */
+  /** For every min(a, b) and max(a, b) behind the balance: a − b, which is zero at the kink; then the leaps. */
   readonly kinks: readonly Enclosed[];
+  /** For every step(a) behind the balance: a, which is zero at the leap. */
+  readonly leaps: readonly Enclosed[];
   /** For searches of the balance, which write down here where it is to be cut; the guides change with the givens. */
   readonly limits: { effort: number; readonly cuts: number[]; readonly guides: Float64Array };
   /** Sets the values of the givens, in order; `high` differs from `low` where they are intervals. */
@@ -39,16 +41,20 @@ export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set(
     kernels.push(kernel);
     return enclosedBy(kernel);
   };
-  const pairs = coneOf(graph, [net], inputs).filter(
-    (id) => graph.ops[id] === "min" || graph.ops[id] === "max",
-  );
+  const behind = coneOf(graph, [net], inputs);
+  const pairs = behind.filter((id) => graph.ops[id] === "min" || graph.ops[id] === "max");
+  const steps = behind
+    .filter((id) => graph.ops[id] === "step")
+    .flatMap((id) => graph.args[id] as readonly number[]);
   const differences = new Set(pairs.map((id) => graph.node("sub", graph.args[id] as readonly number[])));
+  const leaps = [...new Set(steps)].map(enclosed);
   const shoulders = shouldersOf(loop);
   const low = new Float64Array(inputs.length);
   const high = new Float64Array(inputs.length);
   return {
     net: enclosed(net),
-    kinks: [...differences].map(enclosed),
+    kinks: [...[...differences].map(enclosed), ...leaps],
+    leaps,
     limits: { effort: 0, cuts: [], guides: shoulders.places },
     set(lows, highs) {
       for (let i = 1; i < low.length; i++) {

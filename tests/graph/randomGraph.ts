@@ -19,7 +19,7 @@ export function randomNumbers(seed: number): () => number {
   };
 }
 
-const ONE = ["neg", "sqrt", "exp", "log", "tanh", "square", "fourth"];
+const ONE = ["neg", "sqrt", "exp", "log", "tanh", "square", "fourth", "step"];
 const TWO = ["add", "sub", "mul", "div", "min", "max"];
 const SPECIAL = [0, -0, 1, -1, 0.5, 2, 1e-310, 1e300];
 

@@ -1,6 +1,19 @@
 // What cannot be enclosed says so; kinks count with both sides; signs come from declared ranges only.
 import { describe, expect, test } from "vitest";
-import { add, div, exp, log, max, min, mul, sqrt, square, sub, tanh } from "../../src/graph/operations.ts";
+import {
+  add,
+  div,
+  exp,
+  log,
+  max,
+  min,
+  mul,
+  sqrt,
+  square,
+  step,
+  sub,
+  tanh,
+} from "../../src/graph/operations.ts";
 import type { Quantity, Value } from "../../src/graph/quantity.ts";
 import { enclosureKernel } from "../../src/reading/enclosureKernel.ts";
 import { allowGeneration } from "../../src/reading/generation.ts";
@@ -117,6 +130,42 @@ describe.each([
     });
     test("an infinite input in an infinite range", () => {
       expect(isKnown(read((x) => tanh(x), { x: [0, Infinity] })({ x: Infinity })[0])).toBe(false);
+    });
+  });
+
+  describe("a leap", () => {
+    test.each([
+      ["across", [-1, 2], [0, 1]],
+      ["up to it", [-1, 0], [0, 1]],
+      ["from it on", [0, 2], [1, 1]],
+      ["at it", 0, [1, 1]],
+      ["at −0", -0, [1, 1]],
+      ["below", [-2, -1e-300], [0, 0]],
+    ] as const)("%s", (_name, x, [least, greatest]) => {
+      expect(read((a) => step(a))({ x })[0]).toEqual([least, greatest, 0]);
+    });
+    test.each([
+      ["across", [-1, 2], false],
+      ["ending at it", [-1, 0], false],
+      ["at it", 0, false],
+      ["beginning at it, where it has its value already", [0, 2], true],
+      ["below", [-2, -1e-300], true],
+      ["above", [1e-300, 2], true],
+    ] as const)("has a slope and a curvature only away from it: %s", (_name, x, known) => {
+      const write = (a: Quantity) => add(mul(3, a), mul(5, step(a)));
+      const [value, slope, curvature] = read(write)({ x });
+      expect([isKnown(value), isKnown(slope), isKnown(curvature)]).toEqual([true, known, known]);
+      if (known) expect(slope.slice(0, 2)).toEqual([3, 3]);
+    });
+    test("of what rounding may take across it", () => {
+      const [value, slope] = read((a, b) => step(sub(add(a, b), b)))({ x: 1e-17, y: 1 });
+      expect(value.slice(0, 2)).toEqual([0, 1]);
+      expect(isKnown(slope)).toBe(false);
+    });
+    test("of what has failed fails", () => {
+      for (const x of [-1, [-1, 2]] as const)
+        expect(isKnown(read((a) => step(log(a)))({ x })[0])).toBe(false);
+      expect(isKnown(read((a) => step(exp(a)))({ x: 800 })[0])).toBe(false);
     });
   });
 

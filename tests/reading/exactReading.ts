@@ -7,6 +7,7 @@ import * as big from "./bigNumber.ts";
 const ARITHMETIC: Record<string, (a: big.Real, b: big.Real) => big.Big> = {
   ...{ add: big.add, sub: big.sub, mul: big.mul, div: big.div, min: big.min, max: big.max },
   ...{ neg: big.neg, sqrt: big.sqrt, exp: big.exp, log: big.log, tanh: big.tanh, mean: (a) => a },
+  step: (a) => big.fromDouble(big.less(a, big.fromDouble(0) as big.Real) ? 0 : 1),
 };
 
 /** The values of `outputs` at a point; `null` where a value is not defined. */

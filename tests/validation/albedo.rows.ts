@@ -1,5 +1,5 @@
 // Albedo curves and mixtures.
-import { mixAlbedo, quadraticAlbedo, rampAlbedo, tanhAlbedo } from "../../src/index.ts";
+import { mixAlbedo, quadraticAlbedo, rampAlbedo, stepAlbedo, tanhAlbedo } from "../../src/index.ts";
 import forms from "../reference/computed/albedo_forms.json" with { type: "json" };
 import { type Check, ROUNDED, ROUNDING } from "./check.ts";
 import { BUDYKO, KAPER_ENGLER, PIERREHUMBERT, SPIEGEL } from "./sources.ts";
@@ -57,6 +57,26 @@ export const albedoRows: readonly Check[] = [
     source: PIERREHUMBERT,
     basis: "computed with NumPy (albedo_forms.py)",
   }),
+  ...(
+    [
+      [-10.01, 0.62],
+      [-10, 0.32],
+      [15, 0.32],
+    ] as const
+  ).map(
+    ([celsius, albedo]): Check => ({
+      covers: ["stepAlbedo"],
+      what: `ice below −10 °C, at ${celsius} °C`,
+      published: albedo,
+      unit: "1",
+      ours: () =>
+        stepAlbedo({ temperature: 273.15 + celsius, cold: 0.62, warm: 0.32, threshold: 273.15 - 10 }),
+      tolerance: 1e-15,
+      because: "printed digits of both albedos; one rounding",
+      source: BUDYKO,
+      basis: "from memory",
+    }),
+  ),
   ...forms.caps.map(
     ({ edge, open, ice, albedo }): Check => ({
       covers: ["mixAlbedo"],

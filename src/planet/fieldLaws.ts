@@ -3,6 +3,7 @@ import { bondAlbedo } from "../albedo/bondAlbedo.ts";
 import { iceShare } from "../albedo/iceShare.ts";
 import { quadraticAlbedo } from "../albedo/quadraticAlbedo.ts";
 import { rampAlbedo } from "../albedo/rampAlbedo.ts";
+import { stepAlbedo } from "../albedo/stepAlbedo.ts";
 import { tanhAlbedo } from "../albedo/tanhAlbedo.ts";
 import { ch4AdjustedForcingEtminan } from "../forcing/ch4AdjustedForcingEtminan.ts";
 import { ch4AdjustedForcingMeinshausen } from "../forcing/ch4AdjustedForcingMeinshausen.ts";
@@ -32,7 +33,7 @@ import { atmosphereCapacity } from "../heat/atmosphereCapacity.ts";
 import { mixedLayerCapacity } from "../heat/mixedLayerCapacity.ts";
 
 /** What a surface reflects. */
-export const SURFACE_LAWS = { tanhAlbedo, rampAlbedo, quadraticAlbedo } as const;
+export const SURFACE_LAWS = { tanhAlbedo, rampAlbedo, quadraticAlbedo, stepAlbedo } as const;
 /** What a whole planet reflects. */
 export const ALBEDO_LAWS = { ...SURFACE_LAWS, bondAlbedo } as const;
 export const SHARE_LAWS = { iceShare } as const;

@@ -48,6 +48,7 @@ const laws = () =>
     lawSchema("tanhAlbedo", SURFACE_LAWS.tanhAlbedo),
     lawSchema("rampAlbedo", SURFACE_LAWS.rampAlbedo),
     lawSchema("quadraticAlbedo", SURFACE_LAWS.quadraticAlbedo),
+    lawSchema("stepAlbedo", SURFACE_LAWS.stepAlbedo),
   ] as const;
 const WORDS = "a number from 0 to 1, { covers } or { law }";
 

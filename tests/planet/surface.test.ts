@@ -184,6 +184,15 @@ describe("ice whose share answers to temperature", () => {
   });
 });
 
+test("an albedo that leaps is a coupling with a state on either side, and the leap is named", () => {
+  const step = { law: "stepAlbedo", cold: 0.62, warm: 0.32, threshold: "-10 degC" };
+  const planet = readPlanet(over(step));
+  expect(planet.loop.couplings.map(({ name }) => name)).toEqual(["surfaceAlbedo"]);
+  const { states, undecided } = findStates(planet.loop, { within: [50, 1000] });
+  expect(states.map(({ report }) => report.surfaceAlbedo)).toEqual([0.62, 0.32]);
+  expect(undecided).toEqual([expect.objectContaining({ kind: "jump" })]);
+});
+
 test("a Bond albedo from a geometric one is a number", () => {
   const planet = readPlanet(simple({ albedo: { law: "bondAlbedo", geometric: 0.25, phaseIntegral: 1.2 } }));
   expect(planet.assumptions).toMatchObject({ albedo: 0.3, albedoLaw: "bondAlbedo", albedoOf: "planet" });

@@ -123,7 +123,10 @@ export interface StateAppraisal {
   readonly feedbacks: Feedbacks | null;
   /** What would change it, by size of the change for 1 %; null for a state that does not hold. */
   readonly sensitivities: readonly Sensitivity[] | null;
-  /** How far the star may brighten or fade; null for a state that does not hold, and where no one given stands for the star. */
+  /**
+   * How far the star may brighten or fade; null for a state that does not hold, where no one given stands for the star, and
+   * where the diagram does not decide its branch.
+   */
   readonly margins: TippingMargins | null;
   /** Null where no surface pressure is given. */
   readonly surface: SurfacePhases | null;

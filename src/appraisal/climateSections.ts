@@ -6,7 +6,7 @@ import { marginLines } from "./marginLines.ts";
 import { kelvin, type Section, shown, signed, type Table, YEAR } from "./report.ts";
 
 /** States, ledgers, what holds and what would change them, how far they are from an end, and their surfaces. */
-export function climateSections({ found, states, starlight, equilibrium }: Appraisal): Section[] {
+export function climateSections({ found, states, diagram, starlight, equilibrium }: Appraisal): Section[] {
   if (!found) return [];
   const range = `${found.within.join(" and ")} K`;
   const holding = states.filter((s) => s.feedbacks !== null);
@@ -22,7 +22,7 @@ export function climateSections({ found, states, starlight, equilibrium }: Appra
     { title: "Energy ledger of each climate that holds, W m-2", blocks: ledgerTable(holding) },
     { title: "What holds each climate", blocks: feedbackTable(holding) },
     { title: "What would change each climate, to first order", blocks: sensitivityTable(holding) },
-    { title: "How far each climate is from an end of its branch", blocks: marginLines(holding) },
+    { title: "How far each climate is from an end of its branch", blocks: marginLines(holding, diagram) },
     {
       title: "Which average over the orbit suits",
       blocks: [

@@ -37,7 +37,9 @@ export function completed(description: unknown): Completed {
     else fill("albedo", 0, dark);
   }
   fill("longwave", { law: "greyEmission", emissivity: 1 }, "no states");
-  fill("heatCapacity", "unknown", "no times, and no word on which average over the orbit suits");
+  const timeless = "no times, and no word on which average over the orbit suits";
+  if (whole.heatCapacity === "unknown") missing.push({ path: "heatCapacity", text: timeless });
+  fill("heatCapacity", "unknown", timeless);
   const { orbit } = whole;
   if (isRecord(orbit) && isEccentric(orbit.eccentricity) && orbit.average === undefined) {
     whole.orbit = { ...orbit, average: "flux" };

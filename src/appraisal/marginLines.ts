@@ -1,26 +1,24 @@
 // How far the climates that hold are from an end of their branches, in words.
 import type { Margin, TippingMargins } from "../branches/margins.ts";
-import type { StateAppraisal } from "./appraisal.ts";
+import type { Appraisal, StateAppraisal } from "./appraisal.ts";
 import { kelvin, shown, YEAR } from "./report.ts";
 
 const GIGAYEAR = 1e9 * YEAR;
 
 /** How far the star may brighten or fade before a state is lost, what comes then, and whether there is a way back. */
-export function marginLines(states: readonly StateAppraisal[]): string[] {
+export function marginLines(states: readonly StateAppraisal[], diagram: Appraisal["diagram"]): string[] {
+  if (!diagram) return [];
   const lines = states.flatMap(({ state, margins }) => {
-    if (!margins) return [];
     const at = `at ${kelvin(state.temperature)} K: `;
+    if (!margins) return [`${at}its branch is not decided`];
     const basin = margins.basin ? basinText(margins.basin) : "";
     const all = [marginText(margins, margins.rise), marginText(margins, margins.fall), basin];
     return all.filter(Boolean).map((text) => at + text);
   });
-  const [first] = states.flatMap(({ margins }) => margins ?? []);
-  if (!first) return [];
-  const [low, high] = first.between.map((end) => shown(end / first.at, 4));
-  return [
-    ...lines,
-    `followed: ${first.along} from ${low} to ${high} of today, all else fixed; diagram: ${first.proof}`,
-  ];
+  const { along, proof, between } = diagram;
+  const now = states.find(({ margins }) => margins)?.margins?.at;
+  const range = now ? ` from ${between.map((end) => shown(end / now, 4)).join(" to ")} of today` : "";
+  return [...lines, `followed: ${along}${range}, all else fixed; diagram: ${proof}`];
 }
 
 function marginText({ along, at }: TippingMargins, { direction, end, relative, jump, time }: Margin): string {

@@ -5,6 +5,7 @@ import { tippingMargins } from "../branches/tippingMargins.ts";
 import { traceBranches } from "../branches/traceBranches.ts";
 import { analyseFeedbacks } from "../feedback/analyseFeedbacks.ts";
 import { equilibriumTemperature } from "../greenhouse/equilibriumTemperature.ts";
+import { ThermosteadError } from "../ground/errors.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { PlanetFacts } from "../planet/facts.ts";
@@ -88,7 +89,10 @@ function branchesOf(
   return traceBranches(loop, { along, between, ...search });
 }
 
-/** The budget along the star has the same flux in the same bits, so that a state of the planet's loop is one of it. */
+/**
+ * The budget along the star has the same flux in the same bits, so that a state of the planet's loop is one of it. Null where
+ * the diagram does not decide its branch.
+ */
 function marginsOf(
   state: State,
   { loop, along, brightening }: AlongStar,
@@ -96,5 +100,10 @@ function marginsOf(
 ): StateAppraisal["margins"] {
   const givens = Object.fromEntries(loop.givens.map(({ name, value }) => [name, value]));
   const options = { along, diagram, ...(brightening ? { brightening } : {}) };
-  return tippingMargins(loop, { ...state, givens }, options);
+  try {
+    return tippingMargins(loop, { ...state, givens }, options);
+  } catch (error) {
+    if (error instanceof ThermosteadError && error.code === "foreign-state" && !diagram.complete) return null;
+    throw error;
+  }
 }

@@ -19,8 +19,8 @@ export interface CouplingGraph {
  *
  * @example toSVG(couplingGraph(analyseFeedbacks(loop, state)))
  */
-export const couplingGraph = (feedbacks: Feedbacks): CouplingGraph =>
-  Object.freeze({ picture: "couplings", feedbacks });
+export const couplingGraph = <N extends string>(feedbacks: Feedbacks<N>): CouplingGraph =>
+  Object.freeze({ picture: "couplings", feedbacks: feedbacks as unknown as Feedbacks });
 
 /** Height of a box without the ends of lines, and of the end of a line in it, px. */
 const BOX = 28;

@@ -13,7 +13,8 @@ const ROW = 36;
  *
  * @example toVegaLite(feedbackBars(analyseFeedbacks(loop, state)))
  */
-export function feedbackBars({ reference, loops, others, feedbackParameter, temperature }: Feedbacks): Plot {
+export function feedbackBars<N extends string>(feedbacks: Feedbacks<N>): Plot {
+  const { reference, loops, others, feedbackParameter, temperature } = feedbacks;
   const parts: [string, number][] = [
     [`λ₀, ${reference.kind}`, reference.feedbackParameter],
     ...loops.map((loop): [string, number] => [loop.through.join(" → "), loop.feedbackParameter]),

@@ -70,7 +70,7 @@ export function ledgerPlot({ ledger: { reservoirs, flows } }: LedgerDrawing, wid
       drawn.filter((d) => d.kind === kind).flatMap((d) => d.band),
       name,
     );
-  const height = (stack.length - 1) * pitch + BOX + 1;
+  const height = Math.max(0, stack.length - 1) * pitch + BOX + 1;
   const least = 1e-6 * Math.max(0, ...laid.map((flow) => flow.value));
   const boxes = stack.map(({ name }) => ({
     x: 0,

@@ -131,7 +131,7 @@ export function drawingOf(
   { width, height }: { width: number; height: number },
 ): Plot {
   const turned = (items: readonly Item[]): Item[] =>
-    items.map((item) => ({ ...item, y: -item.y, ...(item.y2 === undefined ? {} : { y2: -item.y2 }) }));
+    items.map((item) => ({ ...item, y: 0 - item.y, ...(item.y2 === undefined ? {} : { y2: 0 - item.y2 }) }));
   const axis = (low: number, high: number) => ({ title: "", domain: [low, high] as const });
   const layers = draft.layers.map((layer) => ({ ...layer, items: turned(layer.items) }));
   return plotOf({ ...draft, layers, x: axis(0, width), y: axis(-height, 1), height: height + 1 });

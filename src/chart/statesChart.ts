@@ -118,4 +118,4 @@ function statesPlot({ title, y, within, curves, found, height, dropped = 0 }: St
 }
 
 const tipOf = ({ bracket, proved, feedbackParameter }: State): string =>
-  `λ ${numeral(feedbackParameter)}, ${proved ? "" : "not "}proved between ${rangeText(bracket, 17)} K`;
+  `λ ${numeral(feedbackParameter)}, ${proved ? "" : "not "}proved bracket ${rangeText(bracket, 17)} K`;

@@ -22,7 +22,7 @@ export function paintOf(
     fill: isLine ? "transparent" : open && mark === "point" ? colours.paper : colour,
     fillOpacity: open && mark === "box" ? 0.2 : 1,
     stroke: mark === "text" ? "transparent" : colour,
-    strokeWidth: full ? 0 : width,
+    strokeWidth: full || mark === "text" ? 0 : width,
     strokeDash: mark === "point" ? [1, 0] : dash,
   };
 }

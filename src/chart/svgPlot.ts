@@ -22,62 +22,39 @@ export function svgPlot(plot: Plot, { width, theme }: Page): string {
   const bottom = top + height;
   const inner = width - left - EDGE - Math.ceil(textWidth(ticks.x.at(-1)?.text ?? "", SMALL) / 2);
   const scale =
-    ({ domain: [low, high] }: Axis, from: number, to: number) =>
-    (value: number) =>
+    ({ domain: [low, high] }: Axis, from: number, to: number): Scale =>
+    (value) =>
       tenth(from + ((value - low) / (high - low)) * (to - from));
-  const x = scale(plot.x, left, left + inner);
-  const y = scale(plot.y, bottom, top);
+  const [x, y] = [scale(plot.x, left, left + inner), scale(plot.y, bottom, top)];
   const text = (at: readonly [number, number], words: string, more: object = {}): string =>
     el("text", { x: at[0], y: at[1], fill: colours.ink, ...more }, escaped(words));
   const texts = (from: number, lines: readonly string[], more: { fontSize: number; fill?: string }): string =>
     lines.map((line, i) => text([EDGE, from + i * (more.fontSize + 4)], line, more)).join("");
   const tick = (d: string): string => el("path", { d, stroke: colours.ink, fill: "none" });
-  const rect = (a: readonly number[], b: readonly number[], more: object): string => {
-    const [[x1 = 0, y1 = 0], [x2 = 0, y2 = 0]] = [a, b];
-    const size = { width: Math.max(1, Math.abs(x2 - x1)), height: Math.max(1, Math.abs(y2 - y1)) };
-    return el("rect", { x: Math.min(x1, x2), y: Math.min(y1, y2), ...size, ...more });
-  };
-  const drawn = (layer: Layer): string => {
-    const { mark, look, items } = layer;
-    const paint = paintOf(layer, colours);
-    const at = (i: Item) => [x(i.x), y(i.y)] as const;
-    if (mark === "line") {
-      const d = items.map((item, k) => `${k > 0 && item.line === items[k - 1]?.line ? "L" : "M"}${at(item)}`);
-      return el("path", { d: d.join(""), tip: layer.name, ...paint });
-    }
-    const one = (item: Item): string => {
-      const { tip, x2 = item.x, y2 = item.y } = item;
-      if (mark === "point")
-        return el("path", { d: `M${at(item)}${OUTLINES[look.shape ?? "circle"]}`, tip, ...paint });
-      if (mark === "box") return rect(at(item), [x(x2), y(y2)], { tip, ...paint });
-      return text(at(item), String(item.text), {
-        textAnchor: look.centred ? "middle" : "start",
-        tip,
-        fill: paint.fill,
-      });
-    };
-    return items.map(one).join("");
-  };
+  const drawn = (layer: Layer, across: Scale, up: Scale): string =>
+    el(
+      "g",
+      { ...paintOf(layer, colours), textAnchor: layer.look.centred ? "middle" : "start" },
+      shapesOf(layer, across, up),
+    );
 
   // samples of all named layers with their names, side by side as far as they fit
   let [right, down] = [EDGE, bottom + (plot.x.title ? 58 : 20)];
-  const legend = plot.layers.flatMap((layer) => {
-    const { mark, look, name = "" } = layer;
+  const legend = plot.layers.flatMap(({ name, ...layer }) => {
     if (!name) return [];
     const words = wrapped(name, width - 2 * EDGE - SAMPLE, 12);
     const room = SAMPLE + Math.max(...words.map((line) => textWidth(line, 12)));
     if (right > EDGE && right + room > width - EDGE) [right, down] = [EDGE, down + LINE + 3];
-    const [start, y] = [right, down];
+    const [x1, y1] = [right, down];
     right += room + 18;
     down += (words.length - 1) * LINE;
-    const paint = paintOf(layer, colours);
-    const sample =
-      mark === "point"
-        ? el("path", { d: `M${start + 13} ${y}${OUTLINES[look.shape ?? "circle"]}`, ...paint })
-        : mark === "box" || look.full
-          ? rect([start + 4, y - 5], [start + 22, y + 5], paint)
-          : el("path", { d: `M${start} ${y}h26`, ...paint });
-    return [sample, ...words.map((line, i) => text([start + SAMPLE, y + 4 + i * LINE], line))];
+    const mark = layer.look.full ? "box" : layer.mark;
+    const items =
+      mark === "line"
+        ? [x1, x1 + 26].map((end) => ({ x: end, y: y1 }))
+        : [mark === "box" ? { x: x1 + 4, y: y1 - 5, x2: x1 + 22, y2: y1 + 5 } : { x: x1 + 13, y: y1 }];
+    const sample = drawn({ ...layer, mark, items }, tenth, tenth);
+    return [sample, ...words.map((line, i) => text([x1 + SAMPLE, y1 + 4 + i * LINE], line))];
   });
   const end = down + (legend.length > 0 ? 23 : -6);
   const size = { width, height: end + caption.length * LINE };
@@ -95,13 +72,33 @@ export function svgPlot(plot: Plot, { width, theme }: Page): string {
     ),
     text([left + inner, bottom + 36], plot.x.title, atEnd),
     text([EDGE, top - 12], plot.y.title),
-    ...plot.layers.map(drawn),
+    ...plot.layers.map((layer) => drawn(layer, x, y)),
     ...legend,
     texts(end, caption, { ...small, fill: colours.faint }),
   ];
   return (
     `<svg xmlns="http://www.w3.org/2000/svg" width="${width}" height="${size.height}" ` +
-    `viewBox="0 0 ${width} ${size.height}" role="img" aria-label="${escaped(plot.title)}" class="thermostead" ` +
+    `viewBox="0 0 ${width} ${size.height}" role="img" aria-label="${escaped(plot.title)}" ` +
+    `class="${theme === "auto" ? "thermostead" : ""}" ` +
     `font-family="system-ui, sans-serif" font-size="12">${body.join("")}</svg>`
   );
+}
+
+/** From a value to px. */
+type Scale = (value: number) => number;
+
+/** The shapes of a layer without their paint. */
+function shapesOf({ mark, look, items, name }: Layer, x: Scale, y: Scale): string {
+  const at = (item: Item): string => `${x(item.x)} ${y(item.y)}`;
+  if (mark === "line") {
+    const d = items.map((item, k) => (k > 0 && item.line === items[k - 1]?.line ? "L" : "M") + at(item));
+    return el("path", { d: d.join(""), tip: name });
+  }
+  const shape = (item: Item): string => {
+    const { tip, x2 = item.x, y2 = item.y } = item;
+    if (mark === "point") return el("path", { d: `M${at(item)}${OUTLINES[look.shape ?? "circle"]}`, tip });
+    if (mark === "text") return el("text", { x: x(item.x), y: y(item.y), tip }, escaped(item.text));
+    return el("path", { d: `M${at(item)}H${x(x2)}V${y(y2)}H${x(item.x)}z`, tip });
+  };
+  return items.map(shape).join("");
 }

@@ -17,8 +17,9 @@ export function ticksIn([low, high]: Range, about: number): Tick[] {
   const step = [1, 2, 5, 10].map((k) => k * power).find((s) => s >= least) as number;
   const ticks: Tick[] = [];
   for (let i = Math.ceil(low / step); i * step <= high; i++) {
-    // 12 digits: a multiple of a decimal fraction is written as people write it
-    ticks.push({ at: i * step, text: numeral(i * step, 12) });
+    // 12 digits: a multiple of a decimal fraction is written as people write it; and no −0
+    const at = Number((i * step).toPrecision(12)) + 0;
+    ticks.push({ at, text: numeral(at, 12) });
   }
   return ticks;
 }

@@ -38,7 +38,7 @@ export function vegaPlot(plot: Plot, { width, theme }: Page): Json {
     const [mark, channels] = MARKS[layer.mark];
     const { shape = "circle", centred } = layer.look;
     return {
-      data: { values: layer.items.map((item, order) => ({ ...item, order })) },
+      data: { values: layer.items.map((item, order) => ({ line: 0, ...item, order })) },
       mark: { ...mark, ...paintOf(layer, colours), shape, align: centred ? "center" : "left" },
       encoding: { ...places, ...channels, ...(layer.items[0]?.tip ? { tooltip: { field: "tip" } } : {}) },
     };
@@ -55,7 +55,7 @@ export function vegaPlot(plot: Plot, { width, theme }: Page): Json {
   });
   const legend = {
     ...{ orient: "bottom", direction: "vertical", columns: 1, title: null, labelLimit: width },
-    ...{ symbolOpacity: 1, symbolSize: 110, symbolStrokeWidth: 1.8 },
+    ...{ symbolLimit: 0, symbolOpacity: 1, symbolSize: 110, symbolStrokeWidth: 1.8 },
   };
   const channels = (["shape", "stroke", "fill", "strokeDash"] as const).map((key) => {
     const scale = { domain, range: signs.map((sign) => sign[key]) };

@@ -18,6 +18,7 @@ import { saturationPressureIce } from "../water/saturationPressureIce.ts";
 import { saturationPressureLiquid } from "../water/saturationPressureLiquid.ts";
 import { saturationTemperature } from "../water/saturationTemperature.ts";
 import type { Appraisal } from "./appraisal.ts";
+import { INTERPOLATED } from "./limits.ts";
 
 type Parts = Pick<Appraisal, "inputs" | "starlight" | "equilibrium" | "habitableZone" | "states">;
 
@@ -51,7 +52,7 @@ export function lawsBeside({
       habitableZoneDistance,
     ),
     ...when(
-      habitableZone.some((limit) => limit.name.endsWith("interpolated here")),
+      habitableZone.some((limit) => limit.name.endsWith(INTERPOLATED)),
       interpolatedRunawayFlux,
     ),
     ...when(

@@ -1,6 +1,7 @@
 // What the report says of limits.
 import { ASTRONOMICAL_UNIT } from "../ground/constants.ts";
 import type { Appraisal, StatedLimit } from "./appraisal.ts";
+import { INTERPOLATED } from "./limits.ts";
 import { kelvin, type Section, shown } from "./report.ts";
 
 const POSITIONS = { nearer: "nearer", farther: "farther", crosses: "crosses it" } as const;
@@ -15,16 +16,19 @@ export function limitSections({ habitableZone, ownLimits }: Appraisal): Section[
           ? []
           : [
               {
-                head: ["limit", "Earth masses", "paper", ...HEAD],
+                head: ["limit", "M, Earths", "paper", ...HEAD],
                 rows: habitableZone.map((limit) => [
-                  limit.name,
+                  limit.name.replace(INTERPOLATED, " *"),
                   limit.massEarths === null ? "" : shown(limit.massEarths, 3),
                   (limit.paper?.split(",")[0] ?? "").replace(" et al.", ""),
                   ...numbersOf(limit),
                 ]),
                 right: [1, 3, 4, 5, 6],
               },
-              "the planet is nearer to the star than a limit, or farther; where something changes, not what lives there",
+              ...(habitableZone.some(({ name }) => name.endsWith(INTERPOLATED))
+                ? ["* interpolated by this library between the masses that the paper has"]
+                : []),
+              "the planet is nearer to the star than a limit, or farther, or crosses it along its orbit; where something changes, not what lives there",
             ],
     },
     {
@@ -34,11 +38,11 @@ export function limitSections({ habitableZone, ownLimits }: Appraisal): Section[
           ? []
           : [
               {
-                head: ["limit", "T there, K", ...HEAD],
+                head: ["limit", "T there, K", ...HEAD.slice(0, -1)],
                 rows: ownLimits.map((limit) => [
                   limit.name,
                   limit.temperature === null ? "" : kelvin(limit.temperature),
-                  ...numbersOf(limit),
+                  ...numbersOf(limit).slice(0, -1),
                 ]),
                 right: [1, 2, 3, 4, 5],
               },

@@ -11,6 +11,9 @@ import { rangeOf, takes } from "./portRange.ts";
 import { withCompanions } from "./starlightOf.ts";
 import { statedFlux } from "./stated.ts";
 
+/** What is said in the name of a limit that no paper has. */
+export const INTERPOLATED = ", interpolated here";
+
 /** The stars for which limits are published, K. */
 export const PUBLISHED_STARS = /* @__PURE__ */ rangeOf(habitableZoneFlux, "effectiveTemperature");
 
@@ -56,7 +59,7 @@ function ofOwnMass(effectiveTemperature: number, mass: number | null): Published
   const { paper, doi } = computed as (typeof HABITABLE_ZONE_LIMITS)[number];
   const massEarths = mass / (EARTH_MASS_PARAMETER / GRAVITATION);
   const flux = interpolatedRunawayFlux({ effectiveTemperature, mass });
-  return [{ name: "runaway greenhouse, interpolated here", edge: "inner", paper, doi, massEarths, flux }];
+  return [{ name: `runaway greenhouse${INTERPOLATED}`, edge: "inner", paper, doi, massEarths, flux }];
 }
 
 const distanceOf = (flux: number, luminosity: number | null): number | null =>

@@ -1,0 +1,163 @@
+// Text, Markdown and rows of an appraisal.
+import { describe, expect, it, test } from "vitest";
+import { appraisePlanet } from "../../src/appraisal/appraisePlanet.ts";
+import { toMarkdown } from "../../src/appraisal/toMarkdown.ts";
+import { toRows } from "../../src/appraisal/toRows.ts";
+import { toText } from "../../src/appraisal/toText.ts";
+import { isUnit } from "./isUnit.ts";
+import { plain, snowy, without } from "./planets.ts";
+
+const eccentric = { semiMajorAxis: "0.46 au", eccentricity: 0.4 };
+const planets: readonly (readonly [string, unknown])[] = [
+  ["with everything", snowy({ mass: "2 earthMass", rotation: { locked: true } })],
+  ["with one climate", plain({ atmosphere: { pressure: "300 bar" } })],
+  ["with star and orbit alone", { format: "thermostead-planet-1", star: plain().star, orbit: eccentric }],
+  ["with a flux alone", { format: "thermostead-planet-1", orbit: { flux: "12 W m-2" } }],
+  ["without a climate", plain({ orbit: { semiMajorAxis: "900 au" } })],
+  ["without a longwave", without(snowy(), "longwave")],
+];
+
+describe.each(planets)("of a planet %s", (_, description) => {
+  const appraisal = appraisePlanet(description);
+  const text = toText(appraisal);
+
+  test("text is plain, and of at most 80 columns outside of tables, 100 in them", () => {
+    expect(text).not.toMatch(/undefined|NaN|Infinity|null|\[object/);
+    expect(text.endsWith("\n")).toBe(true);
+    const lines = text.split("\n").map((line) => [...line].length);
+    // a table is told by gaps of two spaces between columns
+    const prose = text.split("\n").filter((line) => !/\S {2,}\S/.test(line));
+    expect(Math.max(...prose.map((line) => [...line].length))).toBeLessThanOrEqual(80);
+    expect(Math.max(...lines)).toBeLessThanOrEqual(100);
+    expect(text).not.toMatch(/ \n/);
+  });
+
+  test("every section of the text is in the Markdown", () => {
+    const markdown = toMarkdown(appraisal);
+    const titles = text
+      .split("\n")
+      .filter((line, i, all) => line !== "" && all[i - 1] === "" && /^\S/.test(line));
+    for (const title of titles.slice(0, -1)) expect(markdown).toContain(`\n## ${title}\n`);
+    expect(markdown).toContain("screening estimates");
+    for (const row of markdown.split("\n").filter((line) => line.startsWith("|")))
+      expect(row.endsWith(" |")).toBe(true);
+  });
+
+  test("rows are flat, finite, each with a unit and a name of its own", () => {
+    const rows = toRows(appraisal);
+    expect(new Set(rows.map(({ name }) => name)).size).toBe(rows.length);
+    for (const row of rows) {
+      expect(Object.keys(row)).toEqual(["name", "value", "unit"]);
+      expect(row.name).toMatch(/^\S+$/);
+      expect(isUnit(row.unit), row.unit).toBe(true);
+      if (typeof row.value === "number") expect(Number.isFinite(row.value), row.name).toBe(true);
+      else expect([typeof row.value, row.unit]).toEqual(["string", "1"]);
+    }
+  });
+});
+
+describe("text", () => {
+  const text = toText(appraisePlanet(snowy({ mass: "2 earthMass", source: "invented", notes: ["A note."] })));
+  it.each([
+    ["where the description comes from", /^invented\. A note\.$/m],
+    ["laws and inputs with units", /^ {2}albedo +tanhAlbedo\n {2}albedo\.cold +0\.62$/m],
+    ["errors of inputs", /star\.luminosity +0\.2 \+0\.02 -0\.01 solLum/],
+    ["the mean flux", /mean over the orbit +1290\.7/],
+    ["temperatures by convention", /A = 0\.3, f = 0\.5 \(the day side\) +298\.52/],
+    ["climates", /^ +245\.996 +stable +-1\.736 .* 216\.23 +\+29\.76$/m],
+    ["the proof", /proved: no other state between 50 and 2500 K/],
+    ["the ledger", /sunlight +space to surface +123\.8871 +231\.4210/],
+    ["loops with sign and strength", /albedo +\+0\.2794 +amplifies, f = 0\.1386/],
+    ["what would change a climate", /at 246\.00 K +orbit\.semiMajorAxis +-1\.43$/m],
+    ["what an error makes", /star\.luminosity +\+0\.714 +\+7\.14 -3\.57/],
+    ["that there is no end", /if the star fades, no end down to 0\.2 of today/],
+    ["the basin", /pushed above 263\.66 K, it goes to another climate/],
+    ["the average", /thermal time \/ orbital period = \d/],
+    ["water", /287\.57 +120000 +liquid +377\.93 +196\.27 +no/],
+    ["published limits", /runaway greenhouse +5 +Kopparapu 2014 +1441\.5 .* crosses it/],
+    [
+      "the limit for its own mass",
+      /runaway greenhouse \* +2 +Kopparapu 2014[\s\S]*\* interpolated by this library/,
+    ],
+    ["own limits", /fold of the climate at 246\.00 K, star brighter +255\.81/],
+    ["assumptions", /^Assumptions$/m],
+    ["constants", /constants: CODATA 2018/],
+    ["sources with a DOI", /doi:10\.1088\/0004-637X\/729\/1\/54/],
+  ])("has %s", (_, pattern) => {
+    expect(text).toMatch(pattern);
+  });
+
+  test("has margins, with the time to the fold, what comes then and the way back", () => {
+    const told =
+      "if the star brightens by 8.99 %, in 2.00 Gyr, it ends in a fold at 255.81 K and jumps to 294.04 K; the way back is at 0.881 of today";
+    expect(text.replace(/\s+/g, " ")).toContain(told);
+  });
+
+  test("says that a circular orbit has one average", () => {
+    expect(toText(appraisePlanet(plain()))).toContain(
+      "the orbit is a circle, so that all averages are the same",
+    );
+  });
+
+  test("names the climates of a note once", () => {
+    const law = { law: "budykoEmission" };
+    const told = toText(appraisePlanet(snowy({ longwave: law })));
+    expect(told).toMatch(/budykoEmission\.temperature:? .*\(at [\d., K]+\)/s);
+  });
+});
+
+describe("markup and steering characters in names have no effect", () => {
+  const name = "<script>alert(1)</script> | *b* `c` [d](javascript:e) &amp; # $x$ ~f~ \\ _g_";
+  const star = { ...(snowy().star as object), name: "A\u001b[31m\nb\u202ec\u0000" };
+  const hostile = appraisePlanet(
+    snowy({ name, star, source: "1. https://example.org www.example.org a@example.org", notes: ["- x"] }),
+  );
+
+  test("Markdown escapes them", () => {
+    const markdown = toMarkdown(hostile);
+    const [title, about] = markdown.split("\n\n") as [string, string];
+    expect(title).toBe(
+      "# &lt;script&gt;alert(1)&lt;/script&gt; \\| \\*b\\* \\`c\\` \\[d\\](javascript:e) &amp;amp; \\# \\$x\\$ \\~f\\~ \\\\ \\_g\\_, a planet of A \\[31m b c",
+    );
+    expect(about).toBe("&#8203;1. https&#58;//example.org www&#46;example.org a&#64;example.org. - x.");
+  });
+
+  test("numbers in tables stay as they are", () => {
+    const markdown = toMarkdown(hostile);
+    expect(markdown).toMatch(/\| 245\.996 \| stable \| -1\.736 \|/);
+    expect(markdown).not.toMatch(/\\\d/);
+  });
+
+  test("text is on one line, without them", () => {
+    const text = toText(hostile);
+    const [title] = text.split("\n");
+    for (const steering of ["\u001b", "\u0000", "\u202e"]) expect(text).not.toContain(steering);
+    expect(title).toBe("<script>alert(1)</script> | *b* `c` [d](javascript:e) &amp; # $x$ ~f~ \\ _g_, a");
+  });
+
+  test("a word without end is broken", () => {
+    const long = toText(appraisePlanet(plain({ name: "x".repeat(500) })));
+    const lines = long.split("\n").slice(0, 7);
+    expect(lines.join("")).toContain("x".repeat(500));
+    for (const line of lines) expect(line.length).toBeLessThanOrEqual(80);
+  });
+});
+
+describe("sources", () => {
+  test("keep a DOI with parentheses whole, and find several", () => {
+    const { sources } = appraisePlanet(snowy());
+    const of = (law: string) => sources.find((source) => source.of.includes(law))?.dois;
+    expect(of("co2FrostPoint")).toEqual(["10.1016/0019-1035(82)90131-2", "10.1016/j.icarus.2012.10.019"]);
+    expect(of("equilibriumTemperature")).toEqual(["10.1086/591964", "10.1088/0004-637X/729/1/54"]);
+    expect(of("stellarFlux")).toEqual([]);
+  });
+
+  test("of inputs are read in any form", () => {
+    const albedo = { value: 0.3, source: "see https://doi.org/10.1234/ab.cd-5. And (doi:10.5555/x(1)y)" };
+    const { sources } = appraisePlanet(plain({ albedo }));
+    expect(sources.find(({ of }) => of.includes("albedo"))?.dois).toEqual([
+      "10.1234/ab.cd-5",
+      "10.5555/x(1)y",
+    ]);
+  });
+});

@@ -2,12 +2,12 @@
 import { add, product } from "../graph/operations.ts";
 import type { Of, Value } from "../graph/quantity.ts";
 
-/** Longwave optical depth of a whole column. */
-export const opticalDepthPort = () =>
+/** Longwave optical depth of a whole column. Where it follows temperature, as on a hot branch, `deepest` must be large. */
+export const opticalDepthPort = <const D extends number = 1e6>(deepest: D = 1e6 as D) =>
   ({
     symbol: "τ",
     unit: "1",
-    within: [0, 1e6],
+    within: [0, deepest],
     about: "longwave optical depth of the whole column",
   }) as const;
 

@@ -15,7 +15,7 @@ export const greyColumnEmission = /* @__PURE__ */ defineLaw({
   output: /* @__PURE__ */ outgoingPort(),
   inputs: {
     temperature: /* @__PURE__ */ temperaturePort("T", "temperature of the ground"),
-    opticalDepth: /* @__PURE__ */ opticalDepthPort(),
+    opticalDepth: /* @__PURE__ */ opticalDepthPort(1e12),
     closure: /* @__PURE__ */ closurePort(),
   },
   source: "Eddington approximation; Goody & Yung 1989, Atmospheric Radiation",

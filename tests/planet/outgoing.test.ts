@@ -135,3 +135,13 @@ describe("forcing", () => {
     expect(codes(vapour)).toEqual([]);
   });
 });
+
+test("beyond the runaway ceiling a wet planet lands on the hot branch, as a state that can be used", () => {
+  const vapour = { law: "vapourOpticalDepth", referenceTemperature: "288 K", referenceDepth: 0.8 };
+  const emission = { law: "greyColumnEmission", opticalDepth: vapour };
+  const longwave = { law: "ceilingEmission", ceiling: "282 W m-2", emission };
+  const states = statesOf(longwave, { orbit: { flux: "2000 W m-2" }, albedo: 0.3 });
+  const hottest = states.at(-1);
+  expect(hottest?.temperature).toBeGreaterThan(1400);
+  expect(hottest).toMatchObject({ stability: "stable", proved: true });
+});

@@ -13,7 +13,7 @@ export interface Claim {
   readonly expected: string;
 }
 
-/** A fence as code that reports what each claim is about through `show(index, value)`. */
+/** A fence as code that reports what each claim is about through `reports(index, value)`. */
 export interface Reporting {
   readonly code: string;
   readonly claims: readonly Claim[];
@@ -53,11 +53,11 @@ function reported(statement: ts.Statement, index: number | undefined): string {
   if (ts.isImportDeclaration(statement)) return loaded(statement);
   if (index === undefined) return text;
   if (ts.isExpressionStatement(statement)) {
-    return `await show(${index}, () => (${statement.expression.getText()}));`;
+    return `await reports(${index}, () => (${statement.expression.getText()}));`;
   }
   const name = ts.isVariableStatement(statement) && statement.declarationList.declarations[0]?.name;
   if (!name || !ts.isIdentifier(name)) throw new Error(`a claim needs an expression or one name: ${text}`);
-  return `${text}\nawait show(${index}, () => ${name.text});`;
+  return `${text}\nawait reports(${index}, () => ${name.text});`;
 }
 
 /** `import { a as b } from "x"` becomes `const { a: b } = await load("x")`. */

@@ -29,7 +29,7 @@ export async function runProgram({ fences }: Program): Promise<Outcome[]> {
     found.set(index, await shown(value));
   };
   const load: Load = (specifier) => import(/* @vite-ignore */ specifier);
-  await new AsyncFunction("load", "show", plainCode(codes.join("\n")))(load, record);
+  await new AsyncFunction("load", "reports", plainCode(codes.join("\n")))(load, record);
   return claims.map((claim, index) => ({ claim, found: found.get(index) ?? "nothing" }));
 }
 

@@ -37,7 +37,7 @@ function enclose(g: Graph, id: number, w: EnclosureWriter, known: ReadonlyMap<nu
   if (op === "call") throw new Error("an ordinary function has no enclosure");
   const value = g.values[id] as number;
   if (op === "const") {
-    const k = w.datum(value);
+    const k = w.constant(id, value);
     return { lo: k, hi: k, err: undefined, within: [value, value] };
   }
   const args = (g.args[id] as readonly number[]).map((a) => known.get(a) as Enclosure);

@@ -18,6 +18,17 @@ type Bound = number | undefined;
 
 /** The steps from which rules are made. Equal steps are one, so that the two bounds of a point cost nothing twice. */
 export class EnclosureWriter extends ScalarProgram {
+  readonly #constants = new Map<number, number>();
+  /** The register of a constant, known by its node. */
+  constant(node: number, value: number): number {
+    let id = this.#constants.get(node);
+    if (id === undefined) {
+      id = this.datum(value);
+      this.#constants.set(node, id);
+    }
+    return id;
+  }
+
   neg = (a: number): number => this.step("neg", a);
   add = (a: number, b: number): number => this.step("add", a, b);
   sub = (a: number, b: number): number => this.step("sub", a, b);

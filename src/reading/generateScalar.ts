@@ -46,10 +46,9 @@ export function generateScalar(
     if (!inline) code += `const r${id}=${text};`;
   });
   const results = outputs.map((id, i) => `o[${i}]=${texts[id]};`).join("");
-  return compiled<Bind>(`return function(k,f){return function(x,y,o){${code}${results}}}`)(
-    data,
-    program.functions,
-  );
+  // in brackets, functions are compiled at once, without being read ahead first
+  const text = `return(function(k,f){return(function(x,y,o){${code}${results}})})`;
+  return compiled<Bind>(text)(data, program.functions);
 }
 
 function textOf(

@@ -30,14 +30,22 @@ const RADIX = 0x1000000;
 
 /** Each step fills one register, known by its number. */
 export class ScalarProgram {
-  readonly ops: (Operation | Source)[] = [];
+  readonly ops: (Operation | Source)[];
   /** The registers that a step reads. */
-  readonly args: (readonly number[])[] = [];
+  readonly args: (readonly number[])[];
   /** The place that a source reads, or its number; the places of data, and those of functions, count from 0. */
-  readonly values: number[] = [];
+  readonly values: number[];
   readonly data: number[] = [];
-  readonly functions: Compute["value"][] = [];
+  readonly functions: Compute["value"][];
   readonly #known = new Map<string | number, number>();
+
+  /** Empty, or with the steps of another program. */
+  constructor(from?: ScalarProgram) {
+    this.ops = from ? from.ops.slice() : [];
+    this.args = from ? from.args.slice() : [];
+    this.values = from ? from.values.slice() : [];
+    this.functions = from ? from.functions.slice() : [];
+  }
 
   /** A number that is the same in all programs of one text. */
   literal = (value: number): number => this.#register(`${value}`, "literal", [], value);
@@ -66,15 +74,11 @@ export class ScalarProgram {
    */
   uses(outputs: readonly number[]): Uint32Array {
     const uses = new Uint32Array(this.ops.length);
-    const read = (id: number) => {
-      uses[id] = (uses[id] as number) + 1;
-    };
-    outputs.forEach(read);
+    for (const id of outputs) uses[id] = (uses[id] as number) + 1;
     for (let id = uses.length - 1; id >= 0; id--) {
       if (!uses[id]) continue;
-      const args = this.args[id] as readonly number[];
-      args.forEach(read);
-      if (this.ops[id] === "min" || this.ops[id] === "max") args.forEach(read);
+      const times = this.ops[id] === "min" || this.ops[id] === "max" ? 2 : 1;
+      for (const a of this.args[id] as readonly number[]) uses[a] = (uses[a] as number) + times;
     }
     return uses;
   }

@@ -48,7 +48,8 @@ export function spanKernel(g: Graph, { inputs, atEnds, over, wide, ranges }: Spa
   const steps = (outputs: readonly number[], first: Enclosure): number[] =>
     encloseOutputs(g, outputs, w, new Map(inputs.map((id, i) => [id, i ? (given[i] as Enclosure) : first])));
   const end = [span.lo, ...steps(atEnds, { ...span, hi: span.lo })];
-  const groups = over.map((outputs) => steps(outputs, span));
+  const wanted = steps(over.flat(), span);
+  const groups = over.map((outputs) => wanted.splice(0, 3 * outputs.length));
   const { ahead, point, spans } = spanParts(w, { left: span.lo, right: span.hi, end, groups });
   const data = Float64Array.from([...w.data, ...ahead.map(() => Number.NaN)]);
   const [readAhead, results] = [runScalar(w, ahead), data.subarray(w.data.length)];

@@ -33,14 +33,14 @@ const [STEADY, LEFT, RIGHT, BOTH] = [0, 1, 2, 3];
 /** Splits a program; copies steps at the right end into steps at the left one, because an end serves on both sides. */
 export function spanParts(program: ScalarProgram, { left, right, end, groups }: Span): SpanParts {
   const sides = sidesOf(program, left, right);
-  const sideOf = (id: number): number => sides[id] as number;
+  // what is copied from the right end depends on the left one
+  const sideOf = (id: number): number => sides[id] ?? LEFT;
   const mirrored = mirror(program, sideOf, left, right);
   const near = groups.map((wanted) => frontier(program, wanted, (id) => sideOf(id) !== BOTH));
   const atEnds = near.map((ids) => ids.filter((id) => sideOf(id) !== STEADY));
   const carried = new Set(atEnds.flat().map(mirrored));
   const outputs = [...end, ...[...carried].filter((id) => !end.includes(id))];
-  const grown = sidesOf(program, left, right);
-  const rest = frontier(program, outputs, (id) => grown[id] === STEADY);
+  const rest = frontier(program, outputs, (id) => sideOf(id) === STEADY);
   const ahead = [...new Set([...rest, ...near.flat().filter((id) => sideOf(id) === STEADY)])];
   const prepared = ahead.map((id, i): Known => [id, "data", program.data.length + i]);
   const inEnd = (id: number): Known => [
@@ -61,11 +61,10 @@ export function spanParts(program: ScalarProgram, { left, right, end, groups }: 
 /** The ends on which each register depends. */
 function sidesOf({ ops, args }: ScalarProgram, left: number, right: number): Uint8Array {
   const sides = new Uint8Array(ops.length);
-  ops.forEach((_, id) => {
-    let side = id === left ? LEFT : id === right ? RIGHT : STEADY;
-    for (const a of args[id] as readonly number[]) side = (side as number) | (sides[a] as number);
-    sides[id] = side as number;
-  });
+  sides[left] = LEFT;
+  sides[right] = RIGHT;
+  for (let id = 0; id < ops.length; id++)
+    for (const a of args[id] as readonly number[]) sides[id] = (sides[id] as number) | (sides[a] as number);
   return sides;
 }
 
@@ -112,11 +111,7 @@ type Known = readonly [id: number, from: Source, place: number];
 
 /** A copy of a program in which some registers are known. */
 function withKnown(program: ScalarProgram, known: readonly Known[]): ScalarProgram {
-  const copy = new ScalarProgram();
-  copy.ops.push(...program.ops);
-  copy.args.push(...program.args);
-  copy.values.push(...program.values);
-  copy.functions.push(...program.functions);
+  const copy = new ScalarProgram(program);
   for (const [id, from, place] of known) {
     copy.ops[id] = from;
     copy.args[id] = [];

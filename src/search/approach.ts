@@ -4,7 +4,7 @@ import type { Place } from "./reader.ts";
 
 const MOST_STEPS = 120;
 /** A function that rises between two places is taken for steady if its slopes there are no less than this part of the chord's. */
-const FLATTEST = 1 / 3;
+const FLATTEST = 0.333;
 
 /**
  * Reads ever closer to the zero in a bracket, until its sign cannot be told or no number is left between; returns the place read

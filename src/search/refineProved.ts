@@ -8,7 +8,7 @@ import type { Zero } from "./zero.ts";
 
 const MOST_WIDENINGS = 60;
 /** Takes away more than the rounding of a few products. */
-const SURELY = 1 - 1e-15;
+const SURELY = 0.999999999999999;
 
 /**
  * Writes down the zero between two places with proved, opposite signs, known to be the only one there. The reader's piece

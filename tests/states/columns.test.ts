@@ -1,0 +1,60 @@
+// Columns, single searches, and searches box by box: the same bits.
+import { describe, expect, test } from "vitest";
+import { budgetsOf } from "../../bench/budgets.mjs";
+import { columnsOf, rowOf, WITHIN } from "../../bench/populations.mjs";
+import * as core from "../../src/index.ts";
+import { allowGeneration } from "../../src/reading/generation.ts";
+import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
+import { enclosedBalance } from "../../src/states/enclosedBalance.ts";
+import { enumerateBalance } from "../../src/states/provedSearch.ts";
+
+const within = WITHIN as [number, number];
+const ROWS = 400;
+
+describe.each(["ice", "vapour"] as const)("%s", (name) => {
+  const loop = core.closeLoop(budgetsOf(core)[name]);
+  const columns = columnsOf(name, ROWS);
+  const found = core.findStatesFor(loop, columns, { within });
+  const rowsOf = (it: core.StateColumns, row: number) => {
+    const [start, end] = [it.first[row], it.first[row + 1]];
+    return [it.temperatures, it.feedbackParameters, it.stability].map((list) => [
+      ...list.subarray(start, end),
+    ]);
+  };
+
+  test("rows give what findStates gives", () => {
+    const signs = { stable: -1, undecided: 0, unstable: 1 };
+    for (let row = 0; row < ROWS; row++) {
+      const { states, complete } = core.findStates(loop, { within, at: rowOf(columns, row) });
+      expect(complete).toBe(true);
+      expect(rowsOf(found, row)).toEqual([
+        states.map((s) => s.temperature),
+        states.map((s) => s.feedbackParameter),
+        states.map((s) => signs[s.stability]),
+      ]);
+    }
+  });
+
+  test("a row does not depend on its neighbours", () => {
+    const turned = Object.fromEntries(
+      Object.entries(columns).map(([given, column]) => [given, column.slice().reverse()]),
+    );
+    const again = core.findStatesFor(loop, turned, { within });
+    for (let row = 0; row < ROWS; row++) expect(rowsOf(again, ROWS - 1 - row)).toEqual(rowsOf(found, row));
+  });
+
+  test("reading ends first gives the brackets of reading whole boxes, and so does the interpreter", () => {
+    const balance = enclosedBalance(loop);
+    allowGeneration(false);
+    const interpreted = enclosedBalance(loop);
+    allowGeneration(true);
+    for (let row = 0; row < ROWS / 4; row++) {
+      const givens = loop.givens.map((g) => rowOf(columns, row)[g.name] as number);
+      for (const it of [balance, interpreted]) it.set(givens, givens);
+      const by = enumerateBalance(balance, within, 500);
+      const { box, point } = balance.net;
+      expect(enumerateZeros({ box, point }, within, balance.limits)).toEqual(by);
+      expect(enumerateBalance(interpreted, within, 500)).toEqual(by);
+    }
+  });
+});

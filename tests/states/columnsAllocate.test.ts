@@ -30,14 +30,17 @@ describe("findStatesFor", () => {
         core.findStatesFor(loop, few, { within });
         return process.memoryUsage().heapUsed - before;
       };
-      // until the engine has compiled everything, it allocates for each operation
-      const each: number[] = [];
-      for (let attempt = 0; attempt < 200 && !each.some((bytes) => bytes < 1000); attempt++) {
+      // Until the engine has compiled everything, it allocates for each operation; and now and then it collects in between. So
+      // what counts are three measurements in a row.
+      let inRow = 0;
+      let last = Number.NaN;
+      for (let attempt = 0; attempt < 300 && inRow < 3; attempt++) {
         core.findStatesFor(loop, part(columns, (attempt % 10) * 2000, 2000), { within });
         const from = attempt * 60;
-        each.push((heapOf(60, from) - heapOf(10, from)) / 50);
+        last = (heapOf(60, from) - heapOf(10, from)) / 50;
+        inRow = Math.abs(last) < 1000 ? inRow + 1 : 0;
       }
-      expect(Math.min(...each)).toBeLessThan(1000);
+      expect({ inRow, last }).toMatchObject({ inRow: 3 });
     },
     120_000,
   );

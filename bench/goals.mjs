@@ -44,6 +44,15 @@ export function goalsMet(questions) {
     "ns",
     timesOf("one planet with three states, whole result", "findStates"),
   );
+  const diagram = "whole diagram of a planet with three states";
+  time("traceBranches with three states, hot", 1, "ms", timesOf(diagram, "traceBranches"));
+  time("traceBranches in a fresh process", 10, "ms", timesOf(diagram, "fresh process, processor time"));
+  time(
+    "followState where nothing is lost, hot",
+    5000,
+    "ns",
+    timesOf("one step along a branch", "followState"),
+  );
   for (const [name, fresh] of [
     ["ice", 10],
     ["vapour", 14],

@@ -2,8 +2,9 @@
 import { WITHIN } from "./populations.mjs";
 import { timed } from "./rounds.mjs";
 
-export function threeStates(core) {
-  const loop = core.closeLoop(({ temperature, given, couple }) => {
+/** The loop; also that of the branches. */
+export const threeStatesLoop = (core) =>
+  core.closeLoop(({ temperature, given, couple }) => {
     const flux = given("flux", 1361, "W m-2", { within: [900, 1800] });
     const albedo = core.tanhAlbedo({ temperature, cold: 0.7, warm: 0.3, midpoint: 265, width: 10 });
     return {
@@ -12,6 +13,9 @@ export function threeStates(core) {
       heatCapacity: 4.2e8,
     };
   });
+
+export function threeStates(core) {
+  const loop = threeStatesLoop(core);
   const search = () => {
     const { states } = core.findStates(loop, { within: WITHIN });
     if (states.length !== 3) throw new Error(`${states.length} states instead of three`);

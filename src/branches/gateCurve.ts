@@ -7,6 +7,7 @@ import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { above, below } from "../search/enclosed.ts";
+import { over, rangeAt } from "../search/interval.ts";
 import { balanceOf } from "./balanceOf.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
@@ -16,8 +17,6 @@ import { lineOf } from "./line.ts";
 /** Stretches wider than this, K, are bounded in parts. */
 const WIDE = 1e-3;
 const PARTS = 256;
-/** Above the roundings of a half width and a product. */
-const SLACK = 1.000000000000001;
 
 /** The nodes of a gate's curve. */
 export interface GateNodes {
@@ -26,8 +25,6 @@ export interface GateNodes {
   readonly curve: number;
   /** λ = a′ + b′·g. */
   readonly feedback: number;
-  /** dg/dT = −λ/b. */
-  readonly slope: number;
   /** b = ∂N/∂g. */
   readonly answer: number;
 }
@@ -42,8 +39,7 @@ export function gateNodes(loop: Loop, along: string): GateNodes | undefined {
   if (!gate) return undefined;
   const curve = graph.node("div", [new Writer(graph).neg(gate.offset), gate.slope]);
   const feedback = feedbackOn(loop, gate, curve);
-  const slope = graph.node("div", [new Writer(graph).neg(feedback), gate.slope]);
-  return { gate: gate.node, curve, feedback, slope, answer: gate.slope };
+  return { gate: gate.node, curve, feedback, answer: gate.slope };
 }
 
 function feedbackOn(loop: Loop, { offset, slope }: Gate, curve: number): number {
@@ -66,7 +62,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
   const feedback = lineOf(loop, nodes.feedback, 0);
   const bounds = enclosureKernel(graph, {
     inputs,
-    outputs: [nodes.curve, nodes.slope],
+    outputs: [nodes.curve, nodes.answer],
     wide: new Set([inputs[0] as number]),
     ranges: rangesOf(loop),
   });
@@ -75,6 +71,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
   const point = new Float64Array(inputs.length);
   const high = new Float64Array(inputs.length);
   const out = new Float64Array(6);
+  const slopes = new Float64Array(9);
   const enclose = (low: number, top: number): void => {
     point[0] = low;
     high[0] = top;
@@ -83,20 +80,15 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
   /** Bounds of the gate: from its enclosure, and from its value in the middle and its slope (mean value form). */
   const valuesOver = (low: number, top: number): Range => {
     enclose(low, top);
-    const [lo, hi, err, fall, rise, slack] = out as unknown as [
-      number,
-      number,
-      number,
-      number,
-      number,
-      number,
-    ];
-    const reach = above((Math.max(rise + slack, slack - fall) * (top - low)) / 2) * SLACK;
+    const [plain, answer] = [rangeAt(out, 0), rangeAt(out, 1)];
+    // dg/dT = −λ/b
+    feedback.box(low, top, slopes);
+    const [fall, rise] = over(rangeAt(slopes, 0), answer);
+    const reach = above(above(Math.max(-fall, rise) * above(top - low)) / 2);
     const middle = low + (top - low) / 2;
     enclose(middle, middle);
-    const [atLow, atHigh, atError] = out as unknown as [number, number, number];
-    const plain: Range = [below(lo - err), above(hi + err)];
-    const mean: Range = [below(atLow - atError - reach), above(atHigh + atError + reach)];
+    const [atLow, atHigh] = rangeAt(out, 0);
+    const mean: Range = [below(atLow - reach), above(atHigh + reach)];
     return mean[1] - mean[0] < plain[1] - plain[0] ? mean : plain;
   };
   const read = (temperature: number): void => {

@@ -64,7 +64,7 @@ export function tippingMargins<N extends string>(
       ...{ direction, end, distance, jump },
       relative: at === 0 ? null : distance / Math.abs(at),
       after: target ? ((stateOn(loop, diagram, target, end.at) ?? null) as State<N> | null) : null,
-      way: Object.freeze(wayTo(branch, here, { at, direction })),
+      way: Object.freeze(wayTo(branch, { ...here, temperature }, { at, direction })),
       time: until && at > 0 && end.at > at ? until(end.at / at) : null,
     });
   };

@@ -4,6 +4,7 @@ import { fail, ThermosteadError } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
 import { temperaturePort } from "../law/ports.ts";
 import { checkStarAndOrbit } from "../planet/agreement.ts";
+import { exampleOf } from "../planet/examples.ts";
 import { ORBIT_PORTS, STAR_PORTS } from "../planet/fieldPorts.ts";
 import { type PlanetInput, readInput } from "../planet/planetInput.ts";
 import { PLANET_FORMAT } from "../planet/planetShape.ts";
@@ -90,6 +91,7 @@ export function fromCatalogueRow(row: CatalogueRow, mapping: CatalogueMapping): 
   const refused: Refused[] = [];
   const read = (path: string, column: Column | undefined, port: Port): Cell | null => {
     if (column === undefined) return null;
+    checkUnit(column, path, port);
     const before = refused.length;
     const cell = cellOf(row, column, `mapping.${path}`, refused);
     if (cell === null && refused.length === before) missing.push(path);
@@ -134,6 +136,14 @@ export function fromCatalogueRow(row: CatalogueRow, mapping: CatalogueMapping): 
       ...(published === null ? [] : notesOn(published, row, mapping)),
     ],
   });
+}
+
+/** A column of anything but pure numbers needs a unit, in every row. Throws `unit-mismatch`. */
+function checkUnit(column: Column, path: string, { unit }: Port): void {
+  const written = typeof column === "string" ? undefined : column?.unit;
+  if (unit === "1" || written !== undefined) return;
+  const allowed = `${unit}, as in { column, unit: "${exampleOf(unit).split(" ").slice(1).join(" ")}" }`;
+  fail("unit-mismatch", { path: `mapping.${path}`, value: written, allowed });
 }
 
 /** Errors of a number; those of a unit are errors of the mapping. */

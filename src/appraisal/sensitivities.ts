@@ -3,7 +3,7 @@ import type { Feedbacks } from "../feedback/feedbacks.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
 import type { Sensitivity } from "./appraisal.ts";
 
-/** How temperature answers to every input along the branch, to first order; what acts most comes first. */
+/** How temperature answers to every input along the branch, to first order; what acts most comes first. Without −0. */
 export function sensitivitiesOf(
   { givens, responses }: Feedbacks,
   inputs: readonly PlanetInput[],
@@ -13,10 +13,11 @@ export function sensitivitiesOf(
     const value = givens[path];
     if (response === undefined || response.temperature === null || value === undefined) return [];
     const { temperature: slope, unit } = response;
-    const errorOf = (width: number | null, sign: number) => (width === null ? null : sign * slope * width);
+    const errorOf = (width: number | null, sign: number) =>
+      width === null ? null : 0 + sign * slope * width;
     return [
       {
-        ...{ path, unit, perUnit: slope, perPercent: (slope * value) / 100 },
+        ...{ path, unit, perUnit: slope, perPercent: 0 + (slope * value) / 100 },
         ...{ minus: errorOf(minus, -1), plus: errorOf(plus, 1) },
       },
     ];

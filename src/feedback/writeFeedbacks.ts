@@ -79,7 +79,7 @@ export function writeFeedbacks<N extends string>(
     gain,
     sensitivity: isKnown ? -1 / total.value : null,
     responses: record(loop.givens, (i, { unit }) => {
-      const flux = influences.givens[i] as number;
+      const flux = 0 + (influences.givens[i] as number);
       return Object.freeze({ flux, temperature: isKnown ? 0 - flux / total.value : null, unit });
     }) as Feedbacks<N>["responses"],
     ...timesOf(total),
@@ -90,15 +90,15 @@ export function writeFeedbacks<N extends string>(
   });
 }
 
-const frozen = (bounds: Bounds): Bounds => bounds && Object.freeze([...bounds] as const);
+const frozen = (bounds: Bounds): Bounds => bounds && Object.freeze([0 + bounds[0], 0 + bounds[1]] as const);
 
-/** The fields that every part of λ has. */
+/** The fields that every part of λ has. Adding 0 turns −0, which JSON does not keep, into 0. */
 const partWriter =
   (reference: Bounded) =>
   ({ value, bounds }: Bounded): FeedbackPart => ({
-    feedbackParameter: value,
+    feedbackParameter: 0 + value,
     feedbackParameterRange: frozen(bounds),
-    feedbackFactor: reference.value < 0 ? value / -reference.value : null,
+    feedbackFactor: reference.value < 0 ? 0 + value / -reference.value : null,
   });
 
 function othersOf(

@@ -61,7 +61,11 @@ function sunlike(brightening: SunlikeBrightening): TimeUntil {
 function steady(brightening: SteadyBrightening): TimeUntil {
   checkKeys(brightening, "brightening", ["rate"]);
   const rate = checkedNumber(brightening.rate, "brightening.rate", "s-1", [-1, 1]);
-  return (factor) => (rate > 0 ? (factor - 1) / rate : null);
+  return (factor) => {
+    const time = (factor - 1) / rate;
+    // a rate of next to nothing takes longer than a number can say
+    return rate > 0 && Number.isFinite(time) ? time : null;
+  };
 }
 
 function tabled(brightening: TabledBrightening): TimeUntil {

@@ -30,7 +30,7 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
     cost.boxes += boxes;
     cost.points += points;
     const states = zeros.map(({ at: temperature, slopeSign: sign }) => {
-      return { at, temperature, feedbackParameter: net.feedback(at, temperature), sign };
+      return { at, temperature, feedbackParameter: 0 + net.feedback(at, temperature), sign };
     });
     return { at, states };
   };

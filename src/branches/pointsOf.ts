@@ -13,11 +13,13 @@ export function pointsOf(
   warm: BranchEnd,
   { between, tolerance }: { readonly between: Range; readonly tolerance: number },
 ): BranchPoint[] {
+  // adding 0 turns −0, which JSON does not keep, into 0
+  const feedbackAt = (temperature: number) => 0 + curve.feedbackAt(temperature);
   const least = tolerance * (between[1] - between[0]);
   const read = (temperature: number): BranchPoint => ({
     at: inside(curve.at(temperature), between),
     temperature,
-    feedbackParameter: curve.feedbackAt(temperature),
+    feedbackParameter: feedbackAt(temperature),
   });
   const points: BranchPoint[] = [];
   const halve = (a: BranchPoint, b: BranchPoint, left: number): void => {
@@ -29,7 +31,7 @@ export function pointsOf(
     halve(middle, b, left - 1);
   };
   const end = ({ temperature, at }: BranchEnd): BranchPoint =>
-    Object.freeze({ at, temperature, feedbackParameter: curve.feedbackAt(temperature) });
+    Object.freeze({ at, temperature, feedbackParameter: feedbackAt(temperature) });
   let previous = end(cool);
   points.push(previous);
   const width = warm.temperature - cool.temperature;

@@ -123,6 +123,18 @@ describe("a crossing that no factor shows is named, not claimed", () => {
   });
 });
 
+// two branches that touch and part again, and two that cross so flatly that they hardly part
+test.each<[string, (x: core.Value, p: core.Quantity) => core.Value]>([
+  ["x(x − p²)", (x, p) => mul(x, sub(x, square(p)))],
+  ["x(x − p³)", (x, p) => mul(x, sub(x, mul(square(p), p)))],
+  ["x² − p⁴", (x, p) => sub(square(x), square(square(p)))],
+])("%s has no transcritical point", (_, write) => {
+  const loop = formulaLoop((t, p) => write(sub(t, 300), p));
+  const diagram = traceBranches(loop, { along: "p", between: [-1, 1.1], within: [290, 310] });
+  expect(diagram).toMatchObject({ complete: false, crossings: [], folds: [] });
+  expect(diagram.undecided.map((u) => u.kind)).toEqual(["count"]);
+});
+
 test("a pitchfork is not taken for a crossing of two branches", () => {
   const fork = formulaLoop((t, p) => {
     const x = sub(t, 300);

@@ -184,6 +184,24 @@ describe("known places", () => {
 });
 
 describe("what is not decided is said", () => {
+  test("folds that meet where they hardly part: no cusp in the strict sense", () => {
+    // p = x³ − q³x has folds at x² = q³/3
+    const loop = twoGivens((t, p, q) => {
+      const x = sub(t, 300);
+      return sub(p, sub(mul(square(x), x), mul(mul(square(q), q), x)));
+    });
+    const options = {
+      along: "p",
+      alongBetween: [-5, 5],
+      and: "q",
+      between: [-1, 1.1],
+      within: AROUND,
+    } as const;
+    const { complete, cusps, undecided } = traceFolds(loop, { ...options, effort: 4000 });
+    expect({ complete, cusps }).toEqual({ complete: false, cusps: [] });
+    expect(undecided.some(([low, high]) => low <= 0.01 && high >= -0.01)).toBe(true);
+  });
+
   test("folds at the kink of a law", () => {
     // a valley with its bottom at the kink x = q, at p = 0
     const loop = twoGivens((t, p, q) => {

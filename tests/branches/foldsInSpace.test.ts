@@ -125,6 +125,32 @@ describe("known places", () => {
     }
   });
 
+  test.each([
+    [1, 4, "below", "above"],
+    [-1, 2, "above", "below"],
+  ] as const)("two cusps close together, with folds outside or between (%d)", (sign, count, ...sides) => {
+    // p = x³/3 ∓ q(q − 0.1)x has folds at x² = ±q(q − 0.1)
+    const loop = twoGivens((t, p, q) => {
+      const cubic = mul(1 / 3, mul(square(x(t)), x(t)));
+      return sub(p, sub(cubic, mul(mul(mul(sign, q), sub(q, 0.1)), x(t))));
+    });
+    const options = {
+      along: "p",
+      alongBetween: [-9, 9],
+      and: "q",
+      between: [-2, 2.3],
+      within: AROUND,
+    } as const;
+    const { curves, cusps, complete } = traceFolds(loop, options);
+    expect(complete).toBe(true);
+    expect(curves).toHaveLength(count);
+    const found = cusps.map(({ and, exists }) => [Math.round(and * 1e9) / 1e9 + 0, exists]);
+    expect(found.sort((a, b) => (a[0] as number) - (b[0] as number))).toEqual([
+      [0, sides[0]],
+      [0.1, sides[1]],
+    ]);
+  });
+
   // ẋ = q + px − x² (Strogatz, section 3.6, imperfect bifurcations, from memory): folds at p² = −4q
   test("a transcritical point and its imperfections", () => {
     const loop = twoGivens((t, p, q) => add(q, sub(mul(p, x(t)), square(x(t)))));

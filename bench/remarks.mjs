@@ -26,4 +26,5 @@ reservoirs, units and refusals that name what is wrong, and the reading of state
 Loops of a new shape need their derivatives, the text of their code, and its compilation. Times by the clock suffer most from
 whatever else the machine does, and this run was made on a busy one: compare them with the processor time in the line below,
 which counts the threads that compile. Ends that serve several boxes cost more when they are prepared than they did before, as
-the program of all enclosures is split in four; a first search then takes a fifth of the time it took.`;
+the program of all enclosures is split in four; a search before the engine has optimised it
+then takes a sixth of the time it took.`;

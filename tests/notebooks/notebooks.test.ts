@@ -26,6 +26,8 @@ describe.each(notebooks)("$file", ({ text, notebook, cells }) => {
     expect(new Set(notebook.cells.map(({ id }) => id)).size).toBe(kinds.length);
     expect(cells.length).toBeGreaterThanOrEqual(6);
     expect(cells.length).toBeLessThanOrEqual(12);
+    // longer lines do not fit the column that readers of notebooks see
+    for (const { code } of cells) expect(code).not.toMatch(/.{97}/);
     expect(JSON.stringify(notebook, null, 1)).toBe(text.trimEnd());
   });
 

@@ -5,7 +5,7 @@ import { ppb, ppm } from "./concentration.ts";
 import type { NamedValues } from "./ports.ts";
 
 /** C_max − C₀ = −b₁/2a₁ in ppm: above, the coefficient of the logarithm grows no further. */
-const PARABOLA_SPAN = 0.00075906 / (2 * 2.4785e-7);
+const PARABOLA_SPAN = 1531.289086140811;
 
 /** [α + c₁√N]·ln(C/C₀), α = d₁ + b₁x + a₁x² with x = C − C₀ kept between 0 and C_max − C₀: flat below and above. */
 export function co2Meinshausen({

@@ -13,14 +13,13 @@ export function nearestName(name: string, known: readonly string[]): string {
 }
 
 function editDistance(a: string, b: string): number {
-  let row = Array.from({ length: b.length + 1 }, (_, j) => j);
+  let row = [0, ...b].map((_, j) => j);
   for (const letter of a) {
-    const next = [(row[0] as number) + 1];
-    for (let j = 0; j < b.length; j++) {
-      const change = (row[j] as number) + (letter === b[j] ? 0 : 1);
-      next.push(Math.min((row[j + 1] as number) + 1, (next[j] as number) + 1, change));
-    }
-    row = next;
+    let left = (row[0] as number) + 1;
+    row = row.map((above, j) => {
+      if (j > 0) left = Math.min(above + 1, left + 1, (row[j - 1] as number) + (letter === b[j - 1] ? 0 : 1));
+      return left;
+    });
   }
   return row[b.length] as number;
 }

@@ -19,25 +19,15 @@ import { isList, wire } from "./wiring.ts";
  * });
  */
 export function defineLaw<const I extends Ports>(spec: LawSpec<I>): Law<I> {
-  const card = cardOf(spec, false);
+  const { write: _, demands: __, ...facts } = spec;
+  const card = cardOf(facts as LawFacts<I>, false);
   const slow = (wires: Wired) => apply(spec, card, wires);
   return Object.assign(fastPath(spec, slow), { card }) as unknown as Law<I>;
 }
 
 /** The card of a law from its facts. */
-export function cardOf<I extends Ports>(facts: LawFacts<I>, sampled: boolean): LawCard<I> {
-  const { name, about = "", output, inputs, source = "", published = {}, reduces } = facts;
-  return Object.freeze({
-    name,
-    about,
-    output,
-    inputs,
-    source,
-    published: published as LawCard["published"],
-    sampled,
-    ...(reduces ? { reduces } : {}),
-  });
-}
+export const cardOf = <I extends Ports>(facts: LawFacts<I>, sampled: boolean): LawCard<I> =>
+  Object.freeze({ about: "", source: "", published: {}, ...facts, sampled }) as LawCard<I>;
 
 type Wired = Record<string, unknown>;
 
@@ -51,12 +41,10 @@ function fastPath<I extends Ports>(
 ): (wires: Wired) => unknown {
   const ports = Object.entries(spec.inputs) as [string, Port][];
   if (spec.demands || ports.some(([, p]) => isList(p) || p.optional)) return slow;
+  const { MAX_VALUE } = Number;
   const limits = ports.map(
-    ([name, { within = [-Number.MAX_VALUE, Number.MAX_VALUE], default: fallback }]) => ({
-      name,
-      low: within[0],
-      high: within[1],
-      fallback,
+    ([name, { within: [low, high] = [-MAX_VALUE, MAX_VALUE], default: fallback }]) => ({
+      ...{ name, low, high, fallback },
     }),
   );
   const write = spec.write as unknown as (wires: Wired) => unknown;
@@ -108,6 +96,6 @@ function checkedDemand<I extends Ports>(
 
 /** The finite number that a law gives; anything else is an error that names the law. */
 export function checkedResult({ name, output }: LawCard, result: unknown): number {
-  if (typeof result === "number" && Number.isFinite(result)) return result;
+  if (Number.isFinite(result)) return result as number;
   return fail("not-finite", { path: name, value: result, allowed: "a finite number", unit: output.unit });
 }

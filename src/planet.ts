@@ -1,27 +1,24 @@
 // The door of planets: descriptions in the trade's words. Needs mathjs and zod.
+export type { Appraisal, AppraisalSource, MissingField } from "./appraisal/appraisal.ts";
+export type { AppraisalNote, AppraisalNoteCode } from "./appraisal/appraisalNote.ts";
 export type {
-  Appraisal,
-  AppraisalSource,
   ConventionalTemperature,
   EquilibriumTemperatures,
-  MissingField,
-  OrbitAveraging,
   PlaceTemperatures,
-  Sensitivity,
   Starlight,
-  StateAppraisal,
   StatedFlux,
-  StatedLimit,
+} from "./appraisal/appraisedLight.ts";
+export type {
+  OrbitAveraging,
+  Sensitivity,
+  StateAppraisal,
   SurfacePhases,
-} from "./appraisal/appraisal.ts";
-export type { AppraisalNote, AppraisalNoteCode } from "./appraisal/appraisalNote.ts";
+} from "./appraisal/appraisedState.ts";
 export { type AppraisePlanetOptions, appraisePlanet } from "./appraisal/appraisePlanet.ts";
 export type { CatalogueRow, Cell, Column, Refused } from "./appraisal/catalogueCell.ts";
-export {
-  type CatalogueEntry,
-  type CatalogueMapping,
-  fromCatalogueRow,
-} from "./appraisal/fromCatalogueRow.ts";
+export type { CatalogueEntry, CatalogueMapping } from "./appraisal/catalogueMapping.ts";
+export { fromCatalogueRow } from "./appraisal/fromCatalogueRow.ts";
+export type { StatedLimit } from "./appraisal/statedLimit.ts";
 export { toMarkdown } from "./appraisal/toMarkdown.ts";
 export { type AppraisalRow, toRows } from "./appraisal/toRows.ts";
 export { toText } from "./appraisal/toText.ts";

@@ -1,5 +1,6 @@
 // What the report says of the states of a planet.
-import type { Appraisal, StateAppraisal } from "./appraisal.ts";
+import type { Appraisal } from "./appraisal.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { feedbackTable } from "./feedbackTable.ts";
 import { ledgerTable } from "./ledgerTable.ts";
 import { marginLines } from "./marginLines.ts";

@@ -14,7 +14,7 @@ import type {
   EquilibriumTemperatures,
   PlaceTemperatures,
   Starlight,
-} from "./appraisal.ts";
+} from "./appraisedLight.ts";
 import { withCompanions } from "./starlightOf.ts";
 
 /** The pairs that tables of planets quote for the flux at the semi-major axis, mostly without saying which. */

@@ -1,5 +1,5 @@
 // What holds the climates that hold.
-import type { StateAppraisal } from "./appraisal.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { kelvin, shown, signed, type Table } from "./report.ts";
 
 /** λ of each state as the sum of its parts. */

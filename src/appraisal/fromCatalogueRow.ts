@@ -11,50 +11,7 @@ import { PLANET_FORMAT } from "../planet/planetShape.ts";
 import type { Lit } from "../planet/stars.ts";
 import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
 import { type CatalogueRow, type Cell, type Column, cellOf, type Refused, textOf } from "./catalogueCell.ts";
-
-/** Which columns of a table hold what. Whatever is left out is not read. */
-export interface CatalogueMapping {
-  /** Column with the name of the planet. */
-  readonly name?: string;
-  readonly star?: {
-    /** Column with the name of the star. */
-    readonly name?: string;
-    readonly luminosity?: Column;
-    readonly radius?: Column;
-    readonly effectiveTemperature?: Column;
-    readonly mass?: Column;
-  };
-  readonly orbit?: {
-    readonly semiMajorAxis?: Column;
-    readonly period?: Column;
-    readonly distanceInStellarRadii?: Column;
-    readonly flux?: Column;
-    readonly eccentricity?: Column;
-  };
-  /** The temperature that the table gives for the planet, whatever it means there. */
-  readonly publishedTemperature?: Column;
-  /** Column that says how the planet was found, and the word in it for imaging. */
-  readonly discovery?: { readonly column: string; readonly imaging: string };
-  /**
-   * What the table does not say and you take on yourself: the other fields of a description, such as `redistribution`,
-   * `albedo`, `longwave`, `heatCapacity`, or `orbit: { average: "flux" }`.
-   */
-  readonly assume?: Readonly<Record<string, unknown>>;
-}
-
-/** A row that was read. */
-export interface CatalogueEntry {
-  /** For `appraisePlanet`: what the row and `assume` say, and nothing else. */
-  readonly description: Readonly<Record<string, unknown>>;
-  /** Fields that are mapped to a column which is empty in this row, such as `star.radius`. */
-  readonly missing: readonly string[];
-  /** Cells that are no number, numbers that their field cannot have, and errors below 0. They are left out. */
-  readonly refused: readonly Refused[];
-  /** The published temperature as the table has it, with unit and errors. */
-  readonly publishedTemperature: Cell | null;
-  /** Luminosities and semi-major axes that agree or not, and what the published temperature may mean. */
-  readonly notes: readonly AppraisalNote[];
-}
+import type { CatalogueEntry, CatalogueMapping } from "./catalogueMapping.ts";
 
 const { luminosity, radius, effectiveTemperature, mass } = STAR_PORTS;
 const STAR = { luminosity, radius, effectiveTemperature, mass };

@@ -1,5 +1,5 @@
 // The ledgers of all climates that hold, side by side.
-import type { StateAppraisal } from "./appraisal.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { kelvin, type Table } from "./report.ts";
 
 /** One column for each state; the last rows show that what goes in comes out or is stored. */

@@ -1,8 +1,9 @@
 // What the report says of limits.
 import { ASTRONOMICAL_UNIT } from "../ground/constants.ts";
-import type { Appraisal, StatedLimit } from "./appraisal.ts";
+import type { Appraisal } from "./appraisal.ts";
 import { INTERPOLATED } from "./limits.ts";
 import { kelvin, type Section, shown } from "./report.ts";
+import type { StatedLimit } from "./statedLimit.ts";
 
 const POSITIONS = { nearer: "nearer", farther: "farther", crosses: "crosses it" } as const;
 

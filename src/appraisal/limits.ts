@@ -6,10 +6,12 @@ import { habitableZoneDistance } from "../habitable/habitableZoneDistance.ts";
 import { habitableZoneFlux } from "../habitable/habitableZoneFlux.ts";
 import { HABITABLE_ZONE_LIMITS } from "../habitable/habitableZoneLimits.ts";
 import { interpolatedRunawayFlux } from "../habitable/interpolatedRunawayFlux.ts";
-import type { Starlight, StateAppraisal, StatedLimit } from "./appraisal.ts";
+import type { Starlight } from "./appraisedLight.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { rangeOf, takes } from "./portRange.ts";
 import { withCompanions } from "./starlightOf.ts";
 import { statedFlux } from "./stated.ts";
+import type { StatedLimit } from "./statedLimit.ts";
 
 /** What is said in the name of a limit that no paper has. */
 export const INTERPOLATED = ", interpolated here";

@@ -1,6 +1,7 @@
 // How far the climates that hold are from an end of their branches, in words.
 import type { Margin, TippingMargins } from "../branches/margins.ts";
-import type { Appraisal, StateAppraisal } from "./appraisal.ts";
+import type { Appraisal } from "./appraisal.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { kelvin, shown, YEAR } from "./report.ts";
 
 const GIGAYEAR = 1e9 * YEAR;

@@ -2,8 +2,8 @@
 import { hasBands } from "../planet/bands.ts";
 import { COOL_STAR } from "../planet/coolStar.ts";
 import type { Planet } from "../planet/planetTypes.ts";
-import type { StateAppraisal } from "./appraisal.ts";
 import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { hostOf } from "./hostOf.ts";
 import { limitsArePublished, PUBLISHED_STARS } from "./limits.ts";
 

@@ -10,7 +10,7 @@ import {
 } from "../orbit/thermalInertiaRatio.ts";
 import { slopeKernel } from "../reading/slopeKernel.ts";
 import type { State } from "../states/state.ts";
-import type { OrbitAveraging } from "./appraisal.ts";
+import type { OrbitAveraging } from "./appraisedState.ts";
 import { takes } from "./portRange.ts";
 
 /** Reads Σ ∂(cooling)/∂T in a state, W m⁻² K⁻¹. */

@@ -1,7 +1,7 @@
 // What would change a climate: the inputs it answers to, and what their errors make of it.
 import type { Feedbacks } from "../feedback/feedbacks.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
-import type { Sensitivity } from "./appraisal.ts";
+import type { Sensitivity } from "./appraisedState.ts";
 
 /** How temperature answers to every input along the branch, to first order; what acts most comes first. Without −0. */
 export function sensitivitiesOf(

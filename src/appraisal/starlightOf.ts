@@ -2,7 +2,7 @@
 import { orbitMeanFlux } from "../orbit/orbitMeanFlux.ts";
 import type { PlanetFacts } from "../planet/facts.ts";
 import { combinedFlux } from "../star/combinedFlux.ts";
-import type { Starlight } from "./appraisal.ts";
+import type { Starlight } from "./appraisedLight.ts";
 import { statedFlux } from "./stated.ts";
 
 /** The starlight of a planet: of the stars that it orbits, and apart from that of all others. */

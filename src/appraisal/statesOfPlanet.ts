@@ -13,7 +13,7 @@ import type { PlanetInput } from "../planet/planetInput.ts";
 import { findStates } from "../states/findStates.ts";
 import type { FoundStates, State } from "../states/state.ts";
 import type { AlongStar } from "./alongStar.ts";
-import type { StateAppraisal } from "./appraisal.ts";
+import type { StateAppraisal } from "./appraisedState.ts";
 import { placeTemperatures } from "./equilibriumTemperatures.ts";
 import { orbitAveraging } from "./orbitAveraging.ts";
 import { takes } from "./portRange.ts";

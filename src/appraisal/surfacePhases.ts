@@ -3,7 +3,7 @@ import { co2FrostPoint } from "../water/co2FrostPoint.ts";
 import { saturationPressureIce } from "../water/saturationPressureIce.ts";
 import { saturationPressureLiquid } from "../water/saturationPressureLiquid.ts";
 import { saturationTemperature } from "../water/saturationTemperature.ts";
-import type { SurfacePhases } from "./appraisal.ts";
+import type { SurfacePhases } from "./appraisedState.ts";
 import { rangeOf, takes } from "./portRange.ts";
 
 /** The phases of pure water at a surface, and the frost point of an atmosphere of carbon dioxide. */

@@ -1,5 +1,6 @@
 // An appraisal as flat rows with units, for tables of many planets.
-import type { Appraisal, PlaceTemperatures } from "./appraisal.ts";
+import type { Appraisal } from "./appraisal.ts";
+import type { PlaceTemperatures } from "./appraisedLight.ts";
 
 /** One number, or one word, of an appraisal. */
 export interface AppraisalRow {

@@ -1,7 +1,8 @@
 // Rows of tables become descriptions: what is missing and what is refused is said, nothing is guessed.
 import { describe, expect, it, test } from "vitest";
 import { appraisePlanet } from "../../src/appraisal/appraisePlanet.ts";
-import { type CatalogueMapping, fromCatalogueRow } from "../../src/appraisal/fromCatalogueRow.ts";
+import type { CatalogueMapping } from "../../src/appraisal/catalogueMapping.ts";
+import { fromCatalogueRow } from "../../src/appraisal/fromCatalogueRow.ts";
 import { readPlanet } from "../../src/planet/readPlanet.ts";
 import { refusal } from "../refusal.ts";
 

@@ -1,5 +1,6 @@
 // Invented planets for the tests of appraisals.
-import type { Appraisal, StateAppraisal } from "../../src/appraisal/appraisal.ts";
+import type { Appraisal } from "../../src/appraisal/appraisal.ts";
+import type { StateAppraisal } from "../../src/appraisal/appraisedState.ts";
 import { appraisePlanet } from "../../src/appraisal/appraisePlanet.ts";
 
 type Fields = Readonly<Record<string, unknown>>;

@@ -4,11 +4,10 @@ import { expect, test } from "vitest";
 import { membersOf, textsOf } from "./namesIn.ts";
 
 const text = fs.readFileSync("docs/appraisal.md", "utf8");
-const record = "src/appraisal/appraisal.ts";
 
 const cases: readonly (readonly [string, readonly string[]])[] = [
-  ["fields of an appraisal", membersOf(record, "Appraisal")],
-  ["fields of a climate", membersOf(record, "StateAppraisal")],
+  ["fields of an appraisal", membersOf("src/appraisal/appraisal.ts", "Appraisal")],
+  ["fields of a climate", membersOf("src/appraisal/appraisedState.ts", "StateAppraisal")],
   ["codes of notes", textsOf("src/appraisal/appraisalNote.ts", "AppraisalNoteCode")],
 ];
 

@@ -31,13 +31,21 @@ describe("the pages", () => {
     expect(pages.map(({ name }) => name).sort()).toEqual(names.sort());
   });
 
-  test("have the whole of their documents", () => {
-    const { html } = pageNamed("states.html");
-    expect(html).toContain('<h2 id="what-is-not-decided"');
-    expect(html.match(/<table>/g)?.length).toBe(
-      fs.readFileSync("docs/states.md", "utf8").match(/^\| -/gm)?.length,
-    );
-    expect(pageNamed("laws.html").html).toContain('<math xmlns="http://www.w3.org/1998/Math/MathML"');
+  test("have the whole of their documents: headings, tables, code, formulas", () => {
+    const count = (text: string, pattern: RegExp) => [...text.matchAll(pattern)].length;
+    const files = fs.readdirSync("docs").filter((name) => name.endsWith(".md") && name !== "api-report.md");
+    for (const file of files) {
+      const text = fs.readFileSync(`docs/${file}`, "utf8");
+      const prose = text.replace(/^```.*?^```$/gms, "");
+      const body = (pageNamed(file.replace(".md", ".html")).html.split("<main")[1] as string).split(
+        "</main>",
+      )[0];
+      const found = [/<h[1-6]/g, /<table>/g, /<math/g].map((pattern) => count(body as string, pattern));
+      const wanted = [count(prose, /^#{1,6} /gm), count(prose, /^\| :?-+/gm), count(text, /^```math$/gm)];
+      expect(found, file).toEqual(wanted);
+      const fences = count(text, /^```(?!math)\w/gm);
+      expect(count(body as string, /<pre/g), file).toBeGreaterThanOrEqual(fences);
+    }
   });
 
   test("link to what is there", () => {

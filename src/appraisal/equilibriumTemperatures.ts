@@ -57,8 +57,9 @@ export function equilibriumTemperatures(
 }
 
 /** Substellar point, day and night side between no transport of heat and a complete one. */
-export function placeTemperatures(ground: Ground): PlaceTemperatures {
-  const at = (redistribution: number) => equilibriumTemperature({ ...ground, redistribution });
+export function placeTemperatures({ flux, albedo, internalFlux }: Ground): PlaceTemperatures {
+  const at = (redistribution: number) =>
+    equilibriumTemperature({ flux, albedo, redistribution, emissivity: 1, internalFlux });
   const between = (share: (ports: { transport: number }) => number) => ({
     still: at(share({ transport: 0 })),
     spread: at(share({ transport: 1 })),

@@ -45,13 +45,21 @@ export function publishedLimits(
       return { name, edge, paper, doi, massEarths, flux };
     },
   );
-  return [...published, ...ofOwnMass(effectiveTemperature, mass)].map(({ flux, ...limit }) => ({
-    ...limit,
-    limit: statedFlux(flux),
-    distance: distanceOf(flux, starlight.luminosity),
-    ...positionAt(flux, starlight),
-    temperature: null,
-  }));
+  return [...published, ...ofOwnMass(effectiveTemperature, mass)].map((it): StatedLimit => {
+    const { ratio, position } = positionAt(it.flux, starlight);
+    return {
+      name: it.name,
+      edge: it.edge,
+      paper: it.paper,
+      doi: it.doi,
+      massEarths: it.massEarths,
+      limit: statedFlux(it.flux),
+      distance: distanceOf(it.flux, starlight.luminosity),
+      ratio,
+      position,
+      temperature: null,
+    };
+  });
 }
 
 /** The runaway greenhouse between the masses for which it was computed. */

@@ -18,7 +18,7 @@ export function marginLines(states: readonly StateAppraisal[], diagram: Appraisa
   });
   const { along, proof, between } = diagram;
   const now = states.find(({ margins }) => margins)?.margins?.at;
-  const range = now ? ` from ${between.map((end) => shown(end / now, 4)).join(" to ")} of today` : "";
+  const range = now ? ` from ${between.map((end) => shown(end / now, 4)).join(" to ")} times today's` : "";
   return [...lines, `followed: ${along}${range}, all else fixed; diagram: ${proof}`];
 }
 
@@ -34,11 +34,11 @@ function marginText({ along, at }: TippingMargins, { direction, end, relative, j
     const back =
       jump.returnsAt === null
         ? "there is no way back"
-        : `the way back is at ${shown(jump.returnsAt / at, 4)} of today`;
+        : `the way back is at ${shown(jump.returnsAt / at, 4)} times today's`;
     return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K and ${next}; ${back}`;
   }
   if (end.kind === "between")
-    return `${change}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} of today`;
+    return `${change}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} times today's`;
   if (end.kind === "within") return `${by}, it leaves the searched range at ${kelvin(end.temperature)} K`;
   if (end.kind === "undecided") return `${by}, nothing is proved beyond ${kelvin(end.temperature)} K`;
   return `${by}, it ends in a ${end.kind} point at ${kelvin(end.temperature)} K`;

@@ -66,7 +66,10 @@ function equilibrium({ equilibrium, starlight, found, states }: Appraisal): Sect
     rows.push([`as described: A = ${shown(albedo)}, f = ${shown(redistribution)}${heat}`, kelvin(value)]);
   }
   for (const { albedo, redistribution, spread, value } of conventional)
-    rows.push([`by convention: A = ${albedo}, f = ${redistribution} (${spread})`, kelvin(value)]);
+    rows.push([
+      `by convention, at the semi-major axis: A = ${albedo}, f = ${redistribution} (${spread})`,
+      kelvin(value),
+    ]);
   if (places) {
     const { substellar, day, night } = places;
     rows.push(["substellar point, heat stays where it falls", kelvin(substellar)]);

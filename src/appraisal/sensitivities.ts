@@ -17,8 +17,12 @@ export function sensitivitiesOf(
       width === null ? null : 0 + sign * slope * width;
     return [
       {
-        ...{ path, unit, perUnit: slope, perPercent: 0 + (slope * value) / 100 },
-        ...{ minus: errorOf(minus, -1), plus: errorOf(plus, 1) },
+        path,
+        unit,
+        perUnit: slope,
+        perPercent: 0 + (slope * value) / 100,
+        minus: errorOf(minus, -1),
+        plus: errorOf(plus, 1),
       },
     ];
   });

@@ -61,7 +61,10 @@ export function tippingMargins<N extends string>(
     const target = diagram.branches[jump?.to?.branch ?? -1];
     const distance = Math.abs(end.at - at);
     return Object.freeze({
-      ...{ direction, end, distance, jump },
+      direction,
+      end,
+      distance,
+      jump,
       relative: at === 0 ? null : distance / Math.abs(at),
       after: target ? ((stateOn(loop, diagram, target, end.at) ?? null) as State<N> | null) : null,
       way: Object.freeze(wayTo(branch, { ...here, temperature }, { at, direction })),
@@ -69,7 +72,11 @@ export function tippingMargins<N extends string>(
     });
   };
   return Object.freeze({
-    ...{ along: options.along, unit: given.unit, at, temperature, stability: branch.stability },
+    along: options.along,
+    unit: given.unit,
+    at,
+    temperature,
+    stability: branch.stability,
     rise: margin("rise"),
     fall: margin("fall"),
     basin: branch.stability === "stable" ? basinOf(loop, diagram, { index, at }) : null,

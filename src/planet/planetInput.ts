@@ -57,8 +57,15 @@ export function readInput(path: string, port: Port, written: Written, difference
     return checkedNumber(read(width, of, at), at, unit, [0, Number.MAX_VALUE]);
   };
   return {
-    ...{ path, about, value, unit, minus: error("minus"), plus: error("plus"), written: writtenAs(written) },
-    ...{ source: described?.source ?? null, within: within ?? null },
+    path,
+    about,
+    value,
+    unit,
+    minus: error("minus"),
+    plus: error("plus"),
+    written: writtenAs(written),
+    source: described?.source ?? null,
+    within: within ?? null,
   };
 }
 

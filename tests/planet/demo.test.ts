@@ -51,7 +51,7 @@ describe("the appraisal of the example", () => {
       "the end of the icy branch and when",
       /brightens by 8\.99 %, in 2\.00 Gyr, it ends in a fold\s+at 255\.81 K and jumps to 294\.04 K/,
     ],
-    ["the way back", /the way back is at 0\.881 of today/],
+    ["the way back", /the way back is at 0\.881 times today/],
     ["which average over the orbit suits", /thermal time \/ orbital period = 10\.49: slow/],
     ["water at the surface", /287\.57 +120000 +liquid/],
     ["published limits and the place among them", /runaway greenhouse +1 +Kopparapu 2014 .* crosses it/],

@@ -53,6 +53,8 @@ export function goalsMet(questions) {
     "ns",
     timesOf("one step along a branch", "followState"),
   );
+  const whole = "one planet as a whole, with three states";
+  time("appraisePlanet, hot", 1, "ms", timesOf(whole, "appraisePlanet"));
   for (const [name, fresh] of [
     ["ice", 10],
     ["vapour", 14],

@@ -8,6 +8,7 @@ import os from "node:os";
 import path from "node:path";
 import { load } from "../.config/load.mjs";
 import * as core from "../dist/index.js";
+import { appraisals } from "./appraisals.mjs";
 import { diagrams, steps } from "./branches.mjs";
 import { enclosures } from "./enclosures.mjs";
 import { evaluations } from "./evaluations.mjs";
@@ -77,6 +78,7 @@ try {
   await ask("one planet with three states, whole result", "ns", threeStates(core), false);
   await ask("one step along a branch", "ns", steps(core), false);
   await ask("whole diagram of a planet with three states", "ms", diagrams(core), false);
+  await ask("one planet as a whole, with three states", "ms", appraisals(), false);
   for (const name of names)
     await ask(`from closing a loop to its states, ${name}`, "ms", starts(core, name), false);
   machine.loadAfter = os.loadavg()[0];

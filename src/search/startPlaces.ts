@@ -4,7 +4,7 @@ import { roundoffAt } from "./roundoff.ts";
 import type { Search } from "./search.ts";
 
 /** A kink is cut out with this many units in the last place on each side: its place is itself rounded. */
-const KINK_UNITS = 8;
+const KINK_UNITS = 6;
 
 /**
  * Puts the places between which the search starts ahead of it, by falling x: both ends of the range, both sides of each kink,

@@ -77,7 +77,11 @@ describe("the packed package", () => {
     const content = fs.readdirSync(path.join(project, "node_modules/thermostead")).sort();
     expect(content).toContain("LICENSE");
     expect(content).toContain("dist");
-    for (const name of ["src", "tests", "bench", "docs", "node_modules"]) expect(content).not.toContain(name);
+    for (const name of ["src", "tests", "bench", "node_modules"]) expect(content).not.toContain(name);
+    // errors and the README point into the manual
+    const manual = fs.readdirSync(path.join(project, "node_modules/thermostead/docs"));
+    expect(manual).toEqual(expect.arrayContaining(["errors.md", "planet.md", "examples"]));
+    expect(manual).not.toContain("notebooks");
   });
 
   test("is cited under the version that it has", () => {

@@ -40,7 +40,7 @@ export interface Appraisal {
   readonly found: FoundStates | null;
   /** By rising temperature. */
   readonly states: readonly StateAppraisal[];
-  /** All climates as the star brightens or fades, from a fifth to five times; null where nothing stands for the star. */
+  /** All climates as the star brightens or fades, from 0.4 to 2.5 times today's; null where nothing stands for the star. */
   readonly diagram: Diagram | null;
   /** Published limits; empty where the effective temperature is not given or outside of their range. */
   readonly habitableZone: readonly StatedLimit[];

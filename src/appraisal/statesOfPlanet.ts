@@ -24,7 +24,9 @@ import { surfacePhases } from "./surfacePhases.ts";
 type Reported = Readonly<Record<"flux" | "albedo" | "equilibriumTemperature", number>>;
 
 /** How far the star is brightened and dimmed in looking for the end of a branch. */
-const FACTORS = [0.2, 5] as const;
+const FACTORS = [0.4, 2.5] as const;
+/** How far the lines of its branches may miss them, as a share of that range: fine enough for a picture of the folds. */
+const TOLERANCE = 2e-4;
 
 /** Where to look and how hard. */
 export interface Search {
@@ -86,7 +88,7 @@ function branchesOf(
   const { loop, along, now } = star;
   const [low, high] = loop.givens.find((given) => given.name === along)?.within ?? [0, Number.MAX_VALUE];
   const between = [Math.max(FACTORS[0] * now, low), Math.min(FACTORS[1] * now, high)] as const;
-  return traceBranches(loop, { along, between, ...search });
+  return traceBranches(loop, { along, between, tolerance: TOLERANCE, ...search });
 }
 
 /**

@@ -1,10 +1,11 @@
 // Names that users choose or misspell: which are allowed, and which known one is nearest.
 import { fail } from "./errors.ts";
 
-/** The known name with the smallest edit distance (Levenshtein 1966) to a misspelt one; "" when none is known. */
+/** The known name with the smallest edit distance (Levenshtein 1966) to a misspelt one; "" when none has much in common. */
 export function nearestName(name: string, known: readonly string[]): string {
   let best = "";
-  let least = Number.POSITIVE_INFINITY;
+  // as many changes as it has letters make any name of any other
+  let least = name.length;
   for (const candidate of known) {
     const distance = editDistance(name.slice(0, 60), candidate);
     if (distance < least) [best, least] = [candidate, distance];
@@ -27,7 +28,8 @@ function editDistance(a: string, b: string): number {
 /** Throws `unknown-name` with the known names and the nearest of them. */
 export function failUnknown(path: string, name: string, known: readonly string[]): never {
   const near = nearestName(name, known);
-  const allowed = near ? `${known.slice(0, 40).join(", ")} (nearest: ${near})` : "(none)";
+  const list = known.slice(0, 40).join(", ") || "(none)";
+  const allowed = near ? `${list} (nearest: ${near})` : list;
   return fail("unknown-name", { path, value: name, allowed });
 }
 

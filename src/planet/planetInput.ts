@@ -40,7 +40,7 @@ export function readInput(path: string, port: Port, written: Written, difference
   const described = typeof written === "object" ? written : null;
   const read = (value: number, of: string | undefined, at: string) =>
     unit === "1" ? value : of === undefined ? mismatch(value, wanted, at) : inSI(value, of, wanted, at);
-  const plain = typeof written === "string" ? quantityOf(written, unit, path) : null;
+  const plain = typeof written === "string" ? quantityOf(written, wanted, path) : null;
   const number = plain?.value ?? described?.value ?? written;
   const value = checkedNumber(
     read(number as number, plain?.unit ?? described?.unit, path),

@@ -11,9 +11,13 @@ export const QUANTITY_PATTERN =
 const QUANTITY = new RegExp(QUANTITY_PATTERN);
 
 /** Splits a text into its number and its unit. Throws `unreadable`, `not-a-number`. */
-export function quantityOf(text: string, unit: string, path: string): { value: number; unit: string } {
+export function quantityOf(
+  text: string,
+  { unit, difference }: { readonly unit: string; readonly difference: boolean },
+  path: string,
+): { value: number; unit: string } {
   const found = text.length > LONGEST ? null : QUANTITY.exec(text);
-  const allowed = `a number with its unit, as in "${exampleOf(unit)}"`;
+  const allowed = `a number with its unit, as in "${exampleOf(unit, difference)}"`;
   if (!found) return fail("unreadable", { path, value: text, allowed });
   const value = Number(found[1]);
   if (!Number.isFinite(value)) fail("not-a-number", { path, value: text, allowed });

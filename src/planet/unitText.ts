@@ -21,6 +21,7 @@ export function unitFactors(text: string, path: string): UnitFactor[] {
   const unreadable = () =>
     fail("unreadable", { path, value: text, allowed: 'a unit such as "au", "W m-2", "W.m**-2" or "W/m^2"' });
   if (text.length > LONGEST_UNIT) unreadable();
+  if (Object.hasOwn(OTHERS, text)) failUnit(path, text);
   const factors: UnitFactor[] = [];
   let at = 0;
   while (at < text.length) {
@@ -35,6 +36,32 @@ export function unitFactors(text: string, path: string): UnitFactor[] {
   return factors.length === 0 ? unreadable() : factors;
 }
 
+/** What others write for units of ours. */
+const OTHERS: Readonly<Record<string, string>> = {
+  AU: "au",
+  Lsun: "solLum",
+  L_sun: "solLum",
+  Lsol: "solLum",
+  Rsun: "solRad",
+  R_sun: "solRad",
+  Rsol: "solRad",
+  Msun: "solMass",
+  M_sun: "solMass",
+  Msol: "solMass",
+  Rearth: "earthRad",
+  R_earth: "earthRad",
+  Mearth: "earthMass",
+  M_earth: "earthMass",
+  Rjup: "jupiterRad",
+  Mjup: "jupiterMass",
+  "°C": "degC",
+  C: "degC",
+  day: "d",
+  days: "d",
+  year: "yr",
+  years: "yr",
+};
+
 /** Throws `unknown-unit` with the nearest known unit, upper and lower case taken as the same. */
 function failUnit(path: string, name: string): never {
   const known = Object.keys(UNITS);
@@ -42,6 +69,11 @@ function failUnit(path: string, name: string): never {
     name.toLowerCase(),
     known.map((unit) => unit.toLowerCase()),
   );
-  const nearest = known.find((unit) => unit.toLowerCase() === near);
-  return fail("unknown-unit", { path, value: name, allowed: `${known.join(", ")} (nearest: ${nearest})` });
+  const nearest = OTHERS[name] ?? known.find((unit) => unit.toLowerCase() === near);
+  const list = known.join(", ");
+  return fail("unknown-unit", {
+    path,
+    value: name,
+    allowed: nearest ? `${list} (nearest: ${nearest})` : list,
+  });
 }

@@ -16,8 +16,12 @@ export const searchOf = (loop: Loop, proving: boolean): StateSearch => (proving 
 /** The reader of a loop's states. */
 export const readerOf: (loop: Loop) => StateReader = /* @__PURE__ */ kept(stateReader);
 
-/** Throws `several-variables` for a loop whose states cannot be searched yet. */
+/** Throws `unreadable` for what is no loop, and `several-variables` for a loop whose states cannot be searched yet. */
 export function checkOneVariable(loop: Loop, path: string): void {
+  if (!Array.isArray(loop?.variables)) {
+    const allowed = "a loop, as closeLoop returns it and readPlanet holds it";
+    fail("unreadable", { path, value: loop, allowed });
+  }
   const names = loop.variables.map((v) => v.name);
   if (names.length > 1)
     fail("several-variables", { path, value: names.join(), allowed: "temperature alone" });

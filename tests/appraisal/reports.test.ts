@@ -70,7 +70,7 @@ describe("text", () => {
     ["loops with sign and strength", /albedo +\+0\.2794 +amplifies, f = 0\.1386/],
     ["what would change a climate", /at 246\.00 K +orbit\.semiMajorAxis +-1\.43$/m],
     ["what an error makes", /star\.luminosity +\+0\.714 +\+7\.14 -3\.57/],
-    ["that there is no end", /if the star fades, no end down to 0\.2 times today/],
+    ["that there is no end", /if the star fades, no end down to 0\.4 times today/],
     ["the basin", /pushed above 263\.66 K, it goes to another climate/],
     ["the average", /thermal time \/ orbital period = \d/],
     ["water", /287\.57 +120000 +liquid +377\.93 +196\.27 +no/],

@@ -28,6 +28,18 @@ const trace = (options: object, of: core.Loop = loop) => traceBranches(of, { ...
 describe("refused", () => {
   test.each([
     ["a parameter that does not exist", () => trace({ along: "fluks" }), "unknown-name", /nearest: flux/],
+    [
+      "a parameter that has nothing in common with any",
+      () => trace({ along: "qqq" }),
+      "unknown-name",
+      /allowed: flux, \w+ \(docs/,
+    ],
+    [
+      "what is no loop",
+      () => traceBranches({ star: {} } as never, BASE as never),
+      "unreadable",
+      /a loop, as closeLoop returns it and readPlanet holds it/,
+    ],
     ["an option that does not exist", () => trace({ betwen: [1, 2] }), "unknown-name", /nearest: between/],
     ["a reversed range", () => trace({ between: [1900, 900] }), "out-of-range", /between\[1\]/],
     ["an empty range", () => trace({ between: [1361, 1361] }), "out-of-range", /between\[1\]/],

@@ -113,6 +113,8 @@ describe("the text of a unit", () => {
   });
   it("suggests the nearest unit, whatever its case", () => {
     expect(refusal(() => inSI(1, "AU", reading("m"), "x")).allowed).toMatch(/nearest: au\)$/);
+    expect(refusal(() => inSI(1, "Lsun", reading("W"), "x")).allowed).toMatch(/nearest: solLum\)$/);
+    expect(refusal(() => inSI(1, "L_sun", reading("W"), "x")).allowed).toMatch(/nearest: solLum\)$/);
     expect(refusal(() => inSI(1, "solRadd", reading("m"), "x")).allowed).toMatch(/nearest: solRad\)$/);
   });
   it("refuses what is not finite in SI", () => {

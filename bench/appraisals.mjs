@@ -3,7 +3,7 @@ import fs from "node:fs";
 import * as planets from "../dist/planet.js";
 import { timed } from "./rounds.mjs";
 
-const APPRAISALS = 50;
+const APPRAISALS = 400;
 const text = fs.readFileSync(new URL("../docs/examples/orsolne.json", import.meta.url), "utf8");
 
 /** The demo planet under a star that is a little brighter each time. */

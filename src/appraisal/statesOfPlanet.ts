@@ -26,7 +26,7 @@ type Reported = Readonly<Record<"flux" | "albedo" | "equilibriumTemperature", nu
 /** How far the star is brightened and dimmed in looking for the end of a branch. */
 const FACTORS = [0.4, 2.5] as const;
 /** How far the lines of its branches may miss them, as a share of that range: fine enough for a picture of the folds. */
-const TOLERANCE = 2e-4;
+const TOLERANCE = 5e-4;
 
 /** Where to look and how hard. */
 export interface Search {

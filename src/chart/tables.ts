@@ -11,66 +11,80 @@ export interface Table {
 /** More rows than this are counted, not listed. */
 const MOST = 60;
 
-/** Units by the end of a field's name. */
+/** Units by the place and the name of a field; the first that fits is taken, and `of` stands for that of the parameter. */
 const UNITS: readonly (readonly [RegExp, string])[] = [
-  [/^responses .* flux$/, `${FLUX} per unit`],
-  [/^responses .* temperature$/, "K per unit"],
-  [/^imbalance/, FLUX],
-  [/(temperatures?|Change(Held)?|interval|within|Warming|coldest|hottest)$/i, "K"],
+  [/^inputs /, "1"],
+  [/responses .* flux$/, `${FLUX} per unit`],
+  [/responses .* temperature$/, "K per unit"],
+  [/imbalance|flows value$/, FLUX],
+  [
+    /(temperatures?|Change(Held)?|interval|within|Warming|coldest|hottest)$|^equilibrium .*(value|flux|time)$/i,
+    "K",
+  ],
   [/feedbackParameter$/i, FEEDBACK],
   [/(storage|flux)$/i, FLUX],
-  [/time$/i, "s"],
+  [/(time|period)$/i, "s"],
+  [/luminosity$/i, "W"],
+  [/(axis|(zone|limits) distance)$/i, "m"],
+  [/(^| )(at|parameters|between|distance|returnsAt|value|bracket)$/, "of"],
 ];
 
-/** Fields with the unit of the parameter that a result is about. */
-const OF_PARAMETER = /(^| )(at|parameters|between|distance|returnsAt|value|bracket)$/;
-
 /** What belongs to pictures, or tells nobody anything in six digits. */
-const SKIPPED =
-  /^(points|way|variables|cost|constants|eigenvalues|standardName|description|notes|after)$|(Range|Bracket)$/;
+const SKIPPED = /^(points|way|variables|eigenvalues|standardName|description|notes|after)$|(Range|Bracket)$/;
 
 type Fields = Readonly<Record<string, unknown>>;
 const isFields = (value: unknown): value is Fields =>
   Object.prototype.toString.call(value) === "[object Object]";
-const isRecords = (value: unknown): value is Fields[] => Array.isArray(value) && value.some(isFields);
-const fieldsOf = (fields: Fields) =>
-  Object.entries(fields).filter(([key, value]) => !SKIPPED.test(key) && !ArrayBuffer.isView(value));
+
+/** A value with its name, and the unit of the parameter where it stands. */
+type Value = readonly [name: string, value: unknown, unit: unknown];
 
 /** All tables of a result: its lists, then its other values. */
 export function tablesOf(result: Fields): Table[] {
-  const unit = String(result.unit ?? "1");
-  const lists = (fields: Fields): Table[] =>
-    fieldsOf(fields).flatMap(([key, value]) =>
-      isRecords(value) ? [listed(key, value, unit)] : isFields(value) ? lists(value) : [],
-    );
-  const values = spread(result).map(([name, value]) => ({ name: headOf(name, unit), value }));
-  return [...lists(result), ...(values.length > 0 ? [listed("values", values, "1")] : [])];
+  const parts = partsOf(result, result.unit);
+  const rows = written(parts.values).map(([name, value]) => ({ name, value }));
+  const tables = parts.lists.map(([name, records, unit]) => listed(name, records as Fields[], unit));
+  return rows.length > 0 ? [...tables, listed("values", rows)] : tables;
 }
 
-/** The values of a record, those of records in it under both names; lists of records are left out. */
-const spread = (fields: Fields): [string, unknown][] =>
-  fieldsOf(fields).flatMap(([key, value]): [string, unknown][] => {
-    if (isFields(value)) return spread(value).map(([inner, v]) => [`${key} ${inner}`, v]);
-    return isRecords(value) ? [] : [[key, value]];
+/** What a record holds: values, those of records in it under both names, and lists of records. */
+function partsOf(fields: Fields, unit: unknown, prefix = ""): Readonly<Record<"values" | "lists", Value[]>> {
+  const parts = { values: [] as Value[], lists: [] as Value[] };
+  for (const [key, value] of Object.entries(fields)) {
+    const name = prefix + key;
+    if (SKIPPED.test(key) || ArrayBuffer.isView(value)) continue;
+    if (isFields(value)) {
+      const inner = partsOf(value, value.unit ?? unit, `${name} `);
+      parts.values.push(...inner.values);
+      parts.lists.push(...inner.lists);
+    } else parts[Array.isArray(value) && value.some(isFields) ? "lists" : "values"].push([name, value, unit]);
+  }
+  return parts;
+}
+
+/** Heads and cells. */
+const written = (values: readonly Value[], path = ""): [string, string][] =>
+  values.map(([name, value, unit]) => {
+    const known = UNITS.find(([ends]) => ends.test(path + name))?.[1] ?? "1";
+    const words = spaced(name.replace(/(couplings|givens|report|state) /g, ""));
+    return [
+      titled(words, known === "of" ? String(unit ?? "1") : known),
+      name.endsWith("unit") ? unitText(cell(value)) : cell(value),
+    ];
   });
 
 /** A list of records as a table. */
-export function listed(title: string, records: readonly Fields[], unit: string): Table {
-  const rows = records.slice(0, MOST).map((record) => Object.fromEntries(spread(record)));
-  const keys = [...new Set(rows.flatMap(Object.keys))];
+function listed(name: string, records: readonly Fields[], unit?: unknown): Table {
+  const rows = records
+    .slice(0, MOST)
+    .map((record) => new Map(written(partsOf(record, unit).values, `${name} `)));
+  const head = [...new Set(rows.flatMap((row) => [...row.keys()]))];
   const more = records.length - rows.length;
-  const own = keys.includes("from") && keys.includes("value") ? FLUX : unit;
   return {
-    title: spaced(title) + (more > 0 ? `, without ${more} more` : ""),
-    head: keys.map((key) => headOf(key, own)),
-    rows: rows.map((row) => keys.map((key) => (key === "unit" ? unitText(cell(row[key])) : cell(row[key])))),
+    title: spaced(name) + (more > 0 ? `, without ${more} more` : ""),
+    head,
+    rows: rows.map((row) => head.map((key) => row.get(key) ?? "–")),
   };
-}
-
-/** A field's name as words with its unit; couplings and givens stand under their own names. */
-function headOf(name: string, unit: string): string {
-  const own = UNITS.find(([ends]) => ends.test(name))?.[1] ?? (OF_PARAMETER.test(name) ? unit : "1");
-  return titled(spaced(name.replace(/(couplings|givens|report) /, "")), own);
 }
 
 const spaced = (name: string): string =>
@@ -79,10 +93,10 @@ const spaced = (name: string): string =>
 function cell(value: unknown): string {
   if (typeof value === "number") return numeral(value);
   if (!Array.isArray(value)) return String(value ?? "–");
-  const [low, high, ...more] = value;
+  const [low, high] = value;
   // bounds that agree in most digits are told by those in which they do not
   const digits = Math.abs(high - low) < 1e-5 * Math.abs(low) ? 17 : 6;
-  if (more.length === 0 && value.every(Number.isFinite) && high !== undefined)
-    return rangeText([low, high], digits);
-  return value.map(cell).join(", ") || "none";
+  return value.length === 2 && value.every(Number.isFinite)
+    ? rangeText([low, high], digits)
+    : value.map(cell).join(", ") || "none";
 }

@@ -4,11 +4,13 @@ import type { Range } from "../ground/range.ts";
 const raised = (digits: string): string =>
   digits.replace(/[-\d]/g, (digit) => "⁰¹²³⁴⁵⁶⁷⁸⁹"[Number(digit)] ?? "⁻");
 
-/** A number with so many digits, a real minus sign and a raised exponent. */
-export const numeral = (value: number, digits = 6): string =>
-  String(Number(value.toPrecision(digits)))
+/** A number with so many digits, a real minus sign, and a raised exponent from ten million on. */
+export function numeral(value: number, digits = 6): string {
+  const rounded = Number(value.toPrecision(digits));
+  return (Math.abs(value) < 1e7 ? String(rounded) : rounded.toExponential())
     .replace(/e\+?(.*)/, (_, power: string) => `×10${raised(power)}`)
     .replace(/^-/, "−");
+}
 
 /** The same with its sign, also if that is +. */
 export const signed = (value: number): string => (value > 0 ? "+" : "") + numeral(value, 4);
@@ -27,14 +29,15 @@ export const unitText = (unit: string): string =>
 export const titled = (name: string, unit: string): string =>
   unitText(unit) === "" ? name : `${name} (${unitText(unit)})`;
 
-/** The mark of the i-th of several things: a letter, and a number where there is none left. */
-export const letterOf = (i: number): string => (i < 26 ? String.fromCharCode(97 + i) : String(i + 1));
+/** The mark of the i-th of several things, as base 36 has them: a to z, then 10, 11 and so on. */
+export const letterOf = (i: number): string => (i + 10).toString(36);
 
 export const FLUX = "W m-2";
 export const FEEDBACK = "W m-2 K-1";
 
-/** What HTML and SVG allow: no markup, and no letter that XML cannot hold. */
+/** A text without what XML cannot hold. */
+export const clean = (text: unknown): string => String(text).replace(/[\p{Cc}\p{Cs}\ufffe\uffff]/gu, " ");
+
+/** What HTML and SVG allow: no markup. */
 export const escaped = (text: unknown): string =>
-  String(text)
-    .replace(/[\p{Cc}\p{Cs}\ufffe\uffff]/gu, " ")
-    .replace(/[&<>"']/g, (letter) => `&#${letter.charCodeAt(0)};`);
+  clean(text).replace(/[&<>"']/g, (letter) => `&#${letter.charCodeAt(0)};`);

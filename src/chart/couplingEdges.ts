@@ -18,16 +18,15 @@ export interface Edges {
 
 export function edgesOf({ through, loops, reference }: Feedbacks): Edges {
   const couplings = through.filter((name) => loops.some((loop) => loop.through.includes(name)));
-  const last = couplings.length + 1;
-  const edges = [{ from: 0, to: last, value: reference.feedbackParameter }];
-  for (const loop of loops) {
-    const places = loop.through.map((name) => couplings.indexOf(name) + 1);
-    [...places, last].forEach((to, i) => {
-      const from = places[i - 1] ?? 0;
-      const known = edges.find((edge) => edge.from === from && edge.to === to);
-      if (known) known.value += loop.feedbackParameter;
-      else edges.push({ from, to, value: loop.feedbackParameter });
-    });
-  }
-  return { names: ["temperature", ...couplings, "net flux"], edges };
+  const names = ["temperature", ...couplings, "net flux"];
+  const paths = [{ ...reference, through: [] }, ...loops].map((loop) => ({
+    ...{ value: loop.feedbackParameter, steps: ["temperature", ...loop.through, "net flux"] },
+  }));
+  const edges = names.flatMap((end, to) =>
+    names.slice(0, to).map((start, from) => {
+      const own = paths.filter(({ steps }) => steps[steps.indexOf(start) + 1] === end);
+      return { from, to, value: own.reduce((sum, path) => sum + path.value, 0) };
+    }),
+  );
+  return { names, edges: edges.filter((edge) => edge.value !== 0) };
 }

@@ -1,9 +1,10 @@
 // The couplings through which temperature acts on the net flux, as boxes and lines.
 import type { Feedbacks } from "../feedback/feedbacks.ts";
 import { edgesOf } from "./couplingEdges.ts";
+import { EFFECTS } from "./feedbackBars.ts";
 import { EDGE } from "./layout.ts";
 import { clipped } from "./lines.ts";
-import { drawingOf, type Item, type Layer, type Look, layerOf, type Plot } from "./plot.ts";
+import { boxOf, drawingOf, type Item, layerOf, layersOf, lineOf, type Plot } from "./plot.ts";
 import { FEEDBACK, numeral, signed, unitText } from "./wording.ts";
 
 /** The drawing of the couplings of a state; where its parts stand follows from the width it is asked for. */
@@ -22,84 +23,77 @@ export interface CouplingGraph {
 export const couplingGraph = <N extends string>(feedbacks: Feedbacks<N>): CouplingGraph =>
   Object.freeze({ picture: "couplings", feedbacks: feedbacks as unknown as Feedbacks });
 
-/** Height of a box without the ends of lines, and of the end of a line in it, px. */
+/** Height of a box without the ends of lines, and of the end of a line in it; and what is between boxes, px. */
 const BOX = 28;
 const PORT = 18;
+const GAP = 16;
 
-export function couplingPlot({ feedbacks }: CouplingGraph, width: number): Plot {
+export function couplingPlot({ feedbacks }: CouplingGraph, page: number): Plot {
   const { names, edges } = edgesOf(feedbacks);
-  const inner = width - 2 * EDGE;
+  const width = page - 2 * EDGE;
   // every place has its own upright line, left of all boxes, from which lines go to other boxes
-  const lane = Math.min(26, (0.3 * inner) / names.length);
+  const lane = Math.min(26, (0.3 * width) / names.length);
   const start = names.length * lane;
-  let height = 1;
-  const boxes = names.map((name, place) => {
-    const ends = edges.filter((edge) => edge.to === place);
-    const y = height;
-    height += BOX + ends.length * PORT + 16;
-    return {
-      name,
-      y,
-      ends,
-      at: (edge: (typeof edges)[number]) => y + BOX + (ends.indexOf(edge) + 0.2) * PORT,
-    };
-  });
-  const wires = boxes.flatMap(({ ends, at }) => ends.map((edge) => ({ ...edge, y: at(edge) })));
-  const trunks = boxes.flatMap(({ y }, line): Item[] => {
-    const lowest = Math.max(0, ...wires.filter(({ from }) => from === line).map((wire) => wire.y));
-    const [x, from] = [(line + 0.5) * lane, y + BOX / 2];
-    return lowest > 0
-      ? [
-          { x: start, y: from, line },
-          { x, y: from, line },
-          { x, y: lowest, line },
-        ]
-      : [];
-  });
-  const wiresOf = (name: string, look: Look, amplifies: boolean): Layer[] => {
-    const own = wires.filter(({ value }) => value > 0 === amplifies);
-    const lines = own.flatMap(({ from, y }, line) => [
-      { x: (from + 0.5) * lane, y, line },
-      { x: start - 8, y, line },
-    ]);
-    const heads = own.flatMap(({ y }, line) =>
-      [0, -5, 5].map((up) => ({ x: start - (up === 0 ? 0 : 9), y: y + up, line })),
+  const right = Math.min(width, start + 480);
+  const topOf = (place: number): number =>
+    0 - place * (BOX + GAP) - PORT * edges.filter((edge) => edge.to < place).length;
+  // edges come in the order of their ends
+  const wires = edges.map((edge, i) => ({ ...edge, y: -BOX - edge.to * (BOX + GAP) - PORT * (i + 0.2) }));
+  const lines = wires.flatMap((wire, i) => {
+    // those that amplify run beside those that counter
+    const [kind, aside] = wire.value > 0 ? ["amplifies", 3] : ["counters", -3];
+    const x = (wire.from + 0.5) * lane + aside;
+    const y = topOf(wire.from) - BOX / 2 - aside;
+    return lineOf(
+      [
+        [start, y],
+        [x, y],
+        [x, wire.y],
+        [start - 8, wire.y],
+      ],
+      i,
+      kind,
     );
-    return [layerOf("line", look, lines, name), layerOf("line", { colour: look.colour, full: true }, heads)];
-  };
-  const unit = unitText(FEEDBACK);
-  const ink = { colour: "ink" } as const;
-  const right = Math.min(inner, start + 480);
-  const room = right - start - 16;
-  const words = (y: number, text: string): Item => ({
-    x: start + 10,
-    y: y + 4,
-    text: clipped(text, room, 12),
-    tip: text,
   });
+  const heads = wires.flatMap(({ y }, i) =>
+    lineOf(
+      [
+        [start, y],
+        [start - 9, y - 5],
+        [start - 9, y + 5],
+      ],
+      i,
+    ),
+  );
+  const room = right - start - GAP;
+  const words = (y: number, tip: string): Item => ({
+    ...{ x: start + 10, y: y - 4 },
+    ...{ text: clipped(tip, room, 12), tip },
+  });
+  const { others } = feedbacks;
+  const unit = unitText(FEEDBACK);
   const draft = {
     title: `Couplings at ${numeral(feedbacks.temperature)} K`,
     caption: [
       `λ = ${numeral(feedbacks.feedbackParameter, 4)} ${unit}, the sum of all that reaches the net flux`,
       `Numbers in ${unit}: what λ would lose without the line`,
-      !!feedbacks.others && `Not drawn: ${feedbacks.others.count} weaker loops`,
+      others && `Not drawn: ${others.count} weaker loops`,
     ],
     layers: [
-      layerOf("line", { ...ink, width: 1.5 }, trunks),
-      ...wiresOf("amplifies", { colour: "warm" }, true),
-      ...wiresOf("counters", { colour: "cool", dash: [6, 4] }, false),
+      ...layersOf("line", lines, EFFECTS),
+      layerOf("line", heads, { full: true }),
       layerOf(
         "box",
-        { ...ink, open: true },
-        boxes.map(({ y, ends }) => ({ x: start, x2: right, y, y2: y + BOX + ends.length * PORT })),
+        names.map((name, i) => boxOf([start, right], [topOf(i), topOf(i + 1) + GAP], name)),
+        { open: true },
       ),
-      layerOf("text", ink, [
-        ...boxes.map(({ name, y }) => words(y + BOX / 2, name)),
-        ...wires.map(({ from, value, y }) =>
-          words(y, `${signed(value)}${room > 300 ? ` ${unit}` : ""} from ${names[from]}`),
+      layerOf("text", [
+        ...names.map((name, i) => words(topOf(i) - BOX / 2, name)),
+        ...wires.map((wire) =>
+          words(wire.y, `${signed(wire.value)}${room > 300 ? ` ${unit}` : ""} from ${names[wire.from]}`),
         ),
       ]),
     ],
   };
-  return drawingOf(draft, { width: inner, height: height - 14 });
+  return drawingOf(draft, { width, height: -topOf(names.length) - GAP });
 }

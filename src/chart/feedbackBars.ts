@@ -1,7 +1,13 @@
 // The parts of λ as bars.
 import type { Feedbacks } from "../feedback/feedbacks.ts";
-import { around, extent, type Layer, layerOf, type Plot, plotOf } from "./plot.ts";
+import { boxOf, extent, layerOf, layersOf, lineOf, type Plot, plotOf } from "./plot.ts";
 import { FEEDBACK, numeral, signed, titled } from "./wording.ts";
+
+/** What feedbacks do to a disturbance. */
+export const EFFECTS = {
+  counters: { colour: "cool", dash: [6, 4] },
+  amplifies: { colour: "warm", open: true },
+} as const;
 
 /** Height of a bar with its label, px. */
 const ROW = 36;
@@ -14,41 +20,42 @@ const ROW = 36;
  * @example toVegaLite(feedbackBars(analyseFeedbacks(loop, state)))
  */
 export function feedbackBars<N extends string>(feedbacks: Feedbacks<N>): Plot {
-  const { reference, loops, others, feedbackParameter, temperature } = feedbacks;
-  const parts: [string, number][] = [
-    [`λ₀, ${reference.kind}`, reference.feedbackParameter],
-    ...loops.map((loop): [string, number] => [loop.through.join(" → "), loop.feedbackParameter]),
+  const { reference, others, feedbackParameter } = feedbacks;
+  const parts = [
+    { ...reference, through: [`λ₀, ${reference.kind}`] },
+    ...feedbacks.loops,
+    ...(others ? [{ ...others, through: [`${others.count} weaker loops`] }] : []),
+    { feedbackParameter, through: ["λ, the sum"] },
   ];
-  if (others) parts.push([`${others.count} weaker loops`, others.feedbackParameter]);
+  const height = parts.length;
   let end = 0;
-  const bars = [...parts, ["λ, the sum", feedbackParameter] as const].map(([name, value], row) => {
-    const x = row === parts.length ? 0 : end;
-    end = x + value;
-    return { x, x2: end, y: -row - 0.25, y2: -row - 0.55, tip: `${signed(value)}  ${name}` };
+  const bars = parts.map((part, row) => {
+    const start = row === height - 1 ? 0 : end;
+    end = start + part.feedbackParameter;
+    const tip = `${signed(part.feedbackParameter)}  ${part.through.join(" → ")}`;
+    const box = boxOf([start, end], [-row - 0.25, -row - 0.55], tip);
+    return { ...box, kind: end > start ? "amplifies" : "counters" };
   });
-  const domain = around(extent(bars.flatMap(({ x, x2 }) => [x, x2])), 0.04);
-  const boxes = (name: string, colour: "warm" | "cool", open: boolean): Layer =>
-    layerOf(
-      "box",
-      { colour, open },
-      bars.filter(({ x, x2 }) => x2 > x === open),
-      name,
-    );
-  const labels = bars.map(({ tip }, row) => ({ x: domain[0], y: -row - 0.12, text: tip }));
+  const domain = extent([0, ...bars.map((bar) => bar.x2 as number)]);
   return plotOf({
-    title: `Feedbacks at ${numeral(temperature)} K`,
+    title: `Feedbacks at ${numeral(feedbacks.temperature)} K`,
     x: { title: titled("feedback parameter", FEEDBACK), domain },
-    y: { title: "", domain: [-bars.length, 0.3] },
-    height: (bars.length + 0.3) * ROW,
+    y: { title: "", domain: [-height, 0.3] },
+    height: (height + 0.3) * ROW,
     layers: [
       layerOf(
         "line",
+        lineOf([
+          [0, 0],
+          [0, -height],
+        ]),
         { colour: "faint", width: 1 },
-        [0, -bars.length].map((y) => ({ x: 0, y })),
       ),
-      boxes("counters", "cool", false),
-      boxes("amplifies", "warm", true),
-      layerOf("text", { colour: "ink" }, labels),
+      ...layersOf("box", bars, EFFECTS, { dash: [1, 0] }),
+      layerOf(
+        "text",
+        bars.map((bar) => ({ x: domain[0], y: bar.y + 0.13, text: bar.tip as string })),
+      ),
     ],
   });
 }

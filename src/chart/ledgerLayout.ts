@@ -8,13 +8,18 @@ export interface LaidFlow {
   readonly from: string;
   readonly to: string;
   readonly value: number;
+  /** All that is known of it, in words. */
+  readonly tip: string;
+  readonly label: readonly string[];
+  /** Width of the label, px. */
+  readonly wide: number;
   /** Middle of the band, px. */
   readonly x: number;
   /** Half its width, px. */
   readonly half: number;
-  readonly label: readonly string[];
 }
 
+/** On both sides of a band or label, and the widest band, px. */
 const GAP = 8;
 const WIDEST = 130;
 
@@ -26,50 +31,40 @@ interface ToLay extends Pick<Ledger, "flows"> {
 }
 
 const sum = (values: readonly number[]): number => values.reduce((a, b) => a + b, 0);
+const wideOf = (lines: readonly string[]): number => Math.max(...lines.map((line) => textWidth(line, 12)));
 
 /**
  * Places flows between known reservoirs. Takes the fullest labels that fit: name and number, a letter and the
  * number, a letter; what the letters mean is then said in `captions`.
  */
-export function layFlows({ flows, names, room }: ToLay): {
-  laid: LaidFlow[];
-  lines: number;
-  captions: string[];
-} {
-  const drawn = flows
+export function layFlows({ flows, names, room }: ToLay): { laid: LaidFlow[]; captions: string[] } {
+  const known = flows
     .filter(
-      (f) => names.includes(f.from) && names.includes(f.to) && f.from !== f.to && Number.isFinite(f.value),
+      (flow) => [flow.from, flow.to].every((name) => names.includes(name)) && Number.isFinite(flow.value),
     )
-    .map((f) => (f.value < 0 ? { ...f, from: f.to, to: f.from, value: -f.value } : f));
-  const tries = [
-    drawn.map((f) => [...wrapped(f.name, 105, 12).slice(0, 3), numeral(f.value, 4)]),
-    drawn.map((f, i) => [letterOf(i), numeral(f.value, 4)]),
-    drawn.map((_, i) => [letterOf(i)]),
-  ];
-  const needs = (labels: string[][]): number[] =>
-    labels.map((lines) => GAP + Math.max(10, ...lines.map((line) => textWidth(line, 12) + GAP)));
-  const fit = tries.findIndex((labels) => sum(needs(labels)) <= room);
-  const labels = tries.at(fit) as string[][];
-  const wanted = needs(labels);
-  // one scale for all widths: the largest for which bands and labels stand side by side
-  const slots = (scale: number): number[] =>
-    drawn.map((f, i) => Math.max(wanted[i] as number, f.value * scale + 8 + GAP));
-  let [low, high] = [0, WIDEST / Math.max(1e-99, ...drawn.map((f) => f.value))];
-  for (let i = 0; i < 40; i++) {
-    const scale = (low + high) / 2;
-    [low, high] = sum(slots(scale)) > room ? [low, scale] : [scale, high];
-  }
-  const spare = Math.max(0, room - sum(slots(low))) / drawn.length;
-  const widths = slots(low).map((slot) => slot + spare);
-  return {
-    laid: drawn.map(({ from, to, value }, i) => ({
-      ...{ from, to, value, label: labels[i] as string[], half: Math.max(0.6, (value * low) / 2) },
-      x: sum(widths.slice(0, i)) + (widths[i] as number) / 2,
-    })),
-    lines: Math.max(1, ...labels.map((label) => label.length)),
-    captions:
-      fit === 0
-        ? []
-        : drawn.map((f, i) => `${letterOf(i)}: ${f.name}, ${f.from} → ${f.to}, ${numeral(f.value, 4)}`),
-  };
+    .map((flow, i) => {
+      const [from, to] = flow.value < 0 ? [flow.to, flow.from] : [flow.from, flow.to];
+      const value = Math.abs(flow.value);
+      const [letter, number] = [letterOf(i), numeral(value, 4)];
+      const labels = [[...wrapped(flow.name, 105, 12).slice(0, 3), number], [letter, number], [letter]];
+      return { from, to, value, labels, tip: `${flow.name}, ${from} → ${to}, ${number}` };
+    });
+  const level =
+    [0, 1].find((k) => sum(known.map((flow) => wideOf(flow.labels[k] as string[]) + 2 * GAP)) <= room) ?? 2;
+  const told = known.map((flow) => {
+    const label = flow.labels[level] as string[];
+    return { ...flow, label, wide: wideOf(label) };
+  });
+  // one scale for all widths: the largest of many for which bands and labels stand side by side
+  let scale = WIDEST / Math.max(1e-99, ...told.map((flow) => flow.value));
+  const slots = () => told.map((flow) => Math.max(flow.wide, flow.value * scale) + 2 * GAP);
+  for (let i = 0; i < 200 && sum(slots()) > room; i++) scale *= 0.97;
+  const spare = Math.max(0, room - sum(slots())) / told.length;
+  let end = 0;
+  const laid = told.map((flow, i) => {
+    const slot = (slots()[i] as number) + spare;
+    end += slot;
+    return { ...flow, x: end - slot / 2, half: Math.max(0.6, (flow.value * scale) / 2) };
+  });
+  return { laid, captions: level > 0 ? laid.map((flow, i) => `${letterOf(i)}: ${flow.tip}`) : [] };
 }

@@ -1,6 +1,8 @@
 // Planets against published limits over the temperature of the star.
-import type { Colour } from "./palette.ts";
-import { around, extent, type Item, layerOf, type Plot, plotOf, type Shape } from "./plot.ts";
+import type { Range } from "../ground/range.ts";
+import { type Colour, HUES } from "./palette.ts";
+import { extent, type Item, isDrawn, layerOf, type Plot, plotOf, type Shape } from "./plot.ts";
+import { OUTLINES } from "./style.ts";
 import { FLUX, letterOf, titled } from "./wording.ts";
 
 /** Where a planet is. */
@@ -27,18 +29,8 @@ export interface LimitsChartOptions {
   readonly limits: readonly LimitLine[];
 }
 
-/** Dashes and colours of the lines, in turn: neither is needed to tell them apart, as each ends in a letter. */
-const DASHES = [
-  [1, 0],
-  [8, 4],
-  [2, 3],
-  [8, 3, 2, 3],
-  [14, 4],
-];
-const COLOURS = ["ink", "cool", "warm", "purple", "green"] as const;
-
 /** Signs of planets that have a name in the legend; of more planets the names are said when pointed at. */
-const SIGNS: readonly Shape[] = ["circle", "square", "diamond", "triangle-up", "triangle-down"];
+const SIGNS = Object.keys(OUTLINES) as Shape[];
 
 /**
  * Planets as points and published limits as lines: stellar flux against the effective temperature of the star, K and
@@ -48,37 +40,35 @@ const SIGNS: readonly Shape[] = ["circle", "square", "diamond", "triangle-up", "
  * @example limitsChart({ planets, limits: [{ name: "runaway greenhouse", paper: "Kopparapu et al. 2013", points }] })
  */
 export function limitsChart({ planets, limits }: LimitsChartOptions): Plot {
-  const place = ({ effectiveTemperature, flux }: Omit<PlacedPlanet, "name">, tip?: string): Item => ({
-    ...{ x: effectiveTemperature, y: flux },
-    ...(tip ? { tip } : {}),
+  const place = (at: Omit<PlacedPlanet, "name">): Item => ({ x: at.effectiveTemperature, y: at.flux });
+  const lines = limits.map((limit, i) => {
+    // colours and dashes take turns of different lengths; neither is needed, as each line ends in a letter
+    const dash = [
+      [1, 0],
+      [8, 4],
+      [2, 3],
+      [14, 4],
+    ][i % 4] as number[];
+    const look = { colour: HUES[i % 5] as Colour, dash };
+    return layerOf("line", limit.points.map(place), look, `${letterOf(i)}: ${limit.name}, ${limit.paper}`);
   });
-  const lines = limits.map(({ name, paper, points }, i) => {
-    const dash = DASHES[(2 * i + Math.floor(i / 5)) % 5] as number[];
-    const look = { colour: COLOURS[i % 5] as Colour, dash, width: 1.8 };
-    return layerOf(
-      "line",
-      look,
-      points.map((p) => place(p)),
-      `${letterOf(i)}: ${name}, ${paper}`,
-    );
-  });
-  const points = planets.map((planet) => place(planet, planet.name));
-  const drawn = [...points, ...lines.flatMap((line) => line.items)].filter(isPlace);
-  const x = around(extent(drawn.map((item) => item.x)), 0.08);
-  const y = around(extent(drawn.map((item) => item.y)), 0.08);
-  const ends = lines.flatMap(({ items }, i) =>
-    items
-      .filter(isPlace)
-      .slice(-1)
-      .map((end) => ({ ...end, text: letterOf(i) })),
-  );
+  const points = planets.map((planet) => ({ ...place(planet), tip: planet.name }));
+  const drawn = [...points, ...lines.flatMap((line) => line.items)].filter(isDrawn);
+  const [x, y] = (["x", "y"] as const).map((key) => extent(drawn.map((item) => item[key]))) as [Range, Range];
   // a line of text is a twentieth of the lowest chart: letters that would touch are moved up
+  const step = (y[1] - y[0]) / 18;
   let lowest = -1 / 0;
-  const letters = ends
+  const letters = lines
+    .flatMap((line, i) =>
+      line.items
+        .filter(isDrawn)
+        .slice(-1)
+        .map((end) => ({ ...end, text: letterOf(i) })),
+    )
     .sort((a, b) => a.y - b.y)
     .map((end) => {
-      lowest = Math.max(end.y - 0.015 * (y[1] - y[0]), lowest + 0.055 * (y[1] - y[0]));
-      return { x: end.x + 0.012 * (x[1] - x[0]), y: lowest, text: end.text };
+      lowest = Math.max(end.y - step / 4, lowest + step);
+      return { ...end, x: end.x + 0.012 * (x[1] - x[0]), y: lowest };
     });
   return plotOf({
     title: "Stellar flux and published limits",
@@ -87,14 +77,10 @@ export function limitsChart({ planets, limits }: LimitsChartOptions): Plot {
     caption: ["A limit says no more than its paper"],
     layers: [
       ...lines,
-      layerOf("text", { colour: "ink" }, letters),
+      layerOf("text", letters),
       ...(points.length > SIGNS.length
-        ? [layerOf("point", { colour: "ink" }, points, `${points.length} planets`)]
-        : points.map((item, i) =>
-            layerOf("point", { colour: "ink", shape: SIGNS[i] as Shape }, [item], item.tip),
-          )),
+        ? [layerOf("point", points, {}, `${points.length} planets`)]
+        : points.map((item, i) => layerOf("point", [item], { shape: SIGNS[i] as Shape }, item.tip))),
     ],
   });
 }
-
-const isPlace = ({ x, y }: Item): boolean => Number.isFinite(x - y);

@@ -1,7 +1,7 @@
 // Many planets: temperature against flux.
 import type { StateColumns } from "../states/stateColumns.ts";
-import { type Item, layerOf, type Plot, plotOf } from "./plot.ts";
-import { byStability } from "./statesChart.ts";
+import { type Item, layersOf, type Plot, plotOf } from "./plot.ts";
+import { MARKS } from "./statesChart.ts";
 import { FLUX, titled } from "./wording.ts";
 
 /** The states of many planets, and a column to draw them against. */
@@ -19,8 +19,8 @@ export interface PlanetsChartOptions {
 /** More points than this hide one another, and make a file that nobody opens. */
 const MOST = 3000;
 
-/** Numbers in a column of stability. */
-const SIGNS = { stable: -1, unstable: 1, undecided: 0 };
+/** What 0, 1 and, as the last, −1 in a column of stability mean. */
+const KINDS = ["undecided", "unstable", "stable"];
 
 /**
  * The temperature of every state of many planets against one of their givens: filled where stable, open where unstable. Of
@@ -34,23 +34,21 @@ export function planetsChart({
   name = "stellar flux",
   unit = FLUX,
 }: PlanetsChartOptions): Plot {
-  const { temperatures, stability, first, rows } = states;
+  const { temperatures } = states;
   const step = Math.ceil(temperatures.length / MOST);
-  const items: (Item & { sign: number | undefined })[] = [];
   let row = 0;
+  const items: Item[] = [];
   for (let i = 0; i < temperatures.length; i += step) {
-    while (Number(first[row + 1]) <= i) row++;
-    items.push({ x: Number(values[row]), y: Number(temperatures[i]), tip: `row ${row}`, sign: stability[i] });
+    while ((states.first[row + 1] as number) <= i) row++;
+    const kind = KINDS.at(states.stability[i] as number) as string;
+    items.push({ x: values[row] as number, y: temperatures[i] as number, tip: `row ${row}`, kind });
   }
   return plotOf({
-    title: `States of ${rows} planets`,
+    title: `States of ${states.rows} planets`,
     x: { title: titled(name, unit) },
     y: { title: titled("temperature", "K") },
     caption: [countsText(states), step > 1 && `Drawn is one state in ${step}`],
-    layers: byStability((kind, look) => {
-      const own = items.filter((item) => item.sign === SIGNS[kind]);
-      return layerOf("point", look, own, kind);
-    }),
+    layers: layersOf("point", items, MARKS),
   });
 }
 

@@ -9,7 +9,8 @@ export type Shape = "circle" | "square" | "diamond" | "triangle-up" | "triangle-
 
 /** How a layer looks. What a colour says is said by dash, shape or filling too, so that grey paper is enough. */
 export interface Look {
-  readonly colour: Colour;
+  /** `ink` unless said. */
+  readonly colour?: Colour;
   readonly dash?: readonly number[];
   /** Of lines, px. */
   readonly width?: number;
@@ -18,8 +19,10 @@ export interface Look {
   readonly open?: boolean;
   /** Of lines: the outline of something full. */
   readonly full?: boolean;
-  /** Of words: their middle stands at the place, rather than their start. */
-  readonly centred?: boolean;
+  /** Of words: what of them stands at the place; their start unless said. */
+  readonly anchor?: "middle" | "end";
+  /** Of words, px; 12 unless said. */
+  readonly size?: number;
 }
 
 /** A point, the corner of a line, a box (with `x2` and `y2`) or a word. */
@@ -33,6 +36,8 @@ export interface Item {
   /** Said when it is pointed at. */
   readonly tip?: string;
   readonly text?: string;
+  /** Of which kind it is, where the kinds are layers. */
+  readonly kind?: string;
 }
 
 /** Things of one kind and one look. */
@@ -45,8 +50,43 @@ export interface Layer {
 }
 
 /** A layer from its parts. */
-export const layerOf = (mark: Layer["mark"], look: Look, items: readonly Item[], name?: string): Layer =>
-  name ? { mark, look, items, name } : { mark, look, items };
+export const layerOf = (
+  mark: Layer["mark"],
+  items: readonly Item[],
+  look: Look = {},
+  name?: string,
+): Layer => ({
+  ...{ mark, items, look },
+  ...(name && { name }),
+});
+
+/** A layer for each kind of items, named after it; `own` look and `prefix` are common to all. */
+export const layersOf = (
+  mark: Layer["mark"],
+  items: readonly Item[],
+  looks: Readonly<Record<string, Look>>,
+  own: Look = {},
+  prefix = "",
+): Layer[] =>
+  Object.entries(looks).map(([kind, look]) =>
+    layerOf(
+      mark,
+      items.filter((item) => item.kind === kind),
+      { ...look, ...own },
+      prefix + kind,
+    ),
+  );
+
+/** The corners of a line. */
+export const lineOf = (corners: readonly (readonly [number, number])[], line = 0, kind = ""): Item[] =>
+  corners.map(([x, y]) => ({ x, y, line, kind }));
+
+/** A box over two ranges. */
+export const boxOf = ([x, x2]: Range, [y, y2]: Range, tip: string): Item => ({ x, y, x2, y2, tip });
+
+/** Lines of text one below the other; `step` is signed as the upright axis is. */
+export const stacked = (lines: readonly string[], first: Item, step: number): Item[] =>
+  lines.map((text, i) => ({ x: first.x, y: first.y + i * step, text }));
 
 /** An axis. Without a title it has no ticks either: places on it have no meaning. */
 export interface Axis {
@@ -68,7 +108,7 @@ export interface Plot {
 
 /** What a chart is made of; a domain that is not said follows from what is drawn. */
 export interface Draft extends Pick<Plot, "title" | "layers"> {
-  readonly caption?: readonly (string | false)[];
+  readonly caption?: readonly (string | false | null | undefined)[];
   readonly x: DraftAxis;
   readonly y: DraftAxis;
   readonly height?: number | null;
@@ -77,85 +117,71 @@ export interface Draft extends Pick<Plot, "title" | "layers"> {
 }
 type DraftAxis = Omit<Axis, "domain"> & { readonly domain?: Range };
 
-/** Finite, and far enough from overflow for what an axis computes with it. */
-const isDrawn = (value: number): boolean => Math.abs(value) < 1e100;
-
 /** In a chart with more places than this they have no words of their own. */
 const MOST_TIPS = 600;
 
+/** Finite, and far enough from overflow for what an axis computes with it. */
+const isNear = (value: number): boolean => Math.abs(value) < 1e100;
+
+/** Whether a place can be drawn somewhere. */
+export const isDrawn = ({ x, y, x2 = x, y2 = y }: Item): boolean => [x, y, x2, y2].every(isNear);
+
 /** Makes a chart: only finite places inside of its axes are kept, and the caption counts the rest. */
-export function plotOf({ title, caption = [], x, y, layers, height = null, dropped = 0 }: Draft): Plot {
-  let lost = dropped;
-  const keep = (layer: Layer, isKept: (item: Item) => boolean): Layer => {
-    const items = layer.items.filter(isKept);
-    lost += layer.items.length - items.length;
-    return { ...layer, items };
-  };
-  const finite = layers.map((layer) => keep(layer, (i) => [i.x, i.y, i.x2 ?? 0, i.y2 ?? 0].every(isDrawn)));
-  const items = finite.flatMap((layer) => layer.items);
-  const across = axisOf(
-    x,
-    items.flatMap((i) => [i.x, i.x2 ?? i.x]),
-  );
-  const up = axisOf(
-    y,
-    items.flatMap((i) => [i.y, i.y2 ?? i.y]),
-  );
-  const told = (item: Item): Item =>
-    items.length > MOST_TIPS
-      ? item
-      : {
-          ...item,
-          tip: `${across.title} ${numeral(item.x)}, ${up.title} ${numeral(item.y)}; ${item.tip ?? ""}`,
-        };
-  const kept = finite.map((layer): Layer => {
-    const inside = keep(layer, (i) => lies(i.x, across) && lies(i.y, up));
-    return layer.mark === "point" ? { ...inside, items: inside.items.map(told) } : inside;
+export function plotOf(draft: Draft): Plot {
+  const all = draft.layers.flatMap((layer) => layer.items);
+  const places = all.filter(isDrawn);
+  const [x, y] = (["x", "y"] as const).map((way) =>
+    axisOf(
+      draft[way],
+      places.flatMap((item) => [item[way], item[`${way}2`] ?? item[way]]),
+    ),
+  ) as [Axis, Axis];
+  let lost = (draft.dropped ?? 0) + all.length;
+  const layers = draft.layers.map((layer): Layer => {
+    const items = layer.items.filter((item) => isDrawn(item) && lies(item.x, x) && lies(item.y, y));
+    lost -= items.length;
+    const isTold = layer.mark === "point" && all.length <= MOST_TIPS;
+    const told = (item: Item): Item => ({
+      ...item,
+      tip: `${x.title} ${numeral(item.x)}, ${y.title} ${numeral(item.y)}; ${item.tip ?? ""}`,
+    });
+    return { ...layer, items: isTold ? items.map(told) : items };
   });
+  const left = lost > 0 && `Left out, as not finite or outside: ${lost}`;
   return deepFreeze({
     picture: "plot",
-    title,
-    caption: [...caption, lost > 0 && `Left out, as not finite or outside: ${lost}`].filter(
-      (c) => c !== false,
-    ),
-    x: across,
-    y: up,
-    layers: kept.filter((layer) => layer.items.length > 0),
-    height,
+    title: draft.title,
+    caption: [...(draft.caption ?? []), left].filter(Boolean) as string[],
+    ...{ x, y },
+    layers: layers.filter((layer) => layer.items.length > 0),
+    height: draft.height ?? null,
   });
 }
 
-/** A drawing in px, from its upper left corner; it has no axes. */
-export function drawingOf(
-  draft: Omit<Draft, "x" | "y">,
-  { width, height }: { width: number; height: number },
-): Plot {
-  const turned = (items: readonly Item[]): Item[] =>
-    items.map((item) => ({ ...item, y: 0 - item.y, ...(item.y2 === undefined ? {} : { y2: 0 - item.y2 }) }));
-  const axis = (low: number, high: number) => ({ title: "", domain: [low, high] as const });
-  const layers = draft.layers.map((layer) => ({ ...layer, items: turned(layer.items) }));
-  return plotOf({ ...draft, layers, x: axis(0, width), y: axis(-height, 1), height: height + 1 });
+/** A drawing in px, from 0 to the right and from 0 down to −height; it has no axes. */
+export const drawingOf = (draft: Omit<Draft, "x" | "y">, size: { width: number; height: number }): Plot =>
+  plotOf({
+    ...draft,
+    x: { title: "", domain: [0, size.width] },
+    y: { title: "", domain: [-size.height, 1] },
+    height: size.height + 1,
+  });
+
+const lies = (value: number, axis: Axis): boolean => value >= axis.domain[0] && value <= axis.domain[1];
+
+/** Lowest and highest of the values that can be drawn, with some room on both sides; infinite if there are none. */
+export function extent(values: readonly number[]): Range {
+  const sorted = Float64Array.from(values.filter(isNear)).sort();
+  const [low, high] = [sorted.at(0) ?? 1 / 0, sorted.at(-1) ?? -1 / 0];
+  const room = (high - low) / 16;
+  return [low - room, high + room];
 }
 
-const lies = (value: number, { domain: [low, high] }: Axis): boolean => value >= low && value <= high;
-
-/** Lowest and highest of many values. */
-export const extent = (values: readonly number[]): Range => [
-  values.reduce((a, b) => Math.min(a, b), 1 / 0),
-  values.reduce((a, b) => Math.max(a, b), -1 / 0),
-];
-
-/** A range with some room on both sides. */
-export const around = ([low, high]: Range, room: number): Range => [
-  low - room * (high - low),
-  high + room * (high - low),
-];
-
-function axisOf({ title, domain = [1 / 0, 0] }: DraftAxis, values: readonly number[]): Axis {
-  let [low, high] = domain.every(isDrawn) ? domain : around(extent(values), 0.05);
-  if (!isDrawn(low)) [low, high] = [0, 1];
-  const size = Math.max(Math.abs(low), Math.abs(high));
+function axisOf(axis: DraftAxis, values: readonly number[]): Axis {
+  let [low, high] = axis.domain ?? extent(values);
+  if (!isNear(low) || !isNear(high)) [low, high] = [0, 1];
+  const room = 0.05 * Math.max(Math.abs(low), Math.abs(high)) || 1;
   // one value, or values that differ by rounding: ticks must still differ
-  if (!(high - low > 1e-9 * size)) [low, high] = [low - (0.05 * size || 1), high + (0.05 * size || 1)];
-  return { title, domain: [low, high] };
+  if (!(high - low > 1e-8 * room)) [low, high] = [low - room, high + room];
+  return { title: axis.title, domain: [low, high] };
 }

@@ -11,11 +11,12 @@ import { type Table, tablesOf } from "./tables.ts";
 /** A picture as data. */
 export type Picture = Plot | LedgerDrawing | CouplingGraph;
 
+/** Pictures whose parts stand where the width lets them. */
+const DRAWINGS = { ledger: ledgerPlot, couplings: couplingPlot };
+
 /** A picture for a width. */
-export function plotFor(picture: Picture, width: number): Plot {
-  if (picture.picture === "plot") return picture;
-  return picture.picture === "ledger" ? ledgerPlot(picture, width) : couplingPlot(picture, width);
-}
+export const plotFor = (picture: Picture, width: number): Plot =>
+  picture.picture === "plot" ? picture : DRAWINGS[picture.picture](picture as never, width);
 
 /** A result in words, tables and pictures. */
 export interface Report {
@@ -24,54 +25,55 @@ export interface Report {
   readonly pictures: readonly Picture[];
 }
 
-/** Fields by which a kind of result is known, and its pictures. The first that fits is taken. */
-const KINDS: readonly (readonly [string, (result: never) => Picture[]])[] = [
-  ["picture", (picture) => [picture]],
-  ["ledger bracket", ({ ledger }) => [ledgerDrawing(ledger)]],
-  ["reservoirs flows", (ledger) => [ledgerDrawing(ledger)]],
-  ["states within proof", (found) => [statesChart(found)]],
-  ["reference loops through", (feedbacks) => [feedbackBars(feedbacks), couplingGraph(feedbacks)]],
-  ["branches folds along", (diagram) => [diagramChart({ diagram })]],
-  ["points within dropped", (budget) => [budgetChart({ budget })]],
-  ["starlight found", ({ found }) => (found ? [statesChart(found)] : [])],
-  // tables alone
-  ...["curves cusps", "temperatures counts first", "rise fall", "solutions unknown", "subsets hold"].map(
-    (fields) => [fields, () => []] as const,
-  ),
-];
+/** The pictures of a result by the field by which its kind is known; the first that it has counts. */
+const KINDS: Readonly<Record<string, (result: never) => Picture[]>> = {
+  picture: (picture) => [picture],
+  ledger: ({ ledger }) => [ledgerDrawing(ledger)],
+  reservoirs: (ledger) => [ledgerDrawing(ledger)],
+  starlight: ({ found }) => (found ? [statesChart(found)] : []),
+  states: (found) => [statesChart(found)],
+  reference: (feedbacks) => [feedbackBars(feedbacks), couplingGraph(feedbacks)],
+  branches: (diagram) => [diagramChart({ diagram })],
+  dropped: (budget) => [budgetChart({ budget })],
+  // tables alone: all else that says how sure it is, and rows
+  proof: () => [],
+  rows: () => [],
+};
 
 /** What some results hold. */
-interface Parts {
+interface Parts extends Readonly<Record<string, unknown>> {
   readonly notes?: readonly { readonly severity?: string; readonly about?: string; readonly text: string }[];
   readonly counts?: Uint8Array;
 }
 
-/**
- * What is shown of a result; null where it is of no known kind, or not what it seems. It is known by its fields, so that it
- * may come from JSON.
- */
-export function reportOf(result: unknown): Report | null {
-  try {
-    const has = (fields: string, of = result): boolean =>
-      fields.split(" ").every((field) => field in (of as object));
-    const kind = KINDS.find(([fields]) => has(fields));
-    const isRows =
-      Array.isArray(result) && result.length > 0 && result.every((row) => has("name value", row));
-    if (!kind && !isRows) return null;
-    const pictures = kind?.[1](result as never) ?? [];
-    const { notes = [], counts } = result as Parts;
-    const [first] = pictures.map((picture) => plotFor(picture, 640));
-    const lines = [
+/** What is shown of a result. It is known by its fields, so that it may come from JSON; throws where it is of no known kind. */
+export function reportOf(result: unknown): Report {
+  const isRows = Array.isArray(result) && result.some((row) => "name" in row);
+  const parts = (isRows ? { rows: result } : result) as Parts;
+  const [kind, picturesOf] = Object.entries(KINDS).find(([field]) => field in parts) as [
+    string,
+    (result: never) => Picture[],
+  ];
+  const pictures = picturesOf(parts as never);
+  const [first] = pictures.map((picture) => plotFor(picture, 640));
+  return {
+    lines: [
       ...(first ? [first.title, ...first.caption] : []),
-      ...(counts ? [countsText({ counts })] : []),
-      ...notes.map((note) => [note.severity, note.about, note.text].filter(Boolean).join(", ")),
-    ];
-    return {
-      lines,
-      pictures,
-      tables: has("picture") ? [] : tablesOf(isRows ? { rows: result } : (result as never)),
-    };
+      ...(parts.counts ? [countsText(parts as Required<Parts>)] : []),
+      ...(parts.notes ?? []).map((note) => [note.severity, note.about, note.text].filter(Boolean).join(", ")),
+    ],
+    pictures,
+    tables: kind === "picture" ? [] : tablesOf(parts),
+  };
+}
+
+/** Anything in a few lines, whatever it is. */
+export function jsonReport(result: unknown): Report {
+  let text = `not JSON: ${typeof result}`;
+  try {
+    text = JSON.stringify(result, null, 1) ?? text;
   } catch {
-    return null;
+    // what refuses to be read, or leads back to itself
   }
+  return { lines: [text.length > 2000 ? `${text.slice(0, 2000)} …` : text], tables: [], pictures: [] };
 }

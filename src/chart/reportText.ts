@@ -5,31 +5,34 @@ import { svgPlot } from "./svgPlot.ts";
 import { escaped } from "./wording.ts";
 
 /** Pictures, then words and tables, all names escaped. */
-export function reportHTML({ pictures, lines, tables }: Report, page: Page): string {
+export function reportHTML(report: Report, page: Page): string {
   const row = (cells: readonly string[], tag: string): string =>
     `<tr>${cells.map((cell) => `<${tag}>${escaped(cell)}</${tag}>`).join("")}</tr>`;
   return [
-    ...pictures.map((picture) => `<figure>${svgPlot(plotFor(picture, page.width), page)}</figure>`),
-    ...lines.map((line) => `<p>${escaped(line)}</p>`),
-    ...tables.map(({ title, head, rows }) => {
-      const body = rows.map((cells) => row(cells, "td")).join("");
-      return `<table><caption>${escaped(title)}</caption>${row(head, "th")}${body}</table>`;
+    ...report.pictures.map((picture) => `<figure>${svgPlot(plotFor(picture, page.width), page)}</figure>`),
+    ...report.lines.map((line) => `<p>${escaped(line)}</p>`),
+    ...report.tables.map((table) => {
+      const body = table.rows.map((cells) => row(cells, "td")).join("");
+      return `<table><caption>${escaped(table.title)}</caption>${row(table.head, "th")}${body}</table>`;
     }),
   ].join("\n");
 }
 
 /** Words and tables in columns, as Markdown has them. */
-export function reportText({ lines, tables }: Report, written: (text: string) => string): string {
-  const parts = tables.map(({ title, head, rows }) => {
-    const all = [head, head.map(() => "---"), ...rows].map((cells, i) =>
-      i === 1 ? cells : cells.map(written),
+export function reportText(report: Report, written: (text: string) => string): string {
+  const tables = report.tables.map((table) => {
+    const cells = [table.head, ...table.rows].map((row) => row.map(written));
+    const widths = table.head.map((_, i) => Math.max(3, ...cells.map((row) => (row[i] as string).length)));
+    cells.splice(
+      1,
+      0,
+      widths.map((width) => "-".repeat(width)),
     );
-    const widths = head.map((_, i) => Math.max(...all.map((cells) => (cells[i] as string).length)));
-    const row = (cells: readonly string[]): string =>
-      `| ${cells.map((cell, i) => cell.padEnd(widths[i] as number, cell === "---" ? "-" : " ")).join(" | ")} |`;
-    return [`${written(title)}:\n`, ...all.map(row)].join("\n");
+    const row = (of: readonly string[]) =>
+      `| ${of.map((cell, i) => cell.padEnd(widths[i] as number)).join(" | ")} |`;
+    return [`${written(table.title)}:\n`, ...cells.map(row)].join("\n");
   });
-  return [...lines.map(written), ...parts].join("\n\n");
+  return [...report.lines.map(written), ...tables].join("\n\n");
 }
 
 /** A text without meaning in Markdown. */

@@ -9,21 +9,19 @@ export interface Paint {
   readonly stroke: string;
   readonly strokeWidth: number;
   readonly strokeDash: readonly number[];
+  readonly fontSize: number;
 }
 
-export function paintOf(
-  { mark, look }: Pick<Layer, "mark" | "look">,
-  colours: Readonly<Record<Colour, string>>,
-): Paint {
-  const { open, full, dash = [1, 0], width = mark === "line" ? 2 : 1.5 } = look;
-  const colour = colours[look.colour];
-  const isLine = mark === "line" && !full;
+export function paintOf({ mark, look }: Layer, colours: Readonly<Record<Colour, string>>): Paint {
+  const colour = colours[look.colour ?? "ink"];
+  const isLine = mark === "line" && !look.full;
   return {
-    fill: isLine ? "transparent" : open && mark === "point" ? colours.paper : colour,
-    fillOpacity: open && mark === "box" ? 0.2 : 1,
-    stroke: mark === "text" ? "transparent" : colour,
-    strokeWidth: full || mark === "text" ? 0 : width,
-    strokeDash: mark === "point" ? [1, 0] : dash,
+    fill: isLine ? "transparent" : look.open && mark === "point" ? colours.paper : colour,
+    fillOpacity: look.open && mark === "box" ? 0.2 : 1,
+    stroke: colour,
+    strokeWidth: look.full || mark === "text" ? 0 : (look.width ?? (mark === "line" ? 2 : 1.5)),
+    strokeDash: (mark !== "point" && look.dash) || [1, 0],
+    fontSize: look.size ?? 12,
   };
 }
 

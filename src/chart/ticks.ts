@@ -14,7 +14,7 @@ export function ticksIn([low, high]: Range, about: number): Tick[] {
   let power = 1;
   while (power > least) power /= 10;
   while (power * 10 <= least) power *= 10;
-  const step = [1, 2, 5, 10].map((k) => k * power).find((s) => s >= least) as number;
+  const step = power * ([1, 2, 5, 10].find((k) => k * power >= least) as number);
   const ticks: Tick[] = [];
   for (let i = Math.ceil(low / step); i * step <= high; i++) {
     // 12 digits: a multiple of a decimal fraction is written as people write it; and no −0

@@ -73,11 +73,7 @@ describe("the palette", () => {
   test.each(["light", "dark"] as const)("of %s has words one can read", (theme) => {
     const svg = parsed(svgOf("limits", 640, theme));
     const paper = all(svg, "rect")[0]?.attributes.fill as string;
-    const inks = new Set(
-      all(svg, "text")
-        .map((element) => element.attributes.fill)
-        .filter(Boolean),
-    );
+    const inks = new Set(wordsOf(svg).map((words) => words.fill));
     expect(inks.size).toBeGreaterThan(1);
     // 4.5 is what WCAG 2.1 asks of small words, 3 of lines and points; the purple of Okabe & Ito has 2.9 on white
     for (const ink of inks) expect(contrast(ink as string, paper)).toBeGreaterThan(4.5);

@@ -54,29 +54,36 @@ export interface Words {
   readonly right: number;
   readonly top: number;
   readonly bottom: number;
+  readonly fill: string | undefined;
 }
 
-/** Where words stand, for letters of 0.58 em: a common width of system fonts. */
+/**
+ * Where words stand in their picture, for letters of 0.58 em: a common width of system fonts. Size, anchor and colour are
+ * those of the text or of the nearest element around it that has them.
+ */
 export function wordsOf(svg: Element): Words[] {
   const words: Words[] = [];
-  const walk = (element: Element, anchor: string): void => {
-    const own = element.attributes["text-anchor"] ?? anchor;
+  const [originX = 0, originY = 0] = (svg.attributes.viewBox ?? "").split(" ").map(Number);
+  const walk = (element: Element, around: Element["attributes"]): void => {
+    const known = { ...around, ...element.attributes };
     if (element.name === "text" && element.text.trim() !== "") {
-      const size = Number(element.attributes["font-size"] ?? 12);
+      const size = Number(known["font-size"]);
       const width = [...element.text].length * 0.58 * size;
-      const [x, y] = [Number(element.attributes.x), Number(element.attributes.y)];
-      const left = own === "end" ? x - width : own === "middle" ? x - width / 2 : x;
+      const [x, y] = [Number(element.attributes.x) - originX, Number(element.attributes.y) - originY];
+      const anchor = known["text-anchor"];
+      const left = anchor === "end" ? x - width : anchor === "middle" ? x - width / 2 : x;
       words.push({
         text: element.text,
         left,
         right: left + width,
         top: y - 0.75 * size,
         bottom: y + 0.1 * size,
+        fill: known.fill,
       });
     }
-    for (const inner of element.inside) walk(inner, own);
+    for (const inner of element.inside) walk(inner, known);
   };
-  walk(svg, "start");
+  walk(svg, {});
   return words;
 }
 

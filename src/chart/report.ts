@@ -30,7 +30,10 @@ const KINDS: Readonly<Record<string, (result: never) => Picture[]>> = {
   picture: (picture) => [picture],
   ledger: ({ ledger }) => [ledgerDrawing(ledger)],
   reservoirs: (ledger) => [ledgerDrawing(ledger)],
-  starlight: ({ found }) => (found ? [statesChart(found)] : []),
+  starlight: ({ diagram, found }) => [
+    ...(diagram ? [diagramChart({ diagram })] : []),
+    ...(found ? [statesChart(found)] : []),
+  ],
   states: (found) => [statesChart(found)],
   reference: (feedbacks) => [feedbackBars(feedbacks), couplingGraph(feedbacks)],
   branches: (diagram) => [diagramChart({ diagram })],

@@ -23,9 +23,9 @@ const UNITS: readonly (readonly [RegExp, string])[] = [
   ],
   [/feedbackParameter$/i, FEEDBACK],
   [/(storage|flux)$/i, FLUX],
-  [/(time|period)$/i, "s"],
-  [/luminosity$/i, "W"],
-  [/(axis|(zone|limits) distance)$/i, "m"],
+  [/(time|starlight period)$/i, "s"],
+  [/star.*[ .]luminosity$/, "W"],
+  [/((star|orbit).*axis|(zone|limits) distance)$/i, "m"],
   [/(^| )(at|parameters|between|distance|returnsAt|value|bracket)$/, "of"],
 ];
 

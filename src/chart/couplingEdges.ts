@@ -20,12 +20,13 @@ export function edgesOf({ through, loops, reference }: Feedbacks): Edges {
   const couplings = through.filter((name) => loops.some((loop) => loop.through.includes(name)));
   const names = ["temperature", ...couplings, "net flux"];
   const paths = [{ ...reference, through: [] }, ...loops].map((loop) => ({
-    ...{ value: loop.feedbackParameter, steps: ["temperature", ...loop.through, "net flux"] },
+    ...loop,
+    steps: ["temperature", ...loop.through, "net flux"],
   }));
   const edges = names.flatMap((end, to) =>
     names.slice(0, to).map((start, from) => {
       const own = paths.filter(({ steps }) => steps[steps.indexOf(start) + 1] === end);
-      return { from, to, value: own.reduce((sum, path) => sum + path.value, 0) };
+      return { from, to, value: own.reduce((sum, path) => sum + path.feedbackParameter, 0) };
     }),
   );
   return { names, edges: edges.filter((edge) => edge.value !== 0) };

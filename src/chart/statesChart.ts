@@ -54,7 +54,8 @@ export function budgetChart({ budget, found }: BudgetChartOptions): Plot {
   /** Cooling between two points of the curve. */
   const height = (state: State): number => {
     const next = points.findIndex((p) => p.temperature >= state.temperature);
-    const [a, b] = [points[Math.max(0, next - 1)], points[next]];
+    const b = points[next];
+    const a = points[next - 1] ?? b;
     if (!a || !b) return 1 / 0;
     const share = (state.temperature - a.temperature) / (b.temperature - a.temperature || 1);
     return a.cooling + share * (b.cooling - a.cooling);

@@ -11,21 +11,24 @@ export interface Table {
 /** More rows than this are counted, not listed. */
 const MOST = 60;
 
-/** Units by the place and the name of a field; the first that fits is taken, and `of` stands for that of the parameter. */
+/**
+ * Units by the place and the name of a field, such as `habitableZone distance`; the first that fits is taken, and `of`
+ * stands for that of the parameter.
+ */
 const UNITS: readonly (readonly [RegExp, string])[] = [
   [/^inputs /, "1"],
   [/responses .* flux$/, `${FLUX} per unit`],
   [/responses .* temperature$/, "K per unit"],
-  [/imbalance|flows value$/, FLUX],
-  [
-    /(temperatures?|Change(Held)?|interval|within|Warming|coldest|hottest)$|^equilibrium .*(value|flux|time)$/i,
-    "K",
-  ],
+  [/^equilibrium .*(value|flux|time)$/i, "K"],
+  [/imbalance|(flows value|storage|flux)$/i, FLUX],
+  [/(temperatures?|Change(Held)?|interval|within|Warming|coldest|hottest)$/i, "K"],
   [/feedbackParameter$/i, FEEDBACK],
-  [/(storage|flux)$/i, FLUX],
-  [/(time|starlight period)$/i, "s"],
-  [/star.*[ .]luminosity$/, "W"],
-  [/((star|orbit).*axis|(zone|limits) distance)$/i, "m"],
+  [/time$/i, "s"],
+  // other fields of rows are in units of their own
+  [/^rows /, "1"],
+  [/period$/, "s"],
+  [/luminosity$/i, "W"],
+  [/(axis|[es] distance)$/i, "m"],
   [/(^| )(at|parameters|between|distance|returnsAt|value|bracket)$/, "of"],
 ];
 
@@ -79,7 +82,7 @@ function listed(name: string, records: readonly Fields[], unit?: unknown): Table
     .slice(0, MOST)
     .map((record) => new Map(written(partsOf(record, unit).values, `${name} `)));
   const head = [...new Set(rows.flatMap((row) => [...row.keys()]))];
-  const more = records.length - rows.length;
+  const more = records.length - MOST;
   return {
     title: spaced(name) + (more > 0 ? `, without ${more} more` : ""),
     head,

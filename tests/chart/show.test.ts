@@ -53,6 +53,25 @@ test("tables have heads with units and rows with numbers", () => {
   expect(toText(results.rows)).toMatch(/\| flux +\| 1361 +\| W m⁻² \|/);
 });
 
+test("units follow the place of a field: nested parameters have theirs, and columns of a user are not guessed", () => {
+  const text = toText({
+    proof: "proved",
+    inputs: [{ path: "albedo.width", value: 9, unit: "K", within: [0, 1e5] }],
+    starlight: { luminosity: 7.656e25, mean: { flux: 900 } },
+    equilibrium: { orbit: { ofMeanFlux: 274.65, meanOverTime: 274.32 } },
+    solved: { unit: "W", between: [1, 2], folds: [{ at: 1.5, temperature: 255 }] },
+  });
+  for (const head of ["starlight luminosity (W)", "starlight mean flux (W m⁻²)", "solved between (W)"])
+    expect(text).toContain(head);
+  expect(text).toContain("equilibrium orbit of mean flux (K)");
+  expect(text).toContain("equilibrium orbit mean over time (K)");
+  expect(text).toMatch(/solved folds:\n\n\| at \(W\) +\| temperature \(K\)/);
+  expect(text).toMatch(/\| within +\|/);
+  expect(text).toContain("7.656×10²⁵");
+  const columns = toText([{ name: "Orsolne b", luminosity: 0.2, period: 88, temperature: 288 }]);
+  expect(columns).toMatch(/luminosity \| period \| temperature \(K\)/);
+});
+
 test("long lists are cut, and say so", () => {
   const rows = Array.from({ length: 100 }, (_, i) => ({ name: `n${i}`, value: i }));
   expect(toText(rows)).toContain("rows, without 40 more:");

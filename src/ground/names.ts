@@ -4,8 +4,8 @@ import { fail } from "./errors.ts";
 /** The known name with the smallest edit distance (Levenshtein 1966) to a misspelt one; "" when none has much in common. */
 export function nearestName(name: string, known: readonly string[]): string {
   let best = "";
-  // as many changes as it has letters make any name of any other
-  let least = name.length;
+  // as many changes as it has letters make any name of any other; a single letter is but mistyped
+  let least = Math.max(2, name.length);
   for (const candidate of known) {
     const distance = editDistance(name.slice(0, 60), candidate);
     if (distance < least) [best, least] = [candidate, distance];

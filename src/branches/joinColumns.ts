@@ -1,7 +1,9 @@
 // Joins the states of columns into branches.
+
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
 import type { Branch, BranchCrossing, BranchEnd, BranchPoint, Fold } from "./diagram.ts";
+import { foldAt } from "./foldAt.ts";
 import { matchStates } from "./matchStates.ts";
 
 /** The states at one parameter, by rising temperature. */
@@ -103,19 +105,7 @@ export function joinColumns(
   all.sort((a, b) => (coldest.get(a) as number) - (coldest.get(b) as number));
   const indices = (pair: readonly Growing[]) =>
     Object.freeze(pair.map((g) => all.indexOf(g))) as [number, number];
-  const folds = pairs.map(({ end, exists, pair }): Fold => {
-    const { at, atBracket, temperature, temperatureBracket } = end;
-    const kind = end.kind as Fold["kind"];
-    return Object.freeze({
-      kind,
-      at,
-      atBracket,
-      temperature,
-      temperatureBracket,
-      exists,
-      branches: indices(pair),
-    });
-  });
+  const folds = pairs.map(({ end, exists, pair }) => foldAt(end, exists, indices(pair)));
   folds.sort((a, b) => a.temperature - b.temperature);
   const crossings = crossed.map(({ end, below, above }): BranchCrossing => {
     const { at, atBracket, temperature, temperatureBracket } = end;

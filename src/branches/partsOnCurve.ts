@@ -4,6 +4,7 @@ import { boundsOf, branchesOf } from "./branchesOf.ts";
 import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd, Fold, UndecidedStretch } from "./diagram.ts";
 import type { Parts, Task } from "./diagramOf.ts";
+import { foldAt } from "./foldAt.ts";
 import type { NetReader } from "./netReader.ts";
 import { type Crossing, mergedCrossings, runsOf } from "./runs.ts";
 import { criticalDoubt, crossingDoubt } from "./undecided.ts";
@@ -58,16 +59,5 @@ export function partsOnCurve(curve: Curve, task: Task, net: NetReader): Parts {
 export function foldBetween(branches: readonly Branch[], pair: readonly [number, number]): Fold {
   const [cool, warm] = pair.map((i) => branches[i]) as [Branch, Branch];
   const end = (cool.low === warm.low ? cool.low : cool.high) as BranchEnd;
-  const { at, atBracket, temperature, temperatureBracket } = end;
-  const exists = end === cool.low ? "above" : "below";
-  const kind = end.kind as Fold["kind"];
-  return Object.freeze({
-    kind,
-    at,
-    atBracket,
-    temperature,
-    temperatureBracket,
-    exists,
-    branches: Object.freeze(pair),
-  });
+  return foldAt(end, end === cool.low ? "above" : "below", Object.freeze(pair));
 }

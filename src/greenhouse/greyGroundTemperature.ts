@@ -1,7 +1,11 @@
-import { mul, sqrt } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { temperaturePort } from "../law/ports.ts";
-import { closurePort, greyBlanket, opticalDepthPort } from "./greyBlanket.ts";
+import {
+  closurePort,
+  effectiveTemperaturePort,
+  greyBlanket,
+  groundUnder,
+  opticalDepthPort,
+} from "./greyBlanket.ts";
 
 /**
  * Temperature of the black ground under a grey column in radiative equilibrium: T_g = T_e·(1 + ½Dτ)^¼, in K. The air
@@ -14,16 +18,13 @@ export const greyGroundTemperature = /* @__PURE__ */ defineLaw({
   about: "Temperature of the black ground under a grey column in radiative equilibrium.",
   output: { symbol: "T_g", unit: "K", within: [0, 3.2e6], about: "ground temperature" },
   inputs: {
-    effectiveTemperature: /* @__PURE__ */ temperaturePort(
-      "T_e",
-      "effective temperature of emission to space",
-    ),
+    effectiveTemperature: /* @__PURE__ */ effectiveTemperaturePort(),
     opticalDepth: /* @__PURE__ */ opticalDepthPort(),
     closure: /* @__PURE__ */ closurePort(),
   },
   source: "Eddington approximation; Goody & Yung 1989, Atmospheric Radiation",
   write({ effectiveTemperature, opticalDepth, closure }) {
     const blanket = greyBlanket(closure, opticalDepth);
-    return mul(sqrt(sqrt(blanket)), effectiveTemperature);
+    return groundUnder(blanket, effectiveTemperature);
   },
 });

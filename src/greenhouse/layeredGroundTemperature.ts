@@ -1,7 +1,12 @@
-import { add, div, mul, sqrt, tanh } from "../graph/operations.ts";
+import { add, div, mul, tanh } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { temperaturePort } from "../law/ports.ts";
-import { closurePort, halfSlantDepth, opticalDepthPort } from "./greyBlanket.ts";
+import {
+  closurePort,
+  effectiveTemperaturePort,
+  groundUnder,
+  halfSlantDepth,
+  opticalDepthPort,
+} from "./greyBlanket.ts";
 
 /**
  * Temperature of the black ground under a grey column cut into N equal layers, each of one temperature:
@@ -16,10 +21,7 @@ export const layeredGroundTemperature = /* @__PURE__ */ defineLaw({
   about: "Temperature of the black ground under a grey column cut into equal layers.",
   output: { symbol: "T_g", unit: "K", within: [0, 3.2e6], about: "ground temperature" },
   inputs: {
-    effectiveTemperature: /* @__PURE__ */ temperaturePort(
-      "T_e",
-      "effective temperature of emission to space",
-    ),
+    effectiveTemperature: /* @__PURE__ */ effectiveTemperaturePort(),
     opticalDepth: /* @__PURE__ */ opticalDepthPort(),
     layers: { symbol: "N", unit: "1", within: [1, 1e4], about: "number of layers" },
     closure: /* @__PURE__ */ closurePort(),
@@ -28,6 +30,6 @@ export const layeredGroundTemperature = /* @__PURE__ */ defineLaw({
   write({ effectiveTemperature, opticalDepth, layers, closure }) {
     const halfDepthOfLayer = div(halfSlantDepth(closure, opticalDepth), layers);
     const blanket = add(1, mul(layers, tanh(halfDepthOfLayer)));
-    return mul(sqrt(sqrt(blanket)), effectiveTemperature);
+    return groundUnder(blanket, effectiveTemperature);
   },
 });

@@ -1,6 +1,6 @@
 import { div, sub } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { temperaturePort } from "../law/ports.ts";
+import { effectiveTemperaturePort, temperaturePort } from "../law/ports.ts";
 import { LAPSE_RATE } from "./lapse.ts";
 
 /**
@@ -14,7 +14,7 @@ export const emissionHeight = /* @__PURE__ */ defineLaw({
   output: { symbol: "z_e", unit: "m", about: "effective height of emission" },
   inputs: {
     surfaceTemperature: /* @__PURE__ */ temperaturePort("T_s", "temperature of the ground"),
-    emissionTemperature: /* @__PURE__ */ temperaturePort("T_e", "effective temperature of emission to space"),
+    emissionTemperature: /* @__PURE__ */ effectiveTemperaturePort(),
     lapseRate: LAPSE_RATE,
   },
   source: "Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441 (doi:10.1146/annurev.energy.25.1.441)",

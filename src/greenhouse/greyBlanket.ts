@@ -1,7 +1,6 @@
 // What the grey column and its layers have in common: how much more the ground emits than leaves at the top.
 import { add, mul, product, sqrt } from "../graph/operations.ts";
 import type { Of, Value } from "../graph/quantity.ts";
-import { temperaturePort } from "../law/ports.ts";
 
 /** Longwave optical depth of a whole column. Where it follows temperature, as on a hot branch, `deepest` must be large. */
 export const opticalDepthPort = <const D extends number = 1e6>(deepest: D = 1e6 as D) =>
@@ -23,10 +22,6 @@ export const halfSlantDepth = <N extends string = never>(closure: Value<N>, opti
 /** σT⁴ of the ground over what leaves at the top of a column in radiative equilibrium: 1 + ½Dτ. */
 export const greyBlanket = <N extends string = never>(closure: Value<N>, opticalDepth: Value<N>): Of<N> =>
   add(1, halfSlantDepth(closure, opticalDepth) as Value<N>);
-
-/** The temperature at which a column as a whole radiates. */
-export const effectiveTemperaturePort = () =>
-  temperaturePort("T_e", "effective temperature of emission to space");
 
 /** Temperature of the ground where σT⁴ there is so many times what leaves at the top. */
 export const groundUnder = <N extends string = never>(

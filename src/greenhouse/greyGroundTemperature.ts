@@ -1,11 +1,6 @@
 import { defineLaw } from "../law/defineLaw.ts";
-import {
-  closurePort,
-  effectiveTemperaturePort,
-  greyBlanket,
-  groundUnder,
-  opticalDepthPort,
-} from "./greyBlanket.ts";
+import { effectiveTemperaturePort } from "../law/ports.ts";
+import { closurePort, greyBlanket, groundUnder, opticalDepthPort } from "./greyBlanket.ts";
 
 /**
  * Temperature of the black ground under a grey column in radiative equilibrium: T_g = T_e·(1 + ½Dτ)^¼, in K. The air

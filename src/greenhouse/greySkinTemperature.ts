@@ -1,6 +1,6 @@
 import { div, sqrt } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { temperaturePort } from "../law/ports.ts";
+import { effectiveTemperaturePort } from "../law/ports.ts";
 
 /**
  * Temperature of the thin air at the top of a grey column, heated by longwave from below alone: T_skin = T_e/2^¼, in K,
@@ -12,10 +12,7 @@ export const greySkinTemperature = /* @__PURE__ */ defineLaw({
   about: "Temperature of the thin air at the top of a grey column, heated by longwave from below alone.",
   output: { symbol: "T_skin", unit: "K", within: [0, 1e5], about: "skin temperature" },
   inputs: {
-    effectiveTemperature: /* @__PURE__ */ temperaturePort(
-      "T_e",
-      "effective temperature of emission to space",
-    ),
+    effectiveTemperature: /* @__PURE__ */ effectiveTemperaturePort(),
   },
   source: "Pierrehumbert 2010, Principles of Planetary Climate, §3.6",
   write: ({ effectiveTemperature }) => div(effectiveTemperature, sqrt(sqrt(2))),

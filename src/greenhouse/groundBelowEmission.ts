@@ -1,6 +1,6 @@
 import { add, mul } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { temperaturePort } from "../law/ports.ts";
+import { effectiveTemperaturePort } from "../law/ports.ts";
 import { EMISSION_HEIGHT, LAPSE_RATE } from "./lapse.ts";
 
 /**
@@ -13,7 +13,7 @@ export const groundBelowEmission = /* @__PURE__ */ defineLaw({
   about: "Ground temperature below the height from which a planet emits.",
   output: { symbol: "T_s", unit: "K", about: "temperature of the ground" },
   inputs: {
-    emissionTemperature: /* @__PURE__ */ temperaturePort("T_e", "effective temperature of emission to space"),
+    emissionTemperature: /* @__PURE__ */ effectiveTemperaturePort(),
     lapseRate: LAPSE_RATE,
     height: EMISSION_HEIGHT,
   },

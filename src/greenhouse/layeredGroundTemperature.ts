@@ -1,12 +1,7 @@
 import { add, div, mul, tanh } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import {
-  closurePort,
-  effectiveTemperaturePort,
-  groundUnder,
-  halfSlantDepth,
-  opticalDepthPort,
-} from "./greyBlanket.ts";
+import { effectiveTemperaturePort } from "../law/ports.ts";
+import { closurePort, groundUnder, halfSlantDepth, opticalDepthPort } from "./greyBlanket.ts";
 
 /**
  * Temperature of the black ground under a grey column cut into N equal layers, each of one temperature:

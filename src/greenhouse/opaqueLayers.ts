@@ -1,6 +1,6 @@
 import { add, mul, sqrt } from "../graph/operations.ts";
 import { defineLaw } from "../law/defineLaw.ts";
-import { temperaturePort } from "../law/ports.ts";
+import { effectiveTemperaturePort } from "../law/ports.ts";
 
 /**
  * Surface temperature under layers that are transparent to starlight and opaque to longwave: T_s = (N + 1)^¼·T_e, in K.
@@ -12,10 +12,7 @@ export const opaqueLayers = /* @__PURE__ */ defineLaw({
   about: "Surface temperature under layers that are transparent to starlight and opaque to longwave.",
   output: { symbol: "T_s", unit: "K", within: [0, 1.1e6], about: "surface temperature" },
   inputs: {
-    effectiveTemperature: /* @__PURE__ */ temperaturePort(
-      "T_e",
-      "effective temperature of emission to space",
-    ),
+    effectiveTemperature: /* @__PURE__ */ effectiveTemperaturePort(),
     layers: { symbol: "N", unit: "1", within: [0, 1e4], about: "number of layers" },
   },
   source: "Marshall & Plumb 2008, Atmosphere, Ocean, and Climate Dynamics, §2.3",

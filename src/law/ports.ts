@@ -4,6 +4,10 @@
 export const temperaturePort = (symbol = "T", about = "temperature") =>
   ({ symbol, unit: "K", within: [0, 1e5], about }) as const;
 
+/** The temperature at which a planet as a whole radiates, K. */
+export const effectiveTemperaturePort = () =>
+  temperaturePort("T_e", "effective temperature of emission to space");
+
 /** Share of reflected light. */
 export const albedoPort = (symbol = "α", about = "Bond albedo") =>
   ({ symbol, unit: "1", within: [0, 1], about }) as const;

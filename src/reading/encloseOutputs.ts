@@ -22,13 +22,17 @@ export function encloseOutputs(
   inputs: ReadonlyMap<number, Enclosure>,
 ): number[] {
   const known = new Map(inputs);
-  for (const id of coneOf(g, outputs, [...inputs.keys()])) {
+  const cone = coneOf(g, outputs, inputs.keys());
+  for (let i = 0; i < cone.length; i++) {
+    const id = cone[i] as number;
     if (!known.has(id)) known.set(id, enclose(g, id, w, known));
   }
-  return outputs.flatMap((id) => {
-    const { lo, hi, err } = known.get(id) as Enclosure;
-    return [lo, hi, w.widened(err) ?? w.literal(0)];
-  });
+  const written: number[] = [];
+  for (let i = 0; i < outputs.length; i++) {
+    const { lo, hi, err } = known.get(outputs[i] as number) as Enclosure;
+    written.push(lo, hi, w.widened(err) ?? w.literal(0));
+  }
+  return written;
 }
 
 function enclose(g: Graph, id: number, w: EnclosureWriter, known: ReadonlyMap<number, Enclosure>): Enclosure {
@@ -40,6 +44,8 @@ function enclose(g: Graph, id: number, w: EnclosureWriter, known: ReadonlyMap<nu
     const k = w.constant(id, value);
     return { lo: k, hi: k, err: undefined, within: [value, value] };
   }
-  const args = (g.args[id] as readonly number[]).map((a) => known.get(a) as Enclosure);
-  return ENCLOSE[op](w, ...(args as [Enclosure, Enclosure, Enclosure, Enclosure]));
+  const args = g.args[id] as readonly number[];
+  // a missing argument is not read
+  const arg = (i: number) => known.get(args[i] as number) as Enclosure;
+  return ENCLOSE[op](w, arg(0), arg(1), arg(2), arg(3));
 }

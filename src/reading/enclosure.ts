@@ -25,8 +25,7 @@ export interface Ends {
 }
 
 /** The sign that lo and hi have for all admitted inputs. */
-export const signOf = ({ within: [least, greatest] }: Ends): Sign =>
-  least >= 0 ? 1 : greatest <= 0 ? -1 : 0;
+export const signOf = ({ within }: Ends): Sign => (within[0] >= 0 ? 1 : within[1] <= 0 ? -1 : 0);
 
 /** All numbers of a sign. */
 export const ofSign = (sign: number): Range => [sign > 0 ? 0 : -Infinity, sign < 0 ? 0 : Infinity];

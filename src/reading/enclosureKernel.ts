@@ -37,7 +37,7 @@ export function enclosureKernel(
     const hi = wide.has(id) ? w.input("high", i) : lo;
     known.set(id, { lo, hi, err: undefined, within: limitsOf(ranges.get(id)) });
   });
-  const run = runScalar(w, encloseOutputs(g, outputs, w, known));
+  const run = runScalar({ program: w, outputs: encloseOutputs(g, outputs, w, known) });
   const allowed = boxTest([...known.values()]);
   return (low, high, out) => {
     if (allowed(low, high)) run(low, high, out);

@@ -14,9 +14,9 @@ const NOT_NEGATIVE = /* @__PURE__ */ ofSign(1);
 /** One rule for each operation that can be enclosed; a missing one does not compile. */
 export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, Rule>> = {
   mean: (_, a) => a,
-  neg: (w, { lo, hi, err, within: [least, greatest] }) => ({
+  neg: (w, { lo, hi, err, within }) => ({
     ...{ lo: w.neg(hi), hi: w.neg(lo), err },
-    within: [-greatest, -least],
+    within: [-within[1], -within[0]],
   }),
   add: (w, a, b) =>
     w.roundedSum(w.add(a.lo, b.lo), w.add(a.hi, b.hi), w.sum(a.err, b.err), [
@@ -32,12 +32,13 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   mul(w, a, b) {
     if (a === b) return square(w, a);
     const error = w.sum(w.times(w.sum(w.size(a), a.err), b.err), w.times(w.size(b), a.err));
-    return w.rounded(...extremes(w, w.mul, a, b), error, ofSign(signOf(a) * signOf(b)));
+    const { lo, hi } = extremes(w, "mul", a, b);
+    return w.rounded(lo, hi, error, ofSign(signOf(a) * signOf(b)));
   },
   // a/b − a'/b' = α/b − (a'/b')(β/b), in an order in which nothing that underflows is divided by something small;
   // b must keep away from zero
   div(w, a, b) {
-    const [lo, hi] = extremes(w, w.div, a, reciprocalOrder(b));
+    const { lo, hi } = extremes(w, "div", a, reciprocalOrder(b));
     const within = ofSign(signOf(a) * signOf(b));
     const zero = w.literal(0);
     const above = w.less(b.lo, b.err);
@@ -53,7 +54,8 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   },
   // √a − √a' = α / (√a + √a'), no larger than α / √a'; a must not go below zero
   sqrt(w, a) {
-    const [lo, hi] = [w.step("sqrt", a.lo), w.step("sqrt", a.hi)];
+    const lo = w.step("sqrt", a.lo);
+    const hi = w.step("sqrt", a.hi);
     const zero = w.literal(0);
     let error: number | undefined;
     if (a.err !== undefined) error = w.provided(zero, w.less(a.lo, a.err), w.over(a.err, lo));
@@ -90,7 +92,8 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
 
 // 0 or 1 where the sign is proved, both where it is not; a failure of a stays one
 function leap(w: EnclosureWriter, a: Enclosure): Enclosure {
-  const [zero, one] = [w.literal(0), w.literal(1)];
+  const zero = w.literal(0);
+  const one = w.literal(1);
   const error = w.widened(a.err);
   const lo = error === undefined ? w.pick(a.lo, zero, zero, one) : w.pick(error, a.lo, one, zero);
   const hi = error === undefined ? w.pick(a.hi, zero, zero, one) : w.pick(a.hi, w.neg(error), zero, one);
@@ -101,5 +104,6 @@ function leap(w: EnclosureWriter, a: Enclosure): Enclosure {
 function square(w: EnclosureWriter, a: Enclosure): Enclosure {
   const error = w.times(w.sum(w.times(w.literal(2), w.size(a)), a.err), a.err);
   const most = Math.max(-a.within[0], a.within[1]);
-  return w.rounded(...extremesOfSquare(w, a), error, [0, most * most]);
+  const { lo, hi } = extremesOfSquare(w, a);
+  return w.rounded(lo, hi, error, [0, most * most]);
 }

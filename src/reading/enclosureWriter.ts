@@ -29,31 +29,44 @@ export class EnclosureWriter extends ScalarProgram {
     return id;
   }
 
-  neg = (a: number): number => this.step("neg", a);
-  add = (a: number, b: number): number => this.step("add", a, b);
-  sub = (a: number, b: number): number => this.step("sub", a, b);
-  mul = (a: number, b: number): number => this.step("mul", a, b);
-  div = (a: number, b: number): number => this.step("div", a, b);
-  abs = (a: number): number => this.step("abs", a);
+  neg(a: number): number {
+    return this.step("neg", a);
+  }
+  add(a: number, b: number): number {
+    return this.step("add", a, b);
+  }
+  sub(a: number, b: number): number {
+    return this.step("sub", a, b);
+  }
+  mul(a: number, b: number): number {
+    return this.step("mul", a, b);
+  }
   /** c where a < b, else d (so also where one is NaN). */
   pick(a: number, b: number, c: number, d: number): number {
     if (c === d) return c;
-    return this.#rounded(this.step("pick", a, b, c, d), Math.max(this.#roundings(c), this.#roundings(d)));
+    return this.#rounded(this.choose(a, b, c, d), Math.max(this.#roundings(c), this.#roundings(d)));
   }
-  least = (a: number, b: number): number => this.pick(a, b, a, b);
-  greatest = (a: number, b: number): number => this.pick(b, a, a, b);
+  least(a: number, b: number): number {
+    return this.pick(a, b, a, b);
+  }
+  greatest(a: number, b: number): number {
+    return this.pick(b, a, a, b);
+  }
   /** An error where a < b, else NaN. */
-  provided = (a: number, b: number, error: Bound): number =>
-    this.pick(a, b, error ?? this.literal(0), this.literal(NaN));
+  provided(a: number, b: number, error: Bound): number {
+    return this.pick(a, b, error ?? this.literal(0), this.literal(NaN));
+  }
 
   // Arithmetic of errors, of which an absent one is zero. Nothing in it is negative, so its own roundings add up to a share of
   // the result; they are counted, and made good where an error is compared, or handed out.
 
-  readonly #counts = new Map<number, number>();
-  #roundings = (id: number): number => this.#counts.get(id) ?? 0;
+  readonly #counts: number[] = [];
+  #roundings(id: number): number {
+    return this.#counts[id] ?? 0;
+  }
   #rounded(id: number, count: number): number {
     if (count > MOST_ROUNDINGS) return this.mul(id, this.literal(SLACK));
-    if (count > this.#roundings(id)) this.#counts.set(id, count);
+    if (count > this.#roundings(id)) this.#counts[id] = count;
     return id;
   }
 
@@ -68,28 +81,30 @@ export class EnclosureWriter extends ScalarProgram {
   /** By a reciprocal, which several errors may share; a subnormal one is rounded like four. */
   over(a: Bound, b: number): Bound {
     if (a === undefined) return a;
-    const inverse = this.#rounded(this.div(this.literal(1), b), 4 + this.#roundings(b));
-    return this.times(a, inverse);
+    const inverse = this.step("div", this.literal(1), b);
+    return this.times(a, this.#rounded(inverse, 4 + this.#roundings(b)));
   }
   /** What is certainly left. */
-  less = (a: number, b: Bound): number =>
-    b === undefined ? a : this.#rounded(this.sub(a, this.widened(b) as number), 1);
+  less(a: number, b: Bound): number {
+    return b === undefined ? a : this.#rounded(this.sub(a, this.widened(b) as number), 1);
+  }
   /** An error with the roundings of its own arithmetic. */
-  widened = (a: Bound): Bound =>
-    a === undefined || this.#roundings(a) === 0 ? a : this.mul(a, this.literal(SLACK));
+  widened(a: Bound): Bound {
+    return a === undefined || this.#roundings(a) === 0 ? a : this.mul(a, this.literal(SLACK));
+  }
 
   /** An upper bound of the size of lo and hi. */
   size(x: Ends): number {
     const sign = signOf(x);
     if (sign) return sign > 0 ? x.hi : this.neg(x.lo);
-    const low = this.abs(x.lo);
-    return isPoint(x) ? low : (this.sum(low, this.abs(x.hi)) as number);
+    const low = this.step("abs", x.lo);
+    return isPoint(x) ? low : (this.sum(low, this.step("abs", x.hi)) as number);
   }
 
   /** The result of an operation with its own rounding, `unit` of its size. */
   rounded(lo: number, hi: number, err: Bound, within: Range, unit = HALF_ULP): Enclosure {
-    const x = this.roundedSum(lo, hi, err, within, unit);
-    return { ...x, err: this.sum(x.err, this.literal(TINY)) };
+    const sum = this.roundedSum(lo, hi, err, within, unit).err;
+    return { lo, hi, err: this.sum(sum, this.literal(TINY)), within };
   }
 
   /** The same of + and −, which are exact wherever underflow could come in. */
@@ -105,7 +120,8 @@ export class EnclosureWriter extends ScalarProgram {
     within: Range,
     error: (hi: number, err: Bound) => Bound,
   ): Enclosure {
-    const [first, second] = [this.step(op, a.lo), this.step(op, a.hi)];
+    const first = this.step(op, a.lo);
+    const second = this.step(op, a.hi);
     const hi = this.greatest(first, second);
     return this.rounded(this.least(first, second), hi, error(hi, a.err), within, ULP);
   }

@@ -2,7 +2,7 @@
 
 import type { Compute } from "../graph/op.ts";
 import { compiled } from "./generation.ts";
-import type { Operation, ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
+import type { Operation, RunOf, ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
 
 type Functions = readonly Compute["value"][];
 type Bind = (data: Float64Array, functions: Functions) => ScalarKernel;
@@ -30,37 +30,38 @@ const ARRAY = { low: "x", high: "y", data: "k" };
 const INLINE = 80;
 
 /** A program as generated code; it reads `data` anew at each run. */
-export function generateScalar(
-  program: ScalarProgram,
-  outputs: readonly number[],
-  data: Float64Array = Float64Array.from(program.data),
-): ScalarKernel {
-  const uses = program.uses(outputs);
+export function generateScalar({ program, outputs, data, known }: RunOf): ScalarKernel {
+  const { ops } = program;
+  const uses = program.uses(outputs, known);
   const texts: string[] = [];
   let code = "";
-  program.ops.forEach((op, id) => {
-    if (!uses[id]) return;
-    const text = textOf(program, op, id, texts);
+  for (let id = 0; id < ops.length; id++) {
+    if (!uses[id]) continue;
+    const place = known?.get(id);
+    const op = place?.from ?? (ops[id] as Operation | Source);
+    const text = textOf(program, op, id, place?.place ?? (program.values[id] as number), texts);
     const inline = op === "literal" || (uses[id] === 1 && text.length < INLINE);
     texts[id] = inline ? `(${text})` : `r${id}`;
     if (!inline) code += `const r${id}=${text};`;
-  });
-  const results = outputs.map((id, i) => `o[${i}]=${texts[id]};`).join("");
+  }
+  for (let i = 0; i < outputs.length; i++) code += `o[${i}]=${texts[outputs[i] as number]};`;
   // in brackets, functions are compiled at once, without being read ahead first
-  const text = `return(function(k,f){return(function(x,y,o){${code}${results}})})`;
-  return compiled<Bind>(text)(data, program.functions);
+  const text = `return(function(k,f){return(function(x,y,o){${code}})})`;
+  return compiled<Bind>(text)(data ?? Float64Array.from(program.data), program.functions);
 }
 
 function textOf(
-  { args, values }: ScalarProgram,
+  { args }: ScalarProgram,
   op: Operation | Source,
   id: number,
+  value: number,
   texts: readonly string[],
 ): string {
   // the name NaN is looked up, and what is looked up is an object
-  if (op === "literal") return Number.isNaN(values[id]) ? "0/0" : `${values[id]}`;
-  if (op === "low" || op === "high" || op === "data") return `${ARRAY[op]}[${values[id]}]`;
-  const names = (args[id] as readonly number[]).map((a) => texts[a]);
-  if (op === "call") return `f[${values[id]}](${names.join()})`;
-  return EMIT[op](...(names as [string, string, string, string]));
+  if (op === "literal") return Number.isNaN(value) ? "0/0" : `${value}`;
+  if (op === "low" || op === "high" || op === "data") return `${ARRAY[op]}[${value}]`;
+  const read = args[id] as readonly number[];
+  if (op === "call") return `f[${value}](${read.map((a) => texts[a]).join()})`;
+  const nameOf = (i: number): string => texts[read[i] as number] as string;
+  return EMIT[op](nameOf(0), nameOf(1), nameOf(2), nameOf(3));
 }

@@ -3,24 +3,21 @@ import { exp } from "../ground/elementary/exp.ts";
 import { log } from "../ground/elementary/log.ts";
 import { max, min } from "../ground/elementary/minMax.ts";
 import { tanh } from "../ground/elementary/tanh.ts";
-import type { Operation, ScalarKernel, ScalarProgram, Step } from "./scalarProgram.ts";
+import type { Operation, RunOf, ScalarKernel, Step } from "./scalarProgram.ts";
 
 /** A program as an interpreter; it reads `data` anew at each run. */
-export function interpretScalar(
-  program: ScalarProgram,
-  outputs: readonly number[],
-  data: Float64Array = Float64Array.from(program.data),
-): ScalarKernel {
+export function interpretScalar({ program, outputs, data, known }: RunOf): ScalarKernel {
   const { ops, args, values, functions } = program;
-  const uses = program.uses(outputs);
+  const numbers = data ?? Float64Array.from(program.data);
+  const uses = program.uses(outputs, known);
   const r = new Float64Array(ops.length);
   const steps: Operation[] = [];
   /** For each step the register to fill and up to four to read. */
   const places: number[] = [];
   const inputs: { from: "low" | "high" | "data"; place: number; to: number }[] = [];
-  ops.forEach((op, id) => {
-    const value = values[id] as number;
+  ops.forEach((own, id) => {
     if (!uses[id]) return;
+    const { from: op, place: value } = known?.get(id) ?? { from: own, place: values[id] as number };
     if (op === "literal") r[id] = value;
     else if (op === "low" || op === "high" || op === "data") inputs.push({ from: op, place: value, to: id });
     else {
@@ -31,7 +28,7 @@ export function interpretScalar(
   });
   const at = Uint32Array.from(places);
   return (low, high, out) => {
-    const read = { low, high, data };
+    const read = { low, high, data: numbers };
     for (const { from, place, to } of inputs) r[to] = read[from][place] as number;
     for (let i = 0; i < steps.length; i++) {
       const p = 5 * i;

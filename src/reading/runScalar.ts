@@ -2,11 +2,8 @@
 import { generateScalar } from "./generateScalar.ts";
 import { mayGenerate } from "./generation.ts";
 import { interpretScalar } from "./interpretScalar.ts";
-import type { ScalarKernel, ScalarProgram } from "./scalarProgram.ts";
+import type { RunOf, ScalarKernel } from "./scalarProgram.ts";
 
 /** As generated code where the host allows it, else by the interpreter: the same bits. */
-export const runScalar = (
-  program: ScalarProgram,
-  outputs: readonly number[],
-  data?: Float64Array,
-): ScalarKernel => (mayGenerate() ? generateScalar : interpretScalar)(program, outputs, data);
+export const runScalar = (run: RunOf): ScalarKernel =>
+  (mayGenerate() ? generateScalar : interpretScalar)(run);

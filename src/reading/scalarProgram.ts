@@ -27,39 +27,54 @@ const PLACE = {
 } as const;
 /** 2^24: more registers than a Map can tell apart, so that keys of two arguments stay exact and different. */
 const RADIX = 0x1000000;
+const NONE: readonly number[] = [];
+
+/** A register that is read instead of computed: from which array, and where. */
+export type Known = ReadonlyMap<number, { readonly from: Source; readonly place: number }>;
+const NOTHING: Known = /* @__PURE__ */ new Map();
+
+// Programs are mostly written by code that runs for the first time, when a loop over places is many times as fast as one over
+// an iterator, a spread or a destructured list.
 
 /** Each step fills one register, known by its number. */
 export class ScalarProgram {
-  readonly ops: (Operation | Source)[];
+  readonly ops: (Operation | Source)[] = [];
   /** The registers that a step reads. */
-  readonly args: (readonly number[])[];
+  readonly args: (readonly number[])[] = [];
   /** The place that a source reads, or its number; the places of data, and those of functions, count from 0. */
-  readonly values: number[];
+  readonly values: number[] = [];
   readonly data: number[] = [];
-  readonly functions: Compute["value"][];
+  readonly functions: Compute["value"][] = [];
   readonly #known = new Map<string | number, number>();
 
-  /** Empty, or with the steps of another program. */
-  constructor(from?: ScalarProgram) {
-    this.ops = from ? from.ops.slice() : [];
-    this.args = from ? from.args.slice() : [];
-    this.values = from ? from.values.slice() : [];
-    this.functions = from ? from.functions.slice() : [];
-  }
-
   /** A number that is the same in all programs of one text. */
-  literal = (value: number): number => this.#register(`${value}`, "literal", [], value);
+  literal(value: number): number {
+    return this.#register(`${value}`, "literal", NONE, value);
+  }
   /** A number that may differ between programs of one text; each has a place of its own, as the text must not depend on it. */
   datum(value: number): number {
     const place = this.data.push(value) - 1;
-    return this.#register(`d${place}`, "data", [], place);
+    return this.#register(`d${place}`, "data", NONE, place);
   }
-  input = (from: "low" | "high", place: number): number => this.#register(from + place, from, [], place);
+  input(from: "low" | "high", place: number): number {
+    return this.#register(from + place, from, NONE, place);
+  }
 
-  /** The register of a step; equal steps share one. */
-  step(op: Step, ...args: readonly number[]): number {
-    const [a, b = 0] = args as [number, number?];
-    return this.#register(op === "pick" ? args.join() : (PLACE[op] * RADIX + a) * RADIX + b, op, args, 0);
+  /** The register of a step of one or two arguments; equal steps share one. */
+  step(op: Exclude<Step, "pick">, a: number, b?: number): number {
+    const key = (PLACE[op] * RADIX + a) * RADIX + (b ?? 0);
+    return this.#register(key, op, b === undefined ? [a] : [a, b], 0);
+  }
+
+  /** The register of c where a < b, else of d. */
+  choose(a: number, b: number, c: number, d: number): number {
+    return this.#register(`${a},${b},${c},${d}`, "pick", [a, b, c, d], 0);
+  }
+
+  /** The register of a step whose arguments are in a list. */
+  again(op: Step, args: readonly number[]): number {
+    const [a, b, c, d] = args as [number, number, number, number];
+    return op === "pick" ? this.choose(a, b, c, d) : this.step(op, a, args.length > 1 ? b : undefined);
   }
 
   /** The register of an ordinary function's result. */
@@ -69,16 +84,21 @@ export class ScalarProgram {
   }
 
   /**
-   * How often each register is read by others, if only `outputs` are wanted; each of them counts once more. Min and max
-   * name their arguments more than once in a text, so these count twice.
+   * How often each register is read by others, if only `outputs` are wanted and nothing behind `known` ones; each output counts
+   * once more. Min and max name their arguments more than once in a text, so these count twice.
    */
-  uses(outputs: readonly number[]): Uint32Array {
-    const uses = new Uint32Array(this.ops.length);
-    for (const id of outputs) uses[id] = (uses[id] as number) + 1;
+  uses(outputs: readonly number[], known: Known = NOTHING): Uint32Array {
+    const { ops, args } = this;
+    const uses = new Uint32Array(ops.length);
+    const count = (id: number, times: number): void => {
+      uses[id] = (uses[id] as number) + times;
+    };
+    for (let i = 0; i < outputs.length; i++) count(outputs[i] as number, 1);
     for (let id = uses.length - 1; id >= 0; id--) {
-      if (!uses[id]) continue;
-      const times = this.ops[id] === "min" || this.ops[id] === "max" ? 2 : 1;
-      for (const a of this.args[id] as readonly number[]) uses[a] = (uses[a] as number) + times;
+      if (!uses[id] || known.has(id)) continue;
+      const times = ops[id] === "min" || ops[id] === "max" ? 2 : 1;
+      const read = args[id] as readonly number[];
+      for (let i = 0; i < read.length; i++) count(read[i] as number, times);
     }
     return uses;
   }
@@ -97,3 +117,12 @@ export class ScalarProgram {
 
 /** Runs a program on two arrays of inputs and writes its outputs. */
 export type ScalarKernel = (low: Float64Array, high: Float64Array, out: Float64Array) => void;
+
+/** How a program is made to run. */
+export interface RunOf {
+  readonly program: ScalarProgram;
+  readonly outputs: readonly number[];
+  /** Read anew at each run; the program's own, unless said. */
+  readonly data?: Float64Array;
+  readonly known?: Known;
+}

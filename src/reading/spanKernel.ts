@@ -52,8 +52,9 @@ export function spanKernel(g: Graph, { inputs, atEnds, over, wide, ranges }: Spa
   const groups = over.map((outputs) => wanted.splice(0, 3 * outputs.length));
   const { ahead, point, spans } = spanParts(w, { left: span.lo, right: span.hi, end, groups });
   const data = Float64Array.from([...w.data, ...ahead.map(() => Number.NaN)]);
-  const [readAhead, results] = [runScalar(w, ahead), data.subarray(w.data.length)];
-  const readPoint = runScalar(point.program, point.outputs, data);
+  const results = data.subarray(w.data.length);
+  const readAhead = runScalar({ program: w, outputs: ahead });
+  const readPoint = runScalar({ program: w, data, ...point });
   const allowed = boxTest(given, 1);
   const [least, greatest] = span.within;
   let prepared = false;
@@ -68,13 +69,13 @@ export function spanKernel(g: Graph, { inputs, atEnds, over, wide, ranges }: Spa
       if (prepared && x >= least && x <= greatest) readPoint(end, end, end);
       else end.fill(NaN, 1);
     },
-    over: spans.map(({ program, outputs }) => {
-      const read = runScalar(program, outputs, data);
+    over: spans.map((part) => {
+      const read = runScalar({ program: w, data, ...part });
       return (left, right, out) => {
         const a = left[0] as number;
         const b = right[0] as number;
         if (prepared && a >= least && a <= b && b <= greatest) read(left, right, out);
-        else out.fill(NaN, 0, outputs.length);
+        else out.fill(NaN, 0, part.outputs.length);
       };
     }),
   };

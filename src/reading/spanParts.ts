@@ -1,5 +1,5 @@
 // Splits the program of a span: what depends on steady inputs alone, what depends on one end, and what needs both.
-import { ScalarProgram, type Source, type Step } from "./scalarProgram.ts";
+import type { Known, ScalarProgram, Source, Step } from "./scalarProgram.ts";
 
 /** What a program has to do with spans: its inputs at place 0 are the two ends, all others are steady. */
 interface Span {
@@ -12,10 +12,10 @@ interface Span {
   readonly groups: readonly (readonly number[])[];
 }
 
-/** A program and what is wanted of it. */
+/** What is wanted of a program, and what of it is read instead of computed. */
 interface Part {
-  readonly program: ScalarProgram;
   readonly outputs: readonly number[];
+  readonly known: Known;
 }
 
 /** The parts of a program; together they compute what it does, with the same bits. */
@@ -37,25 +37,46 @@ export function spanParts(program: ScalarProgram, { left, right, end, groups }: 
   const sideOf = (id: number): number => sides[id] ?? LEFT;
   const mirrored = mirror(program, sideOf, left, right);
   const near = groups.map((wanted) => frontier(program, wanted, (id) => sideOf(id) !== BOTH));
-  const atEnds = near.map((ids) => ids.filter((id) => sideOf(id) !== STEADY));
-  const carried = new Set(atEnds.flat().map(mirrored));
-  const outputs = [...end, ...[...carried].filter((id) => !end.includes(id))];
-  const rest = frontier(program, outputs, (id) => sideOf(id) === STEADY);
-  const ahead = [...new Set([...rest, ...near.flat().filter((id) => sideOf(id) === STEADY)])];
-  const prepared = ahead.map((id, i): Known => [id, "data", program.data.length + i]);
-  const inEnd = (id: number): Known => [
-    id,
-    sideOf(id) === LEFT ? "low" : "high",
-    outputs.indexOf(mirrored(id)),
-  ];
-  return {
-    ahead,
-    point: { program: withKnown(program, prepared), outputs },
-    spans: groups.map((wanted, i) => ({
-      program: withKnown(program, [...prepared, ...(atEnds[i] as number[]).map(inEnd)]),
-      outputs: wanted,
-    })),
+  const outputs = new Places(end);
+  for (const ids of near) for (const id of ids) if (sideOf(id) !== STEADY) outputs.add(mirrored(id));
+  const ahead = new Places(frontier(program, outputs.list, (id) => sideOf(id) === STEADY));
+  for (const ids of near) for (const id of ids) if (sideOf(id) === STEADY) ahead.add(id);
+  const prepared = new Map(
+    ahead.list.map((id, i) => [id, { from: "data" as const, place: program.data.length + i }]),
+  );
+  const fromEnds = (ids: readonly number[]): Known => {
+    const known = new Map<number, { from: Source; place: number }>(prepared);
+    for (const id of ids) {
+      const side = sideOf(id);
+      const from = side === LEFT ? "low" : "high";
+      if (side !== STEADY) known.set(id, { from, place: outputs.placeOf(mirrored(id)) });
+    }
+    return known;
   };
+  return {
+    ahead: ahead.list,
+    point: { outputs: outputs.list, known: prepared },
+    spans: groups.map((wanted, i) => ({ outputs: wanted, known: fromEnds(near[i] as number[]) })),
+  };
+}
+
+/** Registers in the order of their first mention. */
+class Places {
+  readonly list: number[];
+  readonly #places = new Map<number, number>();
+
+  constructor(ids: readonly number[]) {
+    this.list = [...ids];
+    ids.forEach((id, i) => {
+      if (!this.#places.has(id)) this.#places.set(id, i);
+    });
+  }
+
+  add(id: number): void {
+    if (!this.#places.has(id)) this.#places.set(id, this.list.push(id) - 1);
+  }
+
+  placeOf = (id: number): number => this.#places.get(id) as number;
 }
 
 /** The ends on which each register depends. */
@@ -63,8 +84,12 @@ function sidesOf({ ops, args }: ScalarProgram, left: number, right: number): Uin
   const sides = new Uint8Array(ops.length);
   sides[left] = LEFT;
   sides[right] = RIGHT;
-  for (let id = 0; id < ops.length; id++)
-    for (const a of args[id] as readonly number[]) sides[id] = (sides[id] as number) | (sides[a] as number);
+  for (let id = 0; id < ops.length; id++) {
+    const read = args[id] as readonly number[];
+    let side = sides[id] as number;
+    for (let i = 0; i < read.length; i++) side |= sides[read[i] as number] as number;
+    sides[id] = side;
+  }
   return sides;
 }
 
@@ -80,7 +105,7 @@ function mirror(
     if (sideOf(id) !== RIGHT) return id;
     let copy = copies.get(id);
     if (copy === undefined) {
-      copy = program.step(program.ops[id] as Step, ...(program.args[id] as readonly number[]).map(copyOf));
+      copy = program.again(program.ops[id] as Step, (program.args[id] as readonly number[]).map(copyOf));
       copies.set(id, copy);
     }
     return copy;
@@ -100,22 +125,11 @@ function frontier(
     if (seen.has(id) || ops[id] === "literal" || ops[id] === "data") return;
     seen.add(id);
     if (isKnown(id)) found.push(id);
-    else (args[id] as readonly number[]).forEach(visit);
+    else visitAll(args[id] as readonly number[]);
   };
-  wanted.forEach(visit);
+  const visitAll = (ids: readonly number[]): void => {
+    for (let i = 0; i < ids.length; i++) visit(ids[i] as number);
+  };
+  visitAll(wanted);
   return found;
-}
-
-/** A register that is read instead of computed. */
-type Known = readonly [id: number, from: Source, place: number];
-
-/** A copy of a program in which some registers are known. */
-function withKnown(program: ScalarProgram, known: readonly Known[]): ScalarProgram {
-  const copy = new ScalarProgram(program);
-  for (const [id, from, place] of known) {
-    copy.ops[id] = from;
-    copy.args[id] = [];
-    copy.values[id] = place;
-  }
-  return copy;
 }

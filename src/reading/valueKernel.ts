@@ -8,8 +8,7 @@ import { ScalarProgram, type Step } from "./scalarProgram.ts";
 
 /** As generated straight-line code, or by the interpreter where code must not be generated: the same bits. */
 export function valueKernel(g: Graph, reading: ReadingOf): Kernel {
-  const { program, outputs } = valueProgram(g, reading);
-  const run = runScalar(program, outputs);
+  const run = runScalar(valueProgram(g, reading));
   return (x, out) => run(x, x, out);
 }
 
@@ -20,7 +19,9 @@ export function valueProgram(
 ): { program: ScalarProgram; outputs: number[] } {
   const program = new ScalarProgram();
   const known = new Map(inputs.map((id, i) => [id, program.input("low", i)]));
-  for (const id of coneOf(g, outputs, inputs)) {
+  const cone = coneOf(g, outputs, inputs);
+  for (let i = 0; i < cone.length; i++) {
+    const id = cone[i] as number;
     if (!known.has(id)) known.set(id, registerOf(g, id, program, known));
   }
   return { program, outputs: outputs.map((id) => known.get(id) as number) };
@@ -40,14 +41,16 @@ function registerOf(
   if (op === "call") return program.call((g.functions[value] as Compute).value, args);
   if (op === "mean") return args[0] as number;
   if (op === "step") return unitStep(program, args[0] as number);
-  return program.step(STEP[op], ...args);
+  return program.again(STEP[op], args);
 }
 
 /** 0 below zero, else 1; NaN for NaN, which alone has no size below 1 when that is negative. */
 function unitStep(program: ScalarProgram, a: number): number {
-  const [zero, one, none] = [0, 1, NaN].map(program.literal) as [number, number, number];
-  const known = program.step("pick", program.step("neg", program.step("abs", a)), one, one, none);
-  return program.step("pick", a, zero, zero, known);
+  const zero = program.literal(0);
+  const one = program.literal(1);
+  const size = program.step("abs", a);
+  const known = program.choose(program.step("neg", size), one, one, program.literal(NaN));
+  return program.choose(a, zero, zero, known);
 }
 
 /** The step of each operation; a missing one does not compile. A jump reads like a pick. */

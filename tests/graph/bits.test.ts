@@ -9,8 +9,7 @@ import { valueProgram } from "../../src/reading/valueKernel.ts";
 import { randomNumbers, randomPlan, recordPlan, runPlan } from "./randomGraph.ts";
 
 const kernelBy = (make: typeof generateScalar) => (graph: Graph, reading: ReadingOf) => {
-  const { program, outputs } = valueProgram(graph, reading);
-  const run = make(program, outputs);
+  const run = make(valueProgram(graph, reading));
   return (x: Float64Array, out: Float64Array) => run(x, x, out);
 };
 const generateValue = kernelBy(generateScalar);

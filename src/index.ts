@@ -139,7 +139,7 @@ export { interpolatedRunawayFlux } from "./habitable/interpolatedRunawayFlux.ts"
 export { atmosphereCapacity } from "./heat/atmosphereCapacity.ts";
 export { mixedLayerCapacity } from "./heat/mixedLayerCapacity.ts";
 export { defineLaw } from "./law/defineLaw.ts";
-export { type SampledLawSpec, sampledLaw } from "./law/sampledLaw.ts";
+export type { SampledLawSpec } from "./law/functionLaw.ts";
 export { type Slopes, slopesOf } from "./law/slopesOf.ts";
 export type { Body, Law, LawDemand, LawFacts, LawSpec, NumberBody, Wires } from "./law/types.ts";
 export type {
@@ -199,6 +199,7 @@ export { type FindStatesOptions, findStates } from "./states/findStates.ts";
 export { type FindStatesForOptions, findStatesFor, type GivenColumns } from "./states/findStatesFor.ts";
 export type { Note, NoteCode } from "./states/note.ts";
 export { type CountTile, type ProveCountOptions, type ProvedCount, proveCount } from "./states/proveCount.ts";
+export { sampledLaw } from "./states/sampledLaw.ts";
 export type { FoundStates, Ledger, State, Undecided } from "./states/state.ts";
 export { ROW_STATUS, type StateColumns } from "./states/stateColumns.ts";
 export { co2FrostPoint } from "./water/co2FrostPoint.ts";

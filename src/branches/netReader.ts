@@ -11,8 +11,8 @@ import type { Sign } from "../search/enclosed.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import type { DoubtKind } from "../search/enumeration.ts";
 import type { Located } from "../states/located.ts";
-import { searchOf } from "../states/prepared.ts";
 import { enumerateBalance, located } from "../states/provedSearch.ts";
+import { sampling } from "../states/sampledSearch.ts";
 import { balanceOf } from "./balanceOf.ts";
 import { signAt } from "./criticals.ts";
 import type { Branch, BranchEnd, BranchPoint } from "./diagram.ts";
@@ -58,7 +58,7 @@ export function netReader(loop: Loop, place: number, givens: readonly number[]):
     read(valuesOf(loop).slope, parameter, temperature);
   const states = (parameter: number, within: Range, effort: number): StatesAt => {
     set[place] = parameter;
-    const { located, undecided, cost } = searchOf(loop, false)(set, within, effort);
+    const { located, undecided, cost } = sampling.searchOf(loop)(set, within, effort);
     const zeros = located.map(({ at, bracket, stability }) => ({ at, bracket, slopeSign: SIGNS[stability] }));
     return { zeros, undecided, ...cost };
   };
@@ -69,7 +69,7 @@ export function netReader(loop: Loop, place: number, givens: readonly number[]):
       sign: (parameter, temperature) => Math.sign(read(valuesOf(loop).net, parameter, temperature)) as Sign,
       stateOn(branch, parameter) {
         set[place] = parameter;
-        const { located } = searchOf(loop, false)(set, reachOf(branch), SAMPLES);
+        const { located } = sampling.searchOf(loop)(set, reachOf(branch), SAMPLES);
         return nearest(located, branch, parameter);
       },
     };

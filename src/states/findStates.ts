@@ -3,10 +3,13 @@ import { CONSTANT_SET } from "../ground/constants.ts";
 import { deepFreeze } from "../ground/deepFreeze.ts";
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange } from "../ground/range.ts";
+import type { SearchedFunction } from "../law/functionLaw.ts";
 import { givensAt } from "../loop/inputs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
-import { type Note, type NoteCode, searchNote } from "./note.ts";
-import { checkOneVariable, readerOf, searchOf } from "./prepared.ts";
+import type { Method } from "./located.ts";
+import { type Note, searchNote } from "./note.ts";
+import { checkOneVariable, readerOf } from "./prepared.ts";
+import { proving } from "./provedSearch.ts";
 import type { FoundStates, State, Undecided } from "./state.ts";
 
 /** Where to look, for which parameters, and how hard. */
@@ -39,9 +42,10 @@ export function findStates<N extends string>(loop: Loop<N>, options: FindStatesO
   checkKeys(options, "findStates", ["within", "at", "effort"]);
   checkOneVariable(loop, "findStates");
   const within = checkedRange(options.within, "within", "K", loop.variables[0]?.within);
-  const effort = checkedNumber(options.effort ?? (loop.sampled ? 20_000 : 500), "effort", "1", [10, 1e9]);
+  const method = methodOf(loop);
+  const effort = checkedNumber(options.effort ?? method.effort, "effort", "1", [10, 1e9]);
   const givens = givensAt(loop, options.at);
-  const { located, undecided, cost } = searchOf(loop, !loop.sampled)(givens, within, effort);
+  const { located, undecided, cost } = method.searchOf(loop)(givens, within, effort);
   const read = readerOf(loop);
   const proof = loop.sampled ? "sampled" : undecided.length === 0 ? "proved" : "partial";
   return Object.freeze({
@@ -51,25 +55,23 @@ export function findStates<N extends string>(loop: Loop<N>, options: FindStatesO
     proof,
     within: Object.freeze(within),
     cost: Object.freeze(cost),
-    notes: Object.freeze(searchNotes(loop.sampled, undecided)),
+    notes: Object.freeze([...method.notes, ...notesOn(undecided)]),
     constants: CONSTANT_SET,
   });
 }
 
-function searchNotes(sampled: boolean, undecided: readonly Undecided[]): Note[] {
-  const note = (code: NoteCode, severity: Note["severity"], text: string): Note =>
-    searchNote("findStates", code, severity, text);
-  const notes: Note[] = [];
-  if (sampled) {
-    notes.push(
-      note("sampled-search", "caution", "found by sampling: states that lie close together may be missing"),
-    );
-    notes.push(
-      note("sampled-law", "info", "a law is an ordinary function; its slopes are difference quotients"),
-    );
-  }
-  if (undecided.some((u) => u.kind === "effort")) {
-    notes.push(note("search-stopped", "caution", "the effort was spent before the range was searched"));
-  }
-  return notes;
-}
+/** With proof, or as a sampled law that takes part brings it along. */
+const methodOf = (loop: Loop): Method =>
+  loop.sampled ? (loop.graph.functions[0] as SearchedFunction<Method>).search : proving;
+
+const notesOn = (undecided: readonly Undecided[]): Note[] =>
+  undecided.some((u) => u.kind === "effort")
+    ? [
+        searchNote(
+          "findStates",
+          "search-stopped",
+          "caution",
+          "the effort was spent before the range was searched",
+        ),
+      ]
+    : [];

@@ -4,7 +4,9 @@ import { checkKeys, failUnknown } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
 import type { GivenRecord, Givens, Loop } from "../loop/types.ts";
 import { checkOneVariable } from "./prepared.ts";
+import { proving } from "./provedSearch.ts";
 import { provedRows, type RowResult, sampledRows } from "./rowSearch.ts";
+import { sampling } from "./sampledSearch.ts";
 import { StateCollector, type StateColumns } from "./stateColumns.ts";
 
 /** Columns of givens, each with one value a planet; givens without a column keep the value of the loop. */
@@ -36,10 +38,11 @@ export function findStatesFor<N extends string>(
   checkKeys(options, "findStatesFor", ["within", "proof", "effort"]);
   checkOneVariable(loop, "findStatesFor");
   const within = checkedRange(options.within, "within", "K", loop.variables[0]?.within);
-  const proving = (options.proof ?? true) && !loop.sampled;
-  const effort = checkedNumber(options.effort ?? (proving ? 500 : 20_000), "effort", "1", [10, 1e9]);
+  const proof = (options.proof ?? true) && !loop.sampled;
+  const { effort: standard } = proof ? proving : sampling;
+  const effort = checkedNumber(options.effort ?? standard, "effort", "1", [10, 1e9]);
   const table = checkedColumns(loop, columns);
-  const search = (proving ? provedRows : sampledRows)(loop, within, effort);
+  const search = (proof ? provedRows : sampledRows)(loop, within, effort);
   const collector = new StateCollector(table.rows);
   const values = Float64Array.from(loop.givens, (g) => g.value);
   for (let row = 0; row < table.rows; row++) {
@@ -52,7 +55,7 @@ export function findStatesFor<N extends string>(
     const result = search(values);
     collector.add(
       row,
-      proving ? (result.decided ? "proved" : "partial") : "sampled",
+      proof ? (result.decided ? "proved" : "partial") : "sampled",
       result.zeros,
       result.found,
     );

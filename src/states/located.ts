@@ -1,5 +1,7 @@
 // What a search tells of the states it found, before everything about them is read.
 import type { Range } from "../ground/range.ts";
+import type { Loop } from "../loop/types.ts";
+import type { Note } from "./note.ts";
 import type { State, Undecided } from "./state.ts";
 
 /** A state that a search found. */
@@ -24,3 +26,13 @@ export interface Search {
 
 /** A search prepared for one loop, for any values of its givens. */
 export type StateSearch = (givens: readonly number[], within: Range, effort: number) => Search;
+
+/** A way to search loops. */
+export interface Method {
+  /** The search of a loop, prepared once. */
+  readonly searchOf: (loop: Loop) => StateSearch;
+  /** What a search may spend unless said. */
+  readonly effort: number;
+  /** What must be known of everything that is found. */
+  readonly notes: readonly Note[];
+}

@@ -2,16 +2,7 @@
 import { fail } from "../ground/errors.ts";
 import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
-import type { StateSearch } from "./located.ts";
-import { provedSearch } from "./provedSearch.ts";
-import { sampledSearch } from "./sampledSearch.ts";
 import { type StateReader, stateReader } from "./stateReader.ts";
-
-const proved = /* @__PURE__ */ kept<StateSearch>(provedSearch);
-const sampled = /* @__PURE__ */ kept<StateSearch>(sampledSearch);
-
-/** The search of a loop, with proof or by sampling. */
-export const searchOf = (loop: Loop, proving: boolean): StateSearch => (proving ? proved : sampled)(loop);
 
 /** The reader of a loop's states. */
 export const readerOf: (loop: Loop) => StateReader = /* @__PURE__ */ kept(stateReader);

@@ -1,5 +1,6 @@
 // The proved search: every equilibrium in a range of temperature, each enclosed, and proof that there is no other.
 import type { Range } from "../ground/range.ts";
+import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Enclosed } from "../search/enclosed.ts";
 import { type EnumerationOptions, enumerateZeros, searchZeros } from "../search/enumerateZeros.ts";
@@ -8,14 +9,14 @@ import type { Search } from "../search/search.ts";
 import type { Zero } from "../search/zero.ts";
 import { balanceOf, type EnclosedBalance } from "./enclosedBalance.ts";
 import { foldDistances } from "./foldDistances.ts";
-import type { Located, StateSearch } from "./located.ts";
+import type { Located, Method, StateSearch } from "./located.ts";
 import type { State } from "./state.ts";
 
 /** What finding the place of one kink may cost; a kink that is not found only makes the search longer. */
 const KINK_LIMITS = { effort: 60 };
 
-/** Prepares the proved search of a loop. Its effort is a number of boxes. */
-export function provedSearch(loop: Loop): StateSearch {
+/** Prepares the proved search of a loop. */
+function provedSearch(loop: Loop): StateSearch {
   const balance = balanceOf(loop);
   const distancesOf = foldDistances(loop);
   return (givens, within, effort) => {
@@ -34,6 +35,9 @@ export function provedSearch(loop: Loop): StateSearch {
     };
   };
 }
+
+/** The proved search; its effort is a number of boxes. */
+export const proving: Method = { searchOf: /* @__PURE__ */ kept(provedSearch), effort: 500, notes: [] };
 
 /** Enumerates the zeros of a balance whose givens are set. */
 export function enumerateBalance(balance: EnclosedBalance, within: Range, effort: number): Enumeration {

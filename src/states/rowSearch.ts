@@ -2,8 +2,8 @@
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import { balanceOf } from "./enclosedBalance.ts";
-import { searchOf } from "./prepared.ts";
 import { searchBalance } from "./provedSearch.ts";
+import { sampling } from "./sampledSearch.ts";
 import type { Found } from "./stateColumns.ts";
 
 /** What is found for a row; the next row overwrites it. */
@@ -31,7 +31,7 @@ const SIGNS = { stable: -1, undecided: 0, unstable: 1 } as const;
 
 /** By sampling. */
 export function sampledRows(loop: Loop, within: Range, effort: number): RowSearch {
-  const search = searchOf(loop, false);
+  const search = sampling.searchOf(loop);
   return (givens) => {
     const { located, undecided } = search([...givens], within, effort);
     const zeros = located.map(({ at, lambda, stability }) => ({

@@ -1,18 +1,20 @@
 // The search for loops with a law that is an ordinary function: by sampling, without proof.
 import { derivative } from "../graph/derivative.ts";
 import { inputsOf } from "../loop/inputs.ts";
+import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { type Sampled, scanZeros } from "../search/scanZeros.ts";
-import type { Located, StateSearch } from "./located.ts";
+import type { Located, Method, StateSearch } from "./located.ts";
+import { searchNote } from "./note.ts";
 
 /** Rounding of a balance, relative to its largest flow: a few operations for each flow. */
 const BALANCE_NOISE = 2e-15;
 /** λT below this share of the largest flow cannot be told from zero. */
 const SLOPE_NOISE = 1e-12;
 
-/** Prepares the sampled search of a loop. Its effort is a number of evaluations of the balance. */
-export function sampledSearch(loop: Loop): StateSearch {
+/** Prepares the sampled search of a loop. */
+function sampledSearch(loop: Loop): StateSearch {
   const inputs = inputsOf(loop);
   const slope = derivative(loop.graph, loop.net, inputs[0] as number, inputs);
   const flows = loop.flows.filter((f) => f.sign !== 0).map((f) => f.node);
@@ -47,3 +49,17 @@ export function sampledSearch(loop: Loop): StateSearch {
     };
   };
 }
+
+/** The sampled search; its effort is a number of evaluations of the balance. */
+export const sampling: Method = {
+  searchOf: /* @__PURE__ */ kept(sampledSearch),
+  effort: 20_000,
+  notes: /* @__PURE__ */ [
+    [
+      "sampled-search",
+      "caution",
+      "found by sampling: states that lie close together may be missing",
+    ] as const,
+    ["sampled-law", "info", "a law is an ordinary function; its slopes are difference quotients"] as const,
+  ].map(([code, severity, text]) => searchNote("findStates", code, severity, text)),
+};

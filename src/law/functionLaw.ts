@@ -1,4 +1,4 @@
-// A law given as an ordinary function of numbers: it can be read and searched, but not enclosed.
+// Makes a law of an ordinary function of numbers: it can be read and searched, but not enclosed.
 import type { Ports } from "../graph/card.ts";
 import type { Compute } from "../graph/op.ts";
 import type { Quantity } from "../graph/quantity.ts";
@@ -16,12 +16,13 @@ export interface SampledLawSpec<I extends Ports> extends LawFacts<I> {
 /** Half the step of a difference quotient relative to its argument: the cube root of 2⁻⁵², where both errors balance. */
 const STEP = 6.055454452393343e-6;
 
-/**
- * Makes a law from an ordinary function, for tables and codes that recordable operations cannot express. Its slope is a
- * central difference quotient and is marked so (`card.sampled`), and a loop that uses it is searched by sampling, never
- * proved. Ports are single values. Throws what every law throws; `not-finite` when `compute` gives no finite number.
- */
-export function sampledLaw<const I extends Ports>(spec: SampledLawSpec<I>): Law<I> {
+/** The function of a law, as the graph holds it, with what searches the loops that depend on it. */
+export interface SearchedFunction<S> extends Compute {
+  readonly search: S;
+}
+
+/** The law of an ordinary function, whose slopes are difference quotients; with it comes what searches the loops that use it. */
+export function functionLaw<const I extends Ports>(spec: SampledLawSpec<I>, search: unknown): Law<I> {
   const card = cardOf(spec, true);
   const names = Object.keys(spec.inputs);
   const ranges = names.map((n) => (spec.inputs[n] as { within?: Range }).within);
@@ -29,7 +30,7 @@ export function sampledLaw<const I extends Ports>(spec: SampledLawSpec<I>): Law<
     const ports = Object.fromEntries(names.map((n, i) => [n, inputs[i]]));
     return checkedResult(card, spec.compute(ports as NumberBody<I>));
   };
-  const compute = differentiable(value, ranges);
+  const compute: SearchedFunction<unknown> = { ...differentiable(value, ranges), search };
   const apply = (wires: unknown): number | Quantity => {
     const { flat, graph } = wire(spec.name, spec.inputs, wires);
     if (!graph) return value(...names.map((n) => flat[n] as number));

@@ -9,11 +9,14 @@ export function coneOf(g: Graph, outputs: readonly number[], inputs: Iterable<nu
   const wanted = new Uint8Array(g.ops.length);
   const leaves = new Set(inputs);
   const list: number[] = [];
-  for (const id of outputs) wanted[id] = 1;
+  const want = (ids: readonly number[]): void => {
+    for (let i = 0; i < ids.length; i++) wanted[ids[i] as number] = 1;
+  };
+  want(outputs);
   for (let id = wanted.length - 1; id >= 0; id--) {
     if (!wanted[id]) continue;
     list.push(id);
-    if (!leaves.has(id)) for (const a of g.args[id] as readonly number[]) wanted[a] = 1;
+    if (!leaves.has(id)) want(g.args[id] as readonly number[]);
   }
   return list.reverse();
 }

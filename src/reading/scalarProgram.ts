@@ -73,8 +73,8 @@ export class ScalarProgram {
 
   /** The register of a step whose arguments are in a list. */
   again(op: Step, args: readonly number[]): number {
-    const [a, b, c, d] = args as [number, number, number, number];
-    return op === "pick" ? this.choose(a, b, c, d) : this.step(op, a, args.length > 1 ? b : undefined);
+    const arg = (i: number) => args[i] as number;
+    return op === "pick" ? this.choose(arg(0), arg(1), arg(2), arg(3)) : this.step(op, arg(0), args[1]);
   }
 
   /** The register of an ordinary function's result. */

@@ -37,6 +37,8 @@ export interface ErrorDetails {
   readonly allowed: string;
   /** The unit in which `value` is read; absent where there is none. */
   readonly unit?: string | undefined;
+  /** What else is wrong with the same call, where all of it is looked for; the message names the fields. */
+  readonly others?: readonly ThermosteadError[];
 }
 
 /**
@@ -50,12 +52,14 @@ export class ThermosteadError extends Error implements ErrorDetails {
   declare readonly value: unknown;
   declare readonly allowed: string;
   declare readonly unit: string | undefined;
-  constructor(code: ErrorCode, { path, value, allowed, unit }: ErrorDetails) {
+  declare readonly others: readonly ThermosteadError[];
+  constructor(code: ErrorCode, { path, value, allowed, unit, others = [] }: ErrorDetails) {
     const range = unit && unit !== "1" ? `${allowed} ${unit}` : allowed;
+    const more = others.map((other) => `; also: ${other.path}`).join("");
     super(
-      `${path}: ${code.replace(/-/g, " ")}, received ${shown(value)}; allowed: ${range} (docs/errors.md#${code})`,
+      `${path}: ${code.replace(/-/g, " ")}, received ${shown(value)}; allowed: ${range} (docs/errors.md#${code})${more}`,
     );
-    Object.assign(this, { code, path, value, allowed, unit });
+    Object.assign(this, { code, path, value, allowed, unit, others });
   }
 }
 

@@ -11,6 +11,9 @@ import type { Numbers } from "./wire.ts";
 /** How far two inputs for one quantity may lie apart: common practice, larger than rounded catalogue values differ. */
 const AGREEMENT = 0.02;
 
+/** A number in words; inputs that lie 2 % apart differ in few digits. */
+const told = (value: number): string => String(Number(value.toPrecision(6)));
+
 /** What becomes of two inputs for one quantity that lie far apart: an error, or a caution and the first of them is used. */
 export type Contradictions = "refuse" | "note";
 
@@ -60,10 +63,10 @@ function compared(
       return planetNote({ code: "inputs-agree", about: by, value: spare, unit, text });
     }
     if (contradictions === "refuse") {
-      const allowed = `2 % around what ${from} gives, ${used}`;
+      const allowed = `2 % around what ${from} gives, ${told(used)}`;
       fail("contradiction", { path: by, value: spare, allowed, unit });
     }
-    const text = `${by} give another ${name} than ${from}, which is used: ${spare} against ${used} ${unit}`;
+    const text = `${by} give another ${name} than ${from}, which is used: ${told(spare)} against ${told(used)} ${unit}`;
     return contradicting({ about: by, value: spare, unit, text });
   });
 }
@@ -74,10 +77,10 @@ function checkedApproach(
   contradictions: Contradictions,
 ): PlanetNote[] {
   if (periastron > radius) return [];
-  const allowed = `a periastron a(1 − e) above the radius of the star, ${radius}`;
+  const allowed = `a periastron a(1 − e) above the radius of the star, ${told(radius)}`;
   const unit = "m";
   if (contradictions === "refuse") fail("contradiction", { path: "orbit", value: periastron, allowed, unit });
-  const text = `the orbit passes through the star: ${periastron} m is not ${allowed} m`;
+  const text = `the orbit passes through the star: ${told(periastron)} m is not ${allowed} m`;
   return [contradicting({ about: "orbit", value: periastron, unit, text })];
 }
 

@@ -3,13 +3,15 @@ import { fail } from "../ground/errors.ts";
 import { type Contradictions, checkAgreement } from "./agreement.ts";
 import { checkCombinations } from "./combinations.ts";
 import { checkCovers } from "./covers.ts";
+import { allOf, failAll } from "./faults.ts";
 import { plainCopy } from "./plainCopy.ts";
 import { planetBudget } from "./planetBudget.ts";
 import type { PlanetInput } from "./planetInput.ts";
 import { planetInputs } from "./planetInputs.ts";
 import type { PlanetNote } from "./planetNote.ts";
 import { PLANET_SHAPE, type PlanetDescription } from "./planetShape.ts";
-import { failShape } from "./shapeError.ts";
+import { shapeFaults } from "./shapeError.ts";
+import { valueFaultsBeside } from "./valueFaults.ts";
 import type { Numbers } from "./wire.ts";
 
 /** A temperature at which every law is tried with plain numbers, K. */
@@ -38,15 +40,19 @@ export function checkedPlanet(value: unknown, contradictions: Contradictions): C
   }
   const plain = plainCopy(value);
   const shaped = PLANET_SHAPE.safeParse(plain);
-  if (!shaped.success) failShape(PLANET_SHAPE, plain);
+  if (!shaped.success) {
+    const faults = shapeFaults(PLANET_SHAPE, plain);
+    failAll([...faults, ...valueFaultsBeside(faults, plain)]);
+  }
   const description = plain as PlanetDescription;
-  checkCombinations(description);
-  const inputs = planetInputs(description);
+  const [, inputs] = allOf([() => checkCombinations(description), () => planetInputs(description)]);
   const byPath = new Map(inputs.map((input) => [input.path, input.value]));
   const numbers: Numbers = (path) => byPath.get(path) as number;
-  checkAverage(description, numbers);
-  checkAllCovers(description, numbers);
-  const agreeing = checkAgreement(description, numbers, contradictions);
+  const [, , agreeing] = allOf([
+    () => checkAverage(description, numbers),
+    () => checkAllCovers(description, numbers),
+    () => checkAgreement(description, numbers, contradictions),
+  ]);
   const { report, heatCapacity } = planetBudget(description, {
     wire: numbers,
     temperature: TRIAL_TEMPERATURE,

@@ -1,5 +1,6 @@
 // Fields that need each other, or exclude each other.
 import { fail } from "../ground/errors.ts";
+import { allOf } from "./faults.ts";
 import { lawNamed } from "./fieldLaws.ts";
 import { depthLaws, forcingsOf, innerEmission } from "./outgoing.ts";
 import type { PlanetDescription } from "./planetShape.ts";
@@ -12,14 +13,14 @@ const missing = (path: string, allowed: string): never =>
 const contradiction = (path: string, value: unknown, allowed: string): never =>
   fail("contradiction", { path, value, allowed });
 
-/** Throws `missing`, `contradiction`, `unreadable` or `repeated-name` for the first combination that means nothing. */
+/** Throws `missing`, `contradiction`, `unreadable` or `repeated-name` for the combinations that mean nothing. */
 export function checkCombinations(d: PlanetDescription): void {
-  checkReflecting(d);
-  checkLayers(d);
-  checkStars(d);
-  checkEmission(d);
-  checkForcings(d);
-  if (d.rotation && d.rotation.period === undefined && d.rotation.locked === undefined)
+  const checks = [checkReflecting, checkLayers, checkStars, checkEmission, checkForcings, checkRotation];
+  allOf(checks.map((check) => () => check(d)));
+}
+
+function checkRotation({ rotation }: PlanetDescription): void {
+  if (rotation && rotation.period === undefined && rotation.locked === undefined)
     missing("rotation.period", "period or locked");
 }
 

@@ -1,5 +1,6 @@
 // Every numeric value of a description, read in SI under its path.
 import type { ListPort, Port, Ports } from "../graph/card.ts";
+import { allOf } from "./faults.ts";
 import { DIFFERENCES, isLaw, lawNamed } from "./fieldLaws.ts";
 import {
   ALBEDO_PORT,
@@ -21,9 +22,12 @@ import { type PlanetInput, readInput, type Written, writtenAs } from "./planetIn
 import type { PlanetDescription } from "./planetShape.ts";
 import { starsOf } from "./stars.ts";
 
-/** Reads all values of a description. Throws the error of the first that is wrong. */
+/** A value that is still to be read. */
+type Reading = () => PlanetInput;
+
+/** Reads all values of a description. Throws the error of the first that is wrong, with those of the others. */
 export function planetInputs(d: PlanetDescription): PlanetInput[] {
-  return [
+  return allOf([
     ...starsOf(d).flatMap(({ path, star }) => inputsIn(path, STAR_PORTS, star)),
     ...inputsIn("orbit", ORBIT_PORTS, d.orbit),
     ...redistributionInputs(d.redistribution),
@@ -39,11 +43,11 @@ export function planetInputs(d: PlanetDescription): PlanetInput[] {
     ...Object.entries(BODY_PORTS).flatMap(([name, port]) =>
       inputsAt(name, port, d[name as keyof typeof BODY_PORTS]),
     ),
-  ];
+  ]);
 }
 
 /** The fields of `record` that have a port, each with its path. */
-function inputsIn(path: string, ports: Ports, record: object = {}): PlanetInput[] {
+function inputsIn(path: string, ports: Ports, record: object = {}): Reading[] {
   const held = record as Readonly<Record<string, unknown>>;
   return Object.entries(ports).flatMap(([name, port]) =>
     inputsAt(`${path}.${name}`, port, held[name], DIFFERENCES.includes(`${held.law}.${name}`)),
@@ -59,7 +63,7 @@ function inputsAt(
   port: Port | ListPort | undefined,
   value: unknown,
   difference = false,
-): PlanetInput[] {
+): Reading[] {
   if (WORDS.includes(value)) return [];
   if (isLaw(value)) return inputsIn(path, lawNamed(value.law).card.inputs, value);
   if (Array.isArray(value)) {
@@ -68,22 +72,26 @@ function inputsAt(
       return port && "each" in port ? inputsIn(at, port.each, each) : inputsAt(at, port, each);
     });
   }
-  return port === undefined || "each" in port ? [] : [readInput(path, port, value as Written, difference)];
+  return port === undefined || "each" in port
+    ? []
+    : [() => readInput(path, port, value as Written, difference)];
 }
 
 function albedoInputs(
   path: string,
   port: Port,
   albedo: PlanetDescription["albedo"] | PlanetDescription["surface"],
-): PlanetInput[] {
+): Reading[] {
   if (typeof albedo === "object" && "covers" in albedo) return inputsIn(path, COVERED_PORTS, albedo);
   return inputsAt(path, port, albedo);
 }
 
-function redistributionInputs(redistribution: PlanetDescription["redistribution"]): PlanetInput[] {
+/** Left out only where its shape is wrong. */
+function redistributionInputs(redistribution: PlanetDescription["redistribution"] | undefined): Reading[] {
   const path = "redistribution";
+  if (redistribution === undefined) return [];
   if (typeof redistribution === "object" && "side" in redistribution)
     return inputsIn(path, TRANSPORT_PORTS, redistribution);
   const factor = typeof redistribution === "string" ? REDISTRIBUTIONS[redistribution] : redistribution;
-  return [{ ...readInput(path, REDISTRIBUTION_PORT, factor), written: writtenAs(redistribution) }];
+  return [() => ({ ...readInput(path, REDISTRIBUTION_PORT, factor), written: writtenAs(redistribution) })];
 }

@@ -1,7 +1,8 @@
 // The schema of descriptions in the two standards that tools read.
 import { toJSONSchema } from "zod/mini";
-import { ThermosteadError } from "../ground/errors.ts";
 import { checkedPlanet } from "./checkedPlanet.ts";
+import { faultsIn } from "./faults.ts";
+import { keysOf } from "./keysOf.ts";
 import { PLANET_FORMAT, PLANET_SHAPE, type PlanetDescription } from "./planetShape.ts";
 import { KEYWORDS } from "./wording.ts";
 
@@ -33,8 +34,7 @@ export const planetSchema: PlanetSchema = {
       try {
         return { value: checkedPlanet(value, "refuse").description };
       } catch (error) {
-        if (!(error instanceof ThermosteadError)) throw error;
-        return { issues: [{ message: error.message, path: keysOf(error.path) }] };
+        return { issues: faultsIn(error).map(({ message, path }) => ({ message, path: keysOf(path) })) };
       }
     },
   },
@@ -45,9 +45,3 @@ export function planetJsonSchema(): Record<string, unknown> {
   const schema = toJSONSchema(PLANET_SHAPE, { target: "draft-2020-12", metadata: KEYWORDS });
   return { title: `Planet description, ${PLANET_FORMAT}`, ...schema };
 }
-
-/** `albedo.covers[0].share` → `["albedo", "covers", 0, "share"]`. */
-const keysOf = (path: string): (string | number)[] =>
-  path === "description"
-    ? []
-    : (path.match(/[^.[\]]+/g) ?? []).map((key) => (/^\d+$/.test(key) ? Number(key) : key));

@@ -28,6 +28,7 @@ export interface ReadPlanetOptions {
  * first is used, and a caution says how far apart they are. The periastron is compared with the radius of the star here, not
  * when a given is changed later.
  *
+ * The whole description is checked: the error is that of its first mistake, and carries those of the rest as `others`.
  * Throws `unreadable`, `too-large`, `reserved-name`, `unknown-name`, `missing`, `not-a-number`, `out-of-range`,
  * `unknown-unit`, `unit-mismatch`, `shares-not-one`, `repeated-name`, `contradiction`, `not-finite`.
  *

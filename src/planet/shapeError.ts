@@ -1,7 +1,8 @@
 // Says in this library's words what the shape check of a description found.
 import type { ZodMiniType } from "zod/mini";
-import { fail } from "../ground/errors.ts";
-import { failUnknown } from "../ground/names.ts";
+import { fail, type ThermosteadError } from "../ground/errors.ts";
+import { failUnknown, nearestName } from "../ground/names.ts";
+import { faultsOf } from "./faults.ts";
 import { allowedBy } from "./wording.ts";
 
 /** As much of a schema as is needed to find the part that an issue is about. */
@@ -20,34 +21,40 @@ interface Schema {
 }
 type Path = readonly PropertyKey[];
 
-/** Throws the error for a value that does not fit its schema. */
-export function failShape(schema: ZodMiniType, value: unknown): never {
-  return explain(schema as unknown as Schema, value, "");
-}
+/** The errors of a value that does not fit its schema, the one that explains most first. */
+export const shapeFaults = (schema: ZodMiniType, value: unknown): ThermosteadError[] =>
+  explain(schema as unknown as Schema, value, "");
 
-function explain(schema: Schema, value: unknown, path: string): never {
+function explain(schema: Schema, value: unknown, path: string): ThermosteadError[] {
   const inner = unwrapped(schema);
   if (inner._zod.def.type === "union") return explainUnion(inner, value, path);
   const issues = (schema as unknown as ZodMiniType).safeParse(value).error?.issues ?? [];
-  // a misspelt field comes before the field that is missing because of it
-  const issue = issues.find((i) => i.code === "unrecognized_keys") ?? issues[0];
-  const { part, held, at } = follow(inner, value, path, issue?.path ?? []);
-  if (part._zod.def.type === "union") return explainUnion(part, held, at);
-  if (issue?.code === "unrecognized_keys") {
-    const key = issue.keys[0] as string;
-    return failUnknown(joined(at, key), key, Object.keys(part._zod.def.shape ?? {}));
-  }
-  return refuse(part, held, at);
+  if (issues.length === 0) return faultsOf(() => refuse(inner, value, path));
+  const misspelt: ThermosteadError[] = [];
+  const meant = new Set<string>();
+  const others = issues.flatMap((issue) => {
+    const { part, held, at } = follow(inner, value, path, issue.path);
+    if (part._zod.def.type === "union") return explainUnion(part, held, at);
+    if (issue.code !== "unrecognized_keys") return faultsOf(() => refuse(part, held, at));
+    const known = Object.keys(part._zod.def.shape ?? {});
+    for (const key of issue.keys) {
+      misspelt.push(...faultsOf(() => failUnknown(joined(at, key), key, known)));
+      meant.add(joined(at, nearestName(key, known)));
+    }
+    return [];
+  });
+  // a misspelt field stands before all others, and in place of the field that is missing because of it
+  return [...misspelt, ...others.filter((fault) => fault.code !== "missing" || !meant.has(fault.path))];
 }
 
 /** A union is explained by the option that is meant: the law of that name, or the object that shares most fields. */
-function explainUnion(union: Schema, value: unknown, path: string): never {
+function explainUnion(union: Schema, value: unknown, path: string): ThermosteadError[] {
   const options = flattened(union);
   const list = options.find((o) => o._zod.def.type === "array");
   if (list && Array.isArray(value)) return explain(list, value, path);
   if (!isRecord(value)) {
     const single = options.find((o) => o._zod.def.type === typeof value && !o._zod.def.shape);
-    return refuse(single ?? union, value, path);
+    return faultsOf(() => refuse(single ?? union, value, path));
   }
   const laws = options.filter((o) => o._zod.def.shape?.law);
   const named = laws.find((o) => lawOf(o) === value.law);
@@ -56,8 +63,8 @@ function explainUnion(union: Schema, value: unknown, path: string): never {
   if (only && !another && laws.length === 0) return explain(only, value, path);
   const shared = (o: Schema) => Object.keys(o._zod.def.shape ?? {}).filter((key) => key in value).length;
   const meant = options.reduce((best, o) => (shared(o) > shared(best) ? o : best), union);
-  if (laws.includes(meant)) return failLaw(laws.map(lawOf), value.law, joined(path, "law"));
-  return meant === union ? refuse(union, value, path) : explain(meant, value, path);
+  if (laws.includes(meant)) return faultsOf(() => failLaw(laws.map(lawOf), value.law, joined(path, "law")));
+  return meant === union ? faultsOf(() => refuse(union, value, path)) : explain(meant, value, path);
 }
 
 function failLaw(known: readonly string[], value: unknown, path: string): never {

@@ -7,6 +7,8 @@ import type { PlanetNote } from "../planet/planetNote.ts";
  * over the orbit that was taken.
  * `star-outside-limits`: no limits are published for such a star. `several-stars`: the limits are for the light of one of them.
  * `slow-rotation`: the limits are for a planet that turns fast.
+ * `luminosity-of-no-star`: a luminosity far from that of any star. `warm-albedo-above-cold`: a planet that grows darker as it
+ * freezes. Both are read as they stand.
  * `incomplete-budget`: no states, because a part of the budget is not given. `published-temperature`: what a table's
  * temperature may mean.
  */
@@ -17,6 +19,8 @@ export type AppraisalNoteCode =
   | "star-outside-limits"
   | "several-stars"
   | "slow-rotation"
+  | "luminosity-of-no-star"
+  | "warm-albedo-above-cold"
   | "incomplete-budget"
   | "published-temperature";
 

@@ -1,6 +1,6 @@
 // What holds the climates that hold.
 import type { StateAppraisal } from "./appraisedState.ts";
-import { kelvin, shown, signed, type Table } from "./report.ts";
+import { counted, kelvin, shown, signed, type Table } from "./report.ts";
 
 /** λ of each state as the sum of its parts. */
 export function feedbackTable(states: readonly StateAppraisal[]): Table[] {
@@ -15,7 +15,7 @@ export function feedbackTable(states: readonly StateAppraisal[]): Table[] {
         signed(loop.feedbackParameter),
         `${loop.effect}${loop.feedbackFactor === null ? "" : `, f = ${shown(loop.feedbackFactor, 4)}`}`,
       ]),
-      ...(others ? [["", `${others.count} weaker loops`, signed(others.feedbackParameter), ""]] : []),
+      ...(others ? [["", counted(others.count, "weaker loop"), signed(others.feedbackParameter), ""]] : []),
       ["", "lambda", signed(feedbackParameter), gain === null ? "" : `gain ${shown(gain, 4)}`],
     ];
   });

@@ -22,11 +22,22 @@ export function marginLines(states: readonly StateAppraisal[], diagram: Appraisa
   return [...lines, `followed: ${along}${range}, all else fixed; diagram: ${proof}`];
 }
 
-function marginText({ along, at }: TippingMargins, { direction, end, relative, jump, time }: Margin): string {
+/** What changes and how far, such as "if the star fades by 11.86 %". */
+export function changeText({ along }: TippingMargins, { direction, relative, time }: Margin): string {
+  const by = ` by ${(100 * (relative ?? 0)).toFixed(2)} %${time === null ? "" : `, in ${(time / GIGAYEAR).toFixed(2)} Gyr`}`;
+  return turnText(along, direction) + by;
+}
+
+function turnText(along: string, direction: Margin["direction"]): string {
   const light = along.endsWith("luminosity") ? "star" : "flux";
   const verbs = light === "star" ? (["brightens", "fades"] as const) : (["rises", "falls"] as const);
-  const change = `if the ${light} ${verbs[direction === "rise" ? 0 : 1]}`;
-  const by = `${change} by ${(100 * (relative ?? 0)).toFixed(2)} %${time === null ? "" : `, in ${(time / GIGAYEAR).toFixed(2)} Gyr`}`;
+  return `if the ${light} ${verbs[direction === "rise" ? 0 : 1]}`;
+}
+
+function marginText(margins: TippingMargins, margin: Margin): string {
+  const { along, at } = margins;
+  const { direction, end, jump } = margin;
+  const by = changeText(margins, margin);
   if (jump) {
     const next = jump.to
       ? `jumps to ${kelvin(jump.to.temperature)} K`
@@ -38,7 +49,7 @@ function marginText({ along, at }: TippingMargins, { direction, end, relative, j
     return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K and ${next}; ${back}`;
   }
   if (end.kind === "between")
-    return `${change}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} times today's`;
+    return `${turnText(along, direction)}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} times today's`;
   if (end.kind === "within") return `${by}, it leaves the searched range at ${kelvin(end.temperature)} K`;
   if (end.kind === "undecided") return `${by}, nothing is proved beyond ${kelvin(end.temperature)} K`;
   return `${by}, it ends in a ${end.kind} point at ${kelvin(end.temperature)} K`;

@@ -6,6 +6,7 @@ import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { hostOf } from "./hostOf.ts";
 import { limitsArePublished, PUBLISHED_STARS } from "./limits.ts";
+import { unlikelyNotes } from "./unlikelyNotes.ts";
 
 /** From here on the flux at periastron is half as large again as at apoastron, and a circle is a poor likeness; no source. */
 const ECCENTRIC = 0.1;
@@ -24,6 +25,7 @@ export const notesOfAppraisal = (noted: Noted): AppraisalNote[] => [
   ...starNotes(noted),
   ...orbitNotes(noted),
   ...rotationNotes(noted),
+  ...unlikelyNotes(noted.planet),
   ...(noted.hasBudget
     ? []
     : [

@@ -16,6 +16,8 @@ export interface Section {
 /** A whole report. */
 export interface Report {
   readonly title: string;
+  /** What it comes to. */
+  readonly summary: string;
   /** Where the description comes from and what its author says; may be empty. */
   readonly about: string;
   readonly sections: readonly Section[];
@@ -45,6 +47,9 @@ export const signed = (value: number, digits = 4): string =>
 /** A number with its unit; pure numbers have none. */
 export const withUnit = (value: number, unit: string, digits = 5): string =>
   unit === "1" ? shown(value, digits) : `${shown(value, digits)} ${unit}`;
+
+/** So many things by name. */
+export const counted = (count: number, name: string): string => `${count} ${name}${count === 1 ? "" : "s"}`;
 
 /** A text of somebody else's on one line, without characters that steer a terminal or turn the direction of writing. */
 export const oneLine = (text: string): string =>

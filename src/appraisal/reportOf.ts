@@ -1,14 +1,17 @@
 // What the report of an appraisal says, in order.
 import { ASTRONOMICAL_UNIT, SOLAR_LUMINOSITY } from "../ground/constants.ts";
 import type { Appraisal } from "./appraisal.ts";
+import { checkAppraisal } from "./checkAppraisal.ts";
 import { climateSections } from "./climateSections.ts";
 import { inputTable } from "./inputTable.ts";
 import { limitSections } from "./limitSections.ts";
 import { noteSections } from "./noteSections.ts";
 import { kelvin, oneLine, type Report, type Section, shown, type Table } from "./report.ts";
+import { summaryOf } from "./summary.ts";
 
 /** The report of an appraisal; every text in it is one line. */
 export function reportOf(appraisal: Appraisal): Report {
+  checkAppraisal(appraisal);
   const { name, star, caution } = appraisal;
   const sections = [
     inputTable(appraisal),
@@ -22,6 +25,7 @@ export function reportOf(appraisal: Appraisal): Report {
     typeof block === "string" ? oneLine(block) : { ...block, rows: block.rows.map((r) => r.map(oneLine)) };
   return {
     title: oneLine(`${name ?? "A planet"}${star === null ? "" : `, a planet of ${star}`}`),
+    summary: summaryOf(appraisal),
     about: oneLine(aboutOf(appraisal)),
     sections: sections
       .filter(({ blocks }) => blocks.length > 0)

@@ -5,11 +5,12 @@ import { reportOf } from "./reportOf.ts";
 
 /**
  * The whole appraisal as Markdown with tables: for a notebook or a page. Names and texts of the description are escaped, so
- * that no markup of theirs has an effect.
+ * that no markup of theirs has an effect. Throws `unreadable` or `missing` for what is no appraisal.
  */
 export function toMarkdown(appraisal: Appraisal): string {
-  const { title, about, sections, caution } = reportOf(appraisal);
-  const parts = [`# ${escaped(title)}`, block(about), ...sections.flatMap(sectionParts), block(caution)];
+  const { title, summary, about, sections, caution } = reportOf(appraisal);
+  const head = [`# ${escaped(title)}`, block(summary), block(about)];
+  const parts = [...head, ...sections.flatMap(sectionParts), block(caution)];
   return `${parts.filter(Boolean).join("\n\n")}\n`;
 }
 

@@ -1,6 +1,7 @@
 // An appraisal as flat rows with units, for tables of many planets.
 import type { Appraisal } from "./appraisal.ts";
 import type { PlaceTemperatures } from "./appraisedLight.ts";
+import { checkAppraisal } from "./checkAppraisal.ts";
 
 /** One number, or one word, of an appraisal. */
 export interface AppraisalRow {
@@ -13,9 +14,11 @@ export interface AppraisalRow {
 
 /**
  * The numbers of an appraisal as flat rows `{ name, value, unit }` in SI: for a data frame, a CSV file or a table of many
- * planets. What is not known has no row. Ledgers, branches and notes stay in the appraisal itself.
+ * planets. What is not known has no row. Ledgers, branches and notes stay in the appraisal itself. Throws `unreadable` or
+ * `missing` for what is no appraisal.
  */
 export function toRows(appraisal: Appraisal): AppraisalRow[] {
+  checkAppraisal(appraisal);
   const rows: AppraisalRow[] = [];
   const add = (name: string, value: number | string | null | undefined, unit = "1") => {
     if (value !== null && value !== undefined) rows.push({ name, value, unit });

@@ -8,11 +8,12 @@ const INDENT = 2;
 
 /**
  * The whole appraisal as plain text of at most 80 columns, tables apart: for a terminal or a log. Nothing in it is lost to
- * rounding that a reader would miss; `JSON.stringify(appraisal)` has every digit.
+ * rounding that a reader would miss; `JSON.stringify(appraisal)` has every digit. Throws `unreadable` or `missing` for what is no
+ * appraisal.
  */
 export function toText(appraisal: Appraisal): string {
-  const { title, about, sections, caution } = reportOf(appraisal);
-  const head = [title, about].flatMap((text) => wrapped(text, WIDTH, 0));
+  const { title, summary, about, sections, caution } = reportOf(appraisal);
+  const head = [title, summary, about].flatMap((text) => wrapped(text, WIDTH, 0));
   return [...head, ...sections.flatMap(sectionLines), "", ...wrapped(caution, WIDTH, 0), ""].join("\n");
 }
 

@@ -4,6 +4,8 @@ import { appraisePlanet } from "../../src/appraisal/appraisePlanet.ts";
 import { toMarkdown } from "../../src/appraisal/toMarkdown.ts";
 import { toRows } from "../../src/appraisal/toRows.ts";
 import { toText } from "../../src/appraisal/toText.ts";
+import { readPlanet } from "../../src/planet/readPlanet.ts";
+import { refusal } from "../refusal.ts";
 import { isUnit } from "./isUnit.ts";
 import { plain, snowy, without } from "./planets.ts";
 
@@ -106,6 +108,62 @@ describe("text", () => {
   });
 });
 
+describe("the summary on top", () => {
+  const summaryOf = (description: unknown, options = {}) => {
+    const appraisal = appraisePlanet(description, options);
+    const [, rest = ""] =
+      toText(appraisal)
+        .split(/^(?=Inputs$)/m, 1)[0]
+        ?.split(/\n(.*)/s) ?? [];
+    const told = rest.trim().replace(/\n/g, " ");
+    // the same words stand below the title of the Markdown
+    expect(toMarkdown(appraisal).split("\n\n")[1]).toBe(told);
+    return told;
+  };
+
+  it.each([
+    [
+      "several climates, and the nearest of the two tipping points",
+      snowy({ name: undefined, star: { luminosity: "0.2 solLum" } }),
+      "3 climates with the surface between 50 and 2500 K, proved to be all: 2 are stable, the coldest at 246.00 K and the warmest at 287.57 K. The nearest tipping point: if the star brightens by 8.99 %, the climate at 246.00 K ends.",
+    ],
+    [
+      "one climate without a tipping point",
+      plain(),
+      "1 climate with the surface between 50 and 2500 K, proved to be the only one: stable at 285.16 K. No tipping point from 0.4 to 2.5 times today's light.",
+    ],
+    [
+      "the other tipping point where the star is fainter",
+      snowy({ star: { luminosity: "0.178 solLum" } }),
+      "3 climates with the surface between 50 and 2500 K, proved to be all: 2 are stable, the coldest at 238.44 K and the warmest at 276.80 K. The nearest tipping point: if the star fades by 1.01 %, the climate at 276.80 K ends.",
+    ],
+    [
+      "no climate",
+      plain({ orbit: { semiMajorAxis: "900 au" } }),
+      "No climate with the surface between 50 and 2500 K: proved.",
+    ],
+    [
+      "no budget",
+      without(plain(), "longwave"),
+      "No climates were looked for: a part of the budget is not given.",
+    ],
+    [
+      "a light of several stars, of which nothing is told",
+      plain({ star: [{ luminosity: "0.1 solLum" }, { luminosity: "0.1 solLum" }] }),
+      "1 climate with the surface between 50 and 2500 K, proved to be the only one: stable at 285.22 K.",
+    ],
+  ])("says %s", (_, description, told) => {
+    expect(summaryOf(description)).toBe(told);
+  });
+
+  test("claims no proof where there is none", () => {
+    const leap = { law: "stepAlbedo", cold: 0.6, warm: 0.3, threshold: "265 K" };
+    expect(summaryOf(plain({ albedo: leap }))).toContain("K, but not all is decided: ");
+    const least = "No climate was found with the surface between 264 and 266 K: not proved.";
+    expect(summaryOf(plain({ albedo: leap }), { within: [264, 266] })).toBe(least);
+  });
+});
+
 describe("markup and steering characters in names have no effect", () => {
   const name = "<script>alert(1)</script> | *b* `c` [d](javascript:e) &amp; # $x$ ~f~ \\ _g_";
   const star = { ...(snowy().star as object), name: "A\u001b[31m\nb\u202ec\u0000" };
@@ -115,7 +173,7 @@ describe("markup and steering characters in names have no effect", () => {
 
   test("Markdown escapes them", () => {
     const markdown = toMarkdown(hostile);
-    const [title, about] = markdown.split("\n\n") as [string, string];
+    const [title, , about] = markdown.split("\n\n") as [string, string, string];
     expect(title).toBe(
       "# &lt;script&gt;alert(1)&lt;/script&gt; \\| \\*b\\* \\`c\\` \\[d\\](javascript:e) &amp;amp; \\# \\$x\\$ \\~f\\~ \\\\ \\_g\\_, a planet of A \\[31m b c",
     );
@@ -140,6 +198,29 @@ describe("markup and steering characters in names have no effect", () => {
     const lines = long.split("\n").slice(0, 7);
     expect(lines.join("")).toContain("x".repeat(500));
     for (const line of lines) expect(line.length).toBeLessThanOrEqual(80);
+  });
+});
+
+describe("what is no appraisal is refused in words that say what is", () => {
+  const { loop } = readPlanet(plain());
+  const cases: readonly (readonly [string, unknown, string, string, unknown])[] = [
+    ["nothing", null, "unreadable", "appraisal", null],
+    ["a text", "appraisal", "unreadable", "appraisal", "appraisal"],
+    ["a description", plain(), "unreadable", "appraisal.format", "thermostead-planet-1"],
+    ["a loop", loop, "missing", "appraisal.format", undefined],
+  ];
+  it.each(cases)("%s", (_, value, code, path, received) => {
+    for (const written of [toText, toMarkdown, toRows]) {
+      const error = refusal(() => written(value as never));
+      expect(error).toMatchObject({ code, path, value: received });
+      expect(error.allowed).toContain("appraisePlanet returns");
+    }
+  });
+
+  test("and one from JSON is read", () => {
+    const appraisal = appraisePlanet(snowy());
+    const again = JSON.parse(JSON.stringify(appraisal));
+    for (const written of [toText, toMarkdown, toRows]) expect(written(again)).toEqual(written(appraisal));
   });
 });
 

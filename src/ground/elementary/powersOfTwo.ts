@@ -7,15 +7,12 @@ const coarse = /* @__PURE__ */ new Float64Array(66);
 
 /** Fills the powers; every table that is filled on first use calls this. */
 export function fillPowersOfTwo(): void {
-  let power = 0.5;
-  for (let i = 0; i < 32; i++) {
-    fine[i] = power;
-    power *= 2;
-  }
-  power = 5e-324;
+  let [small, large] = [0.5, 5e-324];
   for (let i = 0; i < 66; i++) {
-    coarse[i] = power;
-    power *= 4294967296;
+    fine[i] = small;
+    coarse[i] = large;
+    small *= 2;
+    large *= 4294967296;
   }
 }
 

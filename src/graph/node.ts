@@ -4,7 +4,7 @@ import { fail } from "../ground/errors.ts";
 import type { LawCard } from "./card.ts";
 import { BARE, dimensionOfNode } from "./dimensionOfNode.ts";
 import type { Compute, Meaning, Op } from "./op.ts";
-import { type DemandValue, Quantity, type Recorder, type Wired } from "./quantity.ts";
+import { type BodyValue, Quantity, type Recorder, type Wired } from "./quantity.ts";
 
 /** The nodes of one loop. A node's arguments always have smaller ids, so ids are an order of evaluation. */
 export class Graph implements Recorder {
@@ -95,16 +95,8 @@ export class Graph implements Recorder {
     }
   }
 
-  inBody<T>(run: () => T): T {
-    this.depth++;
-    try {
-      return run();
-    } finally {
-      this.depth--;
-    }
-  }
-
-  lawNode(card: LawCard, wires: Wired, demands: readonly DemandValue[], result: unknown): Quantity {
+  lawNode(card: LawCard, wires: Wired, body: () => BodyValue): Quantity {
+    const { demands, result } = this.#inBody(body);
     const meaning: Meaning = {
       kind: "law",
       card,
@@ -129,6 +121,15 @@ export class Graph implements Recorder {
 
   unitNode(value: Quantity, unit: string): Quantity {
     return new Quantity(this, this.mean(value.id, { kind: "unit", name: unit }, dimensionOf(unit)));
+  }
+
+  #inBody<T>(run: () => T): T {
+    this.depth++;
+    try {
+      return run();
+    } finally {
+      this.depth--;
+    }
   }
 
   #tagOf(meaning: Meaning): string {

@@ -6,6 +6,12 @@ import type { Compute, Demand, Op } from "./op.ts";
 /** A combination of a law's ports with the range that it must keep, as recorded or folded. */
 export type DemandValue = readonly [name: string, demand: Demand, value: unknown];
 
+/** What the body of a law gives, recorded or folded. */
+export interface BodyValue {
+  readonly demands: readonly DemandValue[];
+  readonly result: unknown;
+}
+
 /**
  * What laws and operations ask of a graph. They reach it only through a quantity, so that a program which uses a law as
  * a plain function does not carry the graph along.
@@ -15,10 +21,8 @@ export interface Recorder {
   record(op: Op, values: readonly unknown[]): Quantity;
   /** Throws if the value is of another graph or has another unit than a port. */
   checkWire(value: Quantity, unit: string, path: string): void;
-  /** Runs a law's body; inside, units are not compared. */
-  inBody<T>(run: () => T): T;
-  /** The identity node of a law's call around its result. */
-  lawNode(card: LawCard, wires: Wired, demands: readonly DemandValue[], result: unknown): Quantity;
+  /** Runs a law's body, in which units are not compared; the identity node of the call around its result. */
+  lawNode(card: LawCard, wires: Wired, body: () => BodyValue): Quantity;
   /** The call of an ordinary function on its wires, in order. */
   callNode(compute: Compute, wires: Wired): Quantity;
   /** The same value with a stated unit. */

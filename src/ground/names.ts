@@ -16,9 +16,9 @@ export function nearestName(name: string, known: readonly string[]): string {
 function editDistance(a: string, b: string): number {
   let row = [0, ...b].map((_, j) => j);
   for (const letter of a) {
-    let left = (row[0] as number) + 1;
+    let left = Infinity;
     row = row.map((above, j) => {
-      if (j > 0) left = Math.min(above + 1, left + 1, (row[j - 1] as number) + (letter === b[j - 1] ? 0 : 1));
+      left = Math.min(above, left, (row[j - 1] ?? Infinity) - Number(letter === b[j - 1])) + 1;
       return left;
     });
   }
@@ -29,14 +29,13 @@ function editDistance(a: string, b: string): number {
 export function failUnknown(path: string, name: string, known: readonly string[]): never {
   const near = nearestName(name, known);
   const list = known.slice(0, 40).join(", ") || "(none)";
-  const allowed = near ? `${list} (nearest: ${near})` : list;
-  return fail("unknown-name", { path, value: name, allowed });
+  return fail("unknown-name", { path, value: name, allowed: near ? `${list} (nearest: ${near})` : list });
 }
 
 /** Throws `unknown-name` for the first key of `record` that is not known. */
 export function checkKeys(record: object, path: string, known: readonly string[]): void {
   for (const key of Object.keys(record)) {
-    if (!known.includes(key)) failUnknown(path ? `${path}.${key}` : key, key, known);
+    if (!known.includes(key)) failUnknown(`${path}.${key}`, key, known);
   }
 }
 

@@ -5,18 +5,15 @@ import { fail } from "./errors.ts";
 export type Range = readonly [number, number];
 
 /** "0 to 1": a range as error messages show it. */
-export const showRange = (range: Range): string => `${range[0]} to ${range[1]}`;
+export const showRange = (range: Range): string => range.join(" to ");
 
 /** Returns `value` if it is a finite number in the range; otherwise an error names the field, the range and the unit. */
 export function checkedNumber(value: unknown, path: string, unit: string, within?: Range): number {
-  if (typeof value !== "number" || !Number.isFinite(value)) {
-    const code = value === undefined ? "missing" : "not-a-number";
-    fail(code, { path, value, allowed: within ? showRange(within) : "a finite number", unit });
-  }
-  if (within && !(value >= within[0] && value <= within[1])) {
-    fail("out-of-range", { path, value, allowed: showRange(within), unit });
-  }
-  return value;
+  const finite = Number.isFinite(value);
+  const x = value as number;
+  if (finite && (!within || (x >= within[0] && x <= within[1]))) return x;
+  const code = finite ? "out-of-range" : value === undefined ? "missing" : "not-a-number";
+  return fail(code, { path, value, allowed: within ? showRange(within) : "a finite number", unit });
 }
 
 /** Returns `range` if it is two increasing finite numbers inside `inside`. */

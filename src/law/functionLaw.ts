@@ -34,7 +34,7 @@ export function functionLaw<const I extends Ports>(spec: SampledLawSpec<I>, sear
   const apply = (wires: unknown): number | Quantity => {
     const { flat, graph } = wire(spec.name, spec.inputs, wires);
     if (!graph) return value(...names.map((n) => flat[n] as number));
-    return graph.lawNode(card, flat, [], graph.callNode(compute, flat));
+    return graph.lawNode(card, flat, () => ({ demands: [], result: graph.callNode(compute, flat) }));
   };
   return Object.assign(apply, { card }) as unknown as Law<I>;
 }

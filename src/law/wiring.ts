@@ -23,7 +23,7 @@ export function wire(law: string, ports: Ports, wires: unknown): Wiring {
       if (!Array.isArray(value) || value.length === 0) {
         return fail("unreadable", { path, value, allowed: "a list of records" });
       }
-      return value.map((row, i) => connectAll(port.each, row, `${name}[${i}]`));
+      return value.map((row, i) => connectAll(port.each, row, `${name}[${i}].`));
     }
     const wired = value === undefined ? port.default : value;
     if (wired === undefined && port.optional) return wired;
@@ -34,17 +34,14 @@ export function wire(law: string, ports: Ports, wires: unknown): Wiring {
     } else flat[name] = checkedNumber(wired, path, port.unit, port.within);
     return wired;
   };
-  const connectAll = (named: Ports, given: unknown, place: string): Record<string, unknown> => {
-    const path = place ? `${law}.${place}` : law;
+  const connectAll = (named: Ports, given: unknown, prefix: string): Record<string, unknown> => {
+    const path = `${law}.${prefix}`.slice(0, -1);
     if (typeof given !== "object" || given === null || given instanceof Quantity) {
       return fail("unreadable", { path, value: given, allowed: "an object with the ports" });
     }
     checkKeys(given, path, Object.keys(named));
     return Object.fromEntries(
-      Object.entries(named).map(([k, port]) => [
-        k,
-        connect(port, (given as Wires)[k], place ? `${place}.${k}` : k),
-      ]),
+      Object.entries(named).map(([k, port]) => [k, connect(port, (given as Wires)[k], prefix + k)]),
     );
   };
   return { body: connectAll(ports, wires, ""), flat, graph };

@@ -3,6 +3,7 @@ import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
 import type { Criticals } from "./criticals.ts";
 import type { Diagram } from "./diagram.ts";
+import type { ZeroReader } from "./zeroReader.ts";
 
 /** The curve of a loop along one of its givens. */
 export interface Curve {
@@ -19,6 +20,8 @@ export interface Curve {
   signAt(temperature: number): Sign;
   /** Bounds of the parameter for temperatures between two, proved unless the curve is sampled; not finite where there are none. */
   over(low: number, high: number): Range;
+  /** Reads a function that has the zeros of N and is known with the curve; undefined where N itself must be read. */
+  reader?(): ZeroReader | undefined;
   /** Where λ passes zero between two temperatures: the folds, and what cannot be decided. */
   criticals(range: Range, effort: number): Criticals;
 }

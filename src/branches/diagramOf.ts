@@ -6,8 +6,8 @@ import type { Branch, BranchCrossing, Diagram, Fold, UndecidedStretch } from "./
 import { fixedGivens } from "./fixedGivens.ts";
 import { gapsOf } from "./gapsOf.ts";
 import { jumpsOf } from "./jumpsOf.ts";
-import type { NetReader } from "./netReader.ts";
 import { diagramNotes } from "./undecided.ts";
+import type { ZeroReader } from "./zeroReader.ts";
 
 /** A diagram that is asked for. */
 export interface Task {
@@ -32,7 +32,7 @@ export interface Parts {
 }
 
 /** The diagram of these parts. */
-export function diagramOf(loop: Loop, task: Task, net: NetReader, parts: Parts): Diagram {
+export function diagramOf(loop: Loop, task: Task, net: ZeroReader, parts: Parts): Diagram {
   const { name, place, givens, between, within } = task;
   const { method, branches, folds, crossings, undecided, cost } = parts;
   const complete = undecided.length === 0 && !loop.sampled;
@@ -47,7 +47,7 @@ export function diagramOf(loop: Loop, task: Task, net: NetReader, parts: Parts):
     branches: Object.freeze(branches),
     folds: Object.freeze(folds),
     crossings: Object.freeze(crossings),
-    jumps: Object.freeze(jumpsOf({ branches, folds, crossings }, (branch, p) => net.stateOn(branch, p)?.at)),
+    jumps: Object.freeze(jumpsOf({ branches, folds, crossings }, net.temperatureOn)),
     gaps: Object.freeze(gapsOf(branches, between, (p) => net.sign(p, middle))),
     undecided: Object.freeze(undecided.map((u) => Object.freeze(u))),
     complete,

@@ -6,7 +6,7 @@ import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import { rangeAt, signOfRange } from "../search/interval.ts";
-import { balanceOf } from "./balanceOf.ts";
+import { balanceOf } from "../states/enclosedBalance.ts";
 import type { BranchEnd } from "./diagram.ts";
 import { endOf, LINE_EFFORT, middleOf, nearestProved, REACH, type Rest, type Stretch } from "./stretch.ts";
 

@@ -6,17 +6,19 @@ import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import { above, below } from "../search/enclosed.ts";
-import { over, rangeAt } from "../search/interval.ts";
-import { balanceOf } from "./balanceOf.ts";
+import { type Sign, signOf } from "../search/enclosed.ts";
+import { balanceOf, type EnclosedBalance } from "../states/enclosedBalance.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
+import { gateLine } from "./gateLine.ts";
 import { gateValue, placeOf, sameValue } from "./gateValue.ts";
-import { lineOf } from "./line.ts";
+import { zeroReader } from "./zeroReader.ts";
 
 /** Stretches wider than this, K, are bounded in parts. */
 const WIDE = 1e-3;
 const PARTS = 256;
+/** A range of temperature is halved so often until b has a proved sign on each part. */
+const MOST_HALVINGS = 6;
 
 /** The nodes of a gate's curve. */
 export interface GateNodes {
@@ -59,53 +61,51 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
   const inputs = inputsOf(loop);
   const place = placeOf(loop, along);
   const gate = nodes.gate === inputs[place] ? sameValue : gateValue(loop, nodes.gate, place);
-  const feedback = lineOf(loop, nodes.feedback, 0);
-  const bounds = enclosureKernel(graph, {
-    inputs,
-    outputs: [nodes.curve, nodes.answer],
-    wide: new Set([inputs[0] as number]),
-    ranges: rangesOf(loop),
-  });
+  const line = gateLine(loop, nodes);
+  const answer = answerOf(loop, nodes.answer);
   const kernel = valueKernel(graph, { inputs, outputs: [nodes.curve, nodes.feedback] });
   const { kinks, leaps, set: setKinks } = balanceOf(loop);
-  const point = new Float64Array(inputs.length);
-  const high = new Float64Array(inputs.length);
-  const out = new Float64Array(6);
-  const slopes = new Float64Array(9);
-  const enclose = (low: number, top: number): void => {
-    point[0] = low;
-    high[0] = top;
-    bounds(point, high, out);
-  };
-  /** Bounds of the gate: from its enclosure, and from its value in the middle and its slope (mean value form). */
-  const valuesOver = (low: number, top: number): Range => {
-    enclose(low, top);
-    const [plain, answer] = [rangeAt(out, 0), rangeAt(out, 1)];
-    // dg/dT = −λ/b
-    feedback.box(low, top, slopes);
-    const [fall, rise] = over(rangeAt(slopes, 0), answer);
-    const reach = above(above(Math.max(-fall, rise) * above(top - low)) / 2);
-    const middle = low + (top - low) / 2;
-    enclose(middle, middle);
-    const [atLow, atHigh] = rangeAt(out, 0);
-    const mean: Range = [below(atLow - reach), above(atHigh + reach)];
-    return mean[1] - mean[0] < plain[1] - plain[0] ? mean : plain;
-  };
+  const values = new Float64Array(inputs.length);
+  const out = new Float64Array(2);
+  const set: number[] = [];
+  let sign: Sign = 0;
+  let gates: Range = [0, 0];
+  let readAt = Number.NaN;
   const read = (temperature: number): void => {
-    point[0] = temperature;
-    kernel(point, out);
+    if (temperature === readAt) return;
+    readAt = temperature;
+    values[0] = temperature;
+    kernel(values, out);
   };
+  const balance: EnclosedBalance = {
+    ...{ net: line.distance, kinks, leaps, limits: { effort: 0, cuts: [], guides: new Float64Array(0) } },
+    set() {},
+  };
+  const reader = zeroReader({
+    at(parameter) {
+      line.set(set, gate.valueAt(parameter));
+      return balance;
+    },
+    sign: () => sign,
+  });
   return {
     method: "line",
     reachesBeyond: true,
-    signAt: (temperature) => signAt(feedback, temperature),
-    criticals: (range, effort) => criticalsOf({ feedback, kinks, leaps }, range, effort),
-    set(givens, between) {
-      point.set(givens, 1);
-      feedback.values.set(givens, 1);
+    signAt: (temperature) => (signAt(line.slope, temperature) * answer.signAt(temperature)) as Sign,
+    criticals: (range, effort) => criticalsOf({ feedback: line.slope, kinks, leaps }, range, effort),
+    set(givens, between, within) {
+      set.splice(0, set.length, ...givens);
+      values.set(givens, 1);
+      readAt = Number.NaN;
       setKinks(givens, givens);
-      return gate.set(givens, between);
+      if (!gate.set(givens, between)) return false;
+      const [first, last] = between.map(gate.valueAt) as [Range, Range];
+      gates = [Math.min(first[0], last[0]), Math.max(first[1], last[1])];
+      line.set(givens, first);
+      sign = answer.set(givens, within);
+      return true;
     },
+    reader: () => (sign === 0 ? undefined : reader),
     at(temperature) {
       read(temperature);
       return gate.inverse(out[0] as number);
@@ -116,13 +116,44 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
     },
     over(low, top) {
       const parts = top - low > WIDE ? PARTS : 1;
+      read(low + (top - low) / 2);
+      const near = Math.max(gates[0], Math.min(gates[1], out[0] as number));
+      if (Number.isFinite(near)) line.set(set, [near, near]);
       let [least, greatest] = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY];
       for (let i = 0; i < parts; i++) {
         const [a, b] = [i, i + 1].map((j) => (j === parts ? top : low + ((top - low) * j) / parts));
-        const [lo, hi] = valuesOver(a as number, b as number);
+        const [lo, hi] = line.curveOver(a as number, b as number);
         [least, greatest] = [Math.min(least, lo), Math.max(greatest, hi)];
       }
       return gate.inverseOver(least, greatest);
+    },
+  };
+}
+
+/** The sign of b, the answer of N to the gate. */
+function answerOf(loop: Loop, node: number) {
+  const inputs = inputsOf(loop);
+  const wide = new Set([inputs[0] as number]);
+  const kernel = enclosureKernel(loop.graph, { inputs, outputs: [node], wide, ranges: rangesOf(loop) });
+  const [low, high] = [new Float64Array(inputs.length), new Float64Array(inputs.length)];
+  const out = new Float64Array(3);
+  const signOver = (from: number, to: number, halvings: number): Sign => {
+    low[0] = from;
+    high[0] = to;
+    kernel(low, high, out);
+    const sign = signOf(out[0] as number, out[1] as number, out[2] as number);
+    if (sign !== 0 || halvings === 0) return sign;
+    const middle = from + (to - from) / 2;
+    const below = signOver(from, middle, halvings - 1);
+    return below !== 0 && below === signOver(middle, to, halvings - 1) ? below : 0;
+  };
+  return {
+    signAt: (temperature: number) => signOver(temperature, temperature, 0),
+    /** Sets the givens; the sign over all temperatures of a range, 0 where it is not proved to be one. */
+    set(givens: readonly number[], [from, to]: Range): Sign {
+      low.set(givens, 1);
+      high.set(givens, 1);
+      return signOver(from, to, MOST_HALVINGS);
     },
   };
 }

@@ -5,6 +5,7 @@ import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
+import { rangeAt } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { type Line, lineOf } from "./line.ts";
 
@@ -12,6 +13,8 @@ import { type Line, lineOf } from "./line.ts";
 export interface GateValue {
   /** Sets the other givens; false if the gate is not proved to rise or fall throughout the range. */
   set(givens: readonly number[], between: Range): boolean;
+  /** Proved bounds of the gate at a parameter. */
+  valueAt(parameter: number): Range;
   /** The parameter for a value of the gate, not proved. */
   inverse(value: number): number;
   /** Proved bounds of the parameters for values in [low, high], inside the range that was set. */
@@ -24,7 +27,12 @@ const MOST_STEPS = 80;
 const MOST_WIDENINGS = 60;
 
 /** The gate that is the parameter itself. */
-export const sameValue: GateValue = { set: () => true, inverse: (x) => x, inverseOver: (a, b) => [a, b] };
+export const sameValue: GateValue = {
+  set: () => true,
+  valueAt: (p) => [p, p],
+  inverse: (x) => x,
+  inverseOver: (a, b) => [a, b],
+};
 
 /** A gate that is a function of the parameter; `along` is the place of the parameter among the loop's inputs. */
 export function gateValue(loop: Loop, node: number, along: number): GateValue {
@@ -75,6 +83,10 @@ export function gateValue(loop: Loop, node: number, along: number): GateValue {
       const sign = slopeSign(line, between, out, MOST_HALVINGS);
       rising = sign > 0;
       return sign !== 0;
+    },
+    valueAt(p) {
+      line.point(p, out);
+      return rangeAt(out, 0);
     },
     inverse,
     inverseOver(low, high) {

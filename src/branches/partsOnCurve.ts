@@ -5,12 +5,12 @@ import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd, Fold, UndecidedStretch } from "./diagram.ts";
 import type { Parts, Task } from "./diagramOf.ts";
 import { foldAt } from "./foldAt.ts";
-import type { NetReader } from "./netReader.ts";
 import { type Crossing, mergedCrossings, runsOf } from "./runs.ts";
 import { criticalDoubt, crossingDoubt } from "./undecided.ts";
+import type { ZeroReader } from "./zeroReader.ts";
 
 /** The branches, folds and doubts along a curve that has its givens set. */
-export function partsOnCurve(curve: Curve, task: Task, net: NetReader): Parts {
+export function partsOnCurve(curve: Curve, task: Task, net: ZeroReader): Parts {
   const { between, within, effort } = task;
   const cost = { boxes: 0, points: 0 };
   const spend = ({ boxes, points }: { boxes: number; points: number }) => {

@@ -89,8 +89,9 @@ export function mergedCrossings(crossings: readonly Crossing[]): Crossing[] {
       merged.push(next);
       continue;
     }
-    const doubt =
-      last.end !== next.end || last.doubt === "level" ? "level" : (next.doubt ?? last.doubt ?? "fold");
+    const stopped = last.doubt === "effort" || next.doubt === "effort";
+    const level = last.end !== next.end || last.doubt === "level";
+    const doubt = stopped ? "effort" : level ? "level" : (next.doubt ?? last.doubt ?? "fold");
     const bracket: Range = [last.bracket[0], Math.max(last.bracket[1], next.bracket[1])];
     merged[merged.length - 1] = { end: last.end, at: last.at, bracket, doubt };
   }

@@ -15,6 +15,7 @@ import { type NetReader, netReader } from "./netReader.ts";
 import { partsInColumns } from "./partsInColumns.ts";
 import { partsOnCurve } from "./partsOnCurve.ts";
 import { sampledCurve } from "./sampledCurve.ts";
+import type { ZeroReader } from "./zeroReader.ts";
 
 /** Along which parameter, where to look, and how hard. */
 export interface TraceBranchesOptions<N extends string = string> {
@@ -69,13 +70,21 @@ export function traceBranches<N extends string>(
     tolerance: checkedNumber(options.tolerance ?? 0.002, "tolerance", "1", [1e-6, 1]),
   };
   const net = netReader(loop, task.place, task.givens);
-  return diagramOf(loop, task, net, partsOf(loop, task, net)) as Diagram<Givens<N>>;
+  const curve = curveOf(loop, task);
+  const reader = curve?.reader?.() ?? net;
+  return diagramOf(loop, task, reader, partsOf(loop, task, { curve, reader, net })) as Diagram<Givens<N>>;
+}
+
+/** What there is to read a loop along its parameter. */
+interface Readers {
+  readonly curve: Curve | undefined;
+  readonly reader: ZeroReader;
+  readonly net: NetReader;
 }
 
 /** The parts of a diagram, on a curve if there is one. */
-function partsOf(loop: Loop, task: Task, net: NetReader): Parts {
-  const curve = curveOf(loop, task);
-  const onCurve = curve && partsOnCurve(curve, task, net);
+function partsOf(loop: Loop, task: Task, { curve, reader, net }: Readers): Parts {
+  const onCurve = curve && partsOnCurve(curve, task, reader);
   const has = (kind: UndecidedStretch["kind"]) => onCurve?.undecided.some((u) => u.kind === kind);
   if (onCurve && !has("level") && !has("other")) return onCurve;
   const inColumns = partsInColumns(loop, task, net);

@@ -6,6 +6,8 @@ import type { Search } from "./search.ts";
 
 /** In boxes wider than this many times `fine`, the curvature decides too little to be read. */
 const BENT = 4;
+/** The same where reading it is dear. */
+const BENT_IF_DEAR = 1 / 64;
 
 /**
  * Tries, over the box between two places that the reader's piece was read over: the sign of the value; monotony with proved
@@ -21,8 +23,9 @@ export function decideBox(search: Search, left: Place, right: Place): boolean {
     return true;
   }
   if (s === right.sign && isClear(piece, left, right)) return true;
-  if (right.x - left.x > BENT * search.fine) return false;
-  const { bend } = search.reader.bend();
+  const { reader } = search;
+  if (right.x - left.x > (reader.bendIsDear ? BENT_IF_DEAR : BENT) * search.fine) return false;
+  const { bend } = reader.bend();
   // strictly convex or concave: one zero where the signs differ, and none where a hill lies between equal ones
   if (s !== right.sign && bend !== 0) search.addZero(left, right);
   else if (bend === s) judgeValley(search, left, right);

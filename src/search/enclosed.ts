@@ -21,11 +21,15 @@ export interface Enclosed {
 export interface Ends {
   /** How many numbers an end takes: x, which the caller writes; value and slope at x; and what boxes need of their ends. */
   readonly size: number;
+  /** Where in an end the value stands, 3 numbers, and the slope behind it. */
+  readonly at: number;
   point(end: Float64Array): void;
   /** Writes value and slope over the box between two ends that were read: 6 numbers. */
   box(left: Float64Array, right: Float64Array, out: Float64Array): void;
   /** Writes the curvature, 3 numbers; only for the box that was read last. */
   bend(left: Float64Array, right: Float64Array, out: Float64Array): void;
+  /** True where reading the curvature costs more than reading more points: it is then read only where nothing else decides. */
+  readonly bendIsDear?: boolean;
 }
 
 /** The ends of a function that is read box by box. */
@@ -33,7 +37,7 @@ export function endsOf(f: Enclosed): Ends {
   if (f.ends) return f.ends;
   const [point, box] = [new Float64Array(6), new Float64Array(9)];
   return {
-    size: 7,
+    ...{ size: 7, at: 1 },
     point(end) {
       f.point(end[0] as number, point);
       end.set(point, 1);

@@ -75,6 +75,10 @@ export class Reader {
     this.#ends = endsOf(f);
   }
 
+  get bendIsDear(): boolean {
+    return this.#ends.bendIsDear === true;
+  }
+
   /** A place to be filled by `read`; to be given back. */
   take(): Place {
     return this.#free.pop() ?? new Place(this.#ends.size);
@@ -95,8 +99,8 @@ export class Reader {
     const { end, bounds } = place;
     this.points++;
     this.#ends.point(end);
-    place.sign = widen(end, 1, bounds, 0);
-    place.slopeSign = widen(end, 4, bounds, 2);
+    place.sign = widen(end, this.#ends.at, bounds, 0);
+    place.slopeSign = widen(end, this.#ends.at + 3, bounds, 2);
     return place;
   }
 

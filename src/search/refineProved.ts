@@ -23,7 +23,7 @@ export function refineProved(bracket: Bracket, left: Place, right: Place, zero: 
   zero.direction = left.sign === 1 ? -1 : 1;
   zero.size = Math.max(place.high, -place.low);
   zero.slope = place.slopeLow + (place.slopeHigh - place.slopeLow) / 2;
-  if (!closeByMeanValue(reader.bend(), place, zero)) closeByReading(bracket, zero);
+  if (reader.bendIsDear || !closeByMeanValue(reader.bend(), place, zero)) closeByReading(bracket, zero);
   if (bracket.low.x > zero.low) zero.low = bracket.low.x;
   if (bracket.high.x < zero.high) zero.high = bracket.high.x;
 }

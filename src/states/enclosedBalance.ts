@@ -6,7 +6,8 @@ import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { type SpanKernel, spanKernel } from "../reading/spanKernel.ts";
 import type { Enclosed } from "../search/enclosed.ts";
-import { shouldersOf } from "./shoulders.ts";
+import { enclosedBy } from "./enclosedBy.ts";
+import { type Shoulders, shouldersOf } from "./shoulders.ts";
 
 /** A balance that can be enclosed over boxes of temperature, for givens that can be set. */
 export interface EnclosedBalance {
@@ -33,6 +34,8 @@ export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set(
   const ranges = rangesOf(loop);
   const slope = (node: number) => derivative(graph, node, inputs[0] as number, inputs);
   const kernels: SpanKernel[] = [];
+  const low = new Float64Array(inputs.length);
+  const high = new Float64Array(inputs.length);
   const enclosed = (node: number): Enclosed => {
     const first = slope(node);
     const outputs = [node, first];
@@ -48,45 +51,35 @@ export function enclosedBalance(loop: Loop, wide: ReadonlySet<number> = new Set(
     .flatMap((id) => graph.args[id] as readonly number[]);
   const differences = new Set(pairs.map((id) => graph.node("sub", graph.args[id] as readonly number[])));
   const leaps = [...new Set(steps)].map(enclosed);
-  const shoulders = shouldersOf(loop);
-  const low = new Float64Array(inputs.length);
-  const high = new Float64Array(inputs.length);
+  const kinks = [...[...differences].map(enclosed), ...leaps];
+  // a diagram may need the kinks alone
+  let whole: { net: Enclosed; shoulders: Shoulders; limits: EnclosedBalance["limits"] } | undefined;
+  const wholeOf = () => {
+    if (!whole) {
+      const shoulders = shouldersOf(loop);
+      whole = { net: enclosed(net), shoulders, limits: { effort: 0, cuts: [], guides: shoulders.places } };
+      prepare();
+    }
+    return whole;
+  };
+  const prepare = (): void => {
+    for (let i = 0; i < kernels.length; i++) kernels[i]?.prepare(low, high);
+    whole?.shoulders.set(low);
+  };
   return {
-    net: enclosed(net),
-    kinks: [...[...differences].map(enclosed), ...leaps],
-    leaps,
-    limits: { effort: 0, cuts: [], guides: shoulders.places },
+    ...{ kinks, leaps },
+    get net() {
+      return wholeOf().net;
+    },
+    get limits() {
+      return wholeOf().limits;
+    },
     set(lows, highs) {
       for (let i = 1; i < low.length; i++) {
         low[i] = lows[i - 1] as number;
         high[i] = highs[i - 1] as number;
       }
-      for (let i = 0; i < kernels.length; i++) kernels[i]?.prepare(low, high);
-      shoulders.set(lows);
-    },
-  };
-}
-
-/** What a kernel reads, by its ends or at once. */
-function enclosedBy({ size, point, over }: SpanKernel): Enclosed {
-  const [box, bend] = over as [SpanKernel["over"][0], SpanKernel["over"][0]];
-  const [left, right] = [new Float64Array(size), new Float64Array(size)];
-  const curvature = new Float64Array(3);
-  return {
-    ends: { size, point, box, bend },
-    point(x, out) {
-      left[0] = x;
-      point(left);
-      out.set(left.subarray(1, 7));
-    },
-    box(a, b, out) {
-      left[0] = a;
-      right[0] = b;
-      point(left);
-      point(right);
-      box(left, right, out);
-      bend(left, right, curvature);
-      out.set(curvature, 6);
+      prepare();
     },
   };
 }

@@ -11,7 +11,8 @@ const SHOULDER = 2;
 /** Temperatures, some of them perhaps NaN or outside of any range; they are right for the givens last set. */
 export interface Shoulders {
   readonly places: Float64Array;
-  set(givens: ArrayLike<number>): void;
+  /** Takes the inputs of the loop, temperature at 0 K. */
+  set(inputs: Float64Array): void;
 }
 
 /** The shoulders of each tanh behind the balance whose argument is a straight line in temperature. Guides; nothing is proved. */
@@ -26,15 +27,13 @@ export function shouldersOf(loop: Loop): Shoulders {
     .filter(([, slope]) => !coneOf(graph, [slope], inputs).includes(temperature));
   const places = new Float64Array(2 * lines.length);
   const read = lines.length > 0 && valueKernel(graph, { inputs, outputs: lines.flat() });
-  const at = new Float64Array(inputs.length);
   const out = new Float64Array(2 * lines.length);
   return {
     places,
-    set(givens) {
+    set(inputs) {
       if (!read) return;
-      for (let i = 1; i < at.length; i++) at[i] = givens[i - 1] as number;
       // each line from its value at 0 K
-      read(at, out);
+      read(inputs, out);
       for (let i = 0; i < out.length; i += 2) {
         places[i] = (-SHOULDER - (out[i] as number)) / (out[i + 1] as number);
         places[i + 1] = (SHOULDER - (out[i] as number)) / (out[i + 1] as number);

@@ -8,18 +8,16 @@ type Functions = readonly Compute["value"][];
 type Bind = (data: Float64Array, functions: Functions) => ScalarKernel;
 type Emit = (a: string, b: string, c: string, d: string) => string;
 
-/** One line of code for each step; a missing one does not compile. */
-const EMIT: Readonly<Record<Step, Emit>> = {
+/** Steps whose code is a call of the function of that name. */
+type Called = "abs" | "sqrt" | "exp" | "log" | "tanh";
+
+/** The code of each other step; a missing one does not compile. */
+const EMIT: Readonly<Record<Exclude<Step, Called>, Emit>> = {
   add: (a, b) => `${a}+${b}`,
   sub: (a, b) => `${a}-${b}`,
   mul: (a, b) => `${a}*${b}`,
   div: (a, b) => `${a}/${b}`,
   neg: (a) => `-${a}`,
-  abs: (a) => `abs(${a})`,
-  sqrt: (a) => `sqrt(${a})`,
-  exp: (a) => `exp(${a})`,
-  log: (a) => `log(${a})`,
-  tanh: (a) => `tanh(${a})`,
   min: (a, b) => `${a}<${b}?${a}:${b}<=${a}?${b}:NaN`,
   max: (a, b) => `${a}>${b}?${a}:${b}>=${a}?${b}:NaN`,
   pick: (a, b, c, d) => `${a}<${b}?${c}:${d}`,
@@ -63,5 +61,6 @@ function textOf(
   const read = args[id] as readonly number[];
   if (op === "call") return `f[${value}](${read.map((a) => texts[a]).join()})`;
   const nameOf = (i: number): string => texts[read[i] as number] as string;
-  return EMIT[op](nameOf(0), nameOf(1), nameOf(2), nameOf(3));
+  const emit: Emit = EMIT[op as keyof typeof EMIT] ?? ((a) => `${op}(${a})`);
+  return emit(nameOf(0), nameOf(1), nameOf(2), nameOf(3));
 }

@@ -3,7 +3,18 @@ import { exp } from "../ground/elementary/exp.ts";
 import { log } from "../ground/elementary/log.ts";
 import { max, min } from "../ground/elementary/minMax.ts";
 import { tanh } from "../ground/elementary/tanh.ts";
-import type { Operation, RunOf, ScalarKernel, Step } from "./scalarProgram.ts";
+import type { Operation, RunOf, ScalarKernel, Source } from "./scalarProgram.ts";
+
+/** The register to fill, what fills it, and the registers that are read. */
+interface Line {
+  readonly to: number;
+  readonly op: Operation | Source;
+  readonly place: number;
+  readonly a: number;
+  readonly b: number;
+  readonly c: number;
+  readonly d: number;
+}
 
 /** A program as an interpreter; it reads `data` anew at each run. */
 export function interpretScalar({ program, outputs, data, known }: RunOf): ScalarKernel {
@@ -11,68 +22,61 @@ export function interpretScalar({ program, outputs, data, known }: RunOf): Scala
   const numbers = data ?? Float64Array.from(program.data);
   const uses = program.uses(outputs, known);
   const r = new Float64Array(ops.length);
-  const steps: Operation[] = [];
-  /** For each step the register to fill and up to four to read. */
-  const places: number[] = [];
-  const inputs: { from: "low" | "high" | "data"; place: number; to: number }[] = [];
-  ops.forEach((own, id) => {
-    if (!uses[id]) return;
-    const { from: op, place: value } = known?.get(id) ?? { from: own, place: values[id] as number };
-    if (op === "literal") r[id] = value;
-    else if (op === "low" || op === "high" || op === "data") inputs.push({ from: op, place: value, to: id });
-    else {
-      const [a, b = 0, c = 0, d = 0] = args[id] as [number, number?, number?, number?];
-      steps.push(op);
-      places.push(id, a, b, c, d);
-    }
-  });
-  const at = Uint32Array.from(places);
+  const lines = ops
+    .map((own, to): Line => {
+      const { from: op, place } = known?.get(to) ?? { from: own, place: values[to] as number };
+      const [a = 0, b = 0, c = 0, d = 0] = args[to] as readonly number[];
+      return { to, op, place, a, b, c, d };
+    })
+    .filter(({ to }) => uses[to]);
   return (low, high, out) => {
-    const read = { low, high, data: numbers };
-    for (const { from, place, to } of inputs) r[to] = read[from][place] as number;
-    for (let i = 0; i < steps.length; i++) {
-      const p = 5 * i;
-      const a = r[at[p + 1] as number] as number;
-      const b = r[at[p + 2] as number] as number;
-      const to = at[p] as number;
-      const step = steps[i] as Operation;
-      if (step === "pick") r[to] = r[at[p + (a < b ? 3 : 4)] as number] as number;
-      else if (step === "call") {
-        const run = functions[values[to] as number] as (...inputs: number[]) => number;
-        r[to] = run(...(args[to] as readonly number[]).map((from) => r[from] as number));
-      } else r[to] = resultOf(step, a, b);
-    }
+    const resultOf = ({ to, op, place, a, b, c, d }: Line): number => {
+      const x = r[a] as number;
+      const y = r[b] as number;
+      switch (op) {
+        case "mul":
+          return x * y;
+        case "add":
+          return x + y;
+        case "sub":
+          return x - y;
+        case "pick":
+          return r[x < y ? c : d] as number;
+        case "div":
+          return x / y;
+        case "neg":
+          return -x;
+        case "abs":
+          return Math.abs(x);
+        case "sqrt":
+          return Math.sqrt(x);
+        case "exp":
+          return exp(x);
+        case "log":
+          return log(x);
+        case "tanh":
+          return tanh(x);
+        case "min":
+          return min(x, y);
+        case "max":
+          return max(x, y);
+        case "low":
+          return low[place] as number;
+        case "high":
+          return high[place] as number;
+        case "data":
+          return numbers[place] as number;
+        case "literal":
+          return place;
+        case "call":
+          return (functions[place] as (...inputs: number[]) => number)(
+            ...(args[to] as readonly number[]).map((from) => r[from] as number),
+          );
+      }
+    };
+    for (const line of lines) r[line.to] = resultOf(line);
     outputs.forEach((id, i) => {
       out[i] = r[id] as number;
     });
   };
-}
-
-function resultOf(step: Exclude<Step, "pick">, a: number, b: number): number {
-  switch (step) {
-    case "mul":
-      return a * b;
-    case "add":
-      return a + b;
-    case "sub":
-      return a - b;
-    case "div":
-      return a / b;
-    case "neg":
-      return -a;
-    case "abs":
-      return Math.abs(a);
-    case "sqrt":
-      return Math.sqrt(a);
-    case "exp":
-      return exp(a);
-    case "log":
-      return log(a);
-    case "tanh":
-      return tanh(a);
-    case "min":
-      return min(a, b);
-    case "max":
-      return max(a, b);
-  }
 }

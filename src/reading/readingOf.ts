@@ -14,7 +14,6 @@ export interface ReadingOf {
 
 /** A reading that needs an input which it was not given. */
 export const missingInput = (g: Graph, id: number): never => {
-  const meaning = g.meanings[id];
-  const name = meaning && meaning.kind !== "law" ? meaning.name : "input";
+  const { name } = g.meanings[id] as { name: string };
   return fail("missing", { path: name, value: undefined, allowed: "as an input of the reading" });
 };

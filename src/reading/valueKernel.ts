@@ -4,7 +4,7 @@ import type { Graph } from "../graph/node.ts";
 import type { Compute, Op } from "../graph/op.ts";
 import { type Kernel, missingInput, type ReadingOf } from "./readingOf.ts";
 import { runScalar } from "./runScalar.ts";
-import { ScalarProgram, type Step } from "./scalarProgram.ts";
+import { ScalarProgram } from "./scalarProgram.ts";
 
 /** As generated straight-line code, or by the interpreter where code must not be generated: the same bits. */
 export function valueKernel(g: Graph, reading: ReadingOf): Kernel {
@@ -41,7 +41,8 @@ function registerOf(
   if (op === "call") return program.call((g.functions[value] as Compute).value, args);
   if (op === "mean") return args[0] as number;
   if (op === "step") return unitStep(program, args[0] as number);
-  return program.again(STEP[op], args);
+  // a jump reads like a pick
+  return program.again(op === "jump" ? "pick" : op, args);
 }
 
 /** 0 below zero, else 1; NaN for NaN, which alone has no size below 1 when that is negative. */
@@ -52,20 +53,3 @@ function unitStep(program: ScalarProgram, a: number): number {
   const known = program.choose(program.step("neg", size), one, one, program.literal(NaN));
   return program.choose(a, zero, zero, known);
 }
-
-/** The step of each operation; a missing one does not compile. A jump reads like a pick. */
-const STEP: Readonly<Record<Exclude<Op, "const" | "input" | "mean" | "call" | "step">, Step>> = {
-  add: "add",
-  sub: "sub",
-  mul: "mul",
-  div: "div",
-  neg: "neg",
-  sqrt: "sqrt",
-  exp: "exp",
-  log: "log",
-  tanh: "tanh",
-  min: "min",
-  max: "max",
-  pick: "pick",
-  jump: "pick",
-};

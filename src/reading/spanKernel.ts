@@ -51,7 +51,7 @@ export function spanKernel(g: Graph, { inputs, atEnds, over, wide, ranges }: Spa
   const wanted = steps(over.flat(), span);
   const groups = over.map((outputs) => wanted.splice(0, 3 * outputs.length));
   const { ahead, point, spans } = spanParts(w, { left: span.lo, right: span.hi, end, groups });
-  const data = Float64Array.from([...w.data, ...ahead.map(() => Number.NaN)]);
+  const data = Float64Array.from([...w.data, ...ahead.map(() => NaN)]);
   const results = data.subarray(w.data.length);
   const readAhead = runScalar({ program: w, outputs: ahead });
   const readPoint = runScalar({ program: w, data, ...point });

@@ -41,7 +41,7 @@ function interpolate({ low: a, high: b, trial }: Bracket): void {
   const u = to * share;
   const tilt = t * u * (u / first - t / last);
   trial.x = !(first >= FLATTEST && last >= FLATTEST)
-    ? Number.NaN
+    ? NaN
     : t < u
       ? a.x + width * (t * t * (3 - 2 * t) + tilt)
       : b.x - width * (u * u * (3 - 2 * u) - tilt);

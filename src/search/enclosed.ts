@@ -57,7 +57,7 @@ export type Sign = 1 | -1 | 0;
 
 /** Whether both bounds are finite and in order; false for NaN. */
 export const bounded = (low: number, high: number): boolean =>
-  low > Number.NEGATIVE_INFINITY && low <= high && high < Number.POSITIVE_INFINITY;
+  low > -Infinity && low <= high && high < Infinity;
 
 /** The sign of everything in [lo − err, hi + err]. */
 export function signOf(lo: number, hi: number, err: number): Sign {

@@ -58,7 +58,7 @@ export function searchZeros(
 ): Search {
   const from = range[0];
   const to = range[1];
-  if (!(from < to && to - from < Number.POSITIVE_INFINITY))
+  if (!(from < to && to - from < Infinity))
     fail("out-of-range", { path: "range", value: range, allowed: "two rising finite numbers" });
   const search = Search.of(f);
   const { reader, ahead } = search;

@@ -16,7 +16,7 @@ export const times = (a: Range, b: Range): Range => hull(a[0] * b[0], a[0] * b[1
 
 /** NaN where the divisor may be zero. */
 export const over = (a: Range, b: Range): Range =>
-  b[0] > 0 || b[1] < 0 ? hull(a[0] / b[0], a[0] / b[1], a[1] / b[0], a[1] / b[1]) : [Number.NaN, Number.NaN];
+  b[0] > 0 || b[1] < 0 ? hull(a[0] / b[0], a[0] / b[1], a[1] / b[0], a[1] / b[1]) : [NaN, NaN];
 
 /** What both have in common; in the wrong order where that is nothing. */
 export const meet = (a: Range, b: Range): Range => [Math.max(a[0], b[0]), Math.min(a[1], b[1])];

@@ -34,6 +34,6 @@ function joined(a: Stretch, b: Stretch): Stretch {
     enclosure: [Math.min(a.enclosure[0], b.enclosure[0]), Math.max(a.enclosure[1], b.enclosure[1])],
     signs: [a.signs[0], b.signs[1]],
     continuous: a.continuous && b.continuous,
-    most: Number.POSITIVE_INFINITY,
+    most: Infinity,
   };
 }

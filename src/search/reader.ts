@@ -5,7 +5,7 @@ import { above, below, bounded, type Enclosed, type Ends, endsOf, type Sign } fr
 
 /** Bounds of a value and a slope, rounded outwards. */
 class Bounds {
-  readonly bounds = new Float64Array(4).fill(Number.NaN);
+  readonly bounds = new Float64Array(4).fill(NaN);
   sign: Sign = 0;
   slopeSign: Sign = 0;
 

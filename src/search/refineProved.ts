@@ -46,7 +46,7 @@ function closeByMeanValue({ smooth, bends }: Piece, place: Place, zero: Zero): b
     // how far the function may still be on the wrong side of zero
     const rest = side * zero.direction > 0 ? -place.low : place.high;
     const gap = rest / (least * SURELY);
-    let end = rest < 0 ? place.x : Number.NaN;
+    let end = rest < 0 ? place.x : NaN;
     for (let i = 1, far = gap + roundoffAt(place.x); Number.isNaN(end) && i < 5; i++, far *= 1.25) {
       const x = place.x + side * far;
       const apart = Math.abs(x - place.x);

@@ -51,7 +51,7 @@ export function scanZeros(f: Sampled, [from, to]: readonly [number, number], eff
     evaluations++;
     f.at(x, out);
     const [value, slope, noise] = out as unknown as [number, number, number];
-    const sign = Number.isFinite(value) ? (Math.abs(value) <= noise ? 0 : Math.sign(value)) : Number.NaN;
+    const sign = Number.isFinite(value) ? (Math.abs(value) <= noise ? 0 : Math.sign(value)) : NaN;
     return { x, value, slope, sign };
   };
   const cells = Math.max(1, Math.min(FIRST_CELLS, Math.floor(effort / 4)));

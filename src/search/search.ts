@@ -16,10 +16,10 @@ export class Search {
   readonly doubts: Stretch[] = [];
   /** Places still to pass, from right to left. */
   readonly ahead: Place[] = [];
-  from = Number.NaN;
-  to = Number.NaN;
+  from = NaN;
+  to = NaN;
   /** A length over which the function changes little; sets how far boxes are halved. */
-  fine = Number.NaN;
+  fine = NaN;
   /** How many zeros there are; later ones in `zeros` are left over. */
   found = 0;
   readonly zeros: Zero[] = [];

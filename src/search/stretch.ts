@@ -25,13 +25,13 @@ export function stretchOf(kind: DoubtKind, left: Place, right: Place, piece: Pie
     enclosure: enclosureOf(left, right, piece),
     signs: [left.sign, right.sign],
     continuous: piece.continuous,
-    most: piece.slopeSign !== 0 ? 1 : piece.bend !== 0 ? 2 : Number.POSITIVE_INFINITY,
+    most: piece.slopeSign !== 0 ? 1 : piece.bend !== 0 ? 2 : Infinity,
   };
 }
 
 /** Bounds of the function between two places: of the box, tightened by what is known at the ends. */
 function enclosureOf(left: Place, right: Place, piece: Piece): [number, number] {
-  if (!piece.defined) return [Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY];
+  if (!piece.defined) return [-Infinity, Infinity];
   const slopes = { fall: piece.slopeLow, rise: piece.slopeHigh };
   const width = right.x - left.x;
   const least = leastBetween({ left: left.low, right: right.low }, slopes, width);

@@ -55,7 +55,7 @@ export function findTurning(f: Moving, reader: Reader, { at, step, range }: Ahea
   };
   const value = (stage: number): number => {
     const x = extremum(stage);
-    return x === undefined ? Number.NaN : read(stage, x).value;
+    return x === undefined ? NaN : read(stage, x).value;
   };
   let far = at.stage + step;
   for (let gap = step; !(value(far) * at.slope * side < 0); gap *= 2) {

@@ -4,13 +4,13 @@ import type { ProvedZero } from "./enumeration.ts";
 
 /** A zero that is being closed in, or was; reused by later searches. */
 export class Zero {
-  at = Number.NaN;
-  low = Number.NaN;
-  high = Number.NaN;
-  size = Number.NaN;
-  slope = Number.NaN;
-  slopeLow = Number.NaN;
-  slopeHigh = Number.NaN;
+  at = NaN;
+  low = NaN;
+  high = NaN;
+  size = NaN;
+  slope = NaN;
+  slopeLow = NaN;
+  slopeHigh = NaN;
   direction: 1 | -1 = 1;
 
   /** The proved sign of the slope over the bracket. */

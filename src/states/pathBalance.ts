@@ -131,7 +131,7 @@ function pathBalance(loop: Loop, holdable: readonly number[], changed: readonly 
         rest.box(out);
         write(into, path.held);
         // the curvature is not read
-        into.fill(Number.NaN, 6, 9);
+        into.fill(NaN, 6, 9);
       },
       point(x, into) {
         setTemperature(x, x, path);
@@ -158,7 +158,7 @@ function sampledReadings(
   const at = new Float64Array(low.length);
   const values = new Float64Array(size);
   const read = (shares: readonly number[]) => (out: Float64Array) => {
-    for (let k = 0; k < size; k++) out.set([Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY, 0], 3 * k);
+    for (let k = 0; k < size; k++) out.set([Infinity, -Infinity, 0], 3 * k);
     for (const share of shares) {
       for (let i = 0; i < at.length; i++)
         at[i] = (low[i] as number) + share * ((high[i] as number) - (low[i] as number));

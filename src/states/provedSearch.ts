@@ -18,7 +18,6 @@ const KINK_LIMITS = { effort: 60 };
 /** Prepares the proved search of a loop. */
 function provedSearch(loop: Loop): StateSearch {
   const balance = balanceOf(loop);
-  const distancesOf = foldDistances(loop);
   return (givens, within, effort) => {
     balance.set(givens, givens);
     const { zeros, undecided, boxes, points } = enumerateBalance(balance, within, effort);
@@ -29,7 +28,8 @@ function provedSearch(loop: Loop): StateSearch {
         kind,
         counts,
         enclosure: enclosure.every(Number.isFinite) ? enclosure : null,
-        distances: kind === "fold" || kind === "corner" ? distancesOf(givens, { interval, enclosure }) : null,
+        distances:
+          kind === "fold" || kind === "corner" ? foldDistances(loop, givens, { interval, enclosure }) : null,
       })),
       cost: { boxes, points },
     };

@@ -7,8 +7,9 @@ import * as core from "../../src/index.ts";
 import { formulaLoop } from "./loops.ts";
 
 const { mul, sub } = core;
-const quarticLoop = (b: number) => formulaLoop((t, p) => mul(b, sub(p, sub(mul(t, mul(t, t)), mul(3, t)))));
-const curve = (t: number) => t ** 3 - 3 * t;
+const quarticLoop = (b: number) => formulaLoop((t, p) => mul(b, sub(p, mul(mul(t, t), sub(mul(t, t), 6)))));
+const curve = (t: number) => t * t * (t * t - 6);
+const slope = (t: number) => 12 * t - 4 * t * t * t;
 
 /** The least and the greatest number that three numbers of an enclosure admit. */
 const rangeOf = (out: Float64Array, i: number) => [

@@ -45,16 +45,21 @@ export class ScalarProgram {
   readonly values: number[] = [];
   readonly data: number[] = [];
   readonly functions: Compute["value"][] = [];
+  readonly #literals = new Map<number, number>();
   readonly #known = new Map<string | number, number>();
 
   /** A number that is the same in all programs of one text. */
   literal(value: number): number {
-    return this.#register(`${value}`, "literal", NONE, value);
+    let id = this.#literals.get(value);
+    if (id === undefined) {
+      id = this.#add("literal", NONE, value);
+      this.#literals.set(value, id);
+    }
+    return id;
   }
   /** A number that may differ between programs of one text; each has a place of its own, as the text must not depend on it. */
   datum(value: number): number {
-    const place = this.data.push(value) - 1;
-    return this.#register(`d${place}`, "data", NONE, place);
+    return this.#add("data", NONE, this.data.push(value) - 1);
   }
   input(from: "low" | "high", place: number): number {
     return this.#register(from + place, from, NONE, place);
@@ -79,8 +84,7 @@ export class ScalarProgram {
 
   /** The register of an ordinary function's result. */
   call(value: Compute["value"], args: readonly number[]): number {
-    const place = this.functions.push(value) - 1;
-    return this.#register(`f${place}`, "call", args, place);
+    return this.#add("call", args, this.functions.push(value) - 1);
   }
 
   /**
@@ -106,12 +110,16 @@ export class ScalarProgram {
   #register(key: string | number, op: Operation | Source, args: readonly number[], value: number): number {
     let id = this.#known.get(key);
     if (id === undefined) {
-      id = this.ops.push(op) - 1;
+      id = this.#add(op, args, value);
       this.#known.set(key, id);
-      this.args.push(args);
-      this.values.push(value);
     }
     return id;
+  }
+
+  #add(op: Operation | Source, args: readonly number[], value: number): number {
+    this.args.push(args);
+    this.values.push(value);
+    return this.ops.push(op) - 1;
   }
 }
 

@@ -119,11 +119,11 @@ function frontier(
   wanted: readonly number[],
   isKnown: (id: number) => boolean,
 ): number[] {
-  const seen = new Set<number>();
+  const seen = new Uint8Array(ops.length);
   const found: number[] = [];
   const visit = (id: number): void => {
-    if (seen.has(id) || ops[id] === "literal" || ops[id] === "data") return;
-    seen.add(id);
+    if (seen[id] || ops[id] === "literal" || ops[id] === "data") return;
+    seen[id] = 1;
     if (isKnown(id)) found.push(id);
     else visitAll(args[id] as readonly number[]);
   };

@@ -1,5 +1,5 @@
 // The door of planets: descriptions in the trade's words. Needs mathjs and zod.
-export type { Appraisal, AppraisalSource, MissingField } from "./appraisal/appraisal.ts";
+export type { Appraisal, AppraisalSource, AppraisedDiagram, MissingField } from "./appraisal/appraisal.ts";
 export type { AppraisalNote, AppraisalNoteCode } from "./appraisal/appraisalNote.ts";
 export type {
   ConventionalTemperature,
@@ -31,3 +31,4 @@ export { PLANET_FORMAT, type PlanetDescription } from "./planet/planetShape.ts";
 export type { Planet, PlanetEquilibriumTemperature, PlanetNames } from "./planet/planetTypes.ts";
 export { type ReadPlanetOptions, readPlanet } from "./planet/readPlanet.ts";
 export { UNITS, type UnitMeaning } from "./planet/units.ts";
+export type { WrittenUnit } from "./planet/writtenUnits.ts";

@@ -2,6 +2,7 @@
 import type { Diagram } from "../branches/diagram.ts";
 import type { PlanetAssumptions } from "../planet/assumptions.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
+import type { WrittenUnit } from "../planet/writtenUnits.ts";
 import type { FoundStates } from "../states/state.ts";
 import type { AppraisalNote } from "./appraisalNote.ts";
 import type { EquilibriumTemperatures, Starlight } from "./appraisedLight.ts";
@@ -23,6 +24,9 @@ export interface AppraisalSource {
   readonly dois: readonly string[];
 }
 
+/** A diagram, and the units in which the description has its givens; a luminosity that it does not have is in `solLum`. */
+export type AppraisedDiagram = Diagram & { readonly units: readonly WrittenUnit[] };
+
 /** What `appraisePlanet` returns. */
 export interface Appraisal {
   readonly format: "thermostead-appraisal-1";
@@ -41,7 +45,7 @@ export interface Appraisal {
   /** By rising temperature. */
   readonly states: readonly StateAppraisal[];
   /** All climates as the star brightens or fades, from 0.4 to 2.5 times today's; null where nothing stands for the star. */
-  readonly diagram: Diagram | null;
+  readonly diagram: AppraisedDiagram | null;
   /** Published limits; empty where the effective temperature is not given or outside of their range. */
   readonly habitableZone: readonly StatedLimit[];
   /** Where the planet's own stable branches end. */

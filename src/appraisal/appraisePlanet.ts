@@ -70,7 +70,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
   const inputs = planet.inputs.filter(({ path }) => !filled.has(fieldOf(path)));
   const star = hasBudget ? alongStar(planet, reading) : null;
   const climates: Climates = hasBudget
-    ? statesOfPlanet({ loop, facts, inputs, star }, { within, effort })
+    ? statesOfPlanet({ loop, facts, inputs, units: planet.units, star }, { within, effort })
     : { found: null, states: [], diagram: null };
   const { states } = climates;
   const hasAlbedo = !filled.has("albedo") && !filled.has("surface");

@@ -5,14 +5,17 @@ import { tippingMargins } from "../branches/tippingMargins.ts";
 import { traceBranches } from "../branches/traceBranches.ts";
 import { analyseFeedbacks } from "../feedback/analyseFeedbacks.ts";
 import { equilibriumTemperature } from "../greenhouse/equilibriumTemperature.ts";
+import { SOLAR_LUMINOSITY } from "../ground/constants.ts";
 import { ThermosteadError } from "../ground/errors.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { PlanetFacts } from "../planet/facts.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
+import type { WrittenUnit } from "../planet/writtenUnits.ts";
 import { findStates } from "../states/findStates.ts";
 import type { FoundStates, State } from "../states/state.ts";
 import type { AlongStar } from "./alongStar.ts";
+import type { AppraisedDiagram } from "./appraisal.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { placeTemperatures } from "./equilibriumTemperatures.ts";
 import { orbitAveraging } from "./orbitAveraging.ts";
@@ -38,7 +41,7 @@ export interface Search {
 export interface Climates {
   readonly found: FoundStates | null;
   readonly states: readonly StateAppraisal[];
-  readonly diagram: Diagram | null;
+  readonly diagram: AppraisedDiagram | null;
 }
 
 /** A loop, what is known beside it, and the given that stands for its star. */
@@ -46,11 +49,15 @@ export interface Subject {
   readonly loop: Loop;
   readonly facts: PlanetFacts;
   readonly inputs: readonly PlanetInput[];
+  readonly units: readonly WrittenUnit[];
   readonly star: AlongStar | null;
 }
 
 /** All climates of a planet. */
-export function statesOfPlanet({ loop, facts, inputs, star }: Subject, { within, effort }: Search): Climates {
+export function statesOfPlanet(
+  { loop, facts, inputs, units, star }: Subject,
+  { within, effort }: Search,
+): Climates {
   const spend = effort === undefined ? {} : { effort };
   const found = findStates(loop, { within, ...spend });
   const { heatCapacity, orbitalPeriod: period, surfacePressure } = facts;
@@ -75,7 +82,14 @@ export function statesOfPlanet({ loop, facts, inputs, star }: Subject, { within,
       surface: surfacePressure === null ? null : surfacePhases({ temperature, pressure: surfacePressure }),
     };
   });
-  return { found, states, diagram };
+  return { found, states, diagram: diagram && { ...diagram, units: unitsOf(diagram, units) } };
+}
+
+/** Units of the givens of a diagram. What stands for the star is an input, or the luminosity that follows from others. */
+function unitsOf({ along, fixed }: Diagram, units: readonly WrittenUnit[]): WrittenUnit[] {
+  const own = units.filter(({ name }) => name === along || name in fixed);
+  if (own.some(({ name }) => name === along)) return own;
+  return [{ name: along, unit: "solLum", size: SOLAR_LUMINOSITY }, ...own];
 }
 
 /** The diagram of all climates as the star brightens or fades; null where there is none that holds, or no given for the star. */

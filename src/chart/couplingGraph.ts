@@ -75,9 +75,9 @@ export function couplingPlot({ feedbacks }: CouplingGraph, page: number): Plot {
   const draft = {
     title: `Couplings at ${numeral(feedbacks.temperature)} K`,
     caption: [
-      `λ = ${numeral(feedbacks.feedbackParameter, 4)} ${unit}, the sum of all that reaches the net flux`,
-      `Numbers in ${unit}: what λ would lose without the line`,
-      others && `Not drawn: ${others.count} weaker loops`,
+      `λ = ${numeral(feedbacks.feedbackParameter, 4)}${unit}, the sum of all that reaches the net flux`,
+      `Numbers in${unit}: what λ would lose without the line`,
+      others && `Not drawn, weaker loops: ${others.count}`,
     ],
     layers: [
       ...layersOf("line", lines, EFFECTS),
@@ -90,7 +90,7 @@ export function couplingPlot({ feedbacks }: CouplingGraph, page: number): Plot {
       layerOf("text", [
         ...names.map((name, i) => words(topOf(i) - BOX / 2, name)),
         ...wires.map((wire) =>
-          words(wire.y, `${signed(wire.value)}${room > 300 ? ` ${unit}` : ""} from ${names[wire.from]}`),
+          words(wire.y, `${signed(wire.value)}${room > 300 ? unit : ""} from ${names[wire.from]}`),
         ),
       ]),
     ],

@@ -1,5 +1,6 @@
 // The diagram of temperature against one parameter.
 import type { Diagram } from "../branches/diagram.ts";
+import type { Range } from "../ground/range.ts";
 import type { State } from "../states/state.ts";
 import {
   boxOf,
@@ -13,15 +14,25 @@ import {
   plotOf,
 } from "./plot.ts";
 import { MARKS, undecidedLayer } from "./statesChart.ts";
-import { numeral, rangeText, titled } from "./wording.ts";
+import { numeral, rangeText, titled, unitText } from "./wording.ts";
 
 /** A diagram, and what may be drawn with it. */
 export interface DiagramChartOptions {
-  readonly diagram: Diagram;
+  readonly diagram: Diagram & Pick<DiagramChartOptions, "units">;
   /** The same planet with couplings held, along the same given. */
   readonly held?: Diagram;
   /** Where the planet is now. */
   readonly state?: State;
+  /** In which units givens are shown: `loop.givens`, or the `units` of a planet, in which they are written. */
+  readonly units?: readonly GivenUnit[];
+}
+
+/** In which unit a given is shown. */
+export interface GivenUnit {
+  readonly name: string;
+  readonly unit: string;
+  /** The unit in that of the given's value; 1 unless said. */
+  readonly size?: number;
 }
 
 /** Folds and crossings, and what the legend calls them. */
@@ -30,24 +41,31 @@ const PLACES = {
   "fold at a kink": { shape: "diamond" },
   crossing: { shape: "circle" },
 } as const;
-const NAMES = { fold: "fold", corner: "fold at a kink", transcritical: "crossing" } as const;
+const NAMES: Readonly<Record<string, string>> = { corner: "fold at a kink", transcritical: "crossing" };
 
 /**
  * Temperature against one given: stable branches drawn through, unstable ones dashed, folds as squares (at a kink as
  * diamonds), crossings as rings, the jumps of a slow rise and fall with their direction, the same planet with couplings held, and the planet's
- * present place. Undecided parts are boxes. Units: K and that of the given.
+ * present place. Undecided parts are boxes. Units: K and that of the given, which is the one in which it was written where
+ * `units` has it; the diagram of an appraisal brings its own.
  *
  * @example toSVG(diagramChart({ diagram: traceBranches(loop, { along: "flux", between, within }), state }), { width: 360 })
  */
-export function diagramChart({ diagram, held, state }: DiagramChartOptions): Plot {
+export function diagramChart({ diagram, held, state, units = diagram.units }: DiagramChartOptions): Plot {
   const { along, branches, undecided } = diagram;
   const seen = branches.flatMap((branch) => branch.temperatures);
-  const range = extent(seen.length > 0 ? seen : diagram.within);
-  const fixed = Object.entries(diagram.fixed).map(([name, value]) => `, ${name} ${numeral(value)}`);
+  const range = extent(seen[0] ? seen : diagram.within);
+  const known = (given: string) => units?.find(({ name }) => name === given);
+  const { unit, size = 1 } = (known(along) ?? diagram) as GivenUnit;
+  const shown = (at: number): number => at / size;
+  const fixed = Object.entries(diagram.fixed).map(([name, value]) => {
+    const { unit, size = 1 } = known(name) ?? ({ unit: "1" } as GivenUnit);
+    return `, ${name} ${numeral(value / size)}${unitText(unit)}`;
+  });
   const branchLayers = (of: Diagram, look: Look, prefix?: string): Layer[] => {
     const lines = of.branches.flatMap((branch, line) =>
       lineOf(
-        branch.points.map((point) => [point.at, point.temperature]),
+        branch.points.map((point) => [shown(point.at), point.temperature]),
         line,
         branch.stability,
       ),
@@ -55,10 +73,10 @@ export function diagramChart({ diagram, held, state }: DiagramChartOptions): Plo
     return layersOf("line", lines, MARKS, look, prefix);
   };
   const places = [...diagram.folds, ...diagram.crossings].map((place) => ({
-    x: place.at,
+    x: shown(place.at),
     y: place.temperature,
-    tip: rangeText(place.atBracket, 17),
-    kind: NAMES[place.kind],
+    tip: `${rangeText(place.atBracket, 17)}${unitText(diagram.unit)}`,
+    kind: NAMES[place.kind] ?? place.kind,
   }));
   // upright lines from the lost to the reached temperature, with an arrow half way
   const warm: Look = { colour: "warm", dash: [2, 3], width: 1.5 };
@@ -66,13 +84,14 @@ export function diagramChart({ diagram, held, state }: DiagramChartOptions): Plo
     .filter((jump) => jump.to || jump.leaves)
     .map((jump) => {
       const goal = jump.to?.temperature ?? range[jump.leaves === "hotter" ? 1 : 0];
+      const x = shown(jump.at);
       return {
         line: [
-          [jump.at, jump.temperature],
-          [jump.at, goal],
+          [x, jump.temperature],
+          [x, goal],
         ] as const,
         sign: {
-          x: jump.at,
+          x,
           y: (jump.temperature + goal) / 2,
           tip: `a slow ${jump.direction} jumps to ${numeral(goal)}`,
         },
@@ -81,16 +100,22 @@ export function diagramChart({ diagram, held, state }: DiagramChartOptions): Plo
     });
   return plotOf({
     title: `Temperature along ${along}`,
-    x: { title: titled(along, diagram.unit), domain: diagram.between },
+    x: { title: titled(along, unit), domain: diagram.between.map(shown) as unknown as Range },
     y: { title: titled("temperature", "K") },
     caption: [
-      `${branches.length} branches, ${diagram.proof}, ${undecided.length} undecided${fixed.join("")}`,
+      `Branches: ${branches.length}, ${diagram.proof}, undecided: ${undecided.length}${fixed.join("")}`,
     ],
     layers: [
-      undecidedLayer(undecided.map((part) => boxOf(part.parameters, part.temperatures, part.kind))),
+      undecidedLayer(
+        undecided.map((part) =>
+          boxOf(part.parameters.map(shown) as unknown as Range, part.temperatures, part.kind),
+        ),
+      ),
       layerOf(
         "box",
-        diagram.gaps.map((gap) => boxOf(gap.parameters, range, `too ${gap.too}`)),
+        diagram.gaps.map((gap) =>
+          boxOf(gap.parameters.map(shown) as unknown as Range, range, `too ${gap.too}`),
+        ),
         { colour: "purple", open: true },
         "no state in range",
       ),
@@ -113,7 +138,12 @@ export function diagramChart({ diagram, held, state }: DiagramChartOptions): Plo
       layerOf(
         "point",
         state
-          ? [{ x: (state.givens as Readonly<Record<string, number>>)[along] as number, y: state.temperature }]
+          ? [
+              {
+                x: shown((state.givens as Readonly<Record<string, number>>)[along] as number),
+                y: state.temperature,
+              },
+            ]
           : [],
         { colour: "warm", shape: "diamond" },
         "the planet now",

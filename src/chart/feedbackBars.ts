@@ -24,7 +24,7 @@ export function feedbackBars<N extends string>(feedbacks: Feedbacks<N>): Plot {
   const parts = [
     { ...reference, through: [`λ₀, ${reference.kind}`] },
     ...feedbacks.loops,
-    ...(others ? [{ ...others, through: [`${others.count} weaker loops`] }] : []),
+    ...(others ? [{ ...others, through: [`weaker loops: ${others.count}`] }] : []),
     { feedbackParameter, through: ["λ, the sum"] },
   ];
   const height = parts.length;

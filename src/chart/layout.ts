@@ -21,13 +21,14 @@ const SAMPLE = 34;
 /** Where everything stands, px from the upper left corner of the plotting area. */
 export interface Layout {
   /** Of the plotting area. */
-  readonly inner: { readonly width: number; readonly height: number };
+  readonly width: number;
+  readonly height: number;
   /** From the plotting area to the edges of the picture. */
   readonly padding: Readonly<Record<"left" | "top" | "right" | "bottom", number>>;
   readonly x: readonly Tick[];
   readonly y: readonly Tick[];
   /** Titles, legend and caption. */
-  readonly around: readonly Layer[];
+  readonly layers: readonly Layer[];
 }
 
 const ticksOf = (axis: Axis, about: number): Tick[] =>
@@ -74,10 +75,10 @@ export function layoutOf(plot: Plot, width: number): Layout {
   });
   const end = down + (along > start ? 23 : -6);
   return {
-    inner: { width: width - left - right, height },
+    ...{ width: width - left - right, height },
     padding: { left, top, right, bottom: end - height + caption.length * LINE },
     ...{ x, y },
-    around: [
+    layers: [
       layerOf("text", [{ x: width - left - right, y: height + 36, text: plot.x.title }], { anchor: "end" }),
       // the title of the upright axis lies above it, so that it can be read without turning the head
       layerOf("text", [{ x: start, y: -12, text: plot.y.title }]),

@@ -41,8 +41,8 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
   const stack = [...ledger.reservoirs].sort((a, b) => level(a.name) - level(b.name));
   const names = stack.map((reservoir) => reservoir.name);
   const gutter = 14 + Math.min(0.24 * page, Math.max(...names.map((name) => textWidth(name, 12))));
-  const { laid, captions } = layFlows({ flows: ledger.flows, names, room: width - gutter - 6 });
-  const pitch = BOX + Math.max(64, ...laid.map((flow) => flow.label.length * LINE + 32));
+  const { flows: laid, caption } = layFlows({ flows: ledger.flows, names, room: width - gutter - 6 });
+  const pitch = BOX + Math.max(64, ...laid.map((flow) => flow.lines.length * LINE + 32));
   const topOf = (name: string): number => 0 - names.indexOf(name) * pitch;
 
   const drawn = laid.map((flow, line) => {
@@ -62,16 +62,16 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
       [right, start],
     ] as const;
     // labels stand in the gap where a flow begins, so that flows across a layer do not write on it
-    const room = flow.label.length * LINE;
+    const room = flow.lines.length * LINE;
     const y = start + (down ? -10 : 12 + room);
     return {
-      band: lineOf(
+      line: lineOf(
         corners,
         line,
         flow.from === "space" ? "from space" : flow.to === "space" ? "to space" : "inside",
       ),
-      card: boxOf([x - flow.wide / 2, x + flow.wide / 2], [y, y - room - 2], flow.tip),
-      words: stacked(flow.label, { x, y: y - 12 }, -LINE),
+      box: boxOf([x - flow.width / 2, x + flow.width / 2], [y, y - room - 2], flow.tip),
+      text: stacked(flow.lines, { x, y: y - 12 }, -LINE),
     };
   });
   const labels = stack.flatMap((reservoir) => {
@@ -82,7 +82,7 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
   });
   const draft = {
     title: "Energy flows",
-    caption: [...captions, `Widths to scale; ${unitText(FLUX)} of the whole area`],
+    caption: [...caption, `Widths to scale;${unitText(FLUX)} of the whole area`],
     layers: [
       layerOf(
         "box",
@@ -91,18 +91,18 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
       ),
       ...layersOf(
         "line",
-        drawn.flatMap((flow) => flow.band),
+        drawn.flatMap((flow) => flow.line),
         BANDS,
         { full: true },
       ),
       layerOf(
         "box",
-        drawn.map((flow) => flow.card),
+        drawn.map((flow) => flow.box),
         { colour: "paper" },
       ),
       layerOf(
         "text",
-        drawn.flatMap((flow) => flow.words),
+        drawn.flatMap((flow) => flow.text),
         { anchor: "middle" },
       ),
       layerOf("text", labels),

@@ -10,9 +10,9 @@ export interface LaidFlow {
   readonly value: number;
   /** All that is known of it, in words. */
   readonly tip: string;
-  readonly label: readonly string[];
+  readonly lines: readonly string[];
   /** Width of the label, px. */
-  readonly wide: number;
+  readonly width: number;
   /** Middle of the band, px. */
   readonly x: number;
   /** Half its width, px. */
@@ -31,13 +31,13 @@ interface ToLay extends Pick<Ledger, "flows"> {
 }
 
 const sum = (values: readonly number[]): number => values.reduce((a, b) => a + b, 0);
-const wideOf = (lines: readonly string[]): number => Math.max(...lines.map((line) => textWidth(line, 12)));
+const widthOf = (lines: readonly string[]): number => Math.max(...lines.map((line) => textWidth(line, 12)));
 
 /**
  * Places flows between known reservoirs. Takes the fullest labels that fit: name and number, a letter and the
- * number, a letter; what the letters mean is then said in `captions`.
+ * number, a letter; what the letters mean is then said in `caption`.
  */
-export function layFlows({ flows, names, room }: ToLay): { laid: LaidFlow[]; captions: string[] } {
+export function layFlows({ flows, names, room }: ToLay): { flows: LaidFlow[]; caption: string[] } {
   const known = flows
     .filter(
       (flow) => [flow.from, flow.to].every((name) => names.includes(name)) && Number.isFinite(flow.value),
@@ -46,18 +46,18 @@ export function layFlows({ flows, names, room }: ToLay): { laid: LaidFlow[]; cap
       const [from, to] = flow.value < 0 ? [flow.to, flow.from] : [flow.from, flow.to];
       const value = Math.abs(flow.value);
       const [letter, number] = [letterOf(i), numeral(value, 4)];
-      const labels = [[...wrapped(flow.name, 105, 12).slice(0, 3), number], [letter, number], [letter]];
-      return { from, to, value, labels, tip: `${flow.name}, ${from} → ${to}, ${number}` };
+      const texts = [[...wrapped(flow.name, 105, 12).slice(0, 3), number], [letter, number], [letter]];
+      return { from, to, value, texts, tip: `${flow.name}, ${from} → ${to}, ${number}` };
     });
   const level =
-    [0, 1].find((k) => sum(known.map((flow) => wideOf(flow.labels[k] as string[]) + 2 * GAP)) <= room) ?? 2;
+    [0, 1].find((k) => sum(known.map((flow) => widthOf(flow.texts[k] as string[]) + 2 * GAP)) <= room) ?? 2;
   const told = known.map((flow) => {
-    const label = flow.labels[level] as string[];
-    return { ...flow, label, wide: wideOf(label) };
+    const lines = flow.texts[level] as string[];
+    return { ...flow, lines, width: widthOf(lines) };
   });
   // one scale for all widths: the largest of many for which bands and labels stand side by side
   let scale = WIDEST / Math.max(1e-99, ...told.map((flow) => flow.value));
-  const slots = () => told.map((flow) => Math.max(flow.wide, flow.value * scale) + 2 * GAP);
+  const slots = () => told.map((flow) => Math.max(flow.width, flow.value * scale) + 2 * GAP);
   for (let i = 0; i < 200 && sum(slots()) > room; i++) scale *= 0.97;
   const spare = Math.max(0, room - sum(slots())) / told.length;
   let end = 0;
@@ -66,5 +66,5 @@ export function layFlows({ flows, names, room }: ToLay): { laid: LaidFlow[]; cap
     end += slot;
     return { ...flow, x: end - slot / 2, half: Math.max(0.6, (flow.value * scale) / 2) };
   });
-  return { laid, captions: level > 0 ? laid.map((flow, i) => `${letterOf(i)}: ${flow.tip}`) : [] };
+  return { flows: laid, caption: level > 0 ? laid.map((flow, i) => `${letterOf(i)}: ${flow.tip}`) : [] };
 }

@@ -71,7 +71,7 @@ export function limitsChart({ planets, limits }: LimitsChartOptions): Plot {
       return { ...end, x: end.x + 0.012 * (x[1] - x[0]), y: lowest };
     });
   return plotOf({
-    title: "Stellar flux and published limits",
+    title: "Published limits",
     x: { title: titled("effective temperature of the star", "K"), domain: x },
     y: { title: titled("stellar flux", FLUX), domain: y },
     caption: ["A limit says no more than its paper"],

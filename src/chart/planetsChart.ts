@@ -44,7 +44,7 @@ export function planetsChart({
     items.push({ x: values[row] as number, y: temperatures[i] as number, tip: `row ${row}`, kind });
   }
   return plotOf({
-    title: `States of ${states.rows} planets`,
+    title: `States along ${name}`,
     x: { title: titled(name, unit) },
     y: { title: titled("temperature", "K") },
     caption: [countsText(states), step > 1 && `Drawn is one state in ${step}`],
@@ -54,7 +54,7 @@ export function planetsChart({
 
 /** How many planets have how many states. */
 export const countsText = ({ counts }: Pick<StateColumns, "counts">): string =>
-  [...new Set(counts)]
+  `planets by number of states: ${[...new Set(counts)]
     .sort((a, b) => a - b)
-    .map((count) => `planets with ${count} states: ${counts.filter((c) => c === count).length}`)
-    .join(", ");
+    .map((count) => `${counts.filter((c) => c === count).length} with ${count}`)
+    .join(", ")}`;

@@ -30,10 +30,8 @@ const KINDS: Readonly<Record<string, (result: never) => Picture[]>> = {
   picture: (picture) => [picture],
   ledger: ({ ledger }) => [ledgerDrawing(ledger)],
   reservoirs: (ledger) => [ledgerDrawing(ledger)],
-  starlight: ({ diagram, found }) => [
-    ...(diagram ? [diagramChart({ diagram })] : []),
-    ...(found ? [statesChart(found)] : []),
-  ],
+  starlight: ({ diagram, found }) =>
+    [diagram && diagramChart({ diagram }), found && statesChart(found)].filter(Boolean),
   states: (found) => [statesChart(found)],
   reference: (feedbacks) => [feedbackBars(feedbacks), couplingGraph(feedbacks)],
   branches: (diagram) => [diagramChart({ diagram })],
@@ -41,6 +39,7 @@ const KINDS: Readonly<Record<string, (result: never) => Picture[]>> = {
   // tables alone: all else that says how sure it is, and rows
   proof: () => [],
   rows: () => [],
+  values: () => [],
 };
 
 /** What some results hold. */
@@ -52,7 +51,7 @@ interface Parts extends Readonly<Record<string, unknown>> {
 /** What is shown of a result. It is known by its fields, so that it may come from JSON; throws where it is of no known kind. */
 export function reportOf(result: unknown): Report {
   const isRows = Array.isArray(result) && result.some((row) => "name" in row);
-  const parts = (isRows ? { rows: result } : result) as Parts;
+  const parts = (isRows ? { values: result } : result) as Parts;
   const [kind, picturesOf] = Object.entries(KINDS).find(([field]) => field in parts) as [
     string,
     (result: never) => Picture[],
@@ -61,10 +60,11 @@ export function reportOf(result: unknown): Report {
   const [first] = pictures.map((picture) => plotFor(picture, 640));
   return {
     lines: [
-      ...(first ? [first.title, ...first.caption] : []),
-      ...(parts.counts ? [countsText(parts as Required<Parts>)] : []),
+      first?.title,
+      ...(first?.caption ?? []),
+      parts.counts && countsText(parts as Required<Parts>),
       ...(parts.notes ?? []).map((note) => [note.severity, note.about, note.text].filter(Boolean).join(", ")),
-    ],
+    ].filter(Boolean) as string[],
     pictures,
     tables: kind === "picture" ? [] : tablesOf(parts),
   };
@@ -78,5 +78,10 @@ export function jsonReport(result: unknown): Report {
   } catch {
     // what refuses to be read, or leads back to itself
   }
-  return { lines: [text.length > 2000 ? `${text.slice(0, 2000)} …` : text], tables: [], pictures: [] };
+  const cut = text.length > 2000 ? `${text.slice(0, 2000)} …` : text;
+  return {
+    lines: ["No result that docs/charts.md lists, as JSON:", cut],
+    tables: [],
+    pictures: [],
+  };
 }

@@ -106,7 +106,7 @@ function withStates(
     x: { title: titled("temperature", "K"), domain },
     caption: [
       found &&
-        `${states.length} states at ${rangeText(found.within)} K, ${found.proof}, ${undecided.length} undecided`,
+        `States at ${rangeText(found.within)} K: ${states.length}, ${found.proof}, undecided: ${undecided.length}`,
     ],
     layers: [undecidedLayer(boxes), ...layers],
   });

@@ -1,7 +1,7 @@
 // The text of an SVG: elements, and the shapes of a layer.
 import type { Layer } from "./plot.ts";
 import { OUTLINES } from "./style.ts";
-import { escaped } from "./wording.ts";
+import { escaped, spaced } from "./wording.ts";
 
 /** From a value to px. */
 export type Scale = (value: number) => number;
@@ -16,8 +16,7 @@ const tenth = (value: number): number => Math.round(value * 10) / 10;
  */
 export function el(name: string, { tip, ...attributes }: Attributes, inside = ""): string {
   const written = Object.entries(attributes).map(([key, value]) => {
-    const kebab = key.replace(/[A-Z]/g, (letter) => `-${letter.toLowerCase()}`).replace("dash", "dasharray");
-    return ` ${kebab}="${escaped(value)}"`;
+    return ` ${spaced(key, "-").replace("dash", "dasharray")}="${escaped(value)}"`;
   });
   return `<${name}${written.join("")}>${tip ? `<title>${escaped(tip)}</title>` : ""}${inside}</${name}>`;
 }

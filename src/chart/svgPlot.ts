@@ -18,8 +18,7 @@ const px: Scale = (value) => value;
 
 export function svgPlot(plot: Plot, page: Page): string {
   const colours = paletteOf(page.theme);
-  const { inner, padding, around, ...ticks } = layoutOf(plot, page.width);
-  const [right, bottom] = [inner.width, inner.height];
+  const { width: right, height: bottom, padding, layers: around, ...ticks } = layoutOf(plot, page.width);
   const [x, y] = [scaleOf(plot.x, 0, right), scaleOf(plot.y, bottom, 0)];
   const across = ticks.x.map((tick) => ({ x: x(tick.at), y: bottom + 18, text: tick.text }));
   const up = ticks.y.map((tick) => ({ x: -8, y: y(tick.at) + 4, text: tick.text }));
@@ -58,12 +57,11 @@ export function svgPlot(plot: Plot, page: Page): string {
       .join("");
   const [left, top] = [-padding.left, -padding.top];
   const size = { width: page.width, height: bottom + padding.top + padding.bottom };
-  const isAuto = page.theme === "auto";
   return (
     `<svg xmlns="http://www.w3.org/2000/svg" width="${size.width}" height="${size.height}" ` +
     `viewBox="${left} ${top} ${size.width} ${size.height}" role="img" aria-label="${escaped(plot.title)}" ` +
     `class="thermostead" font-family="system-ui, sans-serif">` +
-    (isAuto ? DARK_RULE : "") +
+    (page.theme === "auto" ? DARK_RULE : "") +
     el("rect", { x: left, y: top, ...size, fill: colours.paper }) +
     drawn(plot.layers, x, y) +
     drawn([...axes, ...around], px, px) +

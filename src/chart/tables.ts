@@ -1,5 +1,6 @@
 // Any result as tables: what they hold stands under the names of its fields, with the units that those have everywhere.
-import { FEEDBACK, FLUX, numeral, rangeText, titled, unitText } from "./wording.ts";
+import type { Range } from "../ground/range.ts";
+import { FEEDBACK, FLUX, numeral, rangeText, spaced, titled, unitText } from "./wording.ts";
 
 /** A table of written cells. */
 export interface Table {
@@ -25,7 +26,7 @@ const UNITS: readonly (readonly [RegExp, string])[] = [
   [/feedbackParameter$/i, FEEDBACK],
   [/time$/i, "s"],
   // other fields of rows are in units of their own
-  [/^rows /, "1"],
+  [/^values /, "1"],
   [/period$/, "s"],
   [/luminosity$/i, "W"],
   [/(axis|[es] distance)$/i, "m"],
@@ -33,7 +34,8 @@ const UNITS: readonly (readonly [RegExp, string])[] = [
 ];
 
 /** What belongs to pictures, or tells nobody anything in six digits. */
-const SKIPPED = /^(points|way|variables|eigenvalues|standardName|description|notes|after)$|(Range|Bracket)$/;
+const SKIPPED =
+  /^(points|way|variables|eigenvalues|standardName|description|notes|after|units)$|(Range|Bracket)$/;
 
 type Fields = Readonly<Record<string, unknown>>;
 const isFields = (value: unknown): value is Fields =>
@@ -45,42 +47,40 @@ type Value = readonly [name: string, value: unknown, unit: unknown];
 /** All tables of a result: its lists, then its other values. */
 export function tablesOf(result: Fields): Table[] {
   const parts = partsOf(result, result.unit);
-  const rows = written(parts.values).map(([name, value]) => ({ name, value }));
-  const tables = parts.lists.map(([name, records, unit]) => listed(name, records as Fields[], unit));
-  return rows.length > 0 ? [...tables, listed("values", rows)] : tables;
+  const values = written(parts).map(([name, value]) => ({ name, value }));
+  const lists = parts.filter(isList);
+  const rest: Value[] = values.length > 0 ? [["values", values, null]] : [];
+  return [...lists, ...rest].map(listed);
 }
 
-/** What a record holds: values, those of records in it under both names, and lists of records. */
-function partsOf(fields: Fields, unit: unknown, prefix = ""): Readonly<Record<"values" | "lists", Value[]>> {
-  const parts = { values: [] as Value[], lists: [] as Value[] };
-  for (const [key, value] of Object.entries(fields)) {
+/** Whether it is a list of records. */
+const isList = ([, value]: Value): boolean => Array.isArray(value) && value.some(isFields);
+
+/** What a record holds; what records in it hold stands under both names. */
+const partsOf = (fields: Fields, unit: unknown, prefix = ""): Value[] =>
+  Object.entries(fields).flatMap(([key, value]): Value[] => {
+    if (SKIPPED.test(key) || ArrayBuffer.isView(value)) return [];
     const name = prefix + key;
-    if (SKIPPED.test(key) || ArrayBuffer.isView(value)) continue;
-    if (isFields(value)) {
-      const inner = partsOf(value, value.unit ?? unit, `${name} `);
-      parts.values.push(...inner.values);
-      parts.lists.push(...inner.lists);
-    } else parts[Array.isArray(value) && value.some(isFields) ? "lists" : "values"].push([name, value, unit]);
-  }
-  return parts;
-}
-
-/** Heads and cells. */
-const written = (values: readonly Value[], path = ""): [string, string][] =>
-  values.map(([name, value, unit]) => {
-    const known = UNITS.find(([ends]) => ends.test(path + name))?.[1] ?? "1";
-    const words = spaced(name.replace(/(couplings|givens|report|state) /g, ""));
-    return [
-      titled(words, known === "of" ? String(unit ?? "1") : known),
-      name.endsWith("unit") ? unitText(cell(value)) : cell(value),
-    ];
+    return isFields(value) ? partsOf(value, value.unit ?? unit, `${name} `) : [[name, value, unit]];
   });
 
+/** Heads and cells of all but lists. */
+const written = (values: readonly Value[], path = ""): [string, string][] =>
+  values
+    .filter((value) => !isList(value))
+    .map(([name, value, unit]) => {
+      const known = UNITS.find(([ends]) => ends.test(path + name))?.[1] ?? "1";
+      const words = spaced(name.replace(/(couplings|givens|report|state) /g, ""));
+      return [
+        titled(words, known === "of" ? String(unit ?? "1") : known),
+        name.endsWith("unit") ? unitText(cell(value)).trim() : cell(value),
+      ];
+    });
+
 /** A list of records as a table. */
-function listed(name: string, records: readonly Fields[], unit?: unknown): Table {
-  const rows = records
-    .slice(0, MOST)
-    .map((record) => new Map(written(partsOf(record, unit).values, `${name} `)));
+function listed([name, value, unit]: Value): Table {
+  const records = value as readonly Fields[];
+  const rows = records.slice(0, MOST).map((record) => new Map(written(partsOf(record, unit), `${name} `)));
   const head = [...new Set(rows.flatMap((row) => [...row.keys()]))];
   const more = records.length - MOST;
   return {
@@ -90,9 +90,6 @@ function listed(name: string, records: readonly Fields[], unit?: unknown): Table
   };
 }
 
-const spaced = (name: string): string =>
-  name.replace(/(?<=[a-z])[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
-
 function cell(value: unknown): string {
   if (typeof value === "number") return numeral(value);
   if (!Array.isArray(value)) return String(value ?? "–");
@@ -100,6 +97,6 @@ function cell(value: unknown): string {
   // bounds that agree in most digits are told by those in which they do not
   const digits = Math.abs(high - low) < 1e-5 * Math.abs(low) ? 17 : 6;
   return value.length === 2 && value.every(Number.isFinite)
-    ? rangeText([low, high], digits)
+    ? rangeText(value as unknown as Range, digits)
     : value.map(cell).join(", ") || "none";
 }

@@ -10,11 +10,8 @@ export interface Tick {
 
 /** Multiples of 1, 2 or 5 times a power of ten in a range: about as many as asked for. */
 export function ticksIn([low, high]: Range, about: number): Tick[] {
-  const least = (high - low) / about;
-  let power = 1;
-  while (power > least) power /= 10;
-  while (power * 10 <= least) power *= 10;
-  const step = power * ([1, 2, 5, 10].find((k) => k * power >= least) as number);
+  const [digits, power] = ((high - low) / about).toExponential().split("e");
+  const step = Number(`1e${power}`) * ([1, 2, 5, 10].find((k) => k >= Number(digits)) as number);
   const ticks: Tick[] = [];
   for (let i = Math.ceil(low / step); i * step <= high; i++) {
     // 12 digits: a multiple of a decimal fraction is written as people write it; and no −0

@@ -20,10 +20,10 @@ const MARKS: Readonly<Record<Layer["mark"], readonly [Json, Json]>> = {
 /** Where words stand. */
 const ALIGNS = { start: "left", middle: "center", end: "right" };
 
-export function vegaPlot(plot: Plot, { width, theme }: Page): Json {
-  const colours = paletteOf(theme);
+export function vegaPlot(plot: Plot, page: Page): Json {
+  const colours = paletteOf(page.theme);
   const { ink } = colours;
-  const { inner, padding, around, ...ticks } = layoutOf(plot, width);
+  const { width, height, padding, layers: around, ...ticks } = layoutOf(plot, page.width);
   const axis = (field: "x" | "y"): Json => {
     const { title, domain } = plot[field];
     const values = ticks[field].map((tick) => tick.at);
@@ -34,7 +34,7 @@ export function vegaPlot(plot: Plot, { width, theme }: Page): Json {
     layers.map((layer) => {
       const [mark, channels] = MARKS[layer.mark];
       const { shape = "circle", anchor = "start" } = layer.look;
-      const tooltip = layer.items[0]?.tip ? { tooltip: { field: "tip" } } : {};
+      const tooltip = layer.items[0]?.tip ? { tooltip: { field: "tip" } } : null;
       return {
         data: { values: layer.items.map((item, order) => ({ line: 0, ...item, order })) },
         mark: { ...mark, ...paintOf(layer, colours), shape, align: ALIGNS[anchor] },
@@ -44,7 +44,7 @@ export function vegaPlot(plot: Plot, { width, theme }: Page): Json {
   const px = { type, scale: null, axis: null };
   return {
     $schema: "https://vega.github.io/schema/vega-lite/v5.json",
-    ...{ description: plot.title, background: colours.paper, autosize: "none", padding, ...inner },
+    ...{ description: plot.title, background: colours.paper, autosize: "none", padding, width, height },
     layer: [
       ...layersOf(plot.layers, { x: axis("x"), y: axis("y") }),
       ...layersOf(around, { x: { field: "x", ...px }, y: { field: "y", ...px } }),

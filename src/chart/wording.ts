@@ -19,15 +19,18 @@ export const signed = (value: number): string => (value > 0 ? "+" : "") + numera
 export const rangeText = ([low, high]: Range, digits?: number): string =>
   `${numeral(low, digits)} to ${numeral(high, digits)}`;
 
-/** "W m-2" and "W.m**-2" as W m⁻²; nothing for "1". */
+/** "W m-2" and "W.m**-2" as W m⁻², after a space; nothing for "1". */
 export const unitText = (unit: string): string =>
   unit === "1"
     ? ""
-    : unit.replace(/\./g, " ").replace(/(?<=[a-z])(?:\*\*)?(-?\d+)/gi, (_, power) => raised(power));
+    : ` ${unit.replace(/\./g, " ").replace(/(?<=[a-z])(?:\*\*)?(-?\d+)/gi, (_, power) => raised(power))}`;
 
 /** A name with its unit, as on an axis. */
-export const titled = (name: string, unit: string): string =>
-  unitText(unit) === "" ? name : `${name} (${unitText(unit)})`;
+export const titled = (name: string, unit: string): string => name + unitText(unit).replace(/ (.+)/, " ($1)");
+
+/** `camelCase` as words. */
+export const spaced = (name: string, gap = " "): string =>
+  name.replace(/(?<=[a-z])[A-Z]/g, (letter) => gap + letter.toLowerCase());
 
 /** The mark of the i-th of several things, as base 36 has them: a to z, then 10, 11 and so on. */
 export const letterOf = (i: number): string => (i + 10).toString(36);

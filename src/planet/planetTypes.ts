@@ -5,6 +5,7 @@ import type { PlanetFacts } from "./facts.ts";
 import type { PlanetInput } from "./planetInput.ts";
 import type { PlanetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
+import type { WrittenUnit } from "./writtenUnits.ts";
 
 /**
  * The names of a planet's loop: its givens are the paths of its inputs. A coupling is there where the description lets that
@@ -37,6 +38,8 @@ export interface Planet {
   readonly loop: Loop<PlanetNames>;
   /** All numeric values of the description in SI. */
   readonly inputs: readonly PlanetInput[];
+  /** The units in which they are written: with `units` a diagram is drawn in these. */
+  readonly units: readonly WrittenUnit[];
   /** Stellar flux normal to the beam in the mean over the orbit, W m⁻²: S, not S/4. */
   readonly flux: number;
   /** Null where the albedo answers to temperature: then each state has its own, in `report.equilibriumTemperature`. */

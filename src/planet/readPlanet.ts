@@ -10,6 +10,7 @@ import { factsOf } from "./facts.ts";
 import { planetLoop } from "./planetLoop.ts";
 import type { Planet } from "./planetTypes.ts";
 import { unusedNotes } from "./unusedNotes.ts";
+import { writtenUnits } from "./writtenUnits.ts";
 
 /** How to read. */
 export interface ReadPlanetOptions {
@@ -61,6 +62,7 @@ export function readPlanet(description: unknown, options: ReadPlanetOptions = {}
     ...frozen({
       description: checked.description,
       inputs,
+      units: writtenUnits(inputs),
       flux: trial.flux as number,
       equilibriumTemperature:
         assumptions.albedo === null ? null : { ...equilibriumTemperature, internalFlux: internalHeat },

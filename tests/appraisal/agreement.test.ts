@@ -120,12 +120,15 @@ describe("climates", () => {
   });
 
   test("have the margins and the diagram of their luminosity between 0.4 and 2.5 times today's", () => {
-    const { states, diagram } = appraisePlanet(snowy());
+    const { states, diagram: appraised } = appraisePlanet(snowy());
     const planet = readPlanet(snowy());
     const along = "star.luminosity";
     const now = 0.2 * SUN;
     const between = [0.4 * now, 2.5 * now] as const;
+    const { units, ...diagram } = appraised as NonNullable<typeof appraised>;
     expect(diagram).toEqual(traceBranches(planet.loop, { along, between, within, tolerance: 5e-4 }));
+    expect(units).toContainEqual({ name: along, unit: "solLum", size: SUN });
+    expect(units.map(({ name }) => name).sort()).toEqual([along, ...Object.keys(diagram.fixed)].sort());
     const rate = planet.facts.stars[0]?.brightening as number;
     const asked = states.map(({ state }) =>
       state.stability === "stable"
@@ -234,7 +237,13 @@ test("a radius with a temperature gives the margins of the same luminosity", () 
   const star = { luminosity: { value, unit: "W" }, mass: "0.72 solMass" };
   const [a, b] = [appraisePlanet(byRadius), appraisePlanet({ ...byRadius, star })];
   expect(a.states.map(({ margins }) => margins)).toEqual(b.states.map(({ margins }) => margins));
-  expect(a.diagram).toEqual(b.diagram);
+  const [traced, told] = [a, b].map(({ diagram }) => diagram as NonNullable<typeof diagram>);
+  // a luminosity that follows is shown in those of the Sun, one that is written as it is written
+  expect(told?.units[0]).toEqual({ name: "star.luminosity", unit: "W", size: 1 });
+  expect(traced).toEqual({
+    ...told,
+    units: [{ ...told?.units[0], unit: "solLum", size: SUN }, ...(told?.units.slice(1) ?? [])],
+  });
   expect(a.ownLimits).toEqual(b.ownLimits);
   expect(a.ownLimits.length).toBeGreaterThan(0);
 });

@@ -75,7 +75,7 @@ describe("heating and cooling", () => {
     const heights = layer(chart, "cooling").items.map((i) => i.y);
     expect(box.y).toBeLessThan(Math.min(...heights));
     expect(box.y2).toBeGreaterThan(Math.max(...heights));
-    expect(chart.caption).toEqual(["3 states at 150 to 400 K, partial, 1 undecided"]);
+    expect(chart.caption).toEqual(["States at 150 to 400 K: 3, partial, undecided: 1"]);
   });
 
   test("points that are not finite are left out and counted, with those that the budget lost", () => {
@@ -88,7 +88,7 @@ describe("heating and cooling", () => {
   });
 
   test("one state, and none", () => {
-    expect(statesChart({ ...found, states: [state] }).caption[0]).toContain("1 states at 150 to 400 K");
+    expect(statesChart({ ...found, states: [state] }).caption[0]).toContain("States at 150 to 400 K: 1, ");
     expect(statesChart({ ...found, states: [] }).layers.flatMap((l) => l.name ?? [])).toEqual([]);
   });
 });
@@ -162,7 +162,7 @@ describe("the branch diagram", () => {
       y2: 252,
       tip: "continuum",
     });
-    expect(chart.caption[0]).toMatch(/^1000 branches, partial, 1 undecided/);
+    expect(chart.caption[0]).toMatch(/^Branches: 1000, partial, undecided: 1/);
   });
 
   test("a state without the given is left out and counted", () => {
@@ -194,7 +194,7 @@ describe("the bars of feedbacks", () => {
 
   test("loops that are not listed are one bar more", () => {
     const others = { count: 7, feedbackParameter: 0.25, feedbackParameterRange: null, feedbackFactor: null };
-    expect(texts(feedbackBars({ ...feedbacks, others }))).toContain("+0.25  7 weaker loops");
+    expect(texts(feedbackBars({ ...feedbacks, others }))).toContain("+0.25  weaker loops: 7");
   });
 });
 
@@ -311,10 +311,8 @@ describe("many planets", () => {
     });
     expect(drawn.sort()).toEqual(expected.sort());
     expect(layer(plot, "unstable").look.open).toBe(true);
-    const counts = [1, 3].map(
-      (n) => `planets with ${n} states: ${columns.counts.filter((c) => c === n).length}`,
-    );
-    expect(plot.caption).toEqual([counts.join(", ")]);
+    const counts = [1, 3].map((n) => `${columns.counts.filter((c) => c === n).length} with ${n}`);
+    expect(plot.caption).toEqual([`planets by number of states: ${counts.join(", ")}`]);
   });
 
   test("of very many one in some is drawn, and said; a missing flux is counted", () => {
@@ -334,7 +332,7 @@ describe("many planets", () => {
     });
     expect(layer(plot, "stable").items).toHaveLength(2500 - 2);
     expect(plot.caption).toEqual([
-      "planets with 1 states: 10000",
+      "planets by number of states: 10000 with 1",
       "Drawn is one state in 4",
       "Left out, as not finite or outside: 2",
     ]);

@@ -74,7 +74,7 @@ test("units follow the place of a field: nested parameters have theirs, and colu
 
 test("long lists are cut, and say so", () => {
   const rows = Array.from({ length: 100 }, (_, i) => ({ name: `n${i}`, value: i }));
-  expect(toText(rows)).toContain("rows, without 40 more:");
+  expect(toText(rows)).toContain("values, without 40 more:");
   expect(toText(rows)).not.toContain("n60");
 });
 
@@ -203,8 +203,10 @@ describe("whatever it is handed", () => {
   });
 
   test("what is not known is JSON, cut short, as plain text only", () => {
-    expect(formsOf({ a: [1, 2] })).toEqual({ "text/plain": '{  "a": [   1,   2  ] }' });
-    expect((formsOf("x".repeat(5000))["text/plain"] as string).length).toBeLessThan(2010);
+    const said = "No result that docs/charts.md lists, as JSON:";
+    expect(formsOf({ a: [1, 2] })).toEqual({ "text/plain": `${said}\n\n{  "a": [   1,   2  ] }` });
+    expect(toHTML(null)).toBe(`<p>${said}</p>\n<p>null</p>`);
+    expect((formsOf("x".repeat(5000))["text/plain"] as string).length).toBeLessThan(2010 + said.length);
     expect(toSVG({ a: 1 })).toBeNull();
     expect(toVegaLite(results.rows)).toBeNull();
   });

@@ -1,0 +1,23 @@
+// The units in which the values of a description are written, for those who show them to its author.
+import { inSI } from "./inSI.ts";
+import type { PlanetInput } from "./planetInput.ts";
+
+/** In which unit a value is written. */
+export interface WrittenUnit {
+  /** The path of the input, which is the name of a given. */
+  readonly name: string;
+  /** As in the description, such as `au`; that of the SI where the written one has a zero point of its own. */
+  readonly unit: string;
+  /** One of it in the SI. */
+  readonly size: number;
+}
+
+/** The units of all inputs. */
+export const writtenUnits = (inputs: readonly PlanetInput[]): WrittenUnit[] =>
+  inputs.map(({ path, unit: si, written }) => {
+    // the unit stands last, after the number and its errors
+    const unit = / ([A-Za-z].*)$/.exec(written)?.[1];
+    if (si === "1" || unit === undefined) return { name: path, unit: si, size: 1 };
+    const inUnit = (value: number) => inSI(value, unit, { unit: si, difference: false }, path);
+    return inUnit(0) === 0 ? { name: path, unit, size: inUnit(1) } : { name: path, unit: si, size: 1 };
+  });

@@ -10,6 +10,11 @@ interface DerivativeOf {
   readonly id: number;
   readonly args: readonly number[];
   readonly d: readonly (number | undefined)[];
+  /** The first two of both. */
+  readonly a: number;
+  readonly b: number;
+  readonly da: number;
+  readonly db: number | undefined;
 }
 
 /**
@@ -25,14 +30,27 @@ export function derivative(g: Graph, node: number, wrt: number, held: Iterable<n
     if (known.has(id) || leaves.has(id)) continue;
     const args = g.args[id] as readonly number[];
     const d = args.map((a) => known.get(a));
-    if (d.some((x) => x !== undefined)) known.set(id, RULES[g.ops[id] as Op]({ w, id, args, d }));
+    if (d.some((x) => x !== undefined))
+      known.set(
+        id,
+        RULES[g.ops[id] as Op]({
+          w,
+          id,
+          args,
+          d,
+          a: args[0] as number,
+          b: args[1] as number,
+          da: d[0] as number,
+          db: d[1],
+        }),
+      );
   }
   return known.get(node) ?? g.constant(0);
 }
 
 /** Records the arithmetic of derivatives, with the simplifications that only they may use. */
 export class Writer {
-  readonly g: Graph;
+  declare readonly g: Graph;
   constructor(g: Graph) {
     this.g = g;
   }
@@ -59,38 +77,36 @@ export class Writer {
   /** a·d where d may be zero. */
   times = (a: number, d: number | undefined): number | undefined =>
     d === undefined ? undefined : this.mul(a, d);
+  /** The derivatives of what is chosen where a < b, and elsewhere. */
+  choose = (op: "pick" | "jump", a: number, b: number, first?: number, second?: number): number =>
+    this.g.node(op, [a, b, this.zeroIfNone(first), this.zeroIfNone(second)]);
 }
-
-const first = (x: DerivativeOf): number => x.d[0] as number;
-const arg = (x: DerivativeOf, i: number): number => x.args[i] as number;
-const choose = (op: "pick" | "jump", x: DerivativeOf, a: number, b: number, i: number): number =>
-  x.w.g.node(op, [a, b, x.w.zeroIfNone(x.d[i]), x.w.zeroIfNone(x.d[i + 1])]);
 
 /** One rule for each operation; a missing one does not compile. */
 const RULES: Readonly<Record<Op, Rule>> = {
   const: () => 0,
   input: () => 0,
-  mean: first,
-  neg: (x) => x.w.neg(first(x)),
-  add: (x) => x.w.add(x.d[0], x.d[1]),
-  sub: (x) => x.w.sub(x.d[0], x.d[1]),
-  mul(x) {
-    if (arg(x, 0) === arg(x, 1)) return x.w.mul(x.w.mul(x.w.constant(2), arg(x, 0)), first(x));
-    return x.w.add(x.w.times(arg(x, 1), x.d[0]), x.w.times(arg(x, 0), x.d[1]));
-  },
+  mean: (x) => x.da,
+  neg: (x) => x.w.neg(x.da),
+  add: (x) => x.w.add(x.da, x.db),
+  sub: (x) => x.w.sub(x.da, x.db),
+  mul: (x) =>
+    x.a === x.b
+      ? x.w.mul(x.w.mul(x.w.constant(2), x.a), x.da)
+      : x.w.add(x.w.times(x.b, x.da), x.w.times(x.a, x.db)),
   // (a/b)′ = (a′ − (a/b)·b′)/b
-  div: (x) => x.w.g.node("div", [x.w.sub(x.d[0], x.w.times(x.id, x.d[1])), arg(x, 1)]),
-  sqrt: (x) => x.w.g.node("div", [first(x), x.w.mul(x.w.constant(2), x.id)]),
-  exp: (x) => x.w.mul(x.id, first(x)),
-  log: (x) => x.w.g.node("div", [first(x), arg(x, 0)]),
+  div: (x) => x.w.g.node("div", [x.w.sub(x.da, x.w.times(x.id, x.db)), x.b]),
+  sqrt: (x) => x.w.g.node("div", [x.da, x.w.mul(x.w.constant(2), x.id)]),
+  exp: (x) => x.w.mul(x.id, x.da),
+  log: (x) => x.w.g.node("div", [x.da, x.a]),
   // 1 − tanh², from the node itself
-  tanh: (x) => x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), first(x)),
-  min: (x) => choose("pick", x, arg(x, 0), arg(x, 1), 0),
-  max: (x) => choose("pick", x, arg(x, 1), arg(x, 0), 0),
+  tanh: (x) => x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), x.da),
+  min: (x) => x.w.choose("pick", x.a, x.b, x.da, x.db),
+  max: (x) => x.w.choose("pick", x.b, x.a, x.da, x.db),
   // zero on both sides, and none at the leap
-  step: (x) => x.w.g.node("jump", [arg(x, 0), ...[0, 0, 0].map(x.w.constant)]),
-  pick: (x) => choose("jump", x, arg(x, 0), arg(x, 1), 2),
-  jump: (x) => choose("jump", x, arg(x, 0), arg(x, 1), 2),
+  step: (x) => x.w.choose("jump", x.a, x.w.constant(0)),
+  pick: (x) => x.w.choose("jump", x.a, x.b, x.d[2], x.d[3]),
+  jump: (x) => x.w.choose("jump", x.a, x.b, x.d[2], x.d[3]),
   call(x) {
     const { g } = x.w;
     const { partial } = g.functions[g.values[x.id] as number] as Graph["functions"][number];

@@ -7,7 +7,7 @@ import type { Search } from "./search.ts";
 /** In boxes wider than this many times `fine`, the curvature decides too little to be read. */
 const BENT = 4;
 /** The same where reading it is dear. */
-const BENT_IF_DEAR = 1 / 64;
+const BENT_IF_DEAR = 0.015625;
 
 /**
  * Tries, over the box between two places that the reader's piece was read over: the sign of the value; monotony with proved

@@ -41,9 +41,9 @@ declare const names: unique symbol;
 export class Quantity<out N extends string = string> {
   declare readonly [names]: N;
   /** @internal */
-  readonly graph: Recorder;
+  declare readonly graph: Recorder;
   /** @internal */
-  readonly id: number;
+  declare readonly id: number;
   /** @internal */
   constructor(graph: Recorder, id: number) {
     this.graph = graph;

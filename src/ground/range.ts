@@ -10,8 +10,8 @@ export const showRange = (range: Range): string => range.join(" to ");
 /** Returns `value` if it is a finite number in the range; otherwise an error names the field, the range and the unit. */
 export function checkedNumber(value: unknown, path: string, unit: string, within?: Range): number {
   const finite = Number.isFinite(value);
-  const x = value as number;
-  if (finite && (!within || (x >= within[0] && x <= within[1]))) return x;
+  const [low, high] = within ?? [-Infinity, Infinity];
+  if (finite && (value as number) >= low && (value as number) <= high) return value as number;
   const code = finite ? "out-of-range" : value === undefined ? "missing" : "not-a-number";
   return fail(code, { path, value, allowed: within ? showRange(within) : "a finite number", unit });
 }

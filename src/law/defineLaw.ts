@@ -2,7 +2,7 @@
 import type { LawCard, Port, Ports } from "../graph/card.ts";
 import { type DemandValue, Quantity } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
-import { checkedNumber } from "../ground/range.ts";
+import { checkedNumber, type Range } from "../ground/range.ts";
 import type { Body, Law, LawFacts, LawSpec } from "./types.ts";
 import { isList, wire } from "./wiring.ts";
 
@@ -36,12 +36,14 @@ export function defineLaw<const I extends Ports>(spec: LawSpec<I>): Law<I> {
     });
     return graph ? graph.lawNode(card, flat, run) : checkedResult(card, run().result);
   };
-  return Object.assign(spec.demands ? law : fastPath(spec, law), { card }) as unknown as Law<I>;
+  return Object.assign(spec.demands ? law : fastPath(inputs, write, law), { card }) as unknown as Law<I>;
 }
 
 /** The card of a law from its facts. */
 export const cardOf = <I extends Ports>(facts: LawFacts<I>, sampled: boolean): LawCard<I> =>
   Object.freeze({ about: "", source: "", published: {}, ...facts, sampled }) as LawCard<I>;
+
+const ANY: Range = [-Infinity, Infinity];
 
 type Wired = Readonly<Record<string, unknown>>;
 
@@ -50,17 +52,15 @@ type Wired = Readonly<Record<string, unknown>>;
  * takes the slow path, which either records a quantity or throws the error that says what is wrong.
  */
 function fastPath<I extends Ports>(
-  { inputs, write }: LawSpec<I>,
+  inputs: I,
+  write: LawSpec<I>["write"],
   slow: (wires: Wired) => unknown,
 ): (wires: Wired) => unknown {
   const ports = Object.entries(inputs) as [string, Port][];
   if (ports.some(([, p]) => isList(p) || p.optional)) return slow;
-  const { MAX_VALUE } = Number;
-  const limits = ports.map(
-    ([name, { within: [low, high] = [-MAX_VALUE, MAX_VALUE], default: fallback }]) => ({
-      ...{ name, low, high, fallback },
-    }),
-  );
+  const limits = ports.map(([name, { within: [low, high] = ANY, default: fallback }]) => {
+    return { name, low, high, fallback };
+  });
   return (wires) => {
     let unmatched = 0;
     for (const _ in wires) unmatched++;
@@ -71,7 +71,8 @@ function fastPath<I extends Ports>(
         value = fallback;
         body = { ...body, [name]: value };
       } else unmatched--;
-      if (!(typeof value === "number" && value >= low && value <= high)) return slow(wires);
+      if (!(Number.isFinite(value) && (value as number) >= low && (value as number) <= high))
+        return slow(wires);
     }
     const result = unmatched === 0 ? write(body as Body<I>) : undefined;
     return Number.isFinite(result) ? result : slow(wires);

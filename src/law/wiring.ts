@@ -30,8 +30,8 @@ export function wire(law: string, ports: Ports, wires: unknown): Wiring {
     if (wired instanceof Quantity) {
       graph ??= wired.graph;
       graph.checkWire(wired, port.unit, path);
-      flat[name] = wired;
-    } else flat[name] = checkedNumber(wired, path, port.unit, port.within);
+    } else checkedNumber(wired, path, port.unit, port.within);
+    flat[name] = wired as number | Quantity;
     return wired;
   };
   const connectAll = (named: Ports, given: unknown, prefix: string): Record<string, unknown> => {

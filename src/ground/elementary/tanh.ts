@@ -1,6 +1,6 @@
 import { productError, sumError } from "./errorFree.ts";
 import { expPair, expParts } from "./expPair.ts";
-import { powerOfTwo } from "./powersOfTwo.ts";
+import { scale } from "./powersOfTwo.ts";
 
 /** From here on 1 − tanh x is at most half the spacing of doubles under 1. */
 const SATURATED = 19.0615474653985;
@@ -13,8 +13,7 @@ const SATURATED = 19.0615474653985;
  */
 export function tanh(x: number): number {
   const a = Math.abs(x);
-  if (!(a < SATURATED)) return Math.sign(x);
-  if (a === 0) return x;
+  if (!(a > 0 && a < SATURATED)) return Math.sign(x);
   const value = a < 1 / 16 ? series(a) : quotient(a);
   return x < 0 ? -value : value;
 }
@@ -27,9 +26,9 @@ function series(a: number): number {
 }
 
 function quotient(a: number): number {
-  const unit = powerOfTwo(expPair(2 * a, 0));
-  const high = (expParts[0] as number) * unit;
-  const low = (expParts[1] as number) * unit;
+  const m = expPair(2 * a, 0);
+  const high = scale(expParts[0] as number, m);
+  const low = scale(expParts[1] as number, m);
   const above = high - 1;
   const aboveTail = sumError(high, -1, above) + low;
   const below = high + 1;

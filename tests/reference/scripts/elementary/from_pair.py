@@ -9,11 +9,9 @@ from source import check_near, constants_of, lines_of, run, run_exactly
 
 NEAR = mp.mpf(2) ** -50
 EXPM1_M = "const m = expPair(x, 0)"
-EXPM1_HIGH = "const high = scale(expParts[0] as number, m)"
-EXPM1_LOW = "const low = scale(expParts[1] as number, m)"
-TANH_UNIT = "const unit = powerOfTwo(expPair(2 * a, 0))"
-TANH_HIGH = "const high = (expParts[0] as number) * unit"
-TANH_LOW = "const low = (expParts[1] as number) * unit"
+TANH_M = "const m = expPair(2 * a, 0)"
+HIGH = "const high = scale(expParts[0] as number, m)"
+LOW = "const low = scale(expParts[1] as number, m)"
 TANH_RATIO = "const ratio = above / below"
 EIGHTH = mp.mpf(2) ** (mp.mpf(1) / 8)
 
@@ -56,14 +54,14 @@ def check_meaning():
     for x in map(mp.mpf, ("-30", "-1", "-0.016", "0.07", "1", "3.3", "17", "600")):
         upper = mp.mpf(float(mp.exp(x)))
         lower = mp.exp(x) - upper
-        given = {EXPM1_M: None, EXPM1_HIGH: upper, EXPM1_LOW: lower}
+        given = {EXPM1_M: None, HIGH: upper, LOW: lower}
         check_near(run_exactly("expm1.ts", "difference", {}, given)["return"], mp.expm1(x), -390, "expm1")
         if 0 < x < 20:
             upper = mp.mpf(float(mp.exp(2 * x)))
             lower = mp.exp(2 * x) - upper
             # the quotient is corrected to the second order of its rounding
             ratio = mp.mpf(float((upper - 1) / (upper + 1)))
-            given = {TANH_UNIT: None, TANH_HIGH: upper, TANH_LOW: lower, TANH_RATIO: ratio}
+            given = {TANH_M: None, HIGH: upper, LOW: lower, TANH_RATIO: ratio}
             check_near(run_exactly("tanh.ts", "quotient", {}, given)["return"], mp.tanh(x), -98, "tanh")
 
 
@@ -89,7 +87,7 @@ def expm1_bounds(pair):
     difference = mp.mpf(0)
     for low, high in [*up, *down]:
         upper, lower = parts(low, high, pair)
-        given = {EXPM1_M: None, EXPM1_HIGH: upper, EXPM1_LOW: lower}
+        given = {EXPM1_M: None, HIGH: upper, LOW: lower}
         done = run("expm1.ts", "difference", literal, names({}), given)
         difference = max(difference, in_ulps(done["return"]))
     return tiny, series, difference
@@ -98,8 +96,8 @@ def expm1_bounds(pair):
 def tanh_bounds(pair):
     """Where it is x, by series, from the pair, and where it is 1."""
     expect(
-        "tanh.ts", "tanh", "if (a === 0) return x", "const value = a < 1 / 16 ? series(a) : quotient(a)",
-        "if (!(a < SATURATED)) return Math.sign(x)",
+        "tanh.ts", "tanh", "const value = a < 1 / 16 ? series(a) : quotient(a)",
+        "if (!(a > 0 && a < SATURATED)) return Math.sign(x)",
     )
     constants = constants_of("tanh.ts")
     # below 2^-27 the series takes less than half the spacing under a away from it (c1 is -1/3 but for its rounding
@@ -143,7 +141,7 @@ def quotient_bound(low, high, pair):
         rest, tail, below = known["rest"], lower, known["below"]
         return result.with_rest(2 * (rest.size + rest.error()) * (tail.size + tail.error()) / below.least**2)
 
-    given = {TANH_UNIT: None, TANH_HIGH: upper, TANH_LOW: lower, TANH_RATIO: ratio}
+    given = {TANH_M: None, HIGH: upper, LOW: lower, TANH_RATIO: ratio}
     adjust = {name: keep(name) for name in ("below", "back", "rest")}
     adjust.update({"gap": narrow, "return": truncated})
     return in_ulps(run("tanh.ts", "quotient", literal, names({}), given, adjust)["return"])

@@ -14,10 +14,10 @@ export interface WrittenUnit {
 
 /** The units of all inputs. */
 export const writtenUnits = (inputs: readonly PlanetInput[]): WrittenUnit[] =>
-  inputs.map(({ path, unit: si, written }) => {
+  inputs.map(({ path: name, unit, written }) => {
     // the unit stands last, after the number and its errors
-    const unit = / ([A-Za-z].*)$/.exec(written)?.[1];
-    if (si === "1" || unit === undefined) return { name: path, unit: si, size: 1 };
-    const inUnit = (value: number) => inSI(value, unit, { unit: si, difference: false }, path);
-    return inUnit(0) === 0 ? { name: path, unit, size: inUnit(1) } : { name: path, unit: si, size: 1 };
+    const own = unit === "1" ? undefined : / ([A-Za-z].*)$/.exec(written)?.[1];
+    // a degree Celsius stands alone
+    if (own === undefined || own === unit || own === "degC") return { name, unit, size: 1 };
+    return { name, unit: own, size: inSI(1, own, { unit, difference: false }, name) };
   });

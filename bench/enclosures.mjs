@@ -23,7 +23,7 @@ export function enclosures(core, name, columns, count) {
   const readings = (how) => {
     const { net, set } = core.enclosedBalance(loop);
     set(givens, givens);
-    const { size, point, box, bend } = net.ends;
+    const { size, point, box, bend } = net;
     const ends = Array.from({ length: ENDS + 4 }, (_, i) => {
       const end = new Float64Array(size);
       end[0] = 200 + i;

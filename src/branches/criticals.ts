@@ -1,6 +1,6 @@
 // Where λ passes zero along a curve: folds, corner folds, and what cannot be decided.
 import type { Range } from "../ground/range.ts";
-import { type Enclosed, type Sign, signOf } from "../search/enclosed.ts";
+import { type Ends, type Sign, signOf } from "../search/enclosed.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import type { DoubtKind } from "../search/enumeration.ts";
 
@@ -26,10 +26,10 @@ const KINK_EFFORT = 60;
 
 /** λ along a curve as a function of temperature, and what is zero at its kinks and leaps. */
 export interface Feedback {
-  readonly feedback: Enclosed;
-  readonly kinks: readonly Enclosed[];
+  readonly feedback: Ends;
+  readonly kinks: readonly Ends[];
   /** Those of the kinks at which the curve itself leaps. */
-  readonly leaps: readonly Enclosed[];
+  readonly leaps: readonly Ends[];
 }
 
 /** The critical places of a curve in a range of temperature, by rising temperature: zeros of λ, and kinks where its sign changes. */
@@ -79,16 +79,16 @@ function joined(list: readonly Critical[]): Critical[] {
 }
 
 /** Whether λ is proved to have opposite signs at both ends: then the curve turns in between. */
-function changesSign(feedback: Enclosed, [low, high]: Range): boolean {
+function changesSign(feedback: Ends, [low, high]: Range): boolean {
   if (high - low > CORNER_WIDTH) return false;
   const before = signAt(feedback, low);
   return before !== 0 && before === -signAt(feedback, high);
 }
 
-const values = /* @__PURE__ */ new Float64Array(6);
-
 /** The proved sign of a function at a place. */
-export function signAt(f: Enclosed, x: number): Sign {
-  f.point(x, values);
-  return signOf(values[0] as number, values[1] as number, values[2] as number);
+export function signAt({ size, at, point }: Ends, x: number): Sign {
+  const end = new Float64Array(size);
+  end[0] = x;
+  point(end);
+  return signOf(end[at] as number, end[at + 1] as number, end[at + 2] as number);
 }

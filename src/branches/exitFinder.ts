@@ -40,7 +40,7 @@ export function exitFinder(loop: Loop, place: number) {
     if (signOfRange(rangeAt(out, 0)) === 0 || !rest(stretch, near)) return undefined;
     line.values.set([edge, ...givens]);
     const fine = parameters[1] - parameters[0];
-    const { zeros, undecided } = enumerateZeros(line, parameters, { effort: LINE_EFFORT, fine });
+    const { zeros, undecided } = enumerateZeros(line.ends, parameters, { effort: LINE_EFFORT, fine });
     const [zero] = zeros;
     if (!zero || zeros.length > 1 || undecided.length > 0) return undefined;
     return endOf("within", [edge, edge], zero.bracket);

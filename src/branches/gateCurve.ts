@@ -7,7 +7,8 @@ import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { type Sign, signOf } from "../search/enclosed.ts";
-import { balanceOf, type EnclosedBalance } from "../states/enclosedBalance.ts";
+import type { EnclosedBalance } from "../states/enclosedBalance.ts";
+import { kinksOf } from "../states/enclosedKinks.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import { gateLine } from "./gateLine.ts";
@@ -64,7 +65,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
   const line = gateLine(loop, nodes);
   const answer = answerOf(loop, nodes.answer);
   const kernel = valueKernel(graph, { inputs, outputs: [nodes.curve, nodes.feedback] });
-  const { kinks, leaps, set: setKinks } = balanceOf(loop);
+  const { kinks, leaps, set: setKinks } = kinksOf(loop);
   const values = new Float64Array(inputs.length);
   const out = new Float64Array(2);
   const set: number[] = [];

@@ -5,15 +5,14 @@ import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { type EnclosureKernel, enclosureKernel } from "../reading/enclosureKernel.ts";
 import { type SpanKernel, spanKernel } from "../reading/spanKernel.ts";
-import { above, type Enclosed } from "../search/enclosed.ts";
+import { above, atOnce, type Ends } from "../search/enclosed.ts";
 import { minus, plus, rangeAt } from "../search/interval.ts";
-import { enclosedByEnds } from "../states/enclosedBy.ts";
 
 /** The gate less its curve, over temperature. */
 export interface GateLine {
-  readonly distance: Enclosed;
+  readonly distance: Ends;
   /** h′ = λ/b on the curve. */
-  readonly slope: Enclosed;
+  readonly slope: Ends;
   /** Sets the givens, in order, and bounds of the gate. */
   set(givens: ArrayLike<number>, gate: Range): void;
   /** Proved bounds of the curve over temperatures, the closer the nearer the gate is to it. */
@@ -43,17 +42,17 @@ export function gateLine(loop: Loop, { gate, curve }: { gate: number; curve: num
     for (let i = 0; i < count; i++) out[i] = span[from + i] as number;
   };
   const ends = { size, point };
-  const distance = enclosedByEnds({
+  const distance: Ends = {
     ...{ ...ends, at: 1 },
     box(left, right, out) {
       readSpan(left, right, span);
       copy(0, out, 6);
     },
     bend: (_left, _right, out) => copy(6, out, 3),
-  });
+  };
   // few diagrams need the curvature of λ
   let third: EnclosureKernel | undefined;
-  const slope = enclosedByEnds({
+  const slope: Ends = {
     ...{ ...ends, at: 4, bendIsDear: true },
     box(left, right, out) {
       readSpan(left, right, span);
@@ -66,7 +65,8 @@ export function gateLine(loop: Loop, { gate, curve }: { gate: number; curve: num
       high[0] = right[0] as number;
       third(low, high, out);
     },
-  });
+  };
+  const read = atOnce(distance);
   const box = new Float64Array(9);
   const middle = new Float64Array(6);
   return {
@@ -80,8 +80,8 @@ export function gateLine(loop: Loop, { gate, curve }: { gate: number; curve: num
     },
     // plain, or from the value in the middle and the slope (mean value form)
     curveOver(from, to) {
-      distance.box(from, to, box);
-      distance.point(from + (to - from) / 2, middle);
+      read.box(from, to, box);
+      read.point(from + (to - from) / 2, middle);
       const [falling, rising] = rangeAt(box, 1);
       const reach = above(above(Math.max(-falling, rising) * above(to - from)) / 2);
       const mean = plus(rangeAt(middle, 0), [-reach, reach]);

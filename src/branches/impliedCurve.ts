@@ -5,7 +5,7 @@ import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import type { Enclosed } from "../search/enclosed.ts";
+import { type Ends, endsOf } from "../search/enclosed.ts";
 import { meet, minus, over, plus, rangeAt, signOfRange, times } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
@@ -114,14 +114,14 @@ export function impliedCurve(loop: Loop, along: string): Curve {
     const slope = plus(rangeAt(out, 3), times(rangeAt(out, 4), turning));
     into.set([feedback[0], feedback[1], 0, slope[0], slope[1], 0]);
   };
-  const feedback: Enclosed = {
+  const feedback: Ends = endsOf({
     box(a, b, into) {
       feedbackOver([a, b], into);
       // the curvature is not read
       into.fill(Number.NaN, 6, 9);
     },
     point: (t, into) => feedbackOver([t, t], into),
-  };
+  });
   return {
     method: "monotone",
     reachesBeyond: false,

@@ -3,11 +3,13 @@ import { derivative } from "../graph/derivative.ts";
 import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
-import type { Enclosed } from "../search/enclosed.ts";
+import { type Enclosed, type Ends, endsOf } from "../search/enclosed.ts";
 
 /** A node along an input; the other inputs are read from `values`, in order, whenever it is read. */
 export interface Line extends Enclosed {
   readonly values: Float64Array;
+  /** The same, to be searched. */
+  readonly ends: Ends;
 }
 
 /** The line of a node; `along` is the place of the input among the loop's inputs. */
@@ -27,8 +29,7 @@ export function lineOf(loop: Loop, node: number, along: number): Line {
   const point = enclosureKernel(graph, { inputs, outputs: [node, slope], wide: new Set(), ranges });
   const values = new Float64Array(inputs.length);
   const high = new Float64Array(inputs.length);
-  return {
-    values,
+  const line: Enclosed = {
     box(a, b, out) {
       values[along] = a;
       high[along] = b;
@@ -39,4 +40,5 @@ export function lineOf(loop: Loop, node: number, along: number): Line {
       point(values, values, out);
     },
   };
+  return { ...line, values, ends: endsOf(line) };
 }

@@ -48,11 +48,11 @@ function enclosed(loop: Loop, place: number): Solver {
     const cuts: number[] = [];
     for (const kink of kinks) {
       kink.values.set(values);
-      for (const { bracket } of enumerateZeros(kink, within, { effort: KINK_EFFORT, fine }).zeros)
+      for (const { bracket } of enumerateZeros(kink.ends, within, { effort: KINK_EFFORT, fine }).zeros)
         cuts.push(...bracket);
     }
     line.values.set(values);
-    const { zeros, undecided, boxes, points } = enumerateZeros(line, within, { effort, fine, cuts });
+    const { zeros, undecided, boxes, points } = enumerateZeros(line.ends, within, { effort, fine, cuts });
     return { zeros, undecided: undecided.map(plain), cost: { boxes, points } };
   };
 }

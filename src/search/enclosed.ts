@@ -13,11 +13,9 @@ export interface Enclosed {
   box(a: number, b: number, out: Float64Array): void;
   /** Writes value and slope at x: 6 numbers. Where boxes on both sides of x have curvatures, the slope is the one they share. */
   point(x: number, out: Float64Array): void;
-  /** The same readings for less, where boxes share their ends. */
-  readonly ends?: Ends;
 }
 
-/** Readings of a function over boxes whose ends are read first. */
+/** The same readings by ends, which are read first, so that boxes share what is known of their ends. This is what is searched. */
 export interface Ends {
   /** How many numbers an end takes: x, which the caller writes; value and slope at x; and what boxes need of their ends. */
   readonly size: number;
@@ -32,9 +30,8 @@ export interface Ends {
   readonly bendIsDear?: boolean;
 }
 
-/** The ends of a function that is read box by box. */
+/** Reads a function by ends that is read at once. */
 export function endsOf(f: Enclosed): Ends {
-  if (f.ends) return f.ends;
   const [point, box] = [new Float64Array(6), new Float64Array(9)];
   return {
     ...{ size: 7, at: 1 },
@@ -48,6 +45,29 @@ export function endsOf(f: Enclosed): Ends {
     },
     bend(_left, _right, out) {
       for (let i = 0; i < 3; i++) out[i] = box[6 + i] as number;
+    },
+  };
+}
+
+/** Reads a function at once that is read by ends. */
+export function atOnce({ size, at, point, box, bend }: Ends): Enclosed {
+  const left = new Float64Array(size);
+  const right = new Float64Array(size);
+  const curvature = new Float64Array(3);
+  return {
+    point(x, out) {
+      left[0] = x;
+      point(left);
+      for (let i = 0; i < 6; i++) out[i] = left[at + i] as number;
+    },
+    box(a, b, out) {
+      left[0] = a;
+      right[0] = b;
+      point(left);
+      point(right);
+      box(left, right, out);
+      bend(left, right, curvature);
+      out.set(curvature, 6);
     },
   };
 }

@@ -2,7 +2,7 @@
 import { fail } from "../ground/errors.ts";
 import { decideBox } from "./decideBox.ts";
 import { doubtKind } from "./doubtKind.ts";
-import type { Enclosed } from "./enclosed.ts";
+import type { Ends } from "./enclosed.ts";
 import type { DoubtKind, Enumeration } from "./enumeration.ts";
 import type { Place } from "./reader.ts";
 import { roundoffAt } from "./roundoff.ts";
@@ -36,7 +36,7 @@ const NONE: readonly number[] = [];
  * Throws `out-of-range` if the range is not two rising finite numbers.
  */
 export function enumerateZeros(
-  f: Enclosed,
+  f: Ends,
   range: readonly [number, number],
   options: EnumerationOptions,
 ): Enumeration {
@@ -52,7 +52,7 @@ export function enumerateZeros(
 
 /** The same; what is found stays in the search, until the function is searched again. Allocates nothing unless in doubt. */
 export function searchZeros(
-  f: Enclosed,
+  f: Ends,
   range: readonly [number, number],
   { effort, cuts = NONE, guides = NONE, fine = 8 }: EnumerationOptions,
 ): Search {

@@ -1,7 +1,8 @@
 // Follows a zero of a function while the function changes, with proof.
 import { Bracket } from "./bracket.ts";
-import type { Sign } from "./enclosed.ts";
+import { endsOf, type Sign } from "./enclosed.ts";
 import type { Followed, Moving, Start, Underway } from "./moving.ts";
+import { readBox } from "./readBox.ts";
 import { Reader } from "./reader.ts";
 import { refineProved } from "./refineProved.ts";
 import { findTurning, proveTurning, type TurningPlace } from "./turning.ts";
@@ -25,7 +26,7 @@ const MOST_TILES = 5000;
  * just before it, and then proved to be gone just behind it.
  */
 export function followZero(f: Moving, start: Start, range: readonly [number, number]): Followed {
-  const reader = new Reader(f);
+  const reader = new Reader(endsOf(f));
   let at: Underway = { ...start, stage: 0 };
   let turning: TurningPlace | undefined;
   let [step, spread, suspect] = [1, FIRST_SPREAD, SUSPECT];
@@ -77,7 +78,7 @@ function tileTo(f: Moving, reader: Reader, { at, next, spread, range }: Tile): U
   const [low, high] = boxAround(reader, x, spread);
   if (!(low < high)) return "slope";
   if (low < range[0] || high > range[1]) return "outside";
-  if (reader.box(low, high).slopeSign !== at.slope) return "slope";
+  if (readBox(reader, low, high).slopeSign !== at.slope) return "slope";
   // overlapping boxes share their zero: the ends of what they share have proved signs, too
   const overlap = Math.max(low, at.low) < Math.min(high, at.high);
   const proved = signAt(reader, low) === -at.slope && signAt(reader, high) === at.slope;

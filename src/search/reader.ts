@@ -1,5 +1,5 @@
 // Reads enclosures into places and pieces, and counts the readings.
-import { above, below, bounded, type Enclosed, type Ends, endsOf, type Sign } from "./enclosed.ts";
+import { above, below, bounded, type Ends, type Sign } from "./enclosed.ts";
 
 // Numbers go from array to array: passed to a function or returned, each would be an object to collect.
 
@@ -61,7 +61,6 @@ export class Reader {
   readonly piece = new Piece();
   boxes = 0;
   points = 0;
-  readonly #f: Enclosed;
   readonly #ends: Ends;
   readonly #out = new Float64Array(9);
   readonly #bend = this.#out.subarray(6);
@@ -70,9 +69,8 @@ export class Reader {
   #left: Float64Array = NONE;
   #right: Float64Array = NONE;
 
-  constructor(f: Enclosed) {
-    this.#f = f;
-    this.#ends = endsOf(f);
+  constructor(ends: Ends) {
+    this.#ends = ends;
   }
 
   get bendIsDear(): boolean {
@@ -102,14 +100,6 @@ export class Reader {
     place.sign = widen(end, this.#ends.at, bounds, 0);
     place.slopeSign = widen(end, this.#ends.at + 3, bounds, 2);
     return place;
-  }
-
-  /** Reads value, slope and curvature over a box. */
-  box(a: number, b: number): Piece {
-    this.#f.box(a, b, this.#out);
-    this.#fill(this.piece);
-    this.#fillBend();
-    return this.piece;
   }
 
   /** Reads value and slope over the box between two places, into a piece of its own if one is given. */

@@ -1,6 +1,6 @@
 // A search under way, and what its parts share.
 import { Bracket } from "./bracket.ts";
-import type { Enclosed } from "./enclosed.ts";
+import type { Ends } from "./enclosed.ts";
 import type { UndecidedStretch } from "./enumeration.ts";
 import { mergeDoubts } from "./mergeDoubts.ts";
 import { type Place, Reader } from "./reader.ts";
@@ -8,7 +8,7 @@ import { refineProved } from "./refineProved.ts";
 import type { Stretch } from "./stretch.ts";
 import { Zero } from "./zero.ts";
 
-const known = /* @__PURE__ */ new WeakMap<Enclosed, Search>();
+const known = /* @__PURE__ */ new WeakMap<Ends, Search>();
 
 /** A function being searched: what is read and what is found, from left to right. Its parts are used again by later searches. */
 export class Search {
@@ -25,13 +25,13 @@ export class Search {
   readonly zeros: Zero[] = [];
   readonly #bracket: Bracket;
 
-  private constructor(f: Enclosed) {
+  private constructor(f: Ends) {
     this.reader = new Reader(f);
     this.#bracket = new Bracket(this.reader);
   }
 
   /** The search of a function, made once. */
-  static of(f: Enclosed): Search {
+  static of(f: Ends): Search {
     let search = known.get(f);
     if (!search) {
       search = new Search(f);

@@ -1,6 +1,6 @@
 // The turning point at which a followed zero meets another and vanishes: found, then proved.
 import { crossing } from "./crossing.ts";
-import type { Sign } from "./enclosed.ts";
+import { endsOf, type Sign } from "./enclosed.ts";
 import { enumerateZeros } from "./enumerateZeros.ts";
 import type { Moving, Turning, Underway } from "./moving.ts";
 import type { Reader } from "./reader.ts";
@@ -116,7 +116,7 @@ export function proveTurning(
 }
 
 function isEmpty(f: Moving, around: readonly [number, number]): boolean {
-  const { zeros, undecided } = enumerateZeros(f, around, { effort: PROOF_EFFORT });
+  const { zeros, undecided } = enumerateZeros(endsOf(f), around, { effort: PROOF_EFFORT });
   return zeros.length === 0 && undecided.length === 0;
 }
 

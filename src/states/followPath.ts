@@ -1,10 +1,11 @@
 // What becomes of a state while givens change slowly from one set of values to another.
 import type { Range } from "../ground/range.ts";
-import type { Sign } from "../search/enclosed.ts";
+import { endsOf, type Sign } from "../search/enclosed.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import type { ProvedZero } from "../search/enumeration.ts";
 import { followZero } from "../search/followZero.ts";
 import type { Moving, Start, Turning } from "../search/moving.ts";
+import { readBox } from "../search/readBox.ts";
 import { Reader } from "../search/reader.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { scanZeros } from "../search/scanZeros.ts";
@@ -57,7 +58,7 @@ export function followPath(
 
 /** The bracket of a state, widened until the signs at its ends and the sign of the slope between are known. */
 function startAt(f: Moving, x: number, [from, to]: Range): Start | undefined {
-  const reader = new Reader(f);
+  const reader = new Reader(endsOf(f));
   const place = reader.take();
   for (
     let gap = Math.max(Math.min((to - from) / 2, WIDEST_START / 1e3), 4 * roundoffAt(x));
@@ -65,7 +66,7 @@ function startAt(f: Moving, x: number, [from, to]: Range): Start | undefined {
     gap *= 4
   ) {
     const [low, high] = [x - gap, x + gap];
-    const slope = reader.box(low, high).slopeSign;
+    const slope = readBox(reader, low, high).slopeSign;
     if (slope === 0) continue;
     const below = reader.read(low, place).sign;
     if (below === -slope && reader.read(high, place).sign === slope) return { x, low, high, slope };
@@ -90,7 +91,7 @@ type Next = ProvedZero | "outside" | "undecided";
 
 /** The first zero in the direction of the drift: upwards where the balance is positive. */
 function provedNext(f: Moving, ahead: Range, sign: Sign): Next {
-  const { zeros, undecided } = enumerateZeros(f, ahead, { effort: NEXT_EFFORT });
+  const { zeros, undecided } = enumerateZeros(endsOf(f), ahead, { effort: NEXT_EFFORT });
   const zero = sign > 0 ? zeros[0] : zeros.at(-1);
   const doubt = sign > 0 ? undecided[0] : undecided.at(-1);
   const doubtFirst =

@@ -2,7 +2,7 @@
 import type { Range } from "../ground/range.ts";
 import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
-import type { Enclosed } from "../search/enclosed.ts";
+import type { Ends } from "../search/enclosed.ts";
 import { type EnumerationOptions, enumerateZeros, searchZeros } from "../search/enumerateZeros.ts";
 import type { Enumeration, ProvedZero } from "../search/enumeration.ts";
 import type { Search } from "../search/search.ts";
@@ -55,7 +55,7 @@ function cutsOf({ kinks, limits }: EnclosedBalance, within: Range, effort: numbe
   limits.effort = effort;
   if (cuts.length > 0) cuts.length = 0;
   for (let k = 0; k < kinks.length; k++) {
-    const { zeros, found } = searchZeros(kinks[k] as Enclosed, within, KINK_LIMITS);
+    const { zeros, found } = searchZeros(kinks[k] as Ends, within, KINK_LIMITS);
     for (let i = 0; i < found; i++) cuts.push((zeros[i] as Zero).low, (zeros[i] as Zero).high);
   }
   return limits;

@@ -4,6 +4,7 @@ import { gateCurve, gateNodes } from "../../src/branches/gateCurve.ts";
 import { gateLine } from "../../src/branches/gateLine.ts";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import * as core from "../../src/index.ts";
+import { atOnce } from "../../src/search/enclosed.ts";
 import { formulaLoop } from "./loops.ts";
 
 const { mul, sub } = core;
@@ -41,12 +42,12 @@ describe.each([2, -2])("b = %d", (b) => {
   const out = new Float64Array(9);
 
   test("the distance with its slope and curvature", () => {
-    line.distance.box(box[0], box[1], out);
+    atOnce(line.distance).box(box[0], box[1], out);
     expectHeld(out, [(t) => 0.5 - curve(t), slope, (t) => 12 - 12 * t * t], box);
   });
 
   test("the slope with its slope and curvature", () => {
-    line.slope.box(box[0], box[1], out);
+    atOnce(line.slope).box(box[0], box[1], out);
     expectHeld(out, [slope, (t) => 12 - 12 * t * t, (t) => -24 * t], box);
   });
 

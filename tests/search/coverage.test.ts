@@ -2,10 +2,10 @@
 import { describe, expect, test } from "vitest";
 import type { Enclosed } from "../../src/search/enclosed.ts";
 import { leastBetween } from "../../src/search/endpointForm.ts";
-import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
 import { randomNumbers } from "../graph/randomGraph.ts";
 import { enclosedBy } from "./jet.ts";
 import { cornered, doubtful, enclosed, ice, smooth } from "./problems.ts";
+import { zerosOf } from "./zerosOf.ts";
 
 interface Box {
   readonly a: number;
@@ -52,7 +52,7 @@ function decidable(f: Enclosed, { a, b, out }: Box): boolean {
 
 function uncovered(f: Enclosed, range: readonly [number, number], effort: number, cuts: readonly number[]) {
   const seen = recorded(f);
-  const found = enumerateZeros(seen, range, { effort, cuts });
+  const found = zerosOf(seen, range, { effort, cuts });
   const known = [
     ...seen.boxes.filter((box) => decidable(f, box)).map(({ a, b }) => [a, b] as const),
     ...found.undecided.map((u) => u.interval),
@@ -74,7 +74,7 @@ describe("nothing is left out", () => {
 
   test("when the effort is spent, one entry reaches from there to the end, and what was found before stays", () => {
     const f = enclosedBy(ice(1361));
-    const whole = enumerateZeros(f, [2.7, 2000], { effort: 500 });
+    const whole = zerosOf(f, [2.7, 2000], { effort: 500 });
     expect(whole.boxes).toBeGreaterThan(10);
     for (let effort = 0; effort < whole.boxes; effort++) {
       const { gaps, found } = uncovered(f, [2.7, 2000], effort, []);
@@ -88,7 +88,7 @@ describe("nothing is left out", () => {
       // the balance is positive at the lower end and negative at the upper one
       expect(rest?.counts).toMatch(found.zeros.length % 2 === 0 ? /^1/ : /^0/);
     }
-    expect(enumerateZeros(f, [2.7, 2000], { effort: whole.boxes }).undecided).toEqual([]);
+    expect(zerosOf(f, [2.7, 2000], { effort: whole.boxes }).undecided).toEqual([]);
   });
 
   test("sub-ranges give the zeros of the whole range", () => {
@@ -99,7 +99,7 @@ describe("nothing is left out", () => {
         const [a, b] = [from + random() * (to - from), from + random() * (to - from)].sort(
           (x, y) => x - y,
         ) as [number, number];
-        const found = enumerateZeros(enclosed(problem), [a, b], { effort: 500 });
+        const found = zerosOf(enclosed(problem), [a, b], { effort: 500 });
         const expected = problem.zeros.filter((z) => z > a && z < b);
         expect(found.undecided).toEqual([]);
         expect(found.zeros.length).toBe(expected.length);

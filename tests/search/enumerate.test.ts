@@ -1,12 +1,12 @@
 // The proved search on functions whose zeros are known.
 import { describe, expect, test } from "vitest";
-import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
 import type { UndecidedStretch } from "../../src/search/enumeration.ts";
 import { enclosedBy, shift, squared } from "./jet.ts";
 import { cornered, doubtful, enclosed, ice, type Problem, ramp, smooth } from "./problems.ts";
+import { zerosOf } from "./zerosOf.ts";
 
 const search = (p: Problem, effort = 500) =>
-  enumerateZeros(enclosed(p), p.range, { effort, ...(p.cuts && { cuts: p.cuts }) });
+  zerosOf(enclosed(p), p.range, { effort, ...(p.cuts && { cuts: p.cuts }) });
 
 describe("functions whose zeros can all be proved", () => {
   test.each([...smooth, ...cornered])("$title", (problem) => {
@@ -52,7 +52,7 @@ describe("functions that cannot be decided everywhere", () => {
 
   test("a continuum reaches from kink to kink and holds the function within its rounding", () => {
     for (const cuts of [[], [250, 282]]) {
-      const [only] = enumerateZeros(enclosedBy(ramp(128, 32)), [2.7, 2000], { effort: 500, cuts }).undecided;
+      const [only] = zerosOf(enclosedBy(ramp(128, 32)), [2.7, 2000], { effort: 500, cuts }).undecided;
       const [a, b] = (only as UndecidedStretch).interval;
       expect([a, b].map((x) => Number(x.toFixed(9)))).toEqual([250, 282]);
       expect(a <= 250 && b >= 282).toBe(true);
@@ -64,7 +64,7 @@ describe("functions that cannot be decided everywhere", () => {
 
 describe("x² = p", () => {
   const at = (p: number) =>
-    enumerateZeros(
+    zerosOf(
       enclosedBy((x) => shift(squared(x), -p)),
       [-10, 12],
       { effort: 40 },
@@ -96,7 +96,7 @@ describe("near a fold", () => {
     (distance) => {
       for (const { flux, t, inside } of FOLDS) {
         for (const side of [inside, -inside]) {
-          const found = enumerateZeros(enclosedBy(ice(flux + side * distance)), [2.7, 2000], { effort: 500 });
+          const found = zerosOf(enclosedBy(ice(flux + side * distance)), [2.7, 2000], { effort: 500 });
           expect(found.boxes).toBeLessThanOrEqual(24);
           expect(found.points).toBeLessThanOrEqual(60);
           const near = found.zeros.filter((z) => Math.abs(z.at - t) < 2);
@@ -116,7 +116,7 @@ describe("near a fold", () => {
   );
 
   test("three smooth zeros take few boxes and points", () => {
-    const found = enumerateZeros(enclosedBy(ice(1361)), [2.7, 2000], { effort: 500 });
+    const found = zerosOf(enclosedBy(ice(1361)), [2.7, 2000], { effort: 500 });
     expect(found).toMatchObject({ zeros: { length: 3 }, undecided: [] });
     expect(found.boxes).toBeLessThanOrEqual(24);
     expect(found.points).toBeLessThanOrEqual(32);

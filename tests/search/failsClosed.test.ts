@@ -1,14 +1,15 @@
 // NaN, infinities and rounding: nothing may be decided that the enclosures do not prove.
 import { describe, expect, test } from "vitest";
-import type { Enclosed } from "../../src/search/enclosed.ts";
+import { type Enclosed, endsOf } from "../../src/search/enclosed.ts";
 import { greatestBetween, leastBetween } from "../../src/search/endpointForm.ts";
-import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
+import { readBox } from "../../src/search/readBox.ts";
 import { Place, Reader } from "../../src/search/reader.ts";
 import { stretchOf } from "../../src/search/stretch.ts";
 import { randomNumbers } from "../graph/randomGraph.ts";
 import { refusal } from "../refusal.ts";
 import { whole } from "./exact.ts";
 import { enclosed, type Problem, smooth } from "./problems.ts";
+import { zerosOf } from "./zerosOf.ts";
 
 const BAD = [Number.NaN, Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY];
 
@@ -31,7 +32,7 @@ function spoilt(f: Enclosed, spoil: (index: number) => number | undefined): Encl
 
 /** Zeros that are in no bracket and no undecided stretch, and brackets that do not hold exactly one. */
 function faults(problem: Problem, f: Enclosed): string[] {
-  const { zeros, undecided } = enumerateZeros(f, problem.range, { effort: 300 });
+  const { zeros, undecided } = zerosOf(f, problem.range, { effort: 300 });
   const inside = (z: number, [a, b]: readonly [number, number]): boolean => {
     const slack = 5e-15 * Math.abs(z);
     return a <= z + slack && z - slack <= b;
@@ -66,7 +67,7 @@ describe("a number that is not finite decides nothing", () => {
       for (const bad of BAD) {
         const f = spoilt(enclosed(problem), (i) => (i >= part * 3 ? bad : undefined));
         expect(faults(problem, f)).toEqual([]);
-        const { zeros } = enumerateZeros(f, problem.range, { effort: 300 });
+        const { zeros } = zerosOf(f, problem.range, { effort: 300 });
         if (part < 2) expect(zeros).toEqual([]);
       }
   });
@@ -78,7 +79,7 @@ describe("a number that is not finite decides nothing", () => {
         for (const bad of BAD) {
           const f = enclosed(problem);
           const blind = spoilt(f, (i) => (i === index ? bad : undefined));
-          const found = enumerateZeros({ box: blind.box, point: f.point }, problem.range, { effort: 300 });
+          const found = zerosOf({ box: blind.box, point: f.point }, problem.range, { effort: 300 });
           expect(found.zeros).toEqual([]);
           expect(found.undecided[0]?.interval[0]).toBe(problem.range[0]);
           expect(found.undecided.at(-1)?.interval[1]).toBe(problem.range[1]);
@@ -108,7 +109,7 @@ describe("a number that is not finite decides nothing", () => {
         box: () => undefined,
         point: (_, out) => out.set([lo, hi, err, lo, hi, err]),
       };
-      const place = new Reader(f).read(1, new Place());
+      const place = new Reader(endsOf(f)).read(1, new Place());
       expect(place.slopeSign).toBe(place.sign);
       return place.sign;
     };
@@ -121,10 +122,16 @@ describe("a number that is not finite decides nothing", () => {
 
   test("no slope is claimed where there may be no value, no curvature where there may be no slope", () => {
     const read = (value: number, slope: number, bend: number) =>
-      new Reader({
-        box: (_a, _b, out) => out.set([value, 2, 0, slope, 2, 0, bend, 2, 0]),
-        point: () => undefined,
-      }).box(0, 1);
+      readBox(
+        new Reader(
+          endsOf({
+            box: (_a, _b, out) => out.set([value, 2, 0, slope, 2, 0, bend, 2, 0]),
+            point: () => undefined,
+          }),
+        ),
+        0,
+        1,
+      );
     expect(read(1, 1, 1)).toMatchObject({ sign: 1, slopeSign: 1, bend: 1, smooth: true });
     expect(read(1, 1, Number.NaN)).toMatchObject({ sign: 1, slopeSign: 1, bend: 0, smooth: false });
     expect(read(1, Number.NaN, 1)).toMatchObject({ sign: 1, slopeSign: 0, bend: 0, continuous: false });
@@ -137,9 +144,9 @@ describe("a number that is not finite decides nothing", () => {
       point: (x, out) => out.set([x, x, 0, 1, 1, 0]),
     });
     const enclosure = (slope: number) => {
-      const reader = new Reader(readings(slope));
+      const reader = new Reader(endsOf(readings(slope)));
       const ends = [reader.read(-1, new Place()), reader.read(1, new Place())] as const;
-      return stretchOf("jump", ...ends, reader.box(-1, 1)).enclosure.map((x) => Math.round(x));
+      return stretchOf("jump", ...ends, readBox(reader, -1, 1)).enclosure.map((x) => Math.round(x));
     };
     expect(enclosure(1)).toEqual([-1, 1]);
     for (const bad of BAD) expect(enclosure(bad)).toEqual([-9, 9]);
@@ -154,7 +161,7 @@ describe("a number that is not finite decides nothing", () => {
       [0, Number.POSITIVE_INFINITY],
       [-1.7e308, 1.7e308],
     ] as const)
-      expect(refusal(() => enumerateZeros(enclosed(line), range, { effort: 10 })).code).toBe("out-of-range");
+      expect(refusal(() => zerosOf(enclosed(line), range, { effort: 10 })).code).toBe("out-of-range");
   });
 });
 
@@ -169,8 +176,8 @@ describe("rounding is outwards", () => {
         box: (_a, _b, out) => out.set([lo, hi, err, lo, hi, err, 0, 0, 0]),
         point: (_, out) => out.set([lo, hi, err, lo, hi, err]),
       };
-      const reader = new Reader(f);
-      for (const read of [reader.read(1, new Place()), reader.box(0, 1)]) {
+      const reader = new Reader(endsOf(f));
+      for (const read of [reader.read(1, new Place()), readBox(reader, 0, 1)]) {
         for (const low of [read.low, read.slopeLow]) expect(whole(low) <= whole(lo) - whole(err)).toBe(true);
         for (const high of [read.high, read.slopeHigh])
           expect(whole(high) >= whole(hi) + whole(err)).toBe(true);

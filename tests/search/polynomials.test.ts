@@ -1,11 +1,11 @@
 // Counts of zeros against Sturm's theorem in exact integer arithmetic.
 import { describe, expect, test } from "vitest";
 import type { Enclosed } from "../../src/search/enclosed.ts";
-import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
 import type { Enumeration } from "../../src/search/enumeration.ts";
 import { randomNumbers } from "../graph/randomGraph.ts";
 import { countZeros, exactSign, type Polynomial } from "./exact.ts";
 import { enclosedBy, polynomial } from "./jet.ts";
+import { zerosOf } from "./zerosOf.ts";
 
 describe("the exact count that the others are compared with", () => {
   test("knows polynomials whose zeros are written down", () => {
@@ -48,7 +48,7 @@ function faultsOf(
 /** A search and its faults. */
 function searched(p: Polynomial, range: readonly [number, number], blur?: (f: Enclosed) => Enclosed) {
   const f = enclosedBy(polynomial(p.map(Number)));
-  const found = enumerateZeros(blur ? blur(f) : f, range, { effort: 3000, fine: 0.1 });
+  const found = zerosOf(blur ? blur(f) : f, range, { effort: 3000, fine: 0.1 });
   return { found, faults: faultsOf(p, found, range) };
 }
 const drawn = (random: () => number, degree: number, most: number): Polynomial => [

@@ -4,6 +4,7 @@ import { budgetsOf } from "../../bench/budgets.mjs";
 import { columnsOf, rowOf, WITHIN } from "../../bench/populations.mjs";
 import * as core from "../../src/index.ts";
 import { allowGeneration } from "../../src/reading/generation.ts";
+import { atOnce, endsOf } from "../../src/search/enclosed.ts";
 import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
 import { enclosedBalance } from "../../src/states/enclosedBalance.ts";
 import { enumerateBalance } from "../../src/states/provedSearch.ts";
@@ -52,8 +53,8 @@ describe.each(["ice", "vapour"] as const)("%s", (name) => {
       const givens = loop.givens.map((g) => rowOf(columns, row)[g.name] as number);
       for (const it of [balance, interpreted]) it.set(givens, givens);
       const by = enumerateBalance(balance, within, 500);
-      const { box, point } = balance.net;
-      expect(enumerateZeros({ box, point }, within, balance.limits)).toEqual(by);
+      const whole = endsOf(atOnce(balance.net));
+      expect(enumerateZeros(whole, within, balance.limits)).toEqual(by);
       expect(enumerateBalance(interpreted, within, 500)).toEqual(by);
     }
   });

@@ -89,9 +89,16 @@ export class Graph implements Recorder {
   }
 
   checkWire(value: Quantity, unit: string, path: string): void {
-    const found = this.dimensions[this.lift(value, path)];
-    if (found !== undefined && found !== BARE && found !== dimensionOf(unit)) {
-      fail("unit-mismatch", { path, value: showDimension(found), allowed: unit });
+    const id = this.lift(value, path);
+    if (this.dimensions[id] !== undefined) this.checkUnit(id, unit, path);
+  }
+
+  /** Throws if a node has another unit, or none that can be told. */
+  checkUnit(id: number, unit: string, path: string): void {
+    const found = this.dimensions[id];
+    if (found !== BARE && found !== dimensionOf(unit)) {
+      const value = found === undefined ? "an open unit" : showDimension(found);
+      fail("unit-mismatch", { path, value, allowed: unit });
     }
   }
 

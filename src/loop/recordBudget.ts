@@ -1,8 +1,7 @@
 // Keeps the books while a budget is written: which names are taken, which nodes they stand for.
-import { BARE } from "../graph/dimensionOfNode.ts";
 import { Graph } from "../graph/node.ts";
 import { Quantity } from "../graph/quantity.ts";
-import { type Dimension, dimensionOf, multiplyDimensions, showDimension } from "../ground/dimension.ts";
+import { dimensionOf } from "../ground/dimension.ts";
 import { fail } from "../ground/errors.ts";
 import { checkedName, failUnknown } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
@@ -53,7 +52,7 @@ export class BudgetRecorder {
   /** The node of a value that must have this unit. */
   wanted(value: unknown, path: string, unit: string, within?: Range): number {
     if (!(value instanceof Quantity)) return this.graph.constant(checkedNumber(value, path, unit, within));
-    return this.#withDimension(this.graph.lift(value, path), path, unit, dimensionOf(unit));
+    return this.#withUnit(value, path, unit);
   }
 
   /** Temperature, whose rate is N, and the declared variables with theirs. */
@@ -65,9 +64,7 @@ export class BudgetRecorder {
       const path = `rates.${v.name}`;
       if (!Object.hasOwn(rates, v.name))
         fail("missing", { path, value: undefined, allowed: `in ${v.unit} per second` });
-      const node = this.graph.lift(rates[v.name], path);
-      const perSecond = multiplyDimensions(dimensionOf(v.unit), dimensionOf("s"), -1);
-      return { ...v, rate: this.#withDimension(node, path, `${v.unit} s-1`, perSecond) };
+      return { ...v, rate: this.#withUnit(rates[v.name], path, `${v.unit} s-1`) };
     });
     return [
       { name: "temperature", node: this.temperature, unit: "K", within: TEMPERATURES, rate: net },
@@ -82,15 +79,9 @@ export class BudgetRecorder {
     return { name, node: this.graph.mean(of, { kind: "report", name }, this.graph.dimensions[of]) };
   }
 
-  #withDimension(node: number, path: string, unit: string, dimension: Dimension): number {
-    const found = this.graph.dimensions[node];
-    if (found !== dimension && found !== BARE) {
-      fail("unit-mismatch", {
-        path,
-        value: found === undefined ? "an open unit" : showDimension(found),
-        allowed: unit,
-      });
-    }
+  #withUnit(value: unknown, path: string, unit: string): number {
+    const node = this.graph.lift(value, path);
+    this.graph.checkUnit(node, unit, path);
     return node;
   }
 

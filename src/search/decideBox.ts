@@ -1,7 +1,7 @@
 // Decides a box, if what was read over it allows.
-import { leastBetween } from "./endpointForm.ts";
+import { isClear } from "./isClear.ts";
 import { judgeValley } from "./judgeValley.ts";
-import type { Piece, Place } from "./reader.ts";
+import type { Place } from "./reader.ts";
 import type { Search } from "./search.ts";
 
 /** In boxes wider than this many times `fine`, the curvature decides too little to be read. */
@@ -22,7 +22,7 @@ export function decideBox(search: Search, left: Place, right: Place): boolean {
     search.addZero(left, right);
     return true;
   }
-  if (s === right.sign && isClear(piece, left, right)) return true;
+  if (s === right.sign && isClear(left, right, piece, piece)) return true;
   const { reader } = search;
   if (right.x - left.x > (reader.bendIsDear ? BENT_IF_DEAR : BENT) * search.fine) return false;
   const { bend } = reader.bend();
@@ -30,13 +30,4 @@ export function decideBox(search: Search, left: Place, right: Place): boolean {
   if (s !== right.sign && bend !== 0) search.addZero(left, right);
   else if (bend === s) judgeValley(search, left, right);
   return bend !== 0;
-}
-
-/** Whether the ends, which have one sign, and the slope between keep the function away from zero. */
-function isClear({ slopeLow, slopeHigh }: Piece, left: Place, right: Place): boolean {
-  const width = right.x - left.x;
-  return left.sign > 0
-    ? leastBetween({ left: left.low, right: right.low }, { fall: slopeLow, rise: slopeHigh }, width) > 0
-    : leastBetween({ left: -left.high, right: -right.high }, { fall: -slopeHigh, rise: -slopeLow }, width) >
-        0;
 }

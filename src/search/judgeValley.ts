@@ -1,6 +1,6 @@
 // Decides a stretch with one valley towards zero: it may dip through zero twice, or not at all.
 import { doubtAround } from "./doubtAround.ts";
-import { leastBetween } from "./endpointForm.ts";
+import { fallOf, isClear, riseOf } from "./isClear.ts";
 import type { Place, Reader } from "./reader.ts";
 import type { Search } from "./search.ts";
 
@@ -27,11 +27,11 @@ function bottomBetween(reader: Reader, left: Place, right: Place): Place | undef
   let a = left;
   let b = right;
   let bottom: Place | undefined;
-  for (let i = 0; !isClear(a, b); i++) {
+  for (let i = 0; !isClear(a, b, a, b); i++) {
     const m = reader.take();
     aim(m, a, b, i);
     reader.readAt(m);
-    if (m.sign === s && i < MOST_STEPS && isClear(a, m) && isClear(m, b)) {
+    if (m.sign === s && i < MOST_STEPS && isClear(a, m, a, m) && isClear(m, b, m, b)) {
       reader.give(m);
       break;
     }
@@ -49,19 +49,11 @@ function bottomBetween(reader: Reader, left: Place, right: Place): Place | undef
   return bottom;
 }
 
-/** Whether the function has no zero between two places of one sign; its slope lies between their slopes. */
-function isClear(a: Place, b: Place): boolean {
-  const width = b.x - a.x;
-  return a.sign > 0
-    ? leastBetween({ left: a.low, right: b.low }, { fall: a.slopeLow, rise: b.slopeHigh }, width) > 0
-    : leastBetween({ left: -a.high, right: -b.high }, { fall: -a.slopeHigh, rise: -b.slopeLow }, width) > 0;
-}
-
 /** Where the slope, taken as straight, passes zero; every third time the middle, so that the stretch surely shrinks. */
 function aim(place: Place, a: Place, b: Place, i: number): void {
   const width = b.x - a.x;
-  const fall = a.sign > 0 ? a.slopeLow : a.slopeHigh;
-  const rise = a.sign > 0 ? b.slopeHigh : b.slopeLow;
+  const fall = fallOf(a, a.sign);
+  const rise = riseOf(b, a.sign);
   place.x = a.x + width * (fall / (fall - rise));
   if (i % 3 === 2 || !(place.x > a.x && place.x < b.x)) place.x = a.x + width / 2;
 }

@@ -4,7 +4,7 @@ import { above, below, bounded, type Ends, type Sign } from "./enclosed.ts";
 // Numbers go from array to array: passed to a function or returned, each would be an object to collect.
 
 /** Bounds of a value and a slope, rounded outwards. */
-class Bounds {
+export class Bounds {
   readonly bounds = new Float64Array(4).fill(NaN);
   sign: Sign = 0;
   slopeSign: Sign = 0;

@@ -10,6 +10,7 @@ import type { Note } from "./note.ts";
 
 /** One quantity to look at in every state, and what is to be said when it lies outside its range. */
 export interface Check {
+  readonly name: string;
   readonly node: number;
   readonly range: Range;
   readonly note: Omit<Note, "value" | "range">;
@@ -20,7 +21,8 @@ export function checksOf(loop: Loop): Check[] {
   const { graph, heatCapacity } = loop;
   const checks: Check[] = [];
   const check = (kind: keyof typeof OUTSIDE, about: string, node: number, range: Range, rest: Rest) => {
-    if (graph.ops[node] !== "const") checks.push({ node, range, note: { ...OUTSIDE[kind], about, ...rest } });
+    if (graph.ops[node] !== "const")
+      checks.push({ name: about, node, range, note: { ...OUTSIDE[kind], about, ...rest } });
   };
   check("range", "heatCapacity", heatCapacity, [0, Number.MAX_VALUE], { unit: "J m-2 K-1", source: null });
   for (const id of coneOf(graph, rootsOf(loop))) {

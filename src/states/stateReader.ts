@@ -16,12 +16,16 @@ export function stateReader(loop: Loop): StateReader {
   const { graph, net, heatCapacity, flows, couplings, report, givens } = loop;
   const inputs = inputsOf(loop);
   const checks = checksOf(loop);
-  const groups = [
-    [net, heatCapacity],
-    ...[flows, couplings, report, checks].map((list) => list.map((r) => r.node)),
+  const groups: (readonly Asked[])[] = [
+    [
+      { name: "net flux", node: net },
+      { name: "heatCapacity", node: heatCapacity },
+    ],
+    ...[flows, couplings, report, checks],
   ];
-  const kernel = valueKernel(graph, { inputs, outputs: groups.flat() });
-  const all = new Float64Array(groups.flat().length);
+  const asked = groups.flat();
+  const kernel = valueKernel(graph, { inputs, outputs: asked.map((a) => a.node) });
+  const all = new Float64Array(asked.length);
   // one view of the kernel's output for each group
   let end = 0;
   const views = groups.map((group) => {
@@ -29,14 +33,11 @@ export function stateReader(loop: Loop): StateReader {
     return all.subarray(end - group.length, end);
   });
   const [core, flowValues, coupled, reported, checked] = views as [Values, Values, Values, Values, Values];
-  const named = (list: readonly { name: string }[]) => list.map((r) => r.name);
-  const names = ["net flux", "heatCapacity"];
-  names.push(...named(flows), ...named(couplings), ...named(report), ...checks.map((c) => c.note.about));
   const writeLedger = ledgerWriter(flows);
   return (located, given) => {
     const { at, stability, lambda, slope, imbalance } = located;
     kernel(Float64Array.of(at, ...given), all);
-    for (let i = 0; i < all.length; i++) if (!Number.isFinite(all[i])) failAt(names[i] as string, all[i]);
+    for (let i = 0; i < all.length; i++) if (!Number.isFinite(all[i])) failAt(asked[i] as Asked, all[i]);
     const [netFlux, capacity] = core as unknown as [number, number];
     const bracket = Object.freeze([located.bracket[0], located.bracket[1]] as const);
     const ledger = writeLedger(flowValues, netFlux);
@@ -63,13 +64,18 @@ export function stateReader(loop: Loop): StateReader {
 }
 
 /** No NaN and no infinity leaves in a state. */
-const failAt = (path: string, value: unknown): never =>
+const failAt = ({ name: path }: Asked, value: unknown): never =>
   fail("not-finite", { path, value, allowed: "a finite number in every state" });
 
+/** What is read of a state. */
+interface Asked {
+  readonly name: string;
+  readonly node: number;
+}
 type Values = Float64Array;
 
 function namedValues(
-  list: readonly { readonly name: string }[],
+  list: readonly Pick<Asked, "name">[],
   values: ArrayLike<number>,
 ): Readonly<Record<string, number>> {
   const record: Record<string, number> = {};

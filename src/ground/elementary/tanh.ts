@@ -8,8 +8,8 @@ const SATURATED = 19.0615474653985;
 /**
  * The hyperbolic tangent, the same bits on every engine, exactly odd.
  *
- * Below 1/16 Taylor's series, which is x itself below 2^-27; above it (E − 1)/(E + 1) with E = e^(2|x|) in two doubles and a corrected
- * quotient. Error below 0.505 ulp (bounded by proof). tanh(±0) = ±0, tanh(±∞) = ±1, tanh(NaN) = NaN.
+ * Below 1/16 Taylor's series, which is x itself below 2^-27; above it (E − 1)/(E + 1) with E = e^(2|x|) in
+ * two doubles and a corrected quotient. Error below 0.505 ulp (bounded by proof). tanh(±0) = ±0, tanh(±∞) = ±1, tanh(NaN) = NaN.
  */
 export function tanh(x: number): number {
   const a = Math.abs(x);

@@ -11,11 +11,11 @@ const operations =
 // The sizes are of `export { names } from "thermostead"`; the largest of a line counts.
 // `aim` is what the design asks for; `limit` is what the door weighs today, and nothing may grow beyond it unnoticed.
 const budgets = [
-  { title: "one law", aim: 3000, limit: 3150, consumers: ["stellarFlux", "greyEmission", "tanhAlbedo"] },
+  { title: "one law", aim: 3000, limit: 3000, consumers: ["stellarFlux", "greyEmission", "tanhAlbedo"] },
   {
     title: "closeLoop, findStates and the operations",
     aim: 13000,
-    limit: 22500,
+    limit: 20750,
     consumers: [`closeLoop, findStates, ${operations}`],
   },
   // all of it, and the one function it shares with the core: `toSVG` alone is little less, as it knows all results

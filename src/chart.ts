@@ -1,6 +1,7 @@
 // The door to pictures: results as SVG, Vega-Lite, HTML, Markdown and text; needs no package.
+export type { GivenUnit } from "./branches/diagram.ts";
 export { type CouplingGraph, couplingGraph } from "./chart/couplingGraph.ts";
-export { type DiagramChartOptions, diagramChart, type GivenUnit } from "./chart/diagramChart.ts";
+export { type DiagramChartOptions, diagramChart } from "./chart/diagramChart.ts";
 export { feedbackBars } from "./chart/feedbackBars.ts";
 export { type LedgerDrawing, ledgerDrawing } from "./chart/ledgerDrawing.ts";
 export {

@@ -28,6 +28,7 @@ export type {
   Diagram,
   Fold,
   Gap,
+  GivenUnit,
   Jump,
   UndecidedStretch,
 } from "./branches/diagram.ts";

@@ -120,6 +120,14 @@ export interface UndecidedStretch {
     | ("count" | "undefined" | "effort" | "other");
 }
 
+/** In which unit a given is shown. */
+export interface GivenUnit {
+  readonly name: string;
+  readonly unit: string;
+  /** The unit in that of the given's value; 1 unless said. */
+  readonly size?: number;
+}
+
 /** The diagram of temperature against one parameter. A plain frozen object: it survives `JSON.stringify` and back. */
 export interface Diagram<A extends string = string> {
   /** The parameter, and its unit. */
@@ -129,6 +137,8 @@ export interface Diagram<A extends string = string> {
   readonly within: Range;
   /** The values of the other givens, which are held. */
   readonly fixed: Readonly<Record<string, number>>;
+  /** The units of all givens. */
+  readonly units: readonly GivenUnit[];
   /**
    * How the parameter was followed: `line` (the budget is a straight line in it, or in a function of it alone), `monotone` (the
    * budget only grows or only falls with it), `tiles` (counts over tiles of parameters) or `samples`.

@@ -43,6 +43,7 @@ export function diagramOf(loop: Loop, task: Task, net: ZeroReader, parts: Parts)
     between: Object.freeze(between),
     within: Object.freeze(within),
     fixed: fixedGivens(loop, name, givens),
+    units: Object.freeze(loop.givens.map(({ name, unit }) => Object.freeze({ name, unit }))),
     method,
     branches: Object.freeze(branches),
     folds: Object.freeze(folds),

@@ -1,5 +1,5 @@
 // The diagram of temperature against one parameter.
-import type { Diagram } from "../branches/diagram.ts";
+import type { Diagram, GivenUnit } from "../branches/diagram.ts";
 import type { Range } from "../ground/range.ts";
 import type { State } from "../states/state.ts";
 import {
@@ -18,21 +18,13 @@ import { numeral, rangeText, titled, unitText } from "./wording.ts";
 
 /** A diagram, and what may be drawn with it. */
 export interface DiagramChartOptions {
-  readonly diagram: Diagram & Pick<DiagramChartOptions, "units">;
+  readonly diagram: Diagram;
   /** The same planet with couplings held, along the same given. */
   readonly held?: Diagram;
   /** Where the planet is now. */
   readonly state?: State;
-  /** In which units givens are shown: `loop.givens`, or the `units` of a planet, in which they are written. */
+  /** In which units givens are shown, such as the `units` of a planet, in which they are written; those of the diagram unless said. */
   readonly units?: readonly GivenUnit[];
-}
-
-/** In which unit a given is shown. */
-export interface GivenUnit {
-  readonly name: string;
-  readonly unit: string;
-  /** The unit in that of the given's value; 1 unless said. */
-  readonly size?: number;
 }
 
 /** Folds and crossings, and what the legend calls them. */

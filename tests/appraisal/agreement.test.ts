@@ -126,7 +126,11 @@ describe("climates", () => {
     const now = 0.2 * SUN;
     const between = [0.4 * now, 2.5 * now] as const;
     const { units, ...diagram } = appraised as NonNullable<typeof appraised>;
-    expect(diagram).toEqual(traceBranches(planet.loop, { along, between, within, tolerance: 5e-4 }));
+    const { units: ofLoop, ...traced } = traceBranches(planet.loop, {
+      ...{ along, between, within, tolerance: 5e-4 },
+    });
+    expect(diagram).toEqual(traced);
+    expect(ofLoop).toContainEqual({ name: along, unit: "W" });
     expect(units).toContainEqual({ name: along, unit: "solLum", size: SUN });
     expect(units.map(({ name }) => name).sort()).toEqual([along, ...Object.keys(diagram.fixed)].sort());
     const rate = planet.facts.stars[0]?.brightening as number;

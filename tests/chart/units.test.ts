@@ -22,17 +22,16 @@ const diagram = traceBranches(loop, {
 const state = findStates(loop, { within }).states.at(-1) as never;
 const items = (plot: Plot) => plot.layers.flatMap((layer) => layer.items);
 
-describe("a diagram of which nothing more is known", () => {
-  const plot = diagramChart({ diagram, state });
-
-  test("has the unit of its parameter, and no other", () => {
-    expect(plot.x).toEqual({ title: "star.luminosity (W)", domain: diagram.between });
-    expect(plot.caption[0]).toMatch(/orbit\.semiMajorAxis 6\.8815×10¹⁰, /);
-  });
+test("an older diagram, without units, has that of its parameter and no other", () => {
+  const { units, ...older } = diagram;
+  const plot = diagramChart({ diagram: older as typeof diagram, state });
+  expect(units).toHaveLength(loop.givens.length);
+  expect(plot.x).toEqual({ title: "star.luminosity (W)", domain: diagram.between });
+  expect(plot.caption[0]).toMatch(/orbit\.semiMajorAxis 6\.8815×10¹⁰, /);
 });
 
-describe("with the givens of a loop", () => {
-  const plot = diagramChart({ diagram, state, units: loop.givens });
+describe("a diagram of a loop", () => {
+  const plot = diagramChart({ diagram, state });
 
   test("what is fixed has the unit that it has in the loop", () => {
     expect(plot.x.title).toBe("star.luminosity (W)");

@@ -26,7 +26,7 @@ export function branchesOf(
     { warm: runEnd(curve, from, drawing), cool: undefined },
     ...criticals.map((c) => {
       const cool = criticalEnd(curve, c, drawing, 0);
-      return { cool, warm: c.kind === "jump" ? criticalEnd(curve, c, drawing, 1) : cool };
+      return { cool, warm: leaps(c) ? criticalEnd(curve, c, drawing, 1) : cool };
     }),
     { warm: undefined, cool: runEnd(curve, to, drawing) },
   ];
@@ -59,11 +59,13 @@ function runEnd(curve: Curve, { kind, end, at, bracket }: RunEnd, { between }: D
   });
 }
 
+const leaps = ({ kind }: Critical): boolean => kind === "jump" || kind === "leap";
+
 function criticalEnd(curve: Curve, critical: Critical, { between }: Drawing, side: 0 | 1): BranchEnd {
   const { kind, decided, bracket } = critical;
-  const temperature = kind === "jump" ? bracket[side] : critical.temperature;
+  const temperature = leaps(critical) ? bracket[side] : critical.temperature;
   return Object.freeze({
-    kind: decided ? (kind as "fold" | "corner") : "undecided",
+    kind: decided || kind === "leap" ? (kind as "fold" | "corner" | "leap") : "undecided",
     at: clamped(curve.at(temperature), between),
     atBracket: boundsOf(curve, bracket, between),
     temperature,

@@ -6,7 +6,8 @@ import type { DoubtKind } from "../search/enumeration.ts";
 
 /** A place on a curve between two branches. */
 export interface Critical {
-  readonly kind: "fold" | "corner" | DoubtKind;
+  /** `leap`: the curve leaps there, at a step of a law; its two branches end, but it is not decided whether they meet. */
+  readonly kind: "fold" | "corner" | "leap" | DoubtKind;
   readonly decided: boolean;
   readonly temperature: number;
   readonly bracket: Range;
@@ -53,7 +54,7 @@ export function criticalsOf({ feedback, kinks, leaps }: Feedback, range: Range, 
     ...found.undecided.map(({ kind, interval }): Critical => {
       const corner = kind === "jump" && changesSign(feedback, interval);
       const temperature = interval[0] + (interval[1] - interval[0]) / 2;
-      const named = kind === "undefined" && leapsIn(interval) ? "jump" : kind;
+      const named = kind === "undefined" && leapsIn(interval) ? "leap" : kind;
       return { kind: corner ? "corner" : named, decided: corner, temperature, bracket: interval };
     }),
   ];

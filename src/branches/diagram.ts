@@ -16,11 +16,12 @@ export interface BranchPoint {
 /** Where a branch ends. */
 export interface BranchEnd {
   /**
-   * `fold`: it turns back smoothly and goes on as its neighbour; `corner`: the same at a kink of a law; `transcritical`:
+   * `fold`: it turns back smoothly and goes on as its neighbour; `corner`: the same at a kink of a law; `leap`: the balance
+   * leaps through zero there, at a step of a law, and the branch on the other side ends at another parameter; `transcritical`:
    * another branch crosses, and both go on with each other's stability; `between`: at an end of the range of the parameter;
    * `within`: at an end of the range of temperature; `undecided`: next to a stretch where nothing is proved.
    */
-  readonly kind: "fold" | "corner" | "transcritical" | "between" | "within" | "undecided";
+  readonly kind: "fold" | "corner" | "leap" | "transcritical" | "between" | "within" | "undecided";
   readonly at: number;
   /** Proved bounds of the parameter there. */
   readonly atBracket: Range;
@@ -91,8 +92,10 @@ export interface Jump {
   readonly to: { readonly branch: number; readonly temperature: number } | null;
   /** Where it goes if it leaves the searched range of temperature. */
   readonly leaves: "hotter" | "colder" | null;
-  /** The parameter at which a slow way back returns to the branch that was lost; `null`: no return in the searched range. */
+  /** The parameter at which a slow way back returns to the branch that was lost; `null`: it does not, or that is not known. */
   readonly returnsAt: number | null;
+  /** True where the slow way back is known up to the end of the parameter's range, and does not return. */
+  readonly noReturn: boolean;
 }
 
 /** Parameters without a state in the searched range of temperature. */

@@ -63,5 +63,6 @@ export function foldsOnLine(
 }
 
 function endName({ kind }: BranchEnd): FoldCurveEnd {
+  if (kind === "leap") return "undecided";
   return kind === "fold" || kind === "corner" ? "cusp" : kind;
 }

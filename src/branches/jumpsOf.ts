@@ -10,6 +10,8 @@ interface Met {
   readonly crossings: readonly BranchCrossing[];
 }
 
+type Returning = Pick<Jump, "returnsAt" | "noReturn">;
+
 interface Lost {
   readonly end: BranchEnd;
   readonly to: Jump["to"];
@@ -17,8 +19,9 @@ interface Lost {
 }
 
 /**
- * The jumps of all stable branches; where two branches cross the climate goes on along the one that is stable. Beyond a fold N has one sign up to the next state: where the branch lost its state to a
- * warmer neighbour, nothing cools the planet any more, and it warms; where to a cooler one, it cools.
+ * The jumps of all stable branches; where two branches cross the climate goes on along the one that is stable. Beyond a fold N
+ * has one sign up to the next state: where the branch lost its state to a warmer neighbour, nothing cools the planet any more,
+ * and it warms; where to a cooler one, it cools.
  */
 export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: TemperatureOn): Jump[] {
   const known = new Map<string, Lost | undefined>();
@@ -30,14 +33,13 @@ export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: Temp
   const landing = (from: number, direction: Jump["direction"]): Lost | undefined => {
     const branch = branches[from] as Branch;
     const end = direction === "rise" ? branch.high : branch.low;
-    const fold = folds.find((f) => f.branches.includes(from) && f.temperature === end.temperature);
-    if (!fold || (end.kind !== "fold" && end.kind !== "corner")) return undefined;
-    // the cooler of the two loses its state to a warmer one
-    const side = fold.branches[0] === from ? 1 : -1;
+    const edge = end.kind === "leap" ? leapAt(branches, from, direction) : foldAt(folds, from, end);
+    if (!edge) return undefined;
+    const { side, lost } = edge;
     let to: Jump["to"] = null;
     branches.forEach((next, i) => {
       const [low, high] = next.parameters;
-      if (fold.branches.includes(i) || !(low <= end.at && end.at <= high)) return;
+      if (lost.includes(i) || !(low <= end.at && end.at <= high)) return;
       const temperature = temperatureOn(next, end.at);
       if (temperature === undefined) return;
       const ahead = side * (temperature - end.temperature) > 0;
@@ -53,16 +55,18 @@ export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: Temp
     const crossing = crossings.find((c) => c[here].includes(from));
     return crossing?.[beyond].find((i) => branches[i]?.stability === "stable");
   };
-  /** Follows a slow way back from a landing until it meets the branch that was left. */
-  const returnOf = (home: number, { to }: Lost, back: Jump["direction"]): number | null => {
+  /** Follows a slow way back from a landing until it meets the branch that was left, or the end of the parameter's range. */
+  const returnOf = (home: number, { to }: Lost, back: Jump["direction"]): Returning => {
     let at = to?.branch;
     for (let i = 0; at !== undefined && i < branches.length; i++) {
       const { low, high }: Branch = branches[at] as Branch;
+      const end = back === "rise" ? high : low;
       const lost = lostFrom(at, back);
       at = lost ? lost.to?.branch : onward(at, back);
-      if (at === home) return lost ? lost.end.at : (back === "rise" ? high : low).at;
+      if (at === home) return { returnsAt: lost ? lost.end.at : end.at, noReturn: false };
+      if (at === undefined && !lost && end.kind === "between") return { returnsAt: null, noReturn: true };
     }
-    return null;
+    return { returnsAt: null, noReturn: false };
   };
   return branches.flatMap((branch, from) => {
     if (branch.stability !== "stable") return [];
@@ -71,8 +75,37 @@ export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: Temp
       if (!lost) return [];
       const { end, to, leaves } = lost;
       const { at, atBracket, temperature } = end;
-      const returnsAt = returnOf(from, lost, direction === "rise" ? "fall" : "rise");
-      return [Object.freeze({ direction, from, at, atBracket, temperature, to, leaves, returnsAt })];
+      const returning = returnOf(from, lost, direction === "rise" ? "fall" : "rise");
+      return [Object.freeze({ direction, from, at, atBracket, temperature, to, leaves, ...returning })];
     });
   });
+}
+
+/** What a state meets where it is lost: the side on which N drives it away, and the branches that end there. */
+interface Edge {
+  readonly side: 1 | -1;
+  readonly lost: readonly number[];
+}
+
+function foldAt(folds: readonly Fold[], from: number, end: BranchEnd): Edge | undefined {
+  const fold = folds.find((f) => f.branches.includes(from) && f.temperature === end.temperature);
+  if (!fold || (end.kind !== "fold" && end.kind !== "corner")) return undefined;
+  // the cooler of the two loses its state to a warmer one
+  return { side: fold.branches[0] === from ? 1 : -1, lost: fold.branches };
+}
+
+/**
+ * A leap that drives the state on: the branch on its other side reaches back over the parameters of this one. Otherwise N has
+ * opposite signs on both sides beyond the end, towards the leap, and holds the climate there.
+ */
+function leapAt(branches: readonly Branch[], from: number, direction: Jump["direction"]): Edge | undefined {
+  const branch = branches[from] as Branch;
+  const end = direction === "rise" ? branch.high : branch.low;
+  const side = end.temperature === branch.temperatures[1] ? 1 : -1;
+  const next = branches[from + side];
+  const other = [next?.low, next?.high].find(
+    (e) => e?.kind === "leap" && e.temperatureBracket[0] === end.temperatureBracket[0],
+  );
+  const reachesBack = other && (direction === "rise" ? other.at < end.at : other.at > end.at);
+  return reachesBack ? { side, lost: [from] } : undefined;
 }

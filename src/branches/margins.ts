@@ -55,8 +55,9 @@ export interface TippingMargins<N extends string = string> {
   readonly rise: Margin<N>;
   readonly fall: Margin<N>;
   /**
-   * The unstable states that bound the basin of a stable state, K; `null`: none on that side inside the range. `null` as a whole
-   * for a state that is not stable.
+   * What bounds the basin of a stable state: unstable states, or leaps of the balance through zero (at a step of a law), K;
+   * `null`: none on that side inside the range. `null` as a whole for a state that is not stable, and where something else that
+   * is undecided lies next to it.
    */
   readonly basin: { readonly coldest: number | null; readonly hottest: number | null } | null;
   /** The values of the other givens, which are held. */

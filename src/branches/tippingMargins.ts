@@ -79,7 +79,7 @@ export function tippingMargins<N extends string>(
     stability: branch.stability,
     rise: margin("rise"),
     fall: margin("fall"),
-    basin: branch.stability === "stable" ? basinOf(loop, diagram, { index, at }) : null,
+    basin: branch.stability === "stable" ? basinOf(loop, diagram, { index, at, temperature }) : null,
     fixed: diagram.fixed,
     held: heldText(loop, name, diagram.fixed),
     within: diagram.within,
@@ -148,22 +148,42 @@ function wayTo(
   return [Object.freeze({ at, temperature, feedbackParameter }), ...ahead];
 }
 
-/** The nearest states on both sides at the same givens: between a stable state and the next there is nothing. */
+/**
+ * The nearest states on both sides at the same givens, or the nearest leaps of the balance through zero: between a stable state
+ * and these there is nothing. Null where the nearest is something else that is undecided.
+ */
 function basinOf(
   loop: Loop,
   diagram: Diagram,
-  { index, at }: { index: number; at: number },
+  { index, at, temperature }: { index: number; at: number; temperature: number },
 ): TippingMargins["basin"] {
-  const { branches } = diagram;
-  const next = (side: 1 | -1): number | null => {
+  const { branches, undecided } = diagram;
+  const isHere = ([low, high]: Range): boolean => low <= at && at <= high;
+  const next = (side: 1 | -1): Edge | undefined => {
+    const edges: Edge[] = undecided
+      .filter(({ parameters }) => isHere(parameters))
+      .map(({ kind, temperatures: [low, high] }) => ({
+        place: side > 0 ? low : high,
+        temperature: kind === "jump" ? low + (high - low) / 2 : null,
+      }));
     for (let i = index + side; i >= 0 && i < branches.length; i += side) {
       const branch = branches[i] as Branch;
-      if (branch.parameters[0] <= at && at <= branch.parameters[1])
-        return stateOn(loop, diagram, branch, at)?.temperature ?? null;
+      const place = isHere(branch.parameters) ? stateOn(loop, diagram, branch, at)?.temperature : undefined;
+      if (place !== undefined) edges.push({ place, temperature: place });
     }
-    return null;
+    return edges
+      .filter(({ place }) => side * (place - temperature) > 0)
+      .sort((a, b) => side * (a.place - b.place))[0];
   };
-  return Object.freeze({ coldest: next(-1), hottest: next(1) });
+  const [cold, hot] = [next(-1), next(1)];
+  if (cold?.temperature === null || hot?.temperature === null) return null;
+  return Object.freeze({ coldest: cold?.temperature ?? null, hottest: hot?.temperature ?? null });
+}
+
+/** Where something comes nearest to a state, and its temperature; null if it is not known what it is. */
+interface Edge {
+  readonly place: number;
+  readonly temperature: number | null;
 }
 
 function heldText(loop: Loop, name: string, fixed: Readonly<Record<string, number>>): string {

@@ -7,19 +7,20 @@ import type { UndecidedStretch } from "./diagram.ts";
 import type { Crossing } from "./runs.ts";
 
 /** What a doubt about N at an end of the parameter's range is in the diagram. */
-const AT_AN_END: Readonly<Record<DoubtKind | "level", UndecidedStretch["kind"]>> = {
+const AT_AN_END: Readonly<Record<DoubtKind | "level" | "leap", UndecidedStretch["kind"]>> = {
   fold: "edge",
   corner: "edge",
   edge: "edge",
   flat: "continuum",
   jump: "jump",
+  leap: "jump",
   undefined: "undefined",
   effort: "effort",
   level: "level",
 };
 
 /** What a doubt about λ on the curve is in the diagram. */
-const onTheCurve = (kind: DoubtKind): UndecidedStretch["kind"] =>
+const onTheCurve = (kind: Critical["kind"]): UndecidedStretch["kind"] =>
   kind === "fold" || kind === "corner" ? "cusp" : AT_AN_END[kind];
 
 /** The undecided stretch of a crossing, if it is in doubt. */

@@ -76,7 +76,7 @@ export function reachOf({ temperatures: [cold, hot], low, high }: Branch): Range
   return [from - slackAt(0, from), to + slackAt(1, to)];
 }
 
-const isTurn = ({ kind }: BranchEnd): boolean => kind === "fold" || kind === "corner";
+const isTurn = ({ kind }: BranchEnd): boolean => kind === "fold" || kind === "corner" || kind === "leap";
 
 /** The one nearest to where the points of a branch say that it is. */
 export function nearest<Z extends { readonly at: number }>(

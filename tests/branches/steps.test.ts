@@ -110,8 +110,8 @@ describe("branches", () => {
     expect(temperatures[1] - temperatures[0]).toBeLessThan(2e-12);
     const [cold, warm] = diagram.branches as [core.Branch, core.Branch];
     expect(diagram.branches.map((b) => [b.stability, b.low.kind, b.high.kind])).toEqual([
-      ["stable", "between", "undecided"],
-      ["stable", "undecided", "between"],
+      ["stable", "between", "leap"],
+      ["stable", "leap", "between"],
     ]);
     expect(cold.parameters[1]).toBeCloseTo(high, 8);
     expect(warm.parameters[0]).toBeCloseTo(low, 8);
@@ -120,6 +120,50 @@ describe("branches", () => {
     expect(here.states.map((s) => s.temperature)).toEqual(
       findStates(loop, { within: WITHIN }).states.map((s) => expect.closeTo(s.temperature, 10)),
     );
+  });
+
+  test("a slow rise passes the leap and jumps to the warm branch, a slow fall back", () => {
+    const loop = iceLoop();
+    const diagram = traceBranches(loop, { along: "flux", between: [900, 2200], within: WITHIN });
+    const [low, high] = [fluxOf(263.15, 0.32), fluxOf(263.15, 0.62)];
+    const near = (x: number) => expect.closeTo(x, 8);
+    const jump = { temperature: near(263.15), leaves: null, noReturn: false };
+    expect(diagram.jumps).toMatchObject([
+      {
+        ...{ ...jump, direction: "rise", from: 0, at: near(high), returnsAt: near(low) },
+        to: { branch: 1, temperature: near(temperatureOf(high, 0.32)) },
+      },
+      {
+        ...{ ...jump, direction: "fall", from: 1, at: near(low), returnsAt: near(high) },
+        to: { branch: 0, temperature: near(temperatureOf(low, 0.62)) },
+      },
+    ]);
+    // the leap is also what bounds the basins
+    const [cold, warm] = findStates(loop, { within: WITHIN }).states.map((state) =>
+      core.tippingMargins(loop, state, { along: "flux", between: [900, 2200], within: WITHIN, diagram }),
+    );
+    expect(cold?.basin).toEqual({ coldest: null, hottest: near(263.15) });
+    expect(warm?.basin).toEqual({ coldest: near(263.15), hottest: null });
+    expect(cold?.rise).toMatchObject({ end: { kind: "leap" }, after: { stability: "stable" } });
+  });
+
+  test("a leap that drives the climate back from both sides holds it: no jump", () => {
+    const loop = closeLoop(({ temperature, given }) => {
+      const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+      const albedo = stepAlbedo({ temperature, cold: 0.32, warm: 0.62, threshold: 263.15 });
+      return {
+        heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+        cooling: { longwave: greyEmission({ temperature, emissivity: 0.6 }) },
+        heatCapacity: 4e8,
+      };
+    });
+    const diagram = traceBranches(loop, { along: "flux", between: [500, 2500], within: WITHIN });
+    expect(diagram.branches.map((b) => [b.low.kind, b.high.kind])).toEqual([
+      ["between", "leap"],
+      ["leap", "between"],
+    ]);
+    expect(diagram.branches[0]?.parameters[1]).toBeLessThan(diagram.branches[1]?.parameters[0] as number);
+    expect(diagram.jumps).toEqual([]);
   });
 
   test("along the threshold: the leap where it lies between both states", () => {

@@ -47,6 +47,8 @@ describe("the acceptance case", () => {
     expect(down).toMatchObject({ direction: "fall", from: 2, to: { branch: 0 }, leaves: null });
     expect([up?.returnsAt, down?.returnsAt]).toEqual([down?.at, up?.at]);
     expect(away).toMatchObject({ direction: "rise", from: 2, to: null, leaves: "hotter", returnsAt: null });
+    // what comes beyond the range, and back from there, is not known
+    expect(diagram.jumps.map((jump) => jump.noReturn)).toEqual([false, false, false]);
     expect(diagram.gaps).toMatchObject([{ too: "hot" }]);
     expect(diagram.gaps[0]?.parameters).toEqual([diagram.folds[2]?.atBracket[1], 1900]);
   });
@@ -255,6 +257,15 @@ describe("what is not decided is said", () => {
         [300, 300 + p].sort((a, b) => a - b),
       ]);
     }
+  });
+
+  test("whether a slow way back returns: no, where it is followed to the end of the parameter's range", () => {
+    const rise = { along: "flux", within: WITHIN } as const;
+    const [whole] = traceBranches(iceLoop(), { ...rise, between: [900, 1900] }).jumps;
+    const [part] = traceBranches(iceLoop(), { ...rise, between: [1361, 1900] }).jumps;
+    expect(whole).toMatchObject({ direction: "rise", to: { branch: 2 }, noReturn: false });
+    expect(whole?.returnsAt).toBeLessThan(1361);
+    expect(part).toMatchObject({ direction: "rise", to: { branch: 2 }, returnsAt: null, noReturn: true });
   });
 
   test("an effort that is spent", () => {

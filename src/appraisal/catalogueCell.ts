@@ -1,5 +1,4 @@
 // A value of a table with its unit and errors.
-import { fail } from "../ground/errors.ts";
 
 /** A row of a table by column. */
 export type CatalogueRow = Readonly<Record<string, string | number | null | undefined>>;
@@ -36,11 +35,15 @@ export function textOf(row: CatalogueRow, column: string | undefined): string | 
   return value === null || value === undefined || value === "" ? null : String(value);
 }
 
+/** All names of columns in a column with numbers. */
+export const namesIn = (column: Column): string[] =>
+  typeof column === "string"
+    ? [column]
+    : [column.column, column.minus, column.plus].filter((name) => name !== undefined);
+
 /** The value of a column, or null where it is empty or no number; the reason of that goes into `refused`. */
-export function cellOf(row: CatalogueRow, column: Column, path: string, refused: Refused[]): Cell | null {
-  const { column: name, unit = "1", minus, plus } = typeof column === "string" ? { column } : (column ?? {});
-  if (typeof name !== "string")
-    fail("unreadable", { path, value: column, allowed: "the name of a column, or { column, unit }" });
+export function cellOf(row: CatalogueRow, column: Column, refused: Refused[]): Cell | null {
+  const { column: name, unit = "1", minus, plus } = typeof column === "string" ? { column } : column;
   const value = numberIn(row, name, refused);
   if (value === null) return null;
   const error = (of: string | undefined, side: "minus" | "plus") => {

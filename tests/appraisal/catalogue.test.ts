@@ -5,6 +5,7 @@ import type { CatalogueMapping } from "../../src/appraisal/catalogueMapping.ts";
 import { fromCatalogueRow } from "../../src/appraisal/fromCatalogueRow.ts";
 import { readPlanet } from "../../src/planet/readPlanet.ts";
 import { refusal } from "../refusal.ts";
+import { plain } from "./planets.ts";
 
 const mapping = {
   name: "planet",
@@ -83,8 +84,71 @@ test("what you assume is added, and read by the rules of a description", () => {
   expect(appraisePlanet(description).states).toHaveLength(1);
   expect(readPlanet(description).facts.stars[0]).toMatchObject({ name: "Vellamar" });
   expect(appraisePlanet(description).missing.map(({ path }) => path)).toEqual(["atmosphere.pressure"]);
-  const wins = entryOf({}, { assume: { name: "Other", orbit: { eccentricity: 0 } } }).description;
-  expect(wins).toMatchObject({ name: "Other", orbit: { eccentricity: 0 } });
+});
+
+test("what the row says stays, and what it leaves open is assumed", () => {
+  const assume = { name: "Other", orbit: { eccentricity: 0 }, star: { name: "Sun" }, mass: "1 earthMass" };
+  const more = { assume, mass: { column: "m", unit: "earthMass" } };
+  const of = (fields: object) => entryOf(fields, more).description;
+  expect(of({ e: 0.4, m: "2" })).toMatchObject({
+    name: "Vellamar b",
+    star: { name: "Vellamar" },
+    orbit: { eccentricity: { value: 0.4, unit: "1" } },
+    mass: { value: 2, unit: "earthMass" },
+  });
+  expect(of({ e: "<0.4", planet: "", host: "", m: "" })).toMatchObject({
+    name: "Other",
+    star: { name: "Sun" },
+    orbit: { eccentricity: 0 },
+    mass: "1 earthMass",
+  });
+});
+
+test("body, rotation and internal heat have columns", () => {
+  const { description, missing } = fromCatalogueRow(
+    { m: 1.7, r: "1.2", day: "30", heat: "", m_err: 0.1 },
+    {
+      mass: { column: "m", unit: "earthMass", plus: "m_err" },
+      radius: { column: "r", unit: "earthRad" },
+      rotation: { period: { column: "day", unit: "d" } },
+      internalHeat: { column: "heat", unit: "W m-2" },
+    },
+  );
+  expect(description).toEqual({
+    format: "thermostead-planet-1",
+    orbit: {},
+    mass: { value: 1.7, unit: "earthMass", plus: 0.1 },
+    radius: { value: 1.2, unit: "earthRad" },
+    rotation: { period: { value: 30, unit: "d" } },
+  });
+  expect(missing).toEqual(["internalHeat"]);
+  const light = { star: plain().star, orbit: plain().orbit };
+  expect(appraisePlanet({ ...description, ...light }).inputs.map(({ path }) => path)).toContain("mass");
+});
+
+test("columns that the row does not have are listed, whatever they hold", () => {
+  const { absent, missing } = entryOf(
+    {},
+    {
+      name: "plnet",
+      star: { name: "hots", radius: { column: "radius", unit: "solRad", minus: "radius_mius" } },
+      discovery: { column: "mehtod", imaging: "imaging" },
+    },
+  );
+  expect(absent).toEqual(["plnet", "hots", "mehtod", "radius_mius"]);
+  expect(missing).toEqual(["name", "star.name", "orbit.period"]);
+  expect(entryOf()).toMatchObject({ absent: [] });
+  // an empty cell is there
+  expect(entryOf({ planet: "" })).toMatchObject({ absent: [], missing: ["name", "orbit.period"] });
+});
+
+test("a list of stars can be assumed where no column tells a star", () => {
+  const star = [{ luminosity: "0.3 solLum" }, { luminosity: "0.1 solLum", distance: "30 au" }];
+  expect(fromCatalogueRow(row, { assume: { star } }).description).toMatchObject({ star });
+  expect(refusal(() => entryOf({}, { assume: { star } }))).toMatchObject({
+    code: "unreadable",
+    path: "mapping.assume.star",
+  });
 });
 
 test("a mass that is assumed is not compared before it is appraised", () => {
@@ -132,7 +196,8 @@ describe("a cell that cannot be used is refused and left out", () => {
       fromCatalogueRow(row, { name: "toString", orbit: { flux: { column: "constructor", unit: "W m-2" } } }),
     ).toMatchObject({
       description: { orbit: {} },
-      missing: ["orbit.flux"],
+      missing: ["name", "orbit.flux"],
+      absent: ["toString", "constructor"],
     });
   });
 });
@@ -170,14 +235,14 @@ describe("a wrong mapping is refused", () => {
       row,
       { orbit: { semiMajorAxis: { column: "a", unit: "furlong" } } },
       "unknown-unit",
-      "orbit.semiMajorAxis",
+      "mapping.orbit.semiMajorAxis",
     ],
     [
       "a unit of something else",
       row,
       { orbit: { semiMajorAxis: { column: "a", unit: "kg" } } },
       "unit-mismatch",
-      "orbit.semiMajorAxis",
+      "mapping.orbit.semiMajorAxis",
     ],
     [
       "no unit where one is needed",
@@ -186,6 +251,40 @@ describe("a wrong mapping is refused", () => {
       "unit-mismatch",
       "mapping.orbit.semiMajorAxis",
     ],
+    [
+      "a unit of a pure number",
+      row,
+      { orbit: { eccentricity: { column: "e", unit: "K" } } },
+      "unit-mismatch",
+      "mapping.orbit.eccentricity",
+    ],
+    ["a unit that is no text", row, { mass: { column: "m", unit: 5 } }, "unreadable", "mapping.mass.unit"],
+    [
+      "a unit is checked in empty rows",
+      {},
+      { mass: { column: "m", unit: "s" } },
+      "unit-mismatch",
+      "mapping.mass",
+    ],
+    [
+      "a key that a column does not have",
+      row,
+      { orbit: { eccentricity: { column: "e", error: "x" } } },
+      "unknown-name",
+      "mapping.orbit.eccentricity.error",
+    ],
+    [
+      "an error that names no column",
+      row,
+      { orbit: { eccentricity: { column: "e", plus: 0.1 } } },
+      "unreadable",
+      "mapping.orbit.eccentricity.plus",
+    ],
+    ["a name that names no column", row, { name: 3 }, "unreadable", "mapping.name"],
+    ["a part that is a text", row, { star: "x" }, "unreadable", "mapping.star"],
+    ["assumptions that are a text", row, { assume: "x" }, "unreadable", "mapping.assume"],
+    ["an assumed part that is a text", row, { assume: { orbit: "x" } }, "unreadable", "mapping.assume.orbit"],
+    ["half a discovery", row, { discovery: { column: "method" } }, "unreadable", "mapping.discovery.imaging"],
   ])("%s", (_, from, by, code, path) => {
     expect(refusal(() => fromCatalogueRow(from as never, by as never))).toMatchObject({ code, path });
   });

@@ -25,7 +25,14 @@ export interface AppraisalSource {
 }
 
 /** A diagram, and the units in which the description has its givens; a luminosity that it does not have is in `solLum`. */
-export type AppraisedDiagram = Diagram & { readonly units: readonly WrittenUnit[] };
+export type AppraisedDiagram = Diagram & {
+  readonly units: readonly WrittenUnit[];
+  /**
+   * Where the planet is on it: today's value of `along`, in `unit`, and the temperatures of the climates that hold there, K.
+   * A star that is told by radius and temperature has its luminosity here, which is no given of the states.
+   */
+  readonly now: { readonly at: number; readonly temperatures: readonly number[] };
+};
 
 /** What `appraisePlanet` returns. */
 export interface Appraisal {
@@ -44,7 +51,12 @@ export interface Appraisal {
   readonly found: FoundStates | null;
   /** By rising temperature. */
   readonly states: readonly StateAppraisal[];
-  /** All climates as the star brightens or fades, from 0.4 to 2.5 times today's; null where nothing stands for the star. */
+  /**
+   * Where the temperature goes from anywhere in the searched range if there is no climate in it, which is proved; null where
+   * there is one, or nothing is proved.
+   */
+  readonly leaves: "hotter" | "colder" | null;
+  /** All climates as the star brightens or fades, from 0.4 to 2.5 times today's, also where there is none today; null where nothing stands for the star, or it gives no light. */
   readonly diagram: AppraisedDiagram | null;
   /** Published limits; empty where the effective temperature is not given or outside of their range. */
   readonly habitableZone: readonly StatedLimit[];

@@ -42,8 +42,8 @@ const CAUTION =
  * where its pressure is given; assumptions, cautions and sources. It says nothing of life, and gives no score.
  *
  * The description is that of `readPlanet`, and may be incomplete: without `albedo` (or `surface`), `longwave` or
- * `redistribution` there are no states, without `heatCapacity` no times; `missing` says so. Inputs that contradict each other are noted, and the
- * first is used. All numbers in SI. The record survives `JSON.stringify`; `toText`, `toMarkdown` and `toRows` write it.
+ * `redistribution` there are no states, without `heatCapacity` no times, without an eccentricity the orbit is a circle;
+ * `missing` says so. Inputs that contradict each other are noted, and the first is used. All numbers in SI. The record survives `JSON.stringify`; `toText`, `toMarkdown` and `toRows` write it.
  *
  * Throws what `readPlanet` throws, except for contradictions, and what `findStates` throws for `within` and `effort`.
  *
@@ -71,7 +71,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
   const star = hasBudget ? alongStar(planet, reading) : null;
   const climates: Climates = hasBudget
     ? statesOfPlanet({ loop, facts, inputs, units: planet.units, star }, { within, effort })
-    : { found: null, states: [], diagram: null };
+    : { found: null, states: [], leaves: null, diagram: null };
   const { states } = climates;
   const hasAlbedo = !filled.has("albedo") && !filled.has("surface");
   const hasShare = hasAlbedo && !filled.has("redistribution");
@@ -102,7 +102,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
     star: host?.name ?? null,
     description: given,
     inputs,
-    missing: [...whole.missing, ...missingFacts(facts, { hasBudget })],
+    missing: [...whole.missing, ...missingFacts(planet, { hasBudget })],
     starlight,
     equilibrium,
     ...climates,

@@ -17,6 +17,7 @@ export interface Starlight {
   readonly semiMajorAxis: number | null;
   /** Orbital period, s. */
   readonly period: number | null;
+  /** 0 where none is given, which `missing` says. */
   readonly eccentricity: number;
   /** At the distance of the semi-major axis. */
   readonly atSemiMajorAxis: StatedFlux;

@@ -4,10 +4,18 @@ import type { StateAppraisal } from "./appraisedState.ts";
 import { feedbackTable } from "./feedbackTable.ts";
 import { ledgerTable } from "./ledgerTable.ts";
 import { marginLines } from "./marginLines.ts";
+import { ECCENTRICITY } from "./missingFacts.ts";
 import { kelvin, type Section, shown, signed, type Table, YEAR } from "./report.ts";
 
 /** States, ledgers, what holds and what would change them, how far they are from an end, and their surfaces. */
-export function climateSections({ found, states, diagram, starlight, equilibrium }: Appraisal): Section[] {
+export function climateSections({
+  found,
+  states,
+  diagram,
+  starlight,
+  equilibrium,
+  missing,
+}: Appraisal): Section[] {
   if (!found) return [];
   const range = `${found.within.join(" and ")} K`;
   const holding = states.filter((s) => s.feedbacks !== null);
@@ -26,14 +34,16 @@ export function climateSections({ found, states, diagram, starlight, equilibrium
     { title: "How far each climate is from an end of its branch", blocks: marginLines(holding, diagram) },
     {
       title: "Which average over the orbit suits",
-      blocks: [
-        ...(starlight.eccentricity === 0 ? ["the orbit is a circle, so that all averages are the same"] : []),
-        ...averagingLines(holding),
-      ],
+      blocks: [...(starlight.eccentricity === 0 ? [circleText(missing)] : []), ...averagingLines(holding)],
     },
     { title: "Water and carbon dioxide at the surface", blocks: surfaceBlocks(states) },
   ];
 }
+
+const circleText = (missing: Appraisal["missing"]): string =>
+  missing.some(({ path }) => path === ECCENTRICITY)
+    ? "the orbit is taken to be a circle, so that all averages are the same"
+    : "the orbit is a circle, so that all averages are the same";
 
 function stateBlocks(states: readonly StateAppraisal[]): Table[] {
   if (states.length === 0) return [];

@@ -86,7 +86,7 @@ function positionAt(flux: number, starlight: Starlight): Pick<StatedLimit, "rati
   return { ratio: mean / flux, position };
 }
 
-/** The folds and corners at which the climates that hold end as the star brightens or fades. */
+/** The folds, corners and leaps at which the climates that hold end as the star brightens or fades. */
 export function ownLimits(
   states: readonly StateAppraisal[],
   { mean, semiMajorAxis }: Starlight,
@@ -94,8 +94,8 @@ export function ownLimits(
   return states.flatMap(({ state, margins }) => {
     if (!margins) return [];
     const { at } = margins;
-    const ended = [margins.rise, margins.fall].filter(
-      ({ end }) => end.kind === "fold" || end.kind === "corner",
+    const ended = [margins.rise, margins.fall].filter(({ end }) =>
+      ["fold", "corner", "leap"].includes(end.kind),
     );
     return ended.map(({ direction, end }: Margin): StatedLimit => {
       const brighter = end.at / at;

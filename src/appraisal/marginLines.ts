@@ -1,5 +1,6 @@
 // How far the climates that hold are from an end of their branches, in words.
 import type { Margin, TippingMargins } from "../branches/margins.ts";
+import type { Range } from "../ground/range.ts";
 import type { Appraisal } from "./appraisal.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { kelvin, shown, YEAR } from "./report.ts";
@@ -16,10 +17,14 @@ export function marginLines(states: readonly StateAppraisal[], diagram: Appraisa
     const all = [marginText(margins, margins.rise), marginText(margins, margins.fall), basin];
     return all.filter(Boolean).map((text) => at + text);
   });
-  const { along, proof, between } = diagram;
-  const now = states.find(({ margins }) => margins)?.margins?.at;
-  const range = now ? ` from ${between.map((end) => shown(end / now, 4)).join(" to ")} times today's` : "";
-  return [...lines, `followed: ${along}${range}, all else fixed; diagram: ${proof}`];
+  const { along, proof, between, gaps, now } = diagram;
+  const range = (ends: Range) =>
+    `from ${ends.map((end) => shown(end / now.at, 4)).join(" to ")} times today's`;
+  const none = gaps.map(
+    ({ parameters, too }) =>
+      `${range(parameters)}, no climate in the searched range${too ? `: too ${too}` : ""}`,
+  );
+  return [...lines, ...none, `followed: ${along} ${range(between)}, all else fixed; diagram: ${proof}`];
 }
 
 /** What changes and how far, such as "if the star fades by 11.86 %". */
@@ -44,15 +49,28 @@ function marginText(margins: TippingMargins, margin: Margin): string {
       : `leaves the searched range${jump.leaves ? `, ${jump.leaves}` : ""}`;
     const back =
       jump.returnsAt === null
-        ? "there is no way back"
+        ? jump.noReturn
+          ? "there is no way back"
+          : "whether there is a way back is not known"
         : `the way back is at ${shown(jump.returnsAt / at, 4)} times today's`;
     return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K and ${next}; ${back}`;
   }
   if (end.kind === "between")
     return `${turnText(along, direction)}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} times today's`;
   if (end.kind === "within") return `${by}, it leaves the searched range at ${kelvin(end.temperature)} K`;
-  if (end.kind === "undecided") return `${by}, nothing is proved beyond ${kelvin(end.temperature)} K`;
+  if (end.kind === "undecided")
+    return `${turnText(along, direction)}, ${undecidedText(end, { at, direction })}`;
   return `${by}, it ends in a ${end.kind} point at ${kelvin(end.temperature)} K`;
+}
+
+/** An undecided end is a box: how far the branch surely goes, and between which temperatures nothing is proved. */
+function undecidedText(
+  { atBracket, temperatureBracket }: Margin["end"],
+  { at, direction }: { at: number; direction: Margin["direction"] },
+): string {
+  const near = atBracket[direction === "rise" ? 0 : 1] / at;
+  const nothing = `nothing is proved between ${temperatureBracket.map(kelvin).join(" and ")} K`;
+  return `${nothing}, from ${shown(near, 4)} times today's on`;
 }
 
 function basinText({ coldest, hottest }: { coldest: number | null; hottest: number | null }): string {

@@ -1,16 +1,23 @@
 // What an appraisal cannot say because a fact beside the budget is not known.
-import type { PlanetFacts } from "../planet/facts.ts";
+import type { Planet } from "../planet/planetTypes.ts";
 import type { MissingField } from "./appraisal.ts";
 import { hostOf } from "./hostOf.ts";
 
+/** What is read as 0 where it is not given. */
+export const ECCENTRICITY = "orbit.eccentricity";
+
 /** Facts that are not given and do not follow, and what cannot be said without them. */
-export function missingFacts(facts: PlanetFacts, { hasBudget }: { hasBudget: boolean }): MissingField[] {
+export function missingFacts(
+  { facts, description }: Pick<Planet, "facts" | "description">,
+  { hasBudget }: { hasBudget: boolean },
+): MissingField[] {
   const host = hostOf(facts);
   const star = host?.path ?? "star";
   const missing: MissingField[] = [];
-  const need = (value: number | null, path: string, text: string) => {
+  const need = (value: unknown, path: string, text: string) => {
     if (value === null) missing.push({ path, text });
   };
+  need(description.orbit.eccentricity ?? null, ECCENTRICITY, "taken as 0, which is a circular orbit");
   need(
     host?.effectiveTemperature ?? null,
     `${star}.effectiveTemperature`,

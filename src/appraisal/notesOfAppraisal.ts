@@ -6,6 +6,7 @@ import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { hostOf } from "./hostOf.ts";
 import { limitsArePublished, PUBLISHED_STARS } from "./limits.ts";
+import { shown } from "./report.ts";
 import { unlikelyNotes } from "./unlikelyNotes.ts";
 
 /** From here on the flux at periastron is half as large again as at apoastron, and a circle is a poor likeness; no source. */
@@ -84,10 +85,10 @@ function orbitNotes({ planet: { facts, assumptions }, states }: Noted): Appraisa
   for (const { state, averaging } of states) {
     const { favours, thermalInertiaRatio } = averaging;
     if (thermalInertiaRatio === null || favours === assumptions.average) continue;
-    const at = `the thermal inertia at ${state.temperature.toFixed(2)} K`;
+    const at = `thermal time / orbital period = ${shown(thermalInertiaRatio, 4)} at ${state.temperature.toFixed(2)} K`;
     notes.push(
       caution({
-        ...{ code: "average-not-favoured", about: "orbit.average", value: thermalInertiaRatio },
+        ...{ code: "average-not-favoured", about: "orbit.average" },
         text: favours
           ? `${at} speaks for the mean of the ${favours}`
           : `${at} is between the cases: neither average is a good guide`,

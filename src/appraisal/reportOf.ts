@@ -5,6 +5,7 @@ import { checkAppraisal } from "./checkAppraisal.ts";
 import { climateSections } from "./climateSections.ts";
 import { inputTable } from "./inputTable.ts";
 import { limitSections } from "./limitSections.ts";
+import { ECCENTRICITY } from "./missingFacts.ts";
 import { noteSections } from "./noteSections.ts";
 import { kelvin, oneLine, type Report, type Section, shown, type Table } from "./report.ts";
 import { summaryOf } from "./summary.ts";
@@ -41,15 +42,18 @@ function aboutOf({ description }: Appraisal): string {
   return [...(source === undefined ? [] : [source]), ...(notes ?? [])].map(stopped).join(" ");
 }
 
-function starlight({ starlight }: Appraisal): Section {
+function starlight({ starlight, missing }: Appraisal): Section {
   const { luminosity, semiMajorAxis, period, eccentricity } = starlight;
+  const isGiven = !missing.some(({ path }) => path === ECCENTRICITY);
   const facts = [
     luminosity === null
       ? ""
       : `luminosity ${shown(luminosity)} W (${shown(luminosity / SOLAR_LUMINOSITY, 4)} of the Sun's)`,
     semiMajorAxis === null ? "" : `semi-major axis ${shown(semiMajorAxis / ASTRONOMICAL_UNIT, 4)} au`,
     period === null ? "" : `orbital period ${shown(period / 86400, 4)} d`,
-    eccentricity === 0 ? "circular orbit" : `eccentricity ${shown(eccentricity)}`,
+    eccentricity === 0
+      ? `circular orbit${isGiven ? "" : ", as no eccentricity is given"}`
+      : `eccentricity ${shown(eccentricity)}`,
   ];
   const { mean, atSemiMajorAxis, periastron, apoastron, companions } = starlight;
   const all = { "at the semi-major axis": atSemiMajorAxis };

@@ -12,10 +12,11 @@ import type { Loop } from "../loop/types.ts";
 import type { PlanetFacts } from "../planet/facts.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
 import type { WrittenUnit } from "../planet/writtenUnits.ts";
+import { budgetCurve } from "../states/budgetCurve.ts";
 import { findStates } from "../states/findStates.ts";
 import type { FoundStates, State } from "../states/state.ts";
 import type { AlongStar } from "./alongStar.ts";
-import type { AppraisedDiagram } from "./appraisal.ts";
+import type { Appraisal, AppraisedDiagram } from "./appraisal.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { placeTemperatures } from "./equilibriumTemperatures.ts";
 import { orbitAveraging } from "./orbitAveraging.ts";
@@ -41,6 +42,7 @@ export interface Search {
 export interface Climates {
   readonly found: FoundStates | null;
   readonly states: readonly StateAppraisal[];
+  readonly leaves: Appraisal["leaves"];
   readonly diagram: AppraisedDiagram | null;
 }
 
@@ -61,7 +63,7 @@ export function statesOfPlanet(
   const spend = effort === undefined ? {} : { effort };
   const found = findStates(loop, { within, ...spend });
   const { heatCapacity, orbitalPeriod: period, surfacePressure } = facts;
-  const diagram = branchesOf(found.states, star, { within, ...spend });
+  const diagram = star && branchesOf(star, { within, ...spend });
   const internalFlux = inputs.find(({ path }) => path === "internalHeat")?.value ?? 0;
   const states = found.states.map((state): StateAppraisal => {
     const holds = state.stability === "stable";
@@ -82,7 +84,25 @@ export function statesOfPlanet(
       surface: surfacePressure === null ? null : surfacePhases({ temperature, pressure: surfacePressure }),
     };
   });
-  return { found, states, diagram: diagram && { ...diagram, units: unitsOf(diagram, units) } };
+  const holding = found.states.filter(({ stability }) => stability === "stable");
+  return {
+    found,
+    states,
+    leaves: leavesOf(loop, found),
+    diagram: diagram && {
+      ...diagram,
+      units: unitsOf(diagram, units),
+      now: { at: star.now, temperatures: holding.map(({ temperature }) => temperature) },
+    },
+  };
+}
+
+/** Without a state in a range, the balance has one sign all over it. */
+function leavesOf(loop: Loop, { complete, states, within }: FoundStates): Appraisal["leaves"] {
+  if (!complete || states.length > 0) return null;
+  const gains = budgetCurve(loop, { within, points: 2 }).points.map((p) => p.heating - p.cooling);
+  if (gains.length === 2 && gains.every((gain) => gain > 0)) return "hotter";
+  return gains.length === 2 && gains.every((gain) => gain < 0) ? "colder" : null;
 }
 
 /** Units of the givens of a diagram. What stands for the star is an input, or the luminosity that follows from others. */
@@ -92,16 +112,14 @@ function unitsOf({ along, fixed }: Diagram, units: readonly WrittenUnit[]): Writ
   return [{ name: along, unit: "solLum", size: SOLAR_LUMINOSITY }, ...own];
 }
 
-/** The diagram of all climates as the star brightens or fades; null where there is none that holds, or no given for the star. */
+/** The diagram of all climates as the star brightens or fades, also where there is none today; null without any light. */
 function branchesOf(
-  states: readonly State[],
-  star: AlongStar | null,
+  { loop, along, now }: AlongStar,
   search: { readonly within: Range; readonly effort?: number },
 ): Diagram | null {
-  if (star === null || !states.some((state) => state.stability === "stable")) return null;
-  const { loop, along, now } = star;
   const [low, high] = loop.givens.find((given) => given.name === along)?.within ?? [0, Number.MAX_VALUE];
   const between = [Math.max(FACTORS[0] * now, low), Math.min(FACTORS[1] * now, high)] as const;
+  if (!(between[0] < between[1])) return null;
   return traceBranches(loop, { along, between, tolerance: TOLERANCE, ...search });
 }
 

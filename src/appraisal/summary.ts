@@ -7,13 +7,22 @@ import { counted, kelvin, shown } from "./report.ts";
 export const summaryOf = (appraisal: Appraisal): string =>
   [climates(appraisal), tipping(appraisal)].filter(Boolean).join(" ");
 
-function climates({ found, states }: Appraisal): string {
+function climates({ found, states, leaves }: Appraisal): string {
   if (found === null) return "No climates were looked for: a part of the budget is not given.";
   const range = `with the surface between ${found.within.join(" and ")} K`;
   if (states.length === 0)
-    return found.complete ? `No climate ${range}: proved.` : `No climate was found ${range}: not proved.`;
+    return found.complete
+      ? `No climate ${range}: proved.${beyond(leaves)}`
+      : `No climate was found ${range}: not proved.`;
   const stable = states.filter(({ state }) => state.stability === "stable");
   return `${counted(states.length, "climate")} ${range}, ${proofText(found)}: ${stableText(stable)}.`;
+}
+
+function beyond(leaves: Appraisal["leaves"]): string {
+  if (leaves === null) return "";
+  const [flows, where] =
+    leaves === "hotter" ? ["gains more than it loses", "above"] : ["loses more than it gains", "below"];
+  return ` All over that range the planet ${flows}, so that it goes on to ${leaves} ones: look ${where} it with a wider within.`;
 }
 
 function proofText({ proof, states }: NonNullable<Appraisal["found"]>): string {
@@ -42,7 +51,6 @@ function tipping({ states, diagram }: Appraisal): string {
     return `${which} tipping point: ${changeText(margins, margin)}, the climate at ${kelvin(state.temperature)} K ends.`;
   }
   if (!diagram.complete || ways.length === 0) return "";
-  const now = ways[0]?.margins.at ?? 1;
-  const range = diagram.between.map((end) => shown(end / now, 4)).join(" to ");
+  const range = diagram.between.map((end) => shown(end / diagram.now.at, 4)).join(" to ");
   return `No tipping point from ${range} times today's light.`;
 }

@@ -28,9 +28,7 @@ export function assumptionNotes(checked: CheckedPlanet, a: PlanetAssumptions): P
   return [
     albedoNote(a),
     spreadNote(checked, a),
-    a.average === null
-      ? note("orbit.average", "a circular orbit, nothing is averaged")
-      : note("orbit.average", a.average === "flux" ? MEAN_FLUX : MEAN_TEMPERATURE, a.eccentricity),
+    orbitNote(checked, a),
     note("equilibriumTemperature", "the temperature of re-radiation with emissivity 1, not the surface's"),
     ...starNotes(checked),
     ...longwaveNotes(checked.description),
@@ -53,6 +51,15 @@ function albedoNote({ albedo, albedoLaw, albedoOf }: PlanetAssumptions): PlanetN
         `Bond albedo${from} as a number: it does not answer to the climate${BELOW[albedoOf]}`,
         albedo,
       );
+}
+
+/** An orbit whose eccentricity is not given is read as a circle. */
+function orbitNote({ description }: CheckedPlanet, { average, eccentricity }: PlanetAssumptions): PlanetNote {
+  if (description.orbit.eccentricity === undefined)
+    return note("orbit.eccentricity", "circular, as none is given: nothing is averaged");
+  if (average === null) return note("orbit.average", "a circular orbit, nothing is averaged");
+  const text = average === "flux" ? MEAN_FLUX : MEAN_TEMPERATURE;
+  return note("orbit.average", `${text} (eccentricity ${eccentricity})`);
 }
 
 function spreadNote({ description: d }: CheckedPlanet, { redistribution }: PlanetAssumptions): PlanetNote {

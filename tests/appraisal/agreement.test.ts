@@ -125,11 +125,13 @@ describe("climates", () => {
     const along = "star.luminosity";
     const now = 0.2 * SUN;
     const between = [0.4 * now, 2.5 * now] as const;
-    const { units, ...diagram } = appraised as NonNullable<typeof appraised>;
+    const { units, now: place, ...diagram } = appraised as NonNullable<typeof appraised>;
     const { units: ofLoop, ...traced } = traceBranches(planet.loop, {
       ...{ along, between, within, tolerance: 5e-4 },
     });
     expect(diagram).toEqual(traced);
+    const holding = states.filter(({ state }) => state.stability === "stable");
+    expect(place).toEqual({ at: now, temperatures: holding.map(({ state }) => state.temperature) });
     expect(ofLoop).toContainEqual({ name: along, unit: "W" });
     expect(units).toContainEqual({ name: along, unit: "solLum", size: SUN });
     expect(units.map(({ name }) => name).sort()).toEqual([along, ...Object.keys(diagram.fixed)].sort());
@@ -147,6 +149,34 @@ describe("climates", () => {
     );
     expect(states.map(({ margins }) => margins)).toEqual(asked);
     expect(asked.filter(Boolean)).toHaveLength(2);
+  });
+
+  test("have their place on the diagram also where the luminosity is no given of theirs", () => {
+    const { states, diagram, starlight } = appraisePlanet(plain());
+    const [{ state }] = states as [(typeof states)[number]];
+    expect(Object.keys(state.givens)).not.toContain(diagram?.along);
+    expect(diagram?.now).toEqual({ at: starlight.luminosity, temperatures: [state.temperature] });
+    const branch = diagram?.branches[0];
+    const before = branch?.points.filter(({ at }) => at <= (starlight.luminosity as number)).at(-1);
+    const after = branch?.points.find(({ at }) => at >= (starlight.luminosity as number));
+    expect(before?.temperature).toBeLessThanOrEqual(state.temperature);
+    expect(after?.temperature).toBeGreaterThanOrEqual(state.temperature);
+  });
+
+  test("need not be there for a diagram, which tells where they are", () => {
+    const far = appraisePlanet(plain({ orbit: { semiMajorAxis: "0.9 au" } }), { within: [220, 400] });
+    expect(far).toMatchObject({ states: [], leaves: "colder", diagram: { now: { temperatures: [] } } });
+    expect(far.diagram?.branches).toHaveLength(1);
+    const near = appraisePlanet(plain({ orbit: { semiMajorAxis: "0.2 au" } }), { within: [220, 400] });
+    expect(near).toMatchObject({ states: [], leaves: "hotter", diagram: { proof: "proved" } });
+    expect(appraisePlanet(plain()).leaves).toBeNull();
+    // a step of the albedo inside the range: there is no state, and nothing is proved
+    const leap = { law: "stepAlbedo", cold: 0.6, warm: 0.3, threshold: "265 K" };
+    expect(appraisePlanet(plain({ albedo: leap }), { within: [264, 266] })).toMatchObject({
+      ...{ states: [], leaves: null },
+    });
+    const dark = plain({ orbit: { flux: "0 W m-2" }, internalHeat: "3 W m-2" });
+    expect(appraisePlanet(dark)).toMatchObject({ diagram: null, states: [{ margins: null }] });
   });
 
   test("within another range are searched there", () => {

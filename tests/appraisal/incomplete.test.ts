@@ -1,5 +1,6 @@
 // What an appraisal says of a planet that is not wholly known, of stars that are several, and of inputs that contradict.
 import { describe, expect, it, test } from "vitest";
+import type { Appraisal } from "../../src/appraisal/appraisal.ts";
 import { appraisePlanet } from "../../src/appraisal/appraisePlanet.ts";
 import { toText } from "../../src/appraisal/toText.ts";
 import { codesOf, firstOf, numbersIn, plain, snowy, without } from "./planets.ts";
@@ -68,6 +69,7 @@ describe("a field that is left out is named, and what rests on it is left out", 
       "albedo",
       "longwave",
       "heatCapacity",
+      "orbit.eccentricity",
     ]);
     expect(appraisal.inputs.map(({ path }) => path)).toEqual([
       "star.radius",
@@ -98,6 +100,28 @@ describe("a field that is left out is named, and what rests on it is left out", 
     expect(open?.states).toEqual(closed?.states);
     expect(open?.missing.map(({ path }) => path)).toContain("orbit.average");
     expect(closed?.missing.map(({ path }) => path)).not.toContain("orbit.average");
+  });
+
+  test("the eccentricity: a circle is taken, and said", () => {
+    const orbit = { semiMajorAxis: "0.46 au" };
+    const [open, closed] = [{}, { eccentricity: 0 }].map((more) =>
+      appraisePlanet(plain({ orbit: { ...orbit, ...more } })),
+    ) as [Appraisal, Appraisal];
+    const path = "orbit.eccentricity";
+    expect(open.starlight).toEqual(closed.starlight);
+    expect(open.missing).toContainEqual({ path, text: "taken as 0, which is a circular orbit" });
+    expect(closed.missing.map((field) => field.path)).not.toContain(path);
+    const saying = (appraisal: Appraisal) =>
+      appraisal.notes.filter(({ about }) => about.startsWith("orbit."));
+    expect(saying(open)[0]).toMatchObject({
+      about: path,
+      text: "circular, as none is given: nothing is averaged",
+    });
+    expect(saying(closed)[0]).toMatchObject({ text: "a circular orbit, nothing is averaged" });
+    expect(toText(open)).toContain("circular orbit, as no eccentricity is given");
+    expect(toText(open)).toContain("the orbit is taken to be a circle");
+    // a flux alone is read the same way
+    expect(missingOf({ format: "thermostead-planet-1", orbit: { flux: "1361 W m-2" } })).toContain(path);
   });
 
   it.each([

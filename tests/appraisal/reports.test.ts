@@ -95,8 +95,44 @@ describe("text", () => {
     expect(text.replace(/\s+/g, " ")).toContain(told);
   });
 
+  const ceiling = { law: "ceilingEmission", ceiling: "280 W m-2" };
+  const under = (emission: object, description = plain) =>
+    toText(appraisePlanet(description({ longwave: { ...ceiling, emission } }))).replace(/\s+/g, " ");
+
+  test("says that there is no way back only where that is known", () => {
+    // the way back leads through a stretch that is not decided: under a ceiling
+    expect(under({ law: "greyColumnEmission", opticalDepth: 0.9 }, snowy)).toContain(
+      "jumps to 1400.00 K; whether there is a way back is not known",
+    );
+    const short = appraisePlanet(snowy({ star: { luminosity: "0.25 solLum" } }));
+    const [climate] = short.states.filter(({ margins }) => margins?.fall.jump);
+    const fall = climate?.margins?.fall as NonNullable<NonNullable<typeof climate>["margins"]>["fall"];
+    const jump = { ...fall.jump, returnsAt: null };
+    const said = (noReturn: boolean) => {
+      const margins = { ...climate?.margins, fall: { ...fall, jump: { ...jump, noReturn } } };
+      const states = [{ ...climate, margins }];
+      return toText({ ...short, states } as unknown as typeof short).replace(/\s+/g, " ");
+    };
+    expect(said(true)).toContain("K; there is no way back");
+    expect(said(false)).toContain("K; whether there is a way back is not known");
+  });
+
+  test("has the bounds of what is not decided at an end, never a number in the middle", () => {
+    expect(under({ law: "greyEmission", emissivity: 0.62 })).toContain(
+      "if the star brightens, nothing is proved between 298.74 and 1400.00 K, from 1.245 times today's on",
+    );
+  });
+
+  test("says along the star where there is no climate, and why", () => {
+    const far = appraisePlanet(plain({ orbit: { semiMajorAxis: "0.9 au" } }), { within: [220, 400] });
+    expect(toText(far)).toMatch(
+      /from 0\.4 to 1\.\d+ times today's, no climate in the searched range: too cold/,
+    );
+  });
+
   test("says that a circular orbit has one average", () => {
-    expect(toText(appraisePlanet(plain()))).toContain(
+    const orbit = { semiMajorAxis: "0.46 au", eccentricity: 0 };
+    expect(toText(appraisePlanet(plain({ orbit })))).toContain(
       "the orbit is a circle, so that all averages are the same",
     );
   });
@@ -140,7 +176,7 @@ describe("the summary on top", () => {
     [
       "no climate",
       plain({ orbit: { semiMajorAxis: "900 au" } }),
-      "No climate with the surface between 50 and 2500 K: proved.",
+      "No climate with the surface between 50 and 2500 K: proved. All over that range the planet loses more than it gains, so that it goes on to colder ones: look below it with a wider within.",
     ],
     [
       "no budget",

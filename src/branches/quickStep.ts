@@ -91,6 +91,7 @@ function quickStep(loop: Loop, changed: string): QuickStep {
     }
     if (edgeSign(top) !== sign || edgeSign(bottom) !== -sign) return undefined;
     low[0] = bottom;
+    high[0] = top;
     box(low, high, out);
     if (signOf(out[3] as number, out[4] as number, out[5] as number) !== sign) return undefined;
     pointSign(x);

@@ -5,7 +5,7 @@ import type { Followed, Moving, Start, Underway } from "./moving.ts";
 import { readBox } from "./readBox.ts";
 import { Reader } from "./reader.ts";
 import { refineProved } from "./refineProved.ts";
-import { findTurning, proveTurning, type TurningPlace } from "./turning.ts";
+import { findTurning, LEAST_REACH, proveTurning, type TurningPlace } from "./turning.ts";
 import { Zero } from "./zero.ts";
 
 /** Steps of the path below this are not tried; two zeros closer to meeting than this are not told apart. */
@@ -15,8 +15,6 @@ const SUSPECT = 0.015625;
 /** How far a box reaches beyond its zeros, as a share of their distance; widened while its edges are not decided. */
 const FIRST_SPREAD = 0.25;
 const WIDEST_SPREAD = 64;
-/** The least reach of a box, relative to the place. */
-const LEAST_REACH = 1e-10;
 const MOST_TILES = 5000;
 
 /**

@@ -19,6 +19,8 @@ const NEAREST = 1e-9;
 /** Difference quotients do not resolve a slope closer to its zero. */
 const NEAREST_SAMPLED = 1e-6;
 const FARTHEST = 1e-3;
+/** The least reach of a box around a zero that is followed, relative to the place. */
+export const LEAST_REACH = 1e-12;
 const BEYOND = 8;
 /** The function there exceeds its rounding by this. */
 const CLEAR = 1e4;
@@ -69,7 +71,13 @@ export function findTurning(f: Moving, reader: Reader, { at, step, range }: Ahea
   const speed = Math.abs((read(far, x).value - read(stage, x).value) / (far - stage));
   const noise = place.high - place.low;
   reader.give(place);
-  const away = Math.max(f.sampled ? NEAREST_SAMPLED : NEAREST, (CLEAR * noise) / speed);
+  // the last box must not reach over the turning point: at a kink the zero comes to it at a steady pace
+  const pace = Math.abs(x - at.x) / (stage - at.stage);
+  const away = Math.max(
+    f.sampled ? NEAREST_SAMPLED : NEAREST,
+    (CLEAR * noise) / speed,
+    (4 * LEAST_REACH * Math.abs(x)) / pace,
+  );
   if (!(away < FARTHEST)) return undefined;
   return {
     stage,

@@ -1,8 +1,10 @@
 // The state on the same branch at other givens.
 import { describe, expect, test } from "vitest";
 import { followState } from "../../src/branches/followState.ts";
+import { statesOnDiagram } from "../../src/branches/statesOnDiagram.ts";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import * as core from "../../src/index.ts";
+import { randomNumbers } from "../graph/randomGraph.ts";
 import { iceLoop } from "../states/iceLoop.ts";
 import { sampledLoop, stateOf, vapourLoop } from "./loops.ts";
 
@@ -80,4 +82,50 @@ test("a sampled loop is followed without proof", () => {
   expect(found.proof).toBe("sampled");
   const { states } = core.findStates(loop, { within: WITHIN, at: { flux: 1400 } });
   expect(found.state?.temperature).toBeCloseTo(states[2]?.temperature as number, 9);
+});
+
+describe("a fold at a kink", () => {
+  const random = randomNumbers(20261201);
+  const within = [150, 400] as const;
+  const between = [500, 3500] as const;
+  const laws = { ramp: core.rampAlbedo, quadratic: core.quadraticAlbedo };
+
+  test.each(["ramp", "quadratic"] as const)(
+    "%s: is found from near and far, however long the path",
+    (law) => {
+      let met = 0;
+      for (let planet = 0; planet < 12; planet++) {
+        const frozenBelow = 250 + 8 * random();
+        const openAbove = 268 + 15 * random();
+        const loop = core.closeLoop(({ temperature, given }) => {
+          const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+          const albedo = laws[law]({ temperature, cold: 0.7, warm: 0.3, frozenBelow, openAbove });
+          return {
+            heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+            cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+            heatCapacity: 4e8,
+          };
+        });
+        const diagram = traceBranches(loop, { along: "flux", between, within });
+        expect(diagram.complete).toBe(true);
+        for (const { direction, from, at, temperature } of diagram.jumps) {
+          const { parameters, low, high } = diagram.branches[from] as core.Branch;
+          if ((direction === "rise" ? high : low).kind !== "corner") continue;
+          const [near, far] =
+            direction === "rise" ? [parameters[0], between[1]] : [parameters[1], between[0]];
+          // from somewhere on the branch to somewhere beyond its end, both from close by to far away
+          const start = at + (near - at) * 10 ** (-3 * random());
+          const goal = at + (far - at) * 10 ** (-3 * random());
+          const { states, branches } = statesOnDiagram(loop, diagram, start);
+          const state = states[branches.indexOf(from)] as (typeof states)[number];
+          const { lost, state: arrived } = followState(loop, state, { to: { flux: goal } });
+          expect(arrived).toBeNull();
+          expect(lost).toMatchObject({ reason: "corner-fold" });
+          expect(Math.abs((lost?.temperature as number) - temperature)).toBeLessThan(1e-6);
+          met++;
+        }
+      }
+      expect(met).toBeGreaterThan(8);
+    },
+  );
 });

@@ -70,30 +70,31 @@ export function couplingPlot({ feedbacks }: CouplingGraph, page: number): Plot {
     ...{ x: start + 10, y: y - 4 },
     ...{ text: clipped(tip, room, 12), tip },
   });
-  const { others } = feedbacks;
   const unit = unitText(FEEDBACK);
-  const draft = {
-    title: `Couplings at ${numeral(feedbacks.temperature)} K`,
-    caption: [
-      `λ = ${numeral(feedbacks.feedbackParameter, 4)}${unit}, the sum of all that reaches the net flux`,
-      `Numbers in${unit}: what λ would lose without the line`,
-      others && `Not drawn, weaker loops: ${others.count}`,
-    ],
-    layers: [
-      ...layersOf("line", lines, EFFECTS),
-      layerOf("line", heads, { full: true }),
-      layerOf(
-        "box",
-        names.map((name, i) => boxOf([start, right], [topOf(i), topOf(i + 1) + GAP], name)),
-        { open: true },
-      ),
-      layerOf("text", [
-        ...names.map((name, i) => words(topOf(i) - BOX / 2, name)),
-        ...wires.map((wire) =>
-          words(wire.y, `${signed(wire.value)}${room > 300 ? unit : ""} from ${names[wire.from]}`),
+  return drawingOf(
+    {
+      title: `Couplings at ${numeral(feedbacks.temperature)} K`,
+      caption: [
+        `λ = ${numeral(feedbacks.feedbackParameter, 4)}${unit}, all that reaches the net flux`,
+        `Numbers in${unit}: what λ would lose without the line`,
+        feedbacks.others && `Not drawn, weaker loops: ${feedbacks.others.count}`,
+      ],
+      layers: [
+        ...layersOf("line", lines, EFFECTS),
+        layerOf("line", heads, { full: true }),
+        layerOf(
+          "box",
+          names.map((name, i) => boxOf([start, right], [topOf(i), topOf(i + 1) + GAP], name)),
+          { open: true },
         ),
-      ]),
-    ],
-  };
-  return drawingOf(draft, { width, height: -topOf(names.length) - GAP });
+        layerOf("text", [
+          ...names.map((name, i) => words(topOf(i) - BOX / 2, name)),
+          ...wires.map((wire) =>
+            words(wire.y, `${signed(wire.value)}${room > 300 ? unit : ""} from ${names[wire.from]}`),
+          ),
+        ]),
+      ],
+    },
+    { width, height: -topOf(names.length) - GAP },
+  );
 }

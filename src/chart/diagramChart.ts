@@ -50,52 +50,52 @@ export function diagramChart({ diagram, held, state, units = diagram.units }: Di
   const known = (given: string) => units?.find(({ name }) => name === given);
   const { unit, size = 1 } = (known(along) ?? diagram) as GivenUnit;
   const shown = (at: number): number => at / size;
-  const fixed = Object.entries(diagram.fixed).map(([name, value]) => {
-    const { unit, size = 1 } = known(name) ?? ({ unit: "1" } as GivenUnit);
-    return `, ${name} ${numeral(value / size)}${unitText(unit)}`;
-  });
   const branchLayers = (of: Diagram, look: Look, prefix?: string): Layer[] => {
-    const lines = of.branches.flatMap((branch, line) =>
-      lineOf(
-        branch.points.map((point) => [shown(point.at), point.temperature]),
-        line,
-        branch.stability,
+    return layersOf(
+      "line",
+      of.branches.flatMap((branch, line) =>
+        lineOf(
+          branch.points.map((point) => [shown(point.at), point.temperature]),
+          line,
+          branch.stability,
+        ),
       ),
+      MARKS,
+      look,
+      prefix,
     );
-    return layersOf("line", lines, MARKS, look, prefix);
   };
-  const places = [...diagram.folds, ...diagram.crossings].map((place) => ({
-    x: shown(place.at),
-    y: place.temperature,
-    tip: `${rangeText(place.atBracket, 17)}${unitText(diagram.unit)}`,
-    kind: NAMES[place.kind] ?? place.kind,
-  }));
-  // upright lines from the lost to the reached temperature, with an arrow half way
+  // upright lines from the lost to the reached temperature, or to the edge of the picture, with an arrow half way
   const warm: Look = { colour: "warm", dash: [2, 3], width: 1.5 };
   const ways = diagram.jumps
     .filter((jump) => jump.to || jump.leaves)
-    .map((jump) => {
-      const goal = jump.to?.temperature ?? range[jump.leaves === "hotter" ? 1 : 0];
+    .map((jump, i) => {
+      const { to, temperature, leaves } = jump;
+      const goal = to?.temperature ?? range[leaves === "hotter" ? 1 : 0];
       const x = shown(jump.at);
-      return {
-        line: [
-          [x, jump.temperature],
-          [x, goal],
-        ] as const,
-        sign: {
-          x,
-          y: (jump.temperature + goal) / 2,
-          tip: `a slow ${jump.direction} jumps to ${numeral(goal)}`,
-        },
-        shape: goal > jump.temperature ? "triangle-up" : "triangle-down",
-      };
+      const end = to ? `jumps to ${numeral(goal)} K` : `leaves the searched range, ${leaves}`;
+      const corners = [
+        [x, temperature],
+        [x, goal],
+      ] as const;
+      const sign = { x, y: (temperature + goal) / 2, tip: `a slow ${jump.direction} ${end}` };
+      const shape = goal > temperature ? "triangle-up" : "triangle-down";
+      return { line: lineOf(corners, i), arrow: layerOf("point", [sign], { ...warm, shape }) };
     });
   return plotOf({
     title: `Temperature along ${along}`,
     x: { title: titled(along, unit), domain: diagram.between.map(shown) as unknown as Range },
     y: { title: titled("temperature", "K") },
     caption: [
-      `Branches: ${branches.length}, ${diagram.proof}, undecided: ${undecided.length}${fixed.join("")}`,
+      [
+        `Branches: ${branches.length}`,
+        diagram.proof,
+        `undecided: ${undecided.length}`,
+        ...Object.entries(diagram.fixed).map(([name, value]) => {
+          const { unit = "1", size = 1 }: Partial<GivenUnit> = known(name) ?? {};
+          return `${name} ${numeral(value / size)}${unitText(unit)}`;
+        }),
+      ].join(", "),
     ],
     layers: [
       undecidedLayer(
@@ -114,19 +114,23 @@ export function diagramChart({ diagram, held, state, units = diagram.units }: Di
       ...(held ? branchLayers(held, { colour: "cool", width: 1.5 }, "couplings held, ") : []),
       layerOf(
         "line",
-        ways.flatMap((way, i) => lineOf(way.line, i)),
+        ways.flatMap((way) => way.line),
         warm,
         "jump",
       ),
-      ...(["triangle-up", "triangle-down"] as const).map((shape) =>
-        layerOf(
-          "point",
-          ways.filter((way) => way.shape === shape).map((way) => way.sign),
-          { ...warm, shape },
-        ),
-      ),
+      ...ways.map((way) => way.arrow),
       ...branchLayers(diagram, { colour: "ink", width: 2.5 }),
-      ...layersOf("point", places, PLACES, { open: true }),
+      ...layersOf(
+        "point",
+        [...diagram.folds, ...diagram.crossings].map((place) => ({
+          x: shown(place.at),
+          y: place.temperature,
+          tip: rangeText(place.atBracket, 17) + unitText(diagram.unit),
+          kind: NAMES[place.kind] ?? place.kind,
+        })),
+        PLACES,
+        { open: true },
+      ),
       layerOf(
         "point",
         state

@@ -1,6 +1,8 @@
 // The parts of λ as bars.
 import type { Feedbacks } from "../feedback/feedbacks.ts";
-import { boxOf, extent, layerOf, layersOf, lineOf, type Plot, plotOf } from "./plot.ts";
+import { LINE } from "./layout.ts";
+import { wrapped } from "./lines.ts";
+import { boxOf, extent, layerOf, layersOf, lineOf, type Plot, plotOf, stacked } from "./plot.ts";
 import { FEEDBACK, numeral, signed, titled } from "./wording.ts";
 
 /** What feedbacks do to a disturbance. */
@@ -9,8 +11,8 @@ export const EFFECTS = {
   amplifies: { colour: "warm", open: true },
 } as const;
 
-/** Height of a bar with its label, px. */
-const ROW = 36;
+/** Of labels, px: it fits telephones. */
+const WIDE = 300;
 
 /**
  * The reference response, every feedback loop and their sum λ, one below the other: each bar begins where the one above
@@ -27,21 +29,21 @@ export function feedbackBars<N extends string>(feedbacks: Feedbacks<N>): Plot {
     ...(others ? [{ ...others, through: [`weaker loops: ${others.count}`] }] : []),
     { feedbackParameter, through: ["λ, the sum"] },
   ];
-  const height = parts.length;
-  let end = 0;
+  let [end, height] = [0, 0];
   const bars = parts.map((part, row) => {
-    const start = row === height - 1 ? 0 : end;
+    const start = parts[row + 1] ? end : 0;
     end = start + part.feedbackParameter;
     const tip = `${signed(part.feedbackParameter)}  ${part.through.join(" → ")}`;
-    const box = boxOf([start, end], [-row - 0.25, -row - 0.55], tip);
+    height += LINE * wrapped(tip, WIDE, 12).length + 21;
+    const box = boxOf([start, end], [27 - height, 16 - height], tip);
     return { ...box, kind: end > start ? "amplifies" : "counters" };
   });
   const domain = extent([0, ...bars.map((bar) => bar.x2 as number)]);
   return plotOf({
     title: `Feedbacks at ${numeral(feedbacks.temperature)} K`,
     x: { title: titled("feedback parameter", FEEDBACK), domain },
-    y: { title: "", domain: [-height, 0.3] },
-    height: (height + 0.3) * ROW,
+    y: { title: "", domain: [-height, 11] },
+    height: height + 11,
     layers: [
       layerOf(
         "line",
@@ -54,7 +56,10 @@ export function feedbackBars<N extends string>(feedbacks: Feedbacks<N>): Plot {
       ...layersOf("box", bars, EFFECTS, { dash: [1, 0] }),
       layerOf(
         "text",
-        bars.map((bar) => ({ x: domain[0], y: bar.y + 0.13, text: bar.tip as string })),
+        bars.flatMap((bar) => {
+          const lines = wrapped(bar.tip as string, WIDE, 12);
+          return stacked(lines, { x: domain[0], y: bar.y + LINE * lines.length - 10 }, -LINE);
+        }),
       ),
     ],
   });

@@ -45,12 +45,13 @@ export function layoutOf(plot: Plot, width: number): Layout {
   const left = EDGE + widest(y);
   const right = EDGE + Math.ceil(widest(x) / 2);
   const title = wrapped(plot.title, room, 15);
+  const across = wrapped(plot.x.title, room, 12);
   const caption = plot.caption.flatMap((line) => wrapped(line, room, SMALL));
   const top = title.length * 19 + (plot.y.title ? 36 : 8);
 
   // samples of all named layers with their names, side by side as far as they fit
   const start = EDGE - left;
-  let [along, down] = [start, height + (plot.x.title ? 58 : 20)];
+  let [along, down] = [start, height + 20 + LINE * across.length + (across[0] ? 23 : 0)];
   const legend = plot.layers.flatMap((layer) => {
     if (!layer.name) return [];
     const lines = wrapped(layer.name, room - SAMPLE, 12);
@@ -79,7 +80,7 @@ export function layoutOf(plot: Plot, width: number): Layout {
     padding: { left, top, right, bottom: end - height + caption.length * LINE },
     ...{ x, y },
     layers: [
-      layerOf("text", [{ x: width - left - right, y: height + 36, text: plot.x.title }], { anchor: "end" }),
+      layerOf("text", stacked(across, { x: start, y: height + 36 }, LINE)),
       // the title of the upright axis lies above it, so that it can be read without turning the head
       layerOf("text", [{ x: start, y: -12, text: plot.y.title }]),
       layerOf("text", stacked(title, { x: start, y: 20 - top }, 19), { size: 15 }),

@@ -41,8 +41,8 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
   const stack = [...ledger.reservoirs].sort((a, b) => level(a.name) - level(b.name));
   const names = stack.map((reservoir) => reservoir.name);
   const gutter = 14 + Math.min(0.24 * page, Math.max(...names.map((name) => textWidth(name, 12))));
-  const { flows: laid, caption } = layFlows({ flows: ledger.flows, names, room: width - gutter - 6 });
-  const pitch = BOX + Math.max(64, ...laid.map((flow) => flow.lines.length * LINE + 32));
+  const { flows: laid, caption } = layFlows({ flows: ledger.flows, names, room: width - gutter - 8 });
+  const pitch = BOX + Math.max(64, ...laid.map((flow) => flow.down + flow.lines.length * LINE + 32));
   const topOf = (name: string): number => 0 - names.indexOf(name) * pitch;
 
   const drawn = laid.map((flow, line) => {
@@ -52,61 +52,63 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
     const end = topOf(flow.to) - (down ? 0 : BOX);
     const neck = end + (down ? HEAD : -HEAD);
     const [left, right] = [x - flow.half, x + flow.half];
-    const corners = [
-      [left, start],
-      [left, neck],
-      [left - 4, neck],
-      [x, end],
-      [right + 4, neck],
-      [right, neck],
-      [right, start],
-    ] as const;
     // labels stand in the gap where a flow begins, so that flows across a layer do not write on it
     const room = flow.lines.length * LINE;
-    const y = start + (down ? -10 : 12 + room);
+    const y = start + (down ? -10 - flow.down : 12 + room + flow.down);
     return {
       line: lineOf(
-        corners,
+        [
+          [left, start],
+          [left, neck],
+          [left - 4, neck],
+          [x, end],
+          [right + 4, neck],
+          [right, neck],
+          [right, start],
+        ],
         line,
         flow.from === "space" ? "from space" : flow.to === "space" ? "to space" : "inside",
       ),
-      box: boxOf([x - flow.width / 2, x + flow.width / 2], [y, y - room - 2], flow.tip),
+      box: boxOf([x - flow.width / 2 - 2, x + flow.width / 2 + 2], [y, y - room - 2], flow.tip),
       text: stacked(flow.lines, { x, y: y - 12 }, -LINE),
     };
   });
   const labels = stack.flatMap((reservoir) => {
     const kept = reservoir.storage ?? 0;
-    const words = Math.abs(kept) > NOTHING ? [reservoir.name, `${signed(kept)} kept`] : [reservoir.name];
-    const lines = words.map((text) => clipped(text, gutter - 8, 12));
+    const lines = [reservoir.name, ...(Math.abs(kept) > NOTHING ? [`${signed(kept)} kept`] : [])].map(
+      (text) => clipped(text, gutter - 8, 12),
+    );
     return stacked(lines, { x: 6, y: topOf(reservoir.name) - 29 + 7 * lines.length }, -LINE);
   });
-  const draft = {
-    title: "Energy flows",
-    caption: [...caption, `Widths to scale;${unitText(FLUX)} of the whole area`],
-    layers: [
-      layerOf(
-        "box",
-        names.map((name) => boxOf([0, width], [topOf(name), topOf(name) - BOX], name)),
-        { open: true },
-      ),
-      ...layersOf(
-        "line",
-        drawn.flatMap((flow) => flow.line),
-        BANDS,
-        { full: true },
-      ),
-      layerOf(
-        "box",
-        drawn.map((flow) => flow.box),
-        { colour: "paper" },
-      ),
-      layerOf(
-        "text",
-        drawn.flatMap((flow) => flow.text),
-        { anchor: "middle" },
-      ),
-      layerOf("text", labels),
-    ],
-  };
-  return drawingOf(draft, { width, height: Math.max(0, names.length - 1) * pitch + BOX });
+  return drawingOf(
+    {
+      title: "Energy flows",
+      caption: [...caption, `Widths to scale;${unitText(FLUX)} of the whole area`],
+      layers: [
+        layerOf(
+          "box",
+          names.map((name) => boxOf([0, width], [topOf(name), topOf(name) - BOX], name)),
+          { open: true },
+        ),
+        ...layersOf(
+          "line",
+          drawn.flatMap((flow) => flow.line),
+          BANDS,
+          { full: true },
+        ),
+        layerOf(
+          "box",
+          drawn.map((flow) => flow.box),
+          { colour: "paper" },
+        ),
+        layerOf(
+          "text",
+          drawn.flatMap((flow) => flow.text),
+          { anchor: "middle" },
+        ),
+        layerOf("text", labels),
+      ],
+    },
+    { width, height: Math.max(0, names.length - 1) * pitch + BOX },
+  );
 }

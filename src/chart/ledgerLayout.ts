@@ -1,6 +1,8 @@
 // Where the flows of a ledger stand side by side, how wide they are and what is written on them.
 import type { Ledger } from "../states/state.ts";
+import { LINE } from "./layout.ts";
 import { textWidth, wrapped } from "./lines.ts";
+import { isNear } from "./plot.ts";
 import { letterOf, numeral } from "./wording.ts";
 
 /** A flow in its true direction, with its place. */
@@ -17,10 +19,12 @@ export interface LaidFlow {
   readonly x: number;
   /** Half its width, px. */
   readonly half: number;
+  /** Distance of its label from where labels begin, px. */
+  readonly down: number;
 }
 
-/** On both sides of a band or label, and the widest band, px. */
-const GAP = 8;
+/** Between bands or labels, and the widest band, px. */
+const GAP = 16;
 const WIDEST = 130;
 
 /** What is to be placed, and the width there is for it, px. */
@@ -30,17 +34,18 @@ interface ToLay extends Pick<Ledger, "flows"> {
   readonly room: number;
 }
 
-const sum = (values: readonly number[]): number => values.reduce((a, b) => a + b, 0);
 const widthOf = (lines: readonly string[]): number => Math.max(...lines.map((line) => textWidth(line, 12)));
 
 /**
  * Places flows between known reservoirs. Takes the fullest labels that fit: name and number, a letter and the
- * number, a letter; what the letters mean is then said in `caption`.
+ * number, a letter; what the letters mean is then said in `caption`. Letters need no room of their own: where flows
+ * are close they stand in rows, so that any number of flows fits. A flow of nothing is not drawn.
  */
-export function layFlows({ flows, names, room }: ToLay): { flows: LaidFlow[]; caption: string[] } {
+export function layFlows({ flows, names, room }: ToLay): { flows: LaidFlow[]; caption: (string | false)[] } {
   const known = flows
     .filter(
-      (flow) => [flow.from, flow.to].every((name) => names.includes(name)) && Number.isFinite(flow.value),
+      ({ from, to, value }) =>
+        names.includes(from) && names.includes(to) && isNear(value) && isNear(1 / value),
     )
     .map((flow, i) => {
       const [from, to] = flow.value < 0 ? [flow.to, flow.from] : [flow.from, flow.to];
@@ -50,21 +55,32 @@ export function layFlows({ flows, names, room }: ToLay): { flows: LaidFlow[]; ca
       return { from, to, value, texts, tip: `${flow.name}, ${from} → ${to}, ${number}` };
     });
   const level =
-    [0, 1].find((k) => sum(known.map((flow) => widthOf(flow.texts[k] as string[]) + 2 * GAP)) <= room) ?? 2;
+    [0, 1].find(
+      (k) => known.reduce((sum, flow) => sum - widthOf(flow.texts[k] as string[]) - GAP, room) >= 0,
+    ) ?? 2;
   const told = known.map((flow) => {
     const lines = flow.texts[level] as string[];
     return { ...flow, lines, width: widthOf(lines) };
   });
+  const gap = Math.min(GAP, room / 2 / told.length);
+  const rows = level < 2 ? 1 : Math.ceil(widthOf([letterOf(told.length)]) / gap + 0.1);
   // one scale for all widths: the largest of many for which bands and labels stand side by side
-  let scale = WIDEST / Math.max(1e-99, ...told.map((flow) => flow.value));
-  const slots = () => told.map((flow) => Math.max(flow.width, flow.value * scale) + 2 * GAP);
-  for (let i = 0; i < 200 && sum(slots()) > room; i++) scale *= 0.97;
-  const spare = Math.max(0, room - sum(slots())) / told.length;
+  let scale = WIDEST / Math.max(...told.map((flow) => flow.value));
+  const slotOf = (flow: { width: number; value: number }) =>
+    Math.max(level < 2 ? flow.width : 0, flow.value * scale) + gap;
+  const spare = () => told.reduce((sum, flow) => sum - slotOf(flow), room);
+  // a pixel is there for rounding
+  while (spare() < -1) scale *= 0.97;
   let end = 0;
   const laid = told.map((flow, i) => {
-    const slot = (slots()[i] as number) + spare;
+    const slot = slotOf(flow) + spare() / told.length;
     end += slot;
-    return { ...flow, x: end - slot / 2, half: Math.max(0.6, (flow.value * scale) / 2) };
+    return {
+      ...flow,
+      x: end - slot / 2,
+      half: Math.max(0.6, (flow.value * scale) / 2),
+      down: (i % rows) * LINE,
+    };
   });
-  return { flows: laid, caption: level > 0 ? laid.map((flow, i) => `${letterOf(i)}: ${flow.tip}`) : [] };
+  return { flows: laid, caption: laid.map((flow, i) => level > 0 && `${letterOf(i)}: ${flow.tip}`) };
 }

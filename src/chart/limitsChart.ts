@@ -49,11 +49,15 @@ export function limitsChart({ planets, limits }: LimitsChartOptions): Plot {
       [2, 3],
       [14, 4],
     ][i % 4] as number[];
-    const look = { colour: HUES[i % 5] as Colour, dash };
-    return layerOf("line", limit.points.map(place), look, `${letterOf(i)}: ${limit.name}, ${limit.paper}`);
+    return layerOf(
+      "line",
+      limit.points.map(place),
+      { colour: HUES[i % 5] as Colour, dash },
+      `${letterOf(i)}: ${limit.name}, ${limit.paper}`,
+    );
   });
   const points = planets.map((planet) => ({ ...place(planet), tip: planet.name }));
-  const drawn = [...points, ...lines.flatMap((line) => line.items)].filter(isDrawn);
+  const drawn = [...points, ...lines.flatMap((line) => line.items)];
   const [x, y] = (["x", "y"] as const).map((key) => extent(drawn.map((item) => item[key]))) as [Range, Range];
   // a line of text is a twentieth of the lowest chart: letters that would touch are moved up
   const step = (y[1] - y[0]) / 18;

@@ -6,10 +6,10 @@ const letterWidth = (text: string, size: number): number => size * (/[⺀-￿]/.
 /** Estimated width of a text, px. */
 export const textWidth = (text: string, size: number): number => text.length * letterWidth(text, size);
 
-/** A text in lines that fit, broken at spaces and before capitals where that can be. */
+/** A text in lines that fit, broken at spaces where that can be, else before capitals, else anywhere. */
 export function wrapped(text: string, width: number, size: number): string[] {
   const line = `\\S.{0,${Math.max(1, Math.floor(width / letterWidth(text, size)) - 1)}}`;
-  return (text.match(new RegExp(`${line}(?=\\s|$|\\p{Lu})|${line}`, "gu")) ?? []).map((part) =>
+  return (text.match(new RegExp(`${line}(?=\\s|$)|${line}(?=\\p{Lu})|${line}`, "gu")) ?? []).map((part) =>
     part.trimEnd(),
   );
 }

@@ -36,12 +36,16 @@ export function planetsChart({
 }: PlanetsChartOptions): Plot {
   const { temperatures } = states;
   const step = Math.ceil(temperatures.length / MOST);
-  let row = 0;
   const items: Item[] = [];
+  let row = 0;
   for (let i = 0; i < temperatures.length; i += step) {
     while ((states.first[row + 1] as number) <= i) row++;
-    const kind = KINDS.at(states.stability[i] as number) as string;
-    items.push({ x: values[row] as number, y: temperatures[i] as number, tip: `row ${row}`, kind });
+    items.push({
+      x: values[row] as number,
+      y: temperatures[i] as number,
+      tip: `row ${row}`,
+      kind: KINDS.at(states.stability[i] as number) as string,
+    });
   }
   return plotOf({
     title: `States along ${name}`,

@@ -121,7 +121,7 @@ type DraftAxis = Omit<Axis, "domain"> & { readonly domain?: Range };
 const MOST_TIPS = 600;
 
 /** Finite, and far enough from overflow for what an axis computes with it. */
-const isNear = (value: number): boolean => Math.abs(value) < 1e100;
+export const isNear = (value: number): boolean => Math.abs(value) < 1e100;
 
 /** Whether a place can be drawn somewhere. */
 export const isDrawn = ({ x, y, x2 = x, y2 = y }: Item): boolean => [x, y, x2, y2].every(isNear);
@@ -133,7 +133,7 @@ export function plotOf(draft: Draft): Plot {
   const [x, y] = (["x", "y"] as const).map((way) =>
     axisOf(
       draft[way],
-      places.flatMap((item) => [item[way], item[`${way}2`] ?? item[way]]),
+      places.flatMap((item) => [item[way], item[`${way}2`] as number]),
     ),
   ) as [Axis, Axis];
   let lost = (draft.dropped ?? 0) + all.length;
@@ -141,17 +141,22 @@ export function plotOf(draft: Draft): Plot {
     const items = layer.items.filter((item) => isDrawn(item) && lies(item.x, x) && lies(item.y, y));
     lost -= items.length;
     const isTold = layer.mark === "point" && all.length <= MOST_TIPS;
-    const told = (item: Item): Item => ({
-      ...item,
-      tip: `${x.title} ${numeral(item.x)}, ${y.title} ${numeral(item.y)}; ${item.tip ?? ""}`,
-    });
-    return { ...layer, items: isTold ? items.map(told) : items };
+    return {
+      ...layer,
+      items: isTold
+        ? items.map((item) => ({
+            ...item,
+            tip: `${x.title} ${numeral(item.x)}, ${y.title} ${numeral(item.y)}; ${item.tip ?? ""}`,
+          }))
+        : items,
+    };
   });
-  const left = lost > 0 && `Left out, as not finite or outside: ${lost}`;
   return deepFreeze({
     picture: "plot",
     title: draft.title,
-    caption: [...(draft.caption ?? []), left].filter(Boolean) as string[],
+    caption: [...(draft.caption ?? []), lost > 0 && `Left out, as not finite or outside: ${lost}`].filter(
+      Boolean,
+    ) as string[],
     ...{ x, y },
     layers: layers.filter((layer) => layer.items.length > 0),
     height: draft.height ?? null,
@@ -169,17 +174,20 @@ export const drawingOf = (draft: Omit<Draft, "x" | "y">, size: { width: number; 
 
 const lies = (value: number, axis: Axis): boolean => value >= axis.domain[0] && value <= axis.domain[1];
 
-/** Lowest and highest of the values that can be drawn, with some room on both sides; infinite if there are none. */
+/**
+ * Lowest and highest of the values that can be drawn, with some room on both sides but not across 0; infinite if there
+ * are none.
+ */
 export function extent(values: readonly number[]): Range {
   const sorted = Float64Array.from(values.filter(isNear)).sort();
   const [low, high] = [sorted.at(0) ?? 1 / 0, sorted.at(-1) ?? -1 / 0];
   const room = (high - low) / 16;
-  return [low - room, high + room];
+  return [Math.max(low - room, Math.min(low, 0)), high + room];
 }
 
 function axisOf(axis: DraftAxis, values: readonly number[]): Axis {
   let [low, high] = axis.domain ?? extent(values);
-  if (!isNear(low) || !isNear(high)) [low, high] = [0, 1];
+  if (![low, high].every(isNear)) [low, high] = [0, 1];
   const room = 0.05 * Math.max(Math.abs(low), Math.abs(high)) || 1;
   // one value, or values that differ by rounding: ticks must still differ
   if (!(high - low > 1e-8 * room)) [low, high] = [low - room, high + room];

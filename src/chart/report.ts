@@ -57,11 +57,10 @@ export function reportOf(result: unknown): Report {
     (result: never) => Picture[],
   ];
   const pictures = picturesOf(parts as never);
-  const [first] = pictures.map((picture) => plotFor(picture, 640));
+  const plots = pictures.map((picture) => plotFor(picture, 640));
   return {
     lines: [
-      first?.title,
-      ...(first?.caption ?? []),
+      ...plots.flatMap(({ title, caption }) => [title, ...caption]),
       parts.counts && countsText(parts as Required<Parts>),
       ...(parts.notes ?? []).map((note) => [note.severity, note.about, note.text].filter(Boolean).join(", ")),
     ].filter(Boolean) as string[],
@@ -72,7 +71,7 @@ export function reportOf(result: unknown): Report {
 
 /** Anything in a few lines, whatever it is. */
 export function jsonReport(result: unknown): Report {
-  let text = `not JSON: ${typeof result}`;
+  let text: string = typeof result;
   try {
     text = JSON.stringify(result, null, 1) ?? text;
   } catch {

@@ -23,14 +23,10 @@ export function reportText(report: Report, written: (text: string) => string): s
   const tables = report.tables.map((table) => {
     const cells = [table.head, ...table.rows].map((row) => row.map(written));
     const widths = table.head.map((_, i) => Math.max(3, ...cells.map((row) => (row[i] as string).length)));
-    cells.splice(
-      1,
-      0,
-      widths.map((width) => "-".repeat(width)),
-    );
-    const row = (of: readonly string[]) =>
-      `| ${of.map((cell, i) => cell.padEnd(widths[i] as number)).join(" | ")} |`;
-    return [`${written(table.title)}:\n`, ...cells.map(row)].join("\n");
+    const row = (of: readonly string[], filling?: string) =>
+      `| ${widths.map((width, i) => (of[i] ?? "").padEnd(width, filling)).join(" | ")} |`;
+    const [head, ...rows] = cells.map((of) => row(of));
+    return [`${written(table.title)}:\n`, head, row([], "-"), ...rows].join("\n");
   });
   return [...report.lines.map(written), ...tables].join("\n\n");
 }

@@ -33,10 +33,14 @@ export interface Shown {
  */
 export function show(result: unknown, options?: ShowOptions): Shown {
   const forms = () => {
-    const isKnown = read(result, ({ tables, pictures }) => tables.length + pictures.length > 0);
-    const forms = isKnown ? FORMS : { "text/plain": toText };
-    const made = Object.entries(forms).map(([type, make]) => [type, make(result, options)] as const);
-    return Object.fromEntries(made.filter(([, form]) => form !== null));
+    // of what is not known only the first, plain text
+    const count = read(result, ({ tables, pictures }) => (tables[0] || pictures[0] ? 5 : 1));
+    return Object.fromEntries(
+      Object.entries(FORMS)
+        .slice(0, count)
+        .map(([type, make]) => [type, make(result, options)] as const)
+        .filter(([, form]) => form !== null),
+    );
   };
   return Object.freeze({ [Symbol.for("Jupyter.display")]: forms, toString: () => toText(result) });
 }

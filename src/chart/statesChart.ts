@@ -52,44 +52,47 @@ export function budgetChart({ budget, found }: BudgetChartOptions): Plot {
     );
   const curves = [curve("heating", { colour: "warm" }), curve("cooling", { colour: "cool", dash: [7, 4] })];
   /** Cooling between two points of the curve. */
-  const height = (state: State): number => {
-    const next = points.findIndex((p) => p.temperature >= state.temperature);
-    const b = points[next];
-    const a = points[next - 1] ?? b;
-    if (!a || !b) return 1 / 0;
-    const share = (state.temperature - a.temperature) / (b.temperature - a.temperature || 1);
-    return a.cooling + share * (b.cooling - a.cooling);
-  };
+  const height = ({ temperature: t }: State): number =>
+    points.reduce((found, b, i) => {
+      const a = points[i - 1] ?? b;
+      const share = (t - a.temperature) / (b.temperature - a.temperature || 1);
+      return share >= 0 && share <= 1 ? a.cooling + share * (b.cooling - a.cooling) : found;
+    }, 1 / 0);
   const draft = {
     title: "Heating and cooling",
     y: { title: titled("flux", FLUX) },
     ...{ layers: curves, dropped: budget.dropped },
   };
-  return withStates(draft, budget.within, height, found);
+  return withStates(draft, height, found, budget.within);
 }
 
 /** States by themselves: λ against temperature, K and W m⁻² K⁻¹; stable ones lie below the line at 0. */
 export function statesChart(found: FoundStates): Plot {
-  const draft = {
-    title: "States",
-    y: { title: titled("λ", FEEDBACK) },
-    layers: [
-      layerOf(
-        "line",
-        found.within.map((x) => ({ x, y: 0 })),
-        { colour: "faint", width: 1 },
-      ),
-    ],
-  };
-  return withStates(draft, found.within, (state) => state.feedbackParameter, found);
+  // the axis is around what was found, and as wide as the search only where nothing was
+  const states = found.states.map((state) => state.temperature);
+  return withStates(
+    {
+      title: "States",
+      y: { title: titled("λ", FEEDBACK) },
+      layers: [
+        layerOf(
+          "line",
+          (states[0] ? states : found.within).map((x) => ({ x, y: 0 })),
+          { colour: "faint", width: 1 },
+        ),
+      ],
+    },
+    (state) => state.feedbackParameter,
+    found,
+  );
 }
 
 /** Curves with the states on them, and boxes of what is undecided, as high as all that is drawn. */
 function withStates(
   draft: Omit<Draft, "x">,
-  domain: Range,
   heightOf: (state: State) => number,
   found?: FoundStates,
+  domain?: Range,
 ): Plot {
   const { states = [], undecided = [] } = found ?? {};
   const marks = states.map((state) => ({
@@ -103,7 +106,7 @@ function withStates(
   const boxes = undecided.map((part) => boxOf(part.interval, [low, Math.max(high, low + 1)], part.kind));
   return plotOf({
     ...draft,
-    x: { title: titled("temperature", "K"), domain },
+    x: { title: titled("temperature", "K"), domain } as Draft["x"],
     caption: [
       found &&
         `States at ${rangeText(found.within)} K: ${states.length}, ${found.proof}, undecided: ${undecided.length}`,

@@ -50,19 +50,21 @@ export function svgPlot(plot: Plot, page: Page): string {
   ];
   const drawn = (layers: readonly Layer[], across: Scale, up: Scale): string =>
     layers
-      .map((layer) => {
-        const paint = { ...paintOf(layer, colours), textAnchor: layer.look.anchor ?? "start" };
-        return el("g", paint, shapesOf(layer, across, up));
-      })
+      .map((layer) =>
+        el(
+          "g",
+          { ...paintOf(layer, colours), textAnchor: layer.look.anchor ?? "start" },
+          shapesOf(layer, across, up),
+        ),
+      )
       .join("");
-  const [left, top] = [-padding.left, -padding.top];
-  const size = { width: page.width, height: bottom + padding.top + padding.bottom };
+  const height = bottom + padding.top + padding.bottom;
   return (
-    `<svg xmlns="http://www.w3.org/2000/svg" width="${size.width}" height="${size.height}" ` +
-    `viewBox="${left} ${top} ${size.width} ${size.height}" role="img" aria-label="${escaped(plot.title)}" ` +
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${page.width}" height="${height}" ` +
+    `viewBox="${-padding.left} ${-padding.top} ${page.width} ${height}" role="img" aria-label="${escaped(plot.title)}" ` +
     `class="thermostead" font-family="system-ui, sans-serif">` +
     (page.theme === "auto" ? DARK_RULE : "") +
-    el("rect", { x: left, y: top, ...size, fill: colours.paper }) +
+    el("rect", { x: -padding.left, y: -padding.top, width: page.width, height, fill: colours.paper }) +
     drawn(plot.layers, x, y) +
     drawn([...axes, ...around], px, px) +
     "</svg>"

@@ -35,11 +35,14 @@ const UNITS: readonly (readonly [RegExp, string])[] = [
 
 /** What belongs to pictures, or tells nobody anything in six digits. */
 const SKIPPED =
-  /^(points|way|variables|eigenvalues|standardName|description|notes|after|units)$|(Range|Bracket)$/;
+  /^(found|points|way|variables|eigenvalues|standardName|description|notes|after|units)$|(Range|Bracket)$/;
+
+/** Columns of an appraised climate, of which all is too wide to read. */
+const CLIMATE = /^(temp|stab|feedback p|e f|albedo$|equi)/;
 
 type Fields = Readonly<Record<string, unknown>>;
 const isFields = (value: unknown): value is Fields =>
-  Object.prototype.toString.call(value) === "[object Object]";
+  typeof value === "object" && value !== null && !Array.isArray(value);
 
 /** A value with its name, and the unit of the parameter where it stands. */
 type Value = readonly [name: string, value: unknown, unit: unknown];
@@ -49,8 +52,7 @@ export function tablesOf(result: Fields): Table[] {
   const parts = partsOf(result, result.unit);
   const values = written(parts).map(([name, value]) => ({ name, value }));
   const lists = parts.filter(isList);
-  const rest: Value[] = values.length > 0 ? [["values", values, null]] : [];
-  return [...lists, ...rest].map(listed);
+  return [...lists, ...(values[0] ? [["values", values, null] as const] : [])].map(listed);
 }
 
 /** Whether it is a list of records. */
@@ -81,7 +83,9 @@ const written = (values: readonly Value[], path = ""): [string, string][] =>
 function listed([name, value, unit]: Value): Table {
   const records = value as readonly Fields[];
   const rows = records.slice(0, MOST).map((record) => new Map(written(partsOf(record, unit), `${name} `)));
-  const head = [...new Set(rows.flatMap((row) => [...row.keys()]))];
+  const head = [...new Set(rows.flatMap((row) => [...row.keys()]))].filter(
+    (key) => !records[0]?.state || CLIMATE.test(key),
+  );
   const more = records.length - MOST;
   return {
     title: spaced(name) + (more > 0 ? `, without ${more} more` : ""),

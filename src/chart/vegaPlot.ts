@@ -22,7 +22,6 @@ const ALIGNS = { start: "left", middle: "center", end: "right" };
 
 export function vegaPlot(plot: Plot, page: Page): Json {
   const colours = paletteOf(page.theme);
-  const { ink } = colours;
   const { width, height, padding, layers: around, ...ticks } = layoutOf(plot, page.width);
   const axis = (field: "x" | "y"): Json => {
     const { title, domain } = plot[field];
@@ -34,11 +33,10 @@ export function vegaPlot(plot: Plot, page: Page): Json {
     layers.map((layer) => {
       const [mark, channels] = MARKS[layer.mark];
       const { shape = "circle", anchor = "start" } = layer.look;
-      const tooltip = layer.items[0]?.tip ? { tooltip: { field: "tip" } } : null;
       return {
         data: { values: layer.items.map((item, order) => ({ line: 0, ...item, order })) },
         mark: { ...mark, ...paintOf(layer, colours), shape, align: ALIGNS[anchor] },
-        encoding: { ...places, ...channels, ...tooltip },
+        encoding: { ...places, ...channels, ...(layer.items[0]?.tip && { tooltip: { field: "tip" } }) },
       };
     });
   const px = { type, scale: null, axis: null };
@@ -52,7 +50,7 @@ export function vegaPlot(plot: Plot, page: Page): Json {
     config: {
       font: "system-ui, sans-serif",
       view: { stroke: null },
-      axis: { grid: false, domainColor: ink, tickColor: ink, labelColor: ink },
+      axis: { grid: false, domainColor: colours.ink, tickColor: colours.ink, labelColor: colours.ink },
     },
   };
 }

@@ -6,6 +6,7 @@ import type { PlanetNote } from "../planet/planetNote.ts";
  * `eccentric-orbit`: the orbit is far from a circle. `average-not-favoured`: the heat capacity does not speak for the average
  * over the orbit that was taken.
  * `star-outside-limits`: no limits are published for such a star. `several-stars`: the limits are for the light of one of them.
+ * `mass-outside-limits`: the runaway greenhouse was computed for other masses.
  * `slow-rotation`: the limits are for a planet that turns fast.
  * `luminosity-of-no-star`: a luminosity far from that of any star. `warm-albedo-above-cold`: a planet that grows darker as it
  * freezes. Both are read as they stand.
@@ -18,6 +19,7 @@ export type AppraisalNoteCode =
   | "average-not-favoured"
   | "star-outside-limits"
   | "several-stars"
+  | "mass-outside-limits"
   | "slow-rotation"
   | "luminosity-of-no-star"
   | "warm-albedo-above-cold"

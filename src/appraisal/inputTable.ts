@@ -2,26 +2,32 @@
 import type { Appraisal } from "./appraisal.ts";
 import { type Section, withUnit } from "./report.ts";
 
-/** Fields in which a law may stand. */
-const PLACES = ["albedo", "surface", "longwave", "heatCapacity", "forcing"] as const;
+/** Fields in which a law may stand, at any depth. */
+const PLACES = ["albedo", "surface", "longwave", "forcing", "heatCapacity"] as const;
 
 /** Every input as it is written and in SI, each law before its own. */
-export function inputTable({ inputs, description }: Appraisal): Section {
+export function inputTable({ inputs, description: described }: Appraisal): Section {
+  const description = described as Readonly<Record<string, unknown>>;
   const rows = inputs.map(({ path, written, value, unit }) => {
     const si = withUnit(value, unit);
     return [path, written, si === written || written === String(value) ? "" : si];
   });
-  for (const place of PLACES) {
-    const law = lawAt(description, place);
-    if (law === null) continue;
-    const first = rows.findIndex(([path]) => path?.startsWith(`${place}.`));
-    rows.splice(first < 0 ? rows.length : first, 0, [place, law, ""]);
-  }
+  for (const field of PLACES)
+    for (const { path: place, law } of lawsIn(description[field], field)) {
+      const first = rows.findIndex(([path]) => path?.startsWith(`${place}.`));
+      // a law without inputs comes last in its field
+      const last = rows.map(([path]) => /^[a-zA-Z]+/.exec(path ?? "")?.[0] === field).lastIndexOf(true);
+      rows.splice(first >= 0 ? first : last >= 0 ? last + 1 : rows.length, 0, [place, law, ""]);
+    }
   return { title: "Inputs", blocks: [{ head: ["input", "as written", "in SI"], rows, right: [] }] };
 }
 
-function lawAt(description: unknown, place: string): string | null {
-  const written = (description as Readonly<Record<string, unknown>>)[place];
-  const law = typeof written === "object" && written !== null ? (written as { law?: unknown }).law : null;
-  return typeof law === "string" ? law : null;
+/** Every law that stands in a value, with its path, the outer ones first. */
+function lawsIn(value: unknown, path: string): { readonly path: string; readonly law: string }[] {
+  if (typeof value !== "object" || value === null) return [];
+  const { law } = value as { readonly law?: unknown };
+  const inner = Object.entries(value).flatMap(([key, each]) =>
+    lawsIn(each, Array.isArray(value) ? `${path}[${key}]` : `${path}.${key}`),
+  );
+  return typeof law === "string" ? [{ path, law }, ...inner] : inner;
 }

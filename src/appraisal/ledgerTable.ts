@@ -2,8 +2,16 @@
 import type { StateAppraisal } from "./appraisedState.ts";
 import { kelvin, type Table } from "./report.ts";
 
+/** As many climates as stand side by side on a page of text. */
+const MOST = 4;
+
 /** One column for each state; the last rows show that what goes in comes out or is stored. */
-export function ledgerTable(states: readonly StateAppraisal[]): Table[] {
+export const ledgerTable = (states: readonly StateAppraisal[]): Table[] =>
+  states.length <= MOST
+    ? ledgersOf(states)
+    : [...ledgersOf(states.slice(0, MOST)), ...ledgerTable(states.slice(MOST))];
+
+function ledgersOf(states: readonly StateAppraisal[]): Table[] {
   const ledgers = states.map((s) => s.state.ledger);
   const [first] = ledgers;
   if (!first) return [];

@@ -15,6 +15,7 @@ interface Noted {
 /** What is not given, what is assumed, cautions, other notes, sources. */
 export function noteSections(appraisal: Appraisal): Section[] {
   const { missing, notes, found, states, diagram, constants, sources, version } = appraisal;
+  const lineOf = linesWith(appraisal);
   const assumed = notes.filter((note) => note.code === "assumption" && note.severity === "info");
   const rest: readonly Noted[] = notes.filter((note) => !assumed.includes(note));
   const searched = [...(found?.notes ?? []), ...(diagram?.notes ?? [])];
@@ -52,10 +53,19 @@ export function noteSections(appraisal: Appraisal): Section[] {
   ];
 }
 
-function lineOf({ severity, about, unit, text }: Omit<Noted, "code">, value: number | null): string {
-  const number = value === null ? "" : ` ${withUnit(value, unit)}`;
-  return `${severity === "invalid" ? "invalid: " : ""}${about}${number}: ${text}`;
-}
+/** Writes notes: an input as it is written, a long time in days. */
+const linesWith =
+  ({ inputs }: Appraisal) =>
+  ({ severity, about, unit, text }: Omit<Noted, "code">, value: number | null): string => {
+    const own = inputs.find((input) => input.path === about && input.value === value);
+    const number = value === null ? "" : ` ${own?.written ?? numberOf(value, unit)}`;
+    return `${severity === "invalid" ? "invalid: " : ""}${about}${number}: ${text}`;
+  };
+
+const DAY = 86400;
+
+const numberOf = (value: number, unit: string): string =>
+  unit === "s" && value >= DAY ? withUnit(value / DAY, "d") : withUnit(value, unit);
 
 /** The same note on several states is one note. */
 function merged(notes: readonly { readonly text: string; readonly at: string | null }[]): string[] {

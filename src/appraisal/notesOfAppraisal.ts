@@ -1,4 +1,6 @@
 // Cautions that follow from the whole of a planet, not from one of its numbers.
+import { EARTH_MASS_PARAMETER, GRAVITATION } from "../ground/constants.ts";
+import { interpolatedRunawayFlux } from "../habitable/interpolatedRunawayFlux.ts";
 import { hasBands } from "../planet/bands.ts";
 import { COOL_STAR } from "../planet/coolStar.ts";
 import type { Planet } from "../planet/planetTypes.ts";
@@ -6,6 +8,7 @@ import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { hostOf } from "./hostOf.ts";
 import { limitsArePublished, PUBLISHED_STARS } from "./limits.ts";
+import { rangeOf, takes } from "./portRange.ts";
 import { shown } from "./report.ts";
 import { unlikelyNotes } from "./unlikelyNotes.ts";
 
@@ -13,6 +16,8 @@ import { unlikelyNotes } from "./unlikelyNotes.ts";
 const ECCENTRIC = 0.1;
 /** Rotation periods above which the clouds of the day side move the inner limits, s: from about 20 days on (Yang et al. 2014). */
 const SLOW_ROTATION = 20 * 86400;
+
+const EARTH_MASS = EARTH_MASS_PARAMETER / GRAVITATION;
 
 /** What is known of a planet when its notes are written. */
 export interface Noted {
@@ -24,6 +29,7 @@ export interface Noted {
 /** The notes that an appraisal adds to those of the planet. */
 export const notesOfAppraisal = (noted: Noted): AppraisalNote[] => [
   ...starNotes(noted),
+  ...massNotes(noted),
   ...orbitNotes(noted),
   ...rotationNotes(noted),
   ...unlikelyNotes(noted.planet),
@@ -69,6 +75,22 @@ function starNotes({ planet: { facts, description } }: Noted): AppraisalNote[] {
       }),
     );
   return notes;
+}
+
+/** The mass acts on nothing but the limit that is interpolated for it. */
+function massNotes({ planet: { facts } }: Noted): AppraisalNote[] {
+  const { mass } = facts;
+  const temperature = hostOf(facts)?.effectiveTemperature ?? null;
+  if (mass === null || !limitsArePublished(temperature) || takes(interpolatedRunawayFlux, "mass", mass))
+    return [];
+  const range = rangeOf(interpolatedRunawayFlux, "mass");
+  const earths = (kg: number) => shown(kg / EARTH_MASS, 3);
+  return [
+    appraisalNote({
+      ...{ code: "mass-outside-limits", about: "mass", value: mass, unit: "kg", range },
+      text: `${earths(mass)} Earths: the runaway greenhouse was computed for ${range.map(earths).join(" to ")}, so no limit is interpolated for this mass`,
+    }),
+  ];
 }
 
 function orbitNotes({ planet: { facts, assumptions }, states }: Noted): AppraisalNote[] {

@@ -4,10 +4,13 @@ import type { Section, Table } from "./report.ts";
 import { reportOf } from "./reportOf.ts";
 
 const WIDTH = 80;
+const TABLE_WIDTH = 100;
+/** Columns of texts do not give way any further. */
+const NARROWEST = 12;
 const INDENT = 2;
 
 /**
- * The whole appraisal as plain text of at most 80 columns, tables apart: for a terminal or a log. Nothing in it is lost to
+ * The whole appraisal as plain text of at most 80 columns, in tables 100: for a terminal or a log. Nothing in it is lost to
  * rounding that a reader would miss; `JSON.stringify(appraisal)` has every digit. Throws `unreadable` or `missing` for what is no
  * appraisal.
  */
@@ -38,12 +41,39 @@ function wrapped(text: string, width: number, hang: number): string[] {
   return line === "" ? lines : [...lines, line];
 }
 
+const GAP = 2;
+
 function tableLines({ head, rows, right }: Table): string[] {
   const all = [head, ...rows];
-  const widths = head.map((_, i) => Math.max(...all.map((row) => (row[i] ?? "").length)));
-  return all.map((row) =>
-    widths
-      .map((width, i) => (right.includes(i) ? (row[i] ?? "").padStart(width) : (row[i] ?? "").padEnd(width)))
-      .join("  "),
+  const widths = fitted(
+    head.map((_, i) => Math.max(...all.map((row) => (row[i] ?? "").length))),
+    right,
+  );
+  return all.flatMap((row) => {
+    const cells = widths.map((width, i) => wrapped(row[i] ?? "", Math.max(1, width), 0));
+    const height = Math.max(1, ...cells.map((lines) => lines.length));
+    return Array.from({ length: height }, (_, line) =>
+      widths
+        .map((width, i) => {
+          const text = cells[i]?.[line] ?? "";
+          return right.includes(i) ? text.padStart(width) : text.padEnd(width);
+        })
+        .join(" ".repeat(GAP)),
+    );
+  });
+}
+
+/** Widths of columns in a table that is not too wide: the widest column of texts gives way, and its cells are broken. */
+function fitted(widths: readonly number[], right: readonly number[]): number[] {
+  const over = widths.reduce((sum, width) => sum + width + GAP, -GAP) + INDENT - TABLE_WIDTH;
+  const texts = widths.map((width, i) => (right.includes(i) ? 0 : width));
+  const widest = texts.indexOf(Math.max(...texts));
+  const next = Math.max(NARROWEST, ...texts.filter((_, i) => i !== widest));
+  const width = texts[widest] ?? 0;
+  if (over <= 0 || width <= NARROWEST) return [...widths];
+  const narrower = Math.max(width - over, Math.min(next, width - 1));
+  return fitted(
+    widths.map((old, i) => (i === widest ? narrower : old)),
+    right,
   );
 }

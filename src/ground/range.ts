@@ -4,13 +4,16 @@ import { fail } from "./errors.ts";
 /** Lowest and highest allowed value, both included. */
 export type Range = readonly [number, number];
 
+/** No limits. */
+export const ANY: Range = [-Infinity, Infinity];
+
 /** "0 to 1": a range as error messages show it. */
 export const showRange = (range: Range): string => range.join(" to ");
 
 /** Returns `value` if it is a finite number in the range; otherwise an error names the field, the range and the unit. */
 export function checkedNumber(value: unknown, path: string, unit: string, within?: Range): number {
   const finite = Number.isFinite(value);
-  const [low, high] = within ?? [-Infinity, Infinity];
+  const [low, high] = within ?? ANY;
   if (finite && (value as number) >= low && (value as number) <= high) return value as number;
   const code = finite ? "out-of-range" : value === undefined ? "missing" : "not-a-number";
   return fail(code, { path, value, allowed: within ? showRange(within) : "a finite number", unit });
@@ -27,7 +30,7 @@ export function checkedRange(range: unknown, path: string, unit: string, inside?
     fail("out-of-range", {
       path: `${path}[1]`,
       value: high,
-      allowed: `${low} (not included) and above`,
+      allowed: `above ${low}`,
       unit,
     });
   }

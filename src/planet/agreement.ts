@@ -1,6 +1,8 @@
 // Inputs that say the same thing twice must agree, and the orbit must stay outside the stars.
 import { fail } from "../ground/errors.ts";
 import { approaches } from "./approaches.ts";
+import { keysOf } from "./keysOf.ts";
+import { type Written, writtenAs } from "./planetInput.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { fluxWays } from "./starlight.ts";
@@ -24,7 +26,7 @@ export function checkAgreement(
   contradictions: Contradictions,
 ): PlanetNote[] {
   const compare = (ways: readonly Way[], name: string, unit: string) =>
-    compared(ways, numbers, { name, unit, contradictions });
+    compared(ways, { d, numbers, contradictions }, { name, unit });
   return [
     ...checkStarAndOrbit(d, numbers, contradictions),
     ...compare(fluxWays(d), "flux at the semi-major axis", "W m-2"),
@@ -36,11 +38,12 @@ export function checkAgreement(
 
 /** The same for luminosities and the semi-major axis alone, which can be had where a flux cannot. */
 export function checkStarAndOrbit(d: Lit, numbers: Numbers, contradictions: Contradictions): PlanetNote[] {
-  const luminosity = { name: "luminosity", unit: "W", contradictions };
-  const axis = { name: "semi-major axis", unit: "m", contradictions };
+  const from = { d, numbers, contradictions };
+  const luminosity = { name: "luminosity", unit: "W" };
+  const axis = { name: "semi-major axis", unit: "m" };
   return [
-    ...starsOf(d).flatMap((star) => compared(luminosityWays(star), numbers, luminosity)),
-    ...compared(distanceWays(d), numbers, axis),
+    ...starsOf(d).flatMap((star) => compared(luminosityWays(star), from, luminosity)),
+    ...compared(distanceWays(d), from, axis),
   ];
 }
 
@@ -50,23 +53,37 @@ function rotationWays(d: PlanetDescription): Way[] {
   return [...periodWays(d), direct("rotation.period")];
 }
 
+/** What is compared, and what becomes of a contradiction. */
+interface Compared {
+  readonly d: object;
+  readonly numbers: Numbers;
+  readonly contradictions: Contradictions;
+}
+
+/** A value as its author wrote it. */
+function writtenAt(d: object, path: string): string {
+  const at = (held: unknown, key: string | number) => (held as Readonly<Record<string, unknown>>)[key];
+  return writtenAs(keysOf(path).reduce(at, d as unknown) as Written);
+}
+
 function compared(
   [first, ...others]: readonly Way[],
-  numbers: Numbers,
-  { name, unit, contradictions }: { name: string; unit: string; contradictions: Contradictions },
+  { d, numbers, contradictions }: Compared,
+  { name, unit }: { readonly name: string; readonly unit: string },
 ): PlanetNote[] {
   return others.map((other) => {
     const [used, spare] = [(first as Way).of(numbers) as number, other.of(numbers) as number];
     const [from, by] = [(first as Way).uses.join(" and "), other.uses.join(" and ")];
+    const as = (way: Way) => `(${way.uses.map((path) => writtenAt(d, path)).join(" and ")})`;
     if (Math.abs(spare - used) <= AGREEMENT * used) {
       const text = `${by} give the ${name} within 2 % of ${from}, which is used`;
       return planetNote({ code: "inputs-agree", about: by, value: spare, unit, text });
     }
     if (contradictions === "refuse") {
-      const allowed = `2 % around what ${from} gives, ${told(used)}`;
+      const allowed = `2 % around what ${from} ${as(first as Way)} gives, ${told(used)}`;
       fail("contradiction", { path: by, value: spare, allowed, unit });
     }
-    const text = `${by} give another ${name} than ${from}, which is used: ${told(spare)} against ${told(used)} ${unit}`;
+    const text = `${by} ${as(other)} give another ${name} than ${from} ${as(first as Way)}, which is used: ${told(spare)} against ${told(used)} ${unit}`;
     return contradicting({ about: by, value: spare, unit, text });
   });
 }

@@ -1,6 +1,7 @@
 // All checks of a description, in the order in which their errors help most.
 import { fail } from "../ground/errors.ts";
 import { type Contradictions, checkAgreement } from "./agreement.ts";
+import { checkStack } from "./checkStack.ts";
 import { checkCombinations } from "./combinations.ts";
 import { checkCovers } from "./covers.ts";
 import { allOf, failAll } from "./faults.ts";
@@ -48,9 +49,10 @@ export function checkedPlanet(value: unknown, contradictions: Contradictions): C
   const [, inputs] = allOf([() => checkCombinations(description), () => planetInputs(description)]);
   const byPath = new Map(inputs.map((input) => [input.path, input.value]));
   const numbers: Numbers = (path) => byPath.get(path) as number;
-  const [, , agreeing] = allOf([
+  const [, , , agreeing] = allOf([
     () => checkAverage(description, numbers),
     () => checkAllCovers(description, numbers),
+    () => checkStack(description, numbers),
     () => checkAgreement(description, numbers, contradictions),
   ]);
   const { report, heatCapacity } = planetBudget(description, {

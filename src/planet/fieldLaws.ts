@@ -100,6 +100,9 @@ export const isBound = (law: string, port: string): boolean =>
 /** Ports that take a temperature difference, by law and port; a test compares this list with the ports' ranges. */
 export const DIFFERENCES: readonly string[] = ["tanhAlbedo.width"];
 
+/** Whether a port of a law takes a temperature difference. */
+export const isDifference = (law: unknown, port: string): boolean => DIFFERENCES.includes(`${law}.${port}`);
+
 /** True for `{ law, … }`. */
 export const isLaw = (value: unknown): value is { readonly law: string } =>
   typeof value === "object" && value !== null && "law" in value;

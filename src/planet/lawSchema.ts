@@ -3,7 +3,7 @@ import type { ZodMiniArray, ZodMiniLiteral, ZodMiniObject, ZodMiniOptional, ZodM
 import { literal, optional, strictObject } from "zod/mini";
 import type { ListPort, Port, Ports } from "../graph/card.ts";
 import type { Law } from "../law/types.ts";
-import { isBound } from "./fieldLaws.ts";
+import { isBound, isDifference } from "./fieldLaws.ts";
 import { listOf } from "./listOf.ts";
 import { type ValueSchema, valueSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
@@ -32,15 +32,18 @@ export function lawSchema<
 >(name: Name, law: Law<I>, instead?: R): LawSchema<Name, I, R> {
   const fields = Object.entries(law.card.inputs)
     .filter(([port]) => !isBound(name, port))
-    .map(([port, of]) => [port, instead?.[port] ?? fieldSchema(port, of)] as const);
+    .map(([port, of]) => [port, instead?.[port] ?? fieldSchema(port, of, isDifference(name, port))] as const);
   const named = worded(literal(name), `"${name}"`);
   const schema = strictObject({ law: named, ...Object.fromEntries(fields) });
   const described = worded(schema, `{ law: "${name}" }`, { description: law.card.about });
   return described as unknown as LawSchema<Name, I, R>;
 }
 
-function fieldSchema(name: string, port: Port | ListPort): ZodMiniType {
-  if (!("each" in port)) return port.default === undefined ? valueSchema(port) : optional(valueSchema(port));
+function fieldSchema(name: string, port: Port | ListPort, difference: boolean): ZodMiniType {
+  if (!("each" in port)) {
+    const schema = valueSchema(port, difference);
+    return port.default === undefined ? schema : optional(schema);
+  }
   const record = Object.entries(port.each).map(([key, each]) => [key, valueSchema(each)] as const);
   const keys = record.map(([key]) => key).join(", ");
   const shape = worded(strictObject(Object.fromEntries(record)), `{ ${keys} }`);

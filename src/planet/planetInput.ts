@@ -1,5 +1,6 @@
 // One numeric value of a description, read in SI.
 import type { Port } from "../graph/card.ts";
+import { fail } from "../ground/errors.ts";
 import { checkedNumber, type Range } from "../ground/range.ts";
 import { inSI, mismatch } from "./inSI.ts";
 import { quantityOf } from "./quantityText.ts";
@@ -54,6 +55,7 @@ export function readInput(path: string, port: Port, written: Written, difference
     const at = `${path}.${side}`;
     // the width of an error bar is a difference, in kelvin also where the value is in degrees Celsius
     const of = described?.unit === "degC" ? "K" : described?.unit;
+    if (width < 0) fail("out-of-range", { path: at, value: width, allowed: "0 or more", unit: of });
     return checkedNumber(read(width, of, at), at, unit, [0, Number.MAX_VALUE]);
   };
   return {

@@ -1,7 +1,7 @@
 // Every numeric value of a description, read in SI under its path.
 import type { ListPort, Port, Ports } from "../graph/card.ts";
 import { allOf } from "./faults.ts";
-import { DIFFERENCES, isLaw, lawNamed } from "./fieldLaws.ts";
+import { isDifference, isLaw, lawNamed } from "./fieldLaws.ts";
 import {
   ALBEDO_PORT,
   ATMOSPHERE_PORTS,
@@ -50,7 +50,7 @@ export function planetInputs(d: PlanetDescription): PlanetInput[] {
 function inputsIn(path: string, ports: Ports, record: object = {}): Reading[] {
   const held = record as Readonly<Record<string, unknown>>;
   return Object.entries(ports).flatMap(([name, port]) =>
-    inputsAt(`${path}.${name}`, port, held[name], DIFFERENCES.includes(`${held.law}.${name}`)),
+    inputsAt(`${path}.${name}`, port, held[name], isDifference(held.law, name)),
   );
 }
 

@@ -3,6 +3,7 @@ import type { ZodMiniType } from "zod/mini";
 import { fail, type ThermosteadError } from "../ground/errors.ts";
 import { failUnknown, nearestName } from "../ground/names.ts";
 import { faultsOf } from "./faults.ts";
+import { pureHint } from "./pureHint.ts";
 import { allowedBy } from "./wording.ts";
 
 /** As much of a schema as is needed to find the part that an issue is about. */
@@ -77,7 +78,8 @@ function refuse(schema: Schema, value: unknown, path: string): never {
   const details = { path: path || "description", value, allowed: allowedBy(schema) };
   if (value === undefined) fail("missing", details);
   const wantsNumber = schema._zod.def.type === "number" || flattened(schema)[0]?._zod.def.type === "number";
-  if (wantsNumber && !isRecord(value) && !Array.isArray(value)) fail("not-a-number", details);
+  if (wantsNumber && !isRecord(value) && !Array.isArray(value))
+    fail("not-a-number", { ...details, allowed: details.allowed + pureHint(value) });
   return fail(typeof value === "number" && wantsText(schema) ? "unit-mismatch" : "unreadable", details);
 }
 

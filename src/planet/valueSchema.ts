@@ -24,9 +24,12 @@ export function pureSchema(port: Port) {
   return worded(union([value(), described]), range, aboutOf(port));
 }
 
-/** A text with a number and a unit, or the same as an object with errors and a source. */
-export function measuredSchema(port: Port) {
-  const example = exampleOf(port.unit);
+/**
+ * A text with a number and a unit, or the same as an object with errors and a source. `difference` tells a temperature
+ * difference.
+ */
+export function measuredSchema(port: Port, difference = false) {
+  const example = exampleOf(port.unit, difference);
   const allowed = `a number with its unit, as in "${example}"`;
   const text = worded(string(), allowed, { pattern: QUANTITY_PATTERN, examples: [example] });
   const unit = worded(string(), `a unit of the same kind as ${port.unit}`, { maxLength: LONGEST_UNIT });
@@ -43,8 +46,8 @@ export type ValueSchema<P> = P extends { readonly unit: "1" }
   : ReturnType<typeof measuredSchema>;
 
 /** The schema of a port's value. */
-export function valueSchema<const P extends Port>(port: P): ValueSchema<P> {
-  return (port.unit === "1" ? pureSchema(port) : measuredSchema(port)) as ValueSchema<P>;
+export function valueSchema<const P extends Port>(port: P, difference = false): ValueSchema<P> {
+  return (port.unit === "1" ? pureSchema(port) : measuredSchema(port, difference)) as ValueSchema<P>;
 }
 
 function aboutOf({ about = "", unit, within }: Port): { description: string } {

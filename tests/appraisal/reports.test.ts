@@ -14,6 +14,47 @@ const planets: readonly (readonly [string, unknown])[] = [
   ["with everything", snowy({ mass: "2 earthMass", rotation: { locked: true } })],
   ["with one climate", plain({ atmosphere: { pressure: "300 bar" } })],
   ["with star and orbit alone", { format: "thermostead-planet-1", star: plain().star, orbit: eccentric }],
+  [
+    "with long names and wide errors",
+    snowy({
+      star: {
+        luminosity: {
+          value: 0.20000000000000001,
+          unit: "solLum",
+          minus: 0.0123456789012,
+          plus: 0.0234567890123,
+        },
+      },
+      albedo: {
+        covers: Array.from({ length: 12 }, (_, i) => ({
+          name: "a name that is longer than any cover on a map of any planet needs to be",
+          share:
+            i === 11
+              ? "rest"
+              : {
+                  value: 0.01,
+                  minus: 0.00123456789012345,
+                  plus: 0.00123456789012345,
+                  source: "x".repeat(90),
+                },
+          albedo: { value: 0.3123456789012345, minus: 0.0123456789012345, plus: 0.0123456789012345 },
+        })),
+      },
+      longwave: {
+        law: "ceilingEmission",
+        ceiling: {
+          value: 290.1234567890123,
+          unit: "W m-2",
+          minus: 1.23456789012345,
+          plus: 1.23456789012345,
+        },
+        emission: {
+          law: "greyColumnEmission",
+          opticalDepth: { value: 0.9123456789012345, minus: 0.01234567890123456, plus: 0.01234567890123456 },
+        },
+      },
+    }),
+  ],
   ["with a flux alone", { format: "thermostead-planet-1", orbit: { flux: "12 W m-2" } }],
   ["without a climate", plain({ orbit: { semiMajorAxis: "900 au" } })],
   ["without a longwave", without(snowy(), "longwave")],
@@ -63,6 +104,10 @@ describe("text", () => {
   it.each([
     ["where the description comes from", /^invented\. A note\.$/m],
     ["laws and inputs with units", /^ {2}albedo +tanhAlbedo\n {2}albedo\.cold +0\.62$/m],
+    [
+      "the note on an average without its number as the average's",
+      /orbit\.average: the time-mean of the flux.*\(eccentricity\s+0\.08\)/s,
+    ],
     ["errors of inputs", /star\.luminosity +0\.2 \+0\.02 -0\.01 solLum/],
     ["the mean flux", /mean over the orbit +1290\.7/],
     ["temperatures by convention", /A = 0\.3, f = 0\.5 \(the day side\) +298\.52/],
@@ -98,6 +143,42 @@ describe("text", () => {
   const ceiling = { law: "ceilingEmission", ceiling: "280 W m-2" };
   const under = (emission: object, description = plain) =>
     toText(appraisePlanet(description({ longwave: { ...ceiling, emission } }))).replace(/\s+/g, " ");
+
+  test("has laws inside of laws", () => {
+    const north = { law: "northEmission" };
+    const depth = [0.4, { law: "vapourOpticalDepth", referenceTemperature: "288 K", referenceDepth: 0.8 }];
+    const told = (longwave: object) => toText(appraisePlanet(plain({ longwave })));
+    const capped = told({ ...ceiling, emission: north });
+    expect(capped).toMatch(
+      /longwave +ceilingEmission\n.*longwave\.ceiling.*\n.*longwave\.emission +northEmission\n/,
+    );
+    expect(told({ law: "greyColumnEmission", opticalDepth: depth })).toMatch(
+      /longwave\.opticalDepth\[1\] +vapourOpticalDepth\n +longwave\.opticalDepth\[1\]\./,
+    );
+    const covers = [
+      { share: { law: "iceShare", frozenBelow: "250 K", openAbove: "280 K" }, albedo: 0.6 },
+      { share: "rest", albedo: 0.2 },
+    ];
+    expect(toText(appraisePlanet(plain({ albedo: { covers } })))).toMatch(
+      /albedo\.covers\[0\]\.share +iceShare\n/,
+    );
+  });
+
+  test("has inputs in notes as they are written, and long times in days", () => {
+    const slow = (rotation: object, orbit: object = plain().orbit as object) =>
+      toText(appraisePlanet(plain({ rotation, orbit }))).replace(/\s+/g, " ");
+    expect(slow({ locked: true }, { period: "134.3 d" })).toContain(
+      "rotation 134.3 d: a planet that turns slowly",
+    );
+    const mass = toText(appraisePlanet(plain({ mass: "10 earthMass" }))).replace(/\s+/g, " ");
+    expect(mass).toContain("mass 10 earthMass: 10 Earths: the runaway greenhouse was computed for 0.1 to 5");
+    const contrary = plain({
+      orbit: { semiMajorAxis: { value: 0.46, unit: "au", plus: 0.01 }, period: "20 d" },
+    });
+    expect(toText(appraisePlanet(contrary)).replace(/\s+/g, " ")).toContain(
+      "orbit.period and star.mass (20 d and 0.72 solMass) give another semi-major axis than orbit.semiMajorAxis (0.46 +0.01 au), which is used:",
+    );
+  });
 
   test("says that there is no way back only where that is known", () => {
     // the way back leads through a stretch that is not decided: under a ceiling

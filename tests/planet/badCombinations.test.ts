@@ -253,7 +253,7 @@ const FAULTS: readonly Fault[] = [
     "a heated layer that emits nothing",
     emitting({ law: "leakyStackEmission", layers: [{ emissivity: 0, heating: "10 W m-2" }] }),
     "out-of-range",
-    "longwave.hottest",
+    "longwave.layers[0].heating",
   ],
   ["no forcing in a list", simple({ forcing: [] }), "unreadable", "forcing"],
   [
@@ -334,4 +334,24 @@ describe("a description is refused for", () => {
 test("an albedo below clouds is refused in words that say what to write", () => {
   const { message } = refusal(() => readPlanet(simple({ clouds: white })));
   expect(message).toMatch(/^albedo: contradiction, received 0\.3; allowed: surface in its place/);
+});
+
+test("a layer that cannot be heated is named with its heat", () => {
+  const layers = [
+    { emissivity: 0.5, heating: "10 W m-2" },
+    { emissivity: 0, heating: "10 W m-2" },
+  ];
+  const longwave = {
+    law: "ceilingEmission",
+    ceiling: "300 W m-2",
+    emission: { law: "leakyStackEmission", layers },
+  };
+  expect(refusal(() => readPlanet(simple({ longwave }))).message).toContain(
+    "longwave.emission.layers[1].heating: out of range, received 10; allowed: with emissivity 0, as longwave.emission.layers[1] has it, only 0 W m-2",
+  );
+  const clear = [
+    { emissivity: 0.5, heating: "10 W m-2" },
+    { emissivity: 0, heating: "0 W m-2" },
+  ];
+  expect(() => readPlanet(simple({ longwave: { ...longwave.emission, layers: clear } }))).not.toThrow();
 });

@@ -188,3 +188,44 @@ describe("contradictions carry both numbers", () => {
     expect(() => readPlanet(orsolneWith({ star: { luminosity: "0.2 solLum" }, orbit }))).not.toThrow();
   });
 });
+
+const forcedBy = (concentration: unknown) => ({
+  ...{ law: "co2EffectiveForcingAr6", concentration, reference: 278e-6, nitrousOxide: 273e-9 },
+});
+const bright = (minus: number) => ({ luminosity: { value: 0.42, unit: "solLum", minus } });
+
+describe("an error shows what to write", () => {
+  const messageOf = (fields: Record<string, unknown>) =>
+    refusal(() => readPlanet(orsolneWith(fields))).message;
+  const ramp = { law: "tanhAlbedo", cold: 0.6, warm: 0.3, midpoint: "266 K" };
+  it.each([
+    ["a width in kelvin that is missing", { albedo: ramp }, 'a number with its unit, as in "10 K"'],
+    [
+      "a temperature that is missing",
+      { albedo: { ...ramp, midpoint: undefined, width: "9 K" } },
+      'as in "288 K"',
+    ],
+    ["parts per million", { forcing: forcedBy("420 ppm") }, "; write 420e-6, without quotes"],
+    ["a percentage", { albedo: "30 %" }, "{ law }; write 30e-2, without quotes"],
+    ["a number in quotes", { albedo: "0.3" }, "{ law }; write 0.3, without quotes"],
+    [
+      "an error below 0",
+      { star: bright(-0.01) },
+      "star.luminosity.minus: out of range, received -0.01; allowed: 0 or more solLum",
+    ],
+  ])("%s", (_, fields, told) => {
+    expect(messageOf(fields)).toContain(told);
+  });
+
+  test("and none where it is not known", () => {
+    expect(messageOf({ albedo: "a third" })).not.toContain("write");
+    expect(messageOf({ albedo: "0.3 K" })).not.toContain("write");
+    expect(() => readPlanet(orsolneWith({ star: bright(0) }))).not.toThrow();
+  });
+
+  test("a contradiction has the values as they are written", () => {
+    const orbit = { semiMajorAxis: "0.46 au", period: "20 d" };
+    const star = { luminosity: "0.42 solLum", mass: "0.7 solMass" };
+    expect(messageOf({ star, orbit })).toContain("2 % around what orbit.semiMajorAxis (0.46 au) gives, ");
+  });
+});

@@ -1,0 +1,18 @@
+// What to write in place of a text where a pure number is wanted.
+
+const SHARES: Readonly<Record<string, string>> = {
+  "": "",
+  "1": "",
+  "%": "e-2",
+  ppm: "e-6",
+  ppmv: "e-6",
+  ppb: "e-9",
+  ppbv: "e-9",
+};
+const WRITTEN = /^\s*([-+]?(?:\d+\.?\d*|\.\d+))\s*(|1|%|ppmv?|ppbv?)\s*$/;
+
+/** `; write 420e-6` for `"420 ppm"`; nothing for a text that is no such number. */
+export function pureHint(value: unknown): string {
+  const [, number, unit] = (typeof value === "string" && value.length < 100 && WRITTEN.exec(value)) || [];
+  return number === undefined || unit === undefined ? "" : `; write ${number}${SHARES[unit]}, without quotes`;
+}

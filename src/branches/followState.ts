@@ -60,11 +60,11 @@ function quickly<N extends string>(
 ): FollowedState<N> | undefined {
   const place = (state as Partial<State> | null)?.variables?.temperature;
   const given = (state as Partial<State> | null)?.givens;
-  if (loop.sampled || within !== undefined || !Array.isArray(place?.bracket) || !given) return undefined;
+  if (loop.sampled || !Array.isArray(place?.bracket) || !given) return undefined;
   const before = loop.givens.map(({ name }) => given[name] as number);
   const { after, changed } = changedGivens(loop, before, to);
   const { value: temperature, bracket } = place;
-  const step = { before, after, temperature, bracket, within: WITHIN };
+  const step = { before, after, temperature, bracket, within: rangeWith(within, loop, temperature) };
   const located = quickStepOf(loop, changed.join())(step);
   if (!located) return undefined;
   return Object.freeze({ state: readerOf(loop)(located, after) as State<N>, lost: null, proof: "proved" });

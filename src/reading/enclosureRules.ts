@@ -64,7 +64,7 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   },
   // e^a − e^a' = e^a'·(e^α − 1), no larger than e^a'·1.06·|α| where |α| < 0.1
   exp: (w, a) =>
-    w.approximate("exp", a, NOT_NEGATIVE, (hi, err) =>
+    w.approximate("exp", a, NOT_NEGATIVE, ({ hi }, err) =>
       err === undefined
         ? err
         : w.provided(w.widened(err) as number, w.literal(0.1), w.times(w.times(hi, w.literal(1.06)), err)),
@@ -75,8 +75,13 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
       const least = w.less(a.lo, err);
       return w.provided(w.literal(0), least, w.over(err, least));
     }),
-  // no steeper than 1
-  tanh: (w, a) => w.approximate("tanh", a, [signOf(a) > 0 ? 0 : -1, signOf(a) < 0 ? 0 : 1], (_, err) => err),
+  // no steeper than 1 − tanh² a' + |α|, as its slope changes by less than |α|; 1e-15 is above the rounding of 1 − tanh²
+  tanh: (w, a) =>
+    w.approximate("tanh", a, [signOf(a) > 0 ? 0 : -1, signOf(a) < 0 ? 0 : 1], (value, err) => {
+      if (err === undefined) return err;
+      const slope = w.sub(w.literal(1), extremesOfSquare(w, value).lo);
+      return w.times(w.sum(w.sum(slope, w.literal(1e-15)), err), err);
+    }),
   min: (w, a, b) => ({
     ...{ lo: w.least(a.lo, b.lo), hi: w.least(a.hi, b.hi), err: w.sum(a.err, b.err) },
     within: [Math.min(a.within[0], b.within[0]), Math.min(a.within[1], b.within[1])],

@@ -118,11 +118,12 @@ export class EnclosureWriter extends ScalarProgram {
     op: "exp" | "log" | "tanh",
     a: Enclosure,
     within: Range,
-    error: (hi: number, err: Bound) => Bound,
+    error: (value: Ends, err: Bound) => Bound,
   ): Enclosure {
     const first = this.step(op, a.lo);
     const second = this.step(op, a.hi);
+    const lo = this.least(first, second);
     const hi = this.greatest(first, second);
-    return this.rounded(this.least(first, second), hi, error(hi, a.err), within, ULP);
+    return this.rounded(lo, hi, error({ lo, hi, within }, a.err), within, ULP);
   }
 }

@@ -121,6 +121,25 @@ describe("the proved search", () => {
     expect(found.notes).toMatchObject([{ code: "search-stopped" }]);
   });
 
+  test.each([0.01, 1, 3, 5, 10, 25])("the closure bound holds far above a step of %d K", (width) => {
+    // the argument of tanh is then wrong by many roundings, but tanh no longer answers
+    for (const flux of [3.9e6, 2e5]) {
+      const loop = core.closeLoop(({ temperature }) => {
+        const albedo = core.tanhAlbedo({ temperature, cold: 0.7, warm: 0.3, midpoint: 265, width });
+        return {
+          heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+          cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+          heatCapacity: 4e8,
+        };
+      });
+      const { states, complete } = findStates(loop, { within: [2.7, 3000] });
+      expect([states.length, complete]).toEqual([1, true]);
+      const [{ imbalance, ledger }] = states as [core.State];
+      const heating = Math.max(...ledger.flows.map((f) => f.value));
+      expect(imbalance.temperature).toBeLessThanOrEqual(Math.max(5e-12, 2e-14 * heating));
+    }
+  });
+
   test("the closure bound holds in its relative form where flows are huge", () => {
     // an icy loop pushed to about 2000 K, and a bare rock at the flux of 55 Cancri e (S/S☉ = 2450, von Braun et al. 2011,
     // from memory): half a unit in the last place of T alone is worth 1e-10 W m⁻²

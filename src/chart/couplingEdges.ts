@@ -29,5 +29,5 @@ export function edgesOf({ through, loops, reference }: Feedbacks): Edges {
       return { from, to, value: own.reduce((sum, path) => sum + path.feedbackParameter, 0) };
     }),
   );
-  return { names, edges: edges.filter((edge) => edge.value !== 0) };
+  return { names, edges: edges.filter((edge) => edge.value) };
 }

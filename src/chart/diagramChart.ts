@@ -47,7 +47,7 @@ export function diagramChart({ diagram, held, state, units = diagram.units }: Di
   const { along, branches, undecided } = diagram;
   const seen = branches.flatMap((branch) => branch.temperatures);
   const range = extent(seen[0] ? seen : diagram.within);
-  const known = (given: string) => units?.find(({ name }) => name === given);
+  const known = (given: string) => units?.find((one) => one.name === given);
   const { unit, size = 1 } = (known(along) ?? diagram) as GivenUnit;
   const shown = (at: number): number => at / size;
   const branchLayers = (of: Diagram, look: Look, prefix?: string): Layer[] => {
@@ -74,13 +74,20 @@ export function diagramChart({ diagram, held, state, units = diagram.units }: Di
       const goal = to?.temperature ?? range[leaves === "hotter" ? 1 : 0];
       const x = shown(jump.at);
       const end = to ? `jumps to ${numeral(goal)} K` : `leaves the searched range, ${leaves}`;
-      const corners = [
-        [x, temperature],
-        [x, goal],
-      ] as const;
       const sign = { x, y: (temperature + goal) / 2, tip: `a slow ${jump.direction} ${end}` };
-      const shape = goal > temperature ? "triangle-up" : "triangle-down";
-      return { line: lineOf(corners, i), arrow: layerOf("point", [sign], { ...warm, shape }) };
+      return {
+        line: lineOf(
+          [
+            [x, temperature],
+            [x, goal],
+          ],
+          i,
+        ),
+        arrow: layerOf("point", [sign], {
+          ...warm,
+          shape: goal > temperature ? "triangle-up" : "triangle-down",
+        }),
+      };
     });
   return plotOf({
     title: `Temperature along ${along}`,

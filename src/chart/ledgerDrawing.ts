@@ -42,7 +42,7 @@ export function ledgerPlot({ ledger }: LedgerDrawing, page: number): Plot {
   const names = stack.map((reservoir) => reservoir.name);
   const gutter = 14 + Math.min(0.24 * page, Math.max(...names.map((name) => textWidth(name, 12))));
   const { flows: laid, caption } = layFlows({ flows: ledger.flows, names, room: width - gutter - 8 });
-  const pitch = BOX + Math.max(64, ...laid.map((flow) => flow.down + flow.lines.length * LINE + 32));
+  const pitch = BOX + Math.max(64, ...laid.map((flow) => 2 * flow.down + flow.lines.length * LINE + 32));
   const topOf = (name: string): number => 0 - names.indexOf(name) * pitch;
 
   const drawn = laid.map((flow, line) => {

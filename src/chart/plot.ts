@@ -182,7 +182,7 @@ export function extent(values: readonly number[]): Range {
   const sorted = Float64Array.from(values.filter(isNear)).sort();
   const [low, high] = [sorted.at(0) ?? 1 / 0, sorted.at(-1) ?? -1 / 0];
   const room = (high - low) / 16;
-  return [Math.max(low - room, Math.min(low, 0)), high + room];
+  return [Math.max(low - room, low < 0 ? -1 / 0 : 0), high + room];
 }
 
 function axisOf(axis: DraftAxis, values: readonly number[]): Axis {

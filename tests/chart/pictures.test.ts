@@ -4,11 +4,13 @@ import { edgesOf } from "../../src/chart/couplingEdges.ts";
 import { couplingPlot } from "../../src/chart/couplingGraph.ts";
 import { diagramChart } from "../../src/chart/diagramChart.ts";
 import { feedbackBars } from "../../src/chart/feedbackBars.ts";
-import { ledgerPlot } from "../../src/chart/ledgerDrawing.ts";
+import { ledgerDrawing, ledgerPlot } from "../../src/chart/ledgerDrawing.ts";
 import { limitsChart } from "../../src/chart/limitsChart.ts";
 import { planetsChart } from "../../src/chart/planetsChart.ts";
 import type { Item, Layer, Plot } from "../../src/chart/plot.ts";
+import { toSVG, toText } from "../../src/chart/show.ts";
 import { budgetChart, statesChart } from "../../src/chart/statesChart.ts";
+import type { Ledger } from "../../src/states/state.ts";
 import {
   airy,
   budget,
@@ -24,6 +26,7 @@ import {
   state,
   within,
 } from "./cases.ts";
+import { overlapping, parsed, wordsOf } from "./svgText.ts";
 
 const layer = (plot: Plot, name: string): Layer => {
   const own = plot.layers.filter((l) => l.name === name);
@@ -87,6 +90,14 @@ describe("heating and cooling", () => {
     expect(chart.caption).toEqual(["Left out, as not finite or outside: 5"]);
   });
 
+  test("states by themselves have an axis around them, also where the search was wide", () => {
+    const { x } = statesChart({ ...found, within: [50, 2500] });
+    const [low, high] = [found.states[0]?.temperature as number, state.temperature];
+    expect(x.domain[0]).toBeLessThan(low);
+    expect(x.domain[1]).toBeGreaterThan(high);
+    expect(x.domain[1] - x.domain[0]).toBeLessThan(1.2 * (high - low));
+  });
+
   test("one state, and none", () => {
     expect(statesChart({ ...found, states: [state] }).caption[0]).toContain("States at 150 to 400 K: 1, ");
     expect(statesChart({ ...found, states: [] }).layers.flatMap((l) => l.name ?? [])).toEqual([]);
@@ -139,11 +150,27 @@ describe("the branch diagram", () => {
     const chart = diagramChart({ diagram: leaving });
     const top = Math.max(...diagram.branches.map((b) => b.temperatures[1]));
     expect(layer(chart, "jump").items[1]?.y).toBeGreaterThan(top);
+    expect(JSON.stringify(chart)).toContain("leaves the searched range, hotter");
+    expect(JSON.stringify(chart)).not.toContain("jumps to");
     expect(only(layer(chart, "no state in range").items)).toMatchObject({
       x: 1700,
       x2: 1900,
       tip: "too hot",
     });
+  });
+
+  test("nothing is drawn below 0 K, where no jump can lead", () => {
+    const [first] = diagram.jumps;
+    const cold = {
+      ...diagram,
+      branches: manyBranches(1).branches.map((b) => ({ ...b, temperatures: [20, 900] as const })),
+      jumps: [{ ...(first as NonNullable<typeof first>), to: null, leaves: "colder" as const }],
+    };
+    const chart = diagramChart({ diagram: cold });
+    expect(chart.y.domain[0]).toBe(0);
+    expect(layer(chart, "jump").items[1]?.y).toBe(0);
+    expect(JSON.stringify(chart)).toContain("leaves the searched range, colder");
+    expect(JSON.stringify(plot)).toMatch(/a slow fall jumps to [\d.]+ K/);
   });
 
   test("a thousand branches are drawn, undecided parts as such", () => {
@@ -190,6 +217,31 @@ describe("the bars of feedbacks", () => {
     expect([sum.x, sum.x2]).toEqual([0, feedbacks.feedbackParameter]);
     for (const { x, x2, tip } of parts)
       expect((tip as string).startsWith((x2 as number) > x ? "+" : "−")).toBe(true);
+  });
+
+  test("long names of loops are written in lines that fit a telephone, each above its bar", () => {
+    const through = ["orbit.incomingStellarFlux", "atmosphere.waterVapour", "albedo.cloudCover"];
+    const loops = feedbacks.loops.map((loop) => ({ ...loop, through }));
+    const plot = feedbackBars({ ...feedbacks, loops } as never);
+    const words = wordsOf(parsed(toSVG(plot, { width: 360 }) as string));
+    expect(words.filter((w) => w.left < 0 || w.right > 360)).toEqual([]);
+    expect(overlapping(words)).toEqual([]);
+    expect(texts(plot).join(" ")).toContain(through.join(" → "));
+    const labels = plot.layers.at(-1)?.items.map((i) => i.y) ?? [];
+    expect(labels.length).toBeGreaterThan(2 + feedbacks.loops.length);
+    const bars = plot.layers.filter((l) => l.mark === "box").flatMap((l) => l.items);
+    // letters reach 3 px below their line
+    for (const { y, y2 } of bars)
+      expect(labels.filter((at) => at + 9 > (y2 as number) && at - 3 < y)).toEqual([]);
+  });
+
+  test("there is room on both sides of them", () => {
+    const { x, layers } = feedbackBars(feedbacks);
+    const ends = layers
+      .filter((l) => l.mark === "box")
+      .flatMap((l) => l.items.flatMap((i) => [i.x, i.x2 as number]));
+    expect(x.domain[0]).toBeLessThan(Math.min(...ends));
+    expect(x.domain[1]).toBeGreaterThan(Math.max(...ends));
   });
 
   test("loops that are not listed are one bar more", () => {
@@ -243,6 +295,49 @@ describe("the ledger", () => {
     const [w, value] = scales[2] as [number, number];
     // the smallest are drawn as hairlines of 1.2 px
     for (const [wide, flow] of scales) expect(wide).toBeCloseTo(Math.max(1.2, (flow * w) / value), 9);
+  });
+
+  const crowd = (count: number): Ledger => ({
+    reservoirs: ["space", "high air", "air", "low air", "surface"].map((name) => ({ name, storage: null })),
+    flows: Array.from({ length: count }, (_, i) => ({
+      ...{ name: `flow ${i}`, from: ["space", "high air", "air", "low air", "surface"][i % 5] as string },
+      ...{ to: ["low air", "space", "surface", "high air", "air"][i % 5] as string },
+      ...{ value: 40 + ((i * 37) % 23) * 12, standardName: null },
+    })),
+  });
+
+  test.each([
+    [14, 360],
+    [26, 360],
+    [26, 640],
+    [60, 360],
+  ])("%d flows at %d px are all inside, apart, and to one scale", (count, width) => {
+    const { flows } = crowd(count);
+    const plot = ledgerPlot(ledgerDrawing(crowd(count)), width);
+    const bands = widths(plot);
+    expect(bands).toHaveLength(count);
+    expect(plot.caption.join()).not.toContain("Left out");
+    const largest = Math.max(...flows.map((f) => f.value));
+    const widest = Math.max(...bands.map(([, w]) => w));
+    bands.forEach(([left, w], i) => {
+      // the smallest are drawn as hairlines of 1.2 px
+      expect(w).toBeCloseTo(Math.max(1.2, ((flows[i]?.value as number) / largest) * widest), 9);
+      expect(left + w).toBeLessThan(bands[i + 1]?.[0] ?? width - 20);
+    });
+    // all labels with their grounds, and no label on another
+    const svg = parsed(toSVG(ledgerDrawing(crowd(count)), { width }) as string);
+    expect(overlapping(wordsOf(svg))).toEqual([]);
+    expect(texts(plot).filter((t) => t.length < 3)).toHaveLength(count);
+    expect(plot.layers.find((l) => l.look.colour === "paper")?.items).toHaveLength(count);
+  });
+
+  test("a flow of nothing is not drawn", () => {
+    const still = { ...airy, flows: airy.flows.map((f, i) => (i === 3 ? { ...f, value: 0 } : f)) };
+    const plot = ledgerPlot(ledgerDrawing(still), 640);
+    expect(widths(plot)).toHaveLength(airy.flows.length - 1);
+    expect(JSON.stringify(plot)).not.toContain("window");
+    expect(toText(still)).toMatch(/\| window +\| surface +\| space +\| 0 /);
+    expect(widths(ledgerPlot(ledgerDrawing({ ...airy, flows: still.flows.slice(3, 4) }), 640))).toEqual([]);
   });
 
   test("space is on top, then the air, the surface and the interior", () => {

@@ -1,6 +1,8 @@
 // Results show themselves in every form there is, and nothing that is handed to them makes them throw.
+import fs from "node:fs";
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
+import { appraisePlanet } from "../../src/appraisal/appraisePlanet.ts";
 import { show, toHTML, toMarkdown, toSVG, toText, toVegaLite } from "../../src/chart/show.ts";
 import { found, HARM, pictures, results, state } from "./cases.ts";
 import { all, parsed } from "./svgText.ts";
@@ -95,6 +97,38 @@ describe("an appraisal is known by its fields", () => {
 
   test("also without states", () => {
     expect(Object.keys(formsOf({ ...appraisal, found: null }))).toEqual(TEXTS);
+  });
+});
+
+describe("the appraisal of the example planet", () => {
+  const appraisal = appraisePlanet(JSON.parse(fs.readFileSync("docs/examples/orsolne.json", "utf8")));
+  const html = parsed(`<div>${toHTML(appraisal)}</div>`);
+  const tables = all(html, "table").map((table) => ({
+    title: all(table, "caption")[0]?.text,
+    head: all(table, "th").map((cell) => cell.text),
+    rows: all(table, "tr").length - 1,
+  }));
+
+  test("has one table of its climates, of few columns", () => {
+    expect(tables.filter(({ title }) => title?.includes("states"))).toEqual([
+      { title: "states", head: expect.any(Array), rows: 3 },
+    ]);
+    expect(tables.find(({ title }) => title === "states")?.head).toEqual([
+      "temperature (K)",
+      "albedo",
+      "equilibrium temperature (K)",
+      "stability",
+      "feedback parameter (W m⁻² K⁻¹)",
+      "e folding time (s)",
+    ]);
+    // 165 before; inputs and limits have a dozen
+    expect(Math.max(...tables.map(({ head }) => head.length))).toBeLessThan(15);
+  });
+
+  test("says how many climates were found, and where it was looked for them", () => {
+    expect(all(html, "p").map((line) => line.text)).toContain(
+      "States at 50 to 2500 K: 3, proved, undecided: 0",
+    );
   });
 });
 

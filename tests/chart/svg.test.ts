@@ -1,7 +1,8 @@
 // Every picture as SVG: well-formed, finite, inside of itself, and no words on other words, on a telephone and on a desk.
 import { describe, expect, test } from "vitest";
+import { diagramChart } from "../../src/chart/diagramChart.ts";
 import { toSVG } from "../../src/chart/show.ts";
-import { HARM, pictures } from "./cases.ts";
+import { diagram, HARM, pictures } from "./cases.ts";
 import { all, overlapping, parsed, wordsOf } from "./svgText.ts";
 
 const WIDTHS = [360, 1200];
@@ -34,6 +35,22 @@ test("axes have titles with units", () => {
   const texts = wordsOf(parsed(svgOf("diagram", 640))).map((w) => w.text);
   expect(texts).toContain("temperature (K)");
   expect(texts).toContain("flux (W m⁻²)");
+});
+
+test("long titles of axes take more lines, and captions break at spaces before they break names", () => {
+  const along = "atmosphere.incomingStellarFluxAtTheTopOfAllOfIt";
+  const units = [{ name: along, unit: "W m-2" }];
+  const long = diagramChart({ diagram: { ...diagram, along, units, fixed: { "orbit.semiMajorAxis": 1 } } });
+  const words = wordsOf(parsed(toSVG(long, { width: 360 }) as string));
+  expect(words.filter((w) => w.left < 0 || w.right > 360)).toEqual([]);
+  expect(overlapping(words)).toEqual([]);
+  expect(
+    words
+      .map((w) => w.text)
+      .join("")
+      .replace(/ /g, ""),
+  ).toContain(`${along}(Wm⁻²)`);
+  expect(words.some((w) => w.text.includes("orbit.semiMajorAxis"))).toBe(true);
 });
 
 test("names are words, whatever they hold", () => {

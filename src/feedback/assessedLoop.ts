@@ -1,6 +1,6 @@
 // The linear climate of assessed feedbacks.
 import { inUnit, mul, neg, sub } from "../graph/operations.ts";
-import { fail } from "../ground/errors.ts";
+import { checkKeys, checkRecord } from "../ground/names.ts";
 import { checkedNumber } from "../ground/range.ts";
 import { closeLoop } from "../loop/closeLoop.ts";
 import type { Flow, Loop } from "../loop/types.ts";
@@ -20,13 +20,15 @@ export type AssessedNames<F extends string> = "variable temperature" | "given fo
  */
 export function assessedLoop<F extends string>(
   assessment: FeedbackAssessment<F>,
-  { temperature: reference = 288 }: { readonly temperature?: number } = {},
+  options: { readonly temperature?: number } = {},
 ): Loop<AssessedNames<F>> {
+  checkRecord(assessment, "assessment", "reference and feedbacks");
+  checkKeys(options, "assessedLoop", ["temperature"]);
+  const { temperature: reference = 288 } = options;
   const { feedbacks } = assessment;
-  if (typeof feedbacks !== "object" || feedbacks === null)
-    fail("unreadable", { path: "feedbacks", value: feedbacks, allowed: "estimates by name" });
-  const strength = (path: string, estimate: { readonly best: number }) =>
-    checkedNumber(estimate.best, `${path}.best`, "W m-2 K-1", [-1e3, 1e3]);
+  checkRecord(feedbacks, "feedbacks", "estimates by name");
+  const strength = (path: string, estimate: { readonly best: number } | undefined) =>
+    checkedNumber(estimate?.best, `${path}.best`, "W m-2 K-1", [-1e3, 1e3]);
   const origin = checkedNumber(reference, "temperature", "K", [0, 1e5]);
   const loop = closeLoop(({ temperature, given, couple }) => {
     const warmer = sub(temperature, origin);

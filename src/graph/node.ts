@@ -2,6 +2,7 @@
 import { type Dimension, dimensionOf, showDimension } from "../ground/dimension.ts";
 import { fail } from "../ground/errors.ts";
 import type { LawCard } from "./card.ts";
+import { checkCard } from "./checkCard.ts";
 import { BARE, dimensionOfNode } from "./dimensionOfNode.ts";
 import type { Compute, Meaning, Op } from "./op.ts";
 import { type BodyValue, Quantity, type Recorder, type Wired } from "./quantity.ts";
@@ -96,13 +97,14 @@ export class Graph implements Recorder {
   /** Throws if a node has another unit, or none that can be told. */
   checkUnit(id: number, unit: string, path: string): void {
     const found = this.dimensions[id];
-    if (found !== BARE && found !== dimensionOf(unit)) {
+    if (found !== BARE && found !== dimensionOf(unit, path)) {
       const value = found === undefined ? "an open unit" : showDimension(found);
       fail("unit-mismatch", { path, value, allowed: unit });
     }
   }
 
   lawNode(card: LawCard, wires: Wired, body: () => BodyValue): Quantity {
+    checkCard(card);
     const { demands, result } = this.#inBody(body);
     const meaning: Meaning = {
       kind: "law",

@@ -22,15 +22,15 @@ const FACTOR = /^([A-Za-z]+|1)(?:\*\*|\^)?([+-]?\d+(?:\.\d+)?)?$/;
 /** The dimension of a pure number. */
 export const NO_DIMENSION: Dimension = "0,0,0,0,0";
 
-/** Reads a coherent SI unit, written `W m-2` or `W.m**-2`; exponents may be fractions. Throws `unknown-unit`. */
-export function dimensionOf(unit: string): Dimension {
+/** Reads a coherent SI unit, written `W m-2` or `W.m**-2`; exponents may be fractions. `path` names it. Throws `unknown-unit`. */
+export function dimensionOf(unit: string, path = "unit"): Dimension {
   const exponents = [0, 0, 0, 0, 0];
   for (const factor of String(unit).split(/ +|\.(?=[A-Za-z1])/)) {
     const found = FACTOR.exec(factor);
     const base = found && Object.hasOwn(UNITS, found[1] as string) ? UNITS[found[1] as string] : undefined;
     if (!base) {
       return fail("unknown-unit", {
-        path: "unit",
+        path,
         value: unit,
         allowed: `products of ${Object.keys(UNITS).join(", ")} with exponents, as in W m-2`,
       });

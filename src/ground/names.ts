@@ -22,7 +22,7 @@ function editDistance(a: string, b: string): number {
       return left;
     });
   }
-  return row[b.length] as number;
+  return row.at(-1) as number;
 }
 
 /** Throws `unknown-name` with the known names and the nearest of them. */
@@ -32,11 +32,18 @@ export function failUnknown(path: string, name: string, known: readonly string[]
   return fail("unknown-name", { path, value: name, allowed: near ? `${list} (nearest: ${near})` : list });
 }
 
-/** Throws `unknown-name` for the first key of `record` that is not known. */
-export function checkKeys(record: object, path: string, known: readonly string[]): void {
+/** Throws `unreadable` for what is no object, and `unknown-name` for the first key of `record` that is not known. */
+export function checkKeys(record: unknown, path: string, known: readonly string[]): asserts record is object {
+  checkRecord(record, path, known);
   for (const key of Object.keys(record)) {
     if (!known.includes(key)) failUnknown(`${path}.${key}`, key, known);
   }
+}
+
+/** Throws `unreadable` for what is no object. */
+export function checkRecord(record: unknown, path: string, fields: unknown): asserts record is object {
+  if (Object(record) !== record)
+    fail("unreadable", { path, value: record, allowed: `an object with ${fields}` });
 }
 
 /** Refuses names that are empty or that every object already has, such as `__proto__`. */

@@ -2,7 +2,8 @@
 import type { LawCard, Port, Ports } from "../graph/card.ts";
 import { type DemandValue, Quantity } from "../graph/quantity.ts";
 import { fail } from "../ground/errors.ts";
-import { checkedNumber, type Range } from "../ground/range.ts";
+import { checkRecord } from "../ground/names.ts";
+import { ANY, checkedNumber } from "../ground/range.ts";
 import type { Body, Law, LawFacts, LawSpec } from "./types.ts";
 import { isList, wire } from "./wiring.ts";
 
@@ -19,8 +20,8 @@ import { isList, wire } from "./wiring.ts";
  * });
  */
 export function defineLaw<const I extends Ports>(spec: LawSpec<I>): Law<I> {
-  const { write, demands = {}, ...facts } = spec;
-  const card = cardOf(facts as LawFacts<I>, false);
+  const { write, demands = {}, ...facts } = Object(spec) as LawSpec<I>;
+  const card = cardOf(facts as LawFacts<I>, write);
   const { name, inputs } = card;
   const law = (wires: unknown): number | Quantity => {
     const { body, flat, graph } = wire(name, inputs, wires);
@@ -39,11 +40,14 @@ export function defineLaw<const I extends Ports>(spec: LawSpec<I>): Law<I> {
   return Object.assign(spec.demands ? law : fastPath(inputs, write, law), { card }) as unknown as Law<I>;
 }
 
-/** The card of a law from its facts. */
-export const cardOf = <I extends Ports>(facts: LawFacts<I>, sampled: boolean): LawCard<I> =>
-  Object.freeze({ about: "", source: "", published: {}, ...facts, sampled }) as LawCard<I>;
-
-const ANY: Range = [-Infinity, Infinity];
+/** The card of a law from its facts. Throws `unreadable` where one is missing without which there is no law. */
+export function cardOf<I extends Ports>(
+  facts: LawFacts<I> & { readonly sampled?: true },
+  body: unknown,
+): LawCard<I> {
+  checkRecord(body && facts.output && facts.inputs, "law", "ports, write");
+  return Object.freeze({ about: "", source: "", published: {}, sampled: false, ...facts }) as LawCard<I>;
+}
 
 type Wired = Readonly<Record<string, unknown>>;
 
@@ -59,13 +63,13 @@ function fastPath<I extends Ports>(
   const ports = Object.entries(inputs) as [string, Port][];
   if (ports.some(([, p]) => isList(p) || p.optional)) return slow;
   const limits = ports.map(([name, { within: [low, high] = ANY, default: fallback }]) => {
-    return { name, low, high, fallback };
+    return { name, low, high, default: fallback };
   });
   return (wires) => {
     let unmatched = 0;
     for (const _ in wires) unmatched++;
     let body = wires;
-    for (const { name, low, high, fallback } of limits) {
+    for (const { name, low, high, default: fallback } of limits) {
       let value = wires?.[name];
       if (value === undefined) {
         value = fallback;
@@ -74,13 +78,13 @@ function fastPath<I extends Ports>(
       if (!(Number.isFinite(value) && (value as number) >= low && (value as number) <= high))
         return slow(wires);
     }
-    const result = unmatched === 0 ? write(body as Body<I>) : undefined;
+    const result = unmatched ? undefined : write(body as Body<I>);
     return Number.isFinite(result) ? result : slow(wires);
   };
 }
 
 /** The finite number that a law gives; anything else is an error that names the law. */
-export function checkedResult({ name, output }: LawCard, result: unknown): number {
+function checkedResult({ name, output }: LawCard, result: unknown): number {
   if (Number.isFinite(result)) return result as number;
   return fail("not-finite", { path: name, value: result, allowed: "a finite number", unit: output.unit });
 }

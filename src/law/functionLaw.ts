@@ -2,8 +2,9 @@
 import type { Ports } from "../graph/card.ts";
 import type { Compute } from "../graph/op.ts";
 import type { Quantity } from "../graph/quantity.ts";
+import { fail } from "../ground/errors.ts";
 import type { Range } from "../ground/range.ts";
-import { cardOf, checkedResult } from "./defineLaw.ts";
+import { cardOf } from "./defineLaw.ts";
 import type { Law, LawFacts, NumberBody } from "./types.ts";
 import { wire } from "./wiring.ts";
 
@@ -23,16 +24,24 @@ export interface SearchedFunction<S> extends Compute {
 
 /** The law of an ordinary function, whose slopes are difference quotients; with it comes what searches the loops that use it. */
 export function functionLaw<const I extends Ports>(spec: SampledLawSpec<I>, search: unknown): Law<I> {
-  const card = cardOf(spec, true);
-  const names = Object.keys(spec.inputs);
-  const ranges = names.map((n) => (spec.inputs[n] as { within?: Range }).within);
+  const { compute: body, ...facts } = Object(spec) as SampledLawSpec<I>;
+  const card = cardOf({ ...facts, sampled: true }, body);
+  const names = Object.keys(card.inputs);
+  const ranges = names.map((n) => (card.inputs[n] as { within?: Range }).within);
   const value = (...inputs: number[]): number => {
     const ports = Object.fromEntries(names.map((n, i) => [n, inputs[i]]));
-    return checkedResult(card, spec.compute(ports as NumberBody<I>));
+    const result = body(ports as NumberBody<I>);
+    if (Number.isFinite(result)) return result;
+    const here = names.map((n, i) => `${n} = ${inputs[i]}`).join(", ");
+    return fail("not-finite", {
+      path: card.name,
+      value: result,
+      allowed: `a finite number in ${card.output.unit}, here for ${here}`,
+    });
   };
   const compute: SearchedFunction<unknown> = { ...differentiable(value, ranges), search };
   const apply = (wires: unknown): number | Quantity => {
-    const { flat, graph } = wire(spec.name, spec.inputs, wires);
+    const { flat, graph } = wire(card.name, card.inputs, wires);
     if (!graph) return value(...names.map((n) => flat[n] as number));
     return graph.lawNode(card, flat, () => ({ demands: [], result: graph.callNode(compute, flat) }));
   };

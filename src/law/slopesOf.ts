@@ -1,5 +1,6 @@
 // The slopes of a law at a point, from the same formula as its value.
 import type { Port, Ports } from "../graph/card.ts";
+import { checkRecord } from "../ground/names.ts";
 import { slopeKernel } from "../reading/slopeKernel.ts";
 import { recordLaw } from "./recordLaw.ts";
 import type { Law, Wires } from "./types.ts";
@@ -15,9 +16,11 @@ export interface Slopes {
 /**
  * The value of a law and its slope in every input, from the symbolic derivative of its formula. At a kink the slope is
  * one-sided; for a sampled law it is a difference quotient. A fraction that must be a number (in `mixAlbedo` without
- * `bare`) has no slope of its own and is left out. Throws what the law throws.
+ * `bare`) has no slope of its own and is left out. Throws what the law throws,
+ * and `unreadable` for what is no law.
  */
 export function slopesOf<I extends Ports>(law: Law<I>, wires: Wires<I, number>): Slopes {
+  checkRecord((law as Partial<Law> | undefined)?.card, "law", "a card, as a law has");
   const value = law(wires);
   const { flat, body } = wire(law.card.name, law.card.inputs, wires);
   const complete = law.card.inputs.bare !== undefined && body.bare === undefined;

@@ -20,7 +20,7 @@ export function wire(law: string, ports: Ports, wires: unknown): Wiring {
   const connect = (port: Port | ListPort, value: unknown, name: string): unknown => {
     const path = `${law}.${name}`;
     if (isList(port)) {
-      if (!Array.isArray(value) || value.length === 0) {
+      if (!(Array.isArray(value) && value.length)) {
         return fail("unreadable", { path, value, allowed: "a list of records" });
       }
       return value.map((row, i) => connectAll(port.each, row, `${name}[${i}].`));
@@ -36,10 +36,7 @@ export function wire(law: string, ports: Ports, wires: unknown): Wiring {
   };
   const connectAll = (named: Ports, given: unknown, prefix: string): Record<string, unknown> => {
     const path = `${law}.${prefix}`.slice(0, -1);
-    if (typeof given !== "object" || given === null || given instanceof Quantity) {
-      return fail("unreadable", { path, value: given, allowed: "an object with the ports" });
-    }
-    checkKeys(given, path, Object.keys(named));
+    checkKeys(given instanceof Quantity ? "quantity" : given, path, Object.keys(named));
     return Object.fromEntries(
       Object.entries(named).map(([k, port]) => [k, connect(port, (given as Wires)[k], prefix + k)]),
     );

@@ -14,7 +14,7 @@ import type { Budget, Loop, Tools } from "./types.ts";
  * planet's whole area. Units are checked where they are connected. Variables, givens and couplings share one set of names;
  * flows and `report` have their own.
  *
- * Throws `bad-budget`, `unknown-name`, `repeated-name`, `reserved-name`, `unit-mismatch`, `temperature-unused`,
+ * Throws `unreadable`, `bad-budget`, `unknown-name`, `repeated-name`, `reserved-name`, `unit-mismatch`, `temperature-unused`,
  * `coupling-unused`, `coupling-bypassed`, `other-loop`, `not-a-number`, `out-of-range`.
  *
  * @example
@@ -25,6 +25,8 @@ import type { Budget, Loop, Tools } from "./types.ts";
  * }));
  */
 export function closeLoop<const N extends string>(write: (tools: Tools) => Budget<N>): Loop<N> {
+  if (typeof write !== "function")
+    fail("unreadable", { path: "closeLoop", value: write, allowed: "a function" });
   const recorder = new BudgetRecorder();
   const budget = checkedBudget(write(recorder.tools()));
   const { graph, temperature, givens, couplings } = recorder;
@@ -73,8 +75,9 @@ const FIELDS = ["heating", "cooling", "exchange", "heatCapacity", "rates", "repo
 
 function checkedBudget<N extends string>(budget: Budget<N>): Budget<N> {
   const path = "budget";
-  if (typeof budget !== "object" || budget === null) {
-    fail("bad-budget", { path, value: budget, allowed: "{ heating, cooling, heatCapacity }" });
+  const value = budget instanceof Promise ? "a promise" : budget;
+  if (typeof value !== "object" || value === null) {
+    fail("bad-budget", { path, value, allowed: "{ heating, cooling, heatCapacity }" });
   }
   checkKeys(budget, path, FIELDS);
   for (const side of ["heating", "cooling", "exchange", "rates", "report"] as const) {

@@ -1,8 +1,10 @@
 // The budget of a loop on paper.
 import type { Ports } from "../graph/card.ts";
 import { type Notation, printNode } from "../graph/print.ts";
+import { checkKeys } from "../ground/names.ts";
 import { lawFormula } from "../law/lawFormula.ts";
 import type { Law } from "../law/types.ts";
+import { checkLoop } from "./checkLoop.ts";
 import type { Loop } from "./types.ts";
 
 /** How a formula is printed. */
@@ -19,11 +21,15 @@ export interface LoopFormula {
   readonly couplings: Readonly<Record<string, string>>;
 }
 
-/** The formula of a law as text. */
+/** The formula of a law as text. Throws `unreadable` for what is no law and no loop, `unknown-name`. */
 export function formulaOf<I extends Ports>(law: Law<I>, options?: FormulaOptions): string;
 /** The formulas of a loop's flows, in which couplings stand by name, and of its couplings. */
 export function formulaOf(loop: Loop, options?: FormulaOptions): LoopFormula;
-export function formulaOf(of: Law | Loop, { notation = "text" }: FormulaOptions = {}): string | LoopFormula {
+export function formulaOf(of: Law | Loop, options: FormulaOptions = {}): string | LoopFormula {
+  const path = "formulaOf";
+  checkKeys(options, path, ["notation"]);
+  const { notation = "text" } = options;
+  if (typeof of !== "function") checkLoop(of, path);
   return typeof of === "function" ? lawFormula(of, { notation }) : loopFormula(of, notation);
 }
 

@@ -1,5 +1,5 @@
 // The inputs of a loop's readings, and their values at a point.
-import { failUnknown } from "../ground/names.ts";
+import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, type Range } from "../ground/range.ts";
 import type { Loop } from "./types.ts";
 
@@ -16,7 +16,7 @@ export const rootsOf = ({ variables, flows, report, heatCapacity }: Loop): numbe
 /** The values of the givens, with those in `at` replaced. Throws for an unknown name or a value that is not allowed. */
 export function givensAt(loop: Loop, at: Readonly<Record<string, unknown>> = {}): number[] {
   const known = loop.givens.map((g) => g.name);
-  for (const name of Object.keys(at)) if (!known.includes(name)) failUnknown(`at.${name}`, name, known);
+  checkKeys(at, "at", known);
   return loop.givens.map(({ name, value, unit, within }) => {
     const set = Object.hasOwn(at, name) ? at[name] : undefined;
     return set === undefined ? value : checkedNumber(set, `at.${name}`, unit, within);

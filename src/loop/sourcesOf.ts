@@ -1,5 +1,6 @@
 // The published sources behind a loop.
 import { coneOf } from "../graph/cone.ts";
+import { checkLoop } from "./checkLoop.ts";
 import { rootsOf } from "./inputs.ts";
 import type { Loop } from "./types.ts";
 
@@ -10,8 +11,9 @@ export interface LawSource {
   readonly source: string;
 }
 
-/** The laws of a loop in the order in which they were written, each once, with their sources. */
+/** The laws of a loop in the order in which they were written, each once, with their sources. Throws `unreadable`. */
 export function sourcesOf(loop: Loop): readonly LawSource[] {
+  checkLoop(loop, "sourcesOf");
   const found = new Map<string, LawSource>();
   for (const id of coneOf(loop.graph, rootsOf(loop))) {
     const meaning = loop.graph.meanings[id];

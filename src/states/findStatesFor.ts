@@ -1,6 +1,6 @@
 // Finds the equilibria of many planets of one loop: columns of givens in, typed arrays out.
 import { type ErrorCode, fail, ThermosteadError } from "../ground/errors.ts";
-import { checkKeys, failUnknown } from "../ground/names.ts";
+import { checkKeys } from "../ground/names.ts";
 import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
 import type { GivenRecord, Givens, Loop } from "../loop/types.ts";
 import { checkOneVariable } from "./prepared.ts";
@@ -85,10 +85,10 @@ function checkedColumns(
   columns: GivenColumns,
 ): { readonly rows: number; readonly columns: readonly Column[] } {
   const known = loop.givens.map((g) => g.name);
+  checkKeys(columns, "columns", known);
   const list = Object.entries(columns).map(([name, values]): Column => {
     const path = `columns.${name}`;
     const index = known.indexOf(name);
-    if (index < 0) failUnknown(path, name, known);
     const isList = Array.isArray(values) || (ArrayBuffer.isView(values) && "length" in values);
     if (!isList) fail("unreadable", { path, value: values, allowed: "a typed array or a list of numbers" });
     const given = loop.givens[index] as GivenRecord;

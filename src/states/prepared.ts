@@ -1,5 +1,6 @@
 // What a loop needs to be searched, made once when it is first needed and kept as long as the loop.
 import { fail } from "../ground/errors.ts";
+import { checkLoop } from "../loop/checkLoop.ts";
 import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { type StateReader, stateReader } from "./stateReader.ts";
@@ -9,10 +10,7 @@ export const readerOf: (loop: Loop) => StateReader = /* @__PURE__ */ kept(stateR
 
 /** Throws `unreadable` for what is no loop, and `several-variables` for a loop whose states cannot be searched yet. */
 export function checkOneVariable(loop: Loop, path: string): void {
-  if (!Array.isArray(loop?.variables)) {
-    const allowed = "a loop, as closeLoop returns it and readPlanet holds it";
-    fail("unreadable", { path, value: loop, allowed });
-  }
+  checkLoop(loop, path);
   const names = loop.variables.map((v) => v.name);
   if (names.length > 1)
     fail("several-variables", { path, value: names.join(), allowed: "temperature alone" });

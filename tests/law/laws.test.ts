@@ -180,6 +180,57 @@ describe("a law written by a user", () => {
     expect(refusal(() => broken({ y: 0 }))).toMatchObject({ code: "not-finite", path: "broken" });
   });
 
+  test.each([
+    ["the unit of its output", { output: { symbol: "F", unit: "banana" } }, "unknown-unit", "hill.output"],
+    [
+      "the unit of a port",
+      { inputs: { temperature: { symbol: "T", unit: "kelvin" } } },
+      "unknown-unit",
+      "hill.temperature",
+    ],
+    [
+      "a range that is reversed",
+      { inputs: { temperature: { symbol: "T", unit: "K", within: [400, 100] } } },
+      "out-of-range",
+      "hill.temperature[1]",
+    ],
+    [
+      "a range in a list",
+      {
+        inputs: {
+          temperature: { symbol: "T", unit: "K" },
+          parts: { each: { x: { symbol: "x", unit: "1", within: [2, 1] } } },
+        },
+      },
+      "out-of-range",
+      "hill.parts.x[1]",
+    ],
+  ])(
+    "is refused for %s when a loop first records it",
+    (_, facts: { readonly inputs?: object; readonly output?: object }, code, path) => {
+      const spec = {
+        name: "hill",
+        output: { symbol: "F", unit: "W m-2" },
+        inputs: { temperature: { symbol: "T", unit: "K" } },
+      };
+      const hill = core.defineLaw({
+        ...spec,
+        ...facts,
+        write: ({ temperature }: never) => temperature,
+      } as never);
+      const close = () =>
+        core.closeLoop(({ temperature, given }) => {
+          const parts = "parts" in (facts.inputs ?? {}) ? { parts: [{ x: given("x", 1.5, "1") }] } : {};
+          return {
+            heating: { sunlight: 200 },
+            cooling: { hill: hill({ temperature, ...parts } as never) },
+            heatCapacity: 1,
+          };
+        });
+      expect(refusal(close)).toMatchObject({ code, path });
+    },
+  );
+
   test("is refused a quantity with another unit", () => {
     const error = refusal(() =>
       core.closeLoop(({ temperature, given }) => ({
@@ -223,7 +274,15 @@ describe("a sampled law", () => {
       cooling: { longwave: measured({ temperature }) },
       heatCapacity: 1,
     }));
-    expect(refusal(() => core.findStates(loop, { within: [100, 400] })).code).toBe("not-finite");
+    const error = refusal(() => core.findStates(loop, { within: [100, 400] }));
+    expect(error).toMatchObject({ code: "not-finite", path: "measured", value: Number.NaN });
+    const [, at] = /in W m-2, here for temperature = (.*)$/.exec(error.allowed) as unknown as [
+      string,
+      string,
+    ];
+    expect(measured({ temperature: 390 })).toBe(480);
+    expect(Number(at)).toBeGreaterThan(390);
+    expect(Number(at)).toBeLessThanOrEqual(400);
     const found = core.findStates(loop, { within: [100, 380] });
     expect(found.states.map((s) => s.temperature)).toEqual([250]);
     expect(found.notes.map((n) => n.code)).toContain("sampled-law");

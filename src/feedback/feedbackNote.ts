@@ -10,6 +10,7 @@ export type FeedbackNoteCode =
   | "loops-summed"
   | "unstable-branch"
   | "branch-lost"
+  | "branch-undecided"
   | "assessed-sensitivity";
 
 /** A caution like those of states: `info` can be ignored, `caution` weakens the numbers or explains a `null`. */

@@ -26,12 +26,14 @@ export interface Taken {
   readonly high: Float64Array;
 }
 
+/** How far from its value a state may be looked for, relative to it: more than any search leaves open, and no climate's worth. */
+const CLOSE = 1e-6;
 /** Sizes of the balance that are rounding, relative to the sum of all flows. */
 const ROUNDING = 1e-12;
 
 /**
  * Checks a state against a loop and returns its numbers. Throws `unreadable`, `missing`, `not-a-number`, `out-of-range`, and
- * `foreign-state` where names differ or where the balance over the state's bracket, widened by rounding, excludes zero.
+ * `foreign-state` where names differ or where the balance over the state's bracket, close to its value and widened by rounding, excludes zero.
  */
 export function checkBelongs<N extends string>(loop: Loop<N>, state: StateLike<N>, path: string): Taken {
   const { variables, givens, couplings } = loop;
@@ -63,7 +65,7 @@ export function checkBelongs<N extends string>(loop: Loop<N>, state: StateLike<N
     low: Float64Array.of(...places.map((p) => p.bracket[0]), ...settings),
     high: Float64Array.of(...places.map((p) => p.bracket[1]), ...settings),
   };
-  const outside = balancesOf(loop)(taken).find(([low, high]) => low > 0 || high < 0);
+  const outside = balancesOf(loop)(closeTo(taken)).find(([low, high]) => low > 0 || high < 0);
   if (outside)
     fail("foreign-state", {
       path,
@@ -71,6 +73,16 @@ export function checkBelongs<N extends string>(loop: Loop<N>, state: StateLike<N
       allowed: "an equilibrium of this loop at the state's givens",
     });
   return taken;
+}
+
+/** The part of a bracket that is close to its value: one as wide as a climate would hold a zero for any temperature. */
+function closeTo({ values, low, high }: Taken): Taken {
+  const reach = values.map((value) => CLOSE * Math.max(1, Math.abs(value)));
+  return {
+    values,
+    low: low.map((end, i) => Math.max(end, (values[i] as number) - (reach[i] as number))),
+    high: high.map((end, i) => Math.min(end, (values[i] as number) + (reach[i] as number))),
+  };
 }
 
 function placeOf(place: unknown, path: string, unit: string, within: Range) {

@@ -41,6 +41,17 @@ describe.each(calls)("%s", (_, call) => {
     expect(foreign(sent).code).toBe("foreign-state");
   });
 
+  test("refuses a temperature that is none of an equilibrium, however wide its bracket", () => {
+    const forged = (value: number, bracket: readonly [number, number]) =>
+      foreign({ ...state, variables: { temperature: { value, bracket } } }).code;
+    expect(forged(280, [200, 350])).toBe("foreign-state");
+    expect(forged(state.temperature + 0.01, [200, 350])).toBe("foreign-state");
+    expect(forged(state.temperature - 0.01, [200, 350])).toBe("foreign-state");
+    // a wide bracket is no lie
+    const wide = { temperature: { value: state.temperature, bracket: [state.temperature - 1, 350] } };
+    expect(() => call({ ...state, variables: wide })).not.toThrow();
+  });
+
   test("refuses a state of another loop, by its names", () => {
     const [other] = findStates(warmLoop(), { within }).states;
     const error = foreign(other);
@@ -242,5 +253,7 @@ describe("on a continuum of equilibria", () => {
       proof: "partial",
       lost: [{ held: [], lost: { reason: "undecided", stage: 0 } }],
     });
+    expect(compared.notes.map(({ code, value }) => [code, value])).toEqual([["branch-undecided", 1]]);
+    expect(compared.notes[0]?.text).not.toContain("lose");
   });
 });

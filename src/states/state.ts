@@ -43,7 +43,7 @@ export interface State<N extends string = string> {
   readonly feedbackParameterRange: readonly [number, number] | null;
   /** λ with other variables in balance; the same number when there are none. */
   readonly settledFeedbackParameter: number;
-  /** −C/λ, s; `null` for a state that does not return. */
+  /** −C/λ, s; `null` for a state that does not return, or where C < 0 (then it is `invalid` too). */
   readonly eFoldingTime: number | null;
   /** Bound of |N| at the reported temperature, W m⁻²: proved, unless the state was found by sampling. */
   readonly imbalance: { readonly [K in Variables<N>]: number };

@@ -54,7 +54,7 @@ export function stateReader(loop: Loop): StateReader {
       feedbackParameter: lambda,
       feedbackParameterRange: slope && Object.freeze([slope[0], slope[1]] as const),
       settledFeedbackParameter: lambda,
-      eFoldingTime: stability === "stable" ? -capacity / lambda : null,
+      eFoldingTime: stability === "stable" && capacity >= 0 ? -capacity / lambda : null,
       imbalance: Object.freeze({ temperature: imbalance }),
       ledger,
       proved: slope !== null && !notes.some((n) => n.severity === "invalid"),

@@ -38,7 +38,7 @@ test.each(folds)("at the fold of $S W m⁻²", ({ S, T }) => {
     const { undecided } = core.findStates(loop, { within: [150, 400], at: { flux } });
     for (const { kind, distances, enclosure } of undecided) {
       if (kind !== "fold") continue;
-      const [low, high] = distances?.flux as readonly [number, number];
+      const [low, high] = (distances as { flux: unknown }).flux as readonly [number, number];
       // the number nearest to S may be off by half a unit of its last place, 1.2e-13
       expect(low).toBeLessThanOrEqual(fold - flux + 1.2e-13);
       expect(high).toBeGreaterThanOrEqual(fold - flux - 1.2e-13);

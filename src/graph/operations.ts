@@ -1,4 +1,5 @@
 // The recordable operations: numbers are folded at once, quantities are recorded. Both give the same bits.
+// On plain numbers they are IEEE arithmetic and check nothing: a law checks what goes into it and what comes out.
 import { exp as expOf } from "../ground/elementary/exp.ts";
 import { log as logOf } from "../ground/elementary/log.ts";
 import { max as maxOf, min as minOf } from "../ground/elementary/minMax.ts";
@@ -35,7 +36,7 @@ export const add: Two = /* @__PURE__ */ two("add", (a, b) => a + b);
 export const sub: Two = /* @__PURE__ */ two("sub", (a, b) => a - b);
 /** a · b. */
 export const mul: Two = /* @__PURE__ */ two("mul", (a, b) => a * b);
-/** a / b. */
+/** a / b. Of plain numbers as IEEE has it: ±infinity or NaN where b is 0; only a law refuses what is not finite. */
 export const div: Two = /* @__PURE__ */ two("div", (a, b) => a / b);
 /** The smaller of two; a kink where they cross. */
 export const min: Two = /* @__PURE__ */ two("min", minOf);
@@ -48,11 +49,11 @@ export const max: Two = /* @__PURE__ */ two("max", maxOf);
 export const step: One = /* @__PURE__ */ one("step", stepOf);
 /** −a. */
 export const neg: One = /* @__PURE__ */ one("neg", (a) => -a);
-/** Square root. */
+/** Square root. Of a plain number below 0 it is NaN; only a law refuses what is not finite. */
 export const sqrt: One = /* @__PURE__ */ one("sqrt", Math.sqrt);
-/** Natural exponential of a pure number. */
+/** Natural exponential of a pure number. Of a plain number above 709.78 it is infinite; only a law refuses that. */
 export const exp: One = /* @__PURE__ */ one("exp", expOf);
-/** Natural logarithm of a pure number. */
+/** Natural logarithm of a pure number. Of a plain 0 it is −infinity, below 0 NaN; only a law refuses what is not finite. */
 export const log: One = /* @__PURE__ */ one("log", logOf);
 /** Hyperbolic tangent of a pure number. */
 export const tanh: One = /* @__PURE__ */ one("tanh", tanhOf);

@@ -25,6 +25,11 @@ function withAlbedoHeld({ description, assumptions, states }) {
   ].join("\n");
 }
 
+// a reader such as `head` may close the pipe before the end: that is no failure
+process.stdout.on("error", (error) => {
+  if (error.code !== "EPIPE") throw error;
+});
+
 const args = process.argv.slice(2);
 const file = args.find((arg) => !arg.startsWith("--")) ?? new URL("orsolne.json", import.meta.url);
 try {

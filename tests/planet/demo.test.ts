@@ -1,5 +1,5 @@
 // The demo as a user runs it: from the built package, as text and as JSON.
-import { spawnSync } from "node:child_process";
+import { spawn, spawnSync } from "node:child_process";
 import fs from "node:fs";
 import os from "node:os";
 import path from "node:path";
@@ -22,6 +22,17 @@ function runOn(text: string, ...args: string[]) {
     fs.rmSync(folder, { recursive: true, force: true });
   }
 }
+
+test("a reader that stops early, as `head` does, is no failure", async () => {
+  const child = spawn(process.execPath, [script, "--json"]);
+  child.stdout.destroy();
+  let stderr = "";
+  child.stderr.on("data", (part) => {
+    stderr += part;
+  });
+  const status = await new Promise((resolve) => child.on("close", resolve));
+  expect({ stderr, status }).toEqual({ stderr: "", status: 0 });
+});
 
 describe("the appraisal of the example", () => {
   const { stdout, stderr, status } = run();

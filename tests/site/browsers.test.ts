@@ -66,6 +66,27 @@ describe.each(["chromium", "firefox"] as const)("in %s", (name) => {
     expect(await page.attributeOf("#text", "aria-invalid")).toBe("false");
   });
 
+  test.runIf(command)("of several faults each is shown beside its field", async () => {
+    await page.typeOver('"cold": 0.62', '"cold": 1.62');
+    await page.typeOver('"redistribution": "global"', '"redistribution": 7');
+    await page.untilRemarks(2);
+    const said = await page.textsOf("#margin > div");
+    const expected = [
+      [12, "redistribution: out of range, received 7; allowed: 0.25 to 1 About"],
+      [15, "albedo.cold: out of range, received 1.62; allowed: 0 to 1 About"],
+    ];
+    for (const [line, words] of expected)
+      expect(said.filter((text: string) => text.startsWith(`Line ${line} ${words}`))).toHaveLength(1);
+    expect(said.join()).not.toMatch(/docs\/|also:/);
+    const [first, second] = await page.boxesOf("#margin > div");
+    expect(Math.max(first.top, second.top)).toBeGreaterThanOrEqual(Math.min(first.bottom, second.bottom));
+    await page.typeOver('"cold": 1.62', '"cold": 0.62');
+    await page.untilRemarks(1);
+    await page.typeOver('"redistribution": 7', '"redistribution": "global"');
+    await page.untilStatus("3 states");
+    expect(await page.isVisible("#problem")).toBe(false);
+  });
+
   test.runIf(command)("markup in a name stays a name", async () => {
     await page.typeOver('"Orsolne"', '"<img src=x onerror=alert(1)>"');
     await page.untilAppraisal("<img src=x");

@@ -45,6 +45,13 @@ export async function openPage(kind, command, folder) {
     untilStatus: saysIn("#status"),
     untilProblem: saysIn("#problem"),
     untilAppraisal: saysIn("#appraisal"),
+    /** Waits for so many problems beside the description. */
+    untilRemarks: (count) =>
+      page.waitForFunction(
+        (n) => document.querySelectorAll("#margin > .problem:not([hidden])").length === n,
+        {},
+        count,
+      ),
     textOf: (selector) => asked(selector, (element) => element.textContent),
     attributeOf: (selector, name) => page.$eval(selector, (element, key) => element.getAttribute(key), name),
     textsOf: (selector) => page.$$eval(selector, (all) => all.map((element) => element.textContent)),
@@ -55,6 +62,13 @@ export async function openPage(kind, command, folder) {
         const { left, right, top, bottom } = element.getBoundingClientRect();
         return { left, right, top, bottom };
       }),
+    boxesOf: (selector) =>
+      page.$$eval(selector, (all) =>
+        all.map((element) => {
+          const { top, bottom } = element.getBoundingClientRect();
+          return { top, bottom };
+        }),
+      ),
     focused: () => page.evaluate(() => document.activeElement.id || document.activeElement.className),
     scrollsSideways: () => page.evaluate(() => document.documentElement.scrollWidth > window.innerWidth),
     selected: () => asked("#text", (area) => area.value.slice(area.selectionStart, area.selectionEnd)),

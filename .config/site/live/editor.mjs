@@ -23,6 +23,8 @@ export function createEditor(root) {
 
   /** Remarks stand at their lines, each below the one before; where there is no room beside the text, below it. */
   function place() {
+    // with remarks the margin has another width, and remarks other heights
+    root.classList.toggle("remarked", remarks.length > 0);
     let free = 0;
     for (const { line, element } of remarks) {
       if (narrow.matches) {
@@ -33,7 +35,6 @@ export function createEditor(root) {
       element.style.top = `${top}px`;
       free = top + element.offsetHeight + 6;
     }
-    root.classList.toggle("remarked", remarks.length > 0);
     margin.style.minHeight = narrow.matches ? "" : `${free}px`;
   }
 
@@ -60,18 +61,18 @@ export function createEditor(root) {
     area.setSelectionRange(start, start + area.value.slice(start).split("\n")[0].length);
   }
 
-  /** Shows remarks, `{ severity, text, line, more }`; at most one of them is a `problem`. */
+  /** Shows remarks, `{ severity, text, line, more }`. The first `problem` is marked and tied to the field. */
   function say(said) {
+    const wrong = said.find(({ severity }) => severity === "problem");
     for (const { element } of remarks) if (element !== problem) element.remove();
     remarks = [...said]
       .sort((a, b) => a.line - b.line)
       .map((remark) => {
-        const element = remark.severity === "problem" ? problem : document.createElement("div");
+        const element = remark === wrong ? problem : document.createElement("div");
         write(element, remark);
         if (element !== problem) margin.append(element);
         return { line: remark.line, element };
       });
-    const wrong = said.find(({ severity }) => severity === "problem");
     problem.hidden = mark.hidden = !wrong;
     if (wrong) mark.style.top = `${topOf(wrong.line)}px`;
     else problem.replaceChildren();

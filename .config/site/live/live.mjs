@@ -1,5 +1,6 @@
 // The live page: a description in, climates out. Everything heavy waits until the page is painted.
 import { createEditor } from "./editor.mjs";
+import { faultText } from "./faultText.mjs";
 import { PLANETS } from "./planets.mjs";
 import { JsonProblem, placeOf, readJson } from "./readJson.mjs";
 import { createResults } from "./results.mjs";
@@ -30,20 +31,21 @@ function update() {
     editor.say(notesBeside(appraisal.notes, places));
     results.show(appraisal, library);
   } catch (error) {
-    const problem = problemOf(error, places);
-    editor.say([problem]);
-    results.fail(problem.line);
+    const problems = problemsOf(error, places);
+    editor.say(problems);
+    results.fail(problems[0].line);
   }
 }
 
-/** A thrown error as something to show at a place. */
-function problemOf(error, places) {
+/** A thrown error, and what else is wrong with the same description, each as something to show at a place. */
+function problemsOf(error, places) {
   const problem = { severity: "problem", text: error.message };
-  if (error instanceof JsonProblem) return { ...problem, line: editor.lineAt(error.at) };
+  if (error instanceof JsonProblem) return [{ ...problem, line: editor.lineAt(error.at) }];
   if (!(error instanceof library.ThermosteadError)) throw error;
-  const [, text] = /^(.*?)(?: \(docs\/errors\.md#[\w-]+\))?$/s.exec(error.message);
-  const more = { href: `errors.html#${error.code}`, text: `About “${error.code.replaceAll("-", " ")}”` };
-  return { ...problem, text, more, line: editor.lineAt(placeOf(error.path, places)) };
+  return [error, ...error.others].map((one) => {
+    const more = { href: `errors.html#${one.code}`, text: `About “${one.code.replaceAll("-", " ")}”` };
+    return { ...problem, text: faultText(one), more, line: editor.lineAt(placeOf(one.path, places)) };
+  });
 }
 
 /** Cautions that are about a field stand beside it; all other notes are in the appraisal. */

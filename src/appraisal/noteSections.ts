@@ -53,11 +53,13 @@ export function noteSections(appraisal: Appraisal): Section[] {
   ];
 }
 
-/** Writes notes: an input as it is written, a long time in days. */
+/** Writes notes: an input as it is written unless that is a word, a long time in days. */
 const linesWith =
   ({ inputs }: Appraisal) =>
   ({ severity, about, unit, text }: Omit<Noted, "code">, value: number | null): string => {
-    const own = inputs.find((input) => input.path === about && input.value === value);
+    const own = inputs.find(
+      (input) => input.path === about && input.value === value && /^[-+.\d]/.test(input.written),
+    );
     const number = value === null ? "" : ` ${own?.written ?? numberOf(value, unit)}`;
     return `${severity === "invalid" ? "invalid: " : ""}${about}${number}: ${text}`;
   };

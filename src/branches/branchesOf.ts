@@ -1,5 +1,6 @@
 // Makes the branches of a run: the pieces of a curve between its critical places.
 import type { Range } from "../ground/range.ts";
+import type { Sign } from "../search/enclosed.ts";
 import type { Critical } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd } from "./diagram.ts";
@@ -32,12 +33,14 @@ export function branchesOf(
   ];
   return ends.slice(1).map((next, i) => {
     const [cool, warm] = [ends[i]?.warm, next.cool] as [BranchEnd, BranchEnd];
-    const [low, high] = cool.at <= warm.at ? [cool, warm] : [warm, cool];
+    const rises = signBetween(cool, warm, curve.rises) || warm.at - cool.at;
+    const [low, high] = rises >= 0 ? [cool, warm] : [warm, cool];
     const points = pointsOf(curve, cool, warm, drawing);
     if (low === warm) points.reverse();
     return Object.freeze({
       stability: stabilityOf(curve, cool, warm),
-      parameters: frozen([low.at, high.at]),
+      // an end that is not proved may lie beyond the other by rounding
+      parameters: frozen([Math.min(low.at, high.at), Math.max(low.at, high.at)]),
       temperatures: frozen([cool.temperature, warm.temperature]),
       low,
       high,
@@ -85,10 +88,16 @@ function clamped(p: number, [low, high]: Range, otherwise = (low + high) / 2): n
 
 /** The sign of λ anywhere on the branch: it has no zero there. */
 function stabilityOf(curve: Curve, cool: BranchEnd, warm: BranchEnd): Branch["stability"] {
+  const sign = signBetween(cool, warm, curve.signAt);
+  return sign === 0 ? "undecided" : sign < 0 ? "stable" : "unstable";
+}
+
+/** A sign that is the same on the whole branch, from the first place at which it is proved. */
+function signBetween(cool: BranchEnd, warm: BranchEnd, signAt: (temperature: number) => Sign): Sign {
   const [low, high] = [cool.temperatureBracket[1], warm.temperatureBracket[0]];
   for (const share of [0.5, 0.371, 0.629, 0, 1]) {
-    const sign = curve.signAt(low + (high - low) * share);
-    if (sign !== 0) return sign < 0 ? "stable" : "unstable";
+    const sign = signAt(low + (high - low) * share);
+    if (sign !== 0) return sign;
   }
-  return "undecided";
+  return 0;
 }

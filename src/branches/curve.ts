@@ -18,6 +18,8 @@ export interface Curve {
   feedbackAt(temperature: number): number;
   /** The sign of λ there, proved unless the curve is sampled. */
   signAt(temperature: number): Sign;
+  /** Whether the parameter rises (1) or falls (−1) with temperature there, proved unless the curve is sampled; 0: not proved. */
+  rises(temperature: number): Sign;
   /** Bounds of the parameter for temperatures between two, proved unless the curve is sampled; not finite where there are none. */
   over(low: number, high: number): Range;
   /** Reads a function that has the zeros of N and is known with the curve; undefined where N itself must be read. */

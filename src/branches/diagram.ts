@@ -90,7 +90,7 @@ export interface Jump {
   readonly temperature: number;
   /** The branch that is reached and its temperature there, K; `null` where it leaves the searched range. */
   readonly to: { readonly branch: number; readonly temperature: number } | null;
-  /** Where it goes if it leaves the searched range of temperature. */
+  /** Where it goes if it leaves the searched range of temperature; `null` with `to` also `null`: something undecided lies on the way. */
   readonly leaves: "hotter" | "colder" | null;
   /** The parameter at which a slow way back returns to the branch that was lost; `null`: it does not, or that is not known. */
   readonly returnsAt: number | null;

@@ -1,11 +1,14 @@
 // Parameters for which no state lies in the searched range of temperature.
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
-import type { Branch, Gap } from "./diagram.ts";
+import type { Branch, Gap, UndecidedStretch } from "./diagram.ts";
 
-/** What is left of the parameter's range when that of every branch is taken away; `signAt` is the sign of N anywhere there. */
+/**
+ * What is left of the parameter's range when that of every branch, and of all that is undecided, is taken away; `signAt` is the
+ * sign of N anywhere there.
+ */
 export function gapsOf(
-  branches: readonly Branch[],
+  { branches, undecided }: { branches: readonly Branch[]; undecided: readonly UndecidedStretch[] },
   between: Range,
   signAt: (parameter: number) => Sign,
 ): Gap[] {
@@ -17,9 +20,13 @@ export function gapsOf(
     gaps.push(Object.freeze({ parameters: Object.freeze([low, high] as const), too }));
   };
   let covered = between[0];
-  for (const { low, high } of [...branches].sort((a, b) => a.low.at - b.low.at)) {
-    add(covered, low.atBracket[0]);
-    covered = Math.max(covered, high.atBracket[1]);
+  const taken = [
+    ...branches.map(({ low, high }): Range => [low.atBracket[0], high.atBracket[1]]),
+    ...undecided.map(({ parameters }) => parameters),
+  ];
+  for (const [low, high] of taken.sort((a, b) => a[0] - b[0])) {
+    add(covered, low);
+    covered = Math.max(covered, high);
   }
   add(covered, between[1]);
   return gaps;

@@ -80,10 +80,13 @@ export function gateLine(loop: Loop, { gate, curve }: { gate: number; curve: num
     },
     // plain, or from the value in the middle and the slope (mean value form)
     curveOver(from, to) {
+      const centre = from + (to - from) / 2;
       read.box(from, to, box);
-      read.point(from + (to - from) / 2, middle);
+      read.point(centre, middle);
       const [falling, rising] = rangeAt(box, 1);
-      const reach = above(above(Math.max(-falling, rising) * above(to - from)) / 2);
+      // the centre of a few units in the last place is rounded
+      const half = above(Math.max(to - centre, centre - from));
+      const reach = above(Math.max(-falling, rising) * half);
       const mean = plus(rangeAt(middle, 0), [-reach, reach]);
       const plain = rangeAt(box, 0);
       const bounds = mean[1] - mean[0] < plain[1] - plain[0] ? mean : plain;

@@ -5,6 +5,7 @@ import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
+import type { Sign } from "../search/enclosed.ts";
 import { rangeAt } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { type Line, lineOf } from "./line.ts";
@@ -13,6 +14,8 @@ import { type Line, lineOf } from "./line.ts";
 export interface GateValue {
   /** Sets the other givens; false if the gate is not proved to rise or fall throughout the range. */
   set(givens: readonly number[], between: Range): boolean;
+  /** 1: it rises with the parameter; −1: it falls. */
+  direction(): Sign;
   /** Proved bounds of the gate at a parameter. */
   valueAt(parameter: number): Range;
   /** The parameter for a value of the gate, not proved. */
@@ -29,6 +32,7 @@ const MOST_WIDENINGS = 60;
 /** The gate that is the parameter itself. */
 export const sameValue: GateValue = {
   set: () => true,
+  direction: () => 1,
   valueAt: (p) => [p, p],
   inverse: (x) => x,
   inverseOver: (a, b) => [a, b],
@@ -84,6 +88,7 @@ export function gateValue(loop: Loop, node: number, along: number): GateValue {
       rising = sign > 0;
       return sign !== 0;
     },
+    direction: () => (rising ? 1 : -1),
     valueAt(p) {
       line.point(p, out);
       return rangeAt(out, 0);

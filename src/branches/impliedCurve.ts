@@ -5,7 +5,7 @@ import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import { type Ends, endsOf } from "../search/enclosed.ts";
+import { type Ends, endsOf, type Sign } from "../search/enclosed.ts";
 import { meet, minus, over, plus, rangeAt, signOfRange, times } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
@@ -126,6 +126,8 @@ export function impliedCurve(loop: Loop, along: string): Curve {
     method: "monotone",
     reachesBeyond: false,
     signAt: (t) => signAt(feedback, t),
+    // p′ = −λ/N_p
+    rises: (t) => (signAt(feedback, t) * (rising ? -1 : 1)) as Sign,
     criticals: (t, effort) => criticalsOf({ feedback, kinks: [], leaps: [] }, t, effort),
     set(givens, range, within) {
       low.set(givens, 1);

@@ -39,6 +39,7 @@ export function joinColumns(
   groups: readonly (readonly Column[])[],
   endOf: EndOf,
   metIn: MetIn,
+  between: Range,
 ): { branches: Branch[]; folds: Fold[]; crossings: BranchCrossing[] } {
   const all: Growing[] = [];
   const crossed: { end: BranchEnd; below: readonly Growing[]; above: readonly Growing[] }[] = [];
@@ -53,12 +54,15 @@ export function joinColumns(
   for (const columns of groups) {
     const [first, ...rest] = columns as readonly [Column, ...Column[]];
     if (before) open = passed(open, before, first);
-    else open = first.states.map((s, i) => start(first, i, exactEnd("between", s)));
+    else open = first.states.map((s, i) => start(first, i, outerEnd(s, [between[0], s.at])));
     for (const { states } of rest)
       for (const [i, { points }] of open.entries()) points.push(states[i] as Growing["points"][number]);
     before = columns.at(-1);
   }
-  for (const grown of open) grown.high = exactEnd("between", grown.points.at(-1) as BranchPoint);
+  for (const grown of open) {
+    const last = grown.points.at(-1) as BranchPoint;
+    grown.high = outerEnd(last, [last.at, between[1]]);
+  }
 
   /** The branches that are open behind a stretch. */
   function passed(left: readonly Growing[], from: Column, to: Column): Growing[] {
@@ -131,6 +135,10 @@ const exactEnd = (kind: BranchEnd["kind"], { at, temperature }: BranchPoint): Br
 /** The end of a branch at a stretch in which nothing is proved. */
 const openEnd = (parameters: Range, last: BranchPoint): BranchEnd =>
   Object.freeze({ ...exactEnd("undecided", last), atBracket: Object.freeze(parameters) });
+
+/** The end of a branch at the first or last column, which lies at the end of the parameter's range unless that is undecided. */
+const outerEnd = (point: BranchPoint, beyond: Range): BranchEnd =>
+  beyond[0] === beyond[1] ? exactEnd("between", point) : openEnd(beyond, point);
 
 const STABILITY = { [-1]: "stable", 0: "undecided", 1: "unstable" } as const;
 

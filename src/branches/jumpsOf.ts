@@ -1,5 +1,6 @@
 // Where the climate goes when a slow change of the parameter passes the end of a stable branch.
-import type { Branch, BranchCrossing, BranchEnd, Fold, Jump } from "./diagram.ts";
+import type { Range } from "../ground/range.ts";
+import type { Branch, BranchCrossing, BranchEnd, Fold, Jump, UndecidedStretch } from "./diagram.ts";
 
 /** The temperature of a branch at a parameter inside its range, if its state is found. */
 export type TemperatureOn = (branch: Branch, parameter: number) => number | undefined;
@@ -8,6 +9,7 @@ interface Met {
   readonly branches: readonly Branch[];
   readonly folds: readonly Fold[];
   readonly crossings: readonly BranchCrossing[];
+  readonly undecided: readonly UndecidedStretch[];
 }
 
 type Returning = Pick<Jump, "returnsAt" | "noReturn">;
@@ -23,7 +25,10 @@ interface Lost {
  * has one sign up to the next state: where the branch lost its state to a warmer neighbour, nothing cools the planet any more,
  * and it warms; where to a cooler one, it cools.
  */
-export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: TemperatureOn): Jump[] {
+export function jumpsOf(
+  { branches, folds, crossings, undecided }: Met,
+  temperatureOn: TemperatureOn,
+): Jump[] {
   const known = new Map<string, Lost | undefined>();
   const lostFrom = (from: number, direction: Jump["direction"]): Lost | undefined => {
     const key = `${direction} ${from}`;
@@ -36,16 +41,26 @@ export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: Temp
     const edge = end.kind === "leap" ? leapAt(branches, from, direction) : foldAt(folds, from, end);
     if (!edge) return undefined;
     const { side, lost } = edge;
+    const isAhead = (temperature: number): boolean => side * (temperature - end.temperature) > 0;
+    /** The far end of what may hold the climate on the way, though it is not known that it does. */
+    const doubts = undecided
+      .filter((u) => holds(u.parameters, end.at) && u.temperatures[0] !== end.temperatureBracket[0])
+      .map((u) => u.temperatures);
     let to: Jump["to"] = null;
     branches.forEach((next, i) => {
-      const [low, high] = next.parameters;
-      if (lost.includes(i) || !(low <= end.at && end.at <= high)) return;
+      if (lost.includes(i) || !holds(next.parameters, end.at)) return;
       const temperature = temperatureOn(next, end.at);
-      if (temperature === undefined) return;
-      const ahead = side * (temperature - end.temperature) > 0;
-      if (ahead && (!to || side * (to.temperature - temperature) > 0))
+      if (temperature === undefined) doubts.push(next.temperatures);
+      else if (isAhead(temperature) && (!to || side * (to.temperature - temperature) > 0))
         to = Object.freeze({ branch: i, temperature });
     });
+    const goal = (to as Jump["to"])?.temperature ?? side * Infinity;
+    if (
+      doubts.some(
+        ([low, high]) => isAhead(side > 0 ? high : low) && side * (goal - (side > 0 ? low : high)) > 0,
+      )
+    )
+      return { end, to: null, leaves: null };
     return { end, to, leaves: to ? null : side > 0 ? "hotter" : "colder" };
   };
   /** The stable branch behind a crossing in which a branch ends. */
@@ -80,6 +95,8 @@ export function jumpsOf({ branches, folds, crossings }: Met, temperatureOn: Temp
     });
   });
 }
+
+const holds = ([low, high]: Range, at: number): boolean => low <= at && at <= high;
 
 /** What a state meets where it is lost: the side on which N drives it away, and the branches that end there. */
 interface Edge {

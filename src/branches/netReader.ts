@@ -9,7 +9,7 @@ import { valueKernel } from "../reading/valueKernel.ts";
 import type { Sign } from "../search/enclosed.ts";
 import { balanceOf, type EnclosedBalance } from "../states/enclosedBalance.ts";
 import type { Located } from "../states/located.ts";
-import { located } from "../states/provedSearch.ts";
+import { enumerateBalance, located } from "../states/provedSearch.ts";
 import { sampling } from "../states/sampledSearch.ts";
 import type { Branch } from "./diagram.ts";
 import { nearest, reachOf, type StatesAt, type ZeroReader, zeroOn, zeroReader } from "./zeroReader.ts";
@@ -20,10 +20,14 @@ export interface NetReader extends ZeroReader {
   feedback(parameter: number, temperature: number): number;
   /** The state of a branch at a parameter inside its range; undefined where none is found. */
   stateOn(branch: Branch, parameter: number): Located | undefined;
+  /** All states at a parameter, by rising temperature; undefined where they are not proved to be all. */
+  statesAt(parameter: number, within: Range): Located[] | undefined;
 }
 
 /** Evaluations that it may cost in a sampled loop. */
 const SAMPLES = 2000;
+/** Boxes that finding all states at a parameter may cost. */
+const ALL_EFFORT = 2000;
 const SIGNS = { stable: -1, unstable: 1, undecided: 0 } as const;
 
 /** The reader of a loop; `place` is that of the parameter among the givens. */
@@ -50,7 +54,7 @@ export function netReader(loop: Loop, place: number, givens: readonly number[]):
       return nearest(located, branch, parameter);
     };
     return {
-      ...{ feedback, stateOn, enumerate: states },
+      ...{ feedback, stateOn, enumerate: states, statesAt: () => undefined },
       sign: (parameter, temperature) => Math.sign(read(valuesOf(loop).net, parameter, temperature)) as Sign,
       temperatureOn: (branch, parameter) => stateOn(branch, parameter)?.at,
     };
@@ -65,8 +69,12 @@ export function netReader(loop: Loop, place: number, givens: readonly number[]):
     ...zeroReader({ at, sign: () => 1 }),
     feedback,
     stateOn(branch, parameter) {
-      const zero = zeroOn(at(parameter), branch, parameter);
+      const zero = zeroOn(at(parameter), branch, { parameter, sign: 1 });
       return zero && located(zero);
+    },
+    statesAt(parameter, within) {
+      const { zeros, undecided } = enumerateBalance(at(parameter), within, ALL_EFFORT);
+      return undecided.length === 0 ? zeros.map(located) : undefined;
     },
   };
 }

@@ -64,7 +64,7 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
       ? { temperatures: leap.interval, parameters, kind: "jump" }
       : undefined;
   };
-  const { branches, folds, crossings } = joinColumns(groups, endOf, metIn);
+  const { branches, folds, crossings } = joinColumns(groups, endOf, metIn, task.between);
   const undecided = stretches
     .filter(({ count, parameters }) => count === null && !proved.has(parameters[0]))
     .map(({ parameters }): UndecidedStretch => {

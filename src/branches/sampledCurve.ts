@@ -38,6 +38,7 @@ export function sampledCurve(loop: Loop, along: string): Curve | undefined {
     at,
     feedbackAt,
     signAt: (temperature) => Math.sign(feedbackAt(temperature)) as Sign,
+    rises: () => 0,
     over(low, high) {
       const [a, b] = [at(low), at(high)];
       return a < b ? [a, b] : [b, a];

@@ -6,7 +6,7 @@ import type { Givens, Loop } from "../loop/types.ts";
 import { readerOf } from "../states/prepared.ts";
 import type { State } from "../states/state.ts";
 import type { Branch, BranchEnd, Diagram } from "./diagram.ts";
-import { netReader } from "./netReader.ts";
+import { type NetReader, netReader } from "./netReader.ts";
 
 /** The states at one value of the parameter. */
 export interface StatesOnDiagram<N extends string = string> {
@@ -46,7 +46,7 @@ export function statesOnDiagram<N extends string>(
   });
   const doubtful = [...diagram.folds, ...diagram.crossings].some((f) => inside(f.atBracket));
   const count = diagram.branches.filter((b) => inside(b.parameters)).length;
-  const complete = diagram.complete && !doubtful && count === states.length;
+  const complete = diagram.complete && !doubtful && count === states.length && areApart(states);
   return Object.freeze({
     at: value,
     states: Object.freeze(states),
@@ -55,17 +55,27 @@ export function statesOnDiagram<N extends string>(
   });
 }
 
+/** Whether each state is warmer than the one before, by their brackets: none is another one again. */
+function areApart(states: readonly State[]): boolean {
+  const brackets = states.map(({ variables }) => variables.temperature?.bracket as Range);
+  return brackets.every(([low], i) => i === 0 || (brackets[i - 1] as Range)[1] < low);
+}
+
 /** The state of a branch at a value of the diagram's parameter inside its range; undefined where it is not found. */
-export function stateOn(
-  loop: Loop,
-  { along, fixed }: Pick<Diagram, "along" | "fixed">,
-  branch: Branch,
-  at: number,
-): State | undefined {
-  const givens = givensAt(loop, { ...fixed, [along]: at });
-  const place = loop.givens.findIndex((g) => g.name === along);
-  const located = netReader(loop, place, givens).stateOn(branch, at);
+export function stateOn(loop: Loop, diagram: Diagram, branch: Branch, at: number): State | undefined {
+  const givens = givensAt(loop, { ...diagram.fixed, [diagram.along]: at });
+  const place = loop.givens.findIndex((g) => g.name === diagram.along);
+  const net = netReader(loop, place, givens);
+  const located = ordered(net, diagram, branch, at) ?? net.stateOn(branch, at);
   return located && readerOf(loop)(located, givens);
+}
+
+/** In tiles the states of branches keep their order: between its columns a branch is known by it alone. */
+function ordered(net: NetReader, { method, branches, within }: Diagram, branch: Branch, at: number) {
+  if (method !== "tiles") return undefined;
+  const here = branches.filter(({ parameters: [low, high] }) => low <= at && at <= high);
+  const states = net.statesAt(at, within);
+  return states?.length === here.length ? states[here.indexOf(branch)] : undefined;
 }
 
 /** The end of a branch in a direction. */

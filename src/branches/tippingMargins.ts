@@ -6,6 +6,7 @@ import { checkBelongs, type StateLike } from "../loop/checkBelongs.ts";
 import type { Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
 import type { State } from "../states/state.ts";
+import { basinOf } from "./basinOf.ts";
 import { type Brightening, type TimeUntil, timeUntil } from "./brightening.ts";
 import { checkedAlong } from "./checkedAlong.ts";
 import type { Branch, BranchPoint, Diagram } from "./diagram.ts";
@@ -48,7 +49,7 @@ export function tippingMargins<N extends string>(
   }
   checkHolds(diagram.within, temperature, "within", "K");
   checkHolds(diagram.between, at, "between", given.unit);
-  const index = branchAt(diagram, at, temperature);
+  const index = branchAt(loop, diagram, at, temperature);
   const branch = diagram.branches[index];
   const here = branch && stateOn(loop, diagram, branch, at);
   if (!here) {
@@ -126,7 +127,8 @@ function checkHolds([low, high]: Range, value: number, path: string, unit: strin
 const SLACK = 1e-12;
 
 /** The branch that holds a state: the one whose temperatures are nearest. */
-function branchAt({ branches }: Diagram, at: number, temperature: number): number {
+function branchAt(loop: Loop, diagram: Diagram, at: number, temperature: number): number {
+  const { branches } = diagram;
   const missed = ({ parameters: [low, high], temperatures: [cold, hot] }: Branch): number => {
     const slack = Math.abs(at) * SLACK;
     if (at < low - slack || at > high + slack) return Number.POSITIVE_INFINITY;
@@ -134,7 +136,12 @@ function branchAt({ branches }: Diagram, at: number, temperature: number): numbe
   };
   const misses = branches.map(missed);
   const least = misses.reduce((a, b) => Math.min(a, b), Number.POSITIVE_INFINITY);
-  return least <= temperature * SLACK ? misses.indexOf(least) : -1;
+  if (least <= temperature * SLACK) return misses.indexOf(least);
+  // between the columns of a tile a branch may leave the temperatures that it has in them
+  return branches.findIndex((branch, i) => {
+    const state = misses[i] === Infinity ? undefined : stateOn(loop, diagram, branch, at);
+    return state !== undefined && Math.abs(state.temperature - temperature) <= temperature * SLACK;
+  });
 }
 
 /** The points of a branch from a state on to its end. */
@@ -146,44 +153,6 @@ function wayTo(
   const ahead =
     direction === "rise" ? points.filter((p) => p.at > at) : points.filter((p) => p.at < at).reverse();
   return [Object.freeze({ at, temperature, feedbackParameter }), ...ahead];
-}
-
-/**
- * The nearest states on both sides at the same givens, or the nearest leaps of the balance through zero: between a stable state
- * and these there is nothing. Null where the nearest is something else that is undecided.
- */
-function basinOf(
-  loop: Loop,
-  diagram: Diagram,
-  { index, at, temperature }: { index: number; at: number; temperature: number },
-): TippingMargins["basin"] {
-  const { branches, undecided } = diagram;
-  const isHere = ([low, high]: Range): boolean => low <= at && at <= high;
-  const next = (side: 1 | -1): Edge | undefined => {
-    const edges: Edge[] = undecided
-      .filter(({ parameters }) => isHere(parameters))
-      .map(({ kind, temperatures: [low, high] }) => ({
-        place: side > 0 ? low : high,
-        temperature: kind === "jump" ? low + (high - low) / 2 : null,
-      }));
-    for (let i = index + side; i >= 0 && i < branches.length; i += side) {
-      const branch = branches[i] as Branch;
-      const place = isHere(branch.parameters) ? stateOn(loop, diagram, branch, at)?.temperature : undefined;
-      if (place !== undefined) edges.push({ place, temperature: place });
-    }
-    return edges
-      .filter(({ place }) => side * (place - temperature) > 0)
-      .sort((a, b) => side * (a.place - b.place))[0];
-  };
-  const [cold, hot] = [next(-1), next(1)];
-  if (cold?.temperature === null || hot?.temperature === null) return null;
-  return Object.freeze({ coldest: cold?.temperature ?? null, hottest: hot?.temperature ?? null });
-}
-
-/** Where something comes nearest to a state, and its temperature; null if it is not known what it is. */
-interface Edge {
-  readonly place: number;
-  readonly temperature: number | null;
 }
 
 function heldText(loop: Loop, name: string, fixed: Readonly<Record<string, number>>): string {

@@ -51,14 +51,24 @@ export function zeroReader({ at, sign }: Alike): ZeroReader {
       return { ...rest, zeros: turned };
     },
     sign: (parameter, temperature) => signed(signAt(at(parameter).net, temperature)),
-    temperatureOn: (branch, parameter) => zeroOn(at(parameter), branch, parameter)?.at,
+    temperatureOn: (branch, parameter) => zeroOn(at(parameter), branch, { parameter, sign: sign() })?.at,
   };
 }
 
-/** The zero on a branch at the parameter to which a function is set. */
-export function zeroOn(balance: EnclosedBalance, branch: Branch, parameter: number): ProvedZero | undefined {
+/** The zero on a branch at the parameter to which a function is set; `sign` is that of N over the function. */
+export function zeroOn(
+  balance: EnclosedBalance,
+  branch: Branch,
+  { parameter, sign }: { readonly parameter: number; readonly sign: Sign },
+): ProvedZero | undefined {
   const { zeros } = enumerateZeros(balance.net, reachOf(branch), { effort: ON_BRANCH });
-  return nearest(zeros, branch, parameter);
+  // branches of tiles may reach over each other
+  const opposite = branch.stability === "stable" ? 1 : branch.stability === "unstable" ? -1 : Number.NaN;
+  return nearest(
+    zeros.filter(({ slopeSign }) => slopeSign * sign !== opposite),
+    branch,
+    parameter,
+  );
 }
 
 /**

@@ -1,4 +1,5 @@
 // How far the climates that hold are from an end of their branches, in words.
+import type { Jump } from "../branches/diagram.ts";
 import type { Margin, TippingMargins } from "../branches/margins.ts";
 import type { Range } from "../ground/range.ts";
 import type { Appraisal } from "./appraisal.ts";
@@ -39,21 +40,20 @@ function turnText(along: string, direction: Margin["direction"]): string {
   return `if the ${light} ${verbs[direction === "rise" ? 0 : 1]}`;
 }
 
+function jumpText({ to, leaves, returnsAt, noReturn }: Jump, at: number): string {
+  if (!to && !leaves) return "; where it goes from there is not known";
+  const next = to ? `jumps to ${kelvin(to.temperature)} K` : `leaves the searched range, ${leaves}`;
+  const unknown = noReturn ? "there is no way back" : "whether there is a way back is not known";
+  const back = returnsAt === null ? unknown : `the way back is at ${shown(returnsAt / at, 4)} times today's`;
+  return ` and ${next}; ${back}`;
+}
+
 function marginText(margins: TippingMargins, margin: Margin): string {
   const { along, at } = margins;
   const { direction, end, jump } = margin;
   const by = changeText(margins, margin);
   if (jump) {
-    const next = jump.to
-      ? `jumps to ${kelvin(jump.to.temperature)} K`
-      : `leaves the searched range${jump.leaves ? `, ${jump.leaves}` : ""}`;
-    const back =
-      jump.returnsAt === null
-        ? jump.noReturn
-          ? "there is no way back"
-          : "whether there is a way back is not known"
-        : `the way back is at ${shown(jump.returnsAt / at, 4)} times today's`;
-    return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K and ${next}; ${back}`;
+    return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K${jumpText(jump, at)}`;
   }
   if (end.kind === "between")
     return `${turnText(along, direction)}, no end ${direction === "rise" ? "up" : "down"} to ${shown(end.at / at, 4)} times today's`;

@@ -5,7 +5,7 @@ import type { LawCard, Ports } from "./card.ts";
 
 const fine = /* @__PURE__ */ new WeakSet<LawCard>();
 
-/** Throws for a port or an output with a unit that is none, or a range that is no two increasing numbers. Looks once at each card. */
+/** Throws for a port or an output with a unit that is none, or a range that is not two increasing numbers. Looks once at each card. */
 export function checkCard(card: LawCard): void {
   if (fine.has(card)) return;
   checkPorts({ output: card.output, ...card.inputs }, card.name);
@@ -18,7 +18,9 @@ function checkPorts(ports: Ports, law: string): void {
     if ("each" in port) checkPorts(port.each, path);
     else {
       dimensionOf(port.unit, path);
-      if (port.within) checkedRange(port.within, path, port.unit);
+      const { within, unit } = port;
+      // an open end is infinite
+      if (within && !(within[0] < within[1])) checkedRange(within, path, unit);
     }
   }
 }

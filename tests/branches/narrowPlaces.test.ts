@@ -86,8 +86,11 @@ describe("behind something undecided", () => {
 });
 
 test("a curve is bounded over a few units in the last place", () => {
-  // p = 65536·(T − 300)
-  const loop = formulaLoop((t, p) => sub(p, mul(65536, sub(t, 300))));
+  // p = 65536·(T − 300), as a difference of which only the slope is enclosed closely
+  const loop = formulaLoop((t, p) => {
+    const rise = sub(t, 300);
+    return sub(p, sub(mul(2 ** 40, rise), mul(2 ** 40 - 65536, rise)));
+  });
   const nodes = gateNodes(loop, "p");
   if (!nodes) throw new Error("no gate");
   const line = gateLine(loop, nodes);

@@ -6,6 +6,7 @@ import { type FoldBox, type FoldPlace, type FoldSystem, inside } from "./foldSys
 import {
   commonOf,
   type FoldTube,
+  foldIn,
   foldTube,
   isPart,
   isWithin,
@@ -104,7 +105,10 @@ export function foldChains(system: FoldSystem, space: Space) {
       const up = half(start, 1, undefined);
       const down = half(start, -1, up.tubes[0]);
       const tubes = [...down.tubes.reverse(), ...up.tubes];
-      if (tubes.length > 0) chains.push({ tubes, low: down.end, high: up.end });
+      // one that began inside of a meeting that was found on the way is part of it, and of the curves that end there
+      const meeting = up.end.cap === down.end.cap ? up.end.cap : null;
+      const isInside = meeting && tubes.every((tube) => capAt(foldIn(tube, tube.q)) === meeting);
+      if (tubes.length > 0 && !isInside) chains.push({ tubes, low: down.end, high: up.end });
     },
   };
 }

@@ -3,6 +3,7 @@ import { describe, expect, test } from "vitest";
 import type { FoldDiagram } from "../../src/branches/foldDiagram.ts";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import { traceFolds } from "../../src/branches/traceFolds.ts";
+import * as core from "../../src/index.ts";
 import { add, max, mul, STEFAN_BOLTZMANN, square, sub } from "../../src/index.ts";
 import { distantLoop, twoGivens, vapourLoop } from "./loops.ts";
 
@@ -70,6 +71,36 @@ describe("along the width of an ice line, with the luminosity", () => {
     expect(space.curves.map((c) => c.exists)).toEqual(["below", "above"]);
   });
 });
+
+test.each([
+  [0.6, 260],
+  [0.65, 285],
+  [0.7, 265],
+  [0.75, 255],
+])(
+  "ice of albedo %d around %d K has the cusp that it has where the budget is a straight line",
+  (cold, midpoint) => {
+    const loop = core.closeLoop(({ temperature, given }) => {
+      const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+      const width = given("width", 10, "K", { within: [0.5, 100] });
+      const albedo = core.tanhAlbedo({ temperature, cold, warm: 0.3, midpoint, width });
+      return {
+        heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+        cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+        heatCapacity: 4.2e8,
+      };
+    });
+    const ranges = { along: "flux", and: "width", between: [2, 60], within: [200, 340] } as const;
+    const line = traceFolds(loop, ranges);
+    const space = traceFolds(loop, { ...ranges, alongBetween: [600, 4000] });
+    expect([line.method, space.method]).toEqual(["line", "space"]);
+    expect(space).toMatchObject({ complete: true, undecided: [] });
+    expect(space.curves).toHaveLength(2);
+    expect(space.cusps.map(({ and, at }) => [and, at])).toEqual(
+      line.cusps.map(({ and, at }) => [expect.closeTo(and, 9), expect.closeTo(at, 6)]),
+    );
+  },
+);
 
 test("folds in carbon and flux pass through those of the acceptance case", () => {
   // an independent computation in high precision: at C = 280 folds lie at these fluxes

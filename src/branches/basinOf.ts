@@ -1,5 +1,5 @@
 // The temperatures between which a stable state draws the climate to itself.
-import type { Range } from "../ground/range.ts";
+import { holds } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Branch, Diagram } from "./diagram.ts";
 import type { TippingMargins } from "./margins.ts";
@@ -21,17 +21,18 @@ export function basinOf(
   { index, at, temperature }: { index: number; at: number; temperature: number },
 ): TippingMargins["basin"] {
   const { branches, undecided } = diagram;
-  const isHere = ([low, high]: Range): boolean => low <= at && at <= high;
   const next = (side: 1 | -1): Edge | undefined => {
     const edges: Edge[] = undecided
-      .filter(({ parameters }) => isHere(parameters))
+      .filter(({ parameters }) => holds(parameters, at))
       .map(({ kind, temperatures: [low, high] }) => ({
         place: side > 0 ? low : high,
         temperature: kind === "jump" ? low + (high - low) / 2 : null,
       }));
     for (let i = index + side; i >= 0 && i < branches.length; i += side) {
       const branch = branches[i] as Branch;
-      const place = isHere(branch.parameters) ? stateOn(loop, diagram, branch, at)?.temperature : undefined;
+      const place = holds(branch.parameters, at)
+        ? stateOn(loop, diagram, branch, at)?.temperature
+        : undefined;
       if (place !== undefined) edges.push({ place, temperature: place });
     }
     return edges

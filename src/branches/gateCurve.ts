@@ -80,6 +80,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
   };
   const balance: EnclosedBalance = {
     ...{ net: line.distance, kinks, leaps, limits: { effort: 0, cuts: [], guides: new Float64Array(0) } },
+    // the reader sets the line itself
     set() {},
   };
   const reader = zeroReader({

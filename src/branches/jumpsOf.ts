@@ -1,5 +1,5 @@
 // Where the climate goes when a slow change of the parameter passes the end of a stable branch.
-import type { Range } from "../ground/range.ts";
+import { holds } from "../ground/range.ts";
 import type { Branch, BranchCrossing, BranchEnd, Fold, Jump, UndecidedStretch } from "./diagram.ts";
 
 /** The temperature of a branch at a parameter inside its range, if its state is found. */
@@ -38,11 +38,11 @@ export function jumpsOf(
   const landing = (from: number, direction: Jump["direction"]): Lost | undefined => {
     const branch = branches[from] as Branch;
     const end = direction === "rise" ? branch.high : branch.low;
-    const edge = end.kind === "leap" ? leapAt(branches, from, direction) : foldAt(folds, from, end);
+    const edge = end.kind === "leap" ? leapEdge(branches, from, direction) : foldEdge(folds, from, end);
     if (!edge) return undefined;
     const { side, lost } = edge;
     const isAhead = (temperature: number): boolean => side * (temperature - end.temperature) > 0;
-    /** The far end of what may hold the climate on the way, though it is not known that it does. */
+    /** Temperatures at which something on the way may hold the climate, though it is not known that it does. */
     const doubts = undecided
       .filter((u) => holds(u.parameters, end.at) && u.temperatures[0] !== end.temperatureBracket[0])
       .map((u) => u.temperatures);
@@ -96,15 +96,13 @@ export function jumpsOf(
   });
 }
 
-const holds = ([low, high]: Range, at: number): boolean => low <= at && at <= high;
-
 /** What a state meets where it is lost: the side on which N drives it away, and the branches that end there. */
 interface Edge {
   readonly side: 1 | -1;
   readonly lost: readonly number[];
 }
 
-function foldAt(folds: readonly Fold[], from: number, end: BranchEnd): Edge | undefined {
+function foldEdge(folds: readonly Fold[], from: number, end: BranchEnd): Edge | undefined {
   const fold = folds.find((f) => f.branches.includes(from) && f.temperature === end.temperature);
   if (!fold || (end.kind !== "fold" && end.kind !== "corner")) return undefined;
   // the cooler of the two loses its state to a warmer one
@@ -115,7 +113,7 @@ function foldAt(folds: readonly Fold[], from: number, end: BranchEnd): Edge | un
  * A leap that drives the state on: the branch on its other side reaches back over the parameters of this one. Otherwise N has
  * opposite signs on both sides beyond the end, towards the leap, and holds the climate there.
  */
-function leapAt(branches: readonly Branch[], from: number, direction: Jump["direction"]): Edge | undefined {
+function leapEdge(branches: readonly Branch[], from: number, direction: Jump["direction"]): Edge | undefined {
   const branch = branches[from] as Branch;
   const end = direction === "rise" ? branch.high : branch.low;
   const side = end.temperature === branch.temperatures[1] ? 1 : -1;

@@ -1,6 +1,6 @@
 // The states of a diagram at one value of its parameter.
 import { fail } from "../ground/errors.ts";
-import { checkedNumber, type Range } from "../ground/range.ts";
+import { checkedNumber, holds, type Range } from "../ground/range.ts";
 import { givensAt } from "../loop/inputs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
 import { readerOf } from "../states/prepared.ts";
@@ -35,7 +35,7 @@ export function statesOnDiagram<N extends string>(
   if (diagram?.method === undefined || !Array.isArray(diagram.branches))
     fail("unreadable", { path: "diagram", value: diagram, allowed: "what traceBranches returned" });
   const value = checkedNumber(at, "at", diagram.unit, diagram.between);
-  const inside = ([low, high]: Range) => low <= value && value <= high;
+  const inside = (range: Range) => holds(range, value);
   const branches: number[] = [];
   const states: State<N>[] = [];
   diagram.branches.forEach((branch, i) => {
@@ -73,7 +73,7 @@ export function stateOn(loop: Loop, diagram: Diagram, branch: Branch, at: number
 /** In tiles the states of branches keep their order: between its columns a branch is known by it alone. */
 function ordered(net: NetReader, { method, branches, within }: Diagram, branch: Branch, at: number) {
   if (method !== "tiles") return undefined;
-  const here = branches.filter(({ parameters: [low, high] }) => low <= at && at <= high);
+  const here = branches.filter(({ parameters }) => holds(parameters, at));
   const states = net.statesAt(at, within);
   return states?.length === here.length ? states[here.indexOf(branch)] : undefined;
 }

@@ -4,6 +4,8 @@ import { fail } from "./errors.ts";
 /** Lowest and highest allowed value, both included. */
 export type Range = readonly [number, number];
 
+export const holds = ([low, high]: Range, value: number): boolean => low <= value && value <= high;
+
 /** No limits. */
 export const ANY: Range = [-Infinity, Infinity];
 

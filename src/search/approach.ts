@@ -1,6 +1,7 @@
 // Finds the only zero between two places; nothing is proved but the signs of what is read.
 import type { Bracket } from "./bracket.ts";
 import type { Place } from "./reader.ts";
+import { roundoffAt } from "./roundoff.ts";
 
 const MOST_STEPS = 120;
 /** A function that rises between two places is taken for steady if its slopes there are no less than this part of the chord's. */
@@ -13,6 +14,7 @@ const FLATTEST = 0.333;
  */
 export function approach(bracket: Bracket): Place {
   let step = bracket.high.x - bracket.low.x;
+  let units = 1;
   interpolate(bracket);
   if (!bracket.holdsTrial()) aimBesideVertex(bracket);
   if (!bracket.holdsTrial()) halve(bracket);
@@ -23,7 +25,13 @@ export function approach(bracket: Bracket): Place {
     interpolate(bracket);
     if (!bracket.holdsTrial())
       trial.x = place.x - (place.low + place.high) / (place.slopeLow + place.slopeHigh);
-    if (!(bracket.holdsTrial() && Math.abs(trial.x - place.x) <= step / 2)) halve(bracket);
+    // a step that rounding swallows is made long enough to pass the zero
+    const least = units * roundoffAt(place.x);
+    if (Math.abs(trial.x - place.x) <= least) {
+      trial.x = place.x + (place === bracket.low ? least : -least);
+      units *= 2;
+    } else if (!(Math.abs(trial.x - place.x) <= step / 2)) halve(bracket);
+    if (!bracket.holdsTrial()) halve(bracket);
     if (!bracket.holdsTrial()) return place;
     step = Math.abs(trial.x - place.x);
   }

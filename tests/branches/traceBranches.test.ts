@@ -291,6 +291,16 @@ describe("what is not decided is said", () => {
   });
 });
 
+test("no fold costs a bisection: a step that rounding swallows still passes it", () => {
+  const readings = Array.from({ length: 60 }, (_, i) => {
+    const emissivity = 0.55 + i / 600;
+    const options = { along: "flux", between: [900, 1800], within: WITHIN, at: { emissivity } } as const;
+    return traceBranches(iceLoop(), options).cost.points;
+  });
+  // most take 44; a bisection down to the last place adds 45
+  expect(Math.max(...readings)).toBeLessThan(60);
+});
+
 test("the points keep the tolerance", () => {
   const loop = iceLoop();
   for (const tolerance of [0.05, 0.002, 1e-4]) {

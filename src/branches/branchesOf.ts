@@ -1,7 +1,7 @@
 // Makes the branches of a run: the pieces of a curve between its critical places.
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
-import type { Critical } from "./criticals.ts";
+import { type Critical, leaps } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd } from "./diagram.ts";
 import { pointsOf } from "./pointsOf.ts";
@@ -61,8 +61,6 @@ function runEnd(curve: Curve, { kind, end, at, bracket }: RunEnd, { between }: D
     temperatureBracket: frozen(bracket),
   });
 }
-
-const leaps = ({ kind }: Critical): boolean => kind === "jump" || kind === "leap";
 
 function criticalEnd(curve: Curve, critical: Critical, { between }: Drawing, side: 0 | 1): BranchEnd {
   const { kind, decided, bracket } = critical;

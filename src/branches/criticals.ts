@@ -20,8 +20,11 @@ export interface Criticals {
   readonly points: number;
 }
 
+/** Whether the curve leaps there, or may. */
+export const leaps = ({ kind }: Critical): boolean => kind === "jump" || kind === "leap";
+
 /** A sign change in a wider stretch, K, may be more than one corner. */
-const CORNER_WIDTH = 1e-6;
+export const CORNER_WIDTH = 1e-6;
 /** Boxes that finding the place of one kink may cost. */
 const KINK_EFFORT = 60;
 
@@ -34,14 +37,19 @@ export interface Feedback {
 }
 
 /** The critical places of a curve in a range of temperature, by rising temperature: zeros of λ, and kinks where its sign changes. */
-export function criticalsOf({ feedback, kinks, leaps }: Feedback, range: Range, effort: number): Criticals {
+export function criticalsOf(
+  { feedback, kinks, leaps: places }: Feedback,
+  range: Range,
+  effort: number,
+): Criticals {
   const cuts: number[] = [];
   const leapsAt: Range[] = [];
   for (const kink of kinks) {
-    for (const { bracket } of enumerateZeros(kink, range, { effort: KINK_EFFORT }).zeros) {
-      cuts.push(...bracket);
-      if (leaps.includes(kink)) leapsAt.push(bracket);
-    }
+    const { zeros, undecided } = enumerateZeros(kink, range, { effort: KINK_EFFORT });
+    for (const { bracket } of zeros) cuts.push(...bracket);
+    // one on an end of the range is not decided
+    if (places.includes(kink))
+      leapsAt.push(...zeros.map((z) => z.bracket), ...undecided.map((u) => u.interval));
   }
   // where the curve leaps λ has no value
   const leapsIn = ([low, high]: Range) =>

@@ -48,7 +48,7 @@ export function diagramOf(loop: Loop, task: Task, net: ZeroReader, parts: Parts)
     branches: Object.freeze(branches),
     folds: Object.freeze(folds),
     crossings: Object.freeze(crossings),
-    jumps: Object.freeze(jumpsOf({ branches, folds, crossings, undecided }, net.temperatureOn)),
+    jumps: Object.freeze(jumpsOf({ branches, folds, crossings, undecided }, net)),
     gaps: Object.freeze(gapsOf({ branches, undecided }, between, (p) => net.sign(p, middle))),
     undecided: Object.freeze(undecided.map((u) => Object.freeze(u))),
     complete,

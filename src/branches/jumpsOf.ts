@@ -1,9 +1,7 @@
 // Where the climate goes when a slow change of the parameter passes the end of a stable branch.
 import { holds } from "../ground/range.ts";
 import type { Branch, BranchCrossing, BranchEnd, Fold, Jump, UndecidedStretch } from "./diagram.ts";
-
-/** The temperature of a branch at a parameter inside its range, if its state is found. */
-export type TemperatureOn = (branch: Branch, parameter: number) => number | undefined;
+import type { ZeroReader } from "./zeroReader.ts";
 
 interface Met {
   readonly branches: readonly Branch[];
@@ -27,7 +25,7 @@ interface Lost {
  */
 export function jumpsOf(
   { branches, folds, crossings, undecided }: Met,
-  temperatureOn: TemperatureOn,
+  { temperatureOn, sign }: Pick<ZeroReader, "temperatureOn" | "sign">,
 ): Jump[] {
   const known = new Map<string, Lost | undefined>();
   const lostFrom = (from: number, direction: Jump["direction"]): Lost | undefined => {
@@ -38,7 +36,7 @@ export function jumpsOf(
   const landing = (from: number, direction: Jump["direction"]): Lost | undefined => {
     const branch = branches[from] as Branch;
     const end = direction === "rise" ? branch.high : branch.low;
-    const edge = end.kind === "leap" ? leapEdge(branches, from, direction) : foldEdge(folds, from, end);
+    const edge = end.kind === "leap" ? leapEdge(branch, from, { end, sign }) : foldEdge(folds, from, end);
     if (!edge) return undefined;
     const { side, lost } = edge;
     const isAhead = (temperature: number): boolean => side * (temperature - end.temperature) > 0;
@@ -109,18 +107,13 @@ function foldEdge(folds: readonly Fold[], from: number, end: BranchEnd): Edge | 
   return { side: fold.branches[0] === from ? 1 : -1, lost: fold.branches };
 }
 
-/**
- * A leap that drives the state on: the branch on its other side reaches back over the parameters of this one. Otherwise N has
- * opposite signs on both sides beyond the end, towards the leap, and holds the climate there.
- */
-function leapEdge(branches: readonly Branch[], from: number, direction: Jump["direction"]): Edge | undefined {
-  const branch = branches[from] as Branch;
-  const end = direction === "rise" ? branch.high : branch.low;
-  const side = end.temperature === branch.temperatures[1] ? 1 : -1;
-  const next = branches[from + side];
-  const other = [next?.low, next?.high].find(
-    (e) => e?.kind === "leap" && e.temperatureBracket[0] === end.temperatureBracket[0],
-  );
-  const reachesBack = other && (direction === "rise" ? other.at < end.at : other.at > end.at);
-  return reachesBack ? { side, lost: [from] } : undefined;
+/** A leap that drives the state on: beyond it N goes on with the sign that drives the state there. Otherwise N holds the climate. */
+function leapEdge(
+  { temperatures }: Branch,
+  from: number,
+  { end, sign }: { readonly end: BranchEnd; readonly sign: ZeroReader["sign"] },
+): Edge | undefined {
+  const side = end.temperature === temperatures[1] ? 1 : -1;
+  const beyond = end.temperatureBracket[side > 0 ? 1 : 0];
+  return sign(end.at, beyond) === side ? { side, lost: [from] } : undefined;
 }

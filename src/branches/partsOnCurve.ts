@@ -1,11 +1,13 @@
 // The parts of a diagram whose branches are the pieces of one curve p(T).
 
 import { boundsOf, branchesOf } from "./branchesOf.ts";
+import type { Critical } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd, Fold, UndecidedStretch } from "./diagram.ts";
 import type { Parts, Task } from "./diagramOf.ts";
 import { foldAt } from "./foldAt.ts";
 import { type Crossing, mergedCrossings, runsOf } from "./runs.ts";
+import { isToldAs, settledRun } from "./settledRun.ts";
 import { criticalDoubt, crossingDoubt } from "./undecided.ts";
 import type { ZeroReader } from "./zeroReader.ts";
 
@@ -32,23 +34,29 @@ export function partsOnCurve(curve: Curve, task: Task, net: ZeroReader): Parts {
   const merged = mergedCrossings(crossings);
   const { runs, unknown } = runsOf(merged, within, (t) => [net.sign(between[0], t), net.sign(between[1], t)]);
   const undecided: UndecidedStretch[] = [
-    ...merged.flatMap((crossing) => crossingDoubt(crossing, between)),
     ...unknown.map((temperatures) => ({ temperatures, parameters: between, kind: "other" as const })),
   ];
   const branches: Branch[] = [];
   const folds: Fold[] = [];
-  for (const run of runs) {
+  const open: Critical[] = [];
+  for (const whole of runs) {
     const reach = curve.reachesBeyond ? ([0, 1] as const) : ([1, 0] as const);
-    const found = curve.criticals([run.from.bracket[reach[0]], run.to.bracket[reach[1]]], left());
+    const found = curve.criticals([whole.from.bracket[reach[0]], whole.to.bracket[reach[1]]], left());
     spend(found);
+    const { run, inside } = settledRun(whole, found.list);
     const first = branches.length;
-    branches.push(...branchesOf(curve, run, found.list, task));
-    found.list.forEach((critical, i) => {
-      const pair = [first + i, first + i + 1] as const;
-      if (critical.decided) folds.push(foldBetween(branches, pair));
-      else undecided.push(criticalDoubt(critical, boundsOf(curve, critical.bracket, between)));
+    branches.push(...branchesOf(curve, run, inside, task));
+    inside.forEach((critical, i) => {
+      if (critical.decided) folds.push(foldBetween(branches, [first + i, first + i + 1]));
     });
+    open.push(...found.list.filter((critical) => !critical.decided));
   }
+  undecided.push(
+    ...merged
+      .filter(({ doubt, bracket }) => doubt !== "jump" || !isToldAs(open, bracket))
+      .flatMap((crossing) => crossingDoubt(crossing, between)),
+    ...open.map((critical) => criticalDoubt(critical, boundsOf(curve, critical.bracket, between))),
+  );
   for (const { stability, temperatures, parameters } of branches) {
     if (stability === "undecided") undecided.push({ temperatures, parameters, kind: "other" });
   }

@@ -15,7 +15,7 @@ export interface Crossing {
 
 /** Where a run ends. */
 export interface RunEnd {
-  readonly kind: "between" | "within" | "undecided";
+  readonly kind: "between" | "within" | "leap" | "undecided";
   /** Which end of the parameter's range, for `between`. */
   readonly end: 0 | 1;
   readonly at: number;

@@ -166,6 +166,38 @@ describe("branches", () => {
     expect(diagram.jumps).toEqual([]);
   });
 
+  test("a parameter's range that ends amid a leap: no third branch, and the jump is known as before", () => {
+    const loop = iceLoop();
+    const [low, high] = [fluxOf(263.15, 0.32), fluxOf(263.15, 0.62)];
+    const near = (x: number) => expect.closeTo(x, 8);
+    const short = traceBranches(loop, { along: "flux", between: [900, 1500], within: WITHIN });
+    expect(short.branches.map((b) => [b.stability, b.low.kind, b.high.kind])).toEqual([
+      ["stable", "between", "between"],
+      ["stable", "leap", "between"],
+    ]);
+    expect(short.branches[1]).toMatchObject({ parameters: [near(low), 1500], low: { at: near(low) } });
+    expect(short.undecided).toMatchObject([{ kind: "jump", parameters: [near(low), 1500] }]);
+    const cold = { branch: 0, temperature: near(temperatureOf(low, 0.62)) };
+    expect(short.jumps).toMatchObject([{ direction: "fall", at: near(low), to: cold, noReturn: true }]);
+    const upper = traceBranches(loop, { along: "flux", between: [1200, 2200], within: WITHIN });
+    expect(upper.branches.map((b) => [b.stability, b.low.kind, b.high.kind])).toEqual([
+      ["stable", "between", "leap"],
+      ["stable", "between", "between"],
+    ]);
+    const warm = { branch: 1, temperature: near(temperatureOf(high, 0.32)) };
+    expect(upper.jumps).toMatchObject([{ direction: "rise", at: near(high), to: warm, noReturn: true }]);
+  });
+
+  test("a leap on the end of the range of temperature: the branch below ends at its own parameter", () => {
+    const loop = iceLoop();
+    const { branches } = traceBranches(loop, { along: "flux", between: [900, 2200], within: [200, 263.15] });
+    const high = fluxOf(263.15, 0.62);
+    expect(branches.map((b) => [b.stability, b.low.kind, b.high.kind])).toEqual([
+      ["stable", "between", "leap"],
+    ]);
+    expect(branches[0]?.parameters).toEqual([900, expect.closeTo(high, 8)]);
+  });
+
   test("along the threshold: the leap where it lies between both states", () => {
     const diagram = traceBranches(iceLoop(), {
       along: "threshold",

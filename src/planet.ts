@@ -18,6 +18,7 @@ export { type AppraisePlanetOptions, appraisePlanet } from "./appraisal/appraise
 export type { CatalogueRow, Cell, Column, Refused } from "./appraisal/catalogueCell.ts";
 export type { CatalogueEntry, CatalogueMapping } from "./appraisal/catalogueMapping.ts";
 export { fromCatalogueRow } from "./appraisal/fromCatalogueRow.ts";
+export type { StarBrightening } from "./appraisal/starBrightening.ts";
 export type { StatedLimit } from "./appraisal/statedLimit.ts";
 export { toMarkdown } from "./appraisal/toMarkdown.ts";
 export { type AppraisalRow, toRows } from "./appraisal/toRows.ts";

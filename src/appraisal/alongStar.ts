@@ -3,6 +3,7 @@ import type { Brightening } from "../branches/brightening.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Planet } from "../planet/planetTypes.ts";
 import { type ReadPlanetOptions, readPlanet } from "../planet/readPlanet.ts";
+import { brighteningOf } from "./starBrightening.ts";
 
 /** A budget that depends on its star through one given. */
 export interface AlongStar {
@@ -40,6 +41,5 @@ const has = (planet: Planet, name: string): boolean =>
 
 function follow({ loop, facts }: Planet, along: string): AlongStar {
   const now = loop.givens.find((given) => given.name === along)?.value as number;
-  const rate = facts.stars.length === 1 ? (facts.stars[0]?.brightening ?? null) : null;
-  return { loop, along, now, brightening: rate === null ? null : { rate } };
+  return { loop, along, now, brightening: brighteningOf(facts.stars) };
 }

@@ -7,6 +7,7 @@ import type { FoundStates } from "../states/state.ts";
 import type { AppraisalNote } from "./appraisalNote.ts";
 import type { EquilibriumTemperatures, Starlight } from "./appraisedLight.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
+import type { StarBrightening } from "./starBrightening.ts";
 import type { StatedLimit } from "./statedLimit.ts";
 
 /** What is not given and does not follow, and what cannot be said without it. */
@@ -58,6 +59,8 @@ export interface Appraisal {
   readonly leaves: "hotter" | "colder" | null;
   /** All climates as the star brightens or fades, from 0.4 to 2.5 times today's, also where there is none today; null where nothing stands for the star, or it gives no light. */
   readonly diagram: AppraisedDiagram | null;
+  /** How the star brightens or fades, on which the times of margins rest; null where that is not described, or several shine. */
+  readonly brightening: StarBrightening | null;
   /** Published limits; empty where the effective temperature is not given or outside of their range. */
   readonly habitableZone: readonly StatedLimit[];
   /** Where the planet's own stable branches end. */

@@ -10,6 +10,7 @@ import type { PlanetNote } from "../planet/planetNote.ts";
  * `slow-rotation`: the limits are for a planet that turns fast.
  * `luminosity-of-no-star`: a luminosity far from that of any star. `warm-albedo-above-cold`: a planet that grows darker as it
  * freezes. Both are read as they stand.
+ * `beyond-table`: a climate ends later than the table of its star's luminosity.
  * `incomplete-budget`: no states, because a part of the budget is not given. `published-temperature`: what a table's
  * temperature may mean.
  */
@@ -23,6 +24,7 @@ export type AppraisalNoteCode =
   | "slow-rotation"
   | "luminosity-of-no-star"
   | "warm-albedo-above-cold"
+  | "beyond-table"
   | "incomplete-budget"
   | "published-temperature";
 

@@ -19,6 +19,7 @@ import { ownLimits, publishedLimits } from "./limits.ts";
 import { missingFacts } from "./missingFacts.ts";
 import { notesOfAppraisal } from "./notesOfAppraisal.ts";
 import { sourcesOfAppraisal } from "./sourcesOfAppraisal.ts";
+import { starBrightening } from "./starBrightening.ts";
 import { starlightOf } from "./starlightOf.ts";
 import { type Climates, statesOfPlanet } from "./statesOfPlanet.ts";
 
@@ -73,6 +74,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
     ? statesOfPlanet({ loop, facts, inputs, units: planet.units, star }, { within, effort })
     : { found: null, states: [], leaves: null, diagram: null };
   const { states } = climates;
+  const brightening = starBrightening(facts.stars);
   const hasAlbedo = !filled.has("albedo") && !filled.has("surface");
   const hasShare = hasAlbedo && !filled.has("redistribution");
   const { albedo, internalHeat } = planet.assumptions;
@@ -91,7 +93,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
       if (code === "assumption") return !filled.has(fieldOf(about));
       return code !== "input-unused" || (hasBudget && !used.has(about));
     }),
-    ...notesOfAppraisal({ planet, states, hasBudget }),
+    ...notesOfAppraisal({ planet, states, hasBudget, brightening }),
   ];
   const laws = sourcesOf(loop).filter(({ law }) => hasBudget || LAWS_OF_LIGHT.includes(law));
   const beside = lawsBeside({ inputs, starlight, equilibrium, habitableZone, states });
@@ -106,6 +108,7 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
     starlight,
     equilibrium,
     ...climates,
+    brightening,
     habitableZone,
     ownLimits: ownLimits(states, starlight),
     assumptions: hasShare ? planet.assumptions : null,

@@ -12,6 +12,7 @@ export function climateSections({
   found,
   states,
   diagram,
+  brightening,
   starlight,
   equilibrium,
   missing,
@@ -31,7 +32,10 @@ export function climateSections({
     { title: "Energy ledger of each climate that holds, W m-2", blocks: ledgerTable(holding) },
     { title: "What holds each climate", blocks: feedbackTable(holding) },
     { title: "What would change each climate, to first order", blocks: sensitivityTable(holding) },
-    { title: "How far each climate is from an end of its branch", blocks: marginLines(holding, diagram) },
+    {
+      title: "How far each climate is from an end of its branch",
+      blocks: marginLines(holding, { diagram, brightening }),
+    },
     {
       title: "Which average over the orbit suits",
       blocks: [...(starlight.eccentricity === 0 ? [circleText(missing)] : []), ...averagingLines(holding)],

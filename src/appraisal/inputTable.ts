@@ -1,6 +1,7 @@
 // The inputs of an appraisal with the laws that take them.
 import type { Appraisal } from "./appraisal.ts";
-import { type Section, withUnit } from "./report.ts";
+import { inputRows } from "./columns.ts";
+import type { Section } from "./report.ts";
 
 /** Fields in which a law may stand, at any depth. */
 const PLACES = ["albedo", "surface", "longwave", "forcing", "heatCapacity"] as const;
@@ -8,10 +9,7 @@ const PLACES = ["albedo", "surface", "longwave", "forcing", "heatCapacity"] as c
 /** Every input as it is written and in SI, each law before its own. */
 export function inputTable({ inputs, description: described }: Appraisal): Section {
   const description = described as Readonly<Record<string, unknown>>;
-  const rows = inputs.map(({ path, written, value, unit }) => {
-    const si = withUnit(value, unit);
-    return [path, written, si === written || written === String(value) ? "" : si];
-  });
+  const rows = inputRows(inputs).map(({ path, written, si }) => [path, written, si]);
   for (const field of PLACES)
     for (const { path: place, law } of lawsIn(description[field], field)) {
       const first = rows.findIndex(([path]) => path?.startsWith(`${place}.`));

@@ -4,18 +4,21 @@ import type { Margin, TippingMargins } from "../branches/margins.ts";
 import type { Range } from "../ground/range.ts";
 import type { Appraisal } from "./appraisal.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
-import { kelvin, shown, YEAR } from "./report.ts";
-
-const GIGAYEAR = 1e9 * YEAR;
+import { duration, kelvin, shown } from "./report.ts";
+import { isBeyondTable, type StarBrightening } from "./starBrightening.ts";
 
 /** How far the star may brighten or fade before a state is lost, what comes then, and whether there is a way back. */
-export function marginLines(states: readonly StateAppraisal[], diagram: Appraisal["diagram"]): string[] {
+export function marginLines(
+  states: readonly StateAppraisal[],
+  { diagram, brightening }: Pick<Appraisal, "diagram" | "brightening">,
+): string[] {
   if (!diagram) return [];
   const lines = states.flatMap(({ state, margins }) => {
     const at = `at ${kelvin(state.temperature)} K: `;
     if (!margins) return [`${at}its branch is not decided`];
     const basin = margins.basin ? basinText(margins.basin) : "";
-    const all = [marginText(margins, margins.rise), marginText(margins, margins.fall), basin];
+    const ends = [margins.rise, margins.fall].map((margin) => marginText(margins, margin, brightening));
+    const all = [...ends, basin];
     return all.filter(Boolean).map((text) => at + text);
   });
   const { along, proof, between, gaps, now } = diagram;
@@ -28,10 +31,21 @@ export function marginLines(states: readonly StateAppraisal[], diagram: Appraisa
   return [...lines, ...none, `followed: ${along} ${range(between)}, all else fixed; diagram: ${proof}`];
 }
 
-/** What changes and how far, such as "if the star fades by 11.86 %". */
-export function changeText({ along }: TippingMargins, { direction, relative, time }: Margin): string {
-  const by = ` by ${(100 * (relative ?? 0)).toFixed(2)} %${time === null ? "" : `, in ${(time / GIGAYEAR).toFixed(2)} Gyr`}`;
-  return turnText(along, direction) + by;
+/** What changes, how far and when, such as "if the star fades by 11.86 %". */
+export function changeText(
+  { along }: TippingMargins,
+  margin: Margin,
+  brightening: StarBrightening | null,
+): string {
+  const by = ` by ${(100 * (margin.relative ?? 0)).toFixed(2)} %`;
+  return turnText(along, margin.direction) + by + whenText(margin, brightening);
+}
+
+function whenText(margin: Margin, brightening: StarBrightening | null): string {
+  if (margin.time !== null) return `, in ${duration(margin.time)}`;
+  const table = brightening?.table;
+  if (!table || !isBeyondTable(margin, brightening)) return "";
+  return `, beyond the star's table, which ends ${table.lasts === 0 ? "today" : `in ${duration(table.lasts)}`}`;
 }
 
 function turnText(along: string, direction: Margin["direction"]): string {
@@ -48,10 +62,10 @@ function jumpText({ to, leaves, returnsAt, noReturn }: Jump, at: number): string
   return ` and ${next}; ${back}`;
 }
 
-function marginText(margins: TippingMargins, margin: Margin): string {
+function marginText(margins: TippingMargins, margin: Margin, brightening: StarBrightening | null): string {
   const { along, at } = margins;
   const { direction, end, jump } = margin;
-  const by = changeText(margins, margin);
+  const by = changeText(margins, margin, brightening);
   if (jump) {
     return `${by}, it ends in a ${end.kind} at ${kelvin(end.temperature)} K${jumpText(jump, at)}`;
   }

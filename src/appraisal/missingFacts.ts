@@ -29,6 +29,6 @@ export function missingFacts(
   if (facts.heatCapacity !== null)
     need(facts.orbitalPeriod, "orbit.period", "no ratio of the thermal time to the orbital period");
   if (facts.stars.length === 1)
-    need(host?.brightening ?? null, `${star}.brightening`, "margins without times");
+    need(host?.brighteningTable ?? host?.brightening ?? null, `${star}.brightening`, "margins without times");
   return missing;
 }

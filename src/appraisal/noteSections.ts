@@ -1,6 +1,6 @@
 // What the report says of what is missing, assumed, doubtful and published.
 import type { Appraisal } from "./appraisal.ts";
-import { type Section, withUnit } from "./report.ts";
+import { duration, type Section, withUnit, YEAR } from "./report.ts";
 
 /** As much of a note as a line says. */
 interface Noted {
@@ -65,9 +65,12 @@ const linesWith =
   };
 
 const DAY = 86400;
+const MILLENNIUM = 1000 * YEAR;
 
-const numberOf = (value: number, unit: string): string =>
-  unit === "s" && value >= DAY ? withUnit(value / DAY, "d") : withUnit(value, unit);
+function numberOf(value: number, unit: string): string {
+  if (unit === "s" && value >= MILLENNIUM) return duration(value);
+  return unit === "s" && value >= DAY ? withUnit(value / DAY, "d") : withUnit(value, unit);
+}
 
 /** The same note on several states is one note. */
 function merged(notes: readonly { readonly text: string; readonly at: string | null }[]): string[] {

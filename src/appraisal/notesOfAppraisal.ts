@@ -6,10 +6,12 @@ import { COOL_STAR } from "../planet/coolStar.ts";
 import type { Planet } from "../planet/planetTypes.ts";
 import { type AppraisalNote, appraisalNote } from "./appraisalNote.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
+import { brighteningNotes } from "./brighteningNotes.ts";
 import { hostOf } from "./hostOf.ts";
 import { limitsArePublished, PUBLISHED_STARS } from "./limits.ts";
 import { rangeOf, takes } from "./portRange.ts";
 import { shown } from "./report.ts";
+import type { StarBrightening } from "./starBrightening.ts";
 import { unlikelyNotes } from "./unlikelyNotes.ts";
 
 /** From here on the flux at periastron is half as large again as at apoastron, and a circle is a poor likeness; no source. */
@@ -24,6 +26,7 @@ export interface Noted {
   readonly planet: Planet;
   readonly states: readonly StateAppraisal[];
   readonly hasBudget: boolean;
+  readonly brightening: StarBrightening | null;
 }
 
 /** The notes that an appraisal adds to those of the planet. */
@@ -33,6 +36,11 @@ export const notesOfAppraisal = (noted: Noted): AppraisalNote[] => [
   ...orbitNotes(noted),
   ...rotationNotes(noted),
   ...unlikelyNotes(noted.planet),
+  ...brighteningNotes(
+    noted.states,
+    noted.brightening,
+    `${noted.planet.facts.stars[0]?.path ?? "star"}.brightening`,
+  ),
   ...(noted.hasBudget
     ? []
     : [

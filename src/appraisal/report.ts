@@ -28,6 +28,13 @@ export interface Report {
 /** Julian year, s. */
 export const YEAR = 365.25 * 86400;
 
+/** A long time in s for reading. */
+export function duration(time: number): string {
+  const years = time / YEAR;
+  if (years < 1e5) return `${shown(years, 3)} yr`;
+  return years < 1e8 ? `${shown(years / 1e6, 3)} Myr` : `${(years / 1e9).toFixed(2)} Gyr`;
+}
+
 /** A temperature for reading, K. */
 export const kelvin = (value: number): string => value.toFixed(2);
 

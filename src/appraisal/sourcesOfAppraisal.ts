@@ -4,6 +4,7 @@ import type { LawSource } from "../loop/sourcesOf.ts";
 import type { PlanetInput } from "../planet/planetInput.ts";
 import type { AppraisalSource } from "./appraisal.ts";
 import type { AppraisalNote } from "./appraisalNote.ts";
+import { columnOf } from "./columns.ts";
 
 /** Parentheses belong to a DOI where they are balanced, a full stop at its end does not. */
 const DOI = /\b10\.\d{4,9}\/(?:\([^\s()]*\)|[^\s;,()])*(?:\([^\s()]*\)|[^\s;,.()])/g;
@@ -23,7 +24,7 @@ export function sourcesOfAppraisal(
   };
   for (const { law, source } of laws) add(law, source);
   for (const { card } of beside) add(card.name, card.source);
-  for (const { path, source } of inputs) add(path, source ?? "");
+  for (const { path, source } of inputs) add(columnOf(path) ?? path, source ?? "");
   for (const { code, source } of notes) add(code, source ?? "");
   return [...bySource].map(([source, of]) => ({
     of: [...of],

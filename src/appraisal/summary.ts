@@ -38,7 +38,7 @@ function stableText(stable: Appraisal["states"]): string {
   return `${stable.length} are stable, the coldest at ${coldest} K and the warmest at ${warmest} K`;
 }
 
-function tipping({ states, diagram }: Appraisal): string {
+function tipping({ states, diagram, brightening }: Appraisal): string {
   if (!diagram) return "";
   const ways = states.flatMap(({ state, margins }) =>
     margins ? [margins.rise, margins.fall].map((margin) => ({ state, margins, margin })) : [],
@@ -48,7 +48,7 @@ function tipping({ states, diagram }: Appraisal): string {
   if (nearest) {
     const { state, margins, margin } = nearest;
     const which = diagram.complete ? "The nearest" : "The nearest known";
-    return `${which} tipping point: ${changeText(margins, margin)}, the climate at ${kelvin(state.temperature)} K ends.`;
+    return `${which} tipping point: ${changeText(margins, margin, brightening)}, the climate at ${kelvin(state.temperature)} K ends.`;
   }
   if (!diagram.complete || ways.length === 0) return "";
   const range = diagram.between.map((end) => shown(end / diagram.now.at, 4)).join(" to ");

@@ -2,6 +2,7 @@
 import type { Appraisal } from "./appraisal.ts";
 import type { PlaceTemperatures } from "./appraisedLight.ts";
 import { checkAppraisal } from "./checkAppraisal.ts";
+import { isBeyondTable } from "./starBrightening.ts";
 
 /** One number, or one word, of an appraisal. */
 export interface AppraisalRow {
@@ -85,7 +86,7 @@ function placeRows(path: string, places: PlaceTemperatures | null, add: Add): vo
   }
 }
 
-function stateRows({ states }: Appraisal, i: number, add: Add): void {
+function stateRows({ states, brightening }: Appraisal, i: number, add: Add): void {
   const at = states[i];
   if (!at) return;
   const { state, equilibriumTemperature, greenhouseWarming, places, averaging, feedbacks } = at;
@@ -119,6 +120,11 @@ function stateRows({ states }: Appraisal, i: number, add: Add): void {
     own(`margins.${side}.relative`, margin.relative);
     own(`margins.${side}.temperature`, margin.end.temperature, "K");
     own(`margins.${side}.time`, margin.time, "s");
+    own(
+      `margins.${side}.laterThan`,
+      isBeyondTable(margin, brightening) ? brightening?.table?.lasts : null,
+      "s",
+    );
     own(`margins.${side}.after`, margin.after?.temperature, "K");
   }
   own("water", surface?.water);

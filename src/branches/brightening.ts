@@ -18,10 +18,15 @@ export interface SteadyBrightening {
   readonly rate: number;
 }
 
+interface TableEntry {
+  readonly time: number;
+  readonly luminosity: number;
+}
+
 /** A star whose luminosity is tabled, straight between the entries. */
 export interface TabledBrightening {
   /** By rising time; times in s, luminosities in any one unit. */
-  readonly table: readonly { readonly time: number; readonly luminosity: number }[];
+  readonly table: readonly TableEntry[];
   /** The time of today in the table, s. */
   readonly now: number;
 }
@@ -29,10 +34,10 @@ export interface TabledBrightening {
 /** How a star brightens. */
 export type Brightening = SunlikeBrightening | SteadyBrightening | TabledBrightening;
 
-/** The time until the star is brighter by a factor above 1, s; `null` if it never is, as far as is known. */
+/** The time until the star has so many times the light of today, s; `null` if it never has, as far as is known. */
 export type TimeUntil = (factor: number) => number | null;
 
-/** Checks a brightening and returns the time until a factor is reached. */
+/** Checks a brightening and returns the time until a factor above or below 1 is reached. */
 export function timeUntil(brightening: Brightening): TimeUntil {
   if (typeof brightening !== "object" || brightening === null)
     fail("unreadable", {
@@ -55,7 +60,7 @@ function sunlike(brightening: SunlikeBrightening): TimeUntil {
     fail("out-of-range", { path: "brightening.mass", value: mass, allowed });
   }
   const now = 1 / stellarBrightening({ age });
-  return (factor) => ((now - now / factor) / SOLAR_PACE) * SOLAR_AGE;
+  return (factor) => (factor > 1 ? ((now - now / factor) / SOLAR_PACE) * SOLAR_AGE : null);
 }
 
 function steady(brightening: SteadyBrightening): TimeUntil {
@@ -63,8 +68,8 @@ function steady(brightening: SteadyBrightening): TimeUntil {
   const rate = checkedNumber(brightening.rate, "brightening.rate", "s-1", [-1, 1]);
   return (factor) => {
     const time = (factor - 1) / rate;
-    // a rate of next to nothing takes longer than a number can say
-    return rate > 0 && Number.isFinite(time) ? time : null;
+    // a rate of next to nothing takes longer than a number can say, and one of the other sign never gets there
+    return time > 0 && Number.isFinite(time) ? time : null;
   };
 }
 
@@ -74,13 +79,13 @@ function tabled(brightening: TabledBrightening): TimeUntil {
   const path = "brightening.table";
   if (!Array.isArray(table) || table.length < 2)
     fail("unreadable", { path, value: table, allowed: "two or more entries { time, luminosity }" });
-  const rows = (table as TabledBrightening["table"]).map((row, i) => ({
+  const rows = (table as readonly TableEntry[]).map((row, i) => ({
     time: checkedNumber(row?.time, `${path}[${i}].time`, "s"),
     luminosity: checkedNumber(row?.luminosity, `${path}[${i}].luminosity`, "1", [0, 1e40]),
   }));
-  const [first, last] = [rows[0], rows.at(-1)] as [(typeof rows)[number], (typeof rows)[number]];
+  const [first, last] = [rows[0], rows.at(-1)] as [TableEntry, TableEntry];
   rows.slice(1).forEach(({ time }, i) => {
-    const before = (rows[i] as (typeof rows)[number]).time;
+    const before = (rows[i] as TableEntry).time;
     if (!(time > before))
       fail("out-of-range", {
         path: `${path}[${i + 1}].time`,
@@ -90,13 +95,19 @@ function tabled(brightening: TabledBrightening): TimeUntil {
       });
   });
   const now = checkedNumber(brightening.now, "brightening.now", "s", [first.time, last.time]);
-  const pieces = rows.slice(1).map((to, i) => ({ from: rows[i] as (typeof rows)[number], to }));
-  const today = pieces.find(({ to }) => to.time >= now) as (typeof pieces)[number];
-  const luminosity = between(today, (now - today.from.time) / (today.to.time - today.from.time));
+  const pieces = rows.slice(1).map((to, i) => ({ from: rows[i] as TableEntry, to }));
+  const luminosity = luminosityNow({ table: rows, now });
+  if (luminosity === 0)
+    fail("out-of-range", {
+      path: "brightening.now",
+      value: now,
+      allowed: "a time with a luminosity above 0",
+    });
   return (factor) => {
     const wanted = factor * luminosity;
+    const short = (at: number) => (factor > 1 ? at < wanted : at > wanted);
     for (const { from, to } of pieces) {
-      if (to.time <= now || to.luminosity < wanted || from.luminosity === to.luminosity) continue;
+      if (to.time <= now || short(to.luminosity) || from.luminosity === to.luminosity) continue;
       const share = (wanted - from.luminosity) / (to.luminosity - from.luminosity);
       const time = from.time + Math.max(0, share) * (to.time - from.time);
       return Math.max(0, time - now);
@@ -105,10 +116,12 @@ function tabled(brightening: TabledBrightening): TimeUntil {
   };
 }
 
-const between = (
-  {
-    from,
-    to,
-  }: { readonly from: { readonly luminosity: number }; readonly to: { readonly luminosity: number } },
-  share: number,
-): number => from.luminosity + share * (to.luminosity - from.luminosity);
+/** The luminosity that a checked table has for today, straight between its entries. */
+export function luminosityNow({ table, now }: TabledBrightening): number {
+  const next = Math.max(
+    1,
+    table.findIndex(({ time }) => time >= now),
+  );
+  const [from, to] = table.slice(next - 1) as unknown as [TableEntry, TableEntry];
+  return from.luminosity + ((now - from.time) / (to.time - from.time)) * (to.luminosity - from.luminosity);
+}

@@ -18,7 +18,7 @@ export interface TippingMarginsOptions<N extends string = string> {
    * must have the values of the state.
    */
   readonly diagram?: Diagram<Givens<N>>;
-  /** How the star brightens; then the time to the end of the branch is told, for a given that grows with luminosity. */
+  /** How the star brightens or fades; then the time to the end of the branch is told, for a given that grows with luminosity. */
   readonly brightening?: Brightening;
   readonly effort?: number;
   readonly tolerance?: number;
@@ -39,7 +39,10 @@ export interface Margin<N extends string = string> {
   readonly jump: Jump | null;
   /** The branch from the state to its end, with λ along the way. */
   readonly way: readonly BranchPoint[];
-  /** Until the brightening star brings the given to the end of the branch, s; `null` where that is not asked, or never. */
+  /**
+   * Until the star, as it brightens or fades, brings the given to the end of the branch, s; `null` where that is not asked,
+   * never, or not before the end of its table.
+   */
   readonly time: number | null;
 }
 

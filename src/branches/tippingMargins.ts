@@ -19,8 +19,8 @@ const WITHIN: Range = [2.7, 2000];
 
 /**
  * The margins of a state along one given: the distance to the end of its branch in both directions, the temperature there, the
- * state after the jump and whether there is a way back, the edges of its basin, and λ along the way. With a brightening star
- * also the time until its branch ends, at fixed other givens: for the Sun's history Δt = 2.5·t₀·(1 − p/p_end).
+ * state after the jump and whether there is a way back, the edges of its basin, and λ along the way. With a star that brightens
+ * or fades also the time until its branch ends, at fixed other givens: for the Sun's history Δt = 2.5·t₀·(1 − p/p_end).
  *
  * `state` may come from `JSON.parse`. Throws `foreign-state`, `unknown-name`, `missing` (no range for the given),
  * `contradiction` (the budget does not depend on it; the diagram is another; or time is asked along a given that is no
@@ -69,7 +69,7 @@ export function tippingMargins<N extends string>(
       relative: at === 0 ? null : distance / Math.abs(at),
       after: target ? ((stateOn(loop, diagram, target, end.at) ?? null) as State<N> | null) : null,
       way: Object.freeze(wayTo(branch, { ...here, temperature }, { at, direction })),
-      time: until && at > 0 && end.at > at ? until(end.at / at) : null,
+      time: until && at > 0 && end.at !== at ? until(end.at / at) : null,
     });
   };
   return Object.freeze({

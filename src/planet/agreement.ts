@@ -1,6 +1,7 @@
 // Inputs that say the same thing twice must agree, and the orbit must stay outside the stars.
 import { fail } from "../ground/errors.ts";
 import { approaches } from "./approaches.ts";
+import { isTable, tableWays } from "./brighteningTable.ts";
 import { keysOf } from "./keysOf.ts";
 import { type Written, writtenAs } from "./planetInput.ts";
 import { type PlanetNote, planetNote } from "./planetNote.ts";
@@ -42,7 +43,9 @@ export function checkStarAndOrbit(d: Lit, numbers: Numbers, contradictions: Cont
   const luminosity = { name: "luminosity", unit: "W" };
   const axis = { name: "semi-major axis", unit: "m" };
   return [
-    ...starsOf(d).flatMap((star) => compared(luminosityWays(star), from, luminosity)),
+    ...starsOf(d).flatMap((star) =>
+      compared([...luminosityWays(star), ...tableWays(star, numbers)], from, luminosity),
+    ),
     ...compared(distanceWays(d), from, axis),
   ];
 }
@@ -63,7 +66,8 @@ interface Compared {
 /** A value as its author wrote it. */
 function writtenAt(d: object, path: string): string {
   const at = (held: unknown, key: string | number) => (held as Readonly<Record<string, unknown>>)[key];
-  return writtenAs(keysOf(path).reduce(at, d as unknown) as Written);
+  const written = keysOf(path).reduce(at, d as unknown);
+  return isTable(written) ? "its table, today" : writtenAs(written as Written);
 }
 
 function compared(
@@ -74,16 +78,19 @@ function compared(
   return others.map((other) => {
     const [used, spare] = [(first as Way).of(numbers) as number, other.of(numbers) as number];
     const [from, by] = [(first as Way).uses.join(" and "), other.uses.join(" and ")];
+    const gives = other.uses.length === 1 ? "gives" : "give";
     const as = (way: Way) => `(${way.uses.map((path) => writtenAt(d, path)).join(" and ")})`;
     if (Math.abs(spare - used) <= AGREEMENT * used) {
-      const text = `${by} give the ${name} within 2 % of ${from}, which is used`;
+      const text = `${by} ${gives} the ${name} within 2 % of ${from}, which is used`;
       return planetNote({ code: "inputs-agree", about: by, value: spare, unit, text });
     }
     if (contradictions === "refuse") {
-      const allowed = `2 % around what ${from} ${as(first as Way)} gives, ${told(used)}`;
+      const instead = other.instead === undefined ? "" : `${other.instead}, or `;
+      const verb = (first as Way).uses.length === 1 ? "gives" : "give";
+      const allowed = `${instead}2 % around what ${from} ${as(first as Way)} ${verb}, ${told(used)}`;
       fail("contradiction", { path: by, value: spare, allowed, unit });
     }
-    const text = `${by} ${as(other)} give another ${name} than ${from} ${as(first as Way)}, which is used: ${told(spare)} against ${told(used)} ${unit}`;
+    const text = `${by} ${as(other)} ${gives} another ${name} than ${from} ${as(first as Way)}, which is used: ${told(spare)} against ${told(used)} ${unit}`;
     return contradicting({ about: by, value: spare, unit, text });
   });
 }

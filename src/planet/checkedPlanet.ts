@@ -1,6 +1,7 @@
 // All checks of a description, in the order in which their errors help most.
 import { fail } from "../ground/errors.ts";
 import { type Contradictions, checkAgreement } from "./agreement.ts";
+import { checkTables } from "./brighteningTable.ts";
 import { checkStack } from "./checkStack.ts";
 import { checkCombinations } from "./combinations.ts";
 import { checkCovers } from "./covers.ts";
@@ -53,7 +54,10 @@ export function checkedPlanet(value: unknown, contradictions: Contradictions): C
     () => checkAverage(description, numbers),
     () => checkAllCovers(description, numbers),
     () => checkStack(description, numbers),
-    () => checkAgreement(description, numbers, contradictions),
+    () => {
+      checkTables(description, inputs);
+      return checkAgreement(description, numbers, contradictions);
+    },
   ]);
   const { report, heatCapacity } = planetBudget(description, {
     wire: numbers,

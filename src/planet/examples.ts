@@ -5,6 +5,7 @@ const EXAMPLES: Readonly<Record<string, string>> = {
   m: "0.61 au",
   kg: "0.7 solMass",
   s: "12 d",
+  "s-1": "0.05 Gyr-1",
   K: "288 K",
   W: "0.42 solLum",
   Pa: "1.1 bar",

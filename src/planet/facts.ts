@@ -1,7 +1,9 @@
 // What a description says of star, orbit and body in SI, given or following from what is given.
+import type { TabledBrightening } from "../branches/brightening.ts";
 import { apoastronFlux } from "../orbit/apoastronFlux.ts";
 import { periastronFlux } from "../orbit/periastronFlux.ts";
 import { visibleShareOf } from "./bands.ts";
+import { tableOf } from "./brighteningTable.ts";
 import type { CheckedPlanet } from "./checkedPlanet.ts";
 import { fluxWays } from "./starlight.ts";
 import { type DescribedStar, starsOf } from "./stars.ts";
@@ -22,8 +24,10 @@ export interface StarFacts {
   readonly mass: number | null;
   /** Share of its energy below 0.7 µm, as given or of a black body. */
   readonly visibleShare: number | null;
-  /** (dL/dt)/L, s⁻¹. */
+  /** (dL/dt)/L, s⁻¹; null also where the star has a table. */
   readonly brightening: number | null;
+  /** Its luminosity by time, s, and the time of today, as `tippingMargins` takes them. */
+  readonly brighteningTable: TabledBrightening | null;
   /** Distance of a star that the planet does not orbit, m. */
   readonly distance: number | null;
 }
@@ -81,6 +85,7 @@ export function factsOf({
         ? null
         : (visibleShareOf(star, numbers) as number),
     brightening: at(`${star.path}.brightening`),
+    brighteningTable: tableOf(star, numbers),
     distance: at(`${star.path}.distance`),
   });
   const eccentricity = at("orbit.eccentricity") ?? 0;

@@ -44,6 +44,24 @@ export const STAR_PORTS = {
   },
 } as const;
 
+/** Fields of a table in place of a rate of brightening; it may begin before a star shines, or count from today. */
+const time = { symbol: "t", unit: "s", within: [-1e22, 1e22] } as const;
+const shining = { ...stellarFlux.card.inputs.luminosity, within: [1, 1e40] } as const;
+export const BRIGHTENING_PORTS = {
+  time: { ...time, about: "time of an entry of the table, rising" },
+  luminosity: {
+    ...shining,
+    about: "luminosity of the star at that time, or its share of any one luminosity",
+  },
+  now: { ...time, about: "time of today in the table" },
+} as const;
+/** Luminosities of a table as shares of any one of them. */
+export const RELATIVE_LUMINOSITY = {
+  ...BRIGHTENING_PORTS.luminosity,
+  unit: "1",
+  within: [1e-9, 1e9],
+} as const;
+
 /** Fields of `orbit`. */
 export const ORBIT_PORTS = {
   semiMajorAxis: { ...stellarFlux.card.inputs.distance, about: "semi-major axis" },

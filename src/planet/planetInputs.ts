@@ -1,5 +1,6 @@
 // Every numeric value of a description, read in SI under its path.
 import type { ListPort, Port, Ports } from "../graph/card.ts";
+import { isTable, tableReadings } from "./brighteningTable.ts";
 import { allOf } from "./faults.ts";
 import { isDifference, isLaw, lawNamed } from "./fieldLaws.ts";
 import {
@@ -20,7 +21,7 @@ import {
 } from "./fieldPorts.ts";
 import { type PlanetInput, readInput, type Written, writtenAs } from "./planetInput.ts";
 import type { PlanetDescription } from "./planetShape.ts";
-import { starsOf } from "./stars.ts";
+import { type DescribedStar, starsOf } from "./stars.ts";
 
 /** A value that is still to be read. */
 type Reading = () => PlanetInput;
@@ -28,7 +29,7 @@ type Reading = () => PlanetInput;
 /** Reads all values of a description. Throws the error of the first that is wrong, with those of the others. */
 export function planetInputs(d: PlanetDescription): PlanetInput[] {
   return allOf([
-    ...starsOf(d).flatMap(({ path, star }) => inputsIn(path, STAR_PORTS, star)),
+    ...starsOf(d).flatMap(starInputs),
     ...inputsIn("orbit", ORBIT_PORTS, d.orbit),
     ...redistributionInputs(d.redistribution),
     ...albedoInputs("albedo", ALBEDO_PORT, d.albedo),
@@ -44,6 +45,13 @@ export function planetInputs(d: PlanetDescription): PlanetInput[] {
       inputsAt(name, port, d[name as keyof typeof BODY_PORTS]),
     ),
   ]);
+}
+
+/** A brightening is a value, or a table of values. A star of a list is left out where its shape is wrong. */
+function starInputs({ path, star }: Pick<DescribedStar, "path"> & Partial<DescribedStar>): Reading[] {
+  const { brightening, ...values } = star ?? {};
+  if (!isTable(brightening)) return inputsIn(path, STAR_PORTS, star);
+  return [...inputsIn(path, STAR_PORTS, values), ...tableReadings(`${path}.brightening`, brightening)];
 }
 
 /** The fields of `record` that have a port, each with its path. */

@@ -3,8 +3,8 @@ import type { PlanetInput } from "./planetInput.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { isWhole } from "./redistribution.ts";
 
-/** Texts that no number depends on. */
-const TEXTS = ["name", "source", "notes"];
+/** Fields on which no budget depends. */
+const APART = ["name", "source", "notes", "brightening"];
 
 /**
  * The description with its values taken out: descriptions with one key close to one budget, up to the values of its givens.
@@ -16,7 +16,7 @@ export function shapeKey(description: PlanetDescription, inputs: readonly Planet
     if (values.has(path)) return 0;
     if (Array.isArray(value)) return value.map((each, i) => bare(each, `${path}[${i}]`));
     if (typeof value !== "object" || value === null) return value;
-    const fields = Object.entries(value).filter(([key]) => !TEXTS.includes(key));
+    const fields = Object.entries(value).filter(([key]) => !APART.includes(key));
     return fields.map(([key, field]) => [key, bare(field, path === "" ? key : `${path}.${key}`)]);
   };
   return JSON.stringify([isWhole(description), bare(description, "")]);

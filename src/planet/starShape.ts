@@ -1,5 +1,6 @@
 // The shape of a star, of several stars, and of the orbit.
 import { literal, optional, strictObject, string, union } from "zod/mini";
+import { brighteningShape } from "./brighteningShape.ts";
 import { ORBIT_PORTS, STAR_PORTS } from "./fieldPorts.ts";
 import { listOf } from "./listOf.ts";
 import { measuredSchema, pureSchema } from "./valueSchema.ts";
@@ -12,7 +13,7 @@ const fields = () => ({
   effectiveTemperature: optional(measuredSchema(STAR_PORTS.effectiveTemperature)),
   mass: optional(measuredSchema(STAR_PORTS.mass)),
   visibleShare: optional(pureSchema(STAR_PORTS.visibleShare)),
-  brightening: optional(measuredSchema(STAR_PORTS.brightening)),
+  brightening: optional(brighteningShape),
 });
 const WORDS = "{ luminosity } or { radius, effectiveTemperature }";
 const listed = worded(

@@ -7,11 +7,15 @@ import { QUANTITY_PATTERN } from "./quantityText.ts";
 import { LONGEST_UNIT } from "./unitText.ts";
 import { worded } from "./wording.ts";
 
-/** Error bars and the source of a value, which a description keeps. */
+/** The source of a value, which a description keeps. */
+export const sourceSchema = () =>
+  worded(string(), "a text", { description: "where the value was published" });
+
+/** Error bars and the source of a value. */
 const kept = () => ({
   minus: optional(worded(number(), "a number from 0", { minimum: 0, description: "lower error" })),
   plus: optional(worded(number(), "a number from 0", { minimum: 0, description: "upper error" })),
-  source: optional(worded(string(), "a text", { description: "where the value was published" })),
+  source: optional(sourceSchema()),
 });
 
 /** A plain number, or the same with errors and a source. */
@@ -50,7 +54,8 @@ export function valueSchema<const P extends Port>(port: P, difference = false): 
   return (port.unit === "1" ? pureSchema(port) : measuredSchema(port, difference)) as ValueSchema<P>;
 }
 
-function aboutOf({ about = "", unit, within }: Port): { description: string } {
+/** What a port is about, as the description in a JSON Schema. */
+export function aboutOf({ about = "", unit, within }: Port): { description: string } {
   const range = within ? `, ${showRange(within)}` : "";
   return { description: unit === "1" ? `${about}${range}` : `${about} (read in ${unit}${range})` };
 }

@@ -15,6 +15,8 @@ export interface Way {
   /** The inputs that it takes. */
   readonly uses: readonly string[];
   readonly of: (wire: Wire) => Value;
+  /** What may be written where it gives something else. */
+  readonly instead?: string;
 }
 
 /** The input at a path as it is. */

@@ -154,4 +154,23 @@ describe("a brightening star", () => {
     );
     expect(margins({ table, now: 2e17 }).rise.time).toBeNull();
   });
+
+  test("that fades instead, with a rate or a table", () => {
+    const { end } = margins({ mass: SUN }).fall;
+    expect(end.kind).toBe("fold");
+    const less = 1 - end.at / 1361;
+    expect(margins({ rate: -1e-18 }).fall.time).toBeCloseTo(less / 1e-18, -6);
+    expect(margins({ rate: 1e-18 }).fall.time).toBeNull();
+    // a star that fades by a tenth in 1e17 s and brightens afterwards, twice as fast
+    const table = [2, 1, 0.8, 1.6].map((luminosity, i) => ({ time: i * 2e17, luminosity }));
+    const { fall, rise } = margins({ table, now: 2e17 });
+    expect(fall.time).toBeCloseTo((less / 0.2) * 2e17, -6);
+    expect(rise.time).toBeCloseTo(2e17 + ((factor - 0.8) / 0.8) * 2e17, -6);
+    const dark = table.map(({ time }, i) => ({ time, luminosity: i }));
+    expect(refusal(() => margins({ table: dark, now: 0 }))).toMatchObject({
+      ...{ code: "out-of-range", path: "brightening.now", value: 0 },
+    });
+    // from the bottom on there is no way down
+    expect(margins({ table, now: 4e17 }).fall.time).toBeNull();
+  });
 });

@@ -22,11 +22,12 @@ export interface AnalyseFeedbacksOptions<N extends string = string> {
  * The direct path is the reference response λ₀. By the chain rule λ₀ + Σ λ_i = λ = ∂N/∂T.
  *
  * Feedback factors f_i = λ_i/(−λ₀); gain 1/(1 − Σ f); sensitivities −1/λ and dT/dp = −(∂N/∂p)/λ; times −C/λ. λ in
- * W m⁻² K⁻¹, negative where it restores. Bounds are proved over the state's bracket unless a law is sampled. Laws, helper
- * quantities and names that are not couplings change nothing, and a coarser choice of couplings sums a finer one.
+ * W m⁻² K⁻¹, negative where it restores. Every number has proved bounds over the state's bracket, in the field of its name
+ * with `Range`, unless a law is sampled; nothing is divided by what these bounds do not tell from 0. Laws, helper quantities
+ * and names that are not couplings change nothing, and a coarser choice of couplings sums a finer one.
  *
  * Throws `unknown-name` (with the nearest coupling), `foreign-state`, `several-variables`, `unreadable`, `missing`,
- * `not-a-number`, `out-of-range`. Source: Roe 2009, Annu. Rev. Earth Planet. Sci. 37, 93; the sign of λ is that of the
+ * `not-a-number`, `not-finite` (a slope at the state), `out-of-range`. Source: Roe 2009, Annu. Rev. Earth Planet. Sci. 37, 93; the sign of λ is that of the
  * IPCC's sixth report.
  *
  * @example analyseFeedbacks(loop, state).loops // [{ through: ["opticalDepth"], feedbackParameter: 0.683, … }, …]

@@ -1,19 +1,50 @@
-// Bounds of products and differences of numbers that are known within bounds; every result is moved outwards.
+// Numbers that carry proved bounds with them, and their arithmetic; every bound is moved outwards.
 import type { Range } from "../ground/range.ts";
-import { above, below } from "../search/enclosed.ts";
+import { minus, over, plus, times } from "../search/interval.ts";
 
 /** Bounds, or `null` where nothing is known. */
 export type Bounds = Range | null;
 
-const hull = (values: readonly number[]): Bounds =>
-  values.every(Number.isFinite) ? [below(Math.min(...values)), above(Math.max(...values))] : null;
+/** A number with its bounds. */
+export interface Bounded {
+  readonly value: number;
+  readonly bounds: Bounds;
+}
 
-/** Bounds of x·y. */
-export const productOf = (x: Bounds, y: Bounds): Bounds =>
-  x && y && hull([x[0] * y[0], x[0] * y[1], x[1] * y[0], x[1] * y[1]]);
+/** A number without error. */
+export const exactly = (value: number): Bounded => ({ value, bounds: [value, value] });
 
-/** Bounds of x − y. */
-export const differenceOf = (x: Bounds, y: Bounds): Bounds => x && y && hull([x[0] - y[1], x[1] - y[0]]);
+const finite = (range: Range): Bounds =>
+  Number.isFinite(range[0]) && Number.isFinite(range[1]) ? range : null;
+const isZero = (range: Range): boolean => range[0] === 0 && range[1] === 0;
 
-/** Whether no number within the bounds is 0. */
-export const excludesZero = ([low, high]: Range): boolean => low > 0 || high < 0;
+/** −x. */
+export const negative = ({ value, bounds }: Bounded): Bounded => ({
+  value: -value,
+  bounds: bounds && minus(bounds),
+});
+
+/** x·y. */
+export const product = (x: Bounded, y: Bounded): Bounded => ({
+  value: x.value * y.value,
+  bounds: x.bounds && y.bounds && finite(times(x.bounds, y.bounds)),
+});
+
+/** x − y. */
+export const difference = (x: Bounded, y: Bounded): Bounded => ({
+  value: x.value - y.value,
+  bounds: x.bounds && y.bounds && finite(plus(x.bounds, minus(y.bounds))),
+});
+
+/** x/y; no bounds where y may be 0. Zero over anything else stays zero. */
+export function quotient(x: Bounded, y: Bounded): Bounded {
+  const bounds = x.bounds && y.bounds && finite(over(x.bounds, y.bounds));
+  return { value: x.value / y.value, bounds: bounds && isZero(x.bounds as Range) ? x.bounds : bounds };
+}
+
+/** The number as it is given away: `null` where there is none, and without −0, which JSON does not keep. */
+export const numberOf = (x: Bounded | null): number | null => x && 0 + x.value;
+
+/** Its bounds, as they are given away. */
+export const rangeOf = (x: Bounded | null): Bounds =>
+  x?.bounds ? Object.freeze([0 + x.bounds[0], 0 + x.bounds[1]] as const) : null;

@@ -4,6 +4,7 @@ import type { Note } from "../states/note.ts";
 /** What such a note is about; the list is closed. */
 export type FeedbackNoteCode =
   | "sampled-law"
+  | "outside-range"
   | "no-feedback-factors"
   | "no-gain"
   | "stability-unknown"

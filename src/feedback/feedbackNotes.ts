@@ -1,43 +1,67 @@
 // The cautions of an analysis of feedbacks: why something is null, and what the numbers are not.
 import type { Loop } from "../loop/types.ts";
+import type { Bounded } from "./bounds.ts";
 import { type FeedbackNote, feedbackNote } from "./feedbackNote.ts";
-import type { Bounded } from "./influences.ts";
+import type { KnownSign } from "./signs.ts";
 
 const UNIT = "W m-2 K-1";
 
-/** The notes of an analysis. `count`: how many feedback loops there are; `listed`: how many are listed one by one. */
-export function notesOf(
-  loop: Loop,
-  {
-    reference,
-    total,
-    isKnown,
-    count,
-    listed,
-  }: { reference: Bounded; total: Bounded; isKnown: boolean; count: number; listed: number },
-): FeedbackNote[] {
+/** What an analysis found that may need a caution. */
+export interface Found {
+  readonly total: Bounded;
+  readonly sign: KnownSign;
+  readonly reference: Bounded;
+  readonly referenceSign: KnownSign;
+  readonly heatCapacity: Bounded;
+  /** The feedback loops without which λ has no known sign. */
+  readonly undecided: readonly (readonly string[])[];
+  /** How many feedback loops there are, and how many are listed one by one. */
+  readonly count: number;
+  readonly listed: number;
+}
+
+/** The notes of an analysis. */
+export function notesOf(loop: Loop, found: Found): FeedbackNote[] {
+  const { total, sign, reference, referenceSign, heatCapacity, undecided, count, listed } = found;
   const notes: FeedbackNote[] = [];
+  const caution = (code: FeedbackNote["code"], about: string, text: string, value: number, unit: string) =>
+    notes.push(feedbackNote(code, "caution", { about, text, value, unit }));
+  const why = loop.sampled
+    ? "is no larger than the rounding of difference quotients"
+    : "has no sign that its bounds prove";
   if (loop.sampled) {
-    const text = "a law is an ordinary function: its slopes are difference quotients, and nothing is proved";
+    const text =
+      "a law is an ordinary function: its slopes are difference quotients, there are no bounds, and nothing is proved";
     notes.push(feedbackNote("sampled-law", "caution", { about: "feedbackParameter", text }));
   }
-  if (!isKnown) {
-    const text =
-      "λ cannot be told from 0, so nothing is divided by it: times, sensitivities and gain are null";
-    const about = "feedbackParameter";
-    notes.push(feedbackNote("stability-unknown", "caution", { about, text, value: total.value, unit: UNIT }));
+  if (sign === 0) {
+    const text = `λ ${why}, so nothing is divided by it: times, sensitivities and gain are null`;
+    caution("stability-unknown", "feedbackParameter", text, total.value, UNIT);
   }
-  if (!(reference.value < 0)) {
-    const text =
-      "the reference response does not restore, so that feedback factors and a gain have no meaning";
-    const about = "reference";
-    const { value } = reference;
-    notes.push(feedbackNote("no-feedback-factors", "caution", { about, text, value, unit: UNIT }));
-  } else if (isKnown && total.value > 0) {
+  if (referenceSign >= 0) {
+    const what = referenceSign > 0 || reference.value === 0 ? "does not restore" : why;
+    const text = `the reference response ${what}, so that feedback factors and a gain have no meaning`;
+    caution("no-feedback-factors", "reference", text, reference.value, UNIT);
+  } else if (sign > 0) {
     const text =
       "the feedbacks outweigh the reference response (Σ f ≥ 1), so there is no gain; dT/dp still holds along this unstable branch";
+    caution("no-gain", "gain", text, 1 - total.value / reference.value, "1");
+  }
+  if (sign > 0 && referenceSign >= 0) {
+    const text = "an unstable branch: no climate stays on it, though dT/dp still holds along it";
+    caution("unstable-branch", "feedbackParameter", text, total.value, UNIT);
+  }
+  for (const through of undecided) {
+    const text = `without this feedback loop λ ${why}, so its times are null`;
+    const about = `without ${through.join(" → ")}`;
+    notes.push(feedbackNote("stability-unknown", "caution", { about, text }));
+  }
+  if (heatCapacity.value < 0) {
+    const text = "outside the range in which it has a meaning, 0 and above: there are no times";
     notes.push(
-      feedbackNote("no-gain", "caution", { about: "gain", text, value: 1 - total.value / reference.value }),
+      feedbackNote("outside-range", "invalid", {
+        ...{ about: "heatCapacity", text, value: heatCapacity.value, unit: "J m-2 K-1" },
+      }),
     );
   }
   if (count > listed) {

@@ -2,19 +2,14 @@
 
 import { adjoint } from "../graph/adjoint.ts";
 import { derivative } from "../graph/derivative.ts";
+import { fail } from "../ground/errors.ts";
 import type { Taken } from "../loop/checkBelongs.ts";
 import { inputsOf, rangesOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { rangeAt } from "../search/interval.ts";
-import type { Bounds } from "./bounds.ts";
-
-/** A number with its proved bounds. */
-export interface Bounded {
-  readonly value: number;
-  readonly bounds: Bounds;
-}
+import type { Bounded, Bounds } from "./bounds.ts";
 
 /** ∂ to / ∂ from. 0 is temperature, 1 to k are the chosen couplings in the order of the graph, k + 1 is the net flux. */
 export interface Influence extends Bounded {
@@ -28,9 +23,9 @@ export interface Influences {
   readonly edges: readonly Influence[];
   /** λ, taken along all ways at once. */
   readonly total: Bounded;
-  readonly heatCapacity: number;
+  readonly heatCapacity: Bounded;
   /** ∂N/∂p of every given, W m⁻² per unit. */
-  readonly givens: readonly number[];
+  readonly givens: readonly Bounded[];
 }
 
 /**
@@ -52,33 +47,55 @@ export function influencesOf(loop: Loop, chosen: readonly number[]): (at: Taken)
   });
   const total = derivative(graph, net, temperature, inputs);
   const givens = adjoint(graph, net, inputs).slice(loop.variables.length);
-  const bounded = [total, ...edges.map((e) => e.node)];
-  const outputs = [...bounded, heatCapacity, ...givens];
+  const outputs = [total, ...edges.map((e) => e.node), heatCapacity, ...givens];
   const kernel = valueKernel(graph, { inputs, outputs });
-  const boundsAt = loop.sampled ? undefined : boundsReader(loop, inputs, bounded);
+  const boundsAt = loop.sampled ? undefined : boundsReader(loop, inputs, outputs);
   const out = new Float64Array(outputs.length);
+  const failAt = (i: number): never => {
+    const names = [
+      "temperature",
+      ...chosen.map((c) => loop.couplings.find((k) => k.node === c)?.name),
+      "net",
+    ];
+    const slopes = edges.map(({ from, to }) => `∂${names[to]}/∂${names[from]}`);
+    const asked = [
+      "∂net/∂temperature",
+      ...slopes,
+      "heatCapacity",
+      ...loop.givens.map((g) => `∂net/∂${g.name}`),
+    ];
+    return fail("not-finite", { path: `state: ${asked[i]}`, value: out[i], allowed: "a finite number" });
+  };
   return (at) => {
     kernel(at.values, out);
-    const bounds = boundsAt?.(at) ?? [];
-    const read = (i: number): Bounded => ({ value: out[i] as number, bounds: bounds[i] ?? null });
+    for (let i = 0; i < out.length; i++) if (!Number.isFinite(out[i])) failAt(i);
+    const bounds = boundsAt?.(at);
+    const all = outputs.map((_, i): Bounded => ({ value: out[i] as number, bounds: bounds?.[i] ?? null }));
+    const read = (i: number) => all[i] as Bounded;
     return {
       edges: edges.map(({ from, to }, i) => ({ from, to, ...read(1 + i) })),
       total: read(0),
-      heatCapacity: out[bounded.length] as number,
-      givens: [...out.subarray(bounded.length + 1)],
+      heatCapacity: read(1 + edges.length),
+      givens: all.slice(2 + edges.length),
     };
   };
 }
 
+/** Bounds over the bracket of a state, where they are finite. A constant has no error. */
 function boundsReader(loop: Loop, inputs: readonly number[], outputs: readonly number[]) {
+  const { graph } = loop;
   const wide = new Set(loop.variables.map((v) => v.node));
-  const kernel = enclosureKernel(loop.graph, { inputs, outputs, wide, ranges: rangesOf(loop) });
+  const constants = outputs.map((node): Bounds => {
+    const value = graph.values[node] as number;
+    return graph.ops[node] === "const" ? [value, value] : null;
+  });
+  const kernel = enclosureKernel(graph, { inputs, outputs, wide, ranges: rangesOf(loop) });
   const out = new Float64Array(3 * outputs.length);
   return ({ low, high }: Taken): Bounds[] => {
     kernel(low, high, out);
-    return outputs.map((_, i) => {
-      const bounds = rangeAt(out, i);
-      return bounds.every(Number.isFinite) ? bounds : null;
+    return constants.map((constant, i) => {
+      const bounds = constant ?? rangeAt(out, i);
+      return Number.isFinite(bounds[0]) && Number.isFinite(bounds[1]) ? bounds : null;
     });
   };
 }

@@ -1,12 +1,10 @@
 // The paths from temperature to the net flux, strongest first, without walking all of them.
-import { type Bounds, productOf } from "./bounds.ts";
+import { type Bounded, exactly, product } from "./bounds.ts";
 import type { Influence } from "./influences.ts";
 
 /** A path through couplings, and the product of its influences. */
-export interface Path {
+export interface Path extends Bounded {
   readonly through: readonly number[];
-  readonly value: number;
-  readonly bounds: Bounds;
 }
 
 /** The strongest paths, and how many there are in all. */
@@ -23,7 +21,7 @@ export interface Paths {
 export function strongestPaths(edges: readonly Influence[], end: number, most: number): Paths {
   const paths: Path[][] = Array.from({ length: end + 1 }, () => []);
   const counts = new Float64Array(end + 1);
-  paths[0] = [{ through: [], value: 1, bounds: [1, 1] }];
+  paths[0] = [{ through: [], ...exactly(1) }];
   counts[0] = 1;
   for (let place = 1; place <= end; place++) {
     const here: Path[] = [];
@@ -40,8 +38,7 @@ export function strongestPaths(edges: readonly Influence[], end: number, most: n
 function goOn(path: Path, edge: Influence, end: number): Path {
   return {
     through: edge.to === end ? path.through : [...path.through, edge.to],
-    value: path.value * edge.value,
-    bounds: productOf(path.bounds, edge.bounds),
+    ...(edge.from === 0 ? { value: edge.value, bounds: edge.bounds } : product(path, edge)),
   };
 }
 

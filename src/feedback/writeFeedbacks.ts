@@ -2,17 +2,17 @@
 import { compensatedSum } from "../ground/sum.ts";
 import type { Taken } from "../loop/checkBelongs.ts";
 import type { Loop } from "../loop/types.ts";
-import { type Bounds, differenceOf, excludesZero } from "./bounds.ts";
+import { type Bounded, difference, exactly, negative, numberOf, quotient, rangeOf } from "./bounds.ts";
+import { disturbanceTimes } from "./disturbanceTimes.ts";
 import { notesOf } from "./feedbackNotes.ts";
-import type { DisturbanceTimes, FeedbackLoop, FeedbackPart, Feedbacks } from "./feedbacks.ts";
-import type { Bounded, Influences } from "./influences.ts";
+import type { FeedbackLoop, FeedbackPart, Feedbacks } from "./feedbacks.ts";
+import type { Influences } from "./influences.ts";
 import type { ReferenceName } from "./referenceResponse.ts";
+import { effectOf, signReader } from "./signs.ts";
 import { strongestPaths } from "./strongestPaths.ts";
 
 /** More feedback loops than this are not listed one by one. */
 const MOST_LOOPS = 64;
-/** λ of a sampled loop below this share of its parts is rounding. */
-const SLOPE_NOISE = 1e-12;
 
 /** What was read of a state. */
 export interface Read {
@@ -31,75 +31,95 @@ export function writeFeedbacks<N extends string>(
 ): Feedbacks<N> {
   const { total, heatCapacity, edges } = influences;
   const isDirect = (e: { from: number; to: number }) => e.from === 0 && e.to === end;
-  const reference: Bounded = edges.find(isDirect) ?? { value: 0, bounds: [0, 0] };
+  const reference = edges.find(isDirect) ?? (loop.sampled ? { value: 0, bounds: null } : exactly(0));
   const paths = strongestPaths(
     edges.filter((e) => !isDirect(e)),
     end,
     MOST_LOOPS,
   );
-  const partOf = partWriter(reference);
   const size = paths.strongest.reduce((sum, p) => sum + Math.abs(p.value), Math.abs(reference.value));
-  const isKnown = signKnown(total, SLOPE_NOISE * size);
-  const timesOf = (lambda: Bounded) => disturbanceTimes(lambda, heatCapacity, SLOPE_NOISE * size);
-  const loops = paths.strongest.map((path): FeedbackLoop<N> => {
-    const rest = {
-      value: total.value - path.value,
-      bounds: loop.sampled ? null : differenceOf(total.bounds, path.bounds),
-    };
+  const signOf = signReader(loop.sampled, size);
+  const [sign, referenceSign] = [signOf(total), signOf(reference)];
+  const partOf = partWriter(referenceSign < 0 ? negative(reference) : null);
+  const withouts = paths.strongest.map((path) => difference(total, path));
+  const loops = paths.strongest.map((path, i): FeedbackLoop<N> => {
+    const without = withouts[i] as Bounded;
     return Object.freeze({
       through: Object.freeze(path.through.map((place) => chosen[place - 1] as string)) as never,
       ...partOf(path),
-      effect: path.value > 0 ? "amplifies" : path.value < 0 ? "counters" : "none",
-      without: Object.freeze({ feedbackParameter: rest.value, ...timesOf(rest) }),
+      effect: effectOf(path, signOf(path)),
+      without: Object.freeze({
+        feedbackParameter: 0 + without.value,
+        feedbackParameterRange: rangeOf(without),
+        ...disturbanceTimes(without, heatCapacity, signOf(without)),
+      }),
     });
   });
   const others = othersOf(total, [reference, ...paths.strongest], paths.count - loops.length, partOf);
   const parts = [reference.value, ...loops.map((l) => l.feedbackParameter), others?.feedbackParameter ?? 0];
-  const factor = reference.value < 0 ? 1 - total.value / reference.value : null;
-  const gain = factor !== null && isKnown && total.value < 0 ? reference.value / total.value : null;
+  const factor = referenceSign < 0 ? difference(exactly(1), quotient(total, reference)) : null;
+  const gain = referenceSign < 0 && sign < 0 ? quotient(reference, total) : null;
+  const sensitivity = sign === 0 ? null : quotient(exactly(-1), total);
   const givens = at.values.subarray(loop.variables.length);
   return Object.freeze({
     temperature: at.values[0] as number,
     givens: record(loop.givens, (i) => givens[i] as number) as Feedbacks<N>["givens"],
     through: Object.freeze([...chosen]) as never,
-    feedbackParameter: total.value,
-    feedbackParameterRange: frozen(total.bounds),
-    settledFeedbackParameter: total.value,
+    feedbackParameter: 0 + total.value,
+    feedbackParameterRange: rangeOf(total),
+    settledFeedbackParameter: 0 + total.value,
     reference: Object.freeze({
-      kind: reference.value < 0 ? name.kind : "reference response",
-      feedbackParameter: reference.value,
-      feedbackParameterRange: loop.sampled ? null : frozen(reference.bounds),
+      kind: referenceSign < 0 ? name.kind : "reference response",
+      feedbackParameter: 0 + reference.value,
+      feedbackParameterRange: rangeOf(reference),
       text: name.text,
       contains: Object.freeze([...name.contains]) as never,
     }),
     loops: Object.freeze(loops),
     others,
     residual: compensatedSum([...parts, -total.value]),
-    feedbackFactor: factor,
-    gain,
-    sensitivity: isKnown ? -1 / total.value : null,
+    feedbackFactor: numberOf(factor),
+    feedbackFactorRange: rangeOf(factor),
+    gain: numberOf(gain),
+    gainRange: rangeOf(gain),
+    sensitivity: numberOf(sensitivity),
+    sensitivityRange: rangeOf(sensitivity),
     responses: record(loop.givens, (i, { unit }) => {
-      const flux = 0 + (influences.givens[i] as number);
-      return Object.freeze({ flux, temperature: isKnown ? 0 - flux / total.value : null, unit });
+      const flux = influences.givens[i] as Bounded;
+      const temperature = sign === 0 ? null : negative(quotient(flux, total));
+      return Object.freeze({
+        flux: 0 + flux.value,
+        fluxRange: rangeOf(flux),
+        temperature: numberOf(temperature),
+        temperatureRange: rangeOf(temperature),
+        unit,
+      });
     }) as Feedbacks<N>["responses"],
-    ...timesOf(total),
-    proved: isKnown && !loop.sampled,
+    ...disturbanceTimes(total, heatCapacity, sign),
+    proved: sign !== 0 && !loop.sampled,
     notes: Object.freeze(
-      notesOf(loop, { reference, total, isKnown, count: paths.count, listed: loops.length }),
+      notesOf(loop, {
+        ...{ total, sign, reference, referenceSign, heatCapacity },
+        undecided: loops.filter((_, i) => signOf(withouts[i] as Bounded) === 0).map((l) => l.through),
+        count: paths.count,
+        listed: loops.length,
+      }),
     ),
   });
 }
 
-const frozen = (bounds: Bounds): Bounds => bounds && Object.freeze([0 + bounds[0], 0 + bounds[1]] as const);
-
-/** The fields that every part of λ has. Adding 0 turns −0, which JSON does not keep, into 0. */
+/** Writes the fields that every part of λ has; `under`: −λ₀, where there are factors. */
 const partWriter =
-  (reference: Bounded) =>
-  ({ value, bounds }: Bounded): FeedbackPart => ({
-    feedbackParameter: 0 + value,
-    feedbackParameterRange: frozen(bounds),
-    feedbackFactor: reference.value < 0 ? 0 + value / -reference.value : null,
-  });
+  (under: Bounded | null) =>
+  (part: Bounded): FeedbackPart => {
+    const factor = under && quotient(part, under);
+    return {
+      feedbackParameter: 0 + part.value,
+      feedbackParameterRange: rangeOf(part),
+      feedbackFactor: numberOf(factor),
+      feedbackFactorRange: rangeOf(factor),
+    };
+  };
 
 function othersOf(
   total: Bounded,
@@ -109,25 +129,15 @@ function othersOf(
 ): Feedbacks["others"] {
   if (count <= 0) return null;
   const value = compensatedSum([total.value, ...listed.map((p) => -p.value)]);
-  const bounds = listed.reduce<Bounds>((rest, p) => differenceOf(rest, p.bounds), total.bounds);
+  const { bounds } = listed.reduce(difference, total);
   return Object.freeze({ count, ...partOf({ value, bounds }) });
-}
-
-/** True if λ has a sign: a proved one, or for a sampled loop one beyond rounding. */
-const signKnown = ({ value, bounds }: Bounded, noise: number): boolean =>
-  bounds ? excludesZero(bounds) : Math.abs(value) > noise;
-
-function disturbanceTimes(lambda: Bounded, heatCapacity: number, noise: number): DisturbanceTimes {
-  if (!(heatCapacity >= 0) || !signKnown(lambda, noise)) return { eFoldingTime: null, growthTime: null };
-  const time = heatCapacity / Math.abs(lambda.value);
-  return lambda.value < 0
-    ? { eFoldingTime: time, growthTime: null }
-    : { eFoldingTime: null, growthTime: time };
 }
 
 function record<R extends { readonly name: string }, V>(
   list: readonly R[],
   value: (index: number, r: R) => V,
 ): Readonly<Record<string, V>> {
-  return Object.freeze(Object.fromEntries(list.map((r, i) => [r.name, value(i, r)])));
+  const made: Record<string, V> = {};
+  for (let i = 0; i < list.length; i++) made[(list[i] as R).name] = value(i, list[i] as R);
+  return Object.freeze(made);
 }

@@ -245,7 +245,13 @@ describe("the bars of feedbacks", () => {
   });
 
   test("loops that are not listed are one bar more", () => {
-    const others = { count: 7, feedbackParameter: 0.25, feedbackParameterRange: null, feedbackFactor: null };
+    const others = {
+      count: 7,
+      feedbackParameter: 0.25,
+      feedbackParameterRange: null,
+      feedbackFactor: null,
+      feedbackFactorRange: null,
+    };
     expect(texts(feedbackBars({ ...feedbacks, others }))).toContain("+0.25  weaker loops: 7");
   });
 });

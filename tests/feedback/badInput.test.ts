@@ -184,7 +184,8 @@ describe("compareHeld", () => {
     expect(compareHeld(idle, options)).toMatchObject({ regulation: null, proof: "proved", lost: [] });
     expect(Math.abs(compareHeld(idle, options).temperatureChange ?? 1)).toBeLessThan(1e-11);
     const { responses } = analyseFeedbacks(idle, from as never);
-    expect(responses).toEqual({ idle: { flux: 0, temperature: 0, unit: "m" } });
+    const nothing = { flux: 0, fluxRange: [0, 0], temperature: 0, temperatureRange: [0, 0] };
+    expect(responses).toEqual({ idle: { ...nothing, unit: "m" } });
   });
 });
 

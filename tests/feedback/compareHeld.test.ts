@@ -116,7 +116,10 @@ describe("a branch that ends", () => {
       text: "no flow answers to temperature except through the chosen couplings",
     });
     expect(feedbacks).toMatchObject({ gain: null, feedbackFactor: null });
-    expect(feedbacks.notes.map((n) => n.code)).toEqual(["no-feedback-factors"]);
+    expect(feedbacks.notes.map(({ code, about }) => [code, about])).toEqual([
+      ["no-feedback-factors", "reference"],
+      ["stability-unknown", "without longwave"],
+    ]);
     // with C = 0 temperature follows at once
     expect(feedbacks.eFoldingTime).toBe(0);
   });

@@ -198,6 +198,22 @@ describe("branches", () => {
     expect(branches[0]?.parameters).toEqual([900, expect.closeTo(high, 8)]);
   });
 
+  test("a basin ends at the leap where it is at the state's own parameters, if it is there", () => {
+    const loop = iceLoop();
+    const basinAt = (along: "threshold" | "flux", at: number, between: readonly [number, number]) => {
+      const { states } = findStates(loop, { within: WITHIN, at: { [along]: at } });
+      const [cold] = states as [(typeof states)[number]];
+      return core.tippingMargins(loop, cold, { along, between, within: WITHIN }).basin;
+    };
+    for (const threshold of [258, 262, 275])
+      expect(basinAt("threshold", threshold, [240, 300])).toEqual({
+        coldest: null,
+        hottest: expect.closeTo(threshold, 8),
+      });
+    // below 960 W m⁻² the balance keeps its sign across the leap
+    expect(basinAt("flux", 930, [900, 1500])).toEqual({ coldest: null, hottest: null });
+  });
+
   test("along the threshold: the leap where it lies between both states", () => {
     const diagram = traceBranches(iceLoop(), {
       along: "threshold",

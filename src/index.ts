@@ -34,12 +34,14 @@ export type {
 } from "./branches/diagram.ts";
 export type {
   Cusp,
+  FoldChange,
   FoldCurve,
   FoldCurveEnd,
   FoldDiagram,
   FoldMeeting,
   FoldPoint,
   FoldTouch,
+  UndecidedFolds,
 } from "./branches/foldDiagram.ts";
 export { type FollowedState, type FollowStateOptions, followState } from "./branches/followState.ts";
 export type { Margin, TippingMargins, TippingMarginsOptions } from "./branches/margins.ts";

@@ -7,6 +7,7 @@ import {
   commonOf,
   type FoldTube,
   foldIn,
+  foldOn,
   foldTube,
   isPart,
   isWithin,
@@ -54,7 +55,7 @@ export function foldChains(system: FoldSystem, space: Space) {
     let sinceInside = 0;
     for (let i = 0; i < MOST_TUBES; i++) {
       const here = last ? sectionOf(system, last, q) : undefined;
-      const at = last ? system.fold(placeIn(last, q)) : start;
+      const at = last ? foldOn(system, last, q) : start;
       const cap = here && capAt(here);
       if (cap) return { tubes, end: { kind: cap.kind, at: cap.at, atBracket: cap.atBracket, cap } };
       // a gap is what is left of a meeting that is not proved; beyond it nothing is followed twice

@@ -17,6 +17,7 @@ import {
 import { commonOf } from "./foldTube.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
+import type { OpenBox } from "./undecidedFolds.ts";
 
 /** What is known of the folds. */
 export interface KnownFolds {
@@ -45,14 +46,14 @@ export function foldCover(
   known: KnownFolds,
   found: (place: FoldPlace) => void,
   effort: number,
-): { open: FoldBox[]; boxes: number } {
+): { open: OpenBox[]; boxes: number } {
   const waiting: Waiting[] = [{ ...space, idle: 0 }];
-  const open: FoldBox[] = [];
+  const open: OpenBox[] = [];
   let boxes = 0;
   for (let box = waiting.pop(); box; box = waiting.pop()) {
     if (isKnown(box, known)) continue;
     if (boxes >= effort) {
-      open.push(box);
+      open.push({ ...box, spent: true });
       continue;
     }
     boxes++;
@@ -62,12 +63,12 @@ export function foldCover(
     if (idle <= 0 && !isNearSingular(read)) {
       idle = IDLE;
       const place = system.fold({ t: middleOf(box.t), p: middleOf(box.p), q: middleOf(box.q) });
-      const isHere = inside(pointAt(place.t), space.t) && inside(pointAt(place.p), space.p);
+      const isHere = place && inside(pointAt(place.t), space.t) && inside(pointAt(place.p), space.p);
       if (isHere && !isKnown(boxAt(place), known)) found(place);
       if (isKnown(box, known)) continue;
     }
     const side = widest(box, space, read);
-    if (side === undefined) open.push(box);
+    if (side === undefined) open.push({ ...box, spent: false });
     else for (const half of halves(box[side])) waiting.push({ ...box, [side]: half, idle: idle - 1 });
   }
   return { open, boxes };

@@ -2,7 +2,7 @@
 import { minus, over, plus, signOfRange, times } from "../search/interval.ts";
 import type { ChainEnd } from "./foldChain.ts";
 import type { FoldSystem } from "./foldSystem.ts";
-import { boxOf, type FoldTube, foldIn, isPart, type Plane, placeIn, sectionOf } from "./foldTube.ts";
+import { boxOf, type FoldTube, foldIn, foldOn, isPart, type Plane, sectionOf } from "./foldTube.ts";
 
 /** A fold that has left the plane: through which side, and that it did so once. */
 export function foldExit(
@@ -51,7 +51,7 @@ export function foldExit(
   }
   const at = (least + most) / 2;
   const kind = x === "t" ? "within" : "along";
-  return { kind, at: system.fold(placeIn(holds(at), at)), atBracket: [least, most], cap: null };
+  return { kind, at: foldOn(system, holds(at), at), atBracket: [least, most], cap: null };
 }
 
 /** The last place from one towards another at which something holds, to rounding. */

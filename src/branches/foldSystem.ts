@@ -3,7 +3,7 @@ import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
-import { meet, plus, times } from "../search/interval.ts";
+import { meet, plus, signOfRange, times } from "../search/interval.ts";
 import { type PlaneReader, planeReader, pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
 
@@ -98,19 +98,24 @@ export const foldSystem = /* @__PURE__ */ kept((loop, places) => {
       const { np, ntt } = middles(read(boxAt(place)));
       return { np, ntt };
     },
-    /** About the fold near a place at its q; not a number where Newton's method does not settle. */
-    fold({ t, p, q }: FoldPlace): FoldPlace {
+    /** About the fold near a place at its q; undefined where Newton's method does not settle. */
+    fold({ t, p, q }: FoldPlace): FoldPlace | undefined {
       let [u, v] = [t, p];
+      let nearly: FoldPlace | undefined;
       for (let i = 0; i < MOST_STEPS; i++) {
-        const { n, nt, np, ntt, ntp } = middles(read(boxAt({ t: u, p: v, q })));
+        const bounds = read(boxAt({ t: u, p: v, q }));
+        // rounding may keep the steps from vanishing
+        if (signOfRange(bounds.n) === 0 && signOfRange(bounds.nt) === 0) nearly = { t: u, p: v, q };
+        const { n, nt, np, ntt, ntp } = middles(bounds);
         const scale = nt * ntp - np * ntt;
         const [du, dv] = [(n * ntp - nt * np) / scale, (nt * nt - n * ntt) / scale];
         u -= du;
         v -= dv;
+        if (!Number.isFinite(u + v)) break;
         if (!(Math.abs(du) > 1e-14 * Math.abs(u) || Math.abs(dv) > 1e-14 * Math.abs(v)))
           return { t: u, p: v, q };
       }
-      return { t: Number.NaN, p: Number.NaN, q };
+      return nearly;
     },
   };
 });

@@ -16,7 +16,7 @@ export interface FoldTube {
 }
 
 const MOST_INFLATIONS = 10;
-const MOST_ENLARGEMENTS = 30;
+const MOST_ENLARGEMENTS = 60;
 /** Tubes are widened by such a factor as long as that succeeds, then by the lesser. */
 const FASTEST = 12;
 const SLOWEST = 2;
@@ -31,7 +31,7 @@ const LEAST = 1e-12;
 export function foldTube(system: FoldSystem, near: FoldPlace, q: Range): FoldTube | undefined {
   const middle = middleOf(q);
   const at = system.fold({ ...near, q: middle });
-  if (!Number.isFinite(at.t + at.p)) return undefined;
+  if (!at) return undefined;
   const start = system.read(boxAt(at));
   const m = middles(start);
   const scale = m.nt * m.ntp - m.np * m.ntt;
@@ -80,8 +80,12 @@ export function foldTube(system: FoldSystem, near: FoldPlace, q: Range): FoldTub
       ? [growT * reach[0], reach[1]]
       : [reach[0], growP * reach[1]];
     const wide = within(wider);
-    if (wide[0] < wider[0] && wide[1] < wider[1]) reach = wider;
-    else if (turn) growT = growT > SLOWEST ? SLOWEST : 1;
+    if (wide[0] < wider[0] && wide[1] < wider[1]) {
+      reach = wider;
+      // a wider tube on this side may leave room on the other
+      if (turn) growP = Math.max(growP, SLOWEST);
+      else growT = Math.max(growT, SLOWEST);
+    } else if (turn) growT = growT > SLOWEST ? SLOWEST : 1;
     else growP = growP > SLOWEST ? SLOWEST : 1;
   }
   return { q, at, along, reach, core };
@@ -117,6 +121,13 @@ export const placeIn = ({ at, along }: FoldTube, q: number): FoldPlace => ({
   ...{ t: at.t + along[0] * (q - at.q), p: at.p + along[1] * (q - at.q) },
   q,
 });
+
+/** The same, closer where Newton's method settles in the tube. */
+export function foldOn(system: FoldSystem, tube: FoldTube, q: number): FoldPlace {
+  const about = placeIn(tube, q);
+  const place = system.fold(about);
+  return place && isWithin(boxAt(place), boxOf(tube, pointAt(q))) ? place : about;
+}
 
 /** Ranges of temperature and of the first given. */
 export type Plane = Pick<FoldBox, "t" | "p">;

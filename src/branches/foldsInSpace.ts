@@ -1,14 +1,14 @@
 // The folds in two givens of any loop, in ranges of both: followed in tubes, and proved to be all.
-import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { FoldCap } from "./foldCap.ts";
 import type { ChainEnd, FoldChain } from "./foldChain.ts";
 import { foldChains, type Space } from "./foldChains.ts";
 import { foldCover } from "./foldCover.ts";
-import type { FoldCurve, FoldMeeting, FoldPoint, FoldTouch } from "./foldDiagram.ts";
+import type { FoldCurve, FoldMeeting, FoldPoint, FoldTouch, UndecidedFolds } from "./foldDiagram.ts";
 import { type FoldPlace, type FoldSystem, foldSystem } from "./foldSystem.ts";
 import type { FoldParts } from "./foldsOnLine.ts";
-import { placeIn } from "./foldTube.ts";
+import { foldOn } from "./foldTube.ts";
+import { joinedUndecided, lostEnd, openBox } from "./undecidedFolds.ts";
 
 /** Which givens (their places), where, and how hard. */
 export interface SpaceTask {
@@ -40,11 +40,13 @@ export function foldsInSpace(loop: Loop, { places, space, givens, effort }: Spac
     );
     return { cap, pair };
   });
-  const undecided: Range[] = [
-    ...open.map((box) => box.q),
-    ...chains.flatMap(({ chain: { low, high } }) => [low, high].filter(isOpen).map((end) => end.atBracket)),
+  const undecided: UndecidedFolds[] = [
+    ...open.map((box) => openBox(system, box)),
+    ...chains.flatMap(({ chain: { low, high } }) => [low, high].filter(isOpen).map(lostEnd)),
     // the proof of a meeting says that there are two
-    ...meetings.filter(({ pair }) => pair.length !== 2).map(({ cap }) => cap.box.q),
+    ...meetings
+      .filter(({ pair }) => pair.length !== 2)
+      .map(({ cap }): UndecidedFolds => ({ and: cap.box.q, temperatures: cap.box.t, kind: "count" })),
   ];
   const proved = meetings.filter(({ pair }) => pair.length === 2);
   const of = (kinds: readonly FoldCap["kind"][]) =>
@@ -56,7 +58,8 @@ export function foldsInSpace(loop: Loop, { places, space, givens, effort }: Spac
     touches: of(["isola", "transcritical"]).map(({ cap, pair }) =>
       Object.freeze({ kind: cap.kind as FoldTouch["kind"], ...meetingOf(cap, pair) }),
     ),
-    undecided: joined(undecided),
+    changes: [],
+    undecided: joinedUndecided(undecided),
     cost: { boxes, points: 0 },
   };
 }
@@ -76,29 +79,18 @@ function curveOf(system: FoldSystem, { tubes, low, high }: FoldChain): FoldCurve
   const [from, to] = [low, high].map((end) => (end.cap ? end.cap.at.q : end.at.q)) as [number, number];
   const inner = tubes
     .flatMap((tube) =>
-      POINTS.map((share) => system.fold(placeIn(tube, tube.q[0] + share * (tube.q[1] - tube.q[0])))),
+      POINTS.map((share) => foldOn(system, tube, tube.q[0] + share * (tube.q[1] - tube.q[0]))),
     )
-    .filter(({ t, q }) => q > from && q < to && Number.isFinite(t));
+    .filter(({ q }) => q > from && q < to);
   const middle = inner[Math.floor(inner.length / 2)] ?? low.at;
   // N = N_TT·(T − T₀)²/2 + N_p·(p − p₀) near the fold
   const { np, ntt } = system.signs(middle);
-  const ends = [low, high].map(({ at }) => at).filter(({ t }) => Number.isFinite(t)) as FoldPlace[];
-  const points = [...ends.filter((e) => e === low.at), ...inner, ...ends.filter((e) => e !== low.at)];
+  const points = from < to ? [low.at, ...inner, high.at] : [low.at];
   return Object.freeze({
+    kind: "fold",
     exists: np * ntt < 0 ? "above" : "below",
     range: Object.freeze([from, to] as const),
     ends: Object.freeze([low.kind, high.kind] as const),
     points: Object.freeze(points.map(pointOf)),
   });
-}
-
-/** Overlapping ranges as one, by rising value. */
-function joined(ranges: readonly Range[]): Range[] {
-  const apart: Range[] = [];
-  for (const next of [...ranges].sort((a, b) => a[0] - b[0])) {
-    const last = apart.at(-1);
-    if (last && next[0] <= last[1]) apart[apart.length - 1] = [last[0], Math.max(last[1], next[1])];
-    else apart.push([next[0], next[1]]);
-  }
-  return apart.map((r) => Object.freeze(r));
 }

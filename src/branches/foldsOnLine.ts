@@ -1,68 +1,74 @@
 // The folds in two givens of a loop whose budget is a straight line in the first.
-import { inputsOf } from "../loop/inputs.ts";
-import { kept } from "../loop/kept.ts";
+import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
-import { valueKernel } from "../reading/valueKernel.ts";
+import { signOfRange } from "../search/interval.ts";
 import type { Branch, BranchEnd } from "./diagram.ts";
 import type { Task } from "./diagramOf.ts";
-import type { Cusp, FoldCurve, FoldCurveEnd, FoldDiagram, FoldPoint } from "./foldDiagram.ts";
-import { gateNodes } from "./gateCurve.ts";
+import type { Cusp, FoldCurve, FoldCurveEnd, FoldDiagram, FoldPoint, UndecidedFolds } from "./foldDiagram.ts";
+import type { FoldedLoop } from "./foldedLoop.ts";
 import { netReader } from "./netReader.ts";
 import { partsInColumns } from "./partsInColumns.ts";
+import { planeReader } from "./planeReader.ts";
+import { signOnParts } from "./signOnParts.ts";
 
 /** What was found. */
-export type FoldParts = Pick<FoldDiagram, "curves" | "cusps" | "touches" | "undecided" | "cost" | "method">;
-
-/** The loop whose balance is λ on the curve p(T), with a reader of p and of ∂N/∂p there; undefined where it is no straight line. */
-export const foldedLoop = /* @__PURE__ */ kept((loop, along) => {
-  const nodes = gateNodes(loop, along);
-  const inputs = inputsOf(loop);
-  const given = loop.givens.find((g) => g.name === along);
-  if (!nodes || nodes.gate !== given?.node) return undefined;
-  const kernel = valueKernel(loop.graph, { inputs, outputs: [nodes.curve, nodes.answer] });
-  const out = new Float64Array(2);
-  const read = (values: readonly number[]): Float64Array => {
-    kernel(Float64Array.from(values), out);
-    return out;
-  };
-  const variables = loop.variables.map((v) => ({ ...v, rate: nodes.feedback }));
-  return { folded: Object.freeze({ ...loop, net: nodes.feedback, variables }) as Loop, read };
-});
+export type FoldParts = Pick<
+  FoldDiagram,
+  "curves" | "cusps" | "touches" | "changes" | "undecided" | "cost" | "method"
+>;
 
 /**
  * The folds are the states of a balance of their own, λ(T, q) = 0 on the curve p(T), and their cusps are its folds. The task is
  * that of the second given.
  */
-export function foldsOnLine(
-  { folded, read }: NonNullable<ReturnType<typeof foldedLoop>>,
-  task: Task,
-): FoldParts {
+export function foldsOnLine(loop: Loop, line: FoldedLoop, task: Task): FoldParts {
+  const { folded, read } = line;
   const { place, givens } = task;
   const parts = partsInColumns(folded, task, netReader(folded, place, givens));
-  const inputsAt = (temperature: number, and: number): number[] => [
-    temperature,
-    ...givens.map((v, i) => (i === place ? and : v)),
-  ];
+  const readAt = (temperature: number, and: number) =>
+    read([temperature, ...givens.map((v, i) => (i === place ? and : v))]);
   const point = ({ at: and, temperature }: { at: number; temperature: number }): FoldPoint =>
-    Object.freeze({ at: read(inputsAt(temperature, and))[0] as number, and, temperature });
+    Object.freeze({ at: readAt(temperature, and).at, and, temperature });
   const curves = parts.branches.map((branch): FoldCurve => {
     const middle = branch.points[Math.floor(branch.points.length / 2)] as Branch["points"][number];
     // along the curve p′ = −λ/N_p, so p″ = −λ′/N_p at a fold
-    const answer = read(inputsAt(middle.temperature, middle.at))[1] as number;
+    const { answer } = readAt(middle.temperature, middle.at);
     const exists = -middle.feedbackParameter / answer > 0 ? "above" : "below";
     const ends = [endName(branch.low), endName(branch.high)] as const;
     const points = Object.freeze(branch.points.map(point));
-    return Object.freeze({ exists, range: branch.parameters, ends: Object.freeze(ends), points });
+    return Object.freeze({
+      kind: "fold",
+      exists,
+      range: branch.parameters,
+      ends: Object.freeze(ends),
+      points,
+    });
   });
   const cusps = parts.folds.map((fold): Cusp => {
     const { atBracket: andBracket, temperatureBracket, exists, branches } = fold;
     return Object.freeze({ ...point(fold), andBracket, temperatureBracket, exists, curves: branches });
   });
-  const undecided = parts.undecided.map((u) => u.parameters);
-  return { method: "line", curves, cusps, touches: [], undecided, cost: parts.cost };
+  const undecided = parts.undecided.map(({ parameters, temperatures, kind }): UndecidedFolds => {
+    return { and: parameters, temperatures, kind: kind === "level" ? "other" : kind };
+  });
+  if (!loop.sampled && !hasCurve(loop, line, task))
+    undecided.push({ and: task.between, temperatures: task.within, kind: "undefined" });
+  return { method: "line", curves, cusps, touches: [], changes: [], undecided, cost: parts.cost };
 }
 
 function endName({ kind }: BranchEnd): FoldCurveEnd {
   if (kind === "leap") return "undecided";
   return kind === "fold" || kind === "corner" ? "cusp" : kind;
+}
+
+/** Whether p = −a/b has a value: where b moves with temperature λ is read with it, elsewhere b must not vanish. */
+function hasCurve(
+  loop: Loop,
+  { answer, answerMoves }: FoldedLoop,
+  { place, givens, between, within }: Task,
+): boolean {
+  if (answerMoves) return true;
+  const reader = planeReader(loop, [place], [answer]);
+  reader.set(givens);
+  return signOnParts(between, (part) => signOfRange(reader.over(within, part)[0] as Range)) !== 0;
 }

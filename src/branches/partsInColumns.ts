@@ -10,9 +10,9 @@ import { type Counted, lookedInto } from "./lookedInto.ts";
 import type { Met } from "./meeting.ts";
 import type { NetReader } from "./netReader.ts";
 import { passageOf } from "./passage.ts";
+import { placesIn } from "./placesIn.ts";
 import { middleOf } from "./stretch.ts";
 
-const COLUMNS = 33;
 const SAMPLES = 200;
 /** What the states of one column may cost. */
 const COLUMN_EFFORT = 2000;
@@ -112,15 +112,5 @@ function sampledEnd({ parameters, temperatures }: Change, within: Range) {
     ...{ at, atBracket: Object.freeze(parameters) },
     temperature: second === undefined ? edge : (first + second) / 2,
     temperatureBracket: Object.freeze([low, high] as const),
-  });
-}
-
-/** Places in a stretch, closer together towards its ends, where branches are steep. */
-function placesIn([low, high]: Range): number[] {
-  if (low === high) return [low];
-  return Array.from({ length: COLUMNS }, (_, i) => {
-    const s = (2 * i) / (COLUMNS - 1) - 1;
-    const share = 0.5 + (s * (3 - s * s)) / 4;
-    return i === COLUMNS - 1 ? high : low + (high - low) * share;
   });
 }

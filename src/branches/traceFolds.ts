@@ -8,8 +8,11 @@ import type { GivenRecord, Givens, Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
 import { checkedAlong } from "./checkedAlong.ts";
 import type { FoldDiagram } from "./foldDiagram.ts";
+import { foldedLoop } from "./foldedLoop.ts";
 import { foldsInSpace } from "./foldsInSpace.ts";
-import { foldedLoop, foldsOnLine } from "./foldsOnLine.ts";
+import { foldsOnLine } from "./foldsOnLine.ts";
+import { kinkedFolds } from "./kinkedFolds.ts";
+import { turnReader } from "./turns.ts";
 
 /** In which two givens, and where to look. */
 export interface TraceFoldsOptions<N extends string = string> {
@@ -67,7 +70,12 @@ export function traceFolds<N extends string>(
   const effort = checkedNumber(options.effort ?? (line ? 20_000 : 100_000), "effort", "1", [10, 1e9]);
   const task = { name: second.name, place: places[1], givens, between, within, effort, tolerance: 1 };
   const space = { t: within, p: alongBetween ?? within, q: between };
-  const parts = line ? foldsOnLine(line, task) : foldsInSpace(loop, { places, space, givens, effort });
+  const turns = line && !loop.sampled ? turnReader(loop, places.join(" ")) : undefined;
+  const parts = turns
+    ? kinkedFolds(loop, turns, task)
+    : line
+      ? foldsOnLine(loop, line, task)
+      : foldsInSpace(loop, { places, space, givens, effort });
   const complete = parts.undecided.length === 0 && !loop.sampled;
   return Object.freeze({
     along: options.along,
@@ -78,8 +86,9 @@ export function traceFolds<N extends string>(
     curves: Object.freeze(parts.curves),
     cusps: Object.freeze(parts.cusps),
     touches: Object.freeze(parts.touches),
+    changes: Object.freeze(parts.changes),
     method: parts.method,
-    undecided: Object.freeze(parts.undecided),
+    undecided: Object.freeze(parts.undecided.map((u) => Object.freeze(u))),
     complete,
     proof: loop.sampled ? "sampled" : complete ? "proved" : "partial",
     cost: Object.freeze(parts.cost),

@@ -256,7 +256,7 @@ describe("what is not decided is said", () => {
     } as const;
     const { complete, cusps, undecided } = traceFolds(loop, { ...options, effort: 4000 });
     expect({ complete, cusps }).toEqual({ complete: false, cusps: [] });
-    expect(undecided.some(([low, high]) => low <= 0.01 && high >= -0.01)).toBe(true);
+    expect(undecided.some(({ and: [low, high] }) => low <= 0.01 && high >= -0.01)).toBe(true);
   });
 
   test("folds at the kink of a law", () => {
@@ -274,7 +274,7 @@ describe("what is not decided is said", () => {
     } as const;
     const { complete, undecided } = traceFolds(loop, { ...options, effort: 3000 });
     expect(complete).toBe(false);
-    expect(undecided).toEqual([[-1, 1]]);
+    expect(undecided.some(({ and: [low, high] }) => low <= -0.99 && high >= 0.99)).toBe(true);
   });
 
   test("an effort that is spent", () => {

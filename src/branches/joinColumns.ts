@@ -4,6 +4,7 @@ import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
 import type { Branch, BranchCrossing, BranchEnd, BranchPoint, Fold } from "./diagram.ts";
 import { foldAt } from "./foldAt.ts";
+import type { GoesOn } from "./goesOn.ts";
 import { matchStates } from "./matchStates.ts";
 
 /** The states at one parameter, by rising temperature. */
@@ -34,11 +35,17 @@ interface Growing {
   high?: BranchEnd;
 }
 
+/** What is proved of the stretches between groups of columns. */
+export interface Between {
+  readonly endOf: EndOf;
+  readonly metIn: MetIn;
+  readonly goesOn: GoesOn;
+}
+
 /** Branches and folds of groups of columns, by rising parameter; the number of states is constant in each group. */
 export function joinColumns(
   groups: readonly (readonly Column[])[],
-  endOf: EndOf,
-  metIn: MetIn,
+  { endOf, metIn, goesOn }: Between,
   between: Range,
 ): { branches: Branch[]; folds: Fold[]; crossings: BranchCrossing[] } {
   const all: Growing[] = [];
@@ -72,19 +79,29 @@ export function joinColumns(
     const others = kept.length;
     const met = lost.length + born.length === 0 ? metIn(parameters) : undefined;
     const meets = (i: number) => met !== undefined && (i === met.index || i === met.index + 1);
+    let isProved = met !== undefined;
     const endsOf = (which: readonly number[], { states }: Column): BranchEnd[] => {
       const gone = which.map((i) => states[i] as BranchPoint);
       const temperatures = gone.map((s) => s.temperature);
       const end =
         which.length === 0 || which.length > 2 ? undefined : endOf({ parameters, temperatures, others });
+      if (end) isProved = true;
       return gone.map((s) => end ?? openEnd(parameters, s));
     };
+    const lastEnds = endsOf(lost, from);
+    const firstEnds = endsOf(born, to);
     const right: Growing[] = [];
     for (const [i, j] of kept) {
       const grown = left[i] as Growing;
       if (met && meets(i)) {
         grown.high = met.end;
         right[j] = start(to, j, met.end);
+        continue;
+      }
+      const [here, there] = [from.states[i], to.states[j]] as [Growing["points"][number], BranchPoint];
+      if (!isProved && !goesOn(here, there)) {
+        grown.high = openEnd(parameters, here);
+        right[j] = start(to, j, openEnd(parameters, there));
         continue;
       }
       grown.points.push(to.states[j] as Growing["points"][number]);
@@ -94,9 +111,7 @@ export function joinColumns(
       const pair = (list: readonly Growing[]) => list.filter((_, i) => meets(i));
       crossed.push({ end: met.end, below: pair(left), above: pair(right) });
     }
-    const lastEnds = endsOf(lost, from);
     for (const [k, i] of lost.entries()) (left[i] as Growing).high = lastEnds[k] as BranchEnd;
-    const firstEnds = endsOf(born, to);
     for (const [k, j] of born.entries()) right[j] = start(to, j, firstEnds[k] as BranchEnd);
     if (isFold(lastEnds[0]))
       pairs.push({ end: lastEnds[0], exists: "below", pair: lost.map((i) => left[i] as Growing) });

@@ -5,6 +5,7 @@ import { proveCount } from "../states/proveCount.ts";
 import type { BranchEnd, UndecidedStretch } from "./diagram.ts";
 import type { Parts, Task } from "./diagramOf.ts";
 import { fixedGivens } from "./fixedGivens.ts";
+import { goesOnOf } from "./goesOn.ts";
 import { type Change, type Column, joinColumns } from "./joinColumns.ts";
 import { type Counted, lookedInto } from "./lookedInto.ts";
 import type { Met } from "./meeting.ts";
@@ -64,7 +65,8 @@ export function partsInColumns(loop: Loop, task: Task, net: NetReader): Parts {
       ? { temperatures: leap.interval, parameters, kind: "jump" }
       : undefined;
   };
-  const { branches, folds, crossings } = joinColumns(groups, endOf, metIn, task.between);
+  const goesOn = loop.sampled ? () => true : goesOnOf(loop, task);
+  const { branches, folds, crossings } = joinColumns(groups, { endOf, metIn, goesOn }, task.between);
   const undecided = stretches
     .filter(({ count, parameters }) => count === null && !proved.has(parameters[0]))
     .map(({ parameters }): UndecidedStretch => {

@@ -198,20 +198,38 @@ describe("branches", () => {
     expect(branches[0]?.parameters).toEqual([900, expect.closeTo(high, 8)]);
   });
 
-  test("a basin ends at the leap where it is at the state's own parameters, if it is there", () => {
+  test("below the fluxes at which the balance leaps through zero, the leap bounds no basin", () => {
     const loop = iceLoop();
-    const basinAt = (along: "threshold" | "flux", at: number, between: readonly [number, number]) => {
-      const { states } = findStates(loop, { within: WITHIN, at: { [along]: at } });
-      const [cold] = states as [(typeof states)[number]];
-      return core.tippingMargins(loop, cold, { along, between, within: WITHIN }).basin;
-    };
-    for (const threshold of [258, 262, 275])
-      expect(basinAt("threshold", threshold, [240, 300])).toEqual({
-        coldest: null,
-        hottest: expect.closeTo(threshold, 8),
-      });
     // below 960 W m⁻² the balance keeps its sign across the leap
-    expect(basinAt("flux", 930, [900, 1500])).toEqual({ coldest: null, hottest: null });
+    for (const [flux, hottest] of [
+      [930, null],
+      [1000, expect.closeTo(263.15, 8)],
+    ]) {
+      const [cold] = findStates(loop, { within: WITHIN, at: { flux } }).states;
+      const options = { along: "flux", between: [900, 1500], within: WITHIN } as const;
+      expect(core.tippingMargins(loop, cold as NonNullable<typeof cold>, options).basin).toEqual({
+        coldest: null,
+        hottest,
+      });
+    }
+  });
+
+  test("along the threshold: no branch goes on over thresholds at which both states are", () => {
+    const { branches } = traceBranches(iceLoop(), {
+      ...{ along: "threshold", between: [240, 300], within: WITHIN },
+    });
+    const [cold, warm] = [temperatureOf(1361, 0.62), temperatureOf(1361, 0.32)];
+    expect(branches.map((b) => [b.low.kind, b.high.kind])).toEqual([
+      ["undecided", "between"],
+      ["between", "undecided"],
+    ]);
+    for (const [branch, temperature] of [
+      [branches[0], cold],
+      [branches[1], warm],
+    ] as const)
+      for (const end of branch?.temperatures ?? []) expect(end).toBeCloseTo(temperature, 8);
+    expect(branches[1]?.parameters[1]).toBeLessThanOrEqual(cold + 1e-6);
+    expect(branches[0]?.parameters[0]).toBeGreaterThanOrEqual(warm - 1e-6);
   });
 
   test("along the threshold: the leap where it lies between both states", () => {

@@ -3,8 +3,10 @@ import type { UndecidedStretch } from "./enumeration.ts";
 import type { Stretch } from "./stretch.ts";
 
 /** Says in words how many zeros a stretch may hold; one that touches without crossing counts twice. */
-function countsOf({ signs, continuous, most }: Stretch): string {
+function countsOf({ kind, signs, continuous, most }: Stretch): string {
   const parity = continuous ? signs[0] * signs[1] : 0;
+  // a continuum has no number of zeros that could be odd
+  if (kind === "flat") return parity < 0 ? "1 or more" : "0 or more";
   if (parity > 0) return most <= 2 ? "0 or 2" : "0, or an even number";
   if (parity < 0) return "1, or an odd number";
   return most === 1 ? "0 or 1" : most === 2 ? "0, 1 or 2" : "0 or more";

@@ -40,10 +40,12 @@ test.each([
   [{}, "0 or 2"],
   [{ most: 3 }, "0, or an even number"],
   [{ signs: [-1, 1] as const }, "1, or an odd number"],
+  [{ kind: "flat", signs: [-1, 1] as const }, "1 or more"],
+  [{ kind: "flat" }, "0 or more"],
   [{ signs: [0, 1] as const }, "0, 1 or 2"],
   [{ signs: [0, 1] as const, most: 1 }, "0 or 1"],
   [{ signs: [0, 0] as const, most: Number.POSITIVE_INFINITY }, "0 or more"],
   [{ signs: [-1, 1] as const, continuous: false, most: Number.POSITIVE_INFINITY }, "0 or more"],
-])("counts of %o", (more, counts) => {
+] satisfies [Partial<Stretch>, string][])("counts of %o", (more, counts) => {
   expect(mergeDoubts([stretch(more)])[0]?.counts).toBe(counts);
 });

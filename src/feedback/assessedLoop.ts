@@ -1,9 +1,11 @@
 // The linear climate of assessed feedbacks.
-import { inUnit, mul, neg, sub } from "../graph/operations.ts";
+import { neg } from "../graph/operations.ts";
+import { fail } from "../ground/errors.ts";
 import { checkKeys, checkRecord } from "../ground/names.ts";
 import { checkedNumber } from "../ground/range.ts";
 import { closeLoop } from "../loop/closeLoop.ts";
 import type { Flow, Loop } from "../loop/types.ts";
+import { assessedTerm } from "./assessedTerm.ts";
 import type { FeedbackAssessment } from "./assessment.ts";
 
 /** The names that such a loop has. */
@@ -15,7 +17,8 @@ export type AssessedNames<F extends string> = "variable temperature" | "given fo
  * reduction of outgoing radiation) is the given `forcing`, 0 unless set. At F = 0 the state is T₀, `temperature`, 288 K
  * unless said; no answer depends on it. Heat capacity 0: there is no time in it.
  *
- * Valid for changes small enough for the feedbacks to stay constant. Throws `not-a-number`, `out-of-range`, `unreadable`.
+ * Estimates in W m⁻² K⁻¹ between −1000 and 1000, the reference at most 0: negative restores. Valid for changes small enough
+ * for the feedbacks to stay constant. Throws `missing`, `not-a-number`, `out-of-range`, `unreadable`, `repeated-name`.
  * Source: Gregory et al. 2004, Geophys. Res. Lett. 31, L03205.
  */
 export function assessedLoop<F extends string>(
@@ -25,21 +28,27 @@ export function assessedLoop<F extends string>(
   checkRecord(assessment, "assessment", "reference and feedbacks");
   checkKeys(options, "assessedLoop", ["temperature"]);
   const { temperature: reference = 288 } = options;
-  const { feedbacks } = assessment;
+  const { feedbacks, source } = assessment;
   checkRecord(feedbacks, "feedbacks", "estimates by name");
-  const strength = (path: string, estimate: { readonly best: number } | undefined) =>
-    checkedNumber(estimate?.best, `${path}.best`, "W m-2 K-1", [-1e3, 1e3]);
+  if (typeof source !== "string")
+    fail("unreadable", {
+      path: "source",
+      value: source,
+      allowed: "where the assessment is published, as text",
+    });
+  const strength = (path: string, estimate: { readonly best: number } | undefined, most: number) =>
+    checkedNumber(estimate?.best, `${path}.best`, "W m-2 K-1", [-1e3, most]);
   const origin = checkedNumber(reference, "temperature", "K", [0, 1e5]);
+  const term = assessedTerm(source);
   const loop = closeLoop(({ temperature, given, couple }) => {
-    const warmer = sub(temperature, origin);
-    // what is not radiated, so that cooling is its opposite
-    const kept = (lambda: number) => inUnit(mul(lambda, warmer), "W m-2");
+    const kept = (lambda: number) => term({ temperature, feedbackParameter: lambda, reference: origin });
     const cooling: Record<string, Flow> = {
       forcing: neg(given("forcing", 0, "W m-2")),
-      reference: neg(kept(strength("reference", assessment.reference))),
+      // one that amplifies would be one of the other sign convention
+      reference: neg(kept(strength("reference", assessment.reference, 0))),
     };
     for (const [name, estimate] of Object.entries<{ readonly best: number }>(feedbacks))
-      cooling[`${name} feedback`] = neg(couple(name, kept(strength(`feedbacks.${name}`, estimate))));
+      cooling[`${name} feedback`] = neg(couple(name, kept(strength(`feedbacks.${name}`, estimate, 1e3))));
     return { heating: {}, cooling, heatCapacity: 0 };
   });
   return loop as unknown as Loop<AssessedNames<F>>;

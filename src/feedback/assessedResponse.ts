@@ -2,11 +2,13 @@
 import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
 import { checkedNumber } from "../ground/range.ts";
+import { compensatedSum } from "../ground/sum.ts";
 import { findStates } from "../states/findStates.ts";
 import { analyseFeedbacks } from "./analyseFeedbacks.ts";
 import { type AssessedNames, assessedLoop } from "./assessedLoop.ts";
-import type { FeedbackAssessment } from "./assessment.ts";
+import type { Estimate, FeedbackAssessment } from "./assessment.ts";
 import { compareHeld } from "./compareHeld.ts";
+import { MOST_HELD } from "./comparisonInput.ts";
 import { type FeedbackNote, feedbackNote } from "./feedbackNote.ts";
 import type { Feedbacks } from "./feedbacks.ts";
 import type { HeldComparison } from "./heldComparison.ts";
@@ -33,7 +35,8 @@ export interface AssessedResponse<F extends string = string> {
  * the part that each has in it. Best estimates only; where the assessment states a climate sensitivity a note quotes it,
  * because a sensitivity is assessed from more lines of evidence than the sum of the feedbacks.
  *
- * Throws `not-a-number`, `out-of-range`, `unknown-name`, `unreadable`; `out-of-range` also if the feedbacks cancel (λ = 0).
+ * Throws `missing`, `not-a-number`, `out-of-range`, `too-large` (more than 12 to hold), `unknown-name`, `unreadable`;
+ * `out-of-range` also if reference and feedbacks cancel (λ = 0).
  *
  * @example assessedResponse(AR6_FEEDBACKS, { forcing: 3.93 }).response.temperatureChange // 3.388 K
  */
@@ -44,23 +47,35 @@ export function assessedResponse<F extends string>(
   checkKeys(options, "assessedResponse", ["forcing", "hold"]);
   const forcing = checkedNumber(options.forcing, "forcing", "W m-2", [-1e3, 1e3]);
   const loop = assessedLoop(assessment);
+  const hold = options.hold ?? allOf(assessment);
   const state = findStates(loop, { within: [287, 289] }).states[0];
   if (!state) {
-    const value = "feedbacks that cancel";
+    const { reference, feedbacks } = assessment;
+    const estimates: readonly Estimate[] = [reference, ...Object.values<Estimate>(feedbacks)];
     return fail("out-of-range", {
       path: "feedbacks",
-      value,
-      allowed: "a sum that is not 0",
+      value: compensatedSum(estimates.map((e) => e.best)),
+      allowed: "a sum with the reference that is not 0",
       unit: "W m-2 K-1",
     });
   }
   const change = { forcing } as { readonly [K in "forcing"]: number };
-  const hold = options.hold ?? (Object.keys(assessment.feedbacks) as F[]);
   const response = compareHeld(loop as never, { from: state, change, hold } as never) as HeldComparison<
     AssessedNames<F>
   >;
   const feedbacks = analyseFeedbacks(loop, state);
   return Object.freeze({ feedbacks, response, notes: Object.freeze(sensitivityNotes(assessment)) });
+}
+
+/** All feedbacks, to be held in every combination. */
+function allOf<F extends string>({ feedbacks }: FeedbackAssessment<F>): F[] {
+  const names = Object.keys(feedbacks) as F[];
+  const path = "feedbacks";
+  if (names.length === 0)
+    fail("missing", { path, value: "no feedbacks", allowed: "at least one estimate by name" });
+  if (names.length > MOST_HELD)
+    fail("too-large", { path, value: names.length, allowed: `at most ${MOST_HELD}, unless hold names some` });
+  return names;
 }
 
 function sensitivityNotes({ sensitivity, source }: FeedbackAssessment): FeedbackNote[] {

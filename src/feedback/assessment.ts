@@ -9,7 +9,7 @@ export interface Estimate {
 
 /** Feedback parameters that were assessed one by one, W m⁻² K⁻¹; they add up to λ. */
 export interface FeedbackAssessment<F extends string = string> {
-  /** The response that the others are measured against, such as Planck's; negative. */
+  /** The response that the others are measured against, such as Planck's; 0 or negative. */
   readonly reference: Estimate;
   readonly feedbacks: { readonly [K in F]: Estimate };
   /** Equilibrium warming for a doubling of CO₂ as assessed from all lines of evidence, K. */

@@ -37,7 +37,12 @@ export function branchLoss<N extends string>(
     ...places(turning.stage, turning.x),
     between: sampled ? null : Object.freeze([turning.stages[0], turning.stages[1]] as const),
     drift: turning.sign > 0 ? "warms" : "cools",
-    next: next && Object.freeze({ ...places(turning.stages[1], next.at), bracket: next.bracket }),
+    next:
+      next &&
+      Object.freeze({
+        ...places(turning.stages[1], next.at),
+        bracket: Object.freeze([...next.bracket] as const),
+      }),
     nextIs,
   });
 }

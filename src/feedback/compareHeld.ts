@@ -1,16 +1,16 @@
 // The finite answer of a climate to a change, with and without some of its couplings.
-import { fail } from "../ground/errors.ts";
 import { checkKeys } from "../ground/names.ts";
-import { checkedRange, type Range } from "../ground/range.ts";
+import type { Range } from "../ground/range.ts";
 import { checkBelongs, type StateLike, type Taken } from "../loop/checkBelongs.ts";
 import { couplingsNamed } from "../loop/holdFixed.ts";
-import { givensAt } from "../loop/inputs.ts";
 import type { Couplings, Givens, Loop } from "../loop/types.ts";
 import { followPath, type PathOutcome } from "../states/followPath.ts";
+import type { Located } from "../states/located.ts";
 import { pathBalanceOf } from "../states/pathBalance.ts";
 import { checkOneVariable, readerOf } from "../states/prepared.ts";
 import type { State } from "../states/state.ts";
 import { branchLoss, placesOn } from "./branchLoss.ts";
+import { changedGivens, checkCount, rangeWith } from "./comparisonInput.ts";
 import { comparisonNotes } from "./comparisonNotes.ts";
 import type { HeldComparison, HeldResponse } from "./heldComparison.ts";
 import { shapleyShares } from "./shapley.ts";
@@ -27,10 +27,6 @@ export interface CompareHeldOptions<N extends string = string> {
   readonly within?: Range;
 }
 
-/** All 4096 choices of 12 couplings take a fraction of a second; a few more would take minutes. */
-const MOST_HELD = 12;
-const WITHIN: Range = [2.7, 2000];
-
 /**
  * The change of temperature after a slow change of givens, with and without couplings: ΔT of the loop as it is, ΔT with all of
  * `hold` held at the state (as by `holdFixed`), the order-free shares of the couplings in the difference, and the regulation
@@ -39,6 +35,8 @@ const WITHIN: Range = [2.7, 2000];
  * Every choice of held couplings is followed on the branch of `from` along the straight path from the old to the new givens,
  * with proof that it stays the same branch. Where one crosses a fold there is no ΔT to share: `shares` is `null`, and `lost`
  * says which choices lose their state, at which givens and temperature, and to which state the climate goes from there.
+ *
+ * `regulation` is `null` where one of the two is lost, and where ΔT_held is not told from 0.
  *
  * Throws `unknown-name` (with the nearest), `missing` (no change, nothing to hold), `too-large`, `foreign-state`,
  * `out-of-range`, `not-a-number`, `unreadable`, `several-variables`. Source of the shares: Shapley 1953.
@@ -58,7 +56,7 @@ export function compareHeld<N extends string>(
   const before = [...at.values.subarray(1)];
   const after = changedGivens(loop, before, options.change);
   const within = rangeWith(options.within, loop, temperature);
-  const outcomeOf = follower(loop, couplings, { at, before, after, within });
+  const { outcomeOf, isUnstable } = follower(loop, couplings, { at, before, after, within });
   const hold = Object.freeze(couplings.map((c) => c.name as Couplings<N>));
   const places = placesOn<N>(loop, before, after);
   const outcomes = Array.from({ length: 1 << hold.length }, (_, held) => outcomeOf(held));
@@ -72,6 +70,9 @@ export function compareHeld<N extends string>(
   });
   const [asItIs, allHeld] = [subsets[0], subsets.at(-1)] as [HeldResponse<N>, HeldResponse<N>];
   const [whole] = outcomes as [PathOutcome];
+  const last = outcomes.at(-1) as PathOutcome;
+  const regulation =
+    last.outcome === "arrived" && isMoved(at, last.located) ? regulationOf(asItIs, allHeld) : null;
   const lost = subsets.filter((s): s is HeldComparison<N>["lost"][number] => s.lost !== null);
   return Object.freeze({
     from: places(0, temperature),
@@ -79,44 +80,15 @@ export function compareHeld<N extends string>(
     hold,
     temperatureChange: asItIs.temperatureChange,
     temperatureChangeHeld: allHeld.temperatureChange,
-    regulation: regulationOf(asItIs.temperatureChange, allHeld.temperatureChange),
+    regulation,
     shares: lost.length > 0 ? null : sharesOf(hold, subsets),
     subsets: Object.freeze(subsets),
     lost: Object.freeze(lost),
     evaluations: outcomes.length,
     within,
     proof: proofOf(loop, subsets),
-    notes: Object.freeze(comparisonNotes(loop, outcomes, lost.length)),
+    notes: Object.freeze(comparisonNotes(loop, { outcomes, regulation, isUnstable, within })),
   });
-}
-
-function checkCount(count: number, loop: Loop): void {
-  const known = loop.couplings.map((c) => c.name).join(", ") || "(none)";
-  if (count === 0) fail("missing", { path: "hold", value: "no name", allowed: `couplings of ${known}` });
-  if (count > MOST_HELD) fail("too-large", { path: "hold", value: count, allowed: `at most ${MOST_HELD}` });
-}
-
-function changedGivens(loop: Loop, before: readonly number[], change: unknown): number[] {
-  const known = loop.givens.map((g) => g.name);
-  if (typeof change !== "object" || change === null || Object.keys(change).length === 0)
-    fail("missing", { path: "change", value: change, allowed: `new values of ${known.join(", ")}` });
-  checkKeys(change, "change", known);
-  const old = Object.fromEntries(known.map((name, i) => [name, before[i]]));
-  return givensAt(loop, { ...old, ...change });
-}
-
-function rangeWith(range: Range | undefined, loop: Loop, temperature: number): Range {
-  const limits = loop.variables[0]?.within;
-  if (range === undefined) return [Math.min(WITHIN[0], temperature), Math.max(WITHIN[1], temperature)];
-  const [low, high] = checkedRange(range, "within", "K", limits);
-  if (!(low <= temperature && temperature <= high))
-    fail("out-of-range", {
-      path: "within",
-      value: temperature,
-      allowed: "a range with the state in it",
-      unit: "K",
-    });
-  return [low, high];
 }
 
 /** Follows the state with some couplings held. */
@@ -124,7 +96,7 @@ function follower(
   loop: Loop,
   couplings: Loop["couplings"],
   path: { at: Taken; before: readonly number[]; after: readonly number[]; within: Range },
-): (held: number) => PathOutcome {
+): { readonly outcomeOf: (held: number) => PathOutcome; readonly isUnstable: boolean } {
   const { at, before, after, within } = path;
   const changed = before.flatMap((value, i) => (value === after[i] ? [] : [i]));
   const balance = pathBalanceOf(
@@ -134,12 +106,24 @@ function follower(
   );
   const value = at.values[0] as number;
   const bracket: Range = [at.low[0] as number, at.high[0] as number];
-  return (held) =>
-    followPath(balance({ from: before, to: after, held, reference: value }), { value, bracket }, within);
+  const along = (held: number) => balance({ from: before, to: after, held, reference: value });
+  const f = along(0);
+  const read = new Float64Array(9);
+  f.between(0, 0);
+  f.box(bracket[0], bracket[1], read);
+  return {
+    outcomeOf: (held) => followPath(along(held), { value, bracket }, within),
+    isUnstable: (read[3] as number) > 0,
+  };
 }
 
-const regulationOf = (change: number | null, held: number | null): number | null =>
-  change === null || held === null || held === 0 ? null : 1 - change / held;
+type Answer = Pick<HeldResponse, "temperatureChange">;
+const regulationOf = ({ temperatureChange: change }: Answer, held: Answer): number | null =>
+  change === null ? null : 1 - change / (held.temperatureChange as number);
+
+/** Whether a temperature has changed by more than is not known of it: the brackets before and after are apart. */
+const isMoved = ({ low, high }: Taken, { bracket }: Located): boolean =>
+  bracket[0] > (high[0] as number) || bracket[1] < (low[0] as number);
 
 function sharesOf<N extends string>(
   hold: readonly Couplings<N>[],

@@ -12,6 +12,8 @@ export type FeedbackNoteCode =
   | "unstable-branch"
   | "branch-lost"
   | "branch-undecided"
+  | "no-regulation"
+  | "assessed-feedbacks"
   | "assessed-sensitivity";
 
 /** A caution like those of states: `info` can be ignored, `caution` weakens the numbers or explains a `null`. */

@@ -18,11 +18,13 @@ export interface Found {
   /** How many feedback loops there are, and how many are listed one by one. */
   readonly count: number;
   readonly listed: number;
+  /** Whether slopes are assessed ones. */
+  readonly assessed: boolean;
 }
 
 /** The notes of an analysis. */
 export function notesOf(loop: Loop, found: Found): FeedbackNote[] {
-  const { total, sign, reference, referenceSign, heatCapacity, undecided, count, listed } = found;
+  const { total, sign, reference, referenceSign, heatCapacity, undecided, count, listed, assessed } = found;
   const notes: FeedbackNote[] = [];
   const caution = (code: FeedbackNote["code"], about: string, text: string, value: number, unit: string) =>
     notes.push(feedbackNote(code, "caution", { about, text, value, unit }));
@@ -63,6 +65,11 @@ export function notesOf(loop: Loop, found: Found): FeedbackNote[] {
         ...{ about: "heatCapacity", text, value: heatCapacity.value, unit: "J m-2 K-1" },
       }),
     );
+  }
+  if (assessed) {
+    const text =
+      "best estimates of an assessment: the bounds here are those of the arithmetic, not the ranges that were assessed";
+    notes.push(feedbackNote("assessed-feedbacks", "caution", { about: "feedbackParameterRange", text }));
   }
   if (count > listed) {
     const text = `${listed} of ${count} feedback loops are listed, the strongest; the rest is summed in others`;

@@ -40,6 +40,7 @@ export function writeFeedbacks<N extends string>(
   const size = paths.strongest.reduce((sum, p) => sum + Math.abs(p.value), Math.abs(reference.value));
   const signOf = signReader(loop.sampled, size);
   const [sign, referenceSign] = [signOf(total), signOf(reference)];
+  const isPlanck = name.kind === "Planck response";
   const partOf = partWriter(referenceSign < 0 ? negative(reference) : null);
   const withouts = paths.strongest.map((path) => difference(total, path));
   const loops = paths.strongest.map((path, i): FeedbackLoop<N> => {
@@ -72,7 +73,7 @@ export function writeFeedbacks<N extends string>(
       kind: referenceSign < 0 ? name.kind : "reference response",
       feedbackParameter: 0 + reference.value,
       feedbackParameterRange: rangeOf(reference),
-      text: name.text,
+      text: isPlanck && referenceSign >= 0 ? `${name.text}; not known to restore` : name.text,
       contains: Object.freeze([...name.contains]) as never,
     }),
     loops: Object.freeze(loops),
@@ -103,6 +104,7 @@ export function writeFeedbacks<N extends string>(
         undecided: loops.filter((_, i) => signOf(withouts[i] as Bounded) === 0).map((l) => l.through),
         count: paths.count,
         listed: loops.length,
+        assessed: name.assessed,
       }),
     ),
   });

@@ -5,6 +5,7 @@ import { substitute } from "../graph/substitute.ts";
 import { fail } from "../ground/errors.ts";
 import { failUnknown } from "../ground/names.ts";
 import { checkBelongs, type StateLike } from "./checkBelongs.ts";
+import { checkLoop } from "./checkLoop.ts";
 import type { Couplings, Loop } from "./types.ts";
 
 /**
@@ -26,6 +27,7 @@ export function holdFixed<N extends string>(
   names: readonly Couplings<N>[],
   state: StateLike<N>,
 ): Loop<N> {
+  checkLoop(loop, "holdFixed");
   const held = couplingsNamed(loop, names, "names");
   const { values } = checkBelongs(loop, state, "state");
   const { graph, variables, givens, couplings, flows, report } = loop;

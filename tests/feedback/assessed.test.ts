@@ -3,8 +3,9 @@ import { describe, expect, test } from "vitest";
 import { analyseFeedbacks } from "../../src/feedback/analyseFeedbacks.ts";
 import { assessedLoop } from "../../src/feedback/assessedLoop.ts";
 import { assessedResponse } from "../../src/feedback/assessedResponse.ts";
-import { AR6_FEEDBACKS } from "../../src/feedback/assessment.ts";
+import { AR6_FEEDBACKS, type FeedbackAssessment } from "../../src/feedback/assessment.ts";
 import { compareHeld } from "../../src/feedback/compareHeld.ts";
+import { sourcesOf } from "../../src/index.ts";
 import { holdFixed } from "../../src/loop/holdFixed.ts";
 import { findStates } from "../../src/states/findStates.ts";
 import ar6 from "../reference/ar6_feedbacks.json" with { type: "json" };
@@ -34,8 +35,18 @@ describe("as a loop", () => {
     expect(found.reference.feedbackParameter).toBeCloseTo(ar6.feedbacks.planck.best, 12);
     for (const { through, feedbackParameter } of found.loops)
       expect(feedbackParameter).toBeCloseTo(AR6_FEEDBACKS.feedbacks[through[0] as "cloud"].best, 12);
-    // a straight line, whatever it stands for
-    expect(found.reference.kind).toBe("reference response");
+    // a straight line, whatever it stands for; but none that was fitted with water vapour in it
+    expect(found.reference).toMatchObject({
+      kind: "reference response",
+      text: "assessed, not computed: the best estimate, as a straight line in temperature (reference)",
+    });
+    expect(found.notes).toMatchObject([{ code: "assessed-feedbacks", about: "feedbackParameterRange" }]);
+    const some = analyseFeedbacks(loop, state, { through: ["cloud"] }).reference;
+    expect(some.text).toMatch(
+      /^not a Planck response: it contains waterVapourAndLapseRate, surfaceAlbedo, .*, which were not chosen/,
+    );
+    expect(some.text).not.toContain("fitted");
+    expect(sourcesOf(loop)).toMatchObject([{ law: "assessedFeedback", source: AR6_FEEDBACKS.source }]);
     expect(found.loops.find((l) => l.through[0] === "biogeophysicalAndBiogeochemical")?.effect).toBe(
       "counters",
     );
@@ -105,6 +116,18 @@ describe("as a response", () => {
     expect(bad(AR6_FEEDBACKS, { forcing: 1, hold: ["clouds"] }).allowed).toContain("nearest: cloud");
     expect(bad({ reference: { best: -1 } })).toMatchObject({ code: "unreadable", path: "feedbacks" });
     const cancelling = { reference: { best: -1 }, feedbacks: { ice: { best: 1 } }, source: "" };
-    expect(bad(cancelling)).toMatchObject({ code: "out-of-range", path: "feedbacks" });
+    expect(bad(cancelling)).toMatchObject({ code: "out-of-range", path: "feedbacks", value: 0 });
+    // the other sign convention
+    const turned = { reference: { best: 3.2 }, feedbacks: { ice: { best: -1 } }, source: "" };
+    expect(bad(turned)).toMatchObject({ code: "out-of-range", path: "reference.best", value: 3.2 });
+    expect(bad({ ...cancelling, source: undefined })).toMatchObject({ code: "unreadable", path: "source" });
+    expect(bad({ ...cancelling, feedbacks: {} })).toMatchObject({ code: "missing", path: "feedbacks" });
+    const many = Object.fromEntries(Array.from({ length: 13 }, (_, i) => [`f${i}`, { best: 0.01 }]));
+    const thirteen = { reference: { best: -1 }, feedbacks: many, source: "" };
+    expect(bad(thirteen)).toMatchObject({ code: "too-large", path: "feedbacks", value: 13 });
+    expect(
+      assessedResponse(thirteen as FeedbackAssessment<"f0">, { forcing: 1, hold: ["f0"] }).response
+        .evaluations,
+    ).toBe(2);
   });
 });

@@ -142,14 +142,38 @@ describe("compareHeld", () => {
     [{ change: {} }, "missing", "change"],
     [{ change: undefined }, "missing", "change"],
     [{ change: { flx: 1400 } }, "unknown-name", "change.flx"],
-    [{ change: { flux: Number.NaN } }, "not-a-number", "at.flux"],
-    [{ change: { emissivity: 2 } }, "out-of-range", "at.emissivity"],
+    [{ change: 5 }, "unreadable", "change"],
+    [{ change: { flux: Number.NaN } }, "not-a-number", "change.flux"],
+    [{ change: { flux: undefined } }, "missing", "change.flux"],
+    [{ change: { emissivity: 2 } }, "out-of-range", "change.emissivity"],
     [{ hold: [] }, "missing", "hold"],
     [{ within: [400, 200] }, "out-of-range", "within[1]"],
     [{ within: [100, 200] }, "out-of-range", "within"],
     [{ steps: 3 }, "unknown-name", "compareHeld.steps"],
   ])("%o", (options, code, path) => {
     expect(compare(options)).toMatchObject({ code, path });
+  });
+
+  test("errors say what was received, what is allowed and in which unit", () => {
+    const messageOf = (options: object) => compare(options).message.replace(/ \(docs.*/, "");
+    expect(messageOf({ change: { emissivity: 2 } })).toBe(
+      "change.emissivity: out of range, received 2; allowed: 0.01 to 1",
+    );
+    expect(messageOf({ within: [100, 200] })).toBe(
+      `within: out of range, received "100 to 200"; allowed: a range around the state, which is at ${state.temperature} K`,
+    );
+    expect(messageOf({ change: {} })).toBe(
+      'change: missing, received "no new value"; allowed: new values of flux, emissivity',
+    );
+    expect(messageOf({ hold: [] })).toBe(
+      'hold: missing, received "no name"; allowed: at least one coupling of albedo',
+    );
+  });
+
+  test("givens that do not change keep the values of the state, not those of the loop", () => {
+    const [from] = findStates(loop, { within: [280, 400], at: { flux: 1400 } }).states;
+    const { to } = compareHeld(loop, { from: from as never, change: { emissivity: 0.59 }, hold: ["albedo"] });
+    expect(to?.givens).toEqual({ flux: 1400, emissivity: 0.59 });
   });
 
   test("more couplings than 12", () => {
@@ -182,6 +206,7 @@ describe("compareHeld", () => {
     const from = findStates(idle, { within }).states.at(-1) as State<never>;
     const options = { from, change: { idle: 5 }, hold: ["albedo"] } as never;
     expect(compareHeld(idle, options)).toMatchObject({ regulation: null, proof: "proved", lost: [] });
+    expect(compareHeld(idle, options).notes.map((n) => n.code)).toEqual(["no-regulation"]);
     expect(Math.abs(compareHeld(idle, options).temperatureChange ?? 1)).toBeLessThan(1e-11);
     const { responses } = analyseFeedbacks(idle, from as never);
     const nothing = { flux: 0, fluxRange: [0, 0], temperature: 0, temperatureRange: [0, 0] };
@@ -197,6 +222,16 @@ test("holding all that answers to temperature is refused", () => {
   }));
   const [only] = findStates(bare, { within }).states;
   expect(refusal(() => holdFixed(bare, ["longwave"], only as never)).code).toBe("temperature-unused");
+});
+
+test("what is no loop is refused as such", () => {
+  const none = undefined as never;
+  const calls: readonly (readonly [string, () => unknown])[] = [
+    ["holdFixed", () => holdFixed(none, [], state)],
+    ["analyseFeedbacks", () => analyseFeedbacks(none, state)],
+    ["compareHeld", () => compareHeld(none, { from: state, change: {}, hold: [] } as never)],
+  ];
+  for (const [path, call] of calls) expect(refusal(call)).toMatchObject({ code: "unreadable", path });
 });
 
 test("several variables are refused by name", () => {

@@ -301,6 +301,22 @@ describe("no bounds where there is no number:", () => {
   });
 });
 
+test("what goes as T⁴ but does not restore is no Planck response, and says why", () => {
+  const loop = closeLoop(({ temperature, couple }) => ({
+    heating: { sun: 99, back: greyEmission({ temperature, emissivity: 0.1 }) },
+    cooling: { clouds: couple("clouds", greyEmission({ temperature, emissivity: 0.2 })) },
+    heatCapacity: 0,
+  }));
+  const [state] = findStates(loop, { within: [100, 500] }).states;
+  if (!state) throw new Error("no state");
+  const { reference, notes } = analyseFeedbacks(loop, state as never);
+  expect(reference.kind).toBe("reference response");
+  expect(reference.text).toBe(
+    "the fourth power of temperature in back, with all chosen couplings held; not known to restore",
+  );
+  expect(notes.map((n) => n.code)).toEqual(["no-feedback-factors"]);
+});
+
 test("a slope that is not finite is refused by its name", () => {
   const loop = closeLoop(({ temperature, couple }) => ({
     heating: { sun: 4 },

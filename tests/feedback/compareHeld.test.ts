@@ -109,6 +109,9 @@ describe("a branch that ends", () => {
       lost: [{ held: ["longwave"], lost: { reason: "no-response" } }],
       regulation: null,
     });
+    expect(compared.notes.map((n) => n.text)).toEqual([
+      "1 of 2 choices of held couplings leave nothing that answers to temperature, so there are no shares and no regulation",
+    ]);
     const feedbacks = analyseFeedbacks(loop as never, from as never);
     expect(feedbacks.reference).toMatchObject({
       kind: "reference response",
@@ -135,6 +138,27 @@ describe("a branch that ends", () => {
     });
     expect(compared.lost[0]).toMatchObject({ held: [], lost: { reason: "range", next: null } });
     expect(compared.lost[0]?.lost.temperature).toBeCloseTo(295, 3);
+    expect(compared.notes[0]?.text).toMatch(
+      /^\d of 2 choices of held couplings leave the range of 250 to 295 K, so/,
+    );
+  });
+
+  test("an unstable one is called so, whether it arrives or not", () => {
+    const loop = iceLoop();
+    const from = statesOf(loop)[1] as State<never>;
+    const codes = (flux: number) =>
+      compareHeld(loop, { from: from as never, change: { flux }, hold: ["albedo"] }).notes.map((n) => n.code);
+    expect(codes(1400)).toEqual(["unstable-branch"]);
+    expect(codes(1000)).toEqual(["branch-lost", "unstable-branch"]);
+  });
+
+  test("a change too small for its answer to be told from 0 has no regulation", () => {
+    const loop = iceLoop();
+    const from = third(statesOf(loop));
+    const compared = compareHeld(loop, { from, change: { flux: 1361 + 1e-12 }, hold: ["albedo"] });
+    expect(compared).toMatchObject({ regulation: null, notes: [{ code: "no-regulation" }] });
+    const larger = compareHeld(loop, { from, change: { flux: 1361 + 1e-6 }, hold: ["albedo"] });
+    expect(larger.regulation).toBeLessThan(0);
   });
 });
 

@@ -1,5 +1,6 @@
 // Puts a diagram together from its parts.
 import { CONSTANT_SET } from "../ground/constants.ts";
+import { deepFreeze } from "../ground/deepFreeze.ts";
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Branch, BranchCrossing, Diagram, Fold, UndecidedStretch } from "./diagram.ts";
@@ -50,7 +51,7 @@ export function diagramOf(loop: Loop, task: Task, net: ZeroReader, parts: Parts)
     crossings: Object.freeze(crossings),
     jumps: Object.freeze(jumpsOf({ branches, folds, crossings, undecided }, net)),
     gaps: Object.freeze(gapsOf({ branches, undecided }, between, (p) => net.sign(p, middle))),
-    undecided: Object.freeze(undecided.map((u) => Object.freeze(u))),
+    undecided: deepFreeze(undecided),
     complete,
     proof: loop.sampled ? "sampled" : complete ? "proved" : "partial",
     cost: Object.freeze(cost),

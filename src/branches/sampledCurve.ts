@@ -40,8 +40,8 @@ export function sampledCurve(loop: Loop, along: string): Curve | undefined {
     signAt: (temperature) => Math.sign(feedbackAt(temperature)) as Sign,
     rises: () => 0,
     over(low, high) {
-      const [a, b] = [at(low), at(high)];
-      return a < b ? [a, b] : [b, a];
+      const samples = [low, low + (high - low) / 2, high].map(at);
+      return [Math.min(...samples), Math.max(...samples)];
     },
     criticals(range, effort) {
       const { crossings, doubts, evaluations } = scanZeros(line, range, effort);

@@ -55,7 +55,7 @@ export function solveFor<N extends string>(loop: Loop<N>, options: SolveForOptio
     complete: proof === "proved",
     undecided: Object.freeze(undecided),
     proof,
-    within,
+    within: Object.freeze(within),
     fixed: fixedGivens(loop, name, givens),
     cost: Object.freeze(cost),
     constants: CONSTANT_SET,

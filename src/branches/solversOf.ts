@@ -37,12 +37,20 @@ function enclosed(loop: Loop, place: number): Solver {
   const { graph, net } = loop;
   const inputs = inputsOf(loop);
   const line = lineOf(loop, net, place);
-  const kinks = coneOf(graph, [net], inputs).flatMap((id) => {
-    const args = graph.args[id] as readonly number[];
-    if (graph.ops[id] === "step") return [lineOf(loop, args[0] as number, place)];
-    const isKink = graph.ops[id] === "min" || graph.ops[id] === "max";
-    return isKink ? [lineOf(loop, graph.node("sub", args), place)] : [];
-  });
+  const argumentsOf = (...ops: string[]) =>
+    coneOf(graph, [net], inputs)
+      .filter((id) => ops.includes(graph.ops[id] as string))
+      .map((id) => graph.args[id] as readonly number[]);
+  const leaps = argumentsOf("step").map((args) => lineOf(loop, args[0] as number, place));
+  const bends = argumentsOf("min", "max").map((args) => lineOf(loop, graph.node("sub", args), place));
+  const kinks = [...leaps, ...bends];
+  const box = new Float64Array(9);
+  /** Whether all over a bracket the balance may have either of the values at a leap, as where the temperature is its threshold. */
+  const isAmidLeap = ({ bracket }: { readonly bracket: Range }) =>
+    leaps.some((leap) => {
+      leap.box(...bracket, box);
+      return signOf(box[0] as number, box[1] as number, box[2] as number) === 0;
+    });
   return (values, within, effort) => {
     const fine = (within[1] - within[0]) / FINE_PARTS;
     const cuts: number[] = [];
@@ -53,7 +61,15 @@ function enclosed(loop: Loop, place: number): Solver {
     }
     line.values.set(values);
     const { zeros, undecided, boxes, points } = enumerateZeros(line.ends, within, { effort, fine, cuts });
-    return { zeros, undecided: undecided.map(plain), cost: { boxes, points } };
+    const doubts = [
+      ...undecided,
+      ...zeros.filter(isAmidLeap).map(({ bracket }) => ({ interval: bracket, kind: "jump" as const })),
+    ].sort((a, b) => a.interval[0] - b.interval[0]);
+    return {
+      zeros: zeros.filter((zero) => !isAmidLeap(zero)),
+      undecided: doubts.map(plain),
+      cost: { boxes, points },
+    };
   };
 }
 
@@ -86,7 +102,8 @@ function judgeOf(loop: Loop, place: number) {
       Float64Array.from(values, (v, i) => (i === place ? at : v)),
       out,
     );
-    const feedbackParameter = out[0] as number;
+    // adding 0 turns −0, which JSON does not keep, into 0
+    const feedbackParameter = 0 + (out[0] as number);
     bounds?.(low as Float64Array, high as Float64Array, out);
     const sign = bounds
       ? signOf(below(out[0] as number), above(out[1] as number), out[2] as number)

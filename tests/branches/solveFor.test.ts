@@ -77,6 +77,47 @@ test("none, and a kink, and a stretch that is balanced throughout", () => {
   expect(found.undecided.map((u) => u.kind)).toContain("flat");
 });
 
+test("at the threshold of a step the balance has two values, and no flux is named", () => {
+  const loop = core.closeLoop(({ temperature, given }) => ({
+    heating: {
+      sunlight: core.absorbedFlux({
+        flux: given("flux", 1361, "W m-2", { within: [0, 1e5] }),
+        albedo: core.stepAlbedo({ temperature, cold: 0.62, warm: 0.32, threshold: 263.15 }),
+      }),
+    },
+    cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+    heatCapacity: 1,
+  }));
+  const options = { unknown: "flux", within: [100, 5000] } as const;
+  const found = solveFor(loop, { ...options, temperature: 263.15 });
+  expect(found).toMatchObject({ solutions: [], complete: false, undecided: [{ kind: "jump" }] });
+  // 4·0.6·σT⁴ over the two shares that are absorbed
+  const [{ interval }] = found.undecided as [(typeof found.undecided)[number]];
+  const [low, high] = interval;
+  const emitted = 4 * 0.6 * core.STEFAN_BOLTZMANN * 263.15 ** 4;
+  expect(low).toBeLessThanOrEqual(emitted / 0.68);
+  expect(high).toBeGreaterThanOrEqual(emitted / 0.38);
+  const above = solveFor(loop, { ...options, temperature: 263.16 });
+  expect(above).toMatchObject({ complete: true, solutions: [{ stability: "stable" }] });
+});
+
+test("a λ of zero is written as JSON keeps it, and all that is said is frozen", () => {
+  const loop = core.closeLoop(({ temperature, given }) => ({
+    heating: { lamp: given("lamp", 300, "W m-2", { within: [0, 1e4] }) },
+    cooling: {
+      longwave: core.ceilingEmission({
+        ...{ temperature, ceiling: 300 },
+        emission: core.linearEmission({ temperature, intercept: 200, slope: 2, reference: 273 }),
+      }),
+    },
+    heatCapacity: 1,
+  }));
+  const found = solveFor(loop, { unknown: "lamp", temperature: 350, within: [100, 500] });
+  expect(found.solutions).toHaveLength(1);
+  expect(Object.is(found.solutions[0]?.feedbackParameter, 0)).toBe(true);
+  expect(Object.isFrozen(found.within)).toBe(true);
+});
+
 test("a sampled law is sampled", () => {
   const found = solveFor(sampledLoop(), { unknown: "flux", temperature: 290, within: [500, 2000] });
   const proved = solveFor(iceLoop(), { unknown: "flux", temperature: 290, within: [500, 2000] });

@@ -15,6 +15,7 @@ import {
   placeIn,
   sectionOf,
 } from "./foldTube.ts";
+import { mergeChains } from "./mergeChains.ts";
 import { pointAt } from "./planeReader.ts";
 
 /** Ranges of temperature and of both givens in which folds are sought. */
@@ -109,7 +110,16 @@ export function foldChains(system: FoldSystem, space: Space) {
       // one that began inside of a meeting that was found on the way is part of it, and of the curves that end there
       const meeting = up.end.cap === down.end.cap ? up.end.cap : null;
       const isInside = meeting && tubes.every((tube) => capAt(foldIn(tube, tube.q)) === meeting);
-      if (tubes.length > 0 && !isInside) chains.push({ tubes, low: down.end, high: up.end });
+      if (tubes.length === 0 || isInside) return;
+      // it may have come to one that is known
+      let chain: FoldChain = { tubes, low: down.end, high: up.end };
+      for (let i = chains.length - 1; i >= 0; i--) {
+        const merged = mergeChains(system, chains[i] as FoldChain, chain);
+        if (!merged) continue;
+        chain = merged;
+        chains.splice(i, 1);
+      }
+      chains.push(chain);
     },
   };
 }

@@ -15,6 +15,7 @@ import {
   middles,
 } from "./foldSystem.ts";
 import { commonOf } from "./foldTube.ts";
+import { rangeOf } from "./mergeChains.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
 import type { OpenBox } from "./undecidedFolds.ts";
@@ -78,10 +79,9 @@ function isKnown(box: FoldBox, { chains, caps }: KnownFolds): boolean {
   const isPart = (a: Range, b: Range) => a[0] >= b[0] && a[1] <= b[1];
   return (
     caps.some(({ box: cap }) => isPart(box.t, cap.t) && isPart(box.p, cap.p) && isPart(box.q, cap.q)) ||
-    chains.some(({ tubes }) => {
-      const [first, last] = [tubes[0], tubes.at(-1)];
-      if (!first || !last || !isPart(box.q, [first.q[0], last.q[1]])) return false;
-      return tubes.every((tube) => {
+    chains.some((chain) => {
+      if (!isPart(box.q, rangeOf(chain))) return false;
+      return chain.tubes.every((tube) => {
         const shared = meet(tube.q, box.q);
         if (!(shared[0] <= shared[1])) return true;
         const common = commonOf(tube, shared);

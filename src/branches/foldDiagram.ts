@@ -73,15 +73,15 @@ export interface UndecidedFolds {
   /** Temperatures that it can concern, K. */
   readonly temperatures: Range;
   /**
-   * `count`: the number of folds is not proved. `cusp`: two folds about to meet, or none. `kink`: at a kink of a law, where the
+   * `count`: the number of folds is not proved. `kink`: at a kink of a law, where the
    * signs of λ on both sides are not proved. `edge`: a fold on an end of a range, inside or outside. `lost`: a fold could not be
    * followed on. `continuum`: λ is zero, as far as can be told, on a whole stretch of temperatures. `jump`: λ has no value on one
    * side, as at a step of a law. `transcritical`: two folds cross, or turn away from each other closer than rounding. `undefined`:
-   * the budget, or the first given that balances it, has no finite value somewhere. `effort`: the search stopped before. `other`: none of these.
+   * the budget, or the first given that balances it, has no finite value somewhere. `effort`: the search stopped before.
    */
   readonly kind:
-    | ("count" | "cusp" | "kink" | "edge" | "lost" | "continuum" | "jump" | "transcritical")
-    | ("undefined" | "effort" | "other");
+    | ("count" | "kink" | "edge" | "lost" | "continuum" | "jump" | "transcritical")
+    | ("undefined" | "effort");
 }
 
 /** All folds in two givens. A plain frozen object. */

@@ -81,7 +81,8 @@ function curveOf(system: FoldSystem, { tubes, low, high }: FoldChain): FoldCurve
     .flatMap((tube) =>
       POINTS.map((share) => foldOn(system, tube, tube.q[0] + share * (tube.q[1] - tube.q[0]))),
     )
-    .filter(({ q }) => q > from && q < to);
+    .filter(({ q }) => q > from && q < to)
+    .sort((a, b) => a.q - b.q);
   const middle = inner[Math.floor(inner.length / 2)] ?? low.at;
   // N = N_TT·(T − T₀)²/2 + N_p·(p − p₀) near the fold
   const { np, ntt } = system.signs(middle);

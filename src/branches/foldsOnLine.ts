@@ -49,7 +49,8 @@ export function foldsOnLine(loop: Loop, line: FoldedLoop, task: Task): FoldParts
     return Object.freeze({ ...point(fold), andBracket, temperatureBracket, exists, curves: branches });
   });
   const undecided = parts.undecided.map(({ parameters, temperatures, kind }): UndecidedFolds => {
-    return { and: parameters, temperatures, kind: kind === "level" ? "other" : kind };
+    const known = kind === "jump" || kind === "transcritical";
+    return { and: parameters, temperatures, kind: known ? kind : "count" };
   });
   if (!loop.sampled && !hasCurve(loop, line, task))
     undecided.push({ and: task.between, temperatures: task.within, kind: "undefined" });

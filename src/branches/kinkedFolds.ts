@@ -5,13 +5,24 @@ import type { Cusp, FoldChange, FoldCurve, FoldPoint, UndecidedFolds } from "./f
 import type { FoldParts } from "./foldsOnLine.ts";
 import { joinTurns, type TurnColumn, type TurnCurve, type TurnEnd } from "./joinTurns.ts";
 import { placesIn } from "./placesIn.ts";
-import { middleOf } from "./stretch.ts";
 import { turnPassage } from "./turnPassage.ts";
 import type { TurnDoubt, TurnReader } from "./turns.ts";
 import { kindsOf, type TurnTile, turnTiles } from "./turnTiles.ts";
 
 /** What the turns of one column may cost. */
 const COLUMN_EFFORT = 2000;
+
+/** What a doubt about the turns of a tile is in the diagram. */
+const KINDS: Readonly<Record<TurnDoubt, UndecidedFolds["kind"]>> = {
+  fold: "count",
+  corner: "count",
+  edge: "edge",
+  flat: "continuum",
+  jump: "jump",
+  undefined: "undefined",
+  effort: "effort",
+  kink: "kink",
+};
 
 /**
  * A fold is a zero of λ on the curve p(T), and a corner a kink at which λ leaps through zero. Their kinds are proved over
@@ -60,8 +71,7 @@ export function kinkedFolds(loop: Loop, reader: TurnReader, task: Task): FoldPar
   const isProved = ({ parameters }: TurnTile) => proved.has(parameters[0]);
   const undecided = tiles.flatMap((tile): UndecidedFolds[] => {
     if (tile.kinds !== null || isProved(tile)) return [];
-    const kind = tile.spent ? "effort" : kindOf(turnsAt(middleOf(tile.parameters)).doubt);
-    return [{ and: tile.parameters, temperatures: within, kind }];
+    return [{ and: tile.parameters, temperatures: within, kind: KINDS[tile.doubt ?? "fold"] }];
   });
   const curveOf = ({ kind, direction, points, low, high }: TurnCurve): FoldCurve => {
     const middle = points[Math.floor(points.length / 2)] as (typeof points)[number];
@@ -78,17 +88,4 @@ export function kinkedFolds(loop: Loop, reader: TurnReader, task: Task): FoldPar
     });
   };
   return { method: "line", curves: curves.map(curveOf), cusps, touches: [], changes, undecided, cost };
-}
-
-/** What a doubt about the turns at one value says of the stretch around it. */
-function kindOf(doubt: TurnDoubt | undefined): UndecidedFolds["kind"] {
-  const kinds = {
-    kink: "kink",
-    edge: "edge",
-    flat: "continuum",
-    jump: "jump",
-    undefined: "undefined",
-  } as const;
-  if (doubt === "fold" || doubt === "corner") return "cusp";
-  return doubt === undefined || doubt === "effort" ? "count" : kinds[doubt];
 }

@@ -1,13 +1,13 @@
 // Tiles of the second given in which the same turns are proved throughout.
 import type { Range } from "../ground/range.ts";
-import type { Turn, TurnReader } from "./turns.ts";
+import type { Turn, TurnDoubt, TurnReader } from "./turns.ts";
 
 /** A stretch of the second given and the kinds of its turns by rising temperature, as text; `null` where they are not proved. */
 export interface TurnTile {
   readonly parameters: Range;
   readonly kinds: string | null;
-  /** True where the effort was spent before. */
-  readonly spent: boolean;
+  /** Why not; `effort`: the effort was spent before. */
+  readonly doubt?: TurnDoubt | undefined;
 }
 
 /** A tile is not halved below this share of the whole. */
@@ -29,17 +29,17 @@ export function turnTiles(reader: TurnReader, between: Range, within: Range, eff
     const parameters = waiting[next] as Range;
     const [low, high] = parameters;
     if (cost.boxes >= effort) {
-      tiles.push({ parameters, kinds: null, spent: true });
+      tiles.push({ parameters, kinds: null, doubt: "effort" });
       continue;
     }
     const found = reader.turnsIn(within, parameters, Math.min(TILE_EFFORT, effort - cost.boxes));
     cost.boxes += found.boxes;
     cost.points += found.points;
-    if (found.doubt === undefined) tiles.push({ parameters, kinds: kindsOf(found.turns), spent: false });
+    if (found.doubt === undefined) tiles.push({ parameters, kinds: kindsOf(found.turns) });
     else if (high - low > FINEST_SHARE * (between[1] - between[0])) {
       const middle = low + (high - low) * SPLIT;
       waiting.push([low, middle], [middle, high]);
-    } else tiles.push({ parameters, kinds: null, spent: false });
+    } else tiles.push({ parameters, kinds: null, doubt: found.doubt === "effort" ? "fold" : found.doubt });
   }
   return { tiles: merged(tiles), cost };
 }
@@ -48,8 +48,11 @@ function merged(tiles: readonly TurnTile[]): TurnTile[] {
   const joined: TurnTile[] = [];
   for (const tile of [...tiles].sort((a, b) => a.parameters[0] - b.parameters[0])) {
     const last = joined.at(-1);
-    if (last && last.kinds === tile.kinds && last.spent === tile.spent)
-      joined[joined.length - 1] = { ...last, parameters: [last.parameters[0], tile.parameters[1]] };
+    if (last && last.kinds === tile.kinds)
+      joined[joined.length - 1] = {
+        ...(tile.doubt === "effort" ? tile : last),
+        parameters: [last.parameters[0], tile.parameters[1]],
+      };
     else joined.push(tile);
   }
   return joined;

@@ -1,6 +1,10 @@
 // The folds in two givens where the budget is a straight line in neither, or where both have a range.
 import { describe, expect, test } from "vitest";
+import type { FoldChain } from "../../src/branches/foldChain.ts";
+import { foldChains } from "../../src/branches/foldChains.ts";
 import type { FoldDiagram } from "../../src/branches/foldDiagram.ts";
+import { foldSystem } from "../../src/branches/foldSystem.ts";
+import { mergeChains, rangeOf } from "../../src/branches/mergeChains.ts";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import { traceFolds } from "../../src/branches/traceFolds.ts";
 import * as core from "../../src/index.ts";
@@ -9,6 +13,7 @@ import { distantLoop, twoGivens, vapourLoop } from "./loops.ts";
 
 const WITHIN = [150, 400] as const;
 const AROUND = [250, 350] as const;
+const x = (t: core.Quantity) => sub(t, 300);
 const ends = ({ curves }: FoldDiagram) => curves.map((c) => c.ends);
 
 describe("along the width of an ice line, with the luminosity", () => {
@@ -121,8 +126,6 @@ test("folds in carbon and flux pass through those of the acceptance case", () =>
 });
 
 describe("known places", () => {
-  const x = (t: Parameters<Parameters<typeof twoGivens>[0]>[0]) => sub(t, 300);
-
   test("a cusp, and folds that leave the range of the first given", () => {
     // p + 0.1p² = x³ − qx has folds at x² = q/3, where it is −2x³
     const loop = twoGivens((t, p, q) => {
@@ -233,6 +236,55 @@ describe("known places", () => {
     expect(curves[0]?.range[1]).toBeCloseTo(40, 9);
   });
 
+  test("givens that act through their ratio alone", () => {
+    // the folds keep their temperatures, and the flux is a multiple of the emissivity
+    const loop = core.closeLoop(({ temperature, given }) => {
+      const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+      const emissivity = given("emissivity", 0.6, "1", { within: [0.01, 1] });
+      const albedo = core.tanhAlbedo({ temperature, cold: 0.7, warm: 0.3, midpoint: 265, width: 10 });
+      return {
+        heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+        cooling: { longwave: core.greyEmission({ temperature, emissivity }) },
+        heatCapacity: 4.2e8,
+      };
+    });
+    const options = { along: "flux", and: "emissivity", between: [0.5, 0.7], within: WITHIN } as const;
+    const { curves, complete } = traceFolds(loop, { ...options, alongBetween: [500, 4000] });
+    expect(complete).toBe(true);
+    // the fluxes at an emissivity of 0.6 are those of the documentation's first diagram
+    const folds = traceBranches(loop, { along: "flux", between: [900, 1900], within: WITHIN }).folds;
+    expect(folds.map((f) => f.exists)).toEqual(curves.map((c) => c.exists));
+    for (const [i, { points, ends: kinds }] of curves.entries()) {
+      expect(kinds).toEqual(["between", "between"]);
+      for (const { at, and, temperature } of points) {
+        expect(at / and).toBeCloseTo((folds[i]?.at as number) / 0.6, 8);
+        expect(temperature).toBeCloseTo(folds[i]?.temperature as number, 7);
+      }
+    }
+  });
+
+  test("a fold at which the first given is zero, to rounding", () => {
+    // (2 + q)(p + p²) = (1 + q²)x²: a fold at x = 0, p = 0
+    const loop = twoGivens((t, p, q) => {
+      const bowl = mul(add(1, square(q)), square(x(t)));
+      return sub(mul(add(2, q), add(p, square(p))), bowl);
+    });
+    const options = {
+      along: "p",
+      alongBetween: [-0.4, 3],
+      and: "q",
+      between: [-1, 1.1],
+      within: AROUND,
+    } as const;
+    const { curves, complete } = traceFolds(loop, options);
+    expect(complete).toBe(true);
+    expect(curves.map((c) => c.ends)).toEqual([["between", "between"]]);
+    for (const { at, temperature } of curves[0]?.points ?? []) {
+      expect(Math.abs(at)).toBeLessThan(1e-12);
+      expect(temperature).toBeCloseTo(300, 9);
+    }
+  });
+
   test("none", () => {
     const loop = twoGivens((t, p, q) => sub(add(square(p), q), x(t)));
     const options = { along: "p", alongBetween: [0, 3], and: "q", between: [-1, 1], within: AROUND } as const;
@@ -287,5 +339,50 @@ describe("what is not decided is said", () => {
     const { proof, undecided } = traceFolds(distantLoop(), { ...options, within: WITHIN, effort: 300 });
     expect(proof).toBe("partial");
     expect(undecided.length).toBeGreaterThan(0);
+  });
+});
+
+describe("chains of tubes", () => {
+  // p² + p = (x − q)²: a fold at x = q, p = 0
+  const loop = twoGivens((t, p, q) => sub(add(square(p), p), square(sub(sub(t, 300), q))));
+  const system = foldSystem(loop, "0 1");
+  system.set([0, 0]);
+  const space = (q: readonly [number, number]) => ({ t: AROUND, p: [-0.4, 3], q }) as const;
+  const chainOver = (q: readonly [number, number]): FoldChain => {
+    const chains = foldChains(system, space(q));
+    const start = system.fold({ t: 300 + q[0] + 0.1, p: 0.01, q: q[0] + 0.1 });
+    chains.follow(start as NonNullable<typeof start>);
+    expect(chains.chains).toHaveLength(1);
+    return chains.chains[0] as FoldChain;
+  };
+
+  test("that follow one fold are one", () => {
+    const [first, second] = [chainOver([-4, 1]), chainOver([0, 5])];
+    const merged = mergeChains(system, second, first) as FoldChain;
+    expect([merged.low.at.q, merged.high.at.q]).toEqual([-4, 5]);
+    expect(rangeOf(merged)).toEqual([-4, 5]);
+    const covered = merged.tubes.every(
+      ({ q }, i) => i === 0 || q[0] <= (merged.tubes[i - 1]?.q[1] as number),
+    );
+    expect(covered).toBe(true);
+    expect(mergeChains(system, first, chainOver([2, 5]))).toBe(undefined);
+  });
+
+  test("that follow two folds stay two", () => {
+    // p = x³ − qx has folds at ±√(q/3)
+    const cubic = twoGivens((t, p, q) => sub(p, sub(mul(square(x(t)), x(t)), mul(q, x(t)))));
+    const both = foldSystem(cubic, "0 1");
+    both.set([0, 0]);
+    const chains = foldChains(both, { t: AROUND, p: [-9, 9], q: [1, 3] });
+    for (const side of [-1, 1]) chains.follow({ t: 300 + side * Math.sqrt(2 / 3), p: 0, q: 2 });
+    const [cool, warm] = chains.chains as readonly [FoldChain, FoldChain];
+    expect(mergeChains(both, cool, warm)).toBe(undefined);
+  });
+
+  test("a place where Newton's method does not settle is none", () => {
+    const flat = twoGivens((t, p, q) => add(mul(0, t), add(p, mul(0, q))));
+    const lost = foldSystem(flat, "0 1");
+    lost.set([0, 0]);
+    expect(lost.fold({ t: 300, p: 1, q: 0 })).toBe(undefined);
   });
 });

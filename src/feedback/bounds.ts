@@ -1,6 +1,7 @@
 // Numbers that carry proved bounds with them, and their arithmetic; every bound is moved outwards.
 import type { Range } from "../ground/range.ts";
-import { minus, over, plus, times } from "../search/interval.ts";
+import { above, below } from "../search/enclosed.ts";
+import { over, times } from "../search/interval.ts";
 
 /** Bounds, or `null` where nothing is known. */
 export type Bounds = Range | null;
@@ -12,16 +13,16 @@ export interface Bounded {
 }
 
 /** A number without error. */
-export const exactly = (value: number): Bounded => ({ value, bounds: [value, value] });
+export const exactly = (value: number): Bounded => ({ value, bounds: [0 + value, 0 + value] });
 
 const finite = (range: Range): Bounds =>
   Number.isFinite(range[0]) && Number.isFinite(range[1]) ? range : null;
 const isZero = (range: Range): boolean => range[0] === 0 && range[1] === 0;
 
-/** −x. */
+/** −x; of bounds as 0 − x, so that none is −0. */
 export const negative = ({ value, bounds }: Bounded): Bounded => ({
   value: -value,
-  bounds: bounds && minus(bounds),
+  bounds: bounds && [0 - bounds[1], 0 - bounds[0]],
 });
 
 /** x·y. */
@@ -33,7 +34,8 @@ export const product = (x: Bounded, y: Bounded): Bounded => ({
 /** x − y. */
 export const difference = (x: Bounded, y: Bounded): Bounded => ({
   value: x.value - y.value,
-  bounds: x.bounds && y.bounds && finite(plus(x.bounds, minus(y.bounds))),
+  bounds:
+    x.bounds && y.bounds && finite([below(x.bounds[0] - y.bounds[1]), above(x.bounds[1] - y.bounds[0])]),
 });
 
 /** x/y; no bounds where y may be 0. Zero over anything else stays zero. */
@@ -42,9 +44,8 @@ export function quotient(x: Bounded, y: Bounded): Bounded {
   return { value: x.value / y.value, bounds: bounds && isZero(x.bounds as Range) ? x.bounds : bounds };
 }
 
-/** The number as it is given away: `null` where there is none, and without −0, which JSON does not keep. */
+/** The number as it is given away: `null` where there is none, and not −0, which JSON does not keep. */
 export const numberOf = (x: Bounded | null): number | null => x && 0 + x.value;
 
 /** Its bounds, as they are given away. */
-export const rangeOf = (x: Bounded | null): Bounds =>
-  x?.bounds ? Object.freeze([0 + x.bounds[0], 0 + x.bounds[1]] as const) : null;
+export const rangeOf = (x: Bounded | null): Bounds => (x?.bounds ? Object.freeze(x.bounds) : null);

@@ -5,9 +5,9 @@ import type { KnownSign } from "./signs.ts";
 
 /** The times C over the size of λ, for a λ of a known sign (0: not known). None for a heat capacity below 0. */
 export function disturbanceTimes(lambda: Bounded, heatCapacity: Bounded, sign: KnownSign): DisturbanceTimes {
-  const isTime = sign !== 0 && heatCapacity.value >= 0;
-  const time = isTime ? quotient(heatCapacity, sign < 0 ? negative(lambda) : lambda) : null;
-  const [fall, growth] = sign < 0 ? [time, null] : [null, time];
+  const isTime = heatCapacity.value >= 0;
+  const fall = isTime && sign < 0 ? quotient(heatCapacity, negative(lambda)) : null;
+  const growth = isTime && sign > 0 ? quotient(heatCapacity, lambda) : null;
   return {
     eFoldingTime: numberOf(fall),
     eFoldingTimeRange: rangeOf(fall),

@@ -9,7 +9,7 @@ import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { rangeAt } from "../search/interval.ts";
-import type { Bounded, Bounds } from "./bounds.ts";
+import { type Bounded, type Bounds, exactly } from "./bounds.ts";
 
 /** ∂ to / ∂ from. 0 is temperature, 1 to k are the chosen couplings in the order of the graph, k + 1 is the net flux. */
 export interface Influence extends Bounded {
@@ -86,8 +86,7 @@ function boundsReader(loop: Loop, inputs: readonly number[], outputs: readonly n
   const { graph } = loop;
   const wide = new Set(loop.variables.map((v) => v.node));
   const constants = outputs.map((node): Bounds => {
-    const value = graph.values[node] as number;
-    return graph.ops[node] === "const" ? [value, value] : null;
+    return graph.ops[node] === "const" ? exactly(graph.values[node] as number).bounds : null;
   });
   const kernel = enclosureKernel(graph, { inputs, outputs, wide, ranges: rangesOf(loop) });
   const out = new Float64Array(3 * outputs.length);

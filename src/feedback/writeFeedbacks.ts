@@ -42,17 +42,20 @@ export function writeFeedbacks<N extends string>(
   const [sign, referenceSign] = [signOf(total), signOf(reference)];
   const isPlanck = name.kind === "Planck response";
   const partOf = partWriter(referenceSign < 0 ? negative(reference) : null);
-  const withouts = paths.strongest.map((path) => difference(total, path));
-  const loops = paths.strongest.map((path, i): FeedbackLoop<N> => {
-    const without = withouts[i] as Bounded;
+  const undecided: (readonly string[])[] = [];
+  const loops = paths.strongest.map((path): FeedbackLoop<N> => {
+    const through = Object.freeze(path.through.map((place) => chosen[place - 1] as string));
+    const without = difference(total, path);
+    const signWithout = signOf(without);
+    if (signWithout === 0) undecided.push(through);
     return Object.freeze({
-      through: Object.freeze(path.through.map((place) => chosen[place - 1] as string)) as never,
+      through: through as never,
       ...partOf(path),
       effect: effectOf(path, signOf(path)),
       without: Object.freeze({
         feedbackParameter: 0 + without.value,
         feedbackParameterRange: rangeOf(without),
-        ...disturbanceTimes(without, heatCapacity, signOf(without)),
+        ...disturbanceTimes(without, heatCapacity, signWithout),
       }),
     });
   });
@@ -60,7 +63,8 @@ export function writeFeedbacks<N extends string>(
   const parts = [reference.value, ...loops.map((l) => l.feedbackParameter), others?.feedbackParameter ?? 0];
   const factor = referenceSign < 0 ? difference(exactly(1), quotient(total, reference)) : null;
   const gain = referenceSign < 0 && sign < 0 ? quotient(reference, total) : null;
-  const sensitivity = sign === 0 ? null : quotient(exactly(-1), total);
+  const restoring = sign === 0 ? null : negative(total);
+  const sensitivity = restoring && quotient(exactly(1), restoring);
   const givens = at.values.subarray(loop.variables.length);
   return Object.freeze({
     temperature: at.values[0] as number,
@@ -87,7 +91,7 @@ export function writeFeedbacks<N extends string>(
     sensitivityRange: rangeOf(sensitivity),
     responses: record(loop.givens, (i, { unit }) => {
       const flux = influences.givens[i] as Bounded;
-      const temperature = sign === 0 ? null : negative(quotient(flux, total));
+      const temperature = restoring && quotient(flux, restoring);
       return Object.freeze({
         flux: 0 + flux.value,
         fluxRange: rangeOf(flux),
@@ -101,7 +105,7 @@ export function writeFeedbacks<N extends string>(
     notes: Object.freeze(
       notesOf(loop, {
         ...{ total, sign, reference, referenceSign, heatCapacity },
-        undecided: loops.filter((_, i) => signOf(withouts[i] as Bounded) === 0).map((l) => l.through),
+        undecided,
         count: paths.count,
         listed: loops.length,
         assessed: name.assessed,

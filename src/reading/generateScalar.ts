@@ -2,26 +2,10 @@
 
 import type { Compute } from "../graph/op.ts";
 import { compiled } from "./generation.ts";
-import type { Operation, RunOf, ScalarKernel, ScalarProgram, Source, Step } from "./scalarProgram.ts";
+import type { Operation, RunOf, ScalarKernel, ScalarProgram, Source } from "./scalarProgram.ts";
 
 type Functions = readonly Compute["value"][];
 type Bind = (data: Float64Array, functions: Functions) => ScalarKernel;
-type Emit = (a: string, b: string, c: string, d: string) => string;
-
-/** Steps whose code is a call of the function of that name. */
-type Called = "abs" | "sqrt" | "exp" | "log" | "tanh";
-
-/** The code of each other step; a missing one does not compile. */
-const EMIT: Readonly<Record<Exclude<Step, Called>, Emit>> = {
-  add: (a, b) => `${a}+${b}`,
-  sub: (a, b) => `${a}-${b}`,
-  mul: (a, b) => `${a}*${b}`,
-  div: (a, b) => `${a}/${b}`,
-  neg: (a) => `-${a}`,
-  min: (a, b) => `${a}<${b}?${a}:${b}<=${a}?${b}:NaN`,
-  max: (a, b) => `${a}>${b}?${a}:${b}>=${a}?${b}:NaN`,
-  pick: (a, b, c, d) => `${a}<${b}?${c}:${d}`,
-};
 const ARRAY = { low: "x", high: "y", data: "k" };
 
 /** A text up to this length that is needed once stands where it is needed; deeper nesting could exhaust a parser. */
@@ -55,12 +39,41 @@ function textOf(
   value: number,
   texts: readonly string[],
 ): string {
-  // the name NaN is looked up, and what is looked up is an object
-  if (op === "literal") return Number.isNaN(value) ? "0/0" : `${value}`;
-  if (op === "low" || op === "high" || op === "data") return `${ARRAY[op]}[${value}]`;
   const read = args[id] as readonly number[];
-  if (op === "call") return `f[${value}](${read.map((a) => texts[a]).join()})`;
-  const nameOf = (i: number): string => texts[read[i] as number] as string;
-  const emit: Emit = EMIT[op as keyof typeof EMIT] ?? ((a) => `${op}(${a})`);
-  return emit(nameOf(0), nameOf(1), nameOf(2), nameOf(3));
+  const a = texts[read[0] as number] as string;
+  const b = texts[read[1] as number] as string;
+  switch (op) {
+    case "mul":
+      return `${a}*${b}`;
+    case "add":
+      return `${a}+${b}`;
+    case "sub":
+      return `${a}-${b}`;
+    case "div":
+      return `${a}/${b}`;
+    case "neg":
+      return `-${a}`;
+    case "pick":
+      return `${a}<${b}?${texts[read[2] as number]}:${texts[read[3] as number]}`;
+    case "min":
+      return `${a}<${b}?${a}:${b}<=${a}?${b}:NaN`;
+    case "max":
+      return `${a}>${b}?${a}:${b}>=${a}?${b}:NaN`;
+    // the name NaN is looked up, and what is looked up is an object
+    case "literal":
+      return Number.isNaN(value) ? "0/0" : `${value}`;
+    case "low":
+    case "high":
+    case "data":
+      return `${ARRAY[op]}[${value}]`;
+    case "call":
+      return `f[${value}](${read.map((a) => texts[a]).join()})`;
+    // steps whose code is a call of the function of that name
+    case "abs":
+    case "sqrt":
+    case "exp":
+    case "log":
+    case "tanh":
+      return `${op}(${a})`;
+  }
 }

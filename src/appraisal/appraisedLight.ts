@@ -27,6 +27,11 @@ export interface Starlight {
   readonly apoastron: StatedFlux;
   /** What stars that it does not orbit add, at their distances; in none of the fluxes above. Null where there are none. */
   readonly companions: StatedFlux | null;
+  /**
+   * What the climates have: that of all stars, in the average over the orbit that the description asks for. For the mean of the
+   * temperature it is the flux that gives it, with a constant albedo.
+   */
+  readonly taken: StatedFlux;
 }
 
 /** An equilibrium temperature for the flux at the semi-major axis, under an albedo and a redistribution that everybody uses. */

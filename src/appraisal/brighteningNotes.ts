@@ -18,9 +18,13 @@ export function brighteningNotes(
       .map(({ direction, relative }) => {
         const reached = direction === "rise" ? table.most : table.least;
         const wanted = 1 + (direction === "rise" ? 1 : -1) * (relative ?? 0);
+        const comes =
+          reached === 1
+            ? "until its end the table has no more than today's light"
+            : `until its end the table comes to ${shown(reached, 4)} times today's light`;
         return appraisalNote({
           ...{ code: "beyond-table", about, value: table.lasts, unit: "s" },
-          text: `from today to its end the table comes to ${shown(reached, 4)} times today's light, and the climate at ${kelvin(state.temperature)} K ends at ${shown(wanted, 4)} times: when is not told`,
+          text: `${comes}, and the climate at ${kelvin(state.temperature)} K ends at ${shown(wanted, 4)} times: when is not told`,
         });
       }),
   );

@@ -1,4 +1,5 @@
 // What the report says of the states of a planet.
+import { REDISTRIBUTION_GLOBAL } from "../greenhouse/equilibriumTemperature.ts";
 import type { Appraisal } from "./appraisal.ts";
 import type { StateAppraisal } from "./appraisedState.ts";
 import { feedbackTable } from "./feedbackTable.ts";
@@ -6,6 +7,7 @@ import { ledgerTable } from "./ledgerTable.ts";
 import { marginLines } from "./marginLines.ts";
 import { ECCENTRICITY } from "./missingFacts.ts";
 import { kelvin, type Section, shown, signed, type Table, YEAR } from "./report.ts";
+import { sensitivityTable } from "./sensitivityTable.ts";
 
 /** States, ledgers, what holds and what would change them, how far they are from an end, and their surfaces. */
 export function climateSections({
@@ -15,6 +17,7 @@ export function climateSections({
   brightening,
   starlight,
   equilibrium,
+  assumptions,
   missing,
 }: Appraisal): Section[] {
   if (!found) return [];
@@ -23,7 +26,7 @@ export function climateSections({
   return [
     {
       title: `Climates with the surface between ${range}`,
-      blocks: [...stateBlocks(states), ...searchLines(found)],
+      blocks: [...stateBlocks(states), ...sideLines(assumptions, states), ...searchLines(found)],
     },
     {
       title: "Equilibrium temperatures of places in each climate, K",
@@ -67,13 +70,25 @@ function stateBlocks(states: readonly StateAppraisal[]): Table[] {
     state.eFoldingTime === null || state.eFoldingTime === 0 ? "-" : shown(state.eFoldingTime / YEAR, 4),
     state.report.albedo === undefined ? "" : state.report.albedo.toFixed(4),
     kelvin(equilibriumTemperature),
-    signed(greenhouseWarming),
+    // what is left of two temperatures that are the same
+    Math.abs(greenhouseWarming) < ROUNDING ? "0" : signed(greenhouseWarming),
   ]);
   return [{ head, rows, right: [0, 2, 3, 4, 5, 6] }];
 }
 
+/** K. */
+const ROUNDING = 1e-6;
+
 const LEGEND =
   "lambda is what one kelvin more adds to the net flux, below 0 where the climate holds; greenhouse is T surface - T equilibrium";
+
+/** A share other than that of the whole sphere makes states of a part of the planet. */
+function sideLines(assumptions: Appraisal["assumptions"], states: readonly StateAppraisal[]): string[] {
+  const share = assumptions?.redistribution ?? REDISTRIBUTION_GLOBAL;
+  if (share === REDISTRIBUTION_GLOBAL || states.length === 0) return [];
+  const part = share < REDISTRIBUTION_GLOBAL ? "night side" : "day side or a part of it";
+  return [`these are climates of the ${part}, not of the whole planet: f = ${shown(share)}`];
+}
 
 function searchLines(found: NonNullable<Appraisal["found"]>): string[] {
   const { complete, proof, within, undecided, states } = found;
@@ -104,25 +119,6 @@ function placeTable(states: readonly StateAppraisal[]): Table[] {
   );
   const head = ["T surface", "substellar", "day, still", "day, spread", "night, still", "night, spread"];
   return rows.length === 0 ? [] : [{ head, rows, right: head.map((_, i) => i) }];
-}
-
-/** Inputs that move a climate by less than this for 1 % of their value are not worth a line, K. */
-const WEAK = 0.001;
-
-function sensitivityTable(states: readonly StateAppraisal[]): Table[] {
-  const rows = states.flatMap(({ state, sensitivities }) => {
-    const worth = (sensitivities ?? []).filter(
-      ({ perPercent, minus, plus }) => Math.abs(perPercent) >= WEAK || minus !== null || plus !== null,
-    );
-    return worth.map(({ path, perPercent, minus, plus }, i) => [
-      i === 0 ? `at ${kelvin(state.temperature)} K` : "",
-      path,
-      signed(perPercent, 3),
-      [plus, minus].flatMap((error) => (error === null ? [] : [signed(error, 3)])).join(" "),
-    ]);
-  });
-  const head = ["climate", "input", "K for 1 % more", "K for its errors, + and -"];
-  return rows.length === 0 ? [] : [{ head, rows, right: [2, 3] }];
 }
 
 const averagingLines = (states: readonly StateAppraisal[]): string[] =>

@@ -96,7 +96,7 @@ function massNotes({ planet: { facts } }: Noted): AppraisalNote[] {
   return [
     appraisalNote({
       ...{ code: "mass-outside-limits", about: "mass", value: mass, unit: "kg", range },
-      text: `${earths(mass)} Earths: the runaway greenhouse was computed for ${range.map(earths).join(" to ")}, so no limit is interpolated for this mass`,
+      text: `${earths(mass)} Earths: the runaway greenhouse was computed for ${range.map((kg) => shown(kg / EARTH_MASS, 2)).join(" to ")}, so no limit is interpolated for this mass`,
     }),
   ];
 }
@@ -130,12 +130,13 @@ function orbitNotes({ planet: { facts, assumptions }, states }: Noted): Appraisa
 
 function rotationNotes({ planet: { facts } }: Noted): AppraisalNote[] {
   const { rotationPeriod, locked } = facts;
+  const turns = locked ? "keeps one side to its star" : "turns slowly";
   if (locked !== true && (rotationPeriod === null || rotationPeriod <= SLOW_ROTATION)) return [];
   return [
     caution({
       ...{ code: "slow-rotation", about: "rotation", value: rotationPeriod },
       unit: rotationPeriod === null ? "1" : "s",
-      text: "a planet that turns slowly can shield its day side with clouds, which moves the inner limits towards the star",
+      text: `a planet that ${turns} can shield its day side with clouds, which moves the inner limits towards the star`,
       source: "Yang et al. 2014, ApJL 787, L2 (doi:10.1088/2041-8205/787/1/L2)",
     }),
   ];

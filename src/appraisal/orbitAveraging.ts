@@ -32,7 +32,7 @@ export function orbitAveraging(
   { heatCapacity, period }: { heatCapacity: number | null; period: number | null },
 ): OrbitAveraging {
   const unknown = (text: string): OrbitAveraging => ({ thermalInertiaRatio: null, favours: null, text });
-  if (heatCapacity === null) return unknown("the heat capacity is not given");
+  if (heatCapacity === null) return unknown("the heat capacity is not known");
   if (period === null) return unknown("the orbital period is not known");
   const emissionSlope = emissionSlopeOf(loop)(state);
   if (!(emissionSlope > 0)) return unknown("emission does not rise with temperature here");

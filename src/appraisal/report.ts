@@ -49,11 +49,15 @@ export function shown(value: number, digits = 5): string {
 
 /** The same with its sign. */
 export const signed = (value: number, digits = 4): string =>
-  value < 0 ? shown(value, digits) : `+${shown(value, digits)}`;
+  value <= 0 ? shown(value, digits) : `+${shown(value, digits)}`;
 
 /** A number with its unit; pure numbers have none. */
 export const withUnit = (value: number, unit: string, digits = 5): string =>
   unit === "1" ? shown(value, digits) : `${shown(value, digits)} ${unit}`;
+
+/** A flux for reading, W m⁻²; a faint one is no zero. */
+export const fluxText = (flux: number): string =>
+  flux > 0 && flux < 0.05 ? shown(flux, 3) : flux.toFixed(1);
 
 /** So many things by name. */
 export const counted = (count: number, name: string): string => `${count} ${name}${count === 1 ? "" : "s"}`;

@@ -7,7 +7,7 @@ import { inputTable } from "./inputTable.ts";
 import { limitSections } from "./limitSections.ts";
 import { ECCENTRICITY } from "./missingFacts.ts";
 import { noteSections } from "./noteSections.ts";
-import { kelvin, oneLine, type Report, type Section, shown, type Table } from "./report.ts";
+import { fluxText, kelvin, oneLine, type Report, type Section, shown, type Table } from "./report.ts";
 import { summaryOf } from "./summary.ts";
 
 /** The report of an appraisal; every text in it is one line. */
@@ -42,7 +42,7 @@ function aboutOf({ description }: Appraisal): string {
   return [...(source === undefined ? [] : [source]), ...(notes ?? [])].map(stopped).join(" ");
 }
 
-function starlight({ starlight, missing }: Appraisal): Section {
+function starlight({ starlight, found, missing }: Appraisal): Section {
   const { luminosity, semiMajorAxis, period, eccentricity } = starlight;
   const isGiven = !missing.some(({ path }) => path === ECCENTRICITY);
   const facts = [
@@ -55,12 +55,15 @@ function starlight({ starlight, missing }: Appraisal): Section {
       ? `circular orbit${isGiven ? "" : ", as no eccentricity is given"}`
       : `eccentricity ${shown(eccentricity)}`,
   ];
-  const { mean, atSemiMajorAxis, periastron, apoastron, companions } = starlight;
+  const { mean, atSemiMajorAxis, periastron, apoastron, companions, taken } = starlight;
   const all = { "at the semi-major axis": atSemiMajorAxis };
   const apart = { "mean over the orbit": mean, "at periastron": periastron, "at apoastron": apoastron };
   const more = companions ? { "of stars that it does not orbit, besides": companions } : {};
-  const places = { ...all, ...(eccentricity > 0 ? apart : {}), ...more };
-  const rows = Object.entries(places).map(([place, s]) => [place, s.flux.toFixed(1), shown(s.earths, 4)]);
+  // another flux than the mean has a name of its own, or the ledgers below would seem not to fit
+  const used =
+    found && fluxText(taken.flux) !== fluxText(mean.flux) ? { "that the climates below have": taken } : {};
+  const places = { ...all, ...(eccentricity > 0 ? apart : {}), ...more, ...used };
+  const rows = Object.entries(places).map(([place, s]) => [place, fluxText(s.flux), shown(s.earths, 4)]);
   const head = ["stellar flux S, normal to the beam", "W m-2", "Earths (1361 W m-2)"];
   return { title: "Starlight", blocks: [facts.filter(Boolean).join(", "), { head, rows, right: [1, 2] }] };
 }

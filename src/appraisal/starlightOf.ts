@@ -23,6 +23,7 @@ export function starlightOf(facts: PlanetFacts): Starlight {
     periastron: statedFlux(facts.fluxAtPeriastron),
     apoastron: statedFlux(facts.fluxAtApoastron),
     companions: shining.length === 0 ? null : statedFlux(combinedFlux({ stars: shining })),
+    taken: statedFlux(facts.meanFlux),
   };
 }
 

@@ -50,7 +50,9 @@ function tipping({ states, diagram, brightening }: Appraisal): string {
     const which = diagram.complete ? "The nearest" : "The nearest known";
     return `${which} tipping point: ${changeText(margins, margin, brightening)}, the climate at ${kelvin(state.temperature)} K ends.`;
   }
-  if (!diagram.complete || ways.length === 0) return "";
-  const range = diagram.between.map((end) => shown(end / diagram.now.at, 4)).join(" to ");
-  return `No tipping point from ${range} times today's light.`;
+  if (ways.length === 0) return "";
+  const range = `from ${diagram.between.map((end) => shown(end / diagram.now.at, 4)).join(" to ")} times today's light`;
+  return diagram.complete
+    ? `No tipping point ${range}.`
+    : `No tipping point was found ${range}, but not all of that is decided.`;
 }

@@ -58,11 +58,18 @@ export function toRows(appraisal: Appraisal): AppraisalRow[] {
 type Add = (name: string, value: number | string | null | undefined, unit?: string) => void;
 
 function starlightRows({ starlight }: Appraisal, add: Add): void {
-  const { mean, atSemiMajorAxis, periastron, apoastron, companions } = starlight;
+  const { mean, atSemiMajorAxis, periastron, apoastron, companions, taken } = starlight;
   add("starlight.luminosity", starlight.luminosity, "W");
   add("starlight.semiMajorAxis", starlight.semiMajorAxis, "m");
   add("starlight.period", starlight.period, "s");
-  for (const [name, stated] of Object.entries({ atSemiMajorAxis, mean, periastron, apoastron, companions })) {
+  for (const [name, stated] of Object.entries({
+    atSemiMajorAxis,
+    mean,
+    periastron,
+    apoastron,
+    companions,
+    taken,
+  })) {
     add(`starlight.${name}.flux`, stated?.flux, "W m-2");
     add(`starlight.${name}.earths`, stated?.earths);
   }

@@ -15,7 +15,8 @@ import type { Numbers } from "./wire.ts";
 const AGREEMENT = 0.02;
 
 /** A number in words; inputs that lie 2 % apart differ in few digits. */
-const told = (value: number): string => String(Number(value.toPrecision(6)));
+const told = (value: number): string =>
+  value >= 1e9 ? Number(value.toPrecision(6)).toExponential() : String(Number(value.toPrecision(6)));
 
 /** What becomes of two inputs for one quantity that lie far apart: an error, or a caution and the first of them is used. */
 export type Contradictions = "refuse" | "note";
@@ -53,7 +54,8 @@ export function checkStarAndOrbit(d: Lit, numbers: Numbers, contradictions: Cont
 /** A locked planet turns once in an orbit. */
 function rotationWays(d: PlanetDescription): Way[] {
   if (!d.rotation?.locked || d.rotation.period === undefined) return [];
-  return [...periodWays(d), direct("rotation.period")];
+  const instead = "rotation without locked";
+  return [...periodWays(d), { ...direct("rotation.period"), instead }];
 }
 
 /** What is compared, and what becomes of a contradiction. */

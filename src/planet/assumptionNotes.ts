@@ -17,10 +17,15 @@ const MEAN_TEMPERATURE =
   "the flux of the time-mean temperature, which suits a body without thermal inertia and with a constant albedo";
 
 /** Where a Bond albedo comes from that is not stated of the whole planet. */
+const OF = {
+  planet: "",
+  surface: " of the surface",
+  "surface and sky": " of surface, air and clouds together",
+} as const;
 const BELOW = {
   planet: "",
-  surface: ", of the surface: no air and no cloud reflects sunlight",
-  "surface and sky": ", of surface, air and clouds: light goes to and fro between them any number of times",
+  surface: "; no air and no cloud reflects sunlight",
+  "surface and sky": "; light goes to and fro between them any number of times",
 } as const;
 
 /** The assumptions as notes in plain words. */
@@ -44,11 +49,11 @@ function albedoNote({ albedo, albedoLaw, albedoOf }: PlanetAssumptions): PlanetN
   return albedo === null
     ? note(
         about,
-        `Bond albedo${from}: it answers to temperature, so each state has its own${BELOW[albedoOf]}`,
+        `Bond albedo${OF[albedoOf]}${from}: it answers to temperature, so each state has its own${BELOW[albedoOf]}`,
       )
     : note(
         about,
-        `Bond albedo${from} as a number: it does not answer to the climate${BELOW[albedoOf]}`,
+        `Bond albedo${OF[albedoOf]}${from} as a number: it does not answer to the climate${BELOW[albedoOf]}`,
         albedo,
       );
 }

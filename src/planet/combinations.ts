@@ -3,6 +3,7 @@ import { fail } from "../ground/errors.ts";
 import { allOf } from "./faults.ts";
 import { lawNamed } from "./fieldLaws.ts";
 import { depthLaws, forcingsOf, innerEmission } from "./outgoing.ts";
+import { type Written, writtenAs } from "./planetInput.ts";
 import type { PlanetDescription } from "./planetShape.ts";
 import { companionsOf, hostsOf, starsOf } from "./stars.ts";
 import { hasSky } from "./sunlight.ts";
@@ -74,7 +75,11 @@ function checkStars(d: PlanetDescription): void {
       '"flux", where a star shines that the planet does not orbit',
     );
   if (hostsOf(d).length === 0)
-    contradiction(`${stars[0]?.path}.distance`, "a distance", "one star without it, which the planet orbits");
+    contradiction(
+      `${stars[0]?.path}.distance`,
+      writtenAs(stars[0]?.star.distance as Written),
+      "one star without it, which the planet orbits",
+    );
 }
 
 function checkEmission({ longwave, atmosphere }: PlanetDescription): void {

@@ -22,7 +22,8 @@ export function checkCovers(covers: readonly Cover[], path: string, numbers: Num
   const twice = (value: string, allowed: string) => fail("repeated-name", { path, value, allowed });
   const wrong = (value: number, allowed: string) => fail("shares-not-one", { path, value, allowed });
   const open = covers.filter((cover) => !isIce(cover));
-  if (covers.length - open.length > 1) twice("law", "one cover whose share is a law");
+  if (covers.length - open.length > 1)
+    twice("iceShare", "one cover whose share is a law: that of the ice over all others");
   const stated = covers.flatMap(({ share }, i) =>
     share === "rest" || isLaw(share) ? [] : [numbers(`${path}[${i}].share`)],
   );

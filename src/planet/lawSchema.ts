@@ -4,7 +4,7 @@ import { literal, optional, strictObject } from "zod/mini";
 import type { ListPort, Port, Ports } from "../graph/card.ts";
 import type { Law } from "../law/types.ts";
 import { isBound, isDifference } from "./fieldLaws.ts";
-import { listOf } from "./listOf.ts";
+import { filledList } from "./listOf.ts";
 import { type ValueSchema, valueSchema } from "./valueSchema.ts";
 import { worded } from "./wording.ts";
 
@@ -47,5 +47,5 @@ function fieldSchema(name: string, port: Port | ListPort, difference: boolean): 
   const record = Object.entries(port.each).map(([key, each]) => [key, valueSchema(each)] as const);
   const keys = record.map(([key]) => key).join(", ");
   const shape = worded(strictObject(Object.fromEntries(record)), `{ ${keys} }`);
-  return listOf(shape, `{ ${keys} }`, 100, { description: name });
+  return filledList(shape, `{ ${keys} }`, 100, name);
 }

@@ -1,6 +1,7 @@
 // Reads a number with its unit, such as "0.61 au".
 import { fail } from "../ground/errors.ts";
 import { exampleOf } from "./examples.ts";
+import { quantityHint } from "./quantityHint.ts";
 
 const LONGEST = 100;
 
@@ -18,7 +19,7 @@ export function quantityOf(
 ): { value: number; unit: string } {
   const found = text.length > LONGEST ? null : QUANTITY.exec(text);
   const allowed = `a number with its unit, as in "${exampleOf(unit, difference)}"`;
-  if (!found) return fail("unreadable", { path, value: text, allowed });
+  if (!found) return fail("unreadable", { path, value: text, allowed: allowed + quantityHint(text) });
   const value = Number(found[1]);
   if (!Number.isFinite(value)) fail("not-a-number", { path, value: text, allowed });
   return { value, unit: found[2] as string };

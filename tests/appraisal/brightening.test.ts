@@ -133,9 +133,9 @@ describe("a table that ends before the fold", () => {
     expect(note).toMatchObject({ severity: "info", about: "star.brightening", unit: "s" });
     expect(note?.value).toBeCloseTo(2 * GYR, -3);
     expect(note?.text).toBe(
-      "from today to its end the table comes to 1.025 times today's light, and the climate at 246.00 K ends at 1.09 times: when is not told",
+      "until its end the table comes to 1.025 times today's light, and the climate at 246.00 K ends at 1.09 times: when is not told",
     );
-    expect(text).toContain("star.brightening 2.00 Gyr: from today to its end the table comes to 1.025");
+    expect(text).toContain("star.brightening 2.00 Gyr: until its end the table comes to 1.025");
     const rows = toRows(appraisal).filter(({ name }) => name.endsWith("laterThan"));
     expect(rows).toEqual([
       { name: "states[0].margins.rise.laterThan", value: expect.closeTo(2 * GYR, -3), unit: "s" },

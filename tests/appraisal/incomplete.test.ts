@@ -58,7 +58,7 @@ describe("a field that is left out is named, and what rests on it is left out", 
     expect(appraisal.found).toMatchObject({ complete: true });
     for (const { averaging } of appraisal.states)
       expect(averaging).toMatchObject({ thermalInertiaRatio: null, favours: null });
-    expect(firstOf(appraisal).averaging.text).toBe("the heat capacity is not given");
+    expect(firstOf(appraisal).averaging.text).toBe("the heat capacity is not known");
   });
 
   test("everything but star and orbit", () => {

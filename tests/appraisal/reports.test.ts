@@ -168,7 +168,7 @@ describe("text", () => {
     const slow = (rotation: object, orbit: object = plain().orbit as object) =>
       toText(appraisePlanet(plain({ rotation, orbit }))).replace(/\s+/g, " ");
     expect(slow({ locked: true }, { period: "134.3 d" })).toContain(
-      "rotation 134.3 d: a planet that turns slowly",
+      "rotation 134.3 d: a planet that keeps one side to its star",
     );
     const mass = toText(appraisePlanet(plain({ mass: "10 earthMass" }))).replace(/\s+/g, " ");
     expect(mass).toContain("mass 10 earthMass: 10 Earths: the runaway greenhouse was computed for 0.1 to 5");

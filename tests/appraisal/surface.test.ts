@@ -107,7 +107,7 @@ describe("thermal time over orbital period", () => {
 
   it.each([
     ["a period", { heatCapacity: 1e8, period: null }, "the orbital period is not known"],
-    ["a heat capacity", { heatCapacity: null, period: 1e6 }, "the heat capacity is not given"],
+    ["a heat capacity", { heatCapacity: null, period: 1e6 }, "the heat capacity is not known"],
     ["ranges", { heatCapacity: 1e8, period: 1e14 }, /beyond/],
   ])("is not told without %s", (_, given, text) => {
     const averaging = orbitAveraging(loop, state as never, given);

@@ -206,7 +206,7 @@ describe("an error shows what to write", () => {
       'as in "288 K"',
     ],
     ["parts per million", { forcing: forcedBy("420 ppm") }, "; write 420e-6, without quotes"],
-    ["a percentage", { albedo: "30 %" }, "{ law }; write 30e-2, without quotes"],
+    ["a percentage", { albedo: "30 %" }, "{ law }; write 0.3, without quotes"],
     ["a number in quotes", { albedo: "0.3" }, "{ law }; write 0.3, without quotes"],
     [
       "an error below 0",

@@ -70,13 +70,14 @@ export function compareHeld<N extends string>(
   });
   const [asItIs, allHeld] = [subsets[0], subsets.at(-1)] as [HeldResponse<N>, HeldResponse<N>];
   const [whole] = outcomes as [PathOutcome];
+  const to = whole.outcome === "arrived" ? (readerOf(loop)(whole.located, after) as State<N>) : null;
   const last = outcomes.at(-1) as PathOutcome;
   const regulation =
     last.outcome === "arrived" && isMoved(at, last.located) ? regulationOf(asItIs, allHeld) : null;
   const lost = subsets.filter((s): s is HeldComparison<N>["lost"][number] => s.lost !== null);
   return Object.freeze({
     from: places(0, temperature),
-    to: whole.outcome === "arrived" ? (readerOf(loop)(whole.located, after) as State<N>) : null,
+    to,
     hold,
     temperatureChange: asItIs.temperatureChange,
     temperatureChangeHeld: allHeld.temperatureChange,
@@ -87,7 +88,7 @@ export function compareHeld<N extends string>(
     evaluations: outcomes.length,
     within,
     proof: proofOf(loop, subsets),
-    notes: Object.freeze(comparisonNotes(loop, { outcomes, regulation, isUnstable, within })),
+    notes: Object.freeze(comparisonNotes(loop, { outcomes, regulation, isUnstable, within, to })),
   });
 }
 

@@ -2,7 +2,8 @@
 import type { Range } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 import type { PathOutcome } from "../states/followPath.ts";
-import { type FeedbackNote, type FeedbackNoteCode, feedbackNote } from "./feedbackNote.ts";
+import type { Note } from "../states/note.ts";
+import { type FeedbackNote, type FeedbackNoteCode, feedbackNote, outsideRange } from "./feedbackNote.ts";
 
 /** What a comparison found that may need a caution. */
 export interface Compared {
@@ -12,11 +13,13 @@ export interface Compared {
   /** Whether the state before lies on an unstable branch. */
   readonly isUnstable: boolean;
   readonly within: Range;
+  /** The state after the change, where it arrives. */
+  readonly to: { readonly notes: readonly Note[] } | null;
 }
 
 /** The notes of a comparison. */
 export function comparisonNotes(loop: Loop, compared: Compared): FeedbackNote[] {
-  const { outcomes, regulation, isUnstable, within } = compared;
+  const { outcomes, regulation, isUnstable, within, to } = compared;
   const notes: FeedbackNote[] = [];
   if (loop.sampled) {
     const text = "a law is an ordinary function: branches are followed by sampling, and nothing is proved";
@@ -44,5 +47,6 @@ export function comparisonNotes(loop: Loop, compared: Compared): FeedbackNote[] 
     const lambda = whole.outcome === "arrived" ? { value: whole.located.lambda, unit: "W m-2 K-1" } : {};
     notes.push(feedbackNote("unstable-branch", "caution", { about, text, ...lambda }));
   }
+  for (const note of to?.notes ?? []) if (note.severity === "invalid") notes.push(outsideRange(note, "to: "));
   return notes;
 }

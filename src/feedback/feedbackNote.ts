@@ -27,3 +27,7 @@ export const feedbackNote = (
   severity: Note["severity"],
   { about, text, value = null, unit = "1", source = null }: Pick<Note, "about" | "text"> & Partial<Note>,
 ): FeedbackNote => Object.freeze({ code, severity, about, value, range: null, unit, text, source });
+
+/** What the note of a state says of the range of a law; `where`: in front of what it is about. */
+export const outsideRange = (note: Note, where: string): FeedbackNote =>
+  Object.freeze({ ...note, code: "outside-range", about: `${where}${note.about}` });

@@ -1,7 +1,8 @@
 // The cautions of an analysis of feedbacks: why something is null, and what the numbers are not.
 import type { Loop } from "../loop/types.ts";
+import type { Note } from "../states/note.ts";
 import type { Bounded } from "./bounds.ts";
-import { type FeedbackNote, feedbackNote } from "./feedbackNote.ts";
+import { type FeedbackNote, feedbackNote, outsideRange } from "./feedbackNote.ts";
 import type { KnownSign } from "./signs.ts";
 
 const UNIT = "W m-2 K-1";
@@ -12,7 +13,8 @@ export interface Found {
   readonly sign: KnownSign;
   readonly reference: Bounded;
   readonly referenceSign: KnownSign;
-  readonly heatCapacity: Bounded;
+  /** What the laws refuse at the state, and a heat capacity below 0. */
+  readonly refused: readonly Note[];
   /** The feedback loops without which λ has no known sign. */
   readonly undecided: readonly (readonly string[])[];
   /** How many feedback loops there are, and how many are listed one by one. */
@@ -24,7 +26,7 @@ export interface Found {
 
 /** The notes of an analysis. */
 export function notesOf(loop: Loop, found: Found): FeedbackNote[] {
-  const { total, sign, reference, referenceSign, heatCapacity, undecided, count, listed, assessed } = found;
+  const { total, sign, reference, referenceSign, refused, undecided, count, listed, assessed } = found;
   const notes: FeedbackNote[] = [];
   const caution = (code: FeedbackNote["code"], about: string, text: string, value: number, unit: string) =>
     notes.push(feedbackNote(code, "caution", { about, text, value, unit }));
@@ -58,14 +60,7 @@ export function notesOf(loop: Loop, found: Found): FeedbackNote[] {
     const about = `without ${through.join(" → ")}`;
     notes.push(feedbackNote("stability-unknown", "caution", { about, text }));
   }
-  if (heatCapacity.value < 0) {
-    const text = "outside the range in which it has a meaning, 0 and above: there are no times";
-    notes.push(
-      feedbackNote("outside-range", "invalid", {
-        ...{ about: "heatCapacity", text, value: heatCapacity.value, unit: "J m-2 K-1" },
-      }),
-    );
-  }
+  for (const note of refused) notes.push(outsideRange(note, ""));
   if (assessed) {
     const text =
       "best estimates of an assessment: the bounds here are those of the arithmetic, not the ranges that were assessed";

@@ -9,6 +9,8 @@ import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
 import { rangeAt } from "../search/interval.ts";
+import { checksOf, notesFrom } from "../states/checkState.ts";
+import type { Note } from "../states/note.ts";
 import { type Bounded, type Bounds, exactly } from "./bounds.ts";
 
 /** ∂ to / ∂ from. 0 is temperature, 1 to k are the chosen couplings in the order of the graph, k + 1 is the net flux. */
@@ -26,6 +28,8 @@ export interface Influences {
   readonly heatCapacity: Bounded;
   /** ∂N/∂p of every given, W m⁻² per unit. */
   readonly givens: readonly Bounded[];
+  /** What the laws refuse at the state. */
+  readonly refused: readonly Note[];
 }
 
 /**
@@ -48,9 +52,11 @@ export function influencesOf(loop: Loop, chosen: readonly number[]): (at: Taken)
   const total = derivative(graph, net, temperature, inputs);
   const givens = adjoint(graph, net, inputs).slice(loop.variables.length);
   const outputs = [total, ...edges.map((e) => e.node), heatCapacity, ...givens];
-  const kernel = valueKernel(graph, { inputs, outputs });
+  const checks = checksOf(loop).filter(({ note }) => note.severity === "invalid");
+  const kernel = valueKernel(graph, { inputs, outputs: [...outputs, ...checks.map((c) => c.node)] });
   const boundsAt = loop.sampled ? undefined : boundsReader(loop, inputs, outputs);
-  const out = new Float64Array(outputs.length);
+  const read = new Float64Array(outputs.length + checks.length);
+  const [out, checked] = [read.subarray(0, outputs.length), read.subarray(outputs.length)];
   const failAt = (i: number): never => {
     const names = [
       "temperature",
@@ -67,16 +73,17 @@ export function influencesOf(loop: Loop, chosen: readonly number[]): (at: Taken)
     return fail("not-finite", { path: `state: ${asked[i]}`, value: out[i], allowed: "a finite number" });
   };
   return (at) => {
-    kernel(at.values, out);
+    kernel(at.values, read);
     for (let i = 0; i < out.length; i++) if (!Number.isFinite(out[i])) failAt(i);
     const bounds = boundsAt?.(at);
     const all = outputs.map((_, i): Bounded => ({ value: out[i] as number, bounds: bounds?.[i] ?? null }));
-    const read = (i: number) => all[i] as Bounded;
+    const numberAt = (i: number) => all[i] as Bounded;
     return {
-      edges: edges.map(({ from, to }, i) => ({ from, to, ...read(1 + i) })),
-      total: read(0),
-      heatCapacity: read(1 + edges.length),
+      edges: edges.map(({ from, to }, i) => ({ from, to, ...numberAt(1 + i) })),
+      total: numberAt(0),
+      heatCapacity: numberAt(1 + edges.length),
       givens: all.slice(2 + edges.length),
+      refused: notesFrom(checks, checked),
     };
   };
 }

@@ -104,7 +104,7 @@ export function writeFeedbacks<N extends string>(
     proved: sign !== 0 && !loop.sampled,
     notes: Object.freeze(
       notesOf(loop, {
-        ...{ total, sign, reference, referenceSign, heatCapacity },
+        ...{ total, sign, reference, referenceSign, refused: influences.refused },
         undecided,
         count: paths.count,
         listed: loops.length,

@@ -6,6 +6,7 @@ import {
   absorbedFlux,
   add,
   closeLoop,
+  defineLaw,
   div,
   findStates,
   greyEmission,
@@ -307,6 +308,31 @@ describe("a loop with a sampled law", () => {
     expect(loss?.lost.givens.flux).toBeCloseTo(1192.37172762746, 5);
     expect(loss?.lost).toMatchObject({ reason: "fold", drift: "cools", between: null, nextIs: "found" });
   });
+});
+
+test("a state that a law refuses is said to be one, before and after a change", () => {
+  const cloud = defineLaw({
+    name: "coolCloud",
+    output: { symbol: "q", unit: "W m-2" },
+    inputs: { temperature: { symbol: "T", unit: "K", within: [200, 290] } },
+    write: ({ temperature }) => inUnit(mul(0.1, sub(temperature, 250)), "W m-2"),
+  });
+  const loop = closeLoop(({ temperature, given, couple }) => ({
+    heating: { sunlight: absorbedFlux({ flux: given("flux", 1361, "W m-2"), albedo: 0.3 }) },
+    cooling: {
+      longwave: greyEmission({ temperature, emissivity: 0.6 }),
+      cloud: couple("cloud", cloud({ temperature })),
+    },
+    heatCapacity: 4e8,
+  }));
+  const [from] = findStates(loop, { within }).states;
+  const warmer = compareHeld(loop, { from: from as never, change: { flux: 1500 }, hold: ["cloud"] });
+  const refused = { code: "outside-range", severity: "invalid", range: [200, 290] };
+  expect(analyseFeedbacks(loop, from as never).notes).toEqual([]);
+  expect(warmer.notes).toMatchObject([{ ...refused, about: "to: coolCloud.temperature" }]);
+  expect(analyseFeedbacks(loop, warmer.to as never).notes).toMatchObject([
+    { ...refused, about: "coolCloud.temperature", value: warmer.to?.temperature },
+  ]);
 });
 
 test("results survive JSON, are frozen, and a state that went through it is taken up again", () => {

@@ -18,13 +18,26 @@ const withError = (min: number, max: number, unit: string) =>
     { requiredKeys: ["value", "unit"] },
   );
 
+/** Shares of today's luminosity, or of another; today is the middle of the times. */
+const tabled = fc
+  .tuple(
+    fc.uniqueArray(fc.integer({ min: -90, max: 90 }), { minLength: 2, maxLength: 8 }),
+    fc.array(between(0.2, 4), { minLength: 8, maxLength: 8 }),
+  )
+  .map(([times, lights]) => {
+    const time = times.sort((a, b) => a - b);
+    const now = ((time[0] as number) + (time.at(-1) as number)) / 2;
+    const luminosity = { value: lights.slice(0, time.length), unit: "1" };
+    return { time: { value: time, unit: "Gyr" }, luminosity, now: `${now} Gyr` };
+  });
+
 const byLuminosity = fc.record(
   {
     name: fc.string(),
     luminosity: withError(1e-4, 50, "solLum"),
     effectiveTemperature: measured(2000, 12000, "K"),
     mass: measured(0.08, 3, "solMass"),
-    brightening: measured(-0.5, 0.5, "Gyr-1"),
+    brightening: fc.oneof(measured(-0.5, 0.5, "Gyr-1"), tabled),
   },
   { requiredKeys: ["luminosity", "mass"] },
 );

@@ -48,7 +48,10 @@ export interface HeldComparison<N extends string = string> {
   readonly temperatureChange: number | null;
   /** ΔT with all of `hold` held, K. */
   readonly temperatureChangeHeld: number | null;
-  /** 1 − ΔT/ΔT_held: 1 for a climate that stays, negative for one that amplifies. `null` where one is lost or ΔT_held = 0. */
+  /**
+   * 1 − ΔT/ΔT_held: 1 for a climate that stays, negative for one that amplifies, above 1 for one that turns the change round.
+   * `null` where one of the two is lost, and where the brackets before and after do not tell ΔT_held from 0.
+   */
   readonly regulation: number | null;
   /** What each coupling adds to ΔT, K: Shapley values, so that no order is preferred; they add up to ΔT − ΔT_held. */
   readonly shares: { readonly [K in Couplings<N>]?: number } | null;

@@ -84,6 +84,16 @@ describe("the packed package", () => {
     expect(manual).not.toContain("notebooks");
   });
 
+  test("is written in ASCII: engines store a text with any other letter in twice the space", () => {
+    const dist = path.join(project, "node_modules/thermostead/dist");
+    const programs = fs.readdirSync(dist).filter((file) => /\.c?js$/.test(file));
+    expect(programs.length).toBeGreaterThanOrEqual(2 * doors.length);
+    for (const file of programs) {
+      const text = fs.readFileSync(path.join(dist, file), "utf8");
+      expect(text.split("\n").filter((line) => /[^\0-\x7f]/.test(line))).toEqual([]);
+    }
+  });
+
   test("is cited under the version that it has", () => {
     const shipped = path.join(project, "node_modules/thermostead");
     const { version } = JSON.parse(fs.readFileSync(path.join(shipped, "package.json"), "utf8"));

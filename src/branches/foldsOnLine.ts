@@ -31,7 +31,7 @@ export function foldsOnLine(loop: Loop, line: FoldedLoop, task: Task): FoldParts
     Object.freeze({ at: readAt(temperature, and).at, and, temperature });
   const curves = parts.branches.map((branch): FoldCurve => {
     const middle = branch.points[Math.floor(branch.points.length / 2)] as Branch["points"][number];
-    // along the curve p′ = −λ/N_p, so p″ = −λ′/N_p at a fold
+    // along the curve p' = -lambda/N_p, so p'' = -lambda'/N_p at a fold
     const { answer } = readAt(middle.temperature, middle.at);
     const exists = -middle.feedbackParameter / answer > 0 ? "above" : "below";
     const ends = [endName(branch.low), endName(branch.high)] as const;

@@ -94,7 +94,7 @@ export function gateCurve(loop: Loop, along: string): Curve | undefined {
     method: "line",
     reachesBeyond: true,
     signAt: (temperature) => (signAt(line.slope, temperature) * answer.signAt(temperature)) as Sign,
-    // h = g − curve
+    // h = g - curve
     rises: (temperature) => (-signAt(line.slope, temperature) * gate.direction()) as Sign,
     criticals: (range, effort) => criticalsOf({ feedback: line.slope, kinks, leaps }, range, effort),
     set(givens, between, within) {

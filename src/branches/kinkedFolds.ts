@@ -80,7 +80,7 @@ export function kinkedFolds(loop: Loop, reader: TurnReader, task: Task): FoldPar
     const drawn: readonly (TurnEnd | (typeof points)[number])[] = [low, ...inner, high];
     return Object.freeze({
       kind,
-      // along the curve p′ = −λ/N_p
+      // along the curve p' = -lambda/N_p
       exists: -direction * b > 0 ? "above" : "below",
       range: Object.freeze([low.and, high.and] as const),
       ends: Object.freeze([low.kind, high.kind] as const),

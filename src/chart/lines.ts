@@ -1,7 +1,8 @@
 // How much room text takes, without asking a browser: a little more than the fonts of common systems need.
 
 /** Width of a usual letter, px. Letters of East Asian scripts are wide. */
-const letterWidth = (text: string, size: number): number => size * (/[⺀-￿]/.test(text) ? 1.05 : 0.62);
+const letterWidth = (text: string, size: number): number =>
+  size * (/[\u2e80-\uffff]/.test(text) ? 1.05 : 0.62);
 
 /** Estimated width of a text, px. */
 export const textWidth = (text: string, size: number): number => text.length * letterWidth(text, size);

@@ -59,7 +59,7 @@ const RULES: Readonly<Record<Op, Rule>> = {
   add: (x) => [x.seed, x.seed],
   sub: (x) => [x.seed, x.w.neg(x.seed)],
   mul: (x) => [x.w.mul(x.seed, arg(x, 1)), x.w.mul(x.seed, arg(x, 0))],
-  // ∂(a/b)/∂b = −(a/b)/b
+  // the slope of a/b in b is -(a/b)/b
   div: (x) => {
     const share = x.w.g.node("div", [x.seed, arg(x, 1)]);
     return [share, x.w.neg(x.w.mul(share, x.id))];

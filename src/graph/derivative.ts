@@ -74,7 +74,7 @@ export class Writer {
     if (this.g.ops[a] === "neg") return (this.g.args[a] as readonly number[])[0] as number;
     return this.g.ops[a] === "const" ? this.constant(-(this.g.values[a] as number)) : this.g.node("neg", [a]);
   }
-  /** a·d where d may be zero. */
+  /** The product a d, where d may be zero. */
   times = (a: number, d: number | undefined): number | undefined =>
     d === undefined ? undefined : this.mul(a, d);
   /** The derivatives of what is chosen where a < b, and elsewhere. */
@@ -94,12 +94,12 @@ const RULES: Readonly<Record<Op, Rule>> = {
     x.a === x.b
       ? x.w.mul(x.w.mul(x.w.constant(2), x.a), x.da)
       : x.w.add(x.w.times(x.b, x.da), x.w.times(x.a, x.db)),
-  // (a/b)′ = (a′ − (a/b)·b′)/b
+  // (a/b)' = (a' - (a/b) b')/b
   div: (x) => x.w.g.node("div", [x.w.sub(x.da, x.w.times(x.id, x.db)), x.b]),
   sqrt: (x) => x.w.g.node("div", [x.da, x.w.mul(x.w.constant(2), x.id)]),
   exp: (x) => x.w.mul(x.id, x.da),
   log: (x) => x.w.g.node("div", [x.da, x.a]),
-  // 1 − tanh², from the node itself
+  // 1 - tanh^2, from the node itself
   tanh: (x) => x.w.mul(x.w.g.node("sub", [x.w.constant(1), x.w.mul(x.id, x.id)]), x.da),
   min: (x) => x.w.choose("pick", x.a, x.b, x.da, x.db),
   max: (x) => x.w.choose("pick", x.b, x.a, x.da, x.db),

@@ -51,7 +51,7 @@ const GREEK: Readonly<Record<string, string>> = {
 
 /** `T_eff` in TeX is `T_{\mathrm{eff}}`. */
 export function texSymbol(symbol: string): string {
-  const tex = symbol.replace(/[αετρσ⟨⟩]/g, (letter) => GREEK[letter] as string);
+  const tex = [...symbol].map((letter) => GREEK[letter] ?? letter).join("");
   return tex.replace(
     /_(.+)$/,
     (_, index: string) => `_{${/^[A-Za-z]{2,}$/.test(index) ? `\\mathrm{${index}}` : index}}`,

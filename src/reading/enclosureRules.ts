@@ -1,5 +1,6 @@
-// How each operation encloses its result. In the comments a = a' + α with a' between a.lo and a.hi and |α| ≤ a.err is a
-// true value of a, and b = b' + β one of b.
+// How each operation encloses its result. In the comments a = a' + x with a' between a.lo and a.hi and |x| <= a.err is a
+// true value of a, and b = b' + y one of b. They are plain ASCII: bundlers keep comments inside of objects, and engines
+// store a text with any other letter in twice the space.
 import type { Op } from "../graph/op.ts";
 import { encloseBranch } from "./encloseBranch.ts";
 import { type Enclosure, ofSign, signOf } from "./enclosure.ts";
@@ -28,14 +29,14 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
       a.within[0] - b.within[1],
       a.within[1] - b.within[0],
     ]),
-  // ab − a'b' = a'β + b'α + αβ
+  // ab - a'b' = a'y + b'x + xy
   mul(w, a, b) {
     if (a === b) return square(w, a);
     const error = w.sum(w.times(w.sum(w.size(a), a.err), b.err), w.times(w.size(b), a.err));
     const { lo, hi } = extremes(w, "mul", a, b);
     return w.rounded(lo, hi, error, ofSign(signOf(a) * signOf(b)));
   },
-  // a/b − a'/b' = α/b − (a'/b')(β/b), in an order in which nothing that underflows is divided by something small;
+  // a/b - a'/b' = x/b - (a'/b')(y/b), in an order in which nothing that underflows is divided by something small;
   // b must keep away from zero
   div(w, a, b) {
     const { lo, hi } = extremes(w, "div", a, reciprocalOrder(b));
@@ -52,7 +53,7 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     const declared = b.err === undefined && (b.within[0] > 0 || b.within[1] < 0);
     return w.rounded(lo, hi, declared ? error : w.provided(zero, distance, error), within);
   },
-  // √a − √a' = α / (√a + √a'), no larger than α / √a'; a must not go below zero
+  // sqrt(a) - sqrt(a') = x / (sqrt(a) + sqrt(a')), no larger than x / sqrt(a'); a must not go below zero
   sqrt(w, a) {
     const lo = w.step("sqrt", a.lo);
     const hi = w.step("sqrt", a.hi);
@@ -62,20 +63,20 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
     else if (signOf(a) <= 0) error = w.pick(a.lo, zero, w.literal(NaN), zero);
     return w.rounded(lo, hi, error, NOT_NEGATIVE);
   },
-  // e^a − e^a' = e^a'·(e^α − 1), no larger than e^a'·1.06·|α| where |α| < 0.1
+  // e^a - e^a' = e^a'(e^x - 1), no larger than 1.06 e^a' |x| where |x| < 0.1
   exp: (w, a) =>
     w.approximate("exp", a, NOT_NEGATIVE, ({ hi }, err) =>
       err === undefined
         ? err
         : w.provided(w.widened(err) as number, w.literal(0.1), w.times(w.times(hi, w.literal(1.06)), err)),
     ),
-  // ln a − ln a' is no larger than |α| / min(a, a'); a must stay above zero
+  // ln a - ln a' is no larger than |x| / min(a, a'); a must stay above zero
   log: (w, a) =>
     w.approximate("log", a, ofSign(0), (_, err) => {
       const least = w.less(a.lo, err);
       return w.provided(w.literal(0), least, w.over(err, least));
     }),
-  // no steeper than 1 − tanh² a' + |α|, as its slope changes by less than |α|; 1e-15 is above the rounding of 1 − tanh²
+  // no steeper than 1 - tanh(a')^2 + |x|, as its slope changes by less than |x|; 1e-15 is above the rounding of 1 - tanh^2
   tanh: (w, a) =>
     w.approximate("tanh", a, [signOf(a) > 0 ? 0 : -1, signOf(a) < 0 ? 0 : 1], (value, err) => {
       if (err === undefined) return err;
@@ -95,12 +96,13 @@ export const ENCLOSE: Readonly<Record<Exclude<Op, "const" | "input" | "call">, R
   jump: (w, ...args) => encloseBranch(w, false, args),
 };
 
-// 0 or 1 where the sign is proved, both where it is not; a failure of a stays one
+// 0 or 1 where the sign is proved, both where it is not; 1 at a difference that is exactly 0. A failure of a stays one, as its
+// error has failed with it
 function leap(w: EnclosureWriter, a: Enclosure): Enclosure {
   const zero = w.literal(0);
   const one = w.literal(1);
   const error = w.widened(a.err);
-  const lo = error === undefined ? w.pick(a.lo, zero, zero, one) : w.pick(error, a.lo, one, zero);
+  const lo = error === undefined ? w.pick(a.lo, zero, zero, one) : w.pick(a.lo, error, zero, one);
   const hi = error === undefined ? w.pick(a.hi, zero, zero, one) : w.pick(a.hi, w.neg(error), zero, one);
   return { lo, hi, err: w.times(zero, error), within: [0, 1] };
 }

@@ -107,7 +107,7 @@ export class EnclosureWriter extends ScalarProgram {
     return { lo, hi, err: this.sum(sum, this.literal(TINY)), within };
   }
 
-  /** The same of + and −, which are exact wherever underflow could come in. */
+  /** The same of sums and differences, which are exact wherever underflow could come in. */
   roundedSum(lo: number, hi: number, err: Bound, within: Range, unit = HALF_ULP): Enclosure {
     const own = this.times(this.literal(unit), this.size({ lo, hi, within }));
     return { lo, hi, err: this.sum(err, own), within };

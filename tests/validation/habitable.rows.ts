@@ -8,7 +8,8 @@ import {
   interpolatedRunawayFlux,
   SOLAR_LUMINOSITY,
 } from "../../src/index.ts";
-import { type Check, halfUnit } from "./check.ts";
+import zone from "../reference/computed/habitable_zone.json" with { type: "json" };
+import { type Check, halfUnit, ROUNDED, ROUNDING } from "./check.ts";
 import { ANGLADA_ESCUDE, KOPPARAPU_2013, KOPPARAPU_2014 } from "./sources.ts";
 
 type Named = Pick<HabitableZoneLimit, "year" | "name" | "massEarths">;
@@ -22,12 +23,16 @@ const PROXIMA: Star = { effectiveTemperature: 3050, suns: 0.00155 };
 /** Of the Earth, kg. */
 const EARTH = 5.9721679e24;
 
-function distance(named: Named, { effectiveTemperature, suns }: Star): number {
+function flux(named: Named, effectiveTemperature: number): number {
   const limit = HABITABLE_ZONE_LIMITS.find(
     (l) => l.year === named.year && l.name === named.name && l.massEarths === named.massEarths,
   ) as HabitableZoneLimit;
-  const flux = habitableZoneFlux({ effectiveTemperature, ...limit.coefficients });
-  return habitableZoneDistance({ luminosity: suns * SOLAR_LUMINOSITY, flux }) / ASTRONOMICAL_UNIT;
+  return habitableZoneFlux({ effectiveTemperature, ...limit.coefficients });
+}
+
+function distance(named: Named, { effectiveTemperature, suns }: Star): number {
+  const luminosity = suns * SOLAR_LUMINOSITY;
+  return habitableZoneDistance({ luminosity, flux: flux(named, effectiveTemperature) }) / ASTRONOMICAL_UNIT;
 }
 
 const row = (
@@ -66,6 +71,22 @@ const proxima = (name: Named["name"], published: number): Check =>
     source: ANGLADA_ESCUDE,
   });
 
+/** Of the coolest and the hottest star that the papers cover, where every coefficient weighs. */
+const extreme = ({ T, share, ...rest }: (typeof zone.rows)[number]): Check => {
+  const named = rest as Named;
+  return {
+    covers: ["habitableZoneFlux", "HABITABLE_ZONE_LIMITS"],
+    what: `${named.name} of a star of ${T} K, ${named.massEarths} Earth masses, ${named.year}`,
+    published: 1360 * Number(share),
+    unit: "W m-2",
+    ours: () => flux(named, T),
+    tolerance: ROUNDING * 1360 * Number(share),
+    because: ROUNDED,
+    source: named.year === 2013 ? KOPPARAPU_2013 : KOPPARAPU_2014,
+    basis: "computed with mpmath (habitable_zone.py)",
+  };
+};
+
 const ratio = (earths: number, published: number): Check => ({
   covers: ["interpolatedRunawayFlux"],
   what: `flux at the runaway greenhouse for ${earths} Earth masses over that for one`,
@@ -94,6 +115,7 @@ export const habitableRows: readonly Check[] = [
   later("early Mars", 1, 1.768),
   proxima("runaway greenhouse", 0.0423),
   proxima("maximum greenhouse", 0.0816),
+  ...zone.rows.map(extreme),
   ratio(0.1, 0.9),
   ratio(5, 1.07),
 ];

@@ -8,6 +8,7 @@ import { constantRows } from "./constants.rows.ts";
 import { emissionRows } from "./emissions.rows.ts";
 import { exoplanetRows } from "./exoplanets.rows.ts";
 import { forcingRows } from "./forcing.rows.ts";
+import { forcingFitRows } from "./forcingFits.rows.ts";
 import { habitableRows } from "./habitable.rows.ts";
 import { heatRows } from "./heat.rows.ts";
 import { heatBalanceRows } from "./heatBalance.rows.ts";
@@ -33,7 +34,7 @@ export const subjects: Readonly<Record<string, readonly Check[]>> = {
   Longwave: longwaveRows,
   "Layers and ledgers": ledgerRows,
   "Emission, its limits and its height": emissionRows,
-  Forcing: forcingRows,
+  Forcing: [...forcingRows, ...forcingFitRows],
   "Water and frost": waterRows,
   "Habitable zone": habitableRows,
   "Heat capacity": heatRows,

@@ -378,6 +378,18 @@ export const IAPWS_ICE = source(
   "New equations for the sublimation pressure and melting pressure of H₂O ice Ih, JPCRD 40, 043103",
   "sublimation pressure",
 );
+export const MURPHY_KOOP = source(
+  "Murphy & Koop",
+  "2005",
+  "Review of the vapour pressures of ice and supercooled water for atmospheric applications, QJRMS 131, 1539",
+  "Table C1",
+);
+export const FANALE = source(
+  "Fanale et al.; restated by Forget et al.",
+  "1982",
+  "Mars: the regolith-atmosphere-cap system and climate change, Icarus 50, 381; Icarus 222, 81 (2013)",
+  "frost point of CO₂",
+);
 export const SPAN_WAGNER = source(
   "Span & Wagner",
   "1996",
@@ -388,13 +400,13 @@ export const KOPPARAPU_2013 = source(
   "Kopparapu et al.",
   "2013",
   "Habitable zones around main-sequence stars: new estimates, ApJ 765, 131; erratum ApJ 770, 82",
-  "limits of the Sun, as corrected",
+  "Table 3 and the limits of the Sun, as corrected",
 );
 export const KOPPARAPU_2014 = source(
   "Kopparapu et al.",
   "2014",
   "Habitable zones around main-sequence stars: dependence on planetary mass, ApJL 787, L29",
-  "abstract and limits of the Sun",
+  "abstract, Table 1 and the limits of the Sun",
 );
 export const ANGLADA_ESCUDE = source(
   "Anglada-Escudé et al.",

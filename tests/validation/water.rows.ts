@@ -6,8 +6,8 @@ import {
   saturationTemperature,
 } from "../../src/index.ts";
 import lines from "../reference/computed/phase_lines.json" with { type: "json" };
-import { type Check, halfUnit } from "./check.ts";
-import { IAPWS_ICE, IF97, NIST_WATER, SPAN_WAGNER, WAGNER_PRUSS } from "./sources.ts";
+import { type Check, halfUnit, ROUNDED, ROUNDING } from "./check.ts";
+import { FANALE, IAPWS_ICE, IF97, MURPHY_KOOP, NIST_WATER, SPAN_WAGNER, WAGNER_PRUSS } from "./sources.ts";
 
 const script = "phase_lines.py" as const;
 const printed = { because: "half a unit of the last digit", basis: "from memory" } as const;
@@ -31,6 +31,17 @@ const boiling = (pressure: number, published: number, source: Check["source"], s
   ours: () => saturationTemperature({ pressure }),
   tolerance: halfUnit(step),
   source,
+  ...printed,
+});
+
+const ice = (T: number, published: number, step: number): Check => ({
+  covers: ["saturationPressureIce"],
+  what: `vapour pressure of ice at ${T} K, as the fit's authors print it`,
+  published,
+  unit: "Pa",
+  ours: () => saturationPressureIce({ temperature: T }),
+  tolerance: halfUnit(step),
+  source: MURPHY_KOOP,
   ...printed,
 });
 
@@ -67,6 +78,11 @@ export const waterRows: readonly Check[] = [
     source: IAPWS_ICE,
     ...printed,
   },
+  ice(150, 6.106e-6, 1e-9),
+  ice(180, 0.0053975, 1e-7),
+  ice(210, 0.70202, 1e-5),
+  ice(240, 27.272, 1e-3),
+  ice(273.15, 611.154, 1e-3),
   ...lines.ice.map(
     ({ T, p }): Check => ({
       covers: ["saturationPressureIce"],
@@ -77,6 +93,19 @@ export const waterRows: readonly Check[] = [
       tolerance: (T < 200 ? 4e-3 : 1e-3) * p,
       because: "0.1 % between two assessments of ice, 0.4 % below 200 K, where its heat is known less well",
       source: IAPWS_ICE,
+      basis: `computed with ${script}`,
+    }),
+  ),
+  ...lines.fanale.map(
+    ({ p, T }): Check => ({
+      covers: ["co2FrostPoint"],
+      what: `frost point of CO₂ at ${p} Pa, by the published line`,
+      published: T,
+      unit: "K",
+      ours: () => co2FrostPoint({ pressure: p }),
+      tolerance: ROUNDING * T,
+      because: ROUNDED,
+      source: FANALE,
       basis: `computed with ${script}`,
     }),
   ),

@@ -26,6 +26,11 @@ def dry_ice(T):
     return 517950 * exp(216.592 / T * (-14.740846 * tau + 2.4327015 * tau**1.9 - 5.3061778 * tau**2.9))
 
 
+def fanale(p):
+    """Frost point of CO2, Fanale et al. 1982 as restated by Forget et al. 2013, in K; coefficients from memory."""
+    return -3167.8 / (log(0.01 * p) - 23.23)
+
+
 def frost_point(p):
     return brentq(lambda T: log(dry_ice(T) / p), 60, 216.592, xtol=1e-10)
 
@@ -39,5 +44,6 @@ save(
         "liquid": [{"T": T, "p": liquid(T)} for T in (280, 320, 400, 500, 600, 640)],
         "ice": [{"T": T, "p": ice(T)} for T in (120, 150, 180, 200, 230, 250, 270)],
         "dryIce": [{"p": p, "T": frost_point(p)} for p in (10, 610, 10000, 101325, 500000)],
+        "fanale": [{"p": p, "T": fanale(p)} for p in (1e-6, 610, 500000)],
     },
 )

@@ -6,7 +6,8 @@ import { FROZEN_BELOW, OPEN_ABOVE, openShare, RAMP_DEMANDS } from "./openShare.t
 /**
  * Share of a surface that ice covers: 1 below `frozenBelow`, 0 above `openAbove`,
  * 1 − (T − frozenBelow)/(openAbove − frozenBelow) between, with a kink at each end. A fraction for `mixAlbedo`, so that
- * ice may cover sea and leave plants alone. Temperatures in K, frozenBelow < openAbove. Errors: as for every law.
+ * ice may cover sea and leave plants alone. Temperatures in K from 0 to 10⁵ (published: 200 to 340),
+ * openAbove at least 10⁻⁶ K above frozenBelow. Errors: as for every law.
  * Source: the ramp of Kaper & Engler 2013, Mathematics and Climate (SIAM), read as a cover.
  */
 export const iceShare = /* @__PURE__ */ defineLaw({

@@ -6,7 +6,8 @@ import { openShare, RAMP_DEMANDS, RAMP_PORTS } from "./openShare.ts";
 /**
  * Albedo that falls along a straight line: cold below `frozenBelow`, warm above `openAbove`,
  * α = cold + (warm − cold)·(T − frozenBelow)/(openAbove − frozenBelow) between, with a kink at each end.
- * Temperatures in K, frozenBelow < openAbove; albedos between 0 and 1. Errors: as for every law.
+ * Temperatures in K from 0 to 10⁵ (published: 200 to 340), openAbove at least 10⁻⁶ K above frozenBelow;
+ * albedos between 0 and 1. Errors: as for every law.
  * Source: piecewise-linear form as in Kaper & Engler 2013, Mathematics and Climate (SIAM).
  */
 export const rampAlbedo = /* @__PURE__ */ defineLaw({

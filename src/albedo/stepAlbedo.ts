@@ -5,7 +5,7 @@ import { albedoPort, temperaturePort } from "../law/ports.ts";
 /**
  * Albedo of a planet that is either frozen or open: α = cold below the threshold, warm at and above it. A leap: where the balance
  * changes its sign at the threshold there is no state, and a search says so (`jump`).
- * Temperatures in K; albedos between 0 and 1. Errors: as for every law.
+ * Temperatures in K from 0 to 10⁵; albedos between 0 and 1. Errors: as for every law.
  * Source: Budyko 1969, Tellus 21, 611 (0.62, 0.32, −10 °C).
  */
 export const stepAlbedo = /* @__PURE__ */ defineLaw({

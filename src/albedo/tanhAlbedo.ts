@@ -5,7 +5,8 @@ import { albedoPort, temperaturePort } from "../law/ports.ts";
 /**
  * Albedo that falls smoothly from a frozen to an open surface:
  * α = cold + (warm − cold)·½(1 + tanh((T − midpoint)/width)).
- * Temperatures in K (the width is a temperature difference, above 0); albedos between 0 and 1. Errors: as for every law.
+ * Temperatures in K from 0 to 10⁵ (published: 200 to 340); the width is a difference, from 10⁻⁶ K; albedos
+ * between 0 and 1. Errors: as for every law.
  * Source: Kaper & Engler 2013, Mathematics and Climate (SIAM), with 0.7, 0.3, 265 K, 10 K.
  */
 export const tanhAlbedo = /* @__PURE__ */ defineLaw({

@@ -44,7 +44,8 @@ const CAUTION =
  *
  * The description is that of `readPlanet`, and may be incomplete: without `albedo` (or `surface`), `longwave` or
  * `redistribution` there are no states, without `heatCapacity` no times, without an eccentricity the orbit is a circle;
- * `missing` says so. Inputs that contradict each other are noted, and the first is used. All numbers in SI. The record survives `JSON.stringify`; `toText`, `toMarkdown` and `toRows` write it.
+ * `missing` says so. Inputs that contradict each other are noted, and the first is used. All numbers in SI. The record
+ * survives `JSON.stringify`; `toText`, `toMarkdown` and `toRows` write it.
  *
  * Throws what `readPlanet` throws, except for contradictions, and what `findStates` throws for `within` and `effort`.
  *

@@ -5,7 +5,8 @@ import { parabola, parabolaPorts } from "./parabola.ts";
 /**
  * Share of the surface under plants as a parabola in temperature: a = most·max(0, 1 − ((T − best)/halfWidth)²).
  * No balance of growth and death stands behind it; `steadyCover` has one. A kink at either end.
- * Temperatures in K, the half-width above 0; most between 0 and 1. Errors: as for every law.
+ * Temperatures in K from 0 to 10⁵, the half-width from 10⁻⁶ K; most between 0 and 1. Errors: as for every
+ * law.
  * Source: a simplification used in teaching, no paper.
  */
 export const parabolicCover = /* @__PURE__ */ defineLaw({

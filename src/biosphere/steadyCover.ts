@@ -8,8 +8,9 @@ import { parabola, parabolaPorts } from "./parabola.ts";
  * It is the cover at which growth on the ground that is left, β·(p − a), makes up for the deaths, γ; without growth it is 0.
  * Written a = p·(1 − c/max(β, c)) with c = γ/p, which is the same and finite everywhere: where β > c it is p − γ/β, and
  * elsewhere c/c = 1 and the cover exactly 0. A kink where the cover sets in.
- * Temperatures in K, the half-width above 0; deathRate over the greatest growth rate, above 0 up to 1; available above 0
- * up to 1. Errors: as for every law. Source: Watson & Lovelock 1983, Tellus 35B, 284 (295.5 K, 17.5 K, 0.3, 1).
+ * Temperatures in K from 0 to 10⁵, the half-width from 10⁻⁶ K; deathRate over the greatest growth rate and
+ * available from 10⁻⁶ to 1. Errors: as for every law. Source: Watson & Lovelock 1983, Tellus 35B, 284 (295.5
+ * K, 17.5 K, 0.3, 1).
  */
 export const steadyCover = /* @__PURE__ */ defineLaw({
   name: "steadyCover",

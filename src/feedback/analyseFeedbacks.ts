@@ -27,8 +27,8 @@ export interface AnalyseFeedbacksOptions<N extends string = string> {
  * and names that are not couplings change nothing, and a coarser choice of couplings sums a finer one.
  *
  * Throws `unknown-name` (with the nearest coupling), `foreign-state`, `several-variables`, `unreadable`, `missing`,
- * `not-a-number`, `not-finite` (a slope at the state), `out-of-range`. Source: Roe 2009, Annu. Rev. Earth Planet. Sci. 37, 93; the sign of λ is that of the
- * IPCC's sixth report.
+ * `not-a-number`, `not-finite` (a slope at the state), `out-of-range`. Source: Roe 2009, Annu. Rev. Earth Planet.
+ * Sci. 37, 93; the sign of λ is that of the IPCC's sixth report.
  *
  * @example analyseFeedbacks(loop, state).loops // [{ through: ["opticalDepth"], feedbackParameter: 0.683, … }, …]
  */

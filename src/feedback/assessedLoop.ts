@@ -18,7 +18,8 @@ export type AssessedNames<F extends string> = "variable temperature" | "given fo
  * unless said; no answer depends on it. Heat capacity 0: there is no time in it.
  *
  * Estimates in W m⁻² K⁻¹ between −1000 and 1000, the reference at most 0: negative restores. Valid for changes small enough
- * for the feedbacks to stay constant. Throws `missing`, `not-a-number`, `out-of-range`, `unreadable`, `repeated-name`.
+ * for the feedbacks to stay constant. Throws `missing`, `not-a-number`, `out-of-range`, `unknown-name`, `unreadable`,
+ * `repeated-name`.
  * Source: Gregory et al. 2004, Geophys. Res. Lett. 31, L03205.
  */
 export function assessedLoop<F extends string>(

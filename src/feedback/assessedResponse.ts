@@ -35,8 +35,9 @@ export interface AssessedResponse<F extends string = string> {
  * the part that each has in it. Best estimates only; where the assessment states a climate sensitivity a note quotes it,
  * because a sensitivity is assessed from more lines of evidence than the sum of the feedbacks.
  *
- * Throws `missing`, `not-a-number`, `out-of-range`, `too-large` (more than 12 to hold), `unknown-name`, `unreadable`;
- * `out-of-range` also if reference and feedbacks cancel (λ = 0).
+ * Forcing in W m⁻² between −1000 and 1000, λ in W m⁻² K⁻¹. Throws `missing`, `not-a-number`, `out-of-range` (also if
+ * reference and feedbacks cancel, λ = 0), `too-large` (more than 12 to hold), `unknown-name`, `unreadable`.
+ * Sources: Gregory et al. 2004, Geophys. Res. Lett. 31, L03205; of the shares: Shapley 1953.
  *
  * @example assessedResponse(AR6_FEEDBACKS, { forcing: 3.93 }).response.temperatureChange // 3.388 K
  */

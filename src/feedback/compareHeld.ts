@@ -36,7 +36,8 @@ export interface CompareHeldOptions<N extends string = string> {
  * with proof that it stays the same branch. Where one crosses a fold there is no ΔT to share: `shares` is `null`, and `lost`
  * says which choices lose their state, at which givens and temperature, and to which state the climate goes from there.
  *
- * `regulation` is `null` where one of the two is lost, and where ΔT_held is not told from 0.
+ * `regulation` is `null` where one of the two is lost, and where ΔT_held is not told from 0. Temperatures in K, givens in
+ * their own units. Of n couplings all 2ⁿ choices are followed.
  *
  * Throws `unknown-name` (with the nearest), `missing` (no change, nothing to hold), `too-large`, `foreign-state`,
  * `out-of-range`, `not-a-number`, `unreadable`, `several-variables`. Source of the shares: Shapley 1953.

@@ -4,8 +4,9 @@ import { outgoingPort } from "../law/ports.ts";
 
 /**
  * Emission to space less a forcing: F = clear − forcing, in W m⁻²: the way a forcing enters a budget, on the cooling side.
- * The forcing may be negative. Where the emission's optical depth already holds the same gas, it would count twice.
- * Errors: as for every law. Source: a forcing is the change of the net flux that it brings at a given temperature.
+ * Emission from −10¹² to 10¹², forcing from −10⁴ to 10⁴. Where the emission's optical depth already holds the
+ * same gas, it would count twice. Errors: as for every law. Source: a forcing is the change of the net flux
+ * that it brings at a given temperature.
  */
 export const forcedEmission = /* @__PURE__ */ defineLaw({
   name: "forcedEmission",

@@ -1,5 +1,7 @@
 // The recordable operations: numbers are folded at once, quantities are recorded. Both give the same bits.
 // On plain numbers they are IEEE arithmetic and check nothing: a law checks what goes into it and what comes out.
+// All throw `not-a-quantity` for what is neither a number nor a quantity, `other-loop` for quantities of two loops, and
+// `unit-mismatch` where units are told and do not fit. They hold for all numbers, and have no source but arithmetic.
 import { exp as expOf } from "../ground/elementary/exp.ts";
 import { log as logOf } from "../ground/elementary/log.ts";
 import { max as maxOf, min as minOf } from "../ground/elementary/minMax.ts";

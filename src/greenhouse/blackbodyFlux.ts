@@ -3,7 +3,10 @@ import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
 import { temperaturePort } from "../law/ports.ts";
 
-/** Flux that a black body emits: F = σT⁴, in W m⁻². Temperature in K. Errors: as for every law. Source: Stefan–Boltzmann law. */
+/**
+ * Flux that a black body emits: F = σT⁴, in W m⁻². Temperature in K from 0 to 10⁵. Errors: as for every law.
+ * Source: Stefan–Boltzmann law; σ from CODATA 2018.
+ */
 export const blackbodyFlux = /* @__PURE__ */ defineLaw({
   name: "blackbodyFlux",
   about: "Flux that a black body emits.",

@@ -4,7 +4,8 @@ import { STRAIGHT_RANGE, straightLine } from "./straightLine.ts";
 
 /**
  * Outgoing longwave radiation of the Earth as Budyko drew it, half cloudy: F = 202 + 1.45·(T − 273.15 K), in W m⁻².
- * Surface temperature in K; fitted to monthly means of stations, so about 230 to 300 K. Errors: as for every law.
+ * Surface temperature in K from 0 to 10⁵; fitted to monthly means of stations, so about 230 to 300 K. Errors:
+ * as for every law.
  * Source: Budyko 1969, Tellus 21, 611.
  */
 export const budykoEmission = /* @__PURE__ */ defineLaw({

@@ -5,11 +5,12 @@ import { outgoingPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Emission that cannot exceed a ceiling until the ground glows: F = min(emission, ceiling) + w·σ·max(0, T⁴ − T_h⁴), in
- * W m⁻². Give the emission without a ceiling, and the ceiling (`RUNAWAY_LIMITS.outgoing`, or a limit of grey theory), in
- * W m⁻²; ground temperature in K. Above `hotAbove`, 1400 K unless said, the ground shines through the near infrared, and a
- * runaway ends on this hot branch. Its onset is published, its shape is ours: w is the `window`, the share that gets out
- * of what is emitted beyond the onset, 1 unless said. Continuous, with a kink at each end of the ceiling. Errors: as for
- * every law. Source: Goldblatt & Watson 2012, Phil. Trans. R. Soc. A 370, 4197.
+ * W m⁻². Give the emission without a ceiling, and the ceiling (`RUNAWAY_LIMITS.outgoing`, or a limit of grey
+ * theory), in W m⁻² from 0 to 10⁶; temperatures in K from 0 to 10⁵. Above `hotAbove`, 1400 K unless said, the
+ * ground shines through the near infrared, and a runaway ends on this hot branch. Its onset is published, its
+ * shape is ours: w is the `window`, the share that gets out of what is emitted beyond the onset, 0 to 1, 1
+ * unless said. Continuous, with a kink at each end of the ceiling. Errors: as for every law. Source:
+ * Goldblatt & Watson 2012, Phil. Trans. R. Soc. A 370, 4197.
  */
 export const ceilingEmission = /* @__PURE__ */ defineLaw({
   name: "ceilingEmission",

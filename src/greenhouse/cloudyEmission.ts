@@ -5,8 +5,9 @@ import { outgoingPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Outgoing longwave radiation above grey clouds: F = (1 − f)·F_clear + f[(1 − ε)·F_clear + ε·σT_c⁴], in W m⁻².
- * `clear` is the emission without clouds in W m⁻²; `share` of the sky, `emissivity` between 0 and 1 and `temperature` in K
- * are the clouds'. What lies above the clouds is taken as transparent. Errors: as for every law.
+ * `clear` is the emission without clouds in W m⁻² from 0 to 10¹³; `share` of the sky and `emissivity`, both
+ * between 0 and 1, and `temperature` in K from 0 to 10⁵ are the clouds'. What lies above the clouds is taken
+ * as transparent. Errors: as for every law.
  * Source: a grey layer over a column; Kirchhoff's law.
  */
 export const cloudyEmission = /* @__PURE__ */ defineLaw({

@@ -5,7 +5,7 @@ import { LAPSE_RATE } from "./lapse.ts";
 
 /**
  * Height from which a planet seems to emit to space: z_e = (T_s − T_e)/Γ, in m; negative where the ground is the colder.
- * Temperatures in K, lapse rate in K m⁻¹. Errors: as for every law.
+ * Temperatures in K from 0 to 10⁵, lapse rate in K m⁻¹ from 10⁻⁶ to 1. Errors: as for every law.
  * Source: Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441.
  */
 export const emissionHeight = /* @__PURE__ */ defineLaw({

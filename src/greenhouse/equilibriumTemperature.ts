@@ -3,22 +3,22 @@ import { STEFAN_BOLTZMANN } from "../ground/constants.ts";
 import { defineLaw } from "../law/defineLaw.ts";
 import { albedoPort, fluxPort } from "../law/ports.ts";
 
-/** Redistribution factor: heat spread over the whole sphere. */
+/** Redistribution factor 1/4: heat spread over the whole sphere. Source: Hansen 2008, ApJS 179, 484. */
 export const REDISTRIBUTION_GLOBAL = 0.25;
-/** Redistribution factor: heat spread evenly over the day side. */
+/** Redistribution factor 1/2: heat spread evenly over the day side. Source: Hansen 2008, ApJS 179, 484. */
 export const REDISTRIBUTION_DAYSIDE = 0.5;
-/** Redistribution factor: heat re-radiated where it falls, the day side seen from the star. */
+/** Redistribution factor 2/3: heat re-radiated where it falls, seen from the star. Source: Hansen 2008, ApJS 179, 484. */
 export const REDISTRIBUTION_INSTANT = 0.6666666666666666;
-/** Redistribution factor: the substellar point without any transport. */
+/** Redistribution factor 1: the substellar point without any transport. Source: Cowan & Agol 2011, ApJ 729, 54. */
 export const REDISTRIBUTION_SUBSTELLAR = 1;
 
 /**
  * Equilibrium temperature: εσT⁴ = f·S(1 − A) + F_i, solved for T in K. It is not the surface temperature.
- * Stellar flux normal to the beam and internal flux (per unit of whole area, not multiplied by f) in W m⁻², Bond albedo
- * between 0 and 1, emissivity above 0 (1 unless said). The redistribution factor f between 0 and 1 must be given: 1/4
- * whole sphere, 1/2 day side, 2/3 day side without transport seen from the star, 1 substellar point, from 0 to 1/4 a night
- * side. Errors: as for every law.
- * Source: Hansen 2008; Cowan & Agol 2011, ApJ 729, 54.
+ * Stellar flux normal to the beam from 0 to 10¹² and internal flux (per unit of whole area, not multiplied by
+ * f) from 0 to 10⁹ in W m⁻², Bond albedo between 0 and 1, emissivity from 10⁻⁹ to 1 (1 unless said). The
+ * redistribution factor f between 0 and 1 must be given: 1/4 whole sphere, 1/2 day side, 2/3 day side without
+ * transport seen from the star, 1 substellar point, from 0 to 1/4 a night side. Errors: as for every law.
+ * Source: Hansen 2008, ApJS 179, 484; Cowan & Agol 2011, ApJ 729, 54.
  */
 export const equilibriumTemperature = /* @__PURE__ */ defineLaw({
   name: "equilibriumTemperature",

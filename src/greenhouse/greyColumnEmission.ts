@@ -6,8 +6,9 @@ import { closurePort, greyBlanket, opticalDepthPort } from "./greyBlanket.ts";
 
 /**
  * Emission to space of a grey column in radiative equilibrium over a black ground: F = σT⁴/(1 + ½·closure·τ), in W m⁻².
- * Ground temperature in K, total longwave optical depth from 0, closure (diffusivity factor) 3/2 for Eddington's or 2.
- * Errors: as for every law. Source: Eddington's grey atmosphere; Goody & Yung 1989, Atmospheric Radiation.
+ * Ground temperature in K from 0 to 10⁵, total longwave optical depth from 0 to 10¹², closure (diffusivity
+ * factor) from 1 to 2, Eddington's 3/2 unless said. Errors: as for every law. Source: Eddington's grey
+ * atmosphere; Goody & Yung 1989, Atmospheric Radiation.
  */
 export const greyColumnEmission = /* @__PURE__ */ defineLaw({
   name: "greyColumnEmission",

@@ -5,7 +5,7 @@ import { outgoingPort, temperaturePort } from "../law/ports.ts";
 
 /**
  * Emission of a grey surface: F = εσT⁴, in W m⁻².
- * Temperature in K, emissivity between 0 and 1. Errors: as for every law.
+ * Temperature in K from 0 to 10⁵, emissivity between 0 and 1. Errors: as for every law.
  * Source: Stefan–Boltzmann law; σ from CODATA 2018.
  */
 export const greyEmission = /* @__PURE__ */ defineLaw({

@@ -5,8 +5,9 @@ import { closurePort, greyBlanket, groundUnder, opticalDepthPort } from "./greyB
 /**
  * Temperature of the black ground under a grey column in radiative equilibrium: T_g = T_e·(1 + ½Dτ)^¼, in K. The air
  * that touches the ground is colder, and the skin at the top is colder still (`greySkinTemperature`).
- * Effective temperature in K, total longwave optical depth from 0, closure (diffusivity factor) 3/2 for Eddington's or 2.
- * Errors: as for every law. Source: Eddington's grey atmosphere; Goody & Yung 1989, Atmospheric Radiation.
+ * Effective temperature in K from 0 to 10⁵, total longwave optical depth from 0 to 10⁶, closure (diffusivity
+ * factor) from 1 to 2, Eddington's 3/2 unless said. Errors: as for every law. Source: Eddington's grey
+ * atmosphere; Goody & Yung 1989, Atmospheric Radiation.
  */
 export const greyGroundTemperature = /* @__PURE__ */ defineLaw({
   name: "greyGroundTemperature",

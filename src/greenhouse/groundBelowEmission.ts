@@ -5,7 +5,8 @@ import { EMISSION_HEIGHT, LAPSE_RATE } from "./lapse.ts";
 
 /**
  * Ground temperature below the height from which a planet emits: T_s = T_e + Γ·z_e, in K.
- * Temperature in K, lapse rate in K m⁻¹, height in m. Errors: as for every law.
+ * Temperature in K from 0 to 10⁵, lapse rate in K m⁻¹ from 10⁻⁶ to 1, height in m from −10⁶ to 10⁶. Errors:
+ * as for every law.
  * Source: Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441.
  */
 export const groundBelowEmission = /* @__PURE__ */ defineLaw({

@@ -6,8 +6,9 @@ import { EMISSION_HEIGHT, LAPSE_RATE } from "./lapse.ts";
 
 /**
  * Outgoing longwave radiation of a column that emits from one height: F = σ·max(0, T − Γ·z_e)⁴, in W m⁻².
- * Ground temperature in K, lapse rate in K m⁻¹, height in m; nothing leaves a ground colder than Γ·z_e. Errors: as for
- * every law. Source: Held & Soden 2000, Annu. Rev. Energy Environ. 25, 441.
+ * Ground temperature in K from 0 to 10⁵, lapse rate in K m⁻¹ from 10⁻⁶ to 1, height in m from −10⁶ to 10⁶;
+ * nothing leaves a ground colder than Γ·z_e. Errors: as for every law. Source: Held & Soden 2000, Annu. Rev.
+ * Energy Environ. 25, 441.
  */
 export const heightEmission = /* @__PURE__ */ defineLaw({
   name: "heightEmission",

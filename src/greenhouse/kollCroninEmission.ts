@@ -5,8 +5,9 @@ import { STRAIGHT_RANGE, straightLine } from "./straightLine.ts";
 /**
  * Outgoing longwave radiation under a clear, moist sky, which water vapour makes straight over 60 K and more:
  * F = F₀ + 2.2·(T − T₀), in W m⁻². The slope is theirs. The point it goes through is not: unless given, it is the
- * emission of the present Earth, 240.1 W m⁻² (Loeb et al. 2018) at 288 K, clouds included. Temperatures in K, emission in
- * W m⁻². Errors: as for every law. Source: Koll & Cronin 2018, PNAS 115, 10293.
+ * emission of the present Earth, 240.1 W m⁻² (Loeb et al. 2018) at 288 K, clouds included. Temperatures in K
+ * from 0 to 10⁵, straight at about 230 to 300 K; emission in W m⁻² from 0 to 10⁶. Errors: as for every law.
+ * Source: Koll & Cronin 2018, PNAS 115, 10293.
  */
 export const kollCroninEmission = /* @__PURE__ */ defineLaw({
   name: "kollCroninEmission",

@@ -11,9 +11,9 @@ const STEPS = 4;
 /**
  * The most that a grey stratosphere can let out above a moist troposphere: the largest 2σT⁴/(1 + Dτ) over all tropopause
  * temperatures T, where τ = h·k·p*(T)/g is the optical depth of the vapour above, D = 3/2, p* = 1.4·10¹¹ Pa·exp(−5250.5 K/T).
- * In W m⁻²; absorption coefficient k in m² kg⁻¹, gravity in m s⁻², relative humidity h at the tropopause from 0.01 (1 unless
- * said). With 0.01 m² kg⁻¹ and 9.8 m s⁻² it is 385 W m⁻². The limit of the troposphere (`simpsonNakajimaLimit`) is
- * usually lower. Errors: as for every law.
+ * In W m⁻²; absorption coefficient k in m² kg⁻¹ from 10⁻⁴ to 10, gravity in m s⁻² from 0.1 to 100, relative
+ * humidity h at the tropopause from 0.01 to 1 (1 unless said). With 0.01 m² kg⁻¹ and 9.8 m s⁻² it is 385 W
+ * m⁻². The limit of the troposphere (`simpsonNakajimaLimit`) is usually lower. Errors: as for every law.
  * Source: Komabayashi 1967; Ingersoll 1969; Nakajima, Hayashi & Abe 1992, J. Atmos. Sci. 49, 2256.
  */
 export const komabayashiIngersollLimit = /* @__PURE__ */ defineLaw({

@@ -7,8 +7,9 @@ import { closurePort, groundUnder, halfSlantDepth, opticalDepthPort } from "./gr
  * Temperature of the black ground under a grey column cut into N equal layers, each of one temperature:
  * T_g = T_e·(1 + N·tanh(Dτ/2N))^¼, in K. A layer absorbs 1 − exp(−Dτ/N). With more layers it comes up to
  * `greyGroundTemperature`, the difference of T_g⁴/T_e⁴ being −(Dτ)³/24N² to leading order.
- * Effective temperature in K, total longwave optical depth from 0, number of layers from 1 (any real number is read),
- * closure (diffusivity factor) 3/2 for Eddington's or 2. Errors: as for every law.
+ * Effective temperature in K from 0 to 10⁵, total longwave optical depth from 0 to 10⁶, number of layers from
+ * 1 to 10⁴ (any real number is read), closure (diffusivity factor) from 1 to 2, Eddington's 3/2 unless said.
+ * Errors: as for every law.
  * Source: sum of the balances of leaky layers, with r = ε/(2 − ε) = tanh(Dτ/2N); Goody & Yung 1989 for the limit.
  */
 export const layeredGroundTemperature = /* @__PURE__ */ defineLaw({

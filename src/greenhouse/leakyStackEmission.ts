@@ -46,11 +46,12 @@ type Stack = Body<typeof inputs>;
  * Emission to space of a surface under leaky layers without heat capacity, from the top down. With r = ε/(2 − ε),
  * κ = (1 − ε_s)/ε_s and Q_i the heat put into the layers above interface i by anything but longwave:
  * F = [σT_s⁴ + κQ_N + ½(Q_N + Σ r_i(Q_{i−1} + Q_i))]/(1 + Σ r_i + κ), in W m⁻².
- * A layer absorbs and emits the share ε of longwave, between 0 and 1, and lets the rest through; the surface reflects
- * 1 − ε_s. Heating in W m⁻²: absorbed starlight, convection. The whole column's heating stands in the budget of a loop.
- * Errors: as for every law; `out-of-range` where a layer has no steady state, because it is heated and has ε = 0, or gives
- * away more than it gets. `leakyStackLedger` has all flows. Source: two streams through layers that do not scatter
- * (Goody & Yung 1989, Atmospheric Radiation), summed over the layers.
+ * A layer absorbs and emits the share ε of longwave, between 0 and 1, and lets the rest through; the surface
+ * reflects 1 − ε_s, with ε_s from 10⁻⁹ to 1 (1 unless said). Surface temperature in K from 0 to 10⁵; heating
+ * in W m⁻² from −10⁹ to 10⁹: absorbed starlight, convection. The whole column's heating stands in the budget
+ * of a loop. Errors: as for every law; `out-of-range` where a layer has no steady state, because it is heated
+ * and has ε = 0, or gives away more than it gets. `leakyStackLedger` has all flows. Source: two streams
+ * through layers that do not scatter (Goody & Yung 1989, Atmospheric Radiation), summed over the layers.
  */
 export const leakyStackEmission = /* @__PURE__ */ defineLaw({
   name: "leakyStackEmission",

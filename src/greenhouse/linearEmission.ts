@@ -4,8 +4,9 @@ import { STRAIGHT_RANGE, straightLine } from "./straightLine.ts";
 
 /**
  * Outgoing longwave radiation as a straight line: F = A + B(T − T₀), in W m⁻².
- * A at the reference temperature in W m⁻², B in W m⁻² K⁻¹, temperatures in K. B already holds water vapour and lapse rate.
- * Errors: as for every law. Source: Budyko 1969, Tellus 21, 611 (A 202, B 1.45 with T₀ = 0 °C); North et al. 1981
+ * A at the reference temperature in W m⁻² from −10⁶ to 10⁶, B in W m⁻² K⁻¹ from 0 to 10⁴, temperatures in K
+ * from 0 to 10⁵, for the Earth about 230 to 300 K. B already holds water vapour and lapse rate. Errors: as
+ * for every law. Source: Budyko 1969, Tellus 21, 611 (A 202, B 1.45 with T₀ = 0 °C); North et al. 1981
  * (203.3, 2.09); straight over at least 60 K on Earth: Koll & Cronin 2018.
  */
 export const linearEmission = /* @__PURE__ */ defineLaw({

@@ -4,7 +4,7 @@ import { STRAIGHT_RANGE, straightLine } from "./straightLine.ts";
 
 /**
  * Outgoing longwave radiation of the Earth fitted to satellites outside the tropics: F = 203.3 + 2.09·(T − 273.15 K), in
- * W m⁻². Surface temperature in K, about 230 to 300 K. Errors: as for every law.
+ * W m⁻². Surface temperature in K from 0 to 10⁵; fitted at about 230 to 300 K. Errors: as for every law.
  * Source: North, Cahalan & Coakley 1981, Rev. Geophys. 19, 91, Eq. 6.
  */
 export const northEmission = /* @__PURE__ */ defineLaw({

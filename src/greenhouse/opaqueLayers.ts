@@ -4,7 +4,8 @@ import { effectiveTemperaturePort } from "../law/ports.ts";
 
 /**
  * Surface temperature under layers that are transparent to starlight and opaque to longwave: T_s = (N + 1)^¼·T_e, in K.
- * Effective temperature in K, number of layers from 0 (any real number is read). Errors: as for every law.
+ * Effective temperature in K from 0 to 10⁵, number of layers from 0 to 10⁴ (any real number is read). Errors:
+ * as for every law.
  * Source: Marshall & Plumb 2008, Atmosphere, Ocean, and Climate Dynamics, §2.3.
  */
 export const opaqueLayers = /* @__PURE__ */ defineLaw({

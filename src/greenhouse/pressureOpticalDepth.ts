@@ -7,7 +7,8 @@ const surfacePressure = (symbol: string, about: string) =>
 /**
  * Longwave optical depth of a well-mixed absorber that scales with surface pressure: τ = τ₀(p/p₀)ⁿ. The exponent is 1
  * where absorption per mass does not depend on pressure and 2 where lines broaden with it or colliding molecules absorb;
- * it must be given, between 0.5 and 3. Pressures in Pa, optical depths without unit. Errors: as for every law.
+ * it must be given, between 0.5 and 3 (published: 1 to 2). Pressures in Pa from 10⁻³ to 10¹⁰, depth τ₀ at p₀
+ * from 0 to 10⁶. Errors: as for every law.
  * Source: Robinson & Catling 2012, ApJ 757, 104.
  */
 export const pressureOpticalDepth = /* @__PURE__ */ defineLaw({

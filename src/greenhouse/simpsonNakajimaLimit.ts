@@ -25,8 +25,8 @@ const RULE = [
 /**
  * What a grey, saturated troposphere of pure steam emits when so warm that the ground is out of sight:
  * F = ∫₀^∞ σT⁴·e^(−t) dt with t = D·k·p*(T)/g the slant optical depth above, D = 3/2, p* = 1.4·10¹¹ Pa·exp(−5250.5 K/T).
- * In W m⁻²; absorption coefficient k in m² kg⁻¹, gravity in m s⁻². With 0.01 m² kg⁻¹ and 9.8 m s⁻² it is 293.5 W m⁻².
- * A ceiling for `ceilingEmission`. Errors: as for every law.
+ * In W m⁻²; absorption coefficient k in m² kg⁻¹ from 10⁻⁴ to 10, gravity in m s⁻² from 0.1 to 100. With 0.01
+ * m² kg⁻¹ and 9.8 m s⁻² it is 293.5 W m⁻². A ceiling for `ceilingEmission`. Errors: as for every law.
  * Source: Simpson 1928; Nakajima, Hayashi & Abe 1992, J. Atmos. Sci. 49, 2256.
  */
 export const simpsonNakajimaLimit = /* @__PURE__ */ defineLaw({

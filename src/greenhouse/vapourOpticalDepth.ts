@@ -8,9 +8,10 @@ const VAPOUR_GAS_CONSTANT = 461.5;
 
 /**
  * Longwave optical depth of water vapour that scales with saturation pressure:
- * τ = h·τ₀·exp[(L/R_v)(1/T₀ − 1/T)], L = 2.5·10⁶ J kg⁻¹, R_v = 461.5 J kg⁻¹ K⁻¹. Ground temperatures in K, τ₀ the depth of
- * a saturated column at T₀, h the relative humidity (1 unless said). With a constant L this is a scaling and no
- * saturation pressure: from 273 to 320 K it grows 6 % too much. Errors: as for every law.
+ * τ = h·τ₀·exp[(L/R_v)(1/T₀ − 1/T)], L = 2.5·10⁶ J kg⁻¹, R_v = 461.5 J kg⁻¹ K⁻¹. Ground temperature T in K
+ * from 1 to 10⁵ (fitting at 230 to 320 K), T₀ from 100 to 1000 K, τ₀ from 0 to 10⁶ the depth of a saturated
+ * column at T₀, h from 0 to 1 the relative humidity (1 unless said). With a constant L this is a scaling and
+ * no saturation pressure: from 273 to 320 K it grows 6 % too much. Errors: as for every law.
  * Source: Clausius–Clapeyron relation; grey form as in Pierrehumbert 2010, Principles of Planetary Climate, ch. 4.
  */
 export const vapourOpticalDepth = /* @__PURE__ */ defineLaw({

@@ -2,7 +2,10 @@
 import { add, mul, sub } from "../graph/operations.ts";
 import type { Value } from "../graph/quantity.ts";
 
-/** The unit of the published fluxes: what they take as the flux at the Earth, W m⁻². */
+/**
+ * The unit of the published fluxes, 1360 W m⁻²: what they take as the flux at the Earth.
+ * Source: Kopparapu et al. 2013, ApJ 765, 131.
+ */
 export const HABITABLE_ZONE_FLUX_UNIT = 1360;
 /** The effective temperature from which the published polynomials count, K. */
 export const HABITABLE_ZONE_SUN = 5780;

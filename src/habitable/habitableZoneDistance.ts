@@ -6,7 +6,7 @@ import { HABITABLE_ZONE_FLUX_UNIT } from "./fluxPolynomial.ts";
 /**
  * Distance of a limit of the habitable zone from its star, in m: d = 1 au·√((L/L☉)/(F/1360 W m⁻²)), as the papers have it.
  * Because the flux of L☉ at 1 au is 1361.2 W m⁻² and not 1360, it is 0.04 % less than √(L/4πF).
- * Luminosity in W, flux of the limit in W m⁻². Errors: as for every law.
+ * Luminosity in W from 0 to 10³⁵, flux of the limit in W m⁻² from 10⁻⁶ to 10¹². Errors: as for every law.
  * Source: Kopparapu et al. 2013, ApJ 765, 131, eq. 3.
  */
 export const habitableZoneDistance = /* @__PURE__ */ defineLaw({

@@ -13,7 +13,8 @@ const LOG_10 = 2.302585092994046;
 /**
  * Flux at the limit of the runaway greenhouse for a planet between 0.1 and 5 Earth masses, in W m⁻². The paper computed it for
  * 0.1, 1 and 5 Earth masses, and there this law is the paper's; between them it is a straight line in ln m: the interpolation
- * is this library's, not the paper's. Effective temperature in K from 2600 to 7200, mass in kg. Errors: as for every law.
+ * is this library's, not the paper's. Effective temperature in K from 2600 to 7200, mass in kg from 5.97·10²³
+ * to 2.99·10²⁵. Errors: as for every law.
  * Source: Kopparapu et al. 2014, ApJL 787, L29, Table 1.
  */
 export const interpolatedRunawayFlux = /* @__PURE__ */ defineLaw({

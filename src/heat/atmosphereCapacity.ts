@@ -3,7 +3,8 @@ import { defineLaw } from "../law/defineLaw.ts";
 
 /**
  * Heat capacity of a whole atmosphere at constant pressure: C = c_p·p_s/g, in J m⁻² K⁻¹.
- * Surface pressure in Pa, gravity in m s⁻² (above 0), specific heat in J kg⁻¹ K⁻¹. Errors: as for every law.
+ * Surface pressure in Pa from 0 to 10¹², gravity in m s⁻² from 10⁻⁶ to 10⁶, specific heat in J kg⁻¹ K⁻¹ from
+ * 0 to 10⁶. Errors: as for every law.
  * Source: hydrostatic balance, the column's mass is p_s/g.
  */
 export const atmosphereCapacity = /* @__PURE__ */ defineLaw({

@@ -3,7 +3,8 @@ import { defineLaw } from "../law/defineLaw.ts";
 
 /**
  * Heat capacity of a well-mixed layer of water or rock: C = ρ·c_p·h, in J m⁻² K⁻¹ of the layer's area.
- * Depth in m, density in kg m⁻³, specific heat in J kg⁻¹ K⁻¹. Errors: as for every law.
+ * Depth in m from 0 to 10⁶, density in kg m⁻³ from 0 to 10⁵, specific heat in J kg⁻¹ K⁻¹ from 0 to 10⁶.
+ * Errors: as for every law.
  * Source: definition; mixed-layer use as in Hartmann 2016, Global Physical Climatology.
  */
 export const mixedLayerCapacity = /* @__PURE__ */ defineLaw({

@@ -10,6 +10,10 @@ import { isList, wire } from "./wiring.ts";
 /**
  * Defines a law of physics once: from its ports come the checks of inputs and units, the notes, the documentation and the
  * printed formula; from its body every reading. The body is nested recordable operations and must not branch on values.
+ * Units are products of SI units, and each value is in that of its port; `within` is where the law has a meaning.
+ *
+ * Throws `unreadable` without ports or body. A wrong unit or range of a port is refused when the law is first recorded
+ * (`unknown-unit`, `out-of-range`, `not-a-number`). The law itself throws what `Law` says.
  *
  * @example
  * const heatLeak = defineLaw({

@@ -16,8 +16,8 @@ export interface Slopes {
 /**
  * The value of a law and its slope in every input, from the symbolic derivative of its formula. At a kink the slope is
  * one-sided; for a sampled law it is a difference quotient. A fraction that must be a number (in `mixAlbedo` without
- * `bare`) has no slope of its own and is left out. Throws what the law throws,
- * and `unreadable` for what is no law.
+ * `bare`) has no slope of its own and is left out. Throws `unreadable` for what is no law, and what a law throws (`Law`):
+ * `missing`, `unknown-name`, `not-a-number`, `out-of-range`, `not-finite`.
  */
 export function slopesOf<I extends Ports>(law: Law<I>, wires: Wires<I, number>): Slopes {
   checkRecord((law as Partial<Law> | undefined)?.card, "law", "a card, as a law has");

@@ -4,7 +4,8 @@ import { eccentricityPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Stellar flux where the orbit is farthest from the star, normal to the beam: S = S(a)/(1 + e)², in W m⁻².
- * Errors: as for every law; an eccentricity of 1 or more is out of range.
+ * Flux S(a) at the distance of the semi-major axis in W m⁻² from 0 to 10¹², eccentricity from 0 to 0.9999.
+ * Errors: as for every law.
  * Source: Kepler's first law (the distance is a(1 + e)), inverse-square law.
  */
 export const apoastronFlux = /* @__PURE__ */ defineLaw({

@@ -4,8 +4,8 @@ import { eccentricityPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Time-mean stellar flux over an eccentric orbit: ⟨S⟩ = S(a)/√(1 − e²), in W m⁻².
- * The right average where the thermal time is much longer than the orbital period. Errors: as for every law; an
- * eccentricity of 1 or more is out of range.
+ * The right average where the thermal time is much longer than the orbital period. Flux S(a) at the distance
+ * of the semi-major axis in W m⁻² from 0 to 10¹², eccentricity from 0 to 0.9999. Errors: as for every law.
  * Source: Quirrenbach 2022 (thermal time against period); the mean itself follows from Kepler's second law.
  */
 export const orbitMeanFlux = /* @__PURE__ */ defineLaw({

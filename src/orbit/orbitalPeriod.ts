@@ -5,7 +5,8 @@ import { defineLaw } from "../law/defineLaw.ts";
 
 /**
  * Period of a light body's orbit from its semi-major axis: P = 2π√(a³/(G·M)), in s; the inverse of `semiMajorAxis`.
- * Semi-major axis in m, mass of the star in kg (both above 0); the planet's own mass is neglected. Errors: as for every law.
+ * Semi-major axis in m from 1 to 10¹⁷, mass of the star in kg from 10²⁰ to 10³⁵; the planet's own mass is
+ * neglected. Errors: as for every law.
  * Source: Kepler's third law; G from CODATA 2018.
  */
 export const orbitalPeriod = /* @__PURE__ */ defineLaw({

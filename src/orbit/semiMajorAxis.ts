@@ -5,7 +5,8 @@ import { defineLaw } from "../law/defineLaw.ts";
 
 /**
  * Semi-major axis of a light body's orbit from its period: a = (G·M·P²/4π²)^⅓, in m.
- * Period in s, mass of the star in kg (both above 0); the planet's own mass is neglected. Errors: as for every law.
+ * Period in s from 1 to 10¹³, mass of the star in kg from 10²⁰ to 10³⁵; the planet's own mass is neglected.
+ * Errors: as for every law.
  * Source: Kepler's third law; G from CODATA 2018.
  */
 export const semiMajorAxis = /* @__PURE__ */ defineLaw({

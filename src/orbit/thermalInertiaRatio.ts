@@ -10,8 +10,9 @@ export const INSTANT_FLUX_INERTIA = 0.01;
  * Thermal time over orbital period: Π = C/(P·∂OLR/∂T), without unit. From about 1 (`MEAN_FLUX_INERTIA`) on a planet
  * answers to the mean flux over its orbit, up to about 0.01 (`INSTANT_FLUX_INERTIA`) to the flux of the moment; between
  * them neither average is right.
- * Heat capacity in J m⁻² K⁻¹, period in s, slope of the outgoing longwave radiation in W m⁻² K⁻¹ (above 0). Errors: as
- * for every law. Source: Ji, Chatterjee, Park Coy & Kite 2023, ApJL 943, L1.
+ * Heat capacity in J m⁻² K⁻¹ from 0 to 10¹⁵, period in s from 1 to 10¹³, slope of the outgoing longwave
+ * radiation in W m⁻² K⁻¹ from 10⁻⁶ to 10⁶. Errors: as for every law. Source: Ji, Chatterjee, Park Coy & Kite
+ * 2023, ApJL 943, L1.
  */
 export const thermalInertiaRatio = /* @__PURE__ */ defineLaw({
   name: "thermalInertiaRatio",

@@ -4,7 +4,7 @@ import { albedoPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Starlight that a sphere absorbs, per unit of its whole area: F = S(1 − α)/4, in W m⁻².
- * Flux normal to the beam in W m⁻², Bond albedo between 0 and 1. Errors: as for every law.
+ * Flux normal to the beam in W m⁻² from 0 to 10¹², Bond albedo between 0 and 1. Errors: as for every law.
  * Source: a sphere's cross-section is a quarter of its area.
  */
 export const absorbedFlux = /* @__PURE__ */ defineLaw({

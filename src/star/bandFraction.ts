@@ -11,8 +11,9 @@ const LONGEST = 1e6;
 
 /**
  * Share of a black body's energy between two wavelengths: (15/π⁴)∫x³/(eˣ − 1)dx, x = hc/(λkT) from that of `to` to that of
- * `from`. Temperature in K, wavelengths in m; `from` is 0 and `to` has no limit unless said, so that a dividing
- * wavelength is given as `to` for what is below it, as `from` for what is above.
+ * `from`. Temperature in K from 1 to 10⁶, wavelengths in m from 0 to 10⁶; `from` is 0 and `to` has no limit
+ * unless said, so that a dividing wavelength is given as `to` for what is below it, as `from` for what is
+ * above.
  *
  * These are shares of the energy, never of photons. A real star is no black body (an M dwarf least of all): where the
  * shares of its spectrum are known, they are better. Computed from series with all digits, 17 terms in e⁻ˣ for x ≥ 2,

@@ -4,7 +4,7 @@ import { distancePort, stellarRadiusPort } from "./starPorts.ts";
 
 /**
  * Distance from a star in units of its radius: d/R, as transits give it.
- * Distance and radius in m (both above 0). Errors: as for every law. Source: the definition.
+ * Distance in m from 1 to 10²², radius in m from 1 to 10¹⁴. Errors: as for every law. Source: the definition.
  */
 export const distanceInRadii = /* @__PURE__ */ defineLaw({
   name: "distanceInRadii",

@@ -4,8 +4,8 @@ import { defineLaw } from "../law/defineLaw.ts";
 
 /**
  * Flux of a star at a distance given in stellar radii, normal to the beam: S = σT_eff⁴/(d/R)², in W m⁻².
- * Effective temperature in K, distance in radii of the star, from 1 (its surface). A transit gives d/R without the
- * radius or the mass of the star. Errors: as for every law.
+ * Effective temperature in K from 0 to 10⁶, distance in radii of the star from 1 (its surface) to 10¹⁴. A
+ * transit gives d/R without the radius or the mass of the star. Errors: as for every law.
  * Source: definition of effective temperature, inverse-square law; use: Cowan & Agol 2011, ApJ 729, 54.
  */
 export const fluxAtRadii = /* @__PURE__ */ defineLaw({

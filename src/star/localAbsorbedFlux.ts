@@ -4,8 +4,9 @@ import { albedoPort, fluxPort } from "../law/ports.ts";
 
 /**
  * Starlight absorbed per unit of the area over which its heat is spread: F = f·S(1 − α), in W m⁻².
- * Flux normal to the beam in W m⁻², Bond albedo between 0 and 1, redistribution factor f between 0 and 1: 1/4 for the
- * whole sphere (the same as `absorbedFlux`), 1 for the substellar point. Errors: as for every law.
+ * Flux normal to the beam in W m⁻² from 0 to 10¹², Bond albedo between 0 and 1, redistribution factor f
+ * between 0 and 1: 1/4 for the whole sphere (the same as `absorbedFlux`), 1 for the substellar point. Errors:
+ * as for every law.
  * Source: Hansen 2008; Cowan & Agol 2011, ApJ 729, 54.
  */
 export const localAbsorbedFlux = /* @__PURE__ */ defineLaw({

@@ -5,7 +5,7 @@ import { distancePort, luminosityPort } from "./starPorts.ts";
 
 /**
  * Flux of a star at a distance, normal to the beam: S = L/(4πd²), in W m⁻².
- * Luminosity in W, distance in m (above 0). Errors: as for every law; a distance of 0 is out of range.
+ * Luminosity in W from 0 to 10⁴⁰, distance in m from 1 to 10²². Errors: as for every law.
  * Source: conservation of energy (inverse-square law).
  */
 export const stellarFlux = /* @__PURE__ */ defineLaw({

@@ -5,7 +5,7 @@ import { defineLaw } from "../law/defineLaw.ts";
 
 /**
  * Luminosity of a star from its radius and effective temperature: L = 4πR²σT_eff⁴, in W.
- * Radius in m, effective temperature in K. Errors: as for every law.
+ * Radius in m from 0 to 10¹⁴, effective temperature in K from 0 to 10⁶. Errors: as for every law.
  * Source: the definition of effective temperature (IAU 2015 Resolution B3 uses it with the same σ).
  */
 export const stellarLuminosity = /* @__PURE__ */ defineLaw({

@@ -46,7 +46,8 @@ const flowKernel = /* @__PURE__ */ kept((loop) =>
  * Heating and cooling of a loop with one variable, W m⁻² of the planet's whole area, at evenly spaced temperatures: what
  * is drawn to see where the two balance. It samples and proves nothing; `findStates` does.
  *
- * Throws `out-of-range`, `not-a-number`, `unreadable` (for `within`), `unknown-name`, `several-variables`.
+ * Temperatures in K. Throws `out-of-range`, `not-a-number`, `missing` and `unreadable` (for `within`), `unknown-name`,
+ * `several-variables`.
  *
  * @example budgetCurve(loop, { within: [150, 400] }).points.length // 201
  */

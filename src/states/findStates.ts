@@ -35,8 +35,11 @@ export interface FindStatesOptions<N extends string = string> {
  * double arithmetic, the laws as they are written, and givens inside their declared ranges. A loop with a sampled law is
  * searched by sampling and proves nothing (`proof: "sampled"`).
  *
- * Throws `out-of-range`, `not-a-number`, `unreadable` (for `within`), `unknown-name`, `several-variables`, and
- * `not-finite` when a quantity to be read in a state has no finite value there.
+ * Temperatures in K, λ in W m⁻² K⁻¹, times in s. Throws `out-of-range`, `not-a-number`, `missing` and `unreadable` (for
+ * `within`), `unknown-name`, `several-variables`, and `not-finite` when a quantity to be read in a state has no finite
+ * value there. Source of the method: Moore, Kearfott & Cloud 2009, Introduction to Interval Analysis (SIAM).
+ *
+ * @example findStates(loop, { within: [150, 400], at: { flux: 1400 } }).states[0].temperature
  */
 export function findStates<N extends string>(loop: Loop<N>, options: FindStatesOptions<N>): FoundStates<N> {
   checkKeys(options, "findStates", ["within", "at", "effort"]);

@@ -27,8 +27,13 @@ export interface FindStatesForOptions {
  * of compiled kernels. A row that cannot be searched, as with a NaN or a value outside its declared range, is flagged
  * `refused` with its reason and has no states; it is never dropped, and it does not stop the others.
  *
+ * Columns are arrays or typed arrays of one length, each in the unit of its given. Temperatures in K and λ in W m⁻² K⁻¹
+ * come out as typed arrays over all states: row i has those from `first[i]` to before `first[i + 1]`.
+ *
  * Throws `missing` without a column, `contradiction` when columns differ in length, `unknown-name`, `unreadable`,
- * `out-of-range`, `several-variables`.
+ * `out-of-range`, `not-a-number` (for `within`), `several-variables`.
+ *
+ * @example findStatesFor(loop, { flux: [1000, 1361] }, { within: [150, 400] }).counts
  */
 export function findStatesFor<N extends string>(
   loop: Loop<N>,

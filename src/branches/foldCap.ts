@@ -9,9 +9,9 @@ import { middleOf, nearestProved } from "./stretch.ts";
 
 /**
  * How two folds meet: in a `cusp` their states become one; at an `isola` an island of states shrinks to a point; at a
- * `transcritical` point two branches cross.
+ * `transcritical` point two branches cross; at a `change` a fold goes on as a corner.
  */
-export type MeetingKind = "cusp" | "isola" | "transcritical";
+export type MeetingKind = "cusp" | "isola" | "transcritical" | "change";
 
 /** A box in which two folds meet once, on one side of a value of the second given, and in which there is no other. */
 export interface FoldCap {
@@ -20,7 +20,7 @@ export interface FoldCap {
   readonly at: FoldPlace;
   /** Proved bounds of the second given there. */
   readonly atBracket: Range;
-  /** The two exist above it, or below. */
+  /** The two exist above it, or below; at a change, the smooth fold. */
   readonly exists: "above" | "below";
 }
 

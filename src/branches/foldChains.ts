@@ -1,8 +1,8 @@
 // Follows folds through values of the second given: chains of tubes, and what they end in.
-import { type FoldCap, foldCaps } from "./foldCap.ts";
+import type { FoldCap } from "./foldCap.ts";
 import type { ChainEnd, FoldChain } from "./foldChain.ts";
 import { foldExit } from "./foldExit.ts";
-import { type FoldBox, type FoldPlace, type FoldSystem, inside } from "./foldSystem.ts";
+import { type FoldBox, type FoldPlace, inside } from "./foldSystem.ts";
 import {
   commonOf,
   type FoldTube,
@@ -16,6 +16,7 @@ import {
   sectionOf,
 } from "./foldTube.ts";
 import { mergeChains } from "./mergeChains.ts";
+import type { PairSystem } from "./pairSystem.ts";
 import { pointAt } from "./planeReader.ts";
 
 /** Ranges of temperature and of both givens in which folds are sought. */
@@ -27,20 +28,33 @@ const SUSPECT = 0.003;
 const FINEST_STEP = 1e-8;
 const MOST_TUBES = 2000;
 
-/** Follows folds, and remembers where they meet. */
-export function foldChains(system: FoldSystem, space: Space) {
+/** The places where folds meet, as far as they are known. */
+export interface Meetings {
+  readonly caps: readonly FoldCap[];
+  /** Looks for one near a place. */
+  look(near: FoldPlace): void;
+}
+
+/** Remembers meetings; `seek` looks for them near a place. */
+export function meetingsOf(seek: (near: FoldPlace) => readonly FoldCap[], caps: FoldCap[] = []): Meetings {
+  const isNew = ({ at, atBracket }: FoldCap) =>
+    !caps.some((c) => isPart(atBracket, c.box.q) && isWithin(boxed(at), c.box));
+  return {
+    caps,
+    look(near) {
+      for (const cap of seek(near)) if (isNew(cap)) caps.push(cap);
+    },
+  };
+}
+
+/** Follows zeros of a system, folds or corners, up to where they meet others. */
+export function foldChains(system: PairSystem, space: Space, { caps, look }: Meetings) {
   const chains: FoldChain[] = [];
-  const caps: FoldCap[] = [];
   const plane = { t: space.t, p: space.p };
   const width = space.q[1] - space.q[0];
 
   const capAt = (box: FoldBox): FoldCap | undefined =>
     caps.find((c) => inside(box.t, c.box.t) && inside(box.p, c.box.p) && isPart(box.q, c.box.q));
-  const newCap = (near: FoldPlace): void => {
-    for (const cap of foldCaps(system, near, space)) {
-      if (!caps.some((c) => isPart(cap.atBracket, c.box.q) && isWithin(boxed(cap.at), c.box))) caps.push(cap);
-    }
-  };
 
   /** The tubes from a place on in one direction, and the end. */
   const half = (
@@ -58,7 +72,11 @@ export function foldChains(system: FoldSystem, space: Space) {
       const here = last ? sectionOf(system, last, q) : undefined;
       const at = last ? foldOn(system, last, q) : start;
       const cap = here && capAt(here);
-      if (cap) return { tubes, end: { kind: cap.kind, at: cap.at, atBracket: cap.atBracket, cap } };
+      if (cap) {
+        const goesOn = system.kind === "fold" ? "corner" : "fold";
+        const kind = cap.kind === "change" ? goesOn : cap.kind;
+        return { tubes, end: { kind, at: cap.at, atBracket: cap.atBracket, cap } };
+      }
       // a gap is what is left of a meeting that is not proved; beyond it nothing is followed twice
       if (
         here &&
@@ -82,7 +100,8 @@ export function foldChains(system: FoldSystem, space: Space) {
         last ? placeIn(last, (q + next) / 2) : at,
         direction > 0 ? [q, next] : [next, q],
       );
-      if (tube && (!here || isWithin(here, commonOf(tube, pointAt(q))))) {
+      const isNext = tube && system.accepts(foldIn(tube, tube.q));
+      if (isNext && (!here || isWithin(here, commonOf(tube, pointAt(q))))) {
         tubes.push(tube);
         last = tube;
         q = next;
@@ -92,7 +111,7 @@ export function foldChains(system: FoldSystem, space: Space) {
       step = Math.abs(next - q) / 2;
       if (step < FINEST_STEP * width) return { tubes, end: openEnd(at, q) };
       if (step < suspect && last) {
-        newCap(at);
+        look(at);
         suspect /= 16;
       }
     }
@@ -100,7 +119,6 @@ export function foldChains(system: FoldSystem, space: Space) {
   };
 
   return {
-    caps: caps as readonly FoldCap[],
     chains: chains as readonly FoldChain[],
     /** Follows the fold near a place, if one is proved there. */
     follow(start: FoldPlace): void {

@@ -1,6 +1,7 @@
 // Proves that no other fold is in a space of temperature and two givens: boxes without one, in a tube or in a cap.
 import type { Range } from "../ground/range.ts";
 import { meet, signOfRange } from "../search/interval.ts";
+import type { CornerSystem } from "./cornerSystem.ts";
 import type { FoldCap } from "./foldCap.ts";
 import type { FoldChain } from "./foldChain.ts";
 import type { Space } from "./foldChains.ts";
@@ -14,15 +15,23 @@ import {
   inside,
   middles,
 } from "./foldSystem.ts";
-import { commonOf } from "./foldTube.ts";
+import { commonOf, isPart, type Plane } from "./foldTube.ts";
 import { rangeOf } from "./mergeChains.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
 import type { OpenBox } from "./undecidedFolds.ts";
 
-/** What is known of the folds. */
-export interface KnownFolds {
+/** Zeros of a system, followed; `follow` is called with the place of one that is not known yet. */
+interface Followed<S> {
+  readonly system: S;
   readonly chains: readonly FoldChain[];
+  follow(place: FoldPlace): void;
+}
+
+/** What is known of folds, of the corners of each kink, and of the places where they meet. */
+export interface KnownFolds {
+  readonly folds: Followed<FoldSystem>;
+  readonly corners: readonly Followed<CornerSystem>[];
   readonly caps: readonly FoldCap[];
 }
 
@@ -37,17 +46,13 @@ interface Waiting extends FoldBox {
   readonly idle: number;
 }
 
-/**
- * Branch and prune. `found` is called with the place of a fold that is not known yet; it may add to what is known. Returns
- * the boxes that are not decided.
- */
+/** Branch and prune: follows what it comes upon, and returns the boxes that are not decided. */
 export function foldCover(
-  system: FoldSystem,
   space: Space,
   known: KnownFolds,
-  found: (place: FoldPlace) => void,
   effort: number,
 ): { open: OpenBox[]; boxes: number } {
+  const { system } = known.folds;
   const waiting: Waiting[] = [{ ...space, idle: 0 }];
   const open: OpenBox[] = [];
   let boxes = 0;
@@ -61,11 +66,17 @@ export function foldCover(
     const read = system.read(box);
     if (isEmpty(system, box, read)) continue;
     let { idle } = box;
-    if (idle <= 0 && !isNearSingular(read)) {
-      idle = IDLE;
-      const place = system.fold({ t: middleOf(box.t), p: middleOf(box.p), q: middleOf(box.q) });
-      const isHere = place && inside(pointAt(place.t), space.t) && inside(pointAt(place.p), space.p);
-      if (isHere && !isKnown(boxAt(place), known)) found(place);
+    if (idle <= 0) {
+      const sought = [...(isNearSingular(read) ? [] : [known.folds]), ...known.corners.filter(isAt(box))];
+      if (sought.length > 0) idle = IDLE;
+      for (const { system, chains, follow } of sought) {
+        const place = system.solve({ t: middleOf(box.t), p: middleOf(box.p), q: middleOf(box.q) });
+        const isHere = place && inside(pointAt(place.t), space.t) && inside(pointAt(place.p), space.p);
+        if (!isHere || !system.accepts(boxAt(place))) continue;
+        // the tube of another kink may reach as far as here
+        const isNew = ![...chains, ...known.caps].some((one) => isPartOf(boxAt(place), one));
+        if (isNew) follow(place);
+      }
       if (isKnown(box, known)) continue;
     }
     const side = widest(box, space, read);
@@ -75,20 +86,31 @@ export function foldCover(
   return { open, boxes };
 }
 
-function isKnown(box: FoldBox, { chains, caps }: KnownFolds): boolean {
-  const isPart = (a: Range, b: Range) => a[0] >= b[0] && a[1] <= b[1];
+/** Whether a kink may be in a box. */
+const isAt =
+  (box: FoldBox) =>
+  ({ system }: Followed<CornerSystem>): boolean =>
+    signOfRange(system.kink(box).g) === 0;
+
+/** In a tube, or in a cap. In the tube of a corner there is no fold where N_T has a sign on either side of the kink. */
+function isKnown(box: FoldBox, { folds, corners, caps }: KnownFolds): boolean {
   return (
-    caps.some(({ box: cap }) => isPart(box.t, cap.t) && isPart(box.p, cap.p) && isPart(box.q, cap.q)) ||
-    chains.some((chain) => {
-      if (!isPart(box.q, rangeOf(chain))) return false;
-      return chain.tubes.every((tube) => {
-        const shared = meet(tube.q, box.q);
-        if (!(shared[0] <= shared[1])) return true;
-        const common = commonOf(tube, shared);
-        return isPart(box.t, common.t) && isPart(box.p, common.p);
-      });
-    })
+    [...caps, ...folds.chains].some((one) => isPartOf(box, one)) ||
+    corners.some(
+      ({ system, chains }) =>
+        chains.some((chain) => isPartOf(box, chain)) && system.slopes(box).every((sign) => sign !== 0),
+    )
   );
+}
+
+function isPartOf(box: FoldBox, whole: FoldChain | FoldCap): boolean {
+  const holds = ({ t, p }: Plane) => isPart(box.t, t) && isPart(box.p, p);
+  if ("box" in whole) return holds(whole.box) && isPart(box.q, whole.box.q);
+  if (!isPart(box.q, rangeOf(whole))) return false;
+  return whole.tubes.every((tube) => {
+    const shared = meet(tube.q, box.q);
+    return !(shared[0] <= shared[1]) || holds(commonOf(tube, shared));
+  });
 }
 
 /** No fold in the box: N or its slope has one sign. */

@@ -1,12 +1,12 @@
 // How a fold leaves the ranges of temperature and of the first given.
-import { minus, over, plus, signOfRange, times } from "../search/interval.ts";
+import { signOfRange } from "../search/interval.ts";
 import type { ChainEnd } from "./foldChain.ts";
-import type { FoldSystem } from "./foldSystem.ts";
-import { boxOf, type FoldTube, foldIn, foldOn, isPart, type Plane, sectionOf } from "./foldTube.ts";
+import { type FoldTube, foldIn, foldOn, isPart, type Plane, sectionOf } from "./foldTube.ts";
+import type { PairSystem } from "./pairSystem.ts";
 
 /** A fold that has left the plane: through which side, and that it did so once. */
 export function foldExit(
-  system: FoldSystem,
+  system: PairSystem,
   plane: Plane,
   passed: readonly FoldTube[],
   direction: 1 | -1,
@@ -20,9 +20,7 @@ export function foldExit(
   const edge = beyond[x][1] < plane[x][0] ? plane[x][0] : plane[x][1];
   const outward = edge === plane[x][0] ? -1 : 1;
   for (const tube of passed) {
-    const { nt: _, np, nq, ntt, ntp, ntq } = system.read(boxOf(tube, tube.q));
-    const byP = minus(over(nq, np));
-    const speed = x === "p" ? byP : minus(over(plus(ntq, times(ntp, byP)), ntt));
+    const speed = system.speeds(foldIn(tube, tube.q))[x === "p" ? 1 : 0];
     if (signOfRange(speed) !== outward * direction) return undefined;
     const stays = foldIn(tube, tube.q)[x === "p" ? "t" : "p"];
     if (!isPart(stays, plane[x === "p" ? "t" : "p"])) return undefined;

@@ -3,7 +3,8 @@ import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
-import { meet, plus, signOfRange, times } from "../search/interval.ts";
+import { meet, minus, over, plus, times } from "../search/interval.ts";
+import { type Pair, type PairSystem, solvedPair } from "./pairSystem.ts";
 import { type PlaneReader, planeReader, pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
 
@@ -41,12 +42,20 @@ export interface Further {
   readonly npq: Range;
 }
 
-const MOST_STEPS = 20;
+/** The equations and how they are read. */
+export interface FoldSystem extends PairSystem {
+  set(givens: readonly number[]): void;
+  read(box: FoldBox): Equations;
+  further(box: FoldBox): Further;
+  /** N_p and N_TT at a place, not proved. */
+  signs(place: FoldPlace): { readonly np: number; readonly ntt: number };
+}
+
 const EQUATIONS = ["n", "nt", "np", "nq", "ntt", "ntp", "ntq"] as const;
 const FURTHER = ["npp", "nttt", "nttp", "ntpp", "nttq", "npq"] as const;
 
 /** The equations of a loop; `places` are those of both givens among its givens, as text with a space between. */
-export const foldSystem = /* @__PURE__ */ kept((loop, places) => {
+export const foldSystem = /* @__PURE__ */ kept((loop, places): FoldSystem => {
   const { graph, net } = loop;
   const inputs = inputsOf(loop);
   const [first, second] = places.split(" ").map(Number) as [number, number];
@@ -79,6 +88,10 @@ export const foldSystem = /* @__PURE__ */ kept((loop, places) => {
     ];
     return { n, nt, np, nq, ntt, ntp, ntq };
   };
+  const pair = (box: FoldBox): Pair => {
+    const { n, nt, np, nq, ntt, ntp, ntq } = read(box);
+    return { f: n, ft: nt, fp: np, fq: nq, g: nt, gt: ntt, gp: ntp, gq: ntq };
+  };
   return {
     set(givens: readonly number[]) {
       set = givens;
@@ -93,35 +106,22 @@ export const foldSystem = /* @__PURE__ */ kept((loop, places) => {
       }
       return named(FURTHER, more.over(t, p, q)) as Further;
     },
-    /** N_p and N_TT at a place, not proved. */
-    signs(place: FoldPlace): { np: number; ntt: number } {
+    signs(place) {
       const { np, ntt } = middles(read(boxAt(place)));
       return { np, ntt };
     },
-    /** About the fold near a place at its q; undefined where Newton's method does not settle. */
-    fold({ t, p, q }: FoldPlace): FoldPlace | undefined {
-      let [u, v] = [t, p];
-      let nearly: FoldPlace | undefined;
-      for (let i = 0; i < MOST_STEPS; i++) {
-        const bounds = read(boxAt({ t: u, p: v, q }));
-        // rounding may keep the steps from vanishing
-        if (signOfRange(bounds.n) === 0 && signOfRange(bounds.nt) === 0) nearly = { t: u, p: v, q };
-        const { n, nt, np, ntt, ntp } = middles(bounds);
-        const scale = nt * ntp - np * ntt;
-        const [du, dv] = [(n * ntp - nt * np) / scale, (nt * nt - n * ntt) / scale];
-        u -= du;
-        v -= dv;
-        if (!Number.isFinite(u + v)) break;
-        if (!(Math.abs(du) > 1e-14 * Math.abs(u) || Math.abs(dv) > 1e-14 * Math.abs(v)))
-          return { t: u, p: v, q };
-      }
-      return nearly;
+    pair,
+    speeds(box) {
+      // N_T is zero at a fold
+      const { fp, fq, gt, gp, gq } = pair(box);
+      const byP = minus(over(fq, fp));
+      return [minus(over(plus(gq, times(gp, byP)), gt)), byP];
     },
+    kind: "fold",
+    accepts: () => true,
+    solve: (near) => solvedPair(pair, near),
   };
 });
-
-/** The equations and how they are read. */
-export type FoldSystem = ReturnType<typeof foldSystem>;
 
 /** The middles of bounds. */
 export const middles = <T extends Equations | Further>(bounds: T): Record<keyof T, number> =>

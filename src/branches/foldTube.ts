@@ -2,7 +2,8 @@
 import type { Range } from "../ground/range.ts";
 import { above, below } from "../search/enclosed.ts";
 import { plus, times } from "../search/interval.ts";
-import { boxAt, type FoldBox, type FoldPlace, type FoldSystem, middles } from "./foldSystem.ts";
+import { boxAt, type FoldBox, type FoldPlace } from "./foldSystem.ts";
+import { middlesOf, type PairSystem } from "./pairSystem.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
 
@@ -24,41 +25,35 @@ const SLOWEST = 2;
 const LEAST = 1e-12;
 
 /**
- * Krawczyk's operator in coordinates that move along with the fold: with Y about the inverse of the Jacobian J of (N, N_T) in
- * (T, p), each fold in the tube is within |Y·(N, N_T)| on the line, plus |1 − Y·J|·reach, of the line; if that is less than the
- * reach, there is exactly one at each q. On the line N changes by (N_q + N_T·T′ + N_p·p′)·(q − q₀), and N_T likewise.
+ * Krawczyk's operator in coordinates that move along with the fold: with Y about the inverse of the Jacobian J of (f, g) in
+ * (T, p), each fold in the tube is within |Y·(f, g)| on the line, plus |1 − Y·J|·reach, of the line; if that is less than the
+ * reach, there is exactly one at each q. On the line f changes by (f_q + f_T·T′ + f_p·p′)·(q − q₀), and g likewise. For a fold they are N and N_T.
  */
-export function foldTube(system: FoldSystem, near: FoldPlace, q: Range): FoldTube | undefined {
+export function foldTube(system: PairSystem, near: FoldPlace, q: Range): FoldTube | undefined {
   const middle = middleOf(q);
-  const at = system.fold({ ...near, q: middle });
+  const at = system.solve({ ...near, q: middle });
   if (!at) return undefined;
-  const start = system.read(boxAt(at));
-  const m = middles(start);
-  const scale = m.nt * m.ntp - m.np * m.ntt;
-  const inverse = [m.ntp / scale, -m.np / scale, -m.ntt / scale, m.nt / scale] as const;
-  const along = [
-    -(inverse[0] * m.nq + inverse[1] * m.ntq),
-    -(inverse[2] * m.nq + inverse[3] * m.ntq),
-  ] as const;
+  const start = system.pair(boxAt(at));
+  const m = middlesOf(start);
+  const scale = m.ft * m.gp - m.fp * m.gt;
+  const inverse = [m.gp / scale, -m.fp / scale, -m.gt / scale, m.ft / scale] as const;
+  const along = [-(inverse[0] * m.fq + inverse[1] * m.gq), -(inverse[2] * m.fq + inverse[3] * m.gq)] as const;
   if (!Number.isFinite(along[0] + along[1])) return undefined;
-  const line = system.read(boxOf({ at, along, reach: [0, 0] }, q));
+  const line = system.pair(boxOf({ at, along, reach: [0, 0] }, q));
   const [dt, dp] = [pointAt(along[0]), pointAt(along[1])];
   const away: Range = [below(q[0] - middle), above(q[1] - middle)];
   const onLine = (value: Range, byQ: Range, byT: Range, byP: Range) =>
     plus(value, times(plus(byQ, plus(times(byT, dt), times(byP, dp))), away));
-  const [n, slope] = [
-    onLine(start.n, line.nq, line.nt, line.np),
-    onLine(start.nt, line.ntq, line.ntt, line.ntp),
-  ];
+  const [f, g] = [onLine(start.f, line.fq, line.ft, line.fp), onLine(start.g, line.gq, line.gt, line.gp)];
   const row = (i: 0 | 2) => [pointAt(inverse[i]), pointAt(inverse[i + 1] as number)] as const;
-  const miss = ([a, b]: readonly [Range, Range]) => size(plus(times(a, n), times(b, slope)));
+  const miss = ([a, b]: readonly [Range, Range]) => size(plus(times(a, f), times(b, g)));
   const [missT, missP] = [miss(row(0)), miss(row(2))];
   /** How far a fold in the tube can be from its line. */
   const within = (reach: readonly [number, number]): readonly [number, number] => {
-    const { nt, np, ntt, ntp } = system.read(boxOf({ at, along, reach }, q));
+    const { ft, fp, gt, gp } = system.pair(boxOf({ at, along, reach }, q));
     const far = ([a, b]: readonly [Range, Range], own: 0 | 1) => {
-      const byT = size(plus(pointAt(own === 0 ? -1 : 0), plus(times(a, nt), times(b, ntt))));
-      const byP = size(plus(pointAt(own === 1 ? -1 : 0), plus(times(a, np), times(b, ntp))));
+      const byT = size(plus(pointAt(own === 0 ? -1 : 0), plus(times(a, ft), times(b, gt))));
+      const byP = size(plus(pointAt(own === 1 ? -1 : 0), plus(times(a, fp), times(b, gp))));
       return above(above(byT * reach[0]) + above(byP * reach[1]));
     };
     return [above(missT + far(row(0), 0)), above(missP + far(row(2), 1))];
@@ -74,19 +69,20 @@ export function foldTube(system: FoldSystem, near: FoldPlace, q: Range): FoldTub
     core = within(reach);
   }
   // where the proof holds in a wider tube as well, it says that nothing else is there
-  for (let [i, growT, growP] = [0, FASTEST, FASTEST]; i < MOST_ENLARGEMENTS && growT + growP > 2; i++) {
-    const turn = growT > 1 && (i % 2 === 0 || growP === 1);
-    const wider: readonly [number, number] = turn
-      ? [growT * reach[0], reach[1]]
-      : [reach[0], growP * reach[1]];
+  const factors: [number, number] = [FASTEST, FASTEST];
+  for (let i = 0; i < MOST_ENLARGEMENTS && factors[0] + factors[1] > 2; i++) {
+    const side = factors[0] > 1 && (i % 2 === 0 || factors[1] === 1) ? 0 : 1;
+    const other = side === 0 ? 1 : 0;
+    const factor = factors[side];
+    const wider: readonly [number, number] =
+      side === 0 ? [factor * reach[0], reach[1]] : [reach[0], factor * reach[1]];
     const wide = within(wider);
     if (wide[0] < wider[0] && wide[1] < wider[1]) {
       reach = wider;
+      factors[side] = Math.min(2 * factor, FASTEST);
       // a wider tube on this side may leave room on the other
-      if (turn) growP = Math.max(growP, SLOWEST);
-      else growT = Math.max(growT, SLOWEST);
-    } else if (turn) growT = growT > SLOWEST ? SLOWEST : 1;
-    else growP = growP > SLOWEST ? SLOWEST : 1;
+      factors[other] = Math.max(factors[other], SLOWEST);
+    } else factors[side] = factor > SLOWEST ? SLOWEST : 1;
   }
   return { q, at, along, reach, core };
 }
@@ -123,9 +119,9 @@ export const placeIn = ({ at, along }: FoldTube, q: number): FoldPlace => ({
 });
 
 /** The same, closer where Newton's method settles in the tube. */
-export function foldOn(system: FoldSystem, tube: FoldTube, q: number): FoldPlace {
+export function foldOn(system: PairSystem, tube: FoldTube, q: number): FoldPlace {
   const about = placeIn(tube, q);
-  const place = system.fold(about);
+  const place = system.solve(about);
   return place && isWithin(boxAt(place), boxOf(tube, pointAt(q))) ? place : about;
 }
 
@@ -136,7 +132,7 @@ export const isPart = (a: Range, b: Range): boolean => a[0] >= b[0] && a[1] <= b
 export const isWithin = (a: Plane, b: Plane): boolean => isPart(a.t, b.t) && isPart(a.p, b.p);
 
 /** The fold of a tube at one value, in tight bounds. */
-export function sectionOf(system: FoldSystem, tube: FoldTube, q: number): FoldBox {
+export function sectionOf(system: PairSystem, tube: FoldTube, q: number): FoldBox {
   const fine = foldTube(system, placeIn(tube, q), pointAt(q));
   const tight = fine && foldIn(fine, pointAt(q));
   return tight && isWithin(tight, commonOf(tube, pointAt(q))) ? tight : foldIn(tube, pointAt(q));

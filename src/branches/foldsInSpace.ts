@@ -1,13 +1,16 @@
 // The folds in two givens of any loop, in ranges of both: followed in tubes, and proved to be all.
 import type { Loop } from "../loop/types.ts";
-import type { FoldCap } from "./foldCap.ts";
+import { type CornerSystem, cornerSystems } from "./cornerSystem.ts";
+import { type FoldCap, foldCaps } from "./foldCap.ts";
 import type { ChainEnd, FoldChain } from "./foldChain.ts";
-import { foldChains, type Space } from "./foldChains.ts";
+import { foldChains, meetingsOf, type Space } from "./foldChains.ts";
 import { foldCover } from "./foldCover.ts";
 import type { FoldCurve, FoldMeeting, FoldPoint, FoldTouch, UndecidedFolds } from "./foldDiagram.ts";
-import { type FoldPlace, type FoldSystem, foldSystem } from "./foldSystem.ts";
+import { boxAt, type FoldPlace, type FoldSystem, foldSystem } from "./foldSystem.ts";
 import type { FoldParts } from "./foldsOnLine.ts";
 import { foldOn } from "./foldTube.ts";
+import { kinkCaps } from "./kinkCap.ts";
+import { middlesOf, type PairSystem } from "./pairSystem.ts";
 import { joinedUndecided, lostEnd, openBox } from "./undecidedFolds.ts";
 
 /** Which givens (their places), where, and how hard. */
@@ -22,19 +25,29 @@ export interface SpaceTask {
 const POINTS = [0, 0.25, 0.5, 0.75];
 
 /**
- * Folds are zeros of (N, N_T) in temperature and both givens. They are followed through values of the second given in tubes each
- * of which is proved to hold exactly one; where two meet, a box is proved to hold one meeting and nothing else. That there is no
- * other is proved by boxes that cover the ranges: without a fold, inside a tube, or inside such a box.
+ * Folds are zeros of (N, N_T) in temperature and both givens, corners of N and of what is zero at a kink. They are followed through
+ * values of the second given in tubes each of which is proved to hold exactly one; where two meet, a box is proved to hold one
+ * meeting and nothing else. That there is no other is proved by boxes that cover the ranges: without a fold, inside a tube,
+ * or inside such a box.
  */
 export function foldsInSpace(loop: Loop, { places, space, givens, effort }: SpaceTask): FoldParts {
   const system = foldSystem(loop, places.join(" "));
-  system.set(givens);
-  const known = foldChains(system, space);
-  const { open, boxes } = foldCover(system, space, known, known.follow, effort);
-  const chains = [...known.chains]
-    .map((chain) => ({ chain, curve: curveOf(system, chain) }))
-    .sort((a, b) => coldest(a.curve) - coldest(b.curve));
-  const meetings = known.caps.map((cap) => {
+  const kinks = cornerSystems(loop, places.join(" "));
+  for (const each of [system, ...kinks]) each.set(givens);
+  const meetings = meetingsOf((near) => [
+    ...foldCaps(system, near, space),
+    ...kinks.flatMap((kink) => kinkCaps(system, kink, near, space)),
+  ]);
+  const folds = { system, ...foldChains(system, space, meetings) };
+  const corners = kinks.map((kink) => ({ system: kink, ...foldChains(kink, space, meetings) }));
+  const { open, boxes } = foldCover(space, { folds, corners, caps: meetings.caps }, effort);
+  const chains = [
+    ...folds.chains.map((chain) => ({ chain, curve: curveOf(system, chain, foldExists(system)) })),
+    ...corners.flatMap(({ system: kink, chains }) =>
+      chains.map((chain) => ({ chain, curve: curveOf(kink, chain, cornerExists(kink)) })),
+    ),
+  ].sort((a, b) => coldest(a.curve) - coldest(b.curve));
+  const met = meetings.caps.map((cap) => {
     const pair = chains.flatMap(({ chain }, i) =>
       [chain.low, chain.high].some((end) => end.cap === cap) ? [i] : [],
     );
@@ -44,11 +57,11 @@ export function foldsInSpace(loop: Loop, { places, space, givens, effort }: Spac
     ...open.map((box) => openBox(system, box)),
     ...chains.flatMap(({ chain: { low, high } }) => [low, high].filter(isOpen).map(lostEnd)),
     // the proof of a meeting says that there are two
-    ...meetings
+    ...met
       .filter(({ pair }) => pair.length !== 2)
       .map(({ cap }): UndecidedFolds => ({ and: cap.box.q, temperatures: cap.box.t, kind: "count" })),
   ];
-  const proved = meetings.filter(({ pair }) => pair.length === 2);
+  const proved = met.filter(({ pair }) => pair.length === 2);
   const of = (kinds: readonly FoldCap["kind"][]) =>
     proved.filter(({ cap }) => kinds.includes(cap.kind)).sort((a, b) => a.cap.at.t - b.cap.at.t);
   return {
@@ -58,7 +71,14 @@ export function foldsInSpace(loop: Loop, { places, space, givens, effort }: Spac
     touches: of(["isola", "transcritical"]).map(({ cap, pair }) =>
       Object.freeze({ kind: cap.kind as FoldTouch["kind"], ...meetingOf(cap, pair) }),
     ),
-    changes: [],
+    changes: of(["change"]).map(({ cap, pair }) => {
+      const isBelow = (i: number) => chains[i]?.chain.high.cap === cap;
+      const { exists: _, ...place } = meetingOf(
+        cap,
+        [...pair].sort((i) => (isBelow(i) ? -1 : 1)),
+      );
+      return Object.freeze(place);
+    }),
     undecided: joinedUndecided(undecided),
     cost: { boxes, points: 0 },
   };
@@ -75,7 +95,9 @@ function meetingOf({ box, at, atBracket, exists }: FoldCap, pair: readonly numbe
   return { ...pointOf(at), andBracket: Object.freeze(atBracket), temperatureBracket, exists, curves };
 }
 
-function curveOf(system: FoldSystem, { tubes, low, high }: FoldChain): FoldCurve {
+type Exists = (at: FoldPlace) => FoldCurve["exists"];
+
+function curveOf(system: PairSystem, { tubes, low, high }: FoldChain, exists: Exists): FoldCurve {
   const [from, to] = [low, high].map((end) => (end.cap ? end.cap.at.q : end.at.q)) as [number, number];
   const inner = tubes
     .flatMap((tube) =>
@@ -84,14 +106,30 @@ function curveOf(system: FoldSystem, { tubes, low, high }: FoldChain): FoldCurve
     .filter(({ q }) => q > from && q < to)
     .sort((a, b) => a.q - b.q);
   const middle = inner[Math.floor(inner.length / 2)] ?? low.at;
-  // N = N_TT·(T − T₀)²/2 + N_p·(p − p₀) near the fold
-  const { np, ntt } = system.signs(middle);
   const points = from < to ? [low.at, ...inner, high.at] : [low.at];
   return Object.freeze({
-    kind: "fold",
-    exists: np * ntt < 0 ? "above" : "below",
+    kind: system.kind,
+    exists: exists(middle),
     range: Object.freeze([from, to] as const),
     ends: Object.freeze([low.kind, high.kind] as const),
     points: Object.freeze(points.map(pointOf)),
   });
 }
+
+/** N = N_TT·(T − T₀)²/2 + N_p·(p − p₀) near a fold. */
+const foldExists =
+  (system: FoldSystem): Exists =>
+  (at) => {
+    const { np, ntt } = system.signs(at);
+    return np * ntt < 0 ? "above" : "below";
+  };
+
+/** At the kink, of difference d, N changes with p by N_p − N_T·d_p/d_T, and it rises on the right if it bends upwards. */
+const cornerExists =
+  (kink: CornerSystem): Exists =>
+  (at) => {
+    const box = boxAt(at);
+    const { ft, fp, gt, gp } = middlesOf(kink.pair(box));
+    const [less, more] = kink.slopes(box);
+    return (fp - (ft * gp) / gt) * (gt > 0 ? more : less) < 0 ? "above" : "below";
+  };

@@ -1,13 +1,12 @@
 // λ on the curve p(T) on either side of the kinks of laws.
-import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
-import { replaceNodes } from "../graph/replaceNodes.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Ends } from "../search/enclosed.ts";
 import { enclosedNodes } from "../states/enclosedNodes.ts";
 import { gateNodes } from "./gateCurve.ts";
+import { type Kink, kinksOf, withoutKinks } from "./kinkNodes.ts";
 import { type PlaneReader, planeReader } from "./planeReader.ts";
 
 /** A function of temperature and of the second given over a box: bounds of its value and of its slopes in both. */
@@ -35,15 +34,9 @@ export interface KinkSides {
   on(sides: readonly Side[]): ArmOver | undefined;
 }
 
-/** A kink: the difference of two arguments, and every min and max of the two. */
-interface Kink {
-  readonly node: number;
-  readonly nodes: readonly number[];
-}
-
 /** Prepares the kinks of a loop along one given; `place` is that of the second given, among its givens. */
 export function kinkSides(loop: Loop, along: string, place: number): KinkSides {
-  const { graph, net } = loop;
+  const { graph } = loop;
   const inputs = inputsOf(loop);
   const [t, q] = [inputs[0] as number, inputs[loop.variables.length + place] as number];
   const kinks = kinksOf(loop);
@@ -65,16 +58,10 @@ export function kinkSides(loop: Loop, along: string, place: number): KinkSides {
     };
   };
   const sideOf = (sides: readonly Side[]): ArmOver | undefined => {
-    const chosen = sides.flatMap(({ kink, less }) =>
-      (kinks[kink] as Kink).nodes.map((id): [number, number] => {
-        const args = graph.args[id] as readonly [number, number];
-        const [first, second] = [Math.min(...args), Math.max(...args)];
-        return [id, (graph.ops[id] === "min") === less ? first : second];
-      }),
+    const without = withoutKinks(
+      loop,
+      sides.map(({ kink, less }) => ({ kink: kinks[kink] as Kink, less })),
     );
-    // arguments have lower numbers: what is outside goes first
-    chosen.sort((a, b) => b[0] - a[0]);
-    const without = chosen.reduce((node, pair) => replaceNodes(graph, node, new Map([pair])), net);
     const curve = gateNodes({ ...loop, net: without }, along);
     return curve?.gate === loop.givens.find((g) => g.name === along)?.node
       ? armOf(curve?.feedback as number)
@@ -93,20 +80,4 @@ export function kinkSides(loop: Loop, along: string, place: number): KinkSides {
       return made.get(name);
     },
   };
-}
-
-/** The kinks whose place is a temperature. */
-export function kinksOf(loop: Loop): Kink[] {
-  const { graph, net } = loop;
-  const inputs = inputsOf(loop);
-  const found = new Map<number, number[]>();
-  for (const id of coneOf(graph, [net], inputs)) {
-    if (graph.ops[id] !== "min" && graph.ops[id] !== "max") continue;
-    const args = graph.args[id] as readonly [number, number];
-    const node = graph.node("sub", [Math.min(...args), Math.max(...args)]);
-    found.set(node, [...(found.get(node) ?? []), id]);
-  }
-  return [...found]
-    .filter(([node]) => coneOf(graph, [node], inputs).includes(inputs[0] as number))
-    .map(([node, nodes]) => ({ node, nodes }));
 }

@@ -2,6 +2,7 @@
 
 import type { Shape } from "./foldShape.ts";
 import { boxAt, type FoldPlace, type FoldSystem, middles } from "./foldSystem.ts";
+import { solved3 } from "./solved3.ts";
 import { middleOf } from "./stretch.ts";
 
 const MOST_STEPS = 40;
@@ -27,24 +28,4 @@ export function meetingNear(system: FoldSystem, near: FoldPlace, shape: Shape): 
     if (step.every((s, j) => Math.abs(s) <= 1e-13 * (size[j] as number) + 1e-15)) return at;
   }
   return at;
-}
-
-type Three = readonly [number, number, number];
-
-/** Cramer's rule. */
-function solved3(rows: readonly [Three, Three, Three], right: Three): Three {
-  const det = (m: readonly [Three, Three, Three]) =>
-    m[0][0] * (m[1][1] * m[2][2] - m[1][2] * m[2][1]) -
-    m[0][1] * (m[1][0] * m[2][2] - m[1][2] * m[2][0]) +
-    m[0][2] * (m[1][0] * m[2][1] - m[1][1] * m[2][0]);
-  const whole = det(rows);
-  const replaced = (column: number) =>
-    det(
-      rows.map((row, i) => row.map((v, j) => (j === column ? right[i] : v))) as unknown as [
-        Three,
-        Three,
-        Three,
-      ],
-    );
-  return [replaced(0) / whole, replaced(1) / whole, replaced(2) / whole];
 }

@@ -1,13 +1,13 @@
 // Makes one of two chains that follow the same fold.
 import { meet } from "../search/interval.ts";
 import type { FoldChain } from "./foldChain.ts";
-import type { FoldSystem } from "./foldSystem.ts";
 import { commonOf, type FoldTube, foldTube, isWithin, placeIn, sectionOf } from "./foldTube.ts";
+import type { PairSystem } from "./pairSystem.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
 
 /** Both as one, if it is proved that they follow the same fold. */
-export function mergeChains(system: FoldSystem, a: FoldChain, b: FoldChain): FoldChain | undefined {
+export function mergeChains(system: PairSystem, a: FoldChain, b: FoldChain): FoldChain | undefined {
   const shared = meet(rangeOf(a), rangeOf(b));
   if (!(shared[0] <= shared[1]) || !isSame(system, a, b, middleOf(shared))) return undefined;
   const [first, other] = isOpen(a.low) && !isOpen(b.low) ? [b, a] : [a, b];
@@ -28,7 +28,7 @@ export function rangeOf({ tubes }: FoldChain): readonly [number, number] {
 }
 
 /** Each tube holds one fold; two hold the same if it lies in both, or in a third. */
-function isSame(system: FoldSystem, a: FoldChain, b: FoldChain, q: number): boolean {
+function isSame(system: PairSystem, a: FoldChain, b: FoldChain, q: number): boolean {
   const [one, two] = [a, b].map(({ tubes }) => tubes.find((tube) => tube.q[0] <= q && q <= tube.q[1]));
   if (!one || !two) return false;
   const [here, there] = [sectionOf(system, one, q), sectionOf(system, two, q)];

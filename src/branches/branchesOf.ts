@@ -1,7 +1,7 @@
 // Makes the branches of a run: the pieces of a curve between its critical places.
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
-import { type Critical, leaps } from "./criticals.ts";
+import type { Critical } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import type { Branch, BranchEnd } from "./diagram.ts";
 import { pointsOf } from "./pointsOf.ts";
@@ -22,12 +22,12 @@ export function branchesOf(
   criticals: readonly Critical[],
   drawing: Drawing,
 ): Branch[] {
-  // at a leap the two branches end at different parameters
+  // at a leap, and at what is undecided, the two branches end at different parameters
   const ends = [
     { warm: runEnd(curve, from, drawing), cool: undefined },
     ...criticals.map((c) => {
       const cool = criticalEnd(curve, c, drawing, 0);
-      return { cool, warm: leaps(c) ? criticalEnd(curve, c, drawing, 1) : cool };
+      return { cool, warm: c.decided ? cool : criticalEnd(curve, c, drawing, 1) };
     }),
     { warm: undefined, cool: runEnd(curve, to, drawing) },
   ];
@@ -64,7 +64,7 @@ function runEnd(curve: Curve, { kind, end, at, bracket }: RunEnd, { between }: D
 
 function criticalEnd(curve: Curve, critical: Critical, { between }: Drawing, side: 0 | 1): BranchEnd {
   const { kind, decided, bracket } = critical;
-  const temperature = leaps(critical) ? bracket[side] : critical.temperature;
+  const temperature = decided ? critical.temperature : bracket[side];
   return Object.freeze({
     kind: decided || kind === "leap" ? (kind as "fold" | "corner" | "leap") : "undecided",
     at: clamped(curve.at(temperature), between),
@@ -81,7 +81,8 @@ export function boundsOf(curve: Curve, [low, high]: Range, between: Range): Rang
 }
 
 function clamped(p: number, [low, high]: Range, otherwise = (low + high) / 2): number {
-  return p < low ? low : p > high ? high : Number.isFinite(p) ? p : otherwise;
+  // adding 0 turns -0, which JSON does not keep, into 0
+  return 0 + (p < low ? low : p > high ? high : Number.isFinite(p) ? p : otherwise);
 }
 
 /** The sign of λ anywhere on the branch: it has no zero there. */

@@ -1,4 +1,5 @@
 // The curve of a loop whose budget only rises or only falls with the parameter: N(T, p(T)) = 0, solved box by box.
+import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf, rangesOf } from "../loop/inputs.ts";
@@ -8,6 +9,7 @@ import { valueKernel } from "../reading/valueKernel.ts";
 import { type Ends, endsOf, type Sign } from "../search/enclosed.ts";
 import { meet, minus, over, plus, rangeAt, signOfRange, times } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
+import { enclosedNodes } from "../states/enclosedNodes.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import { placeOf } from "./gateValue.ts";
@@ -33,6 +35,8 @@ export function impliedCurve(loop: Loop, along: string): Curve {
   const outputs = [net, answer, first, by(first, temperature), by(first, parameter)];
   const kernel = enclosureKernel(graph, { inputs, outputs, wide, ranges });
   const value = valueKernel(graph, { inputs, outputs: [net, answer, first] });
+  const nodes = enclosedNodes(loop, new Set([parameter]));
+  const leaps = stepsOf(loop).map(nodes.of);
   const [low, high] = [new Float64Array(inputs.length), new Float64Array(inputs.length)];
   const out = new Float64Array(3 * outputs.length);
   const read = new Float64Array(3);
@@ -126,13 +130,16 @@ export function impliedCurve(loop: Loop, along: string): Curve {
     method: "monotone",
     reachesBeyond: false,
     signAt: (t) => signAt(feedback, t),
-    // p′ = −λ/N_p
+    // p' = -lambda/N_p
     rises: (t) => (signAt(feedback, t) * (rising ? -1 : 1)) as Sign,
-    criticals: (t, effort) => criticalsOf({ feedback, kinks: [], leaps: [] }, t, effort),
+    criticals: (t, effort) => criticalsOf({ feedback, kinks: leaps, leaps }, t, effort),
     set(givens, range, within) {
       low.set(givens, 1);
       high.set(givens, 1);
       between = range;
+      nodes.set(
+        ...(range.map((p) => givens.map((v, i) => (i === place - 1 ? p : v))) as [number[], number[]]),
+      );
       const signs = provedMonotone(
         { enclose, net: () => rangeAt(out, 0), answer: () => rangeAt(out, 1) },
         within,
@@ -150,4 +157,10 @@ export function impliedCurve(loop: Loop, along: string): Curve {
     },
     over: (a, b) => bounds([a, b]),
   };
+}
+
+/** The nodes that are zero at the steps of a budget. */
+function stepsOf({ graph, net }: Loop): number[] {
+  const steps = coneOf(graph, [net]).filter((id) => graph.ops[id] === "step");
+  return [...new Set(steps.map((id) => graph.args[id]?.[0] as number))];
 }

@@ -13,7 +13,7 @@ export function pointsOf(
   warm: BranchEnd,
   { between, tolerance }: { readonly between: Range; readonly tolerance: number },
 ): BranchPoint[] {
-  // adding 0 turns −0, which JSON does not keep, into 0
+  // adding 0 turns -0, which JSON does not keep, into 0
   const feedbackAt = (temperature: number) => 0 + curve.feedbackAt(temperature);
   const least = tolerance * (between[1] - between[0]);
   const read = (temperature: number): BranchPoint => ({
@@ -44,4 +44,4 @@ export function pointsOf(
   return points;
 }
 
-const inside = (p: number, [low, high]: Range): number => Math.max(low, Math.min(high, p));
+const inside = (p: number, [low, high]: Range): number => 0 + Math.max(low, Math.min(high, p));

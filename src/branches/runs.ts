@@ -48,27 +48,32 @@ export function runsOf(
     if (from) runs.push({ from, to });
     from = undefined;
   };
-  let last: RunEnd = { kind: "within", end: 0, at: within[0], bracket: [within[0], within[0]] };
+  const edge = (end: 0 | 1): RunEnd => {
+    const at = within[end];
+    return { kind: "within", end, at, bracket: [at, at] };
+  };
+  let last: Crossing | undefined;
   for (const crossing of [...crossings, undefined]) {
-    const next = crossing
-      ? runEnd(crossing)
-      : ({ kind: "within", end: 1, at: within[1], bracket: [within[1], within[1]] } as const);
-    const stretch: Range = [last.bracket[1], next.bracket[0]];
+    const [before, after] = [last ? runEnd(last, 0) : edge(0), last ? runEnd(last, 1) : edge(0)];
+    const next = crossing?.bracket ?? edge(1).bracket;
+    const stretch: Range = [before.bracket[1], next[0]];
     const inside = stretch[0] < stretch[1] ? insideOf(stretch, signsAt) : undefined;
-    if (inside === true) from ??= last;
-    else if (inside === false) close(last);
+    if (inside === true) from ??= after;
+    else if (inside === false) close(before);
     else if (stretch[0] < stretch[1]) {
-      close(last);
+      close(before);
       unknown.push(stretch);
     }
-    last = next;
+    last = crossing ?? last;
   }
-  close(last);
+  close(last && last.bracket[1] >= within[1] ? runEnd(last, 0) : edge(1));
   return { runs, unknown };
 }
 
-function runEnd({ end, at, bracket, doubt }: Crossing): RunEnd {
-  return { kind: doubt === null ? "between" : "undecided", end, at, bracket };
+/** The end of a run at a crossing; where that is in doubt, at the side of its bracket that is the run's: 0, below, or 1, above. */
+function runEnd({ end, at, bracket, doubt }: Crossing, side: 0 | 1): RunEnd {
+  if (doubt === null) return { kind: "between", end, at, bracket };
+  return { kind: doubt === "jump" ? "leap" : "undecided", end, at: bracket[side], bracket };
 }
 
 /** Whether a parameter of the range balances each temperature of a stretch; undefined where signs are not proved. */

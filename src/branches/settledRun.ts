@@ -9,7 +9,7 @@ export interface SettledRun {
   readonly inside: readonly Critical[];
 }
 
-/** Takes the critical places on the ends of a run from the list; where the curve leaps there, the run ends in a leap. */
+/** Takes the critical places on the ends of a run from the list: the run ends before them, in a leap or undecided. */
 export function settledRun(run: Run, list: readonly Critical[]): SettledRun {
   const isOn = (end: RunEnd) => (c: Critical) =>
     end.kind !== "between" && !c.decided && isNarrow(c) && touch(c.bracket, end.bracket);
@@ -24,8 +24,14 @@ export const isToldAs = (list: readonly Critical[], bracket: Range): boolean =>
   list.some((c) => leaps(c) && isNarrow(c) && touch(c.bracket, bracket));
 
 function endAt(end: RunEnd, on: readonly Critical[], inner: 0 | 1): RunEnd {
-  const leap = on.find(leaps);
-  return leap ? { ...end, kind: "leap", at: leap.bracket[inner], bracket: leap.bracket } : end;
+  if (on.length === 0) return end;
+  const brackets = [end.bracket, ...on.map((c) => c.bracket)];
+  const bracket: Range = [
+    Math.min(...brackets.map(([low]) => low)),
+    Math.max(...brackets.map(([, high]) => high)),
+  ];
+  const kind = end.kind === "leap" || on.some(leaps) ? "leap" : "undecided";
+  return { ...end, kind, at: bracket[inner], bracket };
 }
 
 const isNarrow = ({ bracket: [low, high] }: Critical): boolean => high - low < CORNER_WIDTH;

@@ -45,7 +45,7 @@ function enclosed(loop: Loop, place: number): Solver {
   const bends = argumentsOf("min", "max").map((args) => lineOf(loop, graph.node("sub", args), place));
   const kinks = [...leaps, ...bends];
   const box = new Float64Array(9);
-  /** Whether all over a bracket the balance may have either of the values at a leap, as where the temperature is its threshold. */
+  /** Whether a zero may lie on a leap, as at a temperature that is its threshold: what is on one side is none on the other. */
   const isAmidLeap = ({ bracket }: { readonly bracket: Range }) =>
     leaps.some((leap) => {
       leap.box(...bracket, box);
@@ -102,7 +102,7 @@ function judgeOf(loop: Loop, place: number) {
       Float64Array.from(values, (v, i) => (i === place ? at : v)),
       out,
     );
-    // adding 0 turns −0, which JSON does not keep, into 0
+    // adding 0 turns -0, which JSON does not keep, into 0
     const feedbackParameter = 0 + (out[0] as number);
     bounds?.(low as Float64Array, high as Float64Array, out);
     const sign = bounds

@@ -37,21 +37,19 @@ export function statesOnDiagram<N extends string>(
     fail("unreadable", { path: "diagram", value: diagram, allowed: "what traceBranches returned" });
   const value = checkedNumber(at, "at", diagram.unit, diagram.between);
   const inside = (range: Range) => holds(range, value);
-  const branches: number[] = [];
-  const states: State<N>[] = [];
-  diagram.branches.forEach((branch, i) => {
+  const found = diagram.branches.flatMap((branch, i) => {
     const state = inside(branch.parameters) ? stateOn(loop, diagram, branch, value) : undefined;
-    if (!state) return;
-    states.push(state as State<N>);
-    branches.push(i);
+    return state ? [{ state: state as State<N>, branch: i }] : [];
   });
+  found.sort((a, b) => a.state.temperature - b.state.temperature);
+  const states = found.map(({ state }) => state);
   const doubtful = [...diagram.folds, ...diagram.crossings].some((f) => inside(f.atBracket));
   const count = diagram.branches.filter((b) => inside(b.parameters)).length;
   const complete = diagram.complete && !doubtful && count === states.length && areApart(states);
   return Object.freeze({
     at: value,
     states: Object.freeze(states),
-    branches: Object.freeze(branches),
+    branches: Object.freeze(found.map(({ branch }) => branch)),
     complete,
   });
 }
@@ -75,8 +73,22 @@ export function stateOn(loop: Loop, diagram: Diagram, branch: Branch, at: number
 function ordered(net: NetReader, { method, branches, within }: Diagram, branch: Branch, at: number) {
   if (method !== "tiles") return undefined;
   const here = branches.filter(({ parameters }) => holds(parameters, at));
+  here.sort((a, b) => warmth(a, b, at));
   const states = net.statesAt(at, within);
   return states?.length === here.length ? states[here.indexOf(branch)] : undefined;
+}
+
+/** How much warmer one branch of tiles is than another, where both have a point, near a parameter; 0 if they never have. */
+function warmth(one: Branch, other: Branch, at: number): number {
+  const temperatures = new Map(other.points.map((p) => [p.at, p.temperature]));
+  let [nearest, warmer] = [Number.POSITIVE_INFINITY, 0];
+  for (const point of one.points) {
+    const difference = point.temperature - (temperatures.get(point.at) ?? point.temperature);
+    const distance = Math.abs(point.at - at);
+    // in a fold both have one point
+    if (difference !== 0 && distance < nearest) [nearest, warmer] = [distance, difference];
+  }
+  return warmer;
 }
 
 /** The end of a branch in a direction. */

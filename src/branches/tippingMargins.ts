@@ -126,22 +126,28 @@ function checkHolds([low, high]: Range, value: number, path: string, unit: strin
 /** A state is known to a few roundings. */
 const SLACK = 1e-12;
 
-/** The branch that holds a state: the one whose temperatures are nearest. */
+/** Two findings of one state are closer, relative to its temperature. */
+const SAME = 1e-9;
+
+/** The branch that holds a state: the one whose temperatures are nearest; in tiles, where these overlap, whose state it is. */
 function branchAt(loop: Loop, diagram: Diagram, at: number, temperature: number): number {
-  const { branches } = diagram;
+  const { branches, method } = diagram;
   const missed = ({ parameters: [low, high], temperatures: [cold, hot] }: Branch): number => {
     const slack = Math.abs(at) * SLACK;
     if (at < low - slack || at > high + slack) return Number.POSITIVE_INFINITY;
     return Math.max(0, cold - temperature, temperature - hot);
   };
   const misses = branches.map(missed);
-  const least = misses.reduce((a, b) => Math.min(a, b), Number.POSITIVE_INFINITY);
-  if (least <= temperature * SLACK) return misses.indexOf(least);
-  // between the columns of a tile a branch may leave the temperatures that it has in them
-  return branches.findIndex((branch, i) => {
+  const nearest = (distances: readonly number[], most: number): number => {
+    const least = distances.reduce((a, b) => Math.min(a, b), Number.POSITIVE_INFINITY);
+    return least <= temperature * most ? distances.indexOf(least) : -1;
+  };
+  if (method === "line" || method === "monotone") return nearest(misses, SLACK);
+  const apart = branches.map((branch, i) => {
     const state = misses[i] === Infinity ? undefined : stateOn(loop, diagram, branch, at);
-    return state !== undefined && Math.abs(state.temperature - temperature) <= temperature * SLACK;
+    return state ? Math.abs(state.temperature - temperature) : Number.POSITIVE_INFINITY;
   });
+  return nearest(apart, SAME);
 }
 
 /** The points of a branch from a state on to its end. */

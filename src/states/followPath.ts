@@ -78,6 +78,7 @@ function lost(f: Moving, turning: Turning, within: Range): Omit<LostAt, "outcome
   const { sign, around, stages } = turning;
   f.between(stages[1], stages[1]);
   const ahead: Range = sign > 0 ? [around[1], within[1]] : [within[0], around[0]];
+  if (!(ahead[0] < ahead[1])) return { turning, next: null, nextIs: "outside" };
   const next = f.sampled ? sampledNext(f, ahead, sign) : provedNext(f, ahead, sign);
   if (next === "outside" || next === "undecided") return { turning, next: null, nextIs: next };
   return { turning, next: located(f, next), nextIs: "found" };

@@ -43,8 +43,8 @@ export interface TraceFoldsOptions<N extends string = string> {
  * Otherwise, or with `alongBetween`, folds are zeros of N and ∂N/∂T in temperature and both givens, followed in tubes that are
  * proved to hold one each, and the rest of the three ranges is proved to hold none.
  *
- * At a kink of a law λ can leap through zero: a corner. Corners are followed where the budget is a straight line in p;
- * elsewhere they stay undecided. Temperatures in K, both givens in their own units. Throws `contradiction` where the
+ * At a kink of a law λ can leap through zero: a corner. Corners are followed like folds, and where λ on one side of the kink
+ * passes zero one goes on as the other. Temperatures in K, both givens in their own units. Throws `contradiction` where the
  * budget does not depend on one of the givens, or where a loop with a sampled law is no straight line in `along`,
  * `missing` without a range of the first given, `unknown-name`, `out-of-range`, `not-a-number`, `unreadable`,
  * `several-variables`.

@@ -4,7 +4,7 @@ import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
 import { signOfRange } from "../search/interval.ts";
-import type { FoldBox } from "./foldSystem.ts";
+import type { FoldBox } from "./foldBox.ts";
 import { kinksOf, withoutKinks } from "./kinkNodes.ts";
 import { type Pair, type PairSystem, solvedPair, speedsOf } from "./pairSystem.ts";
 import { planeReader } from "./planeReader.ts";

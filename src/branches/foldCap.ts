@@ -1,8 +1,9 @@
 // A box around the place where two folds meet and vanish as the second given changes.
 import type { Range } from "../ground/range.ts";
 import { minus, over, plus, signOfRange } from "../search/interval.ts";
+import { boxAt, type FoldBox, type FoldPlace, inside } from "./foldBox.ts";
 import { CUSP, POINT, type Shape } from "./foldShape.ts";
-import { boxAt, type FoldBox, type FoldPlace, type FoldSystem, inside } from "./foldSystem.ts";
+import type { FoldSystem } from "./foldSystem.ts";
 import { meetingNear } from "./meetingNear.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf, nearestProved } from "./stretch.ts";

@@ -1,8 +1,8 @@
 // A fold followed through values of the second given.
 import type { Range } from "../ground/range.ts";
+import type { FoldPlace } from "./foldBox.ts";
 import type { FoldCap } from "./foldCap.ts";
 import type { FoldCurveEnd } from "./foldDiagram.ts";
-import type { FoldPlace } from "./foldSystem.ts";
 import type { FoldTube } from "./foldTube.ts";
 
 /** Where a chain ends. */

@@ -1,8 +1,9 @@
 // Follows folds through values of the second given: chains of tubes, and what they end in.
+
+import { type FoldBox, type FoldPlace, inside } from "./foldBox.ts";
 import type { FoldCap } from "./foldCap.ts";
 import type { ChainEnd, FoldChain } from "./foldChain.ts";
 import { foldExit } from "./foldExit.ts";
-import { type FoldBox, type FoldPlace, inside } from "./foldSystem.ts";
 import {
   commonOf,
   type FoldTube,

@@ -2,19 +2,11 @@
 import type { Range } from "../ground/range.ts";
 import { meet, signOfRange } from "../search/interval.ts";
 import type { CornerSystem } from "./cornerSystem.ts";
+import { boxAt, type FoldBox, type FoldPlace, inside } from "./foldBox.ts";
 import type { FoldCap } from "./foldCap.ts";
 import type { FoldChain } from "./foldChain.ts";
 import type { Space } from "./foldChains.ts";
-import {
-  boxAt,
-  closer,
-  type Equations,
-  type FoldBox,
-  type FoldPlace,
-  type FoldSystem,
-  inside,
-  middles,
-} from "./foldSystem.ts";
+import { closer, type Equations, type FoldSystem, middles } from "./foldSystem.ts";
 import { commonOf, isPart, type Plane } from "./foldTube.ts";
 import { rangeOf } from "./mergeChains.ts";
 import { pointAt } from "./planeReader.ts";

@@ -1,7 +1,8 @@
 // What the places have in common in which two folds meet.
 import type { Range } from "../ground/range.ts";
 import { minus, over, plus, times } from "../search/interval.ts";
-import { closer, type FoldBox, type FoldSystem } from "./foldSystem.ts";
+import type { FoldBox } from "./foldBox.ts";
+import { closer, type FoldSystem } from "./foldSystem.ts";
 
 /**
  * Both kinds of meeting have one shape. One equation is solved for y, as a function y(x, q), wherever its slope in y has one sign

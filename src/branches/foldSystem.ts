@@ -4,23 +4,10 @@ import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
 import { meet, minus, over, plus, times } from "../search/interval.ts";
+import { boxAt, type FoldBox, type FoldPlace } from "./foldBox.ts";
 import { type Pair, type PairSystem, solvedPair } from "./pairSystem.ts";
-import { type PlaneReader, planeReader, pointAt } from "./planeReader.ts";
+import { type PlaneReader, planeReader } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";
-
-/** Ranges of temperature and of both givens. */
-export interface FoldBox {
-  readonly t: Range;
-  readonly p: Range;
-  readonly q: Range;
-}
-
-/** A temperature and both givens. */
-export interface FoldPlace {
-  readonly t: number;
-  readonly p: number;
-  readonly q: number;
-}
 
 /** Bounds over a box. */
 export interface Equations {
@@ -146,9 +133,3 @@ export function closer(system: FoldSystem, box: FoldBox, read: Equations = syste
   const n = narrower(read.n, form(center.n, nt, read.np, read.nq));
   return { ...read, n, nt };
 }
-
-/** A place as a box. */
-export const boxAt = ({ t, p, q }: FoldPlace): FoldBox => ({ t: pointAt(t), p: pointAt(p), q: pointAt(q) });
-
-/** Whether a range lies in the interior of another. */
-export const inside = (a: Range, b: Range): boolean => a[0] > b[0] && a[1] < b[1];

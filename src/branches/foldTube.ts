@@ -2,7 +2,7 @@
 import type { Range } from "../ground/range.ts";
 import { above, below } from "../search/enclosed.ts";
 import { plus, times } from "../search/interval.ts";
-import { boxAt, type FoldBox, type FoldPlace } from "./foldSystem.ts";
+import { boxAt, type FoldBox, type FoldPlace } from "./foldBox.ts";
 import { middlesOf, type PairSystem } from "./pairSystem.ts";
 import { pointAt } from "./planeReader.ts";
 import { middleOf } from "./stretch.ts";

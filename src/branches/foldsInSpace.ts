@@ -1,12 +1,13 @@
 // The folds in two givens of any loop, in ranges of both: followed in tubes, and proved to be all.
 import type { Loop } from "../loop/types.ts";
 import { type CornerSystem, cornerSystems } from "./cornerSystem.ts";
+import { boxAt, type FoldPlace } from "./foldBox.ts";
 import { type FoldCap, foldCaps } from "./foldCap.ts";
 import type { ChainEnd, FoldChain } from "./foldChain.ts";
 import { foldChains, meetingsOf, type Space } from "./foldChains.ts";
 import { foldCover } from "./foldCover.ts";
 import type { FoldCurve, FoldMeeting, FoldPoint, FoldTouch, UndecidedFolds } from "./foldDiagram.ts";
-import { boxAt, type FoldPlace, type FoldSystem, foldSystem } from "./foldSystem.ts";
+import { type FoldSystem, foldSystem } from "./foldSystem.ts";
 import type { FoldParts } from "./foldsOnLine.ts";
 import { foldOn } from "./foldTube.ts";
 import { kinkCaps } from "./kinkCap.ts";

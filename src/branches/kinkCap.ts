@@ -2,8 +2,9 @@
 import type { Range } from "../ground/range.ts";
 import { minus, over, plus, signOfRange, times } from "../search/interval.ts";
 import type { CornerSystem } from "./cornerSystem.ts";
+import { boxAt, type FoldBox, type FoldPlace, inside } from "./foldBox.ts";
 import type { FoldCap } from "./foldCap.ts";
-import { boxAt, closer, type FoldBox, type FoldPlace, type FoldSystem, inside } from "./foldSystem.ts";
+import { closer, type FoldSystem } from "./foldSystem.ts";
 import { foldIn, foldTube, isPart, isWithin } from "./foldTube.ts";
 import { speedsOf } from "./pairSystem.ts";
 import { pointAt } from "./planeReader.ts";

@@ -1,7 +1,8 @@
 // Looks for a place in which two folds meet.
 
+import { boxAt, type FoldPlace } from "./foldBox.ts";
 import type { Shape } from "./foldShape.ts";
-import { boxAt, type FoldPlace, type FoldSystem, middles } from "./foldSystem.ts";
+import { type FoldSystem, middles } from "./foldSystem.ts";
 import { solved3 } from "./solved3.ts";
 import { middleOf } from "./stretch.ts";
 

@@ -1,8 +1,7 @@
 // Two equations in temperature T and two givens p and q, whose common zeros are followed.
 import type { Range } from "../ground/range.ts";
 import { minus, over, plus, signOfRange, times } from "../search/interval.ts";
-import type { FoldBox, FoldPlace } from "./foldSystem.ts";
-import { pointAt } from "./planeReader.ts";
+import { boxAt, type FoldBox, type FoldPlace } from "./foldBox.ts";
 import { middleOf } from "./stretch.ts";
 
 /** Bounds of both over a box, with their slopes in T, p and q. */
@@ -31,14 +30,12 @@ export interface PairSystem {
 
 const MOST_STEPS = 20;
 
-const point = (t: number, p: number, q: number): FoldBox => ({ t: pointAt(t), p: pointAt(p), q: pointAt(q) });
-
 /** Newton's method. */
 export function solvedPair(read: PairSystem["pair"], { t, p, q }: FoldPlace): FoldPlace | undefined {
   let [u, v] = [t, p];
   let nearly: FoldPlace | undefined;
   for (let i = 0; i < MOST_STEPS; i++) {
-    const bounds = read(point(u, v, q));
+    const bounds = read(boxAt({ t: u, p: v, q }));
     // rounding may keep the steps from vanishing
     if (signOfRange(bounds.f) === 0 && signOfRange(bounds.g) === 0) nearly = { t: u, p: v, q };
     const { f, ft, fp, g, gt, gp } = middlesOf(bounds);

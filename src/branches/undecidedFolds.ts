@@ -1,8 +1,9 @@
 // Says what is not decided about folds in a space of temperature and two givens.
 import type { Range } from "../ground/range.ts";
+import type { FoldBox } from "./foldBox.ts";
 import type { ChainEnd } from "./foldChain.ts";
 import type { UndecidedFolds } from "./foldDiagram.ts";
-import type { FoldBox, FoldSystem } from "./foldSystem.ts";
+import type { FoldSystem } from "./foldSystem.ts";
 
 /** A box in which it is not decided whether there is a fold; `spent`: the search stopped before. */
 export interface OpenBox extends FoldBox {

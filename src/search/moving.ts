@@ -6,6 +6,8 @@ import type { ProvedZero } from "./enumeration.ts";
 export interface Moving extends Enclosed {
   /** From now on what is read holds for every stage between these two. */
   between(from: number, to: number): void;
+  /** True if it is proved to be continuous in x, from a to b, and in the stages that were set, together. */
+  unbroken(a: number, b: number): boolean;
   /** True if what is read is sampled: then nothing is proved. */
   readonly sampled: boolean;
   /** False if it does not depend on x at all. */

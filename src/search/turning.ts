@@ -90,7 +90,7 @@ export function findTurning(f: Moving, reader: Reader, { at, step, range }: Ahea
 /**
  * Proves that the zero, which is there at the first of the two stages, has vanished at the second: around the turning point the
  * function has the sign of a lost zero along both edges from stage to stage, and everywhere between at the last. So the zero
- * could not leave the box and has no place in it.
+ * could not leave the box and has no place in it. As the function is continuous there, it met another and did not leap away.
  */
 export function proveTurning(
   f: Moving,
@@ -116,6 +116,8 @@ export function proveTurning(
   // the end of the last box on the side of the turning point: between it and the edge behind lies the zero
   const inner = side > 0 ? at.high : at.low;
   if (!(low < inner && inner < high)) return undefined;
+  f.between(stages[0], stages[1]);
+  if (!f.sampled && !f.unbroken(low, high)) return undefined;
   f.between(stages[1], stages[1]);
   const gone = f.sampled || isEmpty(f, [low, high]);
   return gone

@@ -6,8 +6,9 @@ import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { enclosureKernel } from "../reading/enclosureKernel.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import { above, below } from "../search/enclosed.ts";
+import { above, below, bounded } from "../search/enclosed.ts";
 import type { Moving } from "../search/moving.ts";
+import { leapFree } from "./leapFree.ts";
 
 /** A change of givens (values in order), and the couplings that are held at a temperature meanwhile. */
 export interface GivenPath {
@@ -89,9 +90,14 @@ function pathBalance(loop: Loop, holdable: readonly number[], changed: readonly 
       enclosureKernel(graph, { inputs, outputs, wide: new Set(intervals), ranges });
     const box = over([...temperatures, ...wide]);
     const point = over(wide);
+    let steady: ReturnType<typeof leapFree> | undefined;
     return {
       box: (out) => box(low, high, out),
       point: (out) => point(low, high, out),
+      unbroken() {
+        steady ??= leapFree(graph, net, { inputs, wide: new Set([...temperatures, ...wide]), ranges });
+        return steady(low, high);
+      },
     };
   }
   const out = new Float64Array(3 * outputs.length);
@@ -138,6 +144,12 @@ function pathBalance(loop: Loop, holdable: readonly number[], changed: readonly 
         rest.point(out);
         write(into, path.held);
       },
+      unbroken(a, b) {
+        setTemperature(a, b, path);
+        rest.box(out);
+        const [lo, hi, err] = out as unknown as [number, number, number];
+        return bounded(lo - err, hi + err) && rest.unbroken();
+      },
     };
   };
 }
@@ -146,6 +158,8 @@ function pathBalance(loop: Loop, holdable: readonly number[], changed: readonly 
 interface Readings {
   readonly box: (out: Float64Array) => void;
   readonly point: (out: Float64Array) => void;
+  /** Whether the balance is proved to be free of leaps there, where it is finite. */
+  readonly unbroken: () => boolean;
 }
 
 /** Bounds of a few samples: proves nothing. */
@@ -170,5 +184,5 @@ function sampledReadings(
     }
   };
   const both = read([0, 0.5, 1]);
-  return { box: both, point: both };
+  return { box: both, point: both, unbroken: () => false };
 }

@@ -1,6 +1,6 @@
 // What to write in place of a text that is almost a number with its unit.
 
-const ALMOST = /^\s*([-+\u2212]?)\s*(\d*[.,]?\d+(?:[eE][-+]?\d{1,3})?)\s*(°C|[A-Za-z].*?)\s*$/u;
+const ALMOST = /^\s*([-+\u2212]?)\s*(\d*[.,]?\d+(?:[eE][-+]?\d{1,3})?)\s*(\u00b0C|[A-Za-z].*?)\s*$/u;
 
 /** `; write "1.5 au"` for `"1,5 au"` or `"1.5au"`; nothing where it is not clear what is meant. */
 export function quantityHint(text: string): string {

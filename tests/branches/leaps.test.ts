@@ -88,6 +88,14 @@ test("a given at its own threshold has the balance of its upper side, and a stat
   expect(states.map((s) => s.temperature)).toEqual([412.5]);
 });
 
+test.each([0.3, -2.7, 1e-3])("and so has one at a threshold of %s, which is subtracted", (p) => {
+  const loop = loopOf((t, q) => sub(mul(2.25, step(sub(q, p))), over(t, 300, 50)));
+  const { states, complete } = core.findStates(loop, { within: [200, 500], at: { p } });
+  expect(complete).toBe(true);
+  expect(states.map((s) => s.temperature)).toEqual([412.5]);
+  for (const { bracket } of states) expect(bracket[1] - bracket[0]).toBeLessThan(1e-11);
+});
+
 test("a state that is lost to a leap of a given alone is in no fold, and lost where it was", () => {
   // at p = 0 the balance leaps by 2.25 W m-2, and with it away from all zeros next to the one that is followed; about 11 K
   // above, the balance with the leap has an extremum, which is not where the state was

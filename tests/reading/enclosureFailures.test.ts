@@ -162,7 +162,25 @@ describe.each([
       expect(value.slice(0, 2)).toEqual([0, 1]);
       expect(isKnown(slope)).toBe(false);
     });
+    // the difference of two doubles has the sign of the exact one, so it is decided at 0 too, in spite of its error
+    test.each([
+      ["at it", 0.3, 0.3, 1],
+      ["at it, below zero", -2.7, -2.7, 1],
+      ["just below it", 0.3 - 2 ** -54, 0.3, 0],
+      ["just above it", 0.3 + 2 ** -54, 0.3, 1],
+      ["the least number below it", 0, 5e-324, 0],
+    ] as const)("of a difference of two exact points, %s", (_name, x, y, expected) => {
+      expect(read((a, b) => step(sub(a, b)))({ x, y })[0]).toEqual([expected, expected, 0]);
+    });
+    test("of a difference that is 0 only because a product was rounded", () => {
+      // the doubles 0.1 and 3 have a product below the double next to it
+      const z = 0.1 * 3;
+      const [value, slope] = read((a, b, c) => step(sub(mul(a, b), c)))({ x: 0.1, y: 3, z });
+      expect(value).toEqual([0, 1, 0]);
+      expect(isKnown(slope)).toBe(false);
+    });
     test("of what has failed fails", () => {
+      expect(isKnown(read((a, b) => step(sub(log(a), b)))({ x: -1, y: 0 })[0])).toBe(false);
       for (const x of [-1, [-1, 2]] as const)
         expect(isKnown(read((a) => step(log(a)))({ x })[0])).toBe(false);
       expect(isKnown(read((a) => step(exp(a)))({ x: 800 })[0])).toBe(false);

@@ -37,7 +37,11 @@ export function stateReader(loop: Loop): StateReader {
   return (located, given) => {
     const { at, stability, lambda, slope, imbalance } = located;
     kernel(Float64Array.of(at, ...given), all);
-    for (let i = 0; i < all.length; i++) if (!Number.isFinite(all[i])) failAt(asked[i] as Asked, all[i]);
+    for (let i = 0; i < all.length; i++) {
+      if (!Number.isFinite(all[i])) failAt(asked[i] as Asked, all[i]);
+      // JSON does not keep -0; this makes it 0
+      (all[i] as number) += 0;
+    }
     const [netFlux, capacity] = core as unknown as [number, number];
     const bracket = Object.freeze([located.bracket[0], located.bracket[1]] as const);
     const ledger = writeLedger(flowValues, netFlux);
@@ -79,6 +83,8 @@ function namedValues(
   values: ArrayLike<number>,
 ): Readonly<Record<string, number>> {
   const record: Record<string, number> = {};
-  for (let i = 0; i < list.length; i++) record[(list[i] as { name: string }).name] = values[i] as number;
+  // a given may be -0 as well
+  for (let i = 0; i < list.length; i++)
+    record[(list[i] as { name: string }).name] = (values[i] as number) + 0;
   return Object.freeze(record);
 }

@@ -176,6 +176,25 @@ describe("a state", () => {
     expect(Object.isFrozen(cold?.ledger.flows[0])).toBe(true);
   });
 
+  test("has no -0, which JSON does not keep", () => {
+    const loop = core.closeLoop(({ temperature, given, couple }) => {
+      const p = given("p", -0, "1");
+      const reversed = couple("reversed", core.mul(-4, core.mul(-1, p)));
+      return {
+        heating: { sunlight: 240, less: core.inUnit(core.mul(4, p), "W m-2") },
+        cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
+        heatCapacity: 1,
+        report: { reversed, less: core.mul(4, p) },
+      };
+    });
+    for (const p of [0, -0]) {
+      const [state] = core.findStates(loop, { within: [150, 400], at: { p } }).states;
+      expect([state?.givens.p, state?.couplings.reversed]).toEqual([0, 0]);
+      expect(state?.report).toEqual({ reversed: 0, less: 0 });
+      expect(state?.ledger.flows[1]?.value).toBe(0);
+    }
+  });
+
   test("has times only where it returns", () => {
     expect(cold?.eFoldingTime).toBeCloseTo(-4.2e8 / (cold?.feedbackParameter as number), -3);
     expect(middle?.eFoldingTime).toBeNull();

@@ -179,18 +179,19 @@ describe("a state", () => {
   test("has no -0, which JSON does not keep", () => {
     const loop = core.closeLoop(({ temperature, given, couple }) => {
       const p = given("p", -0, "1");
-      const reversed = couple("reversed", core.mul(-4, core.mul(-1, p)));
+      const warmth = core.inUnit(temperature, "1");
+      const reversed = couple("reversed", core.mul(-4, core.mul(p, warmth)));
       return {
-        heating: { sunlight: 240, less: core.inUnit(core.mul(4, p), "W m-2") },
+        heating: { sunlight: 240, less: core.inUnit(reversed, "W m-2") },
         cooling: { longwave: core.greyEmission({ temperature, emissivity: 0.6 }) },
         heatCapacity: 1,
-        report: { reversed, less: core.mul(4, p) },
+        report: { reversed, more: core.mul(4, p) },
       };
     });
     for (const p of [0, -0]) {
       const [state] = core.findStates(loop, { within: [150, 400], at: { p } }).states;
       expect([state?.givens.p, state?.couplings.reversed]).toEqual([0, 0]);
-      expect(state?.report).toEqual({ reversed: 0, less: 0 });
+      expect(state?.report).toEqual({ reversed: 0, more: 0 });
       expect(state?.ledger.flows[1]?.value).toBe(0);
     }
   });

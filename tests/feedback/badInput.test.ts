@@ -10,6 +10,7 @@ import {
   linearEmission,
   rampAlbedo,
   type State,
+  sampledLaw,
 } from "../../src/index.ts";
 import { holdFixed } from "../../src/loop/holdFixed.ts";
 import { refusal } from "../refusal.ts";
@@ -66,6 +67,12 @@ describe.each(calls)("%s", (_, call) => {
     ["no couplings", { ...state, couplings: undefined }, "unreadable", "couplings"],
     ["a missing given", { ...state, givens: { flux: 1361 } }, "foreign-state", "givens"],
     [
+      "a coupling too many",
+      { ...state, couplings: { ...state.couplings, cover: 0.5 } },
+      "foreign-state",
+      "couplings",
+    ],
+    [
       "a given as text",
       { ...state, givens: { ...state.givens, flux: "1361" } },
       "not-a-number",
@@ -106,9 +113,41 @@ describe.each(calls)("%s", (_, call) => {
     expect({ code: error.code, path: error.path.replace(/^(state|from)\./, "") }).toEqual({ code, path });
   });
 
+  test("takes a temperature without a width whose balance is no more than rounding", () => {
+    const at = (value: number) => ({
+      ...state,
+      variables: { temperature: { value, bracket: [value, value] } },
+    });
+    // λ of about 2 W m⁻² K⁻¹ makes 2e-12 W m⁻² of 1e-12 K, and rounding of flows near 240 W m⁻² may be 5e-10
+    expect(() => call(at(state.temperature + 1e-12))).not.toThrow();
+    expect(foreign(at(state.temperature + 1e-8)).code).toBe("foreign-state");
+  });
+
   test("takes every state of its loop", () => {
     for (const s of found.states) expect(() => call(s)).not.toThrow();
   });
+});
+
+test("a sampled state is taken with a bracket that is wider than it was found", () => {
+  const leak = sampledLaw({
+    name: "leak",
+    output: { symbol: "F", unit: "W m-2" },
+    inputs: { temperature: { symbol: "T", unit: "K" } },
+    compute: ({ temperature }) => 240 + 2 * (temperature - 288),
+  });
+  const sampled = closeLoop(({ temperature, couple }) => ({
+    heating: { sunlight: absorbedFlux({ flux: 1371.42, albedo: couple("albedo", 0.3) }) },
+    cooling: { leak: leak({ temperature }) },
+    heatCapacity: 1,
+  }));
+  const [only] = findStates(sampled, { within }).states;
+  const value = only?.temperature ?? Number.NaN;
+  const from = (middle: number) => ({
+    ...(only as NonNullable<typeof only>),
+    variables: { temperature: { value: middle, bracket: [middle - 1e-4, middle + 1e-4] as const } },
+  });
+  expect(() => analyseFeedbacks(sampled, from(value))).not.toThrow();
+  expect(refusal(() => analyseFeedbacks(sampled, from(value + 2e-4))).code).toBe("foreign-state");
 });
 
 describe("names", () => {

@@ -45,6 +45,18 @@ describe("a budget is refused", () => {
       { code: "temperature-unused" },
     ],
     [
+      "that uses its temperature only in what does not enter the balance",
+      ({ temperature }) => ({
+        heating: { sunlight: 240 },
+        cooling: { longwave: 240 },
+        exchange: {
+          drift: { value: greyEmission({ temperature, emissivity: 0.6 }), from: "air", to: "sea" },
+        },
+        heatCapacity: 1,
+      }),
+      { code: "temperature-unused" },
+    ],
+    [
       "with a NaN flow",
       (t) => ({ heating: { sunlight: Number.NaN }, cooling: longwave(t), heatCapacity: 1 }),
       { code: "not-a-number", path: "heating.sunlight" },
@@ -293,6 +305,16 @@ describe("a loop", () => {
     expect(only?.couplings.albedo).toBe(0.3);
     expect(only?.eigenvalues).toBeNull();
     expect(only?.eFoldingTime).toBe(0);
+  });
+
+  test("may use the arithmetic behind a coupling elsewhere: it is shared by accident, and is no way round", () => {
+    const shared = closeLoop(({ temperature, couple }) => {
+      const excess = couple("excess", sub(temperature, 288));
+      const response = inUnit(mul(2, excess), "W m-2");
+      const loss = inUnit(sub(temperature, 288), "W m-2");
+      return { heating: { a: 240, response }, cooling: { b: add(240, mul(3, loss)) }, heatCapacity: 1 };
+    });
+    expect(findStates(shared, { within: [150, 400] }).states[0]?.temperature).toBeCloseTo(288, 9);
   });
 
   test("with several variables is recorded, and says that its states are not found yet", () => {

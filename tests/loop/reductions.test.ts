@@ -5,9 +5,10 @@ import type { Budget, Tools } from "../../src/loop/types.ts";
 import { refusal } from "../refusal.ts";
 
 const { add, closeLoop, co2AdjustedForcingMyhre, div, findStates, forcedEmission, inUnit } = core;
-const { linearEmission, mul, neg, sub } = core;
+const { linearEmission, max, min, mul, neg, sub } = core;
 
 const parts = ({ temperature, given, couple }: Tools) => {
+  mul(-2, temperature);
   const clear = linearEmission({ temperature, intercept: 240, slope: 2, reference: 288 });
   const concentration = given("co2", 556e-6, "1");
   const forcing = couple("forcing", co2AdjustedForcingMyhre({ concentration, reference: 278e-6 }));
@@ -47,6 +48,17 @@ describe("a forcing is refused", () => {
       "subtracted twice",
       (p) => ({ heating: { sun: 240 }, cooling: { olr: sub(p.clear, neg(p.forcing)) } }),
       "cooling.olr",
+    ],
+    [
+      "times a negative number, subtracted",
+      // the number is recorded before the forcing, so that it is the first factor
+      (p) => ({ heating: { sun: 240 }, cooling: { olr: sub(p.clear, mul(-2, p.forcing)) } }),
+      "cooling.olr",
+    ],
+    [
+      "as a heating within limits",
+      (p) => ({ heating: { co2: min(5, max(0, p.forcing)) }, cooling: { olr: p.clear } }),
+      "heating.co2",
     ],
   ])("%s", (_, flows, path) => {
     const error = refusal(() => closeLoop((tools) => ({ ...flows(parts(tools)), heatCapacity: 0 })));

@@ -219,3 +219,36 @@ describe("rounding is outwards", () => {
     }
   });
 });
+
+describe("a valley whose bottom is read less well than places beside it", () => {
+  /** x⁴ + 10⁻³·x² + rise, read near 0 with an error of 10⁻⁵, elsewhere of 10⁻¹², over boxes of 10⁻⁴ of their width. */
+  const valley = (rise: number): Enclosed => {
+    const at = (x: number) => x ** 4 + 1e-3 * x * x + rise;
+    const slope = (x: number) => 4 * x ** 3 + 2e-3 * x;
+    const bend = (x: number) => 12 * x * x + 2e-3;
+    return {
+      box(a, b, out) {
+        const nearest = a <= 0 && b >= 0 ? 0 : Math.min(Math.abs(a), Math.abs(b));
+        const farthest = Math.max(Math.abs(a), Math.abs(b));
+        out.set([at(nearest), at(farthest), 1e-4 * (b - a), slope(a), slope(b), 1e-12]);
+        out.set([bend(nearest), bend(farthest), 1e-12], 6);
+      },
+      point(x, out) {
+        out.set([at(x), at(x), Math.abs(x) < 1e-3 ? 1e-5 : 1e-12, slope(x), slope(x), 1e-12]);
+      },
+    };
+  };
+
+  test("that lies beyond zero holds two zeros, found from places that are read well", () => {
+    const { zeros, undecided } = zerosOf(valley(-1e-6), [-8, 8], { effort: 200 });
+    expect(undecided).toEqual([]);
+    const zero = Math.sqrt((Math.sqrt(5) - 1) * 5e-4);
+    // the errors of 1e-12 over a slope of 1e-4
+    for (const [i, found] of zeros.entries()) expect(found.at).toBeCloseTo(i === 0 ? -zero : zero, 7);
+    expect(zeros).toHaveLength(2);
+  });
+
+  test("that is proved clear over a box is not in doubt", () => {
+    expect(zerosOf(valley(1e-6), [-8, 8], { effort: 200 })).toMatchObject({ zeros: [], undecided: [] });
+  });
+});

@@ -1,6 +1,7 @@
 // The states of a diagram at one value of its parameter.
 import { fail } from "../ground/errors.ts";
 import { checkedNumber, holds, type Range } from "../ground/range.ts";
+import { checkLoop } from "../loop/checkLoop.ts";
 import { givensAt } from "../loop/inputs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
 import { readerOf } from "../states/prepared.ts";
@@ -33,7 +34,11 @@ export function statesOnDiagram<N extends string>(
   diagram: Diagram<Givens<N>>,
   at: number,
 ): StatesOnDiagram<N> {
-  if (diagram?.method === undefined || !Array.isArray(diagram.branches))
+  checkLoop(loop, "statesOnDiagram");
+  if (
+    diagram?.method === undefined ||
+    ![diagram.branches, diagram.folds, diagram.crossings].every(Array.isArray)
+  )
     fail("unreadable", { path: "diagram", value: diagram, allowed: "what traceBranches returned" });
   const value = checkedNumber(at, "at", diagram.unit, diagram.between);
   const inside = (range: Range) => holds(range, value);

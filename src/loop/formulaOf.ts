@@ -29,8 +29,9 @@ export function formulaOf(of: Law | Loop, options: FormulaOptions = {}): string 
   const path = "formulaOf";
   checkKeys(options, path, ["notation"]);
   const { notation = "text" } = options;
-  if (typeof of !== "function") checkLoop(of, path);
-  return typeof of === "function" ? lawFormula(of, { notation }) : loopFormula(of, notation);
+  if (typeof of === "function" && of.card) return lawFormula(of, { notation });
+  checkLoop(of as Loop, path);
+  return loopFormula(of as Loop, notation);
 }
 
 function loopFormula({ graph, variables, givens, couplings, flows }: Loop, notation: Notation): LoopFormula {

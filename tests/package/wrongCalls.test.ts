@@ -8,6 +8,7 @@ import { iceLoop } from "../states/iceLoop.ts";
 type Call = (...args: readonly unknown[]) => unknown;
 const loop = iceLoop();
 const state = core.findStates(loop, { within: [150, 400] }).states[2];
+const diagram = core.traceBranches(loop, { along: "flux", between: [1300, 1400], within: [150, 400] });
 const { closeLoop, defineLaw, sampledLaw, slopesOf } = core as unknown as Record<string, Call>;
 
 /** What each function is given, and the last of it is missing or wrong. */
@@ -35,7 +36,15 @@ describe.each(BESIDE)("%s", (name, args) => {
 });
 
 describe("every public function", () => {
-  const lists = [[], [undefined], [null], [3], [{}], [loop, null], [loop, 3], [loop, state, null]];
+  const noDiagram = { method: "line", branches: [] };
+  const lists = [
+    ...[[], [undefined], [null], [3], [{}], [() => 0], [loop, null], [loop, 3], [loop, state, null]],
+    ...[
+      [null, diagram, 1361],
+      [loop, noDiagram, 1361],
+      [{}, diagram, 1361],
+    ],
+  ];
   const functions = Object.entries({ ...core, ...planet }).filter(
     ([name, value]) => typeof value === "function" && name !== "ThermosteadError",
   ) as unknown as (readonly [string, Call])[];

@@ -7,8 +7,8 @@ export const ROW_STATUS = ["proved", "partial", "sampled", "refused"] as const;
 /** The states of all rows, in order of the rows and by rising temperature. */
 export interface StateColumns {
   readonly rows: number;
-  /** How many states each row has. */
-  readonly counts: Uint8Array;
+  /** How many states each row has; in bytes unless one has more than 255. */
+  readonly counts: Uint8Array | Uint32Array;
   /** Where each row's states begin in the arrays below; one more entry than rows. */
   readonly first: Uint32Array;
   /** K. */
@@ -39,7 +39,7 @@ export interface Found {
 
 /** Collects the states of rows; its arrays double when they are full, so that a row costs no allocation. */
 export class StateCollector {
-  readonly #counts: Uint8Array;
+  #counts: Uint8Array | Uint32Array;
   readonly #first: Uint32Array;
   readonly #status: Uint8Array;
   readonly #reasons: Reason[] = [];
@@ -60,6 +60,7 @@ export class StateCollector {
   /** Adds a row with the first `count` of the states found; rows come in order. */
   add(row: number, status: (typeof ROW_STATUS)[number], found: readonly Found[], count: number): void {
     while (this.#size + count > this.#temperatures.length) this.#grow();
+    if (count > 255 && this.#counts instanceof Uint8Array) this.#counts = Uint32Array.from(this.#counts);
     this.#first[row] = this.#size;
     this.#counts[row] = count;
     this.#status[row] = ROW_STATUS.indexOf(status);

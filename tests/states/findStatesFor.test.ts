@@ -83,6 +83,24 @@ describe("findStatesFor", () => {
     expect(found.temperatures[245]).toBeCloseTo((middle[49] as number) - 40, 9);
   });
 
+  test("takes more states in a row than a byte can count", () => {
+    // a zigzag of slopes 1 and -1, which turns every kelvin between 199.5 and 200.5, 256 times; and levels beyond them
+    const zigzag = core.closeLoop(({ temperature, given }) => {
+      const t = core.inUnit(temperature, "1");
+      const turns = Array.from({ length: 256 }, (_, i) =>
+        core.mul(i % 2 ? 2 : -2, core.max(0, core.sub(t, 200.5 + i))),
+      );
+      const net = core.add(core.sub(t, given("level", 200.2, "1")), core.sum(...turns));
+      return { heating: { imagined: core.inUnit(net, "W m-2") }, cooling: {}, heatCapacity: 1 };
+    });
+    const level = [100, 200.2, 300];
+    const found = core.findStatesFor(zigzag, { level }, { within: [199, 455.9], effort: 1e5 });
+    // it passes 200.2 once on each of its pieces but the last, of which the range has too little
+    expect([...found.counts]).toEqual([0, 256, 0]);
+    expect([...found.first]).toEqual([0, 0, 256, 256]);
+    for (let i = 0; i < 256; i++) expect(found.temperatures[i]).toBeCloseTo(i + (i % 2 ? 199.8 : 200.2), 9);
+  });
+
   test.each<[string, unknown, unknown, Partial<core.ThermosteadError>]>([
     ["no columns", {}, { within }, { code: "missing", path: "columns" }],
     ["an unknown column", { flx: [1] }, { within }, { code: "unknown-name", path: "columns.flx" }],

@@ -115,6 +115,18 @@ describe("doubled carbon dioxide", () => {
     expect(compared.to?.proved).toBe(true);
   });
 
+  test("a loop shows what is held in it, one after the other, and where", () => {
+    const state = found.states[2] as (typeof found.states)[number];
+    const once = holdFixed(loop, ["albedo"], state);
+    const twice = holdFixed(once, ["opticalDepth"], state as never);
+    const { temperature } = state;
+    expect(JSON.parse(JSON.stringify(once)).held).toEqual({ albedo: temperature });
+    expect(JSON.parse(JSON.stringify(twice)).held).toEqual({
+      albedo: temperature,
+      opticalDepth: temperature,
+    });
+  });
+
   test("holding keeps what the given does through a held coupling", () => {
     const held = holdFixed(loop, hold, found.states[2] as never);
     const states = findStates(held, { within, at: change }).states;

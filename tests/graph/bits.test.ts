@@ -1,6 +1,9 @@
 // Numbers folded, generated code and the interpreter must give the same bits: there is one physics, not three.
 import { describe, expect, test } from "vitest";
-import type { Graph } from "../../src/graph/node.ts";
+import { Graph } from "../../src/graph/node.ts";
+import type { Op } from "../../src/graph/op.ts";
+import { Quantity } from "../../src/graph/quantity.ts";
+import { NO_DIMENSION } from "../../src/ground/dimension.ts";
 import { generateScalar } from "../../src/reading/generateScalar.ts";
 import { interpretScalar } from "../../src/reading/interpretScalar.ts";
 import type { ReadingOf } from "../../src/reading/readingOf.ts";
@@ -65,4 +68,20 @@ describe("folded = generated = interpreted", () => {
     generateValue(graph, { inputs, outputs: [output] })(Float64Array.of(0.7), out);
     expect(out[0]).toBe((1 / 3) * 0.7);
   });
+});
+
+test("a + b and b + a are one node, and so are a·b and b·a; a − b and b − a are not", () => {
+  const graph = new Graph();
+  const [a, b] = ["a", "b"].map((name) => graph.input({ kind: "given", name }, NO_DIMENSION)) as [
+    number,
+    number,
+  ];
+  const id = (op: Op, ...args: number[]) =>
+    graph.record(
+      op,
+      args.map((node) => new Quantity(graph, node)),
+    ).id;
+  expect(id("add", a, b)).toBe(id("add", b, a));
+  expect(id("mul", a, b)).toBe(id("mul", b, a));
+  expect(id("sub", a, b)).not.toBe(id("sub", b, a));
 });

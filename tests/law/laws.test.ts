@@ -231,6 +231,27 @@ describe("a law written by a user", () => {
     },
   );
 
+  test("may feed another law with a value whose unit cannot be told inside it", () => {
+    const { add, blackbodyFlux, defineLaw, mul } = core;
+    const empirical = defineLaw({
+      name: "empirical",
+      output: { symbol: "F", unit: "W m-2" },
+      inputs: {
+        temperature: { symbol: "T", unit: "K" },
+        pressure: { symbol: "p", unit: "Pa" },
+      },
+      write: ({ temperature, pressure }) =>
+        blackbodyFlux({ temperature: add(temperature, mul(1e-4, pressure)) }),
+    });
+    const loop = core.closeLoop(({ temperature, given }) => ({
+      heating: { sunlight: 240 },
+      cooling: { longwave: empirical({ temperature, pressure: given("pressure", 1e5, "Pa") }) },
+      heatCapacity: 1,
+    }));
+    const [only] = core.findStates(loop, { within: [150, 400] }).states;
+    expect(only?.temperature).toBeCloseTo(core.blackbodyTemperature({ flux: 240 }) - 10, 9);
+  });
+
   test("is refused a quantity with another unit", () => {
     const error = refusal(() =>
       core.closeLoop(({ temperature, given }) => ({

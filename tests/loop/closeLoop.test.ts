@@ -289,6 +289,29 @@ describe("a loop", () => {
     expect(core.sourcesOf(loop).map((s) => s.law)).toEqual(["tanhAlbedo", "greyEmission", "absorbedFlux"]);
   });
 
+  test("prints names with signs that mean something in TeX as what they are", () => {
+    const odd = closeLoop(({ temperature, given, couple }) => ({
+      heating: {
+        a: mul(given("S_0 & more", 1361, "W m-2"), couple("50%", tanhAlbedo({ temperature, ...ice }))),
+      },
+      cooling: { b: greyEmission({ temperature, emissivity: 0.6 }) },
+      heatCapacity: 1,
+    }));
+    const tex = core.formulaOf(odd, { notation: "tex" }).heating.a;
+    expect(tex).toContain("\\mathrm{S\\_0 \\& more}");
+    expect(tex).toContain("\\mathrm{50\\%}");
+  });
+
+  test("without heating loses what it cools by", () => {
+    const falling = closeLoop(({ temperature }) => ({
+      heating: {},
+      cooling: { leak: core.linearEmission({ temperature, intercept: 0, slope: 2, reference: 288 }) },
+      heatCapacity: 4,
+    }));
+    const [only] = findStates(falling, { within: [150, 400] }).states;
+    expect(only).toMatchObject({ stability: "stable", feedbackParameter: -2, eFoldingTime: 2 });
+  });
+
   test("reads report quantities in every state", () => {
     const [cold] = findStates(loop, { within: [150, 400] }).states;
     expect(cold?.report.excess).toBe((cold?.temperature as number) - 273.15);

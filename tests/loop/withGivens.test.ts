@@ -11,6 +11,7 @@ import {
   traceBranches,
   withGivens,
 } from "../../src/index.ts";
+import { kept } from "../../src/loop/kept.ts";
 import { refusal } from "../refusal.ts";
 
 const closed = (flux: number, emissivity: number) =>
@@ -53,6 +54,16 @@ describe("withGivens", () => {
     expect(answers(changed)).toBe(answers(closed(1400, 0.6)));
     expect(answers(withGivens(changed, { emissivity: 0.62 }))).toBe(answers(closed(1400, 0.62)));
     expect(answers(first)).toBe(before);
+  });
+
+  it("shares what was made for a loop with all that come of it, one after the other", () => {
+    const made: Loop[] = [];
+    const thing = kept((loop) => made.push(loop));
+    const first = closed(1361, 0.6);
+    const second = withGivens(first, { flux: 1400 });
+    const things = [first, second, withGivens(second, { emissivity: 0.62 })].map((loop) => thing(loop));
+    expect(things).toEqual([1, 1, 1]);
+    expect(thing(closed(1361, 0.6))).toBe(2);
   });
 
   it("refuses names and values that the loop does not allow", () => {

@@ -252,3 +252,21 @@ describe("a valley whose bottom is read less well than places beside it", () => 
     expect(zerosOf(valley(1e-6), [-8, 8], { effort: 200 })).toMatchObject({ zeros: [], undecided: [] });
   });
 });
+
+test("a bracket does not reach out of the range, however little is known near its end", () => {
+  const line: Enclosed = {
+    box(a, b, out) {
+      out.set([a, b, 0, 1, 1, 0, 0, 0, 0]);
+    },
+    point(x, out) {
+      out.set([x, x, Math.abs(x) < 1e-4 ? 1e-3 : 1e-15, 1, 1, 0]);
+    },
+  };
+  for (const range of [[-2e-4, 9] as const, [-9, 2e-4] as const]) {
+    const { zeros, undecided } = zerosOf(line, range, { effort: 50 });
+    expect(undecided).toEqual([]);
+    expect(zeros).toHaveLength(1);
+    const [low, high] = zeros[0]?.bracket ?? [Number.NaN, Number.NaN];
+    expect(low >= range[0] && low < 0 && high > 0 && high <= range[1]).toBe(true);
+  }
+});

@@ -5,6 +5,7 @@ import { statesOnDiagram } from "../../src/branches/statesOnDiagram.ts";
 import { traceBranches } from "../../src/branches/traceBranches.ts";
 import * as core from "../../src/index.ts";
 import { randomNumbers } from "../graph/randomGraph.ts";
+import { refusal } from "../refusal.ts";
 import { iceLoop } from "../states/iceLoop.ts";
 import { sampledLoop, stateOf, vapourLoop } from "./loops.ts";
 
@@ -51,6 +52,17 @@ describe("a state that is followed", () => {
       state = followState(loop, state, { to: { flux: 1361 - i, emissivity: 0.6 - i * 2e-4 } }).state as State;
     }
     expect(state.temperature).toBeCloseTo(warm.temperature, 10);
+  });
+
+  test("is refused with a temperature outside of its bracket, however small the step is", () => {
+    for (const by of [1e-9, 0.5, -5]) {
+      const value = warm.temperature + by;
+      const moved = { ...warm, variables: { temperature: { ...warm.variables.temperature, value } } };
+      expect(refusal(() => followState(loop, moved, { to: { flux: 1362 } }))).toMatchObject({
+        code: "out-of-range",
+        path: "state.variables.temperature.value",
+      });
+    }
   });
 
   test("may come from JSON, and may stay where it is", () => {

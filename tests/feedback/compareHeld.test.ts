@@ -17,6 +17,7 @@ import {
   type State,
   sampledLaw,
   square,
+  stepAlbedo,
   sub,
   tanhAlbedo,
   type Value,
@@ -42,6 +43,33 @@ const rampLoop = () =>
       heatCapacity: 4e8,
     };
   });
+
+test("a branch that ends at a leap is not said to arrive in it", () => {
+  // warmer than 288 K the planet reflects more, so that between two fluxes nothing balances
+  const loop = closeLoop(({ temperature, given, couple }) => {
+    const albedo = couple("albedo", stepAlbedo({ temperature, cold: 0.3, warm: 0.4, threshold: 288 }));
+    const heat = given("heat", 0, "W m-2", { within: [0, 100] });
+    const sunlight = absorbedFlux({ flux: 1360, albedo });
+    const straight = { intercept: 240, slope: 2, reference: 288 };
+    return {
+      heating: { sunlight, heat },
+      cooling: { longwave: linearEmission({ temperature, ...straight }) },
+      heatCapacity: 4e8,
+    };
+  });
+  const [state] = statesOf(loop);
+  expect(state?.temperature).toBeCloseTo(287, 9);
+  const warmedBy = (heat: number) =>
+    compareHeld(loop, { from: state as never, change: { heat }, hold: ["albedo"] });
+  expect(warmedBy(1).temperatureChange).toBeCloseTo(0.5, 9);
+  // 238 + heat = 240 + 2 (T − 288) reaches the leap at 2 W m⁻², and 204 + heat leaves it at 36
+  const { temperatureChange, temperatureChangeHeld, lost } = warmedBy(20);
+  expect(temperatureChange).toBeNull();
+  expect(temperatureChangeHeld).toBeCloseTo(10, 9);
+  expect(lost).toMatchObject([{ held: [], lost: { reason: "undecided" } }]);
+  expect(lost[0]?.lost.temperature).toBeCloseTo(288, 3);
+  expect(lost[0]?.lost.givens.heat).toBeCloseTo(2, 3);
+});
 
 describe("a branch that ends", () => {
   test("at a corner of a ramp, which is told from a smooth fold", () => {

@@ -302,6 +302,21 @@ describe("a loop", () => {
     expect(tex).toContain("\\mathrm{50\\%}");
   });
 
+  test("knows the units of quotients, products and roots", () => {
+    const close = (write: (energy: core.Quantity, time: core.Quantity) => core.Value) =>
+      closeLoop(({ temperature, given }) => ({
+        heating: { stored: write(given("energy", 2.4e10, "J m-2"), given("time", 1e8, "s")) },
+        cooling: { b: greyEmission({ temperature, emissivity: 1 }) },
+        heatCapacity: 1,
+      }));
+    const { div, sqrt } = core;
+    expect(() => close((energy, time) => div(energy, time))).not.toThrow();
+    expect(() => close((energy, time) => div(mul(energy, time), mul(time, time)))).not.toThrow();
+    expect(() => close((energy, time) => sqrt(div(mul(energy, energy), mul(time, time))))).not.toThrow();
+    expect(refusal(() => close((energy, time) => mul(energy, time))).code).toBe("unit-mismatch");
+    expect(refusal(() => close((energy, time) => div(time, energy))).code).toBe("unit-mismatch");
+  });
+
   test("without heating loses what it cools by", () => {
     const falling = closeLoop(({ temperature }) => ({
       heating: {},

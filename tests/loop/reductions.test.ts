@@ -100,7 +100,7 @@ test("what another law makes of a forcing is its own affair", () => {
   expect(loop.flows.map((f) => f.name)).toEqual(["sun", "olr"]);
 });
 
-test("above 2000 ppm a state carries a note that the law is extrapolated", () => {
+test("above 2000 and below 180 ppm a state carries a note that the law is extrapolated", () => {
   const loop = closeLoop(({ temperature, given }) => {
     const clear = linearEmission({ temperature, intercept: 240, slope: 2, reference: 288 });
     const concentration = given("co2", 400e-6, "1");
@@ -111,6 +111,8 @@ test("above 2000 ppm a state carries a note that the law is extrapolated", () =>
     findStates(loop, { within: [200, 400], at: { co2 } }).states.flatMap((s) =>
       s.notes.filter((n) => n.about === "co2EffectiveForcingAr6.concentration").map((n) => n.code),
     );
+  expect(notes(179e-6)).toEqual(["outside-published"]);
+  expect(notes(181e-6)).toEqual([]);
   expect(notes(1999e-6)).toEqual([]);
   expect(notes(2001e-6)).toEqual(["outside-published"]);
 });

@@ -31,6 +31,13 @@ test("the table is frozen, names every limit once, and gives each its paper", ()
   }
 });
 
+test("what was seen of Venus and Mars is told from what models say, and outer edges from inner ones", () => {
+  for (const { name, basis, edge } of HABITABLE_ZONE_LIMITS) {
+    expect(basis, name).toBe(/^recent Venus$|^early Mars$/.test(name) ? "solar system" : "climate model");
+    expect(edge, name).toBe(/^maximum greenhouse$|^early Mars$/.test(name) ? "outer" : "inner");
+  }
+});
+
 describe.each([2013, 2014])("the limits of %i", (year) => {
   const limits = HABITABLE_ZONE_LIMITS.filter((l) => l.year === year);
 
@@ -104,8 +111,8 @@ test("stars and masses outside the papers are refused", () => {
     () => flux(first, 2599),
     () => flux(first, 7201),
     () => interpolatedRunawayFlux({ effectiveTemperature: 2599, mass: EARTH }),
-    () => interpolatedRunawayFlux({ effectiveTemperature: 5780, mass: 0.09 * EARTH }),
-    () => interpolatedRunawayFlux({ effectiveTemperature: 5780, mass: 5.1 * EARTH }),
+    () => interpolatedRunawayFlux({ effectiveTemperature: 5780, mass: 0.0999 * EARTH }),
+    () => interpolatedRunawayFlux({ effectiveTemperature: 5780, mass: 5.01 * EARTH }),
   ].map(refusal);
   expect(refusals.map((e) => `${e.code} ${e.path}`)).toEqual([
     "out-of-range habitableZoneFlux.effectiveTemperature",

@@ -2,6 +2,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { absorbedFlux, mixAlbedo } from "../../src/index.ts";
+import { refusal } from "../refusal.ts";
 import { settings } from "./settings.ts";
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
@@ -25,6 +26,20 @@ describe("a mixture of surfaces", () => {
       }),
       settings(300),
     );
+  });
+
+  test("of white parts is white, also where its shares sum to more than 1 by rounding", () => {
+    const shares = [0.13148891446772115, 0.4219635700938282, 0.4465475154384508];
+    expect(shares.reduce((sum, share) => sum + share, 0)).toBeGreaterThan(1);
+    expect(mixAlbedo({ covers: shares.map((fraction) => ({ fraction, albedo: 1 })) })).toBe(1);
+  });
+
+  test("of shares that miss 1 by more than rounding is refused, with the rest bare or without", () => {
+    const halves = (second: number) => [0.5, second].map((fraction) => ({ fraction, albedo: 0.3 }));
+    expect(mixAlbedo({ covers: halves(0.5 + 5e-13) })).toBeCloseTo(0.3, 11);
+    expect(refusal(() => mixAlbedo({ covers: halves(0.5 + 1e-11) })).code).toBe("out-of-range");
+    expect(refusal(() => mixAlbedo({ covers: halves(0.5 - 1e-11) })).code).toBe("shares-not-one");
+    expect(refusal(() => mixAlbedo({ covers: halves(0.5 + 1e-11), bare: 0.1 })).code).toBe("out-of-range");
   });
 
   test("of shares in whole percents is an albedo, however bright its parts", () => {

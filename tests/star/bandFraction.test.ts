@@ -21,6 +21,16 @@ test("the table has fourteen temperatures and ten bands", () => {
   expect(table.rows).toHaveLength(140);
 });
 
+test("a band hardly wider than the spacing of doubles has no negative share", () => {
+  // rounding makes the difference of the shares on either side negative here
+  for (const [temperature, from, to] of [
+    [538, 0.0000121427, 0.000012142700000000003],
+    [453, 0.0000158489, 0.000015848900000000003],
+    [389, 0.0000183315, 0.000018331500000000002],
+  ] as const)
+    expect(bandFraction({ temperature, from, to })).toBe(0);
+});
+
 describe("where the two series meet", () => {
   const temperature = 288;
   const seam = REDUCING / 2 / temperature;

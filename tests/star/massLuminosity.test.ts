@@ -14,6 +14,12 @@ const SUN = SOLAR_MASS_PARAMETER / GRAVITATION;
 const at = (suns: number) => massLuminosity({ mass: suns * SUN }) / SOLAR_LUMINOSITY;
 const edges = MASS_LUMINOSITY_STEPS.slice(0, -1);
 
+test("the last step ends where the published range does", () => {
+  const [, top] = massLuminosity.card.published.mass as readonly [number, number];
+  // 31 solar masses by another rounding of the Sun's mass
+  expect(MASS_LUMINOSITY_STEPS.at(-1)?.upTo).toBeCloseTo(top / SUN, 9);
+});
+
 describe("the edge of each step", () => {
   /** Jumps of the printed fits, by their own logarithms. */
   const jumps = [-0.0187659, -0.1528967, -0.0294044, -0.1182133, 0.2042093];

@@ -100,9 +100,43 @@ describe("the sampled search", () => {
   test("says when its effort is spent, and where", () => {
     const found = findStates(iceLoop(), { within: [150, 400], effort: 40 });
     expect(found.cost.points).toBeLessThan(400);
-    const short = loopOf((t) => core.tanh(mul(30, sub(t, 300.3))));
-    const stopped = findStates(short, { within: [150, 400], effort: 10 });
-    expect(stopped.states.length + stopped.undecided.length).toBeGreaterThan(0);
+    // more is wanted around the first two zeros than may be spent, and the third lies behind them
+    const valley = (t: core.Quantity | number) => sub(max(sub(200, t), sub(t, 200)), 10.1);
+    const kinked = loopOf((t) => core.min(valley(t as never), sub(330.1, t)));
+    const stopped = findStates(kinked, { within: [150, 400], effort: 10 });
+    expect(stopped.states.filter((s) => s.temperature > 275)).toEqual([]);
+    const last = stopped.undecided.at(-1);
+    expect(last?.kind).toBe("effort");
+    expect(last?.interval).toEqual([275, 400]);
+    expect(stopped.notes.map((n) => n.code)).toContain("search-stopped");
+    const all = findStates(kinked, { within: [150, 400] }).states.map((s) =>
+      Number(s.temperature.toFixed(9)),
+    );
+    expect(all).toEqual([189.9, 210.1, 330.1]);
+  });
+
+  test("takes a leap that ends near zero on one side for a leap", () => {
+    const leap = loopOf((t) => sub(20, mul(21, core.step(sub(t, 300.123)))));
+    const found = findStates(leap, { within: [150, 400] });
+    expect(found.states).toEqual([]);
+    expect(found.undecided).toMatchObject([{ kind: "jump" }]);
+  });
+
+  test("adds up what temperature does through every port of a law", () => {
+    const both = core.sampledLaw({
+      name: "both",
+      output: { symbol: "F", unit: "W m-2" },
+      inputs: { first: { symbol: "T", unit: "K" }, second: { symbol: "U", unit: "K" } },
+      compute: ({ first, second }) => 3 * first + 5 * second - 8 * 288,
+    });
+    const loop = core.closeLoop(({ temperature }) => ({
+      heating: {},
+      cooling: { both: both({ first: temperature, second: temperature }) },
+      heatCapacity: 1,
+    }));
+    const [only] = findStates(loop, { within: [150, 400] }).states;
+    // difference quotients of numbers near 2000 over steps of 0.003 K
+    expect(only?.feedbackParameter).toBeCloseTo(-8, 7);
   });
 
   test("changes nothing but the givens it is told", () => {

@@ -123,8 +123,10 @@ function checkedColumns(
 function fillRow(values: Float64Array, columns: readonly Column[], row: number): Column | undefined {
   for (let i = 0; i < columns.length; i++) {
     const column = columns[i] as Column;
-    const value = column.values[row] as number;
-    if (value >= column.low && value <= column.high) values[column.index] = value;
+    const value = column.values[row];
+    // a null or a text is compared as the number that it could be taken for, so its type must be asked
+    if (typeof value === "number" && value >= column.low && value <= column.high)
+      values[column.index] = value;
     else return column;
   }
   return undefined;

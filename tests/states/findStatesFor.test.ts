@@ -83,6 +83,27 @@ describe("findStatesFor", () => {
     expect(found.temperatures[245]).toBeCloseTo((middle[49] as number) - 40, 9);
   });
 
+  test.each<[string, unknown]>([
+    ["null, as JSON writes NaN", null],
+    ["a text", "1361"],
+    ["true", true],
+    ["a list", [1361]],
+    ["a big integer", 1361n],
+    ["a symbol", Symbol("flux")],
+    ["an object with a value", { valueOf: () => 1361 }],
+  ])("takes no number from %s, and goes on", (_, value) => {
+    const found = core.findStatesFor(loop, { flux: [1361, value, 1361] as number[] }, { within });
+    expect([...found.counts]).toEqual([3, 0, 3]);
+    expect([...found.status].map((s) => core.ROW_STATUS[s])).toEqual(["proved", "refused", "proved"]);
+    expect(found.reasons).toMatchObject([{ row: 1, code: "not-a-number" }]);
+    expect(JSON.parse(JSON.stringify(found.reasons))).toEqual(found.reasons);
+  });
+
+  test("refuses the rows of a typed array of big integers", () => {
+    const found = core.findStatesFor(loop, { flux: new BigInt64Array([1361n]) as never }, { within });
+    expect(found.reasons).toMatchObject([{ row: 0, code: "not-a-number" }]);
+  });
+
   test("takes more states in a row than a byte can count", () => {
     // a zigzag of slopes 1 and -1, which turns every kelvin between 199.5 and 200.5, 256 times; and levels beyond them
     const zigzag = core.closeLoop(({ temperature, given }) => {

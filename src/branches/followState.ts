@@ -64,6 +64,7 @@ function quickly<N extends string>(
   const before = loop.givens.map(({ name }) => given[name] as number);
   const { after, changed } = changedGivens(loop, before, to);
   const { value: temperature, bracket } = place;
+  if (![temperature, ...bracket, ...before].every(Number.isFinite)) return undefined;
   if (!(temperature >= bracket[0] && temperature <= bracket[1])) return undefined;
   const step = { before, after, temperature, bracket, within: rangeWith(within, loop, temperature) };
   const located = quickStepOf(loop, changed.join())(step);

@@ -65,6 +65,29 @@ describe("a state that is followed", () => {
     }
   });
 
+  test.each<[string, unknown]>([
+    ["a text", "0.6"],
+    ["a list", [0.6]],
+    ["a big integer", 1n],
+    ["a symbol", Symbol("emissivity")],
+  ])("is refused with %s for a number", (_, wrong) => {
+    const { temperature } = warm.variables;
+    const refused = (path: string, changed: object) =>
+      expect(refusal(() => followState(loop, { ...warm, ...changed }, { to: { flux: 1362 } }))).toMatchObject(
+        {
+          code: "not-a-number",
+          path,
+        },
+      );
+    refused("state.givens.emissivity", { givens: { ...warm.givens, emissivity: wrong } });
+    refused("state.variables.temperature.value", {
+      variables: { temperature: { ...temperature, value: wrong } },
+    });
+    refused("state.variables.temperature.bracket[1]", {
+      variables: { temperature: { ...temperature, bracket: [temperature.bracket[0], wrong] } },
+    });
+  });
+
   test("may come from JSON, and may stay where it is", () => {
     const again = JSON.parse(JSON.stringify(warm)) as State;
     expect(followState(loop, again, { to: { flux: 1400 } })).toEqual(

@@ -3,7 +3,7 @@
 import { CONSTANT_SET } from "../ground/constants.ts";
 import { deepFreeze } from "../ground/deepFreeze.ts";
 import { checkKeys } from "../ground/names.ts";
-import type { Range } from "../ground/range.ts";
+import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
 import { VERSION } from "../ground/version.ts";
 import { sourcesOf } from "../loop/sourcesOf.ts";
 import type { PlanetFacts } from "../planet/facts.ts";
@@ -32,6 +32,8 @@ export interface AppraisePlanetOptions {
 }
 
 const WITHIN: Range = [50, 2500];
+/** What `findStates` takes. */
+const [LEAST_EFFORT, MOST_EFFORT] = [10, 1e9];
 const CAUTION =
   "These are screening estimates from a zero-dimensional model, with one temperature for the whole planet: no projection and no safety margin. Where a full climate model has been run, trust that model first; for decisions about Earth, the assessments of the responsible authorities.";
 
@@ -68,6 +70,9 @@ export function appraisePlanet(description: unknown, options: AppraisePlanetOpti
   const reading = { contradictions: "note" } as const;
   const planet = readPlanet(whole.description, reading);
   const { facts, loop } = planet;
+  // also where there is no budget to search
+  checkedRange(within, "within", "K", loop.variables[0]?.within);
+  checkedNumber(effort ?? LEAST_EFFORT, "effort", "1", [LEAST_EFFORT, MOST_EFFORT]);
   const starlight = starlightOf(facts);
   const inputs = planet.inputs.filter(({ path }) => !filled.has(fieldOf(path)));
   const star = hasBudget ? alongStar(planet, reading) : null;

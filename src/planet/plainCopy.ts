@@ -26,8 +26,9 @@ class Copier {
   copy(value: unknown, path: string, depth: number): unknown {
     this.#count(path, typeof value === "string" ? value.length : 0);
     if (depth > DEEPEST) tooLarge(path, "deeper nesting", `at most ${DEEPEST} levels`);
-    if (typeof value === "string" || typeof value === "number" || typeof value === "boolean") return value;
-    if (value === null) return value;
+    // JSON does not keep -0; this makes it 0
+    if (typeof value === "number") return value + 0;
+    if (typeof value === "string" || typeof value === "boolean" || value === null) return value;
     if (typeof value !== "object") return notData(path, value);
     return Array.isArray(value) ? this.#list(value, path, depth) : this.#record(value, path, depth);
   }

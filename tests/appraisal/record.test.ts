@@ -16,6 +16,13 @@ test("survives JSON, and so do its reports", () => {
   for (const write of [toText, toMarkdown, toRows]) expect(write(again)).toEqual(write(appraisal));
 });
 
+test("survives JSON also with -0 in the description, which is 0 there", () => {
+  for (const albedo of [-0, { value: -0, unit: "1", plus: -0 }]) {
+    const of = appraisePlanet(plain({ albedo, internalHeat: "-0 W m-2" }));
+    expect(JSON.parse(JSON.stringify(of))).toEqual(of);
+  }
+});
+
 test("is frozen to its depth", () => {
   const thawed = (value: unknown, path: string): string[] =>
     typeof value === "object" && value !== null
@@ -85,5 +92,8 @@ describe("what is wrong is refused as by readPlanet", () => {
     ["no effort", { effort: Number.NaN }, "not-a-number"],
   ])("%s", (_, options, code) => {
     expect(refusal(() => appraisePlanet(plain(), options as never))).toMatchObject({ code });
+    // and so of a planet without a budget to search
+    const incomplete = without(plain(), "longwave");
+    expect(refusal(() => appraisePlanet(incomplete, options as never))).toMatchObject({ code });
   });
 });

@@ -285,6 +285,27 @@ describe("a sampled law", () => {
     expect(core.slopesOf(measured, { temperature: 100 }).slopes.temperature).toBeCloseTo(2, 8);
   });
 
+  test("has slopes of ten digits where it bends, and is not asked outside of its port's range", () => {
+    const asked: number[] = [];
+    const radiated = core.sampledLaw({
+      name: "radiated",
+      output: { symbol: "F", unit: "W m-2" },
+      inputs: { temperature: { symbol: "T", unit: "K", within: [100, 400] } },
+      compute: ({ temperature }) => {
+        asked.push(temperature);
+        return core.STEFAN_BOLTZMANN * temperature ** 4;
+      },
+    });
+    const slope = (temperature: number) => core.slopesOf(radiated, { temperature }).slopes.temperature ?? NaN;
+    // (h/T)² with h/T = 6.06e-6, and rounding over the step
+    expect(Math.abs(slope(288) / (4 * core.STEFAN_BOLTZMANN * 288 ** 3) - 1)).toBeLessThan(2e-10);
+    // one-sided at the ends: 1.5 h/T
+    for (const end of [100, 400])
+      expect(Math.abs(slope(end) / (4 * core.STEFAN_BOLTZMANN * end ** 3) - 1)).toBeLessThan(1e-5);
+    expect(Math.min(...asked)).toBe(100);
+    expect(Math.max(...asked)).toBe(400);
+  });
+
   test("is refused when it gives NaN, also inside a search", () => {
     expect(refusal(() => measured({ temperature: 395 }))).toMatchObject({
       code: "not-finite",

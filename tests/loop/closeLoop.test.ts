@@ -317,6 +317,26 @@ describe("a loop", () => {
     expect(refusal(() => close((energy, time) => div(time, energy))).code).toBe("unit-mismatch");
   });
 
+  test("names the port of a list that is out of its range in a state", () => {
+    const mixed = closeLoop(({ temperature, couple }) => {
+      const bright = couple("bright", inUnit(core.div(sub(temperature, 200), 40), "1"));
+      const covers = [
+        { fraction: 0.25, albedo: 0.1 },
+        { fraction: 0.25, albedo: bright },
+      ];
+      return {
+        heating: { sunlight: absorbedFlux({ flux: 1361, albedo: core.mixAlbedo({ covers, bare: 0.1 }) }) },
+        cooling: { longwave: greyEmission({ temperature, emissivity: 1 }) },
+        heatCapacity: 1,
+      };
+    });
+    const [only] = findStates(mixed, { within: [150, 400] }).states;
+    const value = ((only?.temperature ?? 0) - 200) / 40;
+    expect(only?.notes).toMatchObject([
+      { code: "outside-range", about: "mixAlbedo.covers[1].albedo", value, range: [0, 1], unit: "1" },
+    ]);
+  });
+
   test("without heating loses what it cools by", () => {
     const falling = closeLoop(({ temperature }) => ({
       heating: {},
@@ -410,5 +430,17 @@ describe("a second reservoir", () => {
     expect(state?.notes).toMatchObject([
       { code: "open-reservoir", severity: "invalid", about: "atmosphere" },
     ]);
+  });
+
+  test("that misses its balance by a part in 10⁹ is said to be open, and how far", () => {
+    const loop = closeLoop(({ temperature }) => ({
+      heating: { sunlight: 240 },
+      cooling: { up: { value: greyEmission({ temperature, emissivity: 1 }), to: "air" } },
+      exchange: { out: { value: 240 * (1 - 1e-9), from: "air", to: "space" } },
+      heatCapacity: 1,
+    }));
+    const [only] = findStates(loop, { within: [100, 500] }).states;
+    expect(only?.notes).toMatchObject([{ code: "open-reservoir", about: "air" }]);
+    expect(only?.notes[0]?.value).toBeCloseTo(2.4e-7, 12);
   });
 });

@@ -1,7 +1,7 @@
 // What holds for any mixture of surfaces.
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import { absorbedFlux, mixAlbedo } from "../../src/index.ts";
+import { absorbedFlux, mixAlbedo, slopesOf } from "../../src/index.ts";
 import { refusal } from "../refusal.ts";
 import { settings } from "./settings.ts";
 
@@ -26,6 +26,16 @@ describe("a mixture of surfaces", () => {
       }),
       settings(300),
     );
+  });
+
+  test("has slopes in its shares where the rest is bare, and none where they must sum to 1", () => {
+    const covers = [0.3, 0.7].map((fraction) => ({ fraction, albedo: 0.6 }));
+    const { slopes } = slopesOf(mixAlbedo, { covers, bare: 0.1 });
+    expect(slopes["covers[0].fraction"]).toBeCloseTo(0.5, 12);
+    expect(Object.keys(slopesOf(mixAlbedo, { covers }).slopes)).toEqual([
+      "covers[0].albedo",
+      "covers[1].albedo",
+    ]);
   });
 
   test("of white parts is white, also where its shares sum to more than 1 by rounding", () => {

@@ -12,6 +12,21 @@ import { enumerateBalance } from "../../src/states/provedSearch.ts";
 const within = WITHIN as [number, number];
 const ROWS = 400;
 
+test("the ends of a declared range belong to it", () => {
+  const loop = core.closeLoop(({ temperature, given }) => ({
+    heating: { sunlight: given("heat", 240, "W m-2", { within: [100, 300] }) },
+    cooling: { longwave: core.greyEmission({ temperature, emissivity: 1 }) },
+    heatCapacity: 1,
+  }));
+  const heat = [100, 300, 100 - 1e-12, 300 + 1e-12];
+  const { counts, reasons } = core.findStatesFor(loop, { heat }, { within });
+  expect([...counts]).toEqual([1, 1, 0, 0]);
+  expect(reasons.map((r) => [r.row, r.code])).toEqual([
+    [2, "out-of-range"],
+    [3, "out-of-range"],
+  ]);
+});
+
 describe.each(["ice", "vapour"] as const)("%s", (name) => {
   const loop = core.closeLoop(budgetsOf(core)[name]);
   const columns = columnsOf(name, ROWS);

@@ -24,6 +24,27 @@ const loop = core.closeLoop(({ temperature, given }) => {
   };
 });
 
+test("at the corner at which two states merge, a given is as far from it as the balance says", () => {
+  const straight = { intercept: 203.3, slope: 2.09, reference: 273.15 };
+  const ramp = { cold: 0.7, warm: 0.3, frozenBelow: 250, openAbove: 280 };
+  const cornered = core.closeLoop(({ temperature, given }) => {
+    const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+    const albedo = core.rampAlbedo({ temperature, ...ramp });
+    return {
+      heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+      cooling: { longwave: core.linearEmission({ temperature, ...straight }) },
+      heatCapacity: 0,
+    };
+  });
+  // S (1 − 0.7)/4 = 203.3 + 2.09 (250 − 273.15)
+  const corner = (203.3 + 2.09 * (250 - 273.15)) / 0.075;
+  const found = core.findStates(cornered, { within: [150, 260], at: { flux: corner } });
+  const doubt = found.undecided.find(({ kind }) => kind === "corner");
+  const [low, high] = doubt?.distances?.flux ?? [NaN, NaN];
+  // flows of 155 W m⁻² are rounded by 1e-13, and the flux enters with 0.075
+  expect(low <= 0 && high >= 0 && high - low < 1e-10).toBe(true);
+});
+
 /** So close to a fold, W m⁻², that rounding hides whether there are two states or none. */
 const STEP = 4.6e-13;
 

@@ -113,6 +113,19 @@ describe("the proved search", () => {
     expect(corner.undecided).toMatchObject([{ kind: "corner" }]);
   });
 
+  test("where the balance has no value, its bounds are not told", () => {
+    const { undecided } = findStates(
+      loopOf((t) => core.log(sub(t, 200))),
+      { within: [150, 400] },
+    );
+    expect(undecided.map((u) => [u.kind, u.enclosure, u.distances])).toContainEqual([
+      "undefined",
+      null,
+      null,
+    ]);
+    expect(undecided.every((u) => u.enclosure === null || u.enclosure.every(Number.isFinite))).toBe(true);
+  });
+
   test("an exhausted effort is said, with the stretch that was not searched", () => {
     const found = findStates(iceLoop(), { within: [2.7, 2000], effort: 10 });
     expect(found).toMatchObject({ proof: "partial", complete: false });

@@ -122,6 +122,20 @@ describe("the sampled search", () => {
     expect(found.undecided).toMatchObject([{ kind: "jump" }]);
   });
 
+  test("does not take the rounding of flows for states", () => {
+    const loop = core.closeLoop(({ temperature }) => ({
+      heating: {
+        a: core.inUnit(mul(mul(temperature, 0.7), 1.3), "W m-2"),
+        nothing: nothing({ temperature }),
+      },
+      cooling: { b: core.inUnit(mul(temperature, 0.7 * 1.3), "W m-2") },
+      heatCapacity: 1,
+    }));
+    const found = findStates(loop, { within: [150, 400] });
+    expect(found.states).toEqual([]);
+    expect(found.undecided).toMatchObject([{ kind: "flat", interval: [150, 400] }]);
+  });
+
   test("adds up what temperature does through every port of a law", () => {
     const both = core.sampledLaw({
       name: "both",

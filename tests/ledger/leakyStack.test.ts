@@ -313,6 +313,12 @@ describe("a stack refuses", () => {
       "leakyStackLedger.layers[1] (sunlight + convection; with emissivity 0 no steady state)",
     ],
     [
+      "a layer that gives heat away and that cannot emit",
+      () => leakyStackLedger({ layers: [{ emissivity: 1 }, { emissivity: 0, convection: -1e-9 }], surface }),
+      "out-of-range",
+      "leakyStackLedger.layers[1] (sunlight + convection; with emissivity 0 no steady state)",
+    ],
+    [
       "a layer that gives away more than it gets",
       () => leakyStackLedger({ layers: [{ emissivity: 0.5, convection: -400 }], surface }),
       "out-of-range",
@@ -373,6 +379,35 @@ describe("a stack refuses", () => {
     expect(ledger.surface.temperature).toBe(
       leakyStackLedger({ layers: layers.slice(0, 1), surface }).surface.temperature,
     );
+  });
+});
+
+test("air that brings heat down is a flow too, and closes", () => {
+  const ledger = leakyStackLedger({
+    layers: [
+      { emissivity: 0.8, sunlight: 60 },
+      { emissivity: 0.7, convection: -15 },
+    ],
+    surface: { sunlight: 160 },
+  });
+  expect(ledger.flows.filter((f) => f.name.startsWith("convection"))).toMatchObject([
+    { name: "convection to layer 2", from: "surface", to: "layer 2", value: -15 },
+  ]);
+  for (const share of leftOver(ledger)) expect(share).toBeLessThanOrEqual(1e-12);
+});
+
+test("the flows at the top and at the surface carry the standard names of the CF conventions, and no others", () => {
+  const { flows } = leakyStackLedger({
+    layers: [{ emissivity: 0.8 }, { emissivity: 0.7 }],
+    surface: { sunlight: 160 },
+  });
+  // from memory of the CF standard name table
+  const named = flows.flatMap((f) => (f.standardName === null ? [] : [[f.name, f.standardName]]));
+  expect(Object.fromEntries(named)).toEqual({
+    "sunlight to surface": "surface_net_downward_shortwave_flux",
+    "longwave up at 0": "toa_outgoing_longwave_flux",
+    "longwave up at 2": "surface_upwelling_longwave_flux_in_air",
+    "longwave down at 2": "surface_downwelling_longwave_flux_in_air",
   });
 });
 

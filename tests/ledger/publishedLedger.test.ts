@@ -129,6 +129,18 @@ describe("a residual beyond its error", () => {
     expect(sided(-2).notes).toEqual([]);
   });
 
+  test("is not spoken of where neither errors nor last digits are stated, and no top where nothing meets space", () => {
+    const ledger = publishedLedger({
+      source: "invented",
+      flows: { rain: { from: "air", to: "sea", value: 80 }, vapour: { from: "sea", to: "air", value: 70 } },
+    });
+    expect(ledger.balances.map((b) => [b.place, b.residual])).toEqual([
+      ["air", -10],
+      ["sea", 10],
+    ]);
+    expect(ledger.notes.map((note) => note.code)).toEqual(["error-not-stated", "error-not-stated"]);
+  });
+
   test("is let through where rounding alone can make it", () => {
     const rounded = { value: 234, error: 4, lastDigit: 12 };
     expect(small(rounded).notes).toEqual([]);

@@ -53,3 +53,16 @@ test.each<[string, Record<string, number[]>]>([
     expect(published[port]?.[1]).toBeCloseTo(high as number, 15);
   }
 });
+
+test("covers reflect within what the textbook's table prints for them", () => {
+  // Marshall & Plumb 2008, Table 2.2, in percent, from memory
+  const percent: Readonly<Record<string, readonly [number, number]>> = {
+    ...{ ocean: [2, 10], forest: [6, 18], city: [14, 18], grass: [7, 25], soil: [10, 20] },
+    ...{ desert: [35, 45], oldSnow: [40, 60], freshSnow: [75, 95] },
+  };
+  for (const [name, [low, high]] of Object.entries(percent)) {
+    const { albedo, range } = door.COVER_ALBEDOS[name as "ocean"];
+    expect(range, name).toEqual([low / 100, high / 100]);
+    expect(albedo, name).toBeCloseTo((low + high) / 200, 12);
+  }
+});

@@ -8,9 +8,26 @@ import { atOnce, endsOf } from "../../src/search/enclosed.ts";
 import { enumerateZeros } from "../../src/search/enumerateZeros.ts";
 import { enclosedBalance } from "../../src/states/enclosedBalance.ts";
 import { enumerateBalance } from "../../src/states/provedSearch.ts";
+import { StateCollector } from "../../src/states/stateColumns.ts";
 
 const within = WITHIN as [number, number];
 const ROWS = 400;
+
+test("a row may have more states than are made room for at once", () => {
+  const collector = new StateCollector(2);
+  const found = Array.from({ length: 100 }, (_, i) => ({
+    at: 200 + i,
+    slope: 0.5 - (i % 2),
+    slopeSign: 1 - 2 * (i % 2),
+  }));
+  collector.add(0, "proved", found, 100);
+  collector.add(1, "proved", found, 1);
+  const { temperatures, feedbackParameters, stability, first } = collector.columns();
+  expect([...first]).toEqual([0, 100, 101]);
+  expect([...temperatures]).toEqual([...found.map((f) => f.at), 200]);
+  expect([...feedbackParameters]).toEqual([...found.map((f) => f.slope), 0.5]);
+  expect([...stability]).toEqual([...found.map((f) => f.slopeSign), 1]);
+});
 
 test("the ends of a declared range belong to it", () => {
   const loop = core.closeLoop(({ temperature, given }) => ({

@@ -16,7 +16,8 @@ export const showRange = (range: Range): string => range.join(" to ");
 export function checkedNumber(value: unknown, path: string, unit: string, within?: Range): number {
   const finite = Number.isFinite(value);
   const [low, high] = within ?? ANY;
-  if (finite && (value as number) >= low && (value as number) <= high) return value as number;
+  // -0 becomes 0: it means nothing in an answer, and JSON does not keep it
+  if (finite && low <= (value as number) && (value as number) <= high) return (value as number) + 0;
   const code = finite ? "out-of-range" : value === undefined ? "missing" : "not-a-number";
   return fail(code, { path, value, allowed: within ? showRange(within) : "a finite number", unit });
 }

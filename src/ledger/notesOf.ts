@@ -11,7 +11,7 @@ export function notesOf(balance: PublishedBalance, rounding: number, source: str
   const left = balance.unexplained ?? balance.residual;
   const [below, above] = unexplainedError ?? error ?? [0, 0];
   // what is left is too much if it lies above 0 by more than its error below, and too little the other way
-  const range = [-Math.max(above, rounding), Math.max(below, rounding)] as const;
+  const range = [0 - Math.max(above, rounding), Math.max(below, rounding)] as const;
   const isBounded = (unexplainedError ?? error) !== null || rounding > 0;
   if (isBounded && !(left >= range[0] && left <= range[1])) {
     const text =

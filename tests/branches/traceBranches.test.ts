@@ -291,6 +291,14 @@ describe("what is not decided is said", () => {
   });
 });
 
+test("a range from -0 begins at 0, which JSON keeps", () => {
+  const { between } = traceBranches(iceLoop(), { along: "flux", between: [-0, 900], within: WITHIN });
+  expect(between).toEqual([0, 900]);
+  const found = core.findStates(iceLoop(), { within: [-0, 400], at: { flux: -0 } });
+  expect(found.within).toEqual([0, 400]);
+  for (const { givens } of found.states) expect(givens.flux).toBe(0);
+});
+
 test("no fold costs a bisection: a step that rounding swallows still passes it", () => {
   const readings = Array.from({ length: 60 }, (_, i) => {
     const emissivity = 0.55 + i / 600;

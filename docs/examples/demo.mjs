@@ -42,5 +42,7 @@ try {
   const expected =
     error instanceof ThermosteadError || error.code === "ENOENT" || error instanceof SyntaxError;
   console.error(expected || error.message.startsWith("unknown option") ? error.message : error);
+  // the message only names the fields of the other mistakes
+  for (const { message } of error.others ?? []) console.error(message);
   process.exitCode = 1;
 }

@@ -118,3 +118,14 @@ test.each([
   });
   expect(stderr).toMatch(message);
 });
+
+test("several faults of a description are a line each", () => {
+  const { stderr, status } = runOn(JSON.stringify(simple({ albedo: 1.2, redistribution: 7 })));
+  expect(status).toBe(1);
+  expect(
+    stderr
+      .trim()
+      .split("\n")
+      .map((line) => line.split(":")[0]),
+  ).toEqual(["redistribution", "albedo"]);
+});

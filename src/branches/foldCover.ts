@@ -6,10 +6,11 @@ import { boxAt, type FoldBox, type FoldPlace, inside } from "./foldBox.ts";
 import type { FoldCap } from "./foldCap.ts";
 import type { FoldChain } from "./foldChain.ts";
 import type { Space } from "./foldChains.ts";
-import { closer, type Equations, type FoldSystem, middles } from "./foldSystem.ts";
+import { closer, type FoldSystem, middles } from "./foldSystem.ts";
 import { commonOf, isPart, type Plane } from "./foldTube.ts";
 import { rangeOf } from "./mergeChains.ts";
 import { pointAt } from "./planeReader.ts";
+import type { Equations } from "./planeSlopes.ts";
 import { middleOf } from "./stretch.ts";
 import type { OpenBox } from "./undecidedFolds.ts";
 

@@ -1,24 +1,13 @@
 // The two equations of a fold, N = 0 and ∂N/∂T = 0, in temperature T and two givens p and q.
-import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
-import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
 import { meet, minus, over, plus, times } from "../search/interval.ts";
 import { boxAt, type FoldBox, type FoldPlace } from "./foldBox.ts";
 import { type Pair, type PairSystem, solvedPair } from "./pairSystem.ts";
-import { type PlaneReader, planeReader } from "./planeReader.ts";
+import type { PlaneReader } from "./planeReader.ts";
+import { EQUATIONS, type Equations, equationsOver, planeSlopes } from "./planeSlopes.ts";
 import { middleOf } from "./stretch.ts";
 
-/** Bounds over a box. */
-export interface Equations {
-  readonly n: Range;
-  readonly nt: Range;
-  readonly np: Range;
-  readonly nq: Range;
-  readonly ntt: Range;
-  readonly ntp: Range;
-  readonly ntq: Range;
-}
 /** Bounds of further derivatives over a box. */
 export interface Further {
   readonly npp: Range;
@@ -38,43 +27,15 @@ export interface FoldSystem extends PairSystem {
   signs(place: FoldPlace): { readonly np: number; readonly ntt: number };
 }
 
-const EQUATIONS = ["n", "nt", "np", "nq", "ntt", "ntp", "ntq"] as const;
-const FURTHER = ["npp", "nttt", "nttp", "ntpp", "nttq", "npq"] as const;
+const FURTHER = ["pp", "ttt", "ttp", "tpp", "ttq", "pq"] as const;
 
 /** The equations of a loop; `places` are those of both givens among its givens, as text with a space between. */
 export const foldSystem = /* @__PURE__ */ kept((loop, places): FoldSystem => {
-  const { graph, net } = loop;
-  const inputs = inputsOf(loop);
-  const [first, second] = places.split(" ").map(Number) as [number, number];
-  const inputOf = {
-    t: inputs[0] as number,
-    p: inputs[first + loop.variables.length] as number,
-    q: inputs[second + loop.variables.length] as number,
-  };
-  /** The reader of the derivatives with these names: `ntp` is ∂²N/∂T∂p. */
-  const readerOf = (names: readonly string[]): PlaneReader => {
-    const nodes = names.map((name) =>
-      [...name.slice(1)].reduce((node, x) => derivative(graph, node, inputOf[x as "t"], inputs), net),
-    );
-    return planeReader(loop, [first, second], nodes);
-  };
-  const reader = readerOf(EQUATIONS);
+  const readerOf = planeSlopes(loop, places);
+  const reader = readerOf(loop.net, EQUATIONS);
   let more: PlaneReader | undefined;
   let set: readonly number[] = [];
-  const named = (names: readonly string[], bounds: readonly Range[]): unknown =>
-    Object.fromEntries(names.map((name, i) => [name, bounds[i]]));
-  const read = ({ t, p, q }: FoldBox): Equations => {
-    const [n, nt, np, nq, ntt, ntp, ntq] = reader.over(t, p, q) as [
-      Range,
-      Range,
-      Range,
-      Range,
-      Range,
-      Range,
-      Range,
-    ];
-    return { n, nt, np, nq, ntt, ntp, ntq };
-  };
+  const read = (box: FoldBox): Equations => equationsOver(reader, box);
   const pair = (box: FoldBox): Pair => {
     const { n, nt, np, nq, ntt, ntp, ntq } = read(box);
     return { f: n, ft: nt, fp: np, fq: nq, g: nt, gt: ntt, gp: ntp, gq: ntq };
@@ -88,10 +49,11 @@ export const foldSystem = /* @__PURE__ */ kept((loop, places): FoldSystem => {
     read,
     further({ t, p, q }: FoldBox): Further {
       if (!more) {
-        more = readerOf(FURTHER);
+        more = readerOf(loop.net, FURTHER);
         more.set(set);
       }
-      return named(FURTHER, more.over(t, p, q)) as Further;
+      const bounds = more.over(t, p, q);
+      return Object.fromEntries(FURTHER.map((slope, i) => [`n${slope}`, bounds[i]])) as unknown as Further;
     },
     signs(place) {
       const { np, ntt } = middles(read(boxAt(place)));

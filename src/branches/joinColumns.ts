@@ -5,7 +5,7 @@ import type { Sign } from "../search/enclosed.ts";
 import type { Branch, BranchCrossing, BranchEnd, BranchPoint, Fold } from "./diagram.ts";
 import { foldAt } from "./foldAt.ts";
 import type { GoesOn } from "./goesOn.ts";
-import { matchStates } from "./matchStates.ts";
+import { matchOrdered } from "./matchOrdered.ts";
 
 /** The states at one parameter, by rising temperature. */
 export interface Column {
@@ -75,7 +75,9 @@ export function joinColumns(
   function passed(left: readonly Growing[], from: Column, to: Column): Growing[] {
     const parameters: Range = [from.at, to.at];
     const temperaturesOf = ({ states }: Column) => states.map((s) => s.temperature);
-    const { kept, lost, born } = matchStates(temperaturesOf(from), temperaturesOf(to));
+    const { kept, lost, born } = matchOrdered(temperaturesOf(from), temperaturesOf(to), (a, b) =>
+      Math.abs(a - b),
+    );
     const others = kept.length;
     const met = lost.length + born.length === 0 ? metIn(parameters) : undefined;
     const meets = (i: number) => met !== undefined && (i === met.index || i === met.index + 1);

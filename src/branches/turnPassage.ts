@@ -6,7 +6,7 @@ import { exitFinder } from "./exitFinder.ts";
 import { foldFinder } from "./foldFinder.ts";
 import { kinkExit } from "./kinkExit.ts";
 import { kinkMeeting } from "./kinkMeeting.ts";
-import type { Matched } from "./matchTurns.ts";
+import type { MatchedTurns } from "./matchTurns.ts";
 import type { Rest } from "./stretch.ts";
 import type { Turn, TurnReader } from "./turns.ts";
 import { kindsOf } from "./turnTiles.ts";
@@ -16,7 +16,7 @@ export interface TurnStretch {
   readonly parameters: Range;
   readonly before: readonly Turn[];
   readonly after: readonly Turn[];
-  readonly matched: Matched;
+  readonly matched: MatchedTurns;
 }
 
 /** The one place in a stretch at which turns end or begin; undefined where it is not proved that nothing else happens. */

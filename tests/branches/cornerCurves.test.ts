@@ -5,25 +5,10 @@ import { traceBranches } from "../../src/branches/traceBranches.ts";
 import { traceFolds } from "../../src/branches/traceFolds.ts";
 import * as core from "../../src/index.ts";
 import { add, div, max, min, mul, STEFAN_BOLTZMANN, square, sub } from "../../src/index.ts";
-import { twoGivens } from "./loops.ts";
+import { icyLoop, twoGivens } from "./loops.ts";
 
 const WITHIN = [150, 400] as const;
 const AROUND = [290, 310] as const;
-
-/** A planet whose albedo falls from 0.7 at 250 K to 0.3, along a straight line or a parabola. */
-const icyLoop = (law: typeof core.rampAlbedo) =>
-  core.closeLoop(({ temperature, given }) => {
-    const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
-    const emissivity = given("emissivity", 0.6, "1", { within: [0.01, 1] });
-    const openAbove = given("openAbove", 285, "K", { within: [251, 420] });
-    const cold = given("cold", 0.7, "1", { within: [0, 1] });
-    const albedo = law({ temperature, cold, warm: 0.3, frozenBelow: 250, openAbove });
-    return {
-      heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
-      cooling: { longwave: core.greyEmission({ temperature, emissivity }) },
-      heatCapacity: 4.2e8,
-    };
-  });
 
 /** What the curves say at a value of the second given that is one of their points, by rising temperature. */
 const foldsAt = ({ curves }: FoldDiagram, and: number) =>

@@ -4,7 +4,7 @@ import { traceBranches } from "../../src/branches/traceBranches.ts";
 import { traceFolds } from "../../src/branches/traceFolds.ts";
 import * as core from "../../src/index.ts";
 import { add, max, mul, square, sub } from "../../src/index.ts";
-import { twoGivens } from "./loops.ts";
+import { icyLoop, twoGivens } from "./loops.ts";
 
 const x = (t: core.Quantity) => sub(t, 300);
 
@@ -25,19 +25,6 @@ test("the bottom of a valley at a kink that moves", () => {
 });
 
 describe("an icy planet has the curves that it has where the flux takes any value", () => {
-  const icyLoop = (law: typeof core.rampAlbedo) =>
-    core.closeLoop(({ temperature, given }) => {
-      const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
-      const emissivity = given("emissivity", 0.6, "1", { within: [0.01, 1] });
-      const openAbove = given("openAbove", 285, "K", { within: [251, 420] });
-      const cold = given("cold", 0.7, "1", { within: [0, 1] });
-      const albedo = law({ temperature, cold, warm: 0.3, frozenBelow: 250, openAbove });
-      return {
-        heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
-        cooling: { longwave: core.greyEmission({ temperature, emissivity }) },
-        heatCapacity: 4.2e8,
-      };
-    });
   const loops = [icyLoop(core.rampAlbedo), icyLoop(core.quadraticAlbedo)] as const;
 
   test.each([

@@ -87,3 +87,18 @@ export const sampledLoop = () => {
 /** One of the states of a loop between 150 and 400 K, by rising temperature. */
 export const stateOf = <N extends string>(loop: core.Loop<N>, index: number): core.State<N> =>
   core.findStates(loop, { within: [150, 400] }).states[index] as core.State<N>;
+
+/** A planet whose albedo falls from 0.7 at 250 K to 0.3, along a straight line or a parabola. */
+export const icyLoop = (law: typeof core.rampAlbedo) =>
+  core.closeLoop(({ temperature, given }) => {
+    const flux = given("flux", 1361, "W m-2", { within: [0, 1e5] });
+    const emissivity = given("emissivity", 0.6, "1", { within: [0.01, 1] });
+    const openAbove = given("openAbove", 285, "K", { within: [251, 420] });
+    const cold = given("cold", 0.7, "1", { within: [0, 1] });
+    const albedo = law({ temperature, cold, warm: 0.3, frozenBelow: 250, openAbove });
+    return {
+      heating: { sunlight: core.absorbedFlux({ flux, albedo }) },
+      cooling: { longwave: core.greyEmission({ temperature, emissivity }) },
+      heatCapacity: 4.2e8,
+    };
+  });

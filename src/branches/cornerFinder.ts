@@ -1,16 +1,16 @@
 // Proves that two states meet at a kink in a narrow stretch of parameters, and brackets the place.
-import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
-import { replaceNodes } from "../graph/replaceNodes.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import { enumerateZeros } from "../search/enumerateZeros.ts";
 import { minus, over, plus, signOfRange, times } from "../search/interval.ts";
 import type { EnclosedBalance } from "../states/enclosedBalance.ts";
+import { kinkNodes } from "../states/kinkNodes.ts";
 import type { BranchEnd } from "./diagram.ts";
 import { type PlaneReader, planeReader, pointAt } from "./planeReader.ts";
 import { endOf, LINE_EFFORT, middleOf, nearestProved, REACH, type Rest, type Stretch } from "./stretch.ts";
+import { withoutKinks } from "./withoutKinks.ts";
 
 const MOST_HALVINGS = 60;
 const MOST_STEPS = 20;
@@ -22,7 +22,7 @@ const MOST_STEPS = 20;
  * extremum passes zero once. `wide` is a balance for intervals of the parameter.
  */
 export function cornerFinder(loop: Loop, place: number, wide: EnclosedBalance) {
-  const kinks = kinksOf(loop, place);
+  const kinks = kinkReaders(loop, place);
   /** The only kink in a range of temperature, for all parameters of another. */
   const kinkIn = (range: Range, parameters: Range, givens: readonly number[]) => {
     const [less, more] = parameters.map((q) => givens.map((v, i) => (i === place ? q : v)));
@@ -81,24 +81,13 @@ interface KinkReader {
 }
 
 /** A reader for each kink of a balance, in the order of `EnclosedBalance.kinks`. */
-function kinksOf(loop: Loop, place: number): KinkReader[] {
-  const { graph, net } = loop;
+function kinkReaders(loop: Loop, place: number): KinkReader[] {
+  const { graph } = loop;
   const inputs = inputsOf(loop);
   const [t, p] = [inputs[0] as number, inputs[loop.variables.length + place] as number];
-  const pairs = coneOf(graph, [net], inputs).filter(
-    (id) => graph.ops[id] === "min" || graph.ops[id] === "max",
-  );
-  const differences = pairs.map((id) => graph.node("sub", graph.args[id] as readonly number[]));
-  return [...new Set(differences)].map((difference) => {
-    const nodes = pairs.filter((_, i) => differences[i] === difference);
-    const sideOf = (less: boolean) => {
-      const chosen = nodes.map((id): [number, number] => {
-        const [a, b] = graph.args[id] as readonly [number, number];
-        return [id, (graph.ops[id] === "min") === less ? a : b];
-      });
-      return replaceNodes(graph, net, new Map(chosen));
-    };
-    const outputs = [difference, sideOf(true), sideOf(false)].flatMap((node) => [
+  return kinkNodes(loop).map((kink) => {
+    const sides = [true, false].map((less) => withoutKinks(loop, [{ kink, less }]));
+    const outputs = [kink.node, ...sides].flatMap((node) => [
       node,
       ...[t, p].map((x) => derivative(graph, node, x, inputs)),
     ]);

@@ -3,10 +3,10 @@ import type { Range } from "../ground/range.ts";
 import { kept } from "../loop/kept.ts";
 import { signOfRange } from "../search/interval.ts";
 import type { FoldBox } from "./foldBox.ts";
-import { kinksOf, withoutKinks } from "./kinkNodes.ts";
 import { type Pair, type PairSystem, solvedPair, speedsOf } from "./pairSystem.ts";
 import type { PlaneReader } from "./planeReader.ts";
 import { EQUATIONS, type Equations, equationsOver, planeSlopes } from "./planeSlopes.ts";
+import { placedKinks, withoutKinks } from "./withoutKinks.ts";
 
 /** One kink. */
 export interface CornerSystem extends PairSystem {
@@ -22,7 +22,7 @@ export interface CornerSystem extends PairSystem {
 /** The systems of a loop's kinks; `places` are those of both givens among its givens, as text with a space between. */
 export const cornerSystems = /* @__PURE__ */ kept((loop, places): readonly CornerSystem[] => {
   const readerOf = planeSlopes(loop, places);
-  return kinksOf(loop).map((kink): CornerSystem => {
+  return placedKinks(loop).map((kink): CornerSystem => {
     const [less, more] = [true, false].map((less) =>
       readerOf(withoutKinks(loop, [{ kink, less }]), EQUATIONS),
     ) as [PlaneReader, PlaneReader];

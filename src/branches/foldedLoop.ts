@@ -4,7 +4,7 @@ import { inputsOf } from "../loop/inputs.ts";
 import { kept } from "../loop/kept.ts";
 import type { Loop } from "../loop/types.ts";
 import { valueKernel } from "../reading/valueKernel.ts";
-import { gateNodes } from "./gateCurve.ts";
+import { straightNodes } from "./gateCurve.ts";
 
 /** The folds of a loop as the states of another. */
 export interface FoldedLoop {
@@ -19,10 +19,9 @@ export interface FoldedLoop {
 
 /** Undefined where the budget is no straight line in the given. */
 export const foldedLoop = /* @__PURE__ */ kept((loop, along): FoldedLoop | undefined => {
-  const nodes = gateNodes(loop, along);
+  const nodes = straightNodes(loop, along);
   const inputs = inputsOf(loop);
-  const given = loop.givens.find((g) => g.name === along);
-  if (!nodes || nodes.gate !== given?.node) return undefined;
+  if (!nodes) return undefined;
   const { curve, answer, feedback } = nodes;
   const kernel = valueKernel(loop.graph, { inputs, outputs: [curve, answer] });
   const out = new Float64Array(2);

@@ -3,12 +3,13 @@ import { branchLoss, placesOn } from "../feedback/branchLoss.ts";
 import type { BranchLoss } from "../feedback/heldComparison.ts";
 import { fail } from "../ground/errors.ts";
 import { checkKeys, failUnknown } from "../ground/names.ts";
-import { checkedNumber, checkedRange, type Range } from "../ground/range.ts";
+import { checkedNumber, type Range } from "../ground/range.ts";
 import { checkBelongs, type StateLike } from "../loop/checkBelongs.ts";
 import type { Givens, Loop } from "../loop/types.ts";
 import { followPath, type PathOutcome } from "../states/followPath.ts";
 import { pathBalanceOf } from "../states/pathBalance.ts";
 import { checkOneVariable, readerOf } from "../states/prepared.ts";
+import { rangeWith } from "../states/rangeWith.ts";
 import type { State } from "../states/state.ts";
 import { quickStepOf } from "./quickStep.ts";
 
@@ -29,8 +30,6 @@ export interface FollowedState<N extends string = string> {
   /** `proved`: it is the same branch all the way, or it is proved to end. */
   readonly proof: "proved" | "partial" | "sampled";
 }
-
-const WITHIN: Range = [2.7, 2000];
 
 /**
  * The state of the same branch after a slow change of givens along the straight path from the state's own to the new ones,
@@ -118,12 +117,4 @@ function changedGivens(loop: Loop, before: readonly number[], to: Readonly<Recor
     changed.push(index);
   }
   return { after, changed: changed.sort((a, b) => a - b) };
-}
-
-function rangeWith(range: Range | undefined, loop: Loop, temperature: number): Range {
-  if (range === undefined) return [Math.min(WITHIN[0], temperature), Math.max(WITHIN[1], temperature)];
-  const [low, high] = checkedRange(range, "within", "K", loop.variables[0]?.within);
-  if (low <= temperature && temperature <= high) return [low, high];
-  const allowed = "a range with the state in it";
-  return fail("out-of-range", { path: "within", value: temperature, allowed, unit: "K" });
 }

@@ -13,13 +13,12 @@ import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import { gateLine } from "./gateLine.ts";
 import { gateValue, placeOf, sameValue } from "./gateValue.ts";
+import { signOnParts } from "./signOnParts.ts";
 import { zeroReader } from "./zeroReader.ts";
 
 /** Stretches wider than this, K, are bounded in parts. */
 const WIDE = 1e-3;
 const PARTS = 256;
-/** A range of temperature is halved so often until b has a proved sign on each part. */
-const MOST_HALVINGS = 6;
 
 /** The nodes of a gate's curve. */
 export interface GateNodes {
@@ -43,6 +42,12 @@ export function gateNodes(loop: Loop, along: string): GateNodes | undefined {
   const curve = graph.node("div", [new Writer(graph).neg(gate.offset), gate.slope]);
   const feedback = feedbackOn(loop, gate, curve);
   return { gate: gate.node, curve, feedback, answer: gate.slope };
+}
+
+/** The same where the gate is the given itself: the budget is a straight line in it. */
+export function straightNodes(loop: Loop, along: string): GateNodes | undefined {
+  const nodes = gateNodes(loop, along);
+  return nodes?.gate === inputsOf(loop)[placeOf(loop, along)] ? nodes : undefined;
 }
 
 function feedbackOn(loop: Loop, { offset, slope }: Gate, curve: number): number {
@@ -141,23 +146,19 @@ function answerOf(loop: Loop, node: number) {
   const kernel = enclosureKernel(loop.graph, { inputs, outputs: [node], wide, ranges: rangesOf(loop) });
   const [low, high] = [new Float64Array(inputs.length), new Float64Array(inputs.length)];
   const out = new Float64Array(3);
-  const signOver = (from: number, to: number, halvings: number): Sign => {
+  const signOver = ([from, to]: Range): Sign => {
     low[0] = from;
     high[0] = to;
     kernel(low, high, out);
-    const sign = signOf(out[0] as number, out[1] as number, out[2] as number);
-    if (sign !== 0 || halvings === 0) return sign;
-    const middle = from + (to - from) / 2;
-    const below = signOver(from, middle, halvings - 1);
-    return below !== 0 && below === signOver(middle, to, halvings - 1) ? below : 0;
+    return signOf(out[0] as number, out[1] as number, out[2] as number);
   };
   return {
-    signAt: (temperature: number) => signOver(temperature, temperature, 0),
+    signAt: (temperature: number) => signOver([temperature, temperature]),
     /** Sets the givens; the sign over all temperatures of a range, 0 where it is not proved to be one. */
-    set(givens: readonly number[], [from, to]: Range): Sign {
+    set(givens: readonly number[], within: Range): Sign {
       low.set(givens, 1);
       high.set(givens, 1);
-      return signOver(from, to, MOST_HALVINGS);
+      return signOnParts(within, signOver);
     },
   };
 }

@@ -1,5 +1,4 @@
 // The curve of a loop whose budget only rises or only falls with the parameter: N(T, p(T)) = 0, solved box by box.
-import { coneOf } from "../graph/cone.ts";
 import { derivative } from "../graph/derivative.ts";
 import type { Range } from "../ground/range.ts";
 import { inputsOf, rangesOf } from "../loop/inputs.ts";
@@ -10,6 +9,7 @@ import { type Ends, endsOf, type Sign } from "../search/enclosed.ts";
 import { meet, minus, over, plus, rangeAt, signOfRange, times } from "../search/interval.ts";
 import { roundoffAt } from "../search/roundoff.ts";
 import { enclosedNodes } from "../states/enclosedNodes.ts";
+import { leapNodes } from "../states/kinkNodes.ts";
 import { criticalsOf, signAt } from "./criticals.ts";
 import type { Curve } from "./curve.ts";
 import { placeOf } from "./gateValue.ts";
@@ -36,7 +36,7 @@ export function impliedCurve(loop: Loop, along: string): Curve {
   const kernel = enclosureKernel(graph, { inputs, outputs, wide, ranges });
   const value = valueKernel(graph, { inputs, outputs: [net, answer, first] });
   const nodes = enclosedNodes(loop, new Set([parameter]));
-  const leaps = stepsOf(loop).map(nodes.of);
+  const leaps = leapNodes(loop).map(nodes.of);
   const [low, high] = [new Float64Array(inputs.length), new Float64Array(inputs.length)];
   const out = new Float64Array(3 * outputs.length);
   const read = new Float64Array(3);
@@ -157,10 +157,4 @@ export function impliedCurve(loop: Loop, along: string): Curve {
     },
     over: (a, b) => bounds([a, b]),
   };
-}
-
-/** The nodes that are zero at the steps of a budget. */
-function stepsOf({ graph, net }: Loop): number[] {
-  const steps = coneOf(graph, [net]).filter((id) => graph.ops[id] === "step");
-  return [...new Set(steps.map((id) => graph.args[id]?.[0] as number))];
 }

@@ -1,4 +1,4 @@
-// Through which direction λ leaps through zero at kinks that lie too close to each other to be told apart.
+// In which direction λ leaps through zero at kinks that lie too close to each other to be told apart.
 import type { Range } from "../ground/range.ts";
 import type { Sign } from "../search/enclosed.ts";
 import { signOfRange } from "../search/interval.ts";
@@ -34,7 +34,7 @@ export function together(places: readonly KinkPlace[]): Together[] {
 }
 
 /**
- * Through which direction λ leaps through zero where some kinks lie together; 0: it keeps its sign; undefined: not proved. Whichever
+ * In which direction λ leaps through zero where some kinks lie together; 0: it keeps its sign; undefined: not proved. Whichever
  * of them comes first, λ goes from that left of all to that right of all, through those between some. Each of these is read
  * all over the bracket, and has one sign there; so λ leaps once if none goes back.
  */

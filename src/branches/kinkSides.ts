@@ -5,9 +5,10 @@ import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
 import type { Ends } from "../search/enclosed.ts";
 import { enclosedNodes } from "../states/enclosedNodes.ts";
-import { gateNodes } from "./gateCurve.ts";
-import { type Kink, kinksOf, withoutKinks } from "./kinkNodes.ts";
+import type { Kink } from "../states/kinkNodes.ts";
+import { straightNodes } from "./gateCurve.ts";
 import { type PlaneReader, planeReader } from "./planeReader.ts";
+import { placedKinks, withoutKinks } from "./withoutKinks.ts";
 
 /** A function of temperature and of the second given over a box: bounds of its value and of its slopes in both. */
 export interface Arm {
@@ -39,7 +40,7 @@ export function kinkSides(loop: Loop, along: string, place: number): KinkSides {
   const { graph } = loop;
   const inputs = inputsOf(loop);
   const [t, q] = [inputs[0] as number, inputs[loop.variables.length + place] as number];
-  const kinks = kinksOf(loop);
+  const kinks = placedKinks(loop);
   const nodes = enclosedNodes(loop, new Set([q]));
   const readers: PlaneReader[] = [];
   const made = new Map<string, ArmOver | undefined>();
@@ -62,10 +63,8 @@ export function kinkSides(loop: Loop, along: string, place: number): KinkSides {
       loop,
       sides.map(({ kink, less }) => ({ kink: kinks[kink] as Kink, less })),
     );
-    const curve = gateNodes({ ...loop, net: without }, along);
-    return curve?.gate === loop.givens.find((g) => g.name === along)?.node
-      ? armOf(curve?.feedback as number)
-      : undefined;
+    const nodes = straightNodes({ ...loop, net: without }, along);
+    return nodes && armOf(nodes.feedback);
   };
   return {
     kinks: kinks.map(({ node }) => ({ node, ends: nodes.of(node), over: armOf(node) })),

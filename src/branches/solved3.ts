@@ -1,4 +1,4 @@
-// Three linear equations.
+// Solves three linear equations, without proof.
 
 /** Three numbers. */
 export type Three = readonly [number, number, number];

@@ -5,6 +5,7 @@ import type { Range } from "../ground/range.ts";
 import { checkBelongs, type StateLike } from "../loop/checkBelongs.ts";
 import type { Loop } from "../loop/types.ts";
 import { checkOneVariable } from "../states/prepared.ts";
+import { USUAL_WITHIN } from "../states/rangeWith.ts";
 import type { State } from "../states/state.ts";
 import { basinOf } from "./basinOf.ts";
 import { type Brightening, type TimeUntil, timeUntil } from "./brightening.ts";
@@ -14,8 +15,6 @@ import { fixedGivens } from "./fixedGivens.ts";
 import type { Margin, TippingMargins, TippingMarginsOptions } from "./margins.ts";
 import { endOf, stateOn } from "./statesOnDiagram.ts";
 import { traceBranches } from "./traceBranches.ts";
-
-const WITHIN: Range = [2.7, 2000];
 
 /**
  * The margins of a state along one given: the distance to the end of its branch in both directions, the temperature there, the
@@ -91,7 +90,7 @@ export function tippingMargins<N extends string>(
 
 function diagramAround<N extends string>(
   loop: Loop<N>,
-  { within = WITHIN, between, effort, tolerance }: TippingMarginsOptions<N>,
+  { within = USUAL_WITHIN, between, effort, tolerance }: TippingMarginsOptions<N>,
   { along, others }: { along: string; others: Readonly<Record<string, number>> },
 ): Diagram {
   const given = loop.givens.find((g) => g.name === along);

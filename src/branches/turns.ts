@@ -11,11 +11,11 @@ import { enclosedBalance } from "../states/enclosedBalance.ts";
 import { enumerateBalance } from "../states/provedSearch.ts";
 import { type FoldedLoop, foldedLoop } from "./foldedLoop.ts";
 import { type KinkPlace, leapAt, together } from "./kinkLeap.ts";
-import { kinksOf } from "./kinkNodes.ts";
 import { type KinkSides, kinkSides } from "./kinkSides.ts";
 import { planeReader } from "./planeReader.ts";
 import { signOnParts } from "./signOnParts.ts";
 import { middleOf } from "./stretch.ts";
+import { placedKinks } from "./withoutKinks.ts";
 
 /** A place at which the curve turns: λ passes zero there, or leaps through it. One for every second given that was asked for. */
 export interface Turn {
@@ -57,7 +57,7 @@ export const turnReader = /* @__PURE__ */ kept((loop, places): TurnReader | unde
   const [first, place] = places.split(" ").map(Number) as [number, number];
   const along = loop.givens[first]?.name as string;
   const found = foldedLoop(loop, along);
-  return found && kinksOf(loop).length > 0 ? readerOf(loop, { ...found, along, place }) : undefined;
+  return found && placedKinks(loop).length > 0 ? readerOf(loop, { ...found, along, place }) : undefined;
 });
 
 interface Found extends FoldedLoop {

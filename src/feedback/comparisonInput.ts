@@ -1,12 +1,11 @@
 // What is asked of a comparison with held couplings, checked.
 import { fail } from "../ground/errors.ts";
 import { checkKeys, checkRecord } from "../ground/names.ts";
-import { checkedNumber, checkedRange, type Range, showRange } from "../ground/range.ts";
+import { checkedNumber } from "../ground/range.ts";
 import type { Loop } from "../loop/types.ts";
 
 /** All 4096 choices of 12 couplings take a fraction of a second; a few more would take minutes. */
 export const MOST_HELD = 12;
-const WITHIN: Range = [2.7, 2000];
 
 /** Throws `missing` and `too-large`. */
 export function checkCount(count: number, loop: Loop): void {
@@ -32,19 +31,4 @@ export function changedGivens(loop: Loop, before: readonly number[], change: unk
       ? checkedNumber((change as Readonly<Record<string, unknown>>)[name], `change.${name}`, unit, within)
       : (before[i] as number),
   );
-}
-
-/** The range of temperature to look at, with the state in it. */
-export function rangeWith(range: Range | undefined, loop: Loop, temperature: number): Range {
-  const limits = loop.variables[0]?.within;
-  if (range === undefined) return [Math.min(WITHIN[0], temperature), Math.max(WITHIN[1], temperature)];
-  const [low, high] = checkedRange(range, "within", "K", limits);
-  if (!(low <= temperature && temperature <= high))
-    fail("out-of-range", {
-      path: "within",
-      value: showRange([low, high]),
-      allowed: `a range around the state, which is at ${temperature}`,
-      unit: "K",
-    });
-  return [low, high];
 }

@@ -1,29 +1,16 @@
-// The kinks behind the balance of a loop, and the balance on one side of them.
+// The balance of a loop on one side of its kinks, and which kinks have a place in temperature.
 import { coneOf } from "../graph/cone.ts";
 import { replaceNodes } from "../graph/replaceNodes.ts";
 import { inputsOf } from "../loop/inputs.ts";
 import type { Loop } from "../loop/types.ts";
-
-/** A kink: the difference of two arguments, and every min and max of the two. */
-export interface Kink {
-  readonly node: number;
-  readonly nodes: readonly number[];
-}
+import { type Kink, kinkNodes } from "../states/kinkNodes.ts";
 
 /** The kinks whose place is a temperature. */
-export function kinksOf(loop: Loop): Kink[] {
-  const { graph, net } = loop;
+export function placedKinks(loop: Loop): Kink[] {
   const inputs = inputsOf(loop);
-  const found = new Map<number, number[]>();
-  for (const id of coneOf(graph, [net], inputs)) {
-    if (graph.ops[id] !== "min" && graph.ops[id] !== "max") continue;
-    const args = graph.args[id] as readonly [number, number];
-    const node = graph.node("sub", [Math.min(...args), Math.max(...args)]);
-    found.set(node, [...(found.get(node) ?? []), id]);
-  }
-  return [...found]
-    .filter(([node]) => coneOf(graph, [node], inputs).includes(inputs[0] as number))
-    .map(([node, nodes]) => ({ node, nodes }));
+  return kinkNodes(loop).filter(({ node }) =>
+    coneOf(loop.graph, [node], inputs).includes(inputs[0] as number),
+  );
 }
 
 /** The balance as it is where the first arguments of some kinks are the lesser ones, or not, and as if it went on like that. */
